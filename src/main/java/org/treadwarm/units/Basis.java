@@ -1,0 +1,16 @@
+package org.treadwarm.units;
+
+import java.util.Locale;
+
+/** How a reading was come by. */
+public enum Basis {
+    TAPED,
+    DRAWING,
+    TOLD,
+    ASSUMED;
+
+    /** The word in the survey document. */
+    public String word() {
+        return name().toLowerCase(Locale.ROOT);
+    }
+}

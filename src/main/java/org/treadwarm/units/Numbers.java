@@ -1,0 +1,39 @@
+package org.treadwarm.units;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+
+/** Numbers as text for people: rounding belongs to a page, and this is the one place that rounds. */
+public final class Numbers {
+    private Numbers() {}
+
+    /** A number with a fixed count of decimals, halves away from zero, never "-0". */
+    public static String fixed(double number, int decimals) {
+        BigDecimal rounded = new BigDecimal(Double.toString(number)).setScale(decimals, RoundingMode.HALF_UP);
+        if (rounded.signum() == 0) {
+            rounded = BigDecimal.ZERO.setScale(decimals);
+        }
+        return rounded.toPlainString();
+    }
+
+    /** A number with a count of significant digits and no trailing zeros. */
+    public static String significant(double number, int digits) {
+        if (number == 0) {
+            return "0";
+        }
+        BigDecimal rounded =
+                new BigDecimal(Double.toString(number)).round(new MathContext(digits, RoundingMode.HALF_UP));
+        return rounded.stripTrailingZeros().toPlainString();
+    }
+
+    /** A whole number with a space between thousands. */
+    public static String grouped(double number) {
+        String digits = fixed(Math.abs(number), 0);
+        StringBuilder text = new StringBuilder(digits);
+        for (int i = digits.length() - 3; i > 0; i -= 3) {
+            text.insert(i, ' ');
+        }
+        return number < 0 && !digits.equals("0") ? "-" + text : text.toString();
+    }
+}
