@@ -45,7 +45,7 @@ public final class HeatedFloor {
         if (resistance == 0) {
             return flux(overtemperature);
         }
-        return fluxAtHeater(overtemperature / resistance, 0, 1 / resistance, resistance, flux(overtemperature));
+        return fluxAtHeater(overtemperature, 0, 1, resistance, flux(overtemperature));
     }
 
     /**

@@ -1,0 +1,332 @@
+package org.treadwarm.intake;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.Iterator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.stream.Collectors;
+import org.treadwarm.survey.Findings;
+import org.treadwarm.survey.Nearest;
+import org.treadwarm.survey.Pointer;
+import org.treadwarm.survey.Shape;
+import org.treadwarm.survey.Word;
+import org.treadwarm.units.Basis;
+import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Reading;
+import org.treadwarm.units.ReadingException;
+import org.treadwarm.units.ReadingParser;
+
+/**
+ * Binds a tree to records by their shapes. Whatever cannot be read is found and replaced by a blank, so that the rest is
+ * read and judged too; a survey with findings is never sized.
+ */
+final class Binder {
+    private static final Map<Shape.Key, Reading> FALLBACKS = new ConcurrentHashMap<>();
+
+    private final Findings findings;
+
+    Binder(Findings findings) {
+        this.findings = findings;
+    }
+
+    /** The record of a tree; null when the tree is no object at all. */
+    Record bind(JsonNode tree, Class<? extends Record> type, String pointer) {
+        if (!tree.isObject()) {
+            findings.add(pointer, Document.shown(tree), "an object is expected here", "a JSON object");
+            return null;
+        }
+        Shape shape = Shape.of(type);
+        refuseUnknownKeys(tree, shape, pointer);
+        Object[] values = new Object[shape.keys().size()];
+        int i = 0;
+        for (Shape.Key key : shape.keys().values()) {
+            values[i++] = value(tree.get(key.name()), key, Pointer.to(pointer, key.name()));
+        }
+        return shape.make(values);
+    }
+
+    private void refuseUnknownKeys(JsonNode tree, Shape shape, String pointer) {
+        for (Iterator<String> names = tree.fieldNames(); names.hasNext(); ) {
+            String name = names.next();
+            if (shape.keys().containsKey(name)) {
+                continue;
+            }
+            String at = Pointer.to(pointer, name);
+            if (shape.type() == org.treadwarm.survey.HeatedFloor.class && name.equals("parts")) {
+                findings.add(at, name, "\"parts\" is reserved for a later method", "leave it out");
+                continue;
+            }
+            String shown = name.length() <= 60 ? name : name.substring(0, 59) + "…";
+            String nearest = Nearest.to(name, shape.keys().keySet()).orElse("");
+            findings.add(
+                    at,
+                    shown,
+                    "\"" + shown + "\" is no key here; the nearest is \"" + nearest + "\"",
+                    String.join(", ", shape.keys().keySet()));
+        }
+    }
+
+    private Object value(JsonNode node, Shape.Key key, String pointer) {
+        if (node != null && node.isNull()) {
+            findings.add(pointer, "null", "null is no value", "leave the key out");
+            return blank(key);
+        }
+        return switch (key.many()) {
+            case ONE -> node == null ? absent(key, pointer) : one(node, key, pointer);
+            case OPTIONAL -> node == null ? Optional.empty() : Optional.ofNullable(known(one(node, key, pointer)));
+            case LIST -> node == null ? List.of() : list(node, key, pointer);
+            case MAP -> node == null ? Map.of() : map(node, key, pointer);
+        };
+    }
+
+    /** A blank stands for what could not be read; behind an Optional it is left out. */
+    private static Object known(Object value) {
+        return value instanceof Reading reading && Double.isNaN(reading.value()) ? null : value;
+    }
+
+    private Object absent(Shape.Key key, String pointer) {
+        if (!key.fallback().isEmpty()) {
+            return fallback(key);
+        }
+        findings.add(pointer, "nothing", "the " + key.label() + " is missing", allowed(key));
+        return blank(key);
+    }
+
+    private static Object fallback(Shape.Key key) {
+        return switch (key.holds()) {
+            case QUANTITY -> FALLBACKS.computeIfAbsent(key, Binder::fallbackReading);
+            case WORD -> word(key, key.fallback()).orElseThrow();
+            default -> key.fallback();
+        };
+    }
+
+    private static Reading fallbackReading(Shape.Key key) {
+        try {
+            return ReadingParser.parse(
+                    key.fallback(), key.quantity().orElseThrow().kind());
+        } catch (ReadingException e) {
+            throw new IllegalStateException("the fallback of " + key.name() + " is no reading", e);
+        }
+    }
+
+    private Object blank(Shape.Key key) {
+        return switch (key.many()) {
+            case OPTIONAL -> Optional.empty();
+            case LIST -> List.of();
+            case MAP -> Map.of();
+            case ONE -> blankOne(key);
+        };
+    }
+
+    private Object blankOne(Shape.Key key) {
+        return switch (key.holds()) {
+            case QUANTITY -> Reading.of(Double.NaN);
+            case TEXT -> "";
+            case WORD -> key.type().getEnumConstants()[0];
+            case OBJECT -> new Binder(new Findings()).bind(Document.mapper().createObjectNode(), record(key), "");
+        };
+    }
+
+    private Object one(JsonNode node, Shape.Key key, String pointer) {
+        return switch (key.holds()) {
+            case QUANTITY -> quantity(node, key.quantity().orElseThrow(), pointer);
+            case TEXT -> text(node, key, pointer);
+            case WORD -> word(node, key, pointer);
+            case OBJECT -> object(node, key, pointer);
+        };
+    }
+
+    private Object object(JsonNode node, Shape.Key key, String pointer) {
+        Record bound = bind(node, record(key), pointer);
+        return bound == null && key.many() == Shape.Many.ONE ? blankOne(key) : bound;
+    }
+
+    @SuppressWarnings("unchecked")
+    private static Class<? extends Record> record(Shape.Key key) {
+        return (Class<? extends Record>) key.type();
+    }
+
+    private List<Object> list(JsonNode node, Shape.Key key, String pointer) {
+        if (!node.isArray()) {
+            findings.add(pointer, Document.shown(node), "a list is expected here", "a JSON list");
+            return List.of();
+        }
+        List<Object> items = new ArrayList<>(node.size());
+        for (int i = 0; i < node.size(); i++) {
+            Object item = one(node.get(i), key, Pointer.to(pointer, i));
+            items.add(item == null ? blankOne(key) : item);
+        }
+        return Collections.unmodifiableList(items);
+    }
+
+    private Map<String, Object> map(JsonNode node, Shape.Key key, String pointer) {
+        if (!node.isObject()) {
+            findings.add(pointer, Document.shown(node), "an object of names is expected here", "a JSON object");
+            return Map.of();
+        }
+        Map<String, Object> items = new LinkedHashMap<>();
+        node.fields().forEachRemaining(entry -> {
+            String at = Pointer.to(pointer, entry.getKey());
+            String name = entry.getKey().strip();
+            if (name.isEmpty() || name.length() > 200) {
+                findings.add(
+                        at, Document.shown(entry.getValue()), "this name is empty or too long", "1 to 200 characters");
+                return;
+            }
+            Object item = one(entry.getValue(), key, at);
+            if (item != null && items.put(name, item) != null) {
+                findings.add(at, name, "this name stands twice", "each name once");
+            }
+        });
+        return Collections.unmodifiableMap(items);
+    }
+
+    private Object text(JsonNode node, Shape.Key key, String pointer) {
+        if (!node.isTextual()) {
+            findings.add(pointer, Document.shown(node), "a text is expected for the " + key.label(), allowed(key));
+            return "";
+        }
+        String text = node.textValue().strip();
+        int longest = key.wording().orElseThrow().longest();
+        boolean control = text.chars().anyMatch(c -> Character.isISOControl(c) && c != '\n' && c != '\r' && c != '\t');
+        if (text.length() > longest || control) {
+            findings.add(
+                    pointer,
+                    Document.shown(node),
+                    control ? "there are control characters in this text" : "this text is too long",
+                    "at most " + longest + " characters");
+            return "";
+        }
+        if (text.isEmpty()) {
+            if (key.many() == Shape.Many.OPTIONAL) {
+                return null;
+            }
+            findings.add(pointer, "an empty text", "the " + key.label() + " is empty", allowed(key));
+        }
+        return text;
+    }
+
+    private Object word(JsonNode node, Shape.Key key, String pointer) {
+        Optional<Word> word = node.isTextual() ? word(key, node.textValue().strip()) : Optional.empty();
+        if (word.isEmpty()) {
+            findings.add(
+                    pointer,
+                    Document.shown(node),
+                    "this is no " + key.label() + " that is known here",
+                    "one of " + words(key));
+            return key.many() == Shape.Many.OPTIONAL ? null : key.type().getEnumConstants()[0];
+        }
+        return word.get();
+    }
+
+    private static Optional<Word> word(Shape.Key key, String text) {
+        for (Object constant : key.type().getEnumConstants()) {
+            if (((Word) constant).word().equals(text)) {
+                return Optional.of((Word) constant);
+            }
+        }
+        return Optional.empty();
+    }
+
+    private static String words(Shape.Key key) {
+        return key.words().stream().map(Word::word).collect(Collectors.joining(", "));
+    }
+
+    private Reading quantity(JsonNode node, Quantity declared, String pointer) {
+        if (node.isObject()) {
+            return readingObject(node, declared, pointer);
+        }
+        if (node.isNumber()) {
+            Reading reading = new Reading(node.doubleValue(), 0, node.asText(), Optional.empty());
+            return inRange(reading, node, declared, pointer);
+        }
+        if (!node.isTextual()) {
+            findings.add(
+                    pointer,
+                    Document.shown(node),
+                    "the " + declared.label() + " is a number or a text with a unit",
+                    Ranges.words(declared));
+            return Reading.of(Double.NaN);
+        }
+        try {
+            return inRange(ReadingParser.parse(node.textValue(), declared.kind()), node, declared, pointer);
+        } catch (ReadingException e) {
+            findings.add(pointer, Document.shown(node), e.getMessage(), Ranges.words(declared));
+            return Reading.of(Double.NaN);
+        }
+    }
+
+    private Reading readingObject(JsonNode node, Quantity declared, String pointer) {
+        JsonNode reading = node.get("reading");
+        for (Iterator<String> names = node.fieldNames(); names.hasNext(); ) {
+            String name = names.next();
+            if (!List.of("reading", "basis", "name", "remark").contains(name)) {
+                String nearest =
+                        Nearest.to(name, List.of("reading", "basis", "remark")).orElseThrow();
+                findings.add(
+                        Pointer.to(pointer, name),
+                        name.length() <= 60 ? name : name.substring(0, 59) + "…",
+                        "this is no key of a reading; the nearest is \"" + nearest + "\"",
+                        "reading, basis, remark");
+            }
+        }
+        if (reading == null || reading.isContainerNode()) {
+            findings.add(
+                    pointer + "/reading",
+                    reading == null ? "nothing" : Document.shown(reading),
+                    "the " + declared.label() + " itself is missing",
+                    Ranges.words(declared));
+            return Reading.of(Double.NaN);
+        }
+        Reading value = quantity(reading, declared, pointer + "/reading");
+        JsonNode basis = node.get("basis");
+        if (basis == null) {
+            return value;
+        }
+        for (Basis known : Basis.values()) {
+            if (basis.isTextual() && known.word().equals(basis.textValue().strip())) {
+                return value.on(known);
+            }
+        }
+        findings.add(
+                pointer + "/basis",
+                Document.shown(basis),
+                "this is no basis of a reading",
+                "taped, drawing, told or assumed");
+        return value;
+    }
+
+    private Reading inRange(Reading reading, JsonNode node, Quantity declared, String pointer) {
+        if (!Ranges.possible(reading.value(), declared)) {
+            findings.add(
+                    pointer,
+                    Document.shown(node),
+                    "the " + declared.label() + " is outside what is possible",
+                    Ranges.words(declared));
+            return Reading.of(Double.NaN);
+        }
+        if (declared.whole() && reading.value() != Math.rint(reading.value())) {
+            findings.add(
+                    pointer,
+                    Document.shown(node),
+                    "the " + declared.label() + " is a whole number",
+                    Ranges.words(declared));
+            return Reading.of(Double.NaN);
+        }
+        return reading;
+    }
+
+    private static String allowed(Shape.Key key) {
+        return switch (key.holds()) {
+            case QUANTITY -> Ranges.words(key.quantity().orElseThrow());
+            case TEXT -> "1 to " + key.wording().orElseThrow().longest() + " characters";
+            case WORD -> "one of " + words(key);
+            case OBJECT -> "an object";
+        };
+    }
+}

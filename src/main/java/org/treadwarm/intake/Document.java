@@ -1,0 +1,113 @@
+package org.treadwarm.intake;
+
+import com.fasterxml.jackson.core.JsonFactory;
+import com.fasterxml.jackson.core.JsonParser;
+import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.core.JsonToken;
+import com.fasterxml.jackson.core.StreamReadConstraints;
+import com.fasterxml.jackson.core.StreamReadFeature;
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.databind.json.JsonMapper;
+import java.io.IOException;
+import java.util.List;
+import org.treadwarm.survey.Problem;
+
+/** JSON text as a tree, or what keeps it from being JSON. */
+public final class Document {
+    /** How deep objects and lists may lie in each other. */
+    public static final int DEEPEST = 40;
+
+    /** The longest single text. */
+    public static final int LONGEST_TEXT = 10_000;
+
+    private static final ObjectMapper MAPPER = JsonMapper.builder(JsonFactory.builder()
+                    .streamReadConstraints(StreamReadConstraints.builder()
+                            .maxNestingDepth(DEEPEST)
+                            .maxStringLength(LONGEST_TEXT)
+                            .maxNameLength(LONGEST_TEXT)
+                            .maxNumberLength(200)
+                            .build())
+                    .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
+                    .build())
+            .build();
+
+    private Document() {}
+
+    /** The mapper that reads and writes documents, with their limits. */
+    public static ObjectMapper mapper() {
+        return MAPPER;
+    }
+
+    /**
+     * Reads JSON.
+     *
+     * @throws NotJsonException when the text is no JSON, holds a key twice, or is nested too deep
+     */
+    public static JsonNode read(byte[] json) throws NotJsonException {
+        try (JsonParser parser = MAPPER.createParser(json)) {
+            return read(parser);
+        } catch (IOException e) {
+            throw new NotJsonException(new Problem("", "the text", "this could not be read", "JSON in UTF-8"));
+        }
+    }
+
+    private static JsonNode read(JsonParser parser) throws NotJsonException, IOException {
+        try {
+            JsonNode tree = MAPPER.readTree(parser);
+            if (tree == null || tree.isMissingNode()) {
+                throw new NotJsonException(new Problem("", "nothing", "there is no document", "a JSON object"));
+            }
+            if (parser.nextToken() != null) {
+                throw new NotJsonException(
+                        new Problem("", "more text", "something follows the document", "one JSON object"));
+            }
+            return tree;
+        } catch (JsonProcessingException e) {
+            throw new NotJsonException(problem(parser, e));
+        }
+    }
+
+    private static Problem problem(JsonParser parser, JsonProcessingException e) {
+        String pointer = parser.getParsingContext().pathAsPointer().toString();
+        String original = e.getOriginalMessage() == null ? "" : e.getOriginalMessage();
+        String where = e.getLocation() == null
+                ? ""
+                : " (line " + e.getLocation().getLineNr() + ", column "
+                        + e.getLocation().getColumnNr() + ")";
+        if (original.startsWith("Duplicate")) {
+            return new Problem(pointer, "a key twice", "this key stands twice in one object" + where, "each key once");
+        }
+        if (original.contains("nesting depth")) {
+            return new Problem(
+                    pointer,
+                    "deep nesting",
+                    "the document is nested too deep" + where,
+                    "at most " + DEEPEST + " levels");
+        }
+        if (original.contains("exceeds the maximum")) {
+            return new Problem(
+                    pointer,
+                    "a very long text or number",
+                    "this text or number is too long" + where,
+                    "at most " + LONGEST_TEXT + " characters for a text and 200 for a number");
+        }
+        JsonToken token = parser.currentToken();
+        return new Problem(
+                pointer,
+                token == null ? "the text" : "the text after " + token.name().toLowerCase(java.util.Locale.ROOT),
+                "this is not JSON" + where,
+                "JSON (RFC 8259)");
+    }
+
+    /** What was given, as text for a message: shortened to 200 characters. */
+    static String shown(JsonNode node) {
+        String text = node.isTextual() ? node.textValue() : node.isContainerNode() ? container(node) : node.toString();
+        return text.length() <= 200 ? text : text.substring(0, 199) + "…";
+    }
+
+    private static String container(JsonNode node) {
+        List<String> words = node.isObject() ? List.of("an object with ", " keys") : List.of("a list of ", "");
+        return words.get(0) + node.size() + words.get(1);
+    }
+}

@@ -1,0 +1,49 @@
+package org.treadwarm.intake;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.util.List;
+import org.treadwarm.survey.Assembly;
+import org.treadwarm.survey.Findings;
+import org.treadwarm.survey.Problem;
+import org.treadwarm.survey.Rules;
+import org.treadwarm.survey.Survey;
+
+/** The door for documents: a tree in, a survey out, or every problem it has. */
+public final class Intake {
+    private Intake() {}
+
+    /** What became of a document. */
+    public sealed interface Outcome<T> {
+        /** It can be sized. */
+        record Accepted<T>(T value) implements Outcome<T> {}
+
+        /** It has problems: all of them, in the order of the document. */
+        record Refused<T>(List<Problem> problems) implements Outcome<T> {
+            public Refused {
+                problems = List.copyOf(problems);
+            }
+        }
+    }
+
+    /** Reads a survey. */
+    public static Outcome<Survey> survey(JsonNode tree) {
+        Findings findings = new Findings();
+        Survey survey = (Survey) new Binder(findings).bind(tree, Survey.class, "");
+        if (survey != null) {
+            Rules.check(survey, findings);
+        }
+        return findings.isEmpty() ? new Outcome.Accepted<>(survey) : new Outcome.Refused<>(findings.all());
+    }
+
+    /** Reads one assembly together with the conditions to evaluate it at. */
+    public static Outcome<AssemblyQuestion> assembly(JsonNode tree) {
+        Findings findings = new Findings();
+        AssemblyQuestion question = (AssemblyQuestion) new Binder(findings).bind(tree, AssemblyQuestion.class, "");
+        if (question != null) {
+            Assembly assembly = question.assembly();
+            Rules.checkAssembly(assembly, findings);
+            question.check(findings);
+        }
+        return findings.isEmpty() ? new Outcome.Accepted<>(question) : new Outcome.Refused<>(findings.all());
+    }
+}

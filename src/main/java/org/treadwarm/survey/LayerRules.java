@@ -1,0 +1,181 @@
+package org.treadwarm.survey;
+
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
+import org.treadwarm.physics.envelope.CombinedMethod;
+import org.treadwarm.tables.Material;
+import org.treadwarm.tables.Materials;
+import org.treadwarm.units.Reading;
+
+/** What must hold within an assembly and its layers. */
+final class LayerRules {
+    private static final String WAYS =
+            "one of: resistance; thickness with conductivity; thickness with material; airGap";
+
+    private final Findings findings;
+
+    LayerRules(Findings findings) {
+        this.findings = findings;
+    }
+
+    void assembly(String pointer, Assembly assembly) {
+        boolean judged = findings.clean(pointer + "/layers") && findings.clean(pointer + "/uValue");
+        if (assembly.uValue().isPresent() && !assembly.layers().isEmpty()) {
+            findings.add(
+                    pointer,
+                    "layers and uValue",
+                    "an assembly is known by its layers or by its U-value",
+                    "exactly one of layers and uValue");
+        } else if (assembly.uValue().isEmpty() && assembly.layers().isEmpty() && judged) {
+            findings.add(
+                    pointer,
+                    "neither layers nor uValue",
+                    "an assembly needs its layers or its U-value",
+                    "exactly one of layers and uValue");
+        }
+        layers(pointer + "/layers", assembly.layers());
+    }
+
+    void layers(String pointer, List<Layer> layers) {
+        Map<String, Double> shares = new HashMap<>();
+        Set<String> frames = new HashSet<>();
+        for (int i = 0; i < layers.size(); i++) {
+            Layer layer = layers.get(i);
+            String at = pointer + "/" + i;
+            layer(at, layer);
+            if (layer.bridging().isPresent()) {
+                Bridging bridging = layer.bridging().get();
+                bridging(at, layer, bridging);
+                frames.add(bridging.frame().map(name -> "=" + name).orElse("#" + i));
+                oneShare(at + "/bridging/share", bridging, shares);
+            }
+        }
+        if (frames.size() > CombinedMethod.MOST_FRAMES) {
+            findings.add(
+                    pointer,
+                    frames.size() + " frames",
+                    "too many frames cross each other here",
+                    "at most " + CombinedMethod.MOST_FRAMES + " that are not in register");
+        }
+    }
+
+    private void oneShare(String pointer, Bridging bridging, Map<String, Double> shares) {
+        if (bridging.frame().isEmpty() || !findings.clean(pointer)) {
+            return;
+        }
+        double share = bridging.share().value();
+        Double other = shares.putIfAbsent(bridging.frame().get(), share);
+        if (other != null && other != share) {
+            findings.add(
+                    pointer,
+                    bridging.share().typed(),
+                    "layers of the frame \"" + bridging.frame().get()
+                            + "\" are crossed by the same members, so they have one share",
+                    "the same share, or another frame");
+        }
+    }
+
+    private void layer(String pointer, Layer layer) {
+        boolean judged = findings.clean(pointer + "/resistance")
+                && findings.clean(pointer + "/thickness")
+                && findings.clean(pointer + "/conductivity")
+                && findings.clean(pointer + "/material")
+                && findings.clean(pointer + "/airGap")
+                && findings.clean(pointer + "/airGap/thickness");
+        if (!judged) {
+            return;
+        }
+        boolean resistance = layer.resistance().isPresent();
+        boolean conductivity = layer.conductivity().isPresent();
+        if (layer.airGap().isPresent()) {
+            airGap(pointer, layer, layer.airGap().get());
+        } else if (resistance && conductivity) {
+            findings.add(pointer, "resistance and conductivity", "a layer is described in two ways", WAYS);
+        } else if (!resistance && layer.thickness().isEmpty()) {
+            if (conductivity || layer.material().isPresent()) {
+                findings.add(
+                        pointer + "/thickness",
+                        "nothing",
+                        "the thickness is missing",
+                        "0.01 mm to 10 m, or a resistance");
+            } else {
+                findings.add(pointer, "none of them", "nothing says how well this layer insulates", WAYS);
+            }
+        } else if (!resistance && !conductivity) {
+            material(pointer, layer);
+        }
+    }
+
+    private void material(String pointer, Layer layer) {
+        if (layer.material().isEmpty()) {
+            findings.add(
+                    pointer, "a thickness alone", "with a thickness, the conductivity or the material is needed", WAYS);
+            return;
+        }
+        String name = layer.material().get();
+        Optional<Material> row = Materials.find(name);
+        if (row.isEmpty()) {
+            String nearest = Nearest.to(
+                            name, Materials.all().stream().map(Material::name).collect(Collectors.toList()))
+                    .map(known -> "; did you mean \"" + known + "\"?")
+                    .orElse("");
+            findings.add(
+                    pointer + "/material",
+                    name,
+                    "the materials table has no \"" + name + "\"" + nearest,
+                    "a name from the table, or a conductivity beside it");
+        } else if (row.get().conductivity().isEmpty()) {
+            findings.add(
+                    pointer + "/conductivity",
+                    "nothing",
+                    "the table gives only a range for \"" + name + "\"",
+                    "a conductivity from "
+                            + row.get().conductivityFrom().orElseThrow() + " to "
+                            + row.get().conductivityTo().orElseThrow() + " W/(m.K), by the maker's sheet");
+        }
+    }
+
+    private void airGap(String pointer, Layer layer, AirGap gap) {
+        if (layer.resistance().isPresent()
+                || layer.conductivity().isPresent()
+                || layer.thickness().isPresent()
+                || layer.material().isPresent()) {
+            findings.add(pointer, "airGap and another way", "a layer is described in two ways", WAYS);
+        }
+        List<Reading> emissivities = gap.emissivities();
+        if (!emissivities.isEmpty() && emissivities.size() != 2) {
+            findings.add(
+                    pointer + "/airGap/emissivities",
+                    emissivities.size() + " numbers",
+                    "an air gap has two faces",
+                    "two numbers, or leave them out for 0.9 and 0.9");
+        }
+    }
+
+    private void bridging(String pointer, Layer layer, Bridging bridging) {
+        String at = pointer + "/bridging";
+        if (!findings.clean(at + "/conductivity") || !findings.clean(at + "/resistance")) {
+            return;
+        }
+        if (bridging.conductivity().isPresent() == bridging.resistance().isPresent()) {
+            findings.add(
+                    at,
+                    bridging.conductivity().isPresent() ? "conductivity and resistance" : "neither of them",
+                    "framing is known by its conductivity or by its resistance",
+                    "exactly one of conductivity and resistance");
+        } else if (bridging.conductivity().isPresent()
+                && layer.anyThickness().isEmpty()
+                && findings.clean(pointer + "/thickness")) {
+            findings.add(
+                    at + "/conductivity",
+                    bridging.conductivity().get().typed(),
+                    "the layer has no thickness, so the framing's conductivity does not give its resistance",
+                    "a thickness for the layer, or a resistance for the framing");
+        }
+    }
+}

@@ -1,0 +1,177 @@
+package org.treadwarm.survey;
+
+import java.lang.reflect.Constructor;
+import java.lang.reflect.InvocationTargetException;
+import java.lang.reflect.ParameterizedType;
+import java.lang.reflect.RecordComponent;
+import java.lang.reflect.Type;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Reading;
+import org.treadwarm.units.Wording;
+
+/**
+ * The keys of one kind of object in the document, read once from its record: what each holds, whether it is required, and
+ * its one declaration. Reading the document, walking it, the API's schema and the forms all go by this.
+ */
+public final class Shape {
+    private static final Map<Class<?>, Shape> SHAPES = new ConcurrentHashMap<>();
+
+    private final Class<? extends Record> type;
+    private final Map<String, Key> keys;
+    private final Constructor<?> constructor;
+
+    /** What a key holds. */
+    public enum Holds {
+        QUANTITY,
+        TEXT,
+        WORD,
+        OBJECT
+    }
+
+    /** How many a key holds. */
+    public enum Many {
+        ONE,
+        OPTIONAL,
+        LIST,
+        MAP
+    }
+
+    /**
+     * One key of the object.
+     *
+     * @param name the key in the document
+     * @param holds what it holds
+     * @param many how many of it
+     * @param type Reading, String, the enum of words, or the record of the object
+     * @param quantity its declaration, when it holds a quantity
+     * @param wording its words, when it holds anything else
+     */
+    public record Key(
+            String name,
+            Holds holds,
+            Many many,
+            Class<?> type,
+            Optional<Quantity> quantity,
+            Optional<Wording> wording,
+            RecordComponent component) {
+        /** Whether the document must have it. */
+        public boolean required() {
+            return many == Many.ONE && fallback().isEmpty();
+        }
+
+        /** The text that stands when it is left out; empty for none. */
+        public String fallback() {
+            return quantity.map(Quantity::fallback)
+                    .or(() -> wording.map(Wording::fallback))
+                    .orElse("");
+        }
+
+        /** Its label. */
+        public String label() {
+            return quantity.map(Quantity::label)
+                    .or(() -> wording.map(Wording::label))
+                    .orElse(name);
+        }
+
+        /** Its sentence of help; empty for none. */
+        public String help() {
+            return quantity.map(Quantity::help)
+                    .or(() -> wording.map(Wording::help))
+                    .orElse("");
+        }
+
+        /** What a record holds under this key. */
+        public Object in(Record owner) {
+            try {
+                return component.getAccessor().invoke(owner);
+            } catch (IllegalAccessException | InvocationTargetException e) {
+                throw new IllegalStateException("cannot read " + name, e);
+            }
+        }
+
+        /** The words that may stand here, when it holds a word. */
+        public List<Word> words() {
+            List<Word> words = new ArrayList<>();
+            for (Object constant : type.getEnumConstants()) {
+                words.add((Word) constant);
+            }
+            return words;
+        }
+    }
+
+    private Shape(Class<? extends Record> type) {
+        this.type = type;
+        this.keys = new LinkedHashMap<>();
+        RecordComponent[] components = type.getRecordComponents();
+        Class<?>[] parameters = new Class<?>[components.length];
+        for (int i = 0; i < components.length; i++) {
+            Key key = key(components[i]);
+            keys.put(key.name(), key);
+            parameters[i] = components[i].getType();
+        }
+        try {
+            this.constructor = type.getDeclaredConstructor(parameters);
+        } catch (NoSuchMethodException e) {
+            throw new IllegalStateException(e);
+        }
+    }
+
+    /** The shape of a record. */
+    public static Shape of(Class<? extends Record> type) {
+        Shape known = SHAPES.get(type);
+        if (known == null) {
+            known = new Shape(type);
+            SHAPES.put(type, known);
+        }
+        return known;
+    }
+
+    /** The record this is the shape of. */
+    public Class<? extends Record> type() {
+        return type;
+    }
+
+    /** Its keys by name, in the order of the record. */
+    public Map<String, Key> keys() {
+        return keys;
+    }
+
+    /** A record of this shape from the values of its keys, in order. */
+    public Record make(Object[] values) {
+        try {
+            return (Record) constructor.newInstance(values);
+        } catch (InstantiationException | IllegalAccessException | InvocationTargetException e) {
+            throw new IllegalStateException("cannot make " + type.getSimpleName(), e);
+        }
+    }
+
+    private static Key key(RecordComponent component) {
+        Class<?> outer = component.getType();
+        Many many = outer == Optional.class
+                ? Many.OPTIONAL
+                : outer == List.class ? Many.LIST : outer == Map.class ? Many.MAP : Many.ONE;
+        Class<?> held = many == Many.ONE ? outer : lastArgument(component.getGenericType());
+        Holds holds = held == Reading.class
+                ? Holds.QUANTITY
+                : held == String.class ? Holds.TEXT : held.isEnum() ? Holds.WORD : Holds.OBJECT;
+        return new Key(
+                component.getName(),
+                holds,
+                many,
+                held,
+                Optional.ofNullable(component.getAnnotation(Quantity.class)),
+                Optional.ofNullable(component.getAnnotation(Wording.class)),
+                component);
+    }
+
+    private static Class<?> lastArgument(Type type) {
+        Type[] arguments = ((ParameterizedType) type).getActualTypeArguments();
+        return (Class<?>) arguments[arguments.length - 1];
+    }
+}
