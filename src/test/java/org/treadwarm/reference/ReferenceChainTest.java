@@ -48,12 +48,20 @@ class ReferenceChainTest {
         assertThat(Fields.text(floor, "verdict")).isEqualTo(margin >= 0 ? "carries" : "carries with supplement");
         double lowest = Double.POSITIVE_INFINITY;
         int governing = 0;
+        String name = "";
         for (JsonNode limit : floor.get("limits")) {
             lowest = Math.min(lowest, Fields.number(limit, "maximumFlux"));
-            governing += limit.get("governs").booleanValue() ? 1 : 0;
+            if (limit.get("governs").booleanValue()) {
+                governing++;
+                name = Fields.text(limit, "name");
+            }
         }
         assertThat(Fields.number(floor, "carryingFlux")).isEqualTo(lowest);
         assertThat(governing).isEqualTo(1);
+        if (name.equals("heater density") && lowest > 0) {
+            double power = Fields.number(floor.get("atCarryingFlux"), "heaterPower");
+            assertThat(power).isLessThanOrEqualTo(Fields.number(floor, "installedPower") + 1e-6);
+        }
         assertThat(floor.has("holdsDownTo")).isNotEqualTo(floor.has("holdsDownToReason"));
     }
 
