@@ -22,7 +22,27 @@ public record Opening(
                 plausibleTo = 30,
                 label = "area of one piece",
                 help = "The hole in the wall, frame included; 1.20 x 1.40 is read as a product.")
-        Reading area,
+        Optional<Reading> area,
+
+        @Quantity(
+                kind = QuantityKind.LENGTH,
+                min = 0,
+                max = 1000,
+                moreThanMin = true,
+                plausibleFrom = 0.1,
+                plausibleTo = 10,
+                label = "width of one piece")
+        Optional<Reading> width,
+
+        @Quantity(
+                kind = QuantityKind.LENGTH,
+                min = 0,
+                max = 1000,
+                moreThanMin = true,
+                plausibleFrom = 0.1,
+                plausibleTo = 6,
+                label = "height of one piece")
+        Optional<Reading> height,
 
         @Quantity(
                 kind = QuantityKind.RATIO,
@@ -40,6 +60,6 @@ public record Opening(
 
     /** Area of all its pieces, m². */
     public double totalArea() {
-        return area.value() * count.value();
+        return Extent.area(area, width, height) * count.value();
     }
 }

@@ -7,6 +7,8 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.regex.Pattern;
+import org.treadwarm.units.Numbers;
+import org.treadwarm.units.Reading;
 
 /** What must hold between the parts of a survey. Parts that have a problem of their own already are not judged again. */
 public final class Rules {
@@ -200,11 +202,12 @@ public final class Rules {
 
     private void surface(String pointer, String owner, boolean isRoom, Surface surface, boolean hasFloorArea) {
         assembly(pointer + "/assembly", surface.assembly());
-        area(pointer, surface);
+        area(pointer, surface.area(), surface.width(), surface.height());
         boolean ground = surface.to().equals(Survey.GROUND);
         if (!ground) {
             otherSide(pointer + "/to", surface.to(), owner, isRoom);
             surface.ground()
+                    .filter(given -> findings.clean(pointer + "/to"))
                     .ifPresent(given -> findings.add(
                             pointer + "/ground",
                             "ground",
@@ -217,6 +220,7 @@ public final class Rules {
         for (int i = 0; i < surface.openings().size(); i++) {
             Opening opening = surface.openings().get(i);
             assembly(pointer + "/openings/" + i + "/assembly", opening.assembly());
+            area(pointer + "/openings/" + i, opening.area(), opening.width(), opening.height());
             cut += opening.totalArea();
         }
         if (cut > surface.grossArea() * (1 + 1e-12) && surface.grossArea() > 0) {
@@ -236,28 +240,25 @@ public final class Rules {
     }
 
     private static String sensible(double area) {
-        return org.treadwarm.units.Numbers.significant(area, 6);
+        return Numbers.significant(area, 6);
     }
 
-    private void area(String pointer, Surface surface) {
-        boolean sides = surface.width().isPresent() || surface.height().isPresent();
-        if (surface.area().isPresent() && sides) {
+    private void area(String pointer, Optional<Reading> area, Optional<Reading> width, Optional<Reading> height) {
+        boolean sides = width.isPresent() || height.isPresent();
+        if (area.isPresent() && sides) {
             findings.add(
-                    pointer + "/area",
-                    surface.area().get().typed(),
-                    "area and width with height are both given",
-                    "one of them");
-        } else if (surface.area().isEmpty()) {
+                    pointer + "/area", area.get().typed(), "area and width with height are both given", "one of them");
+        } else if (area.isEmpty()) {
             if (!sides) {
                 missing(pointer + "/area", "the area is missing", "an area, or a width and a height");
-            } else if (surface.width().isEmpty()) {
+            } else if (width.isEmpty()) {
                 missing(pointer + "/width", "with a height, the width is needed too", "a width, or an area instead");
-            } else if (surface.height().isEmpty()) {
+            } else if (height.isEmpty()) {
                 missing(pointer + "/height", "with a width, the height is needed too", "a height, or an area instead");
-            } else if (surface.grossArea() > 10000) {
+            } else if (Extent.area(area, width, height) > 10000) {
                 findings.add(
                         pointer + "/width",
-                        surface.width().get().typed(),
+                        width.get().typed(),
                         "width times height is more than 10 000 m2",
                         "at most 10 000 m2");
             }

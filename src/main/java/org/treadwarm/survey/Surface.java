@@ -57,8 +57,6 @@ public record Surface(
 
     /** Gross area in m². */
     public double grossArea() {
-        return area.map(Reading::value)
-                .orElseGet(() -> width.map(Reading::value).orElse(0.0)
-                        * height.map(Reading::value).orElse(0.0));
+        return Extent.area(area, width, height);
     }
 }

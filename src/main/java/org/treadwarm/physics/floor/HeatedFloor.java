@@ -25,6 +25,11 @@ public final class HeatedFloor {
         return flux > 0 ? Math.pow(flux / COEFFICIENT, 1 / EXPONENT) : 0;
     }
 
+    /** How fast the overtemperature rises with the flux, K per W/m²; for a flux of more than 0. */
+    public static double overtemperatureSlope(double flux) {
+        return overtemperature(flux) / (EXPONENT * flux);
+    }
+
     /** Temperature at a depth below the surface: theta_F + q R, with R from the surface down to there, m²·K/W. */
     public static double temperatureBelow(double room, double flux, double resistance) {
         return room + overtemperature(flux) + flux * resistance;

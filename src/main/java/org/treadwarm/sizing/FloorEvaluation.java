@@ -1,0 +1,277 @@
+package org.treadwarm.sizing;
+
+import org.treadwarm.physics.floor.HeatedFloor;
+import org.treadwarm.sizing.Plan.EdgePlan;
+import org.treadwarm.sizing.Plan.FloorPlan;
+import org.treadwarm.sizing.Plan.LayerLimit;
+import org.treadwarm.survey.Zone;
+import org.treadwarm.tables.Films;
+
+/**
+ * One heated floor as plain numbers. The heater's loss, downward and at the edge, is a linear function of the heater's
+ * temperature and of the outdoor temperature: loss = K theta_h - (c + w theta_e), per m² of heated area.
+ */
+final class FloorEvaluation {
+    /** Where the search for the lowest outdoor temperature ends, degrees Celsius: the lowest a survey may state. */
+    static final double COLDEST = -60;
+
+    private static final double INDOOR_FILM = Films.inside("down");
+    private static final double OUTDOOR_FILM = Films.outside("down");
+    private static final double GROUND_FILM = Films.outside("down");
+
+    /** Limits beside those of the layers: zone, covering, heater. */
+    private static final int OTHER_LIMITS = 3;
+
+    final FloorPlan plan;
+    final double[] limits;
+    final double[] toLayer;
+    double area;
+    double room;
+    double resistanceAbove;
+    double resistanceBelow;
+    double downCoefficient;
+    double downConstant;
+    double downSlope;
+    double voidTemperature;
+    double edgeCoefficient;
+    double edgeConstant;
+    double edgeSlope;
+    double requiredHeat;
+    double requiredFlux;
+    double carryingFlux;
+    int governing;
+    double holdsDownTo;
+
+    private final Evaluation whole;
+    private final Zone zone;
+
+    FloorEvaluation(Evaluation whole, FloorPlan plan) {
+        this.whole = whole;
+        this.plan = plan;
+        this.zone = whole.plan
+                .survey
+                .rooms()
+                .get(plan.room())
+                .heatedFloor()
+                .orElseThrow()
+                .zone();
+        this.limits = new double[plan.layerLimits().size() + OTHER_LIMITS];
+        this.toLayer = new double[plan.layerLimits().size()];
+    }
+
+    void evaluate() {
+        area = whole.in[plan.area()];
+        room = whole.constant[plan.room()];
+        resistanceAbove = whole.resistance(plan.above(), 0);
+        down();
+        edge();
+        requiredHeat = requiredHeat(whole.outdoor);
+        requiredFlux = requiredHeat / area;
+        limits();
+        holdsDownTo = lowestOutdoor();
+    }
+
+    private void down() {
+        if (plan.ground() == Stack.NONE) {
+            double film = plan.other() == whole.plan.outdoors ? OUTDOOR_FILM : INDOOR_FILM;
+            double total = whole.resistance(plan.below(), film);
+            resistanceBelow = total - film;
+            downCoefficient = 1 / total;
+            downConstant = downCoefficient * whole.constantSeenFrom(plan.room(), plan.other());
+            downSlope = downCoefficient * whole.slopeSeenFrom(plan.other());
+            return;
+        }
+        resistanceBelow = whole.resistance(plan.below(), 0);
+        double annualMean = whole.in[whole.plan.site.annualMean()];
+        if (!whole.plan.grounds.get(plan.ground()).suspended()) {
+            downCoefficient = whole.seasonal() * whole.slab(plan.ground(), resistanceBelow + GROUND_FILM);
+            downConstant = downCoefficient * annualMean;
+            downSlope = 0;
+            return;
+        }
+        whole.suspended(plan.ground());
+        double floor = 1 / (resistanceBelow + INDOOR_FILM);
+        double soil = whole.seasonal() * whole.groundToSoil[plan.ground()];
+        double outdoors = whole.groundToOutdoors[plan.ground()];
+        double share = floor / (floor + soil + outdoors);
+        downCoefficient = share * (soil + outdoors);
+        downConstant = share * soil * annualMean;
+        downSlope = share * outdoors;
+    }
+
+    private void edge() {
+        edgeCoefficient = 0;
+        edgeConstant = 0;
+        edgeSlope = 0;
+        for (int i = 0; i < plan.edges().size(); i++) {
+            EdgePlan edge = plan.edges().get(i);
+            double perArea = whole.in[edge.psi()] * whole.in[edge.length()] / area;
+            edgeCoefficient += perArea;
+            edgeConstant += perArea * whole.constantSeenFrom(plan.room(), edge.other());
+            edgeSlope += perArea * whole.slopeSeenFrom(edge.other());
+        }
+    }
+
+    /** Heat that the floor must give at an outdoor temperature, W. */
+    double requiredHeat(double outdoor) {
+        double allowance = whole.in[whole.plan.roomIndexes[plan.room()].allowance()];
+        return Math.max(0, whole.roomConstant[plan.room()] + whole.roomSlope[plan.room()] * outdoor) * (1 + allowance);
+    }
+
+    double surfaceTemperature(double flux) {
+        return room + HeatedFloor.overtemperature(flux);
+    }
+
+    double heaterTemperature(double flux) {
+        return HeatedFloor.temperatureBelow(room, flux, resistanceAbove);
+    }
+
+    double downwardFlux(double heater, double outdoor) {
+        return downCoefficient * heater - downConstant - downSlope * outdoor;
+    }
+
+    double edgeFlux(double heater, double outdoor) {
+        return edgeCoefficient * heater - edgeConstant - edgeSlope * outdoor;
+    }
+
+    double heaterFlux(double flux, double outdoor) {
+        double heater = heaterTemperature(flux);
+        return flux + downwardFlux(heater, outdoor) + edgeFlux(heater, outdoor);
+    }
+
+    double zoneMaximum() {
+        return switch (zone) {
+            case OCCUPIED -> Limits.OCCUPIED;
+            case PERIPHERAL -> Limits.PERIPHERAL;
+            case BATHROOM -> room + Limits.BATHROOM_RISE;
+        };
+    }
+
+    private void limits() {
+        int last = limits.length - 1;
+        limits[0] = HeatedFloor.flux(zoneMaximum() - room);
+        limits[1] = plan.maximumSurface() == Stack.NONE
+                ? Double.POSITIVE_INFINITY
+                : HeatedFloor.flux(whole.in[plan.maximumSurface()] - room);
+        double down = 0;
+        int next = 0;
+        for (int i = 0; i < toLayer.length; i++) {
+            LayerLimit limit = plan.layerLimits().get(i);
+            Stack above = whole.plan.stacks.get(plan.above());
+            while (next <= limit.layer()) {
+                down += whole.layerResistance[above.first + next++];
+            }
+            toLayer[i] = down;
+            limits[2 + i] = HeatedFloor.fluxAtTemperature(whole.in[limit.maximum()], room, down);
+        }
+        limits[last] = heaterLimit(whole.outdoor);
+        governing = 0;
+        for (int i = 1; i <= last; i++) {
+            if (limits[i] < limits[governing]) {
+                governing = i;
+            }
+        }
+        carryingFlux = limits[governing];
+    }
+
+    private double heaterLimit(double outdoor) {
+        if (plan.density() == Stack.NONE) {
+            return Double.POSITIVE_INFINITY;
+        }
+        double atRoom = downwardFlux(room, outdoor) + edgeFlux(room, outdoor);
+        return HeatedFloor.fluxOfDensity(
+                whole.in[plan.density()], room, resistanceAbove, downCoefficient + edgeCoefficient, atRoom);
+    }
+
+    /** The lowest of the limits that do not depend on the outdoor temperature. */
+    private double fixedLimit() {
+        double lowest = plan.density() == Stack.NONE ? Double.POSITIVE_INFINITY : whole.in[plan.density()];
+        for (int i = 0; i < limits.length - 1; i++) {
+            lowest = Math.min(lowest, limits[i]);
+        }
+        return lowest;
+    }
+
+    private boolean carriesAt(double outdoor) {
+        double required = requiredHeat(outdoor) / area;
+        return required == 0
+                || required <= fixedLimit() && (plan.density() == Stack.NONE || excessDensity(outdoor) <= 0);
+    }
+
+    /**
+     * The root of carrying less required flux over the outdoor temperature; minus infinity when the floor still carries at
+     * {@value #COLDEST} °C, plus infinity when it does not even at its own room temperature outdoors.
+     */
+    private double lowestOutdoor() {
+        if (carriesAt(COLDEST)) {
+            return Double.NEGATIVE_INFINITY;
+        }
+        if (!carriesAt(room)) {
+            return Double.POSITIVE_INFINITY;
+        }
+        double slope = whole.roomSlope[plan.room()];
+        if (slope >= 0) {
+            return bisect();
+        }
+        double allowance = whole.in[whole.plan.roomIndexes[plan.room()].allowance()];
+        double heat = fixedLimit() * area / (1 + allowance);
+        double byFixed = Math.max(COLDEST, (heat - whole.roomConstant[plan.room()]) / slope);
+        if (plan.density() == Stack.NONE || excessDensity(byFixed) <= 0) {
+            return byFixed;
+        }
+        double unneeded = Math.min(room, -whole.roomConstant[plan.room()] / slope);
+        return excessDensity(unneeded) > 0
+                ? unneeded
+                : rootOfDensity(byFixed, unneeded, slope * (1 + allowance) / area);
+    }
+
+    /** What the heater would have to make above its density to give the required flux, W/m². */
+    private double excessDensity(double outdoor) {
+        return heaterFlux(requiredHeat(outdoor) / area, outdoor) - whole.in[plan.density()];
+    }
+
+    private double rootOfDensity(double from, double to, double fluxSlope) {
+        double low = from;
+        double high = to;
+        double outdoor = from;
+        for (int step = 0; step < 200; step++) {
+            double excess = excessDensity(outdoor);
+            if (excess > 0) {
+                low = outdoor;
+            } else {
+                high = outdoor;
+            }
+            double flux = requiredHeat(outdoor) / area;
+            double heaterSlope = flux > 0 ? fluxSlope * (HeatedFloor.overtemperatureSlope(flux) + resistanceAbove) : 0;
+            double slope = fluxSlope + (downCoefficient + edgeCoefficient) * heaterSlope - downSlope - edgeSlope;
+            double next = outdoor - excess / slope;
+            if (Math.abs(next - outdoor) <= 1e-14 * (1 + Math.abs(outdoor))) {
+                return next;
+            }
+            if (!(next > low && next < high)) {
+                next = (low + high) / 2;
+                if (next == low || next == high) {
+                    return next;
+                }
+            }
+            outdoor = next;
+        }
+        return outdoor;
+    }
+
+    private double bisect() {
+        double low = COLDEST;
+        double high = room;
+        while (true) {
+            double middle = (low + high) / 2;
+            if (middle == low || middle == high) {
+                return high;
+            }
+            if (carriesAt(middle)) {
+                high = middle;
+            } else {
+                low = middle;
+            }
+        }
+    }
+}

@@ -1,0 +1,25 @@
+package org.treadwarm.sizing;
+
+/** Names, sources and numbers of what limits a heated floor. */
+final class Limits {
+    /** Highest surface temperature of the occupied area, degrees Celsius (EN 1264-2:2008+A1:2012, 4; read in trade manuals). */
+    static final double OCCUPIED = 29;
+
+    /** Highest surface temperature of the peripheral area, degrees Celsius (as above). */
+    static final double PERIPHERAL = 35;
+
+    /** Highest surface temperature of a bathroom above its room temperature, K (as above). */
+    static final double BATHROOM_RISE = 9;
+
+    static final String SURFACE = "surface temperature, ";
+    static final String COVERING = "covering surface temperature";
+    static final String LAYER = "layer temperature: ";
+    static final String HEATER = "heater density";
+
+    static final String SURFACE_SOURCE = "EN 1264-2";
+    static final String COVERING_SOURCE = "the maker of the covering; 27 °C under timber is common practice, no source";
+    static final String LAYER_SOURCE = "the maker of the layer";
+    static final String HEATER_SOURCE = "energy balance of the heater";
+
+    private Limits() {}
+}

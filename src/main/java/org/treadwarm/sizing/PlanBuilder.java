@@ -1,0 +1,486 @@
+package org.treadwarm.sizing;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.treadwarm.physics.envelope.HeatFlow;
+import org.treadwarm.sizing.Plan.AirWay;
+import org.treadwarm.sizing.Plan.AssemblyPlan;
+import org.treadwarm.sizing.Plan.EdgePlan;
+import org.treadwarm.sizing.Plan.Face;
+import org.treadwarm.sizing.Plan.FloorPlan;
+import org.treadwarm.sizing.Plan.GroundPlan;
+import org.treadwarm.sizing.Plan.LayerLimit;
+import org.treadwarm.sizing.Plan.Link;
+import org.treadwarm.sizing.Plan.LinkKind;
+import org.treadwarm.sizing.Plan.PathRef;
+import org.treadwarm.sizing.Plan.RoomIndexes;
+import org.treadwarm.sizing.Plan.Side;
+import org.treadwarm.sizing.Plan.SiteIndexes;
+import org.treadwarm.survey.Air;
+import org.treadwarm.survey.AirGap;
+import org.treadwarm.survey.Assembly;
+import org.treadwarm.survey.Bridging;
+import org.treadwarm.survey.Ground;
+import org.treadwarm.survey.GroundKind;
+import org.treadwarm.survey.HeatedFloor;
+import org.treadwarm.survey.Heater;
+import org.treadwarm.survey.Junction;
+import org.treadwarm.survey.JunctionPlace;
+import org.treadwarm.survey.Layer;
+import org.treadwarm.survey.Opening;
+import org.treadwarm.survey.Pointer;
+import org.treadwarm.survey.Room;
+import org.treadwarm.survey.Site;
+import org.treadwarm.survey.Space;
+import org.treadwarm.survey.SpaceKind;
+import org.treadwarm.survey.Surface;
+import org.treadwarm.survey.Survey;
+import org.treadwarm.tables.Films;
+import org.treadwarm.tables.Materials;
+import org.treadwarm.units.Reading;
+
+/** Compiles a survey: names become node numbers, readings become indexes, materials become numbers. */
+final class PlanBuilder {
+    /** Emissivity of ordinary building materials (ISO 6946:2017, 6.9.2, from memory). */
+    static final double ORDINARY_EMISSIVITY = 0.9;
+
+    private static final int NONE = Stack.NONE;
+
+    final Survey survey;
+    final Inputs inputs = new Inputs();
+    final int rooms;
+    final int spaces;
+    final String[] nodeNames;
+    final int[] nodeTemperature;
+    final int[] floating;
+    final int[] factor;
+    final List<Stack> stacks = new ArrayList<>();
+    final List<AssemblyPlan> assemblies = new ArrayList<>();
+    final List<Face> faces = new ArrayList<>();
+    final List<GroundPlan> grounds = new ArrayList<>();
+    final List<Link> links = new ArrayList<>();
+    final FloorPlan[] floors;
+    final RoomIndexes[] roomIndexes;
+    int layerCount;
+    int[] floatingNodes;
+    int[] pairFrom;
+    int[] pairTo;
+    int[] linkPair;
+    SiteIndexes site;
+
+    private final Map<String, Integer> nodes = new HashMap<>();
+    private final Map<String, Integer> assemblyNumbers = new HashMap<>();
+    private final Map<Face, Integer> faceNumbers = new HashMap<>();
+
+    PlanBuilder(Survey survey) {
+        this.survey = survey;
+        rooms = survey.rooms().size();
+        spaces = survey.spaces().size();
+        nodeNames = new String[rooms + spaces + 2];
+        nodeTemperature = new int[rooms + spaces + 2];
+        floating = new int[rooms + spaces + 2];
+        factor = new int[rooms + spaces + 2];
+        floors = new FloorPlan[rooms];
+        roomIndexes = new RoomIndexes[rooms];
+    }
+
+    Plan build() {
+        java.util.Arrays.fill(nodeTemperature, NONE);
+        java.util.Arrays.fill(floating, NONE);
+        java.util.Arrays.fill(factor, NONE);
+        site();
+        nodes();
+        survey.assemblies().forEach(this::assembly);
+        int space = rooms;
+        for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
+            String pointer = Pointer.to("/spaces", entry.getKey());
+            Space given = entry.getValue();
+            exchanges(pointer, space++, given.surfaces(), given.junctions(), given.air(), NONE, NONE);
+        }
+        for (int i = 0; i < rooms; i++) {
+            room(i, survey.rooms().get(i));
+        }
+        pairs();
+        return new Plan(this);
+    }
+
+    private void site() {
+        Site given = survey.site();
+        site = new SiteIndexes(
+                inputs.add("/site/outdoorTemperature", given.outdoorTemperature()),
+                optional("/site/annualMeanTemperature", given.annualMeanTemperature()),
+                inputs.add("/site/altitude", given.altitude()),
+                inputs.add("/site/groundSeasonFactor", given.groundSeasonFactor()),
+                inputs.add("/site/groundwaterFactor", given.groundwaterFactor()));
+    }
+
+    private int optional(String pointer, Optional<Reading> reading) {
+        return reading.isPresent() ? inputs.add(pointer, reading.get()) : NONE;
+    }
+
+    private void nodes() {
+        for (int i = 0; i < rooms; i++) {
+            Room room = survey.rooms().get(i);
+            name(i, room.name());
+            nodeTemperature[i] = inputs.add("/rooms/" + i + "/indoorTemperature", room.indoorTemperature());
+        }
+        int node = rooms;
+        List<Integer> floats = new ArrayList<>();
+        for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
+            Space space = entry.getValue();
+            String pointer = Pointer.to("/spaces", entry.getKey());
+            name(node, entry.getKey());
+            if (space.kind() == SpaceKind.HELD) {
+                nodeTemperature[node] =
+                        inputs.add(pointer + "/temperature", space.temperature().orElseThrow());
+            } else if (space.temperatureFactor().isPresent()) {
+                factor[node] = inputs.add(
+                        pointer + "/temperatureFactor",
+                        space.temperatureFactor().get());
+            } else {
+                floating[node] = floats.size();
+                floats.add(node);
+            }
+            node++;
+        }
+        name(node, Survey.OUTDOORS);
+        nodeTemperature[node] = site.outdoor();
+        name(node + 1, Survey.GROUND);
+        nodeTemperature[node + 1] = site.annualMean();
+        floatingNodes = floats.stream().mapToInt(Integer::intValue).toArray();
+    }
+
+    private void name(int node, String name) {
+        nodeNames[node] = name;
+        nodes.put(name, node);
+    }
+
+    private void assembly(String name, Assembly assembly) {
+        String pointer = Pointer.to("/assemblies", name);
+        HeatFlow direction = assembly.heatFlow().heatFlow();
+        int stack = assembly.uValue().isPresent() ? NONE : stack(pointer + "/layers", assembly.layers(), direction);
+        assemblyNumbers.put(name, assemblies.size());
+        assemblies.add(new AssemblyPlan(
+                name,
+                stack,
+                optional(pointer + "/uValue", assembly.uValue()),
+                Films.inside(direction.word()),
+                Films.outside(direction.word()),
+                optional(pointer + "/insideCoefficient", assembly.insideCoefficient()),
+                optional(pointer + "/outsideCoefficient", assembly.outsideCoefficient())));
+    }
+
+    private int stack(String pointer, List<Layer> layers, HeatFlow direction) {
+        int[] frame = new int[layers.size()];
+        int frames = frames(layers, frame);
+        Stack stack = new Stack(layers.size(), layerCount, 0, frames);
+        for (int i = 0; i < layers.size(); i++) {
+            Layer layer = layers.get(i);
+            String at = Pointer.to(pointer, i);
+            layer(stack, i, layer, at, direction);
+            stack.frame[i] = frame[i];
+            if (layer.bridging().isPresent()) {
+                Bridging bridging = layer.bridging().get();
+                stack.share[i] = inputs.add(at + "/bridging/share", bridging.share());
+                stack.bridgeConductivity[i] = optional(at + "/bridging/conductivity", bridging.conductivity());
+                stack.bridgeResistance[i] = optional(at + "/bridging/resistance", bridging.resistance());
+            }
+        }
+        layerCount += layers.size();
+        stacks.add(stack);
+        return stacks.size() - 1;
+    }
+
+    private void layer(Stack stack, int i, Layer layer, String pointer, HeatFlow direction) {
+        stack.resistance[i] = optional(pointer + "/resistance", layer.resistance());
+        if (layer.airGap().isPresent()) {
+            AirGap gap = layer.airGap().get();
+            stack.airGap[i] = true;
+            stack.thickness[i] = inputs.add(pointer + "/airGap/thickness", gap.thickness());
+            stack.direction[i] = gap.direction().map(d -> d.heatFlow()).orElse(direction);
+            if (!gap.emissivities().isEmpty()) {
+                String faces = pointer + "/airGap/emissivities/";
+                stack.emissivityInside[i] =
+                        inputs.add(faces + 0, gap.emissivities().get(0));
+                stack.emissivityOutside[i] =
+                        inputs.add(faces + 1, gap.emissivities().get(1));
+            }
+            return;
+        }
+        stack.thickness[i] = optional(pointer + "/thickness", layer.thickness());
+        stack.conductivity[i] = optional(pointer + "/conductivity", layer.conductivity());
+        if (layer.resistance().isEmpty() && layer.conductivity().isEmpty()) {
+            stack.tableConductivity[i] = Materials.find(layer.material().orElseThrow())
+                    .orElseThrow()
+                    .conductivity()
+                    .orElseThrow();
+        }
+    }
+
+    /** Numbers the frames that cross the layers; layers of one named frame share a number. */
+    private static int frames(List<Layer> layers, int[] frame) {
+        Map<String, Integer> named = new HashMap<>();
+        int frames = 0;
+        for (int i = 0; i < layers.size(); i++) {
+            Optional<Bridging> bridging = layers.get(i).bridging();
+            frame[i] = NONE;
+            if (bridging.isPresent()) {
+                Optional<String> name = bridging.get().frame();
+                Integer known = name.map(named::get).orElse(null);
+                frame[i] = known != null ? known : frames++;
+                if (name.isPresent()) {
+                    named.put(name.get(), frame[i]);
+                }
+            }
+        }
+        return frames;
+    }
+
+    private void room(int i, Room room) {
+        String pointer = "/rooms/" + i;
+        int floorArea = inputs.add(pointer + "/floorArea", room.floorArea());
+        int height = inputs.add(pointer + "/height", room.height());
+        roomIndexes[i] = new RoomIndexes(
+                floorArea,
+                inputs.add(pointer + "/reheat", room.reheat()),
+                inputs.add(pointer + "/allowance", room.allowance()),
+                inputs.add(pointer + "/otherHeat", room.otherHeat()));
+        exchanges(pointer, i, room.surfaces(), room.junctions(), room.air(), floorArea, height);
+        if (room.heatedFloor().isPresent()) {
+            floors[i] =
+                    floor(pointer + "/heatedFloor", i, room, room.heatedFloor().get(), floorArea);
+        }
+    }
+
+    private void exchanges(
+            String pointer,
+            int owner,
+            List<Surface> surfaces,
+            List<Junction> junctions,
+            Optional<Air> air,
+            int floorArea,
+            int height) {
+        for (int i = 0; i < surfaces.size(); i++) {
+            surface(Pointer.to(pointer + "/surfaces", i), owner, surfaces.get(i), floorArea);
+        }
+        for (int i = 0; i < junctions.size(); i++) {
+            Junction junction = junctions.get(i);
+            if (junction.at() == JunctionPlace.ROOM) {
+                String at = Pointer.to(pointer + "/junctions", i);
+                int psi = inputs.add(at + "/psi", junction.psi());
+                int length = inputs.add(at + "/length", junction.length());
+                plain(
+                        LinkKind.JUNCTION,
+                        junction.title(),
+                        owner,
+                        nodes.get(junction.to()),
+                        psi,
+                        length,
+                        NONE,
+                        AirWay.NONE);
+            }
+        }
+        air.ifPresent(given -> air(pointer + "/air", owner, given, floorArea, height));
+    }
+
+    private void plain(LinkKind kind, String name, int owner, int other, int first, int second, int third, AirWay way) {
+        links.add(new Link(kind, name, owner, other, NONE, NONE, NONE, NONE, NONE, 0, 0, first, second, third, way));
+    }
+
+    private void air(String pointer, int owner, Air air, int floorArea, int height) {
+        int outdoors = rooms + spaces;
+        if (air.changeRate().isPresent()) {
+            int rate = inputs.add(pointer + "/changeRate", air.changeRate().get());
+            if (air.volume().isPresent()) {
+                int volume = inputs.add(pointer + "/volume", air.volume().get());
+                plain(LinkKind.AIR, "air", owner, outdoors, rate, volume, NONE, AirWay.RATE);
+            } else {
+                plain(LinkKind.AIR, "air", owner, outdoors, rate, floorArea, height, AirWay.RATE);
+            }
+        } else if (air.flow().isPresent()) {
+            int flow = inputs.add(pointer + "/flow", air.flow().get());
+            plain(LinkKind.AIR, "air", owner, outdoors, flow, NONE, NONE, AirWay.FLOW);
+        } else {
+            int supply = inputs.add(pointer + "/supply", air.supply().orElseThrow());
+            int recovery = inputs.add(pointer + "/recovery", air.recovery().orElseThrow());
+            plain(LinkKind.AIR, "air", owner, outdoors, supply, recovery, NONE, AirWay.SUPPLY);
+        }
+    }
+
+    private void surface(String pointer, int owner, Surface surface, int floorArea) {
+        int other = nodes.get(surface.to());
+        int area = extent(pointer, surface.area(), surface.width());
+        int second = optional(pointer + "/height", surface.height());
+        int ground = surface.ground().isPresent()
+                ? ground(pointer + "/ground", surface.ground().get(), floorArea)
+                : NONE;
+        int face = face(surface.assembly(), side(other));
+        int first = links.size() + 1;
+        int count = surface.openings().size();
+        links.add(new Link(
+                LinkKind.SURFACE,
+                surface.title(),
+                owner,
+                other,
+                face,
+                ground,
+                area,
+                second,
+                NONE,
+                first,
+                count,
+                NONE,
+                NONE,
+                NONE,
+                AirWay.NONE));
+        for (int i = 0; i < count; i++) {
+            Opening opening = surface.openings().get(i);
+            String at = Pointer.to(pointer + "/openings", i);
+            links.add(new Link(
+                    LinkKind.OPENING,
+                    opening.title(),
+                    owner,
+                    other,
+                    face(opening.assembly(), side(other)),
+                    NONE,
+                    extent(at, opening.area(), opening.width()),
+                    optional(at + "/height", opening.height()),
+                    inputs.add(at + "/count", opening.count()),
+                    0,
+                    0,
+                    NONE,
+                    NONE,
+                    NONE,
+                    AirWay.NONE));
+        }
+    }
+
+    /** The input of an area, or of the width that is given with a height instead. */
+    private int extent(String pointer, Optional<Reading> area, Optional<Reading> width) {
+        return area.isPresent()
+                ? inputs.add(pointer + "/area", area.get())
+                : inputs.add(pointer + "/width", width.orElseThrow());
+    }
+
+    private Side side(int other) {
+        return other == rooms + spaces ? Side.OUTDOORS : other == rooms + spaces + 1 ? Side.GROUND : Side.INDOORS;
+    }
+
+    private int face(String assembly, Side side) {
+        Face face = new Face(assemblyNumbers.get(assembly), side);
+        Integer known = faceNumbers.get(face);
+        if (known == null) {
+            known = faces.size();
+            faces.add(face);
+            faceNumbers.put(face, known);
+        }
+        return known;
+    }
+
+    private int ground(String pointer, Ground ground, int floorArea) {
+        boolean suspended = ground.kind() == GroundKind.SUSPENDED;
+        grounds.add(new GroundPlan(
+                suspended,
+                ground.area().isPresent()
+                        ? inputs.add(pointer + "/area", ground.area().get())
+                        : floorArea,
+                inputs.add(pointer + "/exposedPerimeter", ground.exposedPerimeter()),
+                inputs.add(pointer + "/wallThickness", ground.wallThickness()),
+                inputs.add(pointer + "/soilConductivity", ground.soilConductivity()),
+                optional(pointer + "/floorHeight", ground.floorHeight()),
+                optional(pointer + "/wallUValue", ground.wallUValue()),
+                optional(pointer + "/ventArea", ground.ventArea()),
+                optional(pointer + "/windSpeed", ground.windSpeed()),
+                ground.shielding().factor()));
+        return grounds.size() - 1;
+    }
+
+    private FloorPlan floor(String pointer, int node, Room room, HeatedFloor floor, int floorArea) {
+        int above = stack(pointer + "/above", floor.above(), HeatFlow.UP);
+        int below = stack(pointer + "/below", floor.below(), HeatFlow.DOWN);
+        List<LayerLimit> limits = new ArrayList<>();
+        for (int i = 0; i < floor.above().size(); i++) {
+            Layer layer = floor.above().get(i);
+            if (layer.maximumTemperature().isPresent()) {
+                int maximum = inputs.add(
+                        Pointer.to(pointer + "/above", i) + "/maximumTemperature",
+                        layer.maximumTemperature().get());
+                limits.add(new LayerLimit(layer.title(i + 1), i, maximum));
+            }
+        }
+        return new FloorPlan(
+                node,
+                inputs.add(pointer + "/area", floor.area()),
+                above,
+                below,
+                floor.ground().isPresent()
+                        ? ground(pointer + "/ground", floor.ground().get(), floorArea)
+                        : NONE,
+                floor.to().map(nodes::get).orElse(NONE),
+                edges("/rooms/" + node + "/junctions", room.junctions()),
+                optional(pointer + "/maximumSurfaceTemperature", floor.maximumSurfaceTemperature()),
+                List.copyOf(limits),
+                optional(pointer + "/heater/density", floor.heater().flatMap(Heater::density)));
+    }
+
+    private List<EdgePlan> edges(String pointer, List<Junction> junctions) {
+        List<EdgePlan> edges = new ArrayList<>();
+        for (int i = 0; i < junctions.size(); i++) {
+            Junction junction = junctions.get(i);
+            if (junction.at() == JunctionPlace.HEATED_FLOOR) {
+                String at = Pointer.to(pointer, i);
+                edges.add(new EdgePlan(
+                        junction.title(),
+                        inputs.add(at + "/psi", junction.psi()),
+                        inputs.add(at + "/length", junction.length()),
+                        nodes.get(junction.to())));
+            }
+        }
+        return List.copyOf(edges);
+    }
+
+    /** Joins the links between the same two floating spaces into one pair. */
+    private void pairs() {
+        Map<Long, Integer> known = new LinkedHashMap<>();
+        linkPair = new int[links.size()];
+        for (int i = 0; i < linkPair.length; i++) {
+            int a = floating[links.get(i).owner()];
+            int b = floating[links.get(i).other()];
+            linkPair[i] = NONE;
+            if (a != NONE && b != NONE) {
+                long key = (long) Math.min(a, b) << 32 | Math.max(a, b);
+                Integer pair = known.putIfAbsent(key, known.size());
+                linkPair[i] = pair == null ? known.size() - 1 : pair;
+            }
+        }
+        pairFrom = known.keySet().stream().mapToInt(key -> (int) (key >> 32)).toArray();
+        pairTo = known.keySet().stream().mapToInt(Long::intValue).toArray();
+    }
+
+    /** The paths of every room and space: own surfaces, heard surfaces, own junctions, heard junctions, air. */
+    PathRef[][] paths() {
+        List<List<PathRef>> lists = new ArrayList<>();
+        for (int i = 0; i < rooms + spaces + 2; i++) {
+            lists.add(new ArrayList<>());
+        }
+        collect(lists, false, LinkKind.SURFACE, LinkKind.OPENING);
+        collect(lists, true, LinkKind.SURFACE, LinkKind.OPENING);
+        collect(lists, false, LinkKind.JUNCTION, LinkKind.JUNCTION);
+        collect(lists, true, LinkKind.JUNCTION, LinkKind.JUNCTION);
+        collect(lists, false, LinkKind.AIR, LinkKind.AIR);
+        return lists.stream().map(list -> list.toArray(new PathRef[0])).toArray(PathRef[][]::new);
+    }
+
+    private void collect(List<List<PathRef>> lists, boolean heard, LinkKind one, LinkKind two) {
+        for (int i = 0; i < links.size(); i++) {
+            Link link = links.get(i);
+            if (link.kind() == one || link.kind() == two) {
+                lists.get(heard ? link.other() : link.owner()).add(new PathRef(i, heard));
+            }
+        }
+    }
+}

@@ -1,0 +1,144 @@
+package org.treadwarm.sizing;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * The answer for a survey: numbers only, in SI units (temperatures in degrees Celsius), never rounded. A number that does not
+ * exist is left out. The component names are the answer's keys and do not change within a method version.
+ */
+public record Sizing(
+        List<RoomSizing> rooms,
+        List<SpaceSizing> spaces,
+        Total total,
+        List<AssemblySizing> assemblies,
+        NetworkSolution network,
+        List<Warning> warnings,
+        Method method) {
+    /** The method that made these numbers; a changed number is a new version. */
+    public static final String METHOD_VERSION = "1";
+
+    /** One room. */
+    public record RoomSizing(
+            String name,
+            double indoorTemperature,
+            HeatLoss heatLoss,
+            FloorSizing floor,
+            OptionalDouble fromFloorAbove,
+            List<Caution> cautions) {}
+
+    /** Heat that a room loses on the design day, W. */
+    public record HeatLoss(
+            double total,
+            double transmission,
+            double junctions,
+            double air,
+            double reheat,
+            double gainsFromNeighbours,
+            List<PathLoss> paths) {}
+
+    /** One way heat leaves a room; a negative heat flow comes in. */
+    public record PathLoss(
+            String name,
+            Optional<String> to,
+            String kind,
+            OptionalDouble area,
+            OptionalDouble uValue,
+            OptionalDouble conductance,
+            OptionalDouble temperatureDifference,
+            double heatFlow,
+            OptionalDouble share,
+            Optional<GroundPath> ground) {}
+
+    /** What ISO 13370 found for a path to the ground. */
+    public record GroundPath(double characteristicDimension, double equivalentThickness, double seasonalFactor) {}
+
+    /** What the heated floor must and may give. */
+    public record FloorSizing(
+            Verdict verdict,
+            OptionalDouble area,
+            OptionalDouble requiredHeat,
+            OptionalDouble requiredFlux,
+            OptionalDouble carryingFlux,
+            OptionalDouble margin,
+            OptionalDouble marginShare,
+            OptionalDouble shortfall,
+            OptionalDouble supplement,
+            OptionalDouble holdsDownTo,
+            Optional<String> holdsDownToReason,
+            OptionalDouble surfaceTemperature,
+            Optional<String> surfaceBasis,
+            OptionalDouble heaterTemperature,
+            OptionalDouble downwardFlux,
+            OptionalDouble edgeFlux,
+            OptionalDouble heaterFlux,
+            OptionalDouble heaterPower,
+            Optional<FloorState> atCarryingFlux,
+            OptionalDouble installedPower,
+            OptionalDouble buildUpHeight,
+            OptionalDouble load,
+            OptionalDouble resistanceAbove,
+            OptionalDouble resistanceBelow,
+            Optional<Below> below,
+            List<Edge> edges,
+            List<Limit> limits) {}
+
+    /** A floor at one flux. */
+    public record FloorState(
+            double surfaceTemperature,
+            double heaterTemperature,
+            double downwardFlux,
+            double edgeFlux,
+            double heaterFlux,
+            double heaterPower) {}
+
+    /** What the heater plane sees below: downward flux = conductance x (heater temperature - temperature). */
+    public record Below(String name, double conductance, double temperature, Optional<GroundPath> ground) {}
+
+    /** A junction that sees the heater plane, W/K and degrees Celsius. */
+    public record Edge(String name, String to, double conductance, double temperature) {}
+
+    /** The largest upward flux that one thing allows. */
+    public record Limit(String name, double maximumFlux, double margin, boolean governs, String source) {}
+
+    /** A space that floats. */
+    public record SpaceSizing(
+            String name,
+            double temperature,
+            OptionalDouble temperatureFactor,
+            OptionalDouble fromFloorAbove,
+            List<PathLoss> paths) {}
+
+    /** Sums over the rooms. */
+    public record Total(double heatLoss, double heaterPower, OptionalDouble installedPower, double heatedArea) {}
+
+    /** An assembly as it was used: its layers, and its resistance towards each kind of other side. */
+    public record AssemblySizing(String name, List<LayerSizing> layers, List<SideSizing> sides) {}
+
+    /** Resistance of a layer and of the framing through it, m²·K/W. */
+    public record LayerSizing(String name, double resistance, OptionalDouble framingResistance) {}
+
+    /** R', R'' and U towards one kind of other side; towards the ground the layers alone, without films. */
+    public record SideSizing(
+            String side,
+            OptionalDouble insideFilm,
+            OptionalDouble outsideFilm,
+            OptionalDouble upperLimit,
+            OptionalDouble lowerLimit,
+            OptionalDouble largestRelativeError,
+            OptionalDouble resistance,
+            OptionalDouble uValue) {}
+
+    /** How the floating temperatures were found, and the largest heat left over in any balance, W. */
+    public record NetworkSolution(int floatingSpaces, double residual) {}
+
+    /** Something that deserves a second look. */
+    public record Warning(String code, String pointer, String message, String why, String settle) {}
+
+    /** Something that can hurt somebody. */
+    public record Caution(String code, String text, String source) {}
+
+    /** The method version. */
+    public record Method(String version) {}
+}

@@ -1,0 +1,44 @@
+package org.treadwarm.wire;
+
+import com.fasterxml.jackson.annotation.JsonInclude;
+import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.databind.SerializationFeature;
+import com.fasterxml.jackson.databind.json.JsonMapper;
+import com.fasterxml.jackson.datatype.jdk8.Jdk8Module;
+import org.treadwarm.sizing.Sizing;
+
+/** Writes answers: records as they are, what does not exist left out. */
+public final class Json {
+    private static final ObjectMapper MAPPER = JsonMapper.builder()
+            .addModule(new Jdk8Module())
+            .serializationInclusion(JsonInclude.Include.NON_ABSENT)
+            .enable(SerializationFeature.WRITE_ENUMS_USING_TO_STRING)
+            .addMixIn(Sizing.FloorSizing.class, WithoutEmptyLists.class)
+            .build();
+
+    private Json() {}
+
+    @JsonInclude(JsonInclude.Include.NON_EMPTY)
+    private interface WithoutEmptyLists {}
+
+    /** The mapper that writes answers. */
+    public static ObjectMapper mapper() {
+        return MAPPER;
+    }
+
+    /** An answer as UTF-8 text. */
+    public static byte[] bytes(Object answer) {
+        try {
+            return MAPPER.writeValueAsBytes(answer);
+        } catch (JsonProcessingException e) {
+            throw new IllegalStateException("an answer cannot be written", e);
+        }
+    }
+
+    /** An answer as a tree. */
+    public static JsonNode tree(Object answer) {
+        return MAPPER.valueToTree(answer);
+    }
+}
