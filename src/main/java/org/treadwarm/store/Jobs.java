@@ -1,0 +1,157 @@
+package org.treadwarm.store;
+
+import java.sql.ResultSet;
+import java.sql.SQLException;
+import java.time.Clock;
+import java.util.List;
+import java.util.Optional;
+import org.jdbi.v3.core.Handle;
+import org.jdbi.v3.core.statement.StatementContext;
+
+/** The jobs with all their revisions. Nothing saved is ever changed or removed. */
+public final class Jobs {
+    private static final String HEADER_COLUMNS =
+            "job_id, revision, name, draft, manifest_sha256, saved_at, saved_by, note";
+    private static final String NEWEST =
+            "revision = (select max(newest.revision) from revision newest where" + " newest.job_id = revision.job_id)";
+
+    private final Database database;
+    private final Audit audit;
+    private final Clock clock;
+
+    Jobs(Database database, Audit audit, Clock clock) {
+        this.database = database;
+        this.audit = audit;
+        this.clock = clock;
+    }
+
+    /** Starts a job: revision 1, under a new id of 12 characters a-z and 2-9. */
+    public RevisionHeader create(JobContent content, Change change) {
+        Manifest manifest = Manifest.of(content.pieces());
+        return database.change(handle -> {
+            RevisionHeader header = header(Secrets.id(), 1, content, change);
+            handle.createUpdate("insert into job (id, created_at) values (:id, :createdAt)")
+                    .bind("id", header.jobId())
+                    .bind("createdAt", Times.text(header.savedAt()))
+                    .execute();
+            insert(handle, header, manifest);
+            audit.append(handle, change.who(), "created job", header.jobId());
+            return header;
+        });
+    }
+
+    /**
+     * Adds a revision if the job still is at the expected one. Content that is the job's newest already is reported as
+     * saved and not written again, even to a caller who missed that revision: a save whose answer was lost on the way
+     * can be sent again.
+     *
+     * @param expectedRevision the revision the change was made from
+     */
+    public SaveResult save(String id, long expectedRevision, JobContent content, Change change) {
+        Manifest manifest = Manifest.of(content.pieces());
+        return database.change(handle -> newest(handle, id)
+                .map(current -> save(
+                        handle, current, expectedRevision, header(id, expectedRevision + 1, content, change), manifest))
+                .orElseGet(SaveResult.Missing::new));
+    }
+
+    private SaveResult save(Handle handle, Row current, long expectedRevision, RevisionHeader next, Manifest manifest) {
+        long revision = current.header().revision();
+        if (expectedRevision <= revision && current.holds(next, manifest)) {
+            return new SaveResult.Saved(revision);
+        }
+        if (expectedRevision != revision) {
+            return new SaveResult.Stale(revision);
+        }
+        insert(handle, next, manifest);
+        audit.append(handle, next.savedBy(), "saved job", next.jobId() + " revision " + next.revision());
+        return new SaveResult.Saved(next.revision());
+    }
+
+    private RevisionHeader header(String id, long revision, JobContent content, Change change) {
+        return new RevisionHeader(
+                id, revision, content.name(), content.draft(), Times.now(clock), change.who(), change.note());
+    }
+
+    /** The newest revision of the job; empty if there is no such job. */
+    public Optional<JobRevision> current(String id) {
+        return database.read(handle -> newest(handle, id).map(row -> row.read(handle)));
+    }
+
+    /** One revision of the job; empty if there is no such job or it has no such revision. */
+    public Optional<JobRevision> revision(String id, long revision) {
+        return database.read(handle -> handle.createQuery(
+                        "select " + HEADER_COLUMNS + " from revision where job_id = :id and revision = :revision")
+                .bind("id", id)
+                .bind("revision", revision)
+                .map(Row::of)
+                .findOne()
+                .map(row -> row.read(handle)));
+    }
+
+    /** The job's history, newest first; empty if there is no such job. */
+    public List<RevisionHeader> revisions(String id) {
+        return database.read(handle -> handle.createQuery(
+                        "select " + HEADER_COLUMNS + " from revision where job_id = :id order by revision desc")
+                .bind("id", id)
+                .map((row, context) -> Row.of(row, context).header())
+                .list());
+    }
+
+    /** The newest revision of every job, the most recently changed job first. */
+    public List<RevisionHeader> list() {
+        return database.read(handle -> handle.createQuery("select " + HEADER_COLUMNS
+                        + " from job join revision on revision.job_id = job.id where " + NEWEST
+                        + " order by saved_at desc, job_id")
+                .map((row, context) -> Row.of(row, context).header())
+                .list());
+    }
+
+    private static Optional<Row> newest(Handle handle, String id) {
+        return handle.createQuery(
+                        "select " + HEADER_COLUMNS + " from revision where job_id = :id order by revision desc limit 1")
+                .bind("id", id)
+                .map(Row::of)
+                .findOne();
+    }
+
+    private static void insert(Handle handle, RevisionHeader header, Manifest manifest) {
+        Contents.add(handle, manifest);
+        handle.createUpdate("insert into revision (" + HEADER_COLUMNS
+                        + ") values (:jobId, :revision, :name, :draft, :manifest, :savedAt, :savedBy, :note)")
+                .bind("jobId", header.jobId())
+                .bind("revision", header.revision())
+                .bind("name", header.name())
+                .bind("draft", header.draft() ? 1 : 0)
+                .bind("manifest", manifest.root())
+                .bind("savedAt", Times.text(header.savedAt()))
+                .bind("savedBy", header.savedBy())
+                .bind("note", header.note())
+                .execute();
+    }
+
+    private record Row(RevisionHeader header, String manifest) {
+        static Row of(ResultSet row, StatementContext context) throws SQLException {
+            RevisionHeader header = new RevisionHeader(
+                    row.getString("job_id"),
+                    row.getLong("revision"),
+                    row.getString("name"),
+                    row.getInt("draft") == 1,
+                    Times.instant(row.getString("saved_at")),
+                    row.getString("saved_by"),
+                    row.getString("note"));
+            return new Row(header, row.getString("manifest_sha256"));
+        }
+
+        boolean holds(RevisionHeader other, Manifest pieces) {
+            return header.name().equals(other.name())
+                    && header.draft() == other.draft()
+                    && manifest.equals(pieces.root());
+        }
+
+        JobRevision read(Handle handle) {
+            return new JobRevision(
+                    header, new JobContent(header.name(), header.draft(), Contents.read(handle, manifest)));
+        }
+    }
+}

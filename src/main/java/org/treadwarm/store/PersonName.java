@@ -1,0 +1,26 @@
+package org.treadwarm.store;
+
+import java.text.Normalizer;
+import java.util.Locale;
+import java.util.regex.Pattern;
+
+/** The rule for names of people, and the form in which names are compared. */
+public final class PersonName {
+    public static final int MAXIMUM_LENGTH = 80;
+
+    private static final Pattern CONTROL = Pattern.compile("[\\p{Cc}\\p{Cs}\\p{Zl}\\p{Zp}]");
+
+    private PersonName() {}
+
+    /** Whether the name has 1 to 80 characters, apart from white space around it, none of them a control character or line break. */
+    public static boolean accepts(String name) {
+        String stripped = name.strip();
+        return !stripped.isEmpty()
+                && stripped.codePointCount(0, stripped.length()) <= MAXIMUM_LENGTH
+                && !CONTROL.matcher(stripped).find();
+    }
+
+    static String key(String name) {
+        return Normalizer.normalize(name.strip(), Normalizer.Form.NFC).toLowerCase(Locale.ROOT);
+    }
+}
