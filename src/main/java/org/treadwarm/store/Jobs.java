@@ -41,9 +41,8 @@ public final class Jobs {
     }
 
     /**
-     * Adds a revision if the job still is at the expected one. Content that is the job's newest already is reported as
-     * saved and not written again, even to a caller who missed that revision: a save whose answer was lost on the way
-     * can be sent again.
+     * Adds a revision if the job still is at the expected one. Every accepted save is a revision, be it the same as the one
+     * before: its number rises by exactly one each time, and what did not change takes no new room.
      *
      * @param expectedRevision the revision the change was made from
      */
@@ -57,9 +56,6 @@ public final class Jobs {
 
     private SaveResult save(Handle handle, Row current, long expectedRevision, RevisionHeader next, Manifest manifest) {
         long revision = current.header().revision();
-        if (expectedRevision <= revision && current.holds(next, manifest)) {
-            return new SaveResult.Saved(revision);
-        }
         if (expectedRevision != revision) {
             return new SaveResult.Stale(revision);
         }
@@ -141,12 +137,6 @@ public final class Jobs {
                     row.getString("saved_by"),
                     row.getString("note"));
             return new Row(header, row.getString("manifest_sha256"));
-        }
-
-        boolean holds(RevisionHeader other, Manifest pieces) {
-            return header.name().equals(other.name())
-                    && header.draft() == other.draft()
-                    && manifest.equals(pieces.root());
         }
 
         JobRevision read(Handle handle) {

@@ -2,7 +2,7 @@ package org.treadwarm.store;
 
 /** What became of a save. */
 public sealed interface SaveResult {
-    /** The content is on disk as this revision. It is the old one if the content already was the job's newest. */
+    /** The content is on disk as this revision. */
     record Saved(long revision) implements SaveResult {}
 
     /** Nothing was written: the job is not at the expected revision but at this one. */

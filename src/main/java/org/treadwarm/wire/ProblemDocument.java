@@ -1,0 +1,40 @@
+package org.treadwarm.wire;
+
+import java.util.List;
+import org.treadwarm.survey.Problem;
+
+/**
+ * A problem as RFC 9457 has it.
+ *
+ * @param type a name for the kind of problem
+ * @param title the kind in words
+ * @param status the HTTP status
+ * @param detail this problem in words
+ * @param errors every single thing that is wrong, each with its address; empty when none has one
+ */
+public record ProblemDocument(String type, String title, int status, String detail, List<Problem> errors) {
+    /** The media type of problem documents. */
+    public static final String MEDIA_TYPE = "application/problem+json";
+
+    /** A text that is no JSON of ours. */
+    public static ProblemDocument notJson(Problem problem) {
+        return new ProblemDocument(
+                "urn:treadwarm:problem:not-json",
+                "The text is not a JSON document",
+                400,
+                problem.message(),
+                List.of(problem));
+    }
+
+    /** A survey, or another document, that has problems. */
+    public static ProblemDocument invalid(List<Problem> problems) {
+        String detail = problems.size() == 1 ? "There is 1 problem." : "There are " + problems.size() + " problems.";
+        return new ProblemDocument(
+                "urn:treadwarm:problem:invalid", "The document has problems", 422, detail, List.copyOf(problems));
+    }
+
+    /** A problem that has no address in a document. */
+    public static ProblemDocument plain(int status, String kind, String title, String detail) {
+        return new ProblemDocument("urn:treadwarm:problem:" + kind, title, status, detail, List.of());
+    }
+}
