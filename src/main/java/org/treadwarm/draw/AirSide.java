@@ -9,7 +9,7 @@ package org.treadwarm.draw;
 public record AirSide(String name, double temperature) {
     /** @throws IllegalArgumentException if the temperature cannot be drawn */
     public AirSide {
-        Checks.drawable("Air temperature", temperature);
+        Checks.temperature("Air temperature", temperature);
     }
 
     String words() {

@@ -71,9 +71,8 @@ record BalanceBlocks(List<Block> out, List<Block> in, String merged) {
     }
 
     private static Block block(HeatPath path, Block.Look look) {
-        String share =
-                path.share().isPresent() ? " · " + Figures.percent(path.share().getAsDouble()) : "";
-        return new Block(Math.abs(path.watts()), look, path.label(), Figures.watts(path.watts()) + share, "");
+        String share = path.share().isPresent() ? Figures.percent(path.share().getAsDouble()) : "";
+        return new Block(Math.abs(path.watts()), look, path.label(), Figures.watts(path.watts()), share, "");
     }
 
     private static List<Block> supply(Balance balance) {
@@ -85,7 +84,7 @@ record BalanceBlocks(List<Block> out, List<Block> in, String merged) {
             return List.of();
         }
         String words = "must come from something else";
-        return List.of(new Block(watts, Block.Look.MISSING, "no heated floor:", Figures.watts(watts), words));
+        return List.of(new Block(watts, Block.Look.MISSING, "no heated floor:", Figures.watts(watts), "", words));
     }
 
     private static List<Block> supply(FloorHeat floor) {
@@ -93,13 +92,14 @@ record BalanceBlocks(List<Block> out, List<Block> in, String merged) {
         if (floor.supplementWatts() > 0) {
             String missing = "missing " + Figures.watts(floor.supplementWatts()) + ":";
             String words = "something else must add this";
-            blocks.add(new Block(floor.supplementWatts(), Block.Look.MISSING, "", missing, words));
+            blocks.add(new Block(floor.supplementWatts(), Block.Look.MISSING, "", missing, "", words));
         }
         blocks.add(new Block(
                 floor.givenWatts(),
                 Block.Look.FLOOR,
                 "heated floor",
                 Figures.watts(floor.givenWatts()),
+                "",
                 remark(floor)));
         return blocks;
     }

@@ -12,6 +12,8 @@ import java.util.stream.Collectors;
 public final class BalanceDrawing {
     private static final double HEAD = 66;
     private static final double GAP = 10;
+    /** Above this the numbers are wider than the gap between the columns; the blocks still carry theirs. */
+    private static final double AXIS_LIMIT = 100_000;
 
     private final Canvas canvas;
     private final Balance balance;
@@ -36,7 +38,7 @@ public final class BalanceDrawing {
         heads();
         column(blocks.out(), layout.outColumn(), layout.outLabels(), TextStyle.Anchor.END);
         column(blocks.in(), layout.inColumn(), layout.inLabels(), TextStyle.Anchor.START);
-        if (layout.axis() && blocks.highest() > 0) {
+        if (layout.axis() && blocks.highest() > 0 && blocks.highest() < AXIS_LIMIT) {
             axis();
         }
         double foot = HEAD + height;
@@ -49,10 +51,10 @@ public final class BalanceDrawing {
     private void heads() {
         double middle = layout.middle();
         Label out = Label.empty()
-                .and("Heat going out", layout.headWidth(), TextStyle.PLAIN)
+                .and("Heat out", layout.headWidth(), TextStyle.PLAIN)
                 .and(Figures.watts(balance.outWatts()), layout.headWidth(), TextStyle.STRONG);
         Label in = Label.empty()
-                .and("Where it comes from", layout.headWidth(), TextStyle.PLAIN)
+                .and("Heat to come in", layout.headWidth(), TextStyle.PLAIN)
                 .and(Figures.watts(BalanceBlocks.watts(blocks.in())), layout.headWidth(), TextStyle.STRONG);
         canvas.label(new Point(middle - 12, 28), out, TextStyle.Anchor.END);
         canvas.label(new Point(middle + 12, 28), in, TextStyle.Anchor.START);

@@ -15,7 +15,7 @@ record BalanceLayout(double width, double bar, double gap, double leader, double
     static BalanceLayout on(Sheet sheet) {
         return sheet.roomy()
                 ? new BalanceLayout(sheet.width(), 92, 64, 34, 340)
-                : new BalanceLayout(sheet.width(), 36, 10, 16, 320);
+                : new BalanceLayout(sheet.width(), 32, 10, 16, 320);
     }
 
     double middle() {

@@ -19,7 +19,7 @@ public record Beneath(Kind kind, String name, OptionalDouble temperature) {
 
     /** @throws IllegalArgumentException if the temperature cannot be drawn */
     public Beneath {
-        Checks.drawable("Temperature beneath", temperature);
+        temperature.ifPresent(degrees -> Checks.temperature("Temperature beneath", degrees));
     }
 
     String words() {

@@ -31,8 +31,8 @@ public record BuildUp(
             throw new IllegalArgumentException(
                     layers.size() + " layers do not go with " + temperatures.size() + " temperatures");
         }
-        temperatures.forEach(temperature -> Checks.drawable("Interface temperature", temperature));
-        Checks.drawable("Dew point", dewPoint);
+        temperatures.forEach(temperature -> Checks.temperature("Interface temperature", temperature));
+        dewPoint.ifPresent(degrees -> Checks.temperature("Dew point", degrees));
     }
 
     /** Every temperature that is drawn, for the axis. */

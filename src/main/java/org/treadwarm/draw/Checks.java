@@ -5,7 +5,7 @@ import java.util.OptionalDouble;
 /** Refuses numbers that cannot be drawn. */
 final class Checks {
     /** Far beyond any heat or temperature in a building, yet safe to print and to scale. */
-    private static final double LARGEST = 1e9;
+    private static final double LARGEST = 1e6;
 
     private Checks() {}
 
@@ -21,6 +21,13 @@ final class Checks {
             throw new IllegalArgumentException(what + " must not be negative: " + value);
         }
         return value;
+    }
+
+    /** In °C, above absolute zero and below any fire. */
+    static void temperature(String what, double value) {
+        if (!(value >= -273.15 && value <= 1000)) {
+            throw new IllegalArgumentException(what + " cannot be drawn: " + value);
+        }
     }
 
     static void drawable(String what, OptionalDouble value) {

@@ -1,6 +1,5 @@
 package org.treadwarm.draw;
 
-import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.stream.Collectors;
@@ -11,12 +10,12 @@ public final class FloorBuildUpDrawing {
     private static final double MARGIN = 12;
     private static final double ARROW = 46;
     private static final double GROUND = 20;
-    private static final double LEADER = 34;
 
     private final Canvas canvas;
     private final Sheet sheet;
     private final FloorSection floor;
     private final List<LayerSpan> spans;
+    private final FloorNotes notes;
     private final double left;
     private final double right;
     private final double top;
@@ -30,8 +29,8 @@ public final class FloorBuildUpDrawing {
         this.top = 26 + heading("above: " + floor.room().words()).height() + ARROW;
         List<Layer> layers =
                 Stream.concat(floor.above().stream(), floor.below().stream()).toList();
-        double height = Math.max(200, layers.size() * 30.0);
-        this.spans = layers.isEmpty() ? List.of() : LayerSpan.over(layers, top, height);
+        this.notes = new FloorNotes(canvas, floor, right, sheet.width() - MARGIN);
+        this.spans = LayerSpan.over(layers, top, Math.max(Math.max(200, notes.height()), layers.size() * 30.0));
     }
 
     /** The drawing as SVG text. */
@@ -48,7 +47,7 @@ public final class FloorBuildUpDrawing {
         heater();
         flow(floor.fluxUp() >= 0, top - 8 - ARROW, floor.fluxUp());
         double under = beneath();
-        beside();
+        notes.draw(top, heaterY(), top - ARROW, bottom() + GROUND);
         Box room = new Box(MARGIN, under + 22, sheet.width() - 2 * MARGIN, 0);
         double end = new LayerKey(canvas, room).draw(spans, Collections.nCopies(spans.size(), List.of()));
         return canvas.write(end, "Heated floor: " + floor.name(), description());
@@ -65,7 +64,7 @@ public final class FloorBuildUpDrawing {
     }
 
     private double bottom() {
-        return spans.isEmpty() ? top : spans.get(spans.size() - 1).end();
+        return spans.get(spans.size() - 1).end();
     }
 
     private double heaterY() {
@@ -78,7 +77,8 @@ public final class FloorBuildUpDrawing {
         double y = heaterY();
         canvas.line(new Point(left, y), new Point(right, y), new Stroke(Palette.PAPER, 6, ""));
         canvas.line(new Point(left, y), new Point(right, y), Stroke.OUTLINE);
-        int count = (int) ((right - left) / 30);
+        // An even number leaves the middle free for the break marks of thin layers.
+        int count = 2 * (int) ((right - left) / 60);
         double pitch = (right - left) / count;
         for (int i = 0; i < count; i++) {
             Point at = new Point(left + (i + 0.5) * pitch, y);
@@ -108,56 +108,6 @@ public final class FloorBuildUpDrawing {
         }
         flow(floor.fluxDown() < 0, y + 8, floor.fluxDown());
         return heading("beneath: " + floor.beneath().words(), y + ARROW + 18);
-    }
-
-    /** What is said at the right of the section: where it belongs, how it reads, and the heat that leaves there. */
-    private record Note(double y, Label label, boolean edge) {}
-
-    private void beside() {
-        List<Note> notes = notes();
-        List<PushApart.Wish> wishes = notes.stream()
-                .map(note -> new PushApart.Wish(note.y(), note.label().height() + 8))
-                .toList();
-        List<Double> places = PushApart.centres(wishes, top - ARROW, bottom() + 4 * ARROW);
-        for (int i = 0; i < notes.size(); i++) {
-            beside(notes.get(i), places.get(i));
-        }
-    }
-
-    private void beside(Note note, double y) {
-        double end = right + LEADER;
-        if (note.edge()) {
-            Point inner = new Point(right + 2, y);
-            Point outer = new Point(end, y);
-            boolean out = floor.fluxEdge().orElseThrow() >= 0;
-            FlowArrow.draw(canvas, out ? inner : outer, out ? outer : inner);
-        } else {
-            canvas.polyline(
-                    List.of(
-                            new Point(right, note.y()),
-                            new Point(right + 8, note.y()),
-                            new Point(end - 8, y),
-                            new Point(end, y)),
-                    Stroke.LEADER);
-            canvas.circle(new Point(right, note.y()), 3, Palette.INK, Stroke.NONE);
-        }
-        canvas.label(new Point(end + 6, y), note.label(), TextStyle.Anchor.START);
-    }
-
-    private List<Note> notes() {
-        List<Note> notes = new ArrayList<>();
-        notes.add(new Note(top, note("surface", Figures.celsius(floor.surfaceTemperature())), false));
-        notes.add(new Note(heaterY(), note(floor.heater(), Figures.celsius(floor.heaterTemperature())), false));
-        floor.fluxEdge().ifPresent(flux -> {
-            String words = flux < 0 ? "in by the edges" : "out by the edges";
-            notes.add(new Note(heaterY() + 40, note(words, Figures.flux(Math.abs(flux))), true));
-        });
-        return notes;
-    }
-
-    private Label note(String name, String number) {
-        double width = sheet.width() - right - LEADER - 6 - MARGIN;
-        return Label.empty().and(name, width, TextStyle.PLAIN).and(number, width, TextStyle.STRONG);
     }
 
     private String description() {

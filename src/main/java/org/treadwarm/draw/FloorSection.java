@@ -30,12 +30,15 @@ public record FloorSection(
         double fluxUp,
         double fluxDown,
         OptionalDouble fluxEdge) {
-    /** @throws IllegalArgumentException if a number cannot be drawn */
+    /** @throws IllegalArgumentException if there is no layer or a number cannot be drawn */
     public FloorSection {
         above = List.copyOf(above);
         below = List.copyOf(below);
-        Checks.drawable("Surface temperature", surfaceTemperature);
-        Checks.drawable("Heater temperature", heaterTemperature);
+        if (above.isEmpty() && below.isEmpty()) {
+            throw new IllegalArgumentException("A floor has at least one layer");
+        }
+        Checks.temperature("Surface temperature", surfaceTemperature);
+        Checks.temperature("Heater temperature", heaterTemperature);
         Checks.drawable("Flux up", fluxUp);
         Checks.drawable("Flux down", fluxDown);
         Checks.drawable("Flux by the edges", fluxEdge);

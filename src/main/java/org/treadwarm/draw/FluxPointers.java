@@ -14,7 +14,11 @@ final class FluxPointers {
     private static final double BESIDE = 9;
 
     /** A pointer, its words and whether they stand left of its stem and in the upper row. */
-    private record Pointer(double x, Label label, boolean required, boolean leftwards, boolean upper) {}
+    private record Pointer(double x, Label label, boolean required, boolean leftwards, boolean upper) {
+        Pointer lowered() {
+            return new Pointer(x, label, required, leftwards, false);
+        }
+    }
 
     private FluxPointers() {}
 
@@ -25,6 +29,9 @@ final class FluxPointers {
         boolean requiredFirst = required <= carried;
         Pointer first = pointer(scale, Math.min(required, carried), requiredFirst, true, room);
         Pointer second = pointer(scale, Math.max(required, carried), !requiredFirst, false, room);
+        if (first.upper()) {
+            second = second.lowered();
+        }
         boolean twoRows = first.upper() || second.upper();
         double lower = room.y() + (twoRows ? ROW : 0) + ROW / 2;
         double axis = lower + ROW / 2 + ROW + 18;

@@ -38,12 +38,13 @@ record LayerSpan(Layer layer, double start, double end, Drawn drawn) {
 
     /**
      * Lays layers out over a length: to one scale, those that would be too thin to hatch widened, those without a
-     * thickness at a fixed width. Without any layer to scale the length is not used up.
+     * thickness at a fixed width, or all alike if none has one. The layers always take up the whole length.
      */
     static List<LayerSpan> over(List<Layer> layers, double from, double length) {
         double even = length / (1.5 * layers.size());
         double least = Math.min(LEAST, even);
-        double symbol = Math.min(SYMBOL_WIDTH, even);
+        boolean anyToScale = layers.stream().anyMatch(layer -> layer.thickness().isPresent());
+        double symbol = anyToScale ? Math.min(SYMBOL_WIDTH, even) : length / layers.size();
         double scale = scale(layers, length, least, symbol);
         List<LayerSpan> spans = new ArrayList<>();
         double start = from;

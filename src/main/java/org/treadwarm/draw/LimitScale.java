@@ -23,7 +23,7 @@ public final class LimitScale {
         this.scale = scale;
         this.sheet = sheet;
         this.left = sheet.roomy() ? sheet.width() * 0.36 : MARGIN + 12;
-        this.right = sheet.width() - (sheet.roomy() ? 150 : MARGIN + 18);
+        this.right = sheet.width() - (sheet.roomy() ? 160 : MARGIN + 18);
         this.ticks = scale.axis(sheet.roomy() ? 6 : 4);
     }
 
@@ -58,7 +58,7 @@ public final class LimitScale {
         double middle = top + height / 2;
         canvas.label(new Point(MARGIN, middle), name, TextStyle.Anchor.START);
         bar(limit, new Box(left, top, right - left, height));
-        canvas.label(new Point(right + 16, middle), governing(limit), TextStyle.Anchor.START);
+        canvas.label(new Point(right + 20, middle), governing(limit), TextStyle.Anchor.START);
         return top + height;
     }
 
@@ -91,7 +91,7 @@ public final class LimitScale {
     private void bar(FluxLimit limit, Box row) {
         guide(scale.requiredFlux(), row);
         guide(scale.carriedFlux(), row);
-        Stroke stroke = limit.governs() ? new Stroke(Palette.INK, 4, "") : Stroke.OUTLINE;
+        Stroke stroke = limit.governs() ? new Stroke(Palette.INK, 3, "") : Stroke.OUTLINE;
         double end = beyond(limit) ? right + 10 : x(limit.maximumFlux());
         double y = row.middleY();
         canvas.line(new Point(x(0), y), new Point(end, y), stroke);

@@ -6,8 +6,8 @@ import java.util.Locale;
 
 /** What a material is hatched as in a section. */
 public enum MaterialFamily {
-    // In this order, because the first family with a word in the name wins: "insulated plasterboard" insulates,
-    // "timber fibre insulation" too, and "air gap behind brick" is air.
+    // In this order, because the first family with a word in the name wins: "insulation board" insulates, "tile
+    // adhesive" is no tile, "reinforced concrete with steel" is no metal and "air gap behind oak" is air.
     INSULATION(
             "insul",
             "wool",
@@ -45,20 +45,6 @@ public enum MaterialFamily {
             "decoupling",
             "epdm"),
     AIR("air", "cavity", "void", "airspace"),
-    TILE(
-            "tile",
-            "tiles",
-            "tiling",
-            "ceramic",
-            "porcelain",
-            "stone",
-            "slate",
-            "marble",
-            "granite",
-            "terrazzo",
-            "terracotta"),
-    GLASS("glass", "glazing", "pane"),
-    METAL("metal", "steel", "aluminium", "aluminum", "copper", "zinc", "iron", "lead"),
     BOARD(
             "board",
             "plasterboard",
@@ -85,6 +71,20 @@ public enum MaterialFamily {
             "levelling",
             "compound",
             "slab"),
+    TILE(
+            "tile",
+            "tiles",
+            "tiling",
+            "ceramic",
+            "porcelain",
+            "stone",
+            "slate",
+            "marble",
+            "granite",
+            "terrazzo",
+            "terracotta"),
+    METAL("metal", "steel", "aluminium", "aluminum", "copper", "zinc", "iron", "lead"),
+    GLASS("glass", "glazing", "pane"),
     TIMBER(
             "timber",
             "wood",

@@ -5,6 +5,9 @@ import java.util.List;
 
 /** Draws the temperatures through an assembly over its section: axis, line, and a number at every face. */
 final class TemperatureChart {
+    /** Keeps the axis in whole steps if all is at one temperature, and the line off its frame; in K. */
+    private static final double SPARE = 0.5;
+
     private final Canvas canvas;
     private final BuildUp buildUp;
     private final BuildUpLayout layout;
@@ -22,7 +25,7 @@ final class TemperatureChart {
         this.end = layout.end(spans);
         double lowest = buildUp.drawn().min().orElseThrow();
         double highest = buildUp.drawn().max().orElseThrow();
-        this.ticks = Ticks.around(lowest, highest, layout.chart() < 170 ? 3 : 5);
+        this.ticks = Ticks.around(lowest - SPARE, highest + SPARE, layout.chart() < 170 ? 2 : 5);
     }
 
     /** Whether every face has room for its number; otherwise only air and surfaces are numbered. */
