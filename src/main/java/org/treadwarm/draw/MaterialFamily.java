@@ -48,7 +48,6 @@ public enum MaterialFamily {
     BOARD(
             "board",
             "plasterboard",
-            "gypsum",
             "chipboard",
             "osb",
             "plywood",
@@ -68,6 +67,7 @@ public enum MaterialFamily {
             "adhesive",
             "grout",
             "anhydrite",
+            "gypsum",
             "levelling",
             "compound",
             "slab"),
