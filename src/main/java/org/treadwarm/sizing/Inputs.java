@@ -3,6 +3,7 @@ package org.treadwarm.sizing;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import org.treadwarm.units.Reading;
 
 /** The readings of a survey as one array of SI numbers, each with its address. */
@@ -19,6 +20,11 @@ final class Inputs {
         values[index] = reading.value();
         addresses.add(pointer);
         return index;
+    }
+
+    /** Takes a reading in, if there is one; else gives {@link Stack#NONE}. */
+    int optional(String pointer, Optional<Reading> reading) {
+        return reading.isPresent() ? add(pointer, reading.get()) : Stack.NONE;
     }
 
     double[] values() {

@@ -158,8 +158,8 @@ final class Plan {
         nodeTemperature = built.nodeTemperature;
         floating = built.floating;
         factor = built.factor;
-        stacks = List.copyOf(built.stacks);
-        layers = built.layerCount;
+        stacks = built.stacks.all();
+        layers = built.stacks.layers();
         assemblies = List.copyOf(built.assemblies);
         faces = List.copyOf(built.faces);
         grounds = List.copyOf(built.grounds);

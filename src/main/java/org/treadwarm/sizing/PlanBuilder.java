@@ -21,9 +21,7 @@ import org.treadwarm.sizing.Plan.RoomIndexes;
 import org.treadwarm.sizing.Plan.Side;
 import org.treadwarm.sizing.Plan.SiteIndexes;
 import org.treadwarm.survey.Air;
-import org.treadwarm.survey.AirGap;
 import org.treadwarm.survey.Assembly;
-import org.treadwarm.survey.Bridging;
 import org.treadwarm.survey.Ground;
 import org.treadwarm.survey.GroundKind;
 import org.treadwarm.survey.HeatedFloor;
@@ -40,14 +38,10 @@ import org.treadwarm.survey.SpaceKind;
 import org.treadwarm.survey.Surface;
 import org.treadwarm.survey.Survey;
 import org.treadwarm.tables.Films;
-import org.treadwarm.tables.Materials;
 import org.treadwarm.units.Reading;
 
 /** Compiles a survey: names become node numbers, readings become indexes, materials become numbers. */
 final class PlanBuilder {
-    /** Emissivity of ordinary building materials (ISO 6946:2017, 6.9.2, from memory). */
-    static final double ORDINARY_EMISSIVITY = 0.9;
-
     private static final int NONE = Stack.NONE;
 
     final Survey survey;
@@ -58,14 +52,13 @@ final class PlanBuilder {
     final int[] nodeTemperature;
     final int[] floating;
     final int[] factor;
-    final List<Stack> stacks = new ArrayList<>();
+    final StackBuilder stacks = new StackBuilder(inputs);
     final List<AssemblyPlan> assemblies = new ArrayList<>();
     final List<Face> faces = new ArrayList<>();
     final List<GroundPlan> grounds = new ArrayList<>();
     final List<Link> links = new ArrayList<>();
     final FloorPlan[] floors;
     final RoomIndexes[] roomIndexes;
-    int layerCount;
     int[] floatingNodes;
     int[] pairFrom;
     int[] pairTo;
@@ -112,14 +105,10 @@ final class PlanBuilder {
         Site given = survey.site();
         site = new SiteIndexes(
                 inputs.add("/site/outdoorTemperature", given.outdoorTemperature()),
-                optional("/site/annualMeanTemperature", given.annualMeanTemperature()),
+                inputs.optional("/site/annualMeanTemperature", given.annualMeanTemperature()),
                 inputs.add("/site/altitude", given.altitude()),
                 inputs.add("/site/groundSeasonFactor", given.groundSeasonFactor()),
                 inputs.add("/site/groundwaterFactor", given.groundwaterFactor()));
-    }
-
-    private int optional(String pointer, Optional<Reading> reading) {
-        return reading.isPresent() ? inputs.add(pointer, reading.get()) : NONE;
     }
 
     private void nodes() {
@@ -162,82 +151,17 @@ final class PlanBuilder {
     private void assembly(String name, Assembly assembly) {
         String pointer = Pointer.to("/assemblies", name);
         HeatFlow direction = assembly.heatFlow().heatFlow();
-        int stack = assembly.uValue().isPresent() ? NONE : stack(pointer + "/layers", assembly.layers(), direction);
+        int stack =
+                assembly.uValue().isPresent() ? NONE : stacks.add(pointer + "/layers", assembly.layers(), direction);
         assemblyNumbers.put(name, assemblies.size());
         assemblies.add(new AssemblyPlan(
                 name,
                 stack,
-                optional(pointer + "/uValue", assembly.uValue()),
+                inputs.optional(pointer + "/uValue", assembly.uValue()),
                 Films.inside(direction.word()),
                 Films.outside(direction.word()),
-                optional(pointer + "/insideCoefficient", assembly.insideCoefficient()),
-                optional(pointer + "/outsideCoefficient", assembly.outsideCoefficient())));
-    }
-
-    private int stack(String pointer, List<Layer> layers, HeatFlow direction) {
-        int[] frame = new int[layers.size()];
-        int frames = frames(layers, frame);
-        Stack stack = new Stack(layers.size(), layerCount, 0, frames);
-        for (int i = 0; i < layers.size(); i++) {
-            Layer layer = layers.get(i);
-            String at = Pointer.to(pointer, i);
-            layer(stack, i, layer, at, direction);
-            stack.frame[i] = frame[i];
-            if (layer.bridging().isPresent()) {
-                Bridging bridging = layer.bridging().get();
-                stack.share[i] = inputs.add(at + "/bridging/share", bridging.share());
-                stack.bridgeConductivity[i] = optional(at + "/bridging/conductivity", bridging.conductivity());
-                stack.bridgeResistance[i] = optional(at + "/bridging/resistance", bridging.resistance());
-            }
-        }
-        layerCount += layers.size();
-        stacks.add(stack);
-        return stacks.size() - 1;
-    }
-
-    private void layer(Stack stack, int i, Layer layer, String pointer, HeatFlow direction) {
-        stack.resistance[i] = optional(pointer + "/resistance", layer.resistance());
-        if (layer.airGap().isPresent()) {
-            AirGap gap = layer.airGap().get();
-            stack.airGap[i] = true;
-            stack.thickness[i] = inputs.add(pointer + "/airGap/thickness", gap.thickness());
-            stack.direction[i] = gap.direction().map(d -> d.heatFlow()).orElse(direction);
-            if (!gap.emissivities().isEmpty()) {
-                String faces = pointer + "/airGap/emissivities/";
-                stack.emissivityInside[i] =
-                        inputs.add(faces + 0, gap.emissivities().get(0));
-                stack.emissivityOutside[i] =
-                        inputs.add(faces + 1, gap.emissivities().get(1));
-            }
-            return;
-        }
-        stack.thickness[i] = optional(pointer + "/thickness", layer.thickness());
-        stack.conductivity[i] = optional(pointer + "/conductivity", layer.conductivity());
-        if (layer.resistance().isEmpty() && layer.conductivity().isEmpty()) {
-            stack.tableConductivity[i] = Materials.find(layer.material().orElseThrow())
-                    .orElseThrow()
-                    .conductivity()
-                    .orElseThrow();
-        }
-    }
-
-    /** Numbers the frames that cross the layers; layers of one named frame share a number. */
-    private static int frames(List<Layer> layers, int[] frame) {
-        Map<String, Integer> named = new HashMap<>();
-        int frames = 0;
-        for (int i = 0; i < layers.size(); i++) {
-            Optional<Bridging> bridging = layers.get(i).bridging();
-            frame[i] = NONE;
-            if (bridging.isPresent()) {
-                Optional<String> name = bridging.get().frame();
-                Integer known = name.map(named::get).orElse(null);
-                frame[i] = known != null ? known : frames++;
-                if (name.isPresent()) {
-                    named.put(name.get(), frame[i]);
-                }
-            }
-        }
-        return frames;
+                inputs.optional(pointer + "/insideCoefficient", assembly.insideCoefficient()),
+                inputs.optional(pointer + "/outsideCoefficient", assembly.outsideCoefficient())));
     }
 
     private void room(int i, Room room) {
@@ -314,7 +238,7 @@ final class PlanBuilder {
     private void surface(String pointer, int owner, Surface surface, int floorArea) {
         int other = nodes.get(surface.to());
         int area = extent(pointer, surface.area(), surface.width());
-        int second = optional(pointer + "/height", surface.height());
+        int second = inputs.optional(pointer + "/height", surface.height());
         int ground = surface.ground().isPresent()
                 ? ground(pointer + "/ground", surface.ground().get(), floorArea)
                 : NONE;
@@ -348,7 +272,7 @@ final class PlanBuilder {
                     face(opening.assembly(), side(other)),
                     NONE,
                     extent(at, opening.area(), opening.width()),
-                    optional(at + "/height", opening.height()),
+                    inputs.optional(at + "/height", opening.height()),
                     inputs.add(at + "/count", opening.count()),
                     0,
                     0,
@@ -391,17 +315,17 @@ final class PlanBuilder {
                 inputs.add(pointer + "/exposedPerimeter", ground.exposedPerimeter()),
                 inputs.add(pointer + "/wallThickness", ground.wallThickness()),
                 inputs.add(pointer + "/soilConductivity", ground.soilConductivity()),
-                optional(pointer + "/floorHeight", ground.floorHeight()),
-                optional(pointer + "/wallUValue", ground.wallUValue()),
-                optional(pointer + "/ventArea", ground.ventArea()),
-                optional(pointer + "/windSpeed", ground.windSpeed()),
+                inputs.optional(pointer + "/floorHeight", ground.floorHeight()),
+                inputs.optional(pointer + "/wallUValue", ground.wallUValue()),
+                inputs.optional(pointer + "/ventArea", ground.ventArea()),
+                inputs.optional(pointer + "/windSpeed", ground.windSpeed()),
                 ground.shielding().factor()));
         return grounds.size() - 1;
     }
 
     private FloorPlan floor(String pointer, int node, Room room, HeatedFloor floor, int floorArea) {
-        int above = stack(pointer + "/above", floor.above(), HeatFlow.UP);
-        int below = stack(pointer + "/below", floor.below(), HeatFlow.DOWN);
+        int above = stacks.add(pointer + "/above", floor.above(), HeatFlow.UP);
+        int below = stacks.add(pointer + "/below", floor.below(), HeatFlow.DOWN);
         List<LayerLimit> limits = new ArrayList<>();
         for (int i = 0; i < floor.above().size(); i++) {
             Layer layer = floor.above().get(i);
@@ -422,9 +346,9 @@ final class PlanBuilder {
                         : NONE,
                 floor.to().map(nodes::get).orElse(NONE),
                 edges("/rooms/" + node + "/junctions", room.junctions()),
-                optional(pointer + "/maximumSurfaceTemperature", floor.maximumSurfaceTemperature()),
+                inputs.optional(pointer + "/maximumSurfaceTemperature", floor.maximumSurfaceTemperature()),
                 List.copyOf(limits),
-                optional(pointer + "/heater/density", floor.heater().flatMap(Heater::density)));
+                inputs.optional(pointer + "/heater/density", floor.heater().flatMap(Heater::density)));
     }
 
     private List<EdgePlan> edges(String pointer, List<Junction> junctions) {

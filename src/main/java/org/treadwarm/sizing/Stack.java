@@ -8,6 +8,9 @@ import org.treadwarm.physics.envelope.HeatFlow;
 final class Stack {
     static final int NONE = -1;
 
+    /** Emissivity of ordinary building materials (ISO 6946:2017, 6.9.2, from memory). */
+    static final double ORDINARY_EMISSIVITY = 0.9;
+
     final int layers;
     final int first;
     final int[] resistance;
@@ -23,12 +26,10 @@ final class Stack {
     final int[] bridgeConductivity;
     final int[] bridgeResistance;
     final int frames;
-    final int firstFrame;
 
-    Stack(int layers, int first, int firstFrame, int frames) {
+    Stack(int layers, int first, int frames) {
         this.layers = layers;
         this.first = first;
-        this.firstFrame = firstFrame;
         this.frames = frames;
         resistance = none(layers);
         thickness = none(layers);
@@ -63,8 +64,8 @@ final class Stack {
             return in[resistance[i]];
         }
         if (airGap[i]) {
-            double inside = emissivityInside[i] == NONE ? PlanBuilder.ORDINARY_EMISSIVITY : in[emissivityInside[i]];
-            double outside = emissivityOutside[i] == NONE ? PlanBuilder.ORDINARY_EMISSIVITY : in[emissivityOutside[i]];
+            double inside = emissivityInside[i] == NONE ? ORDINARY_EMISSIVITY : in[emissivityInside[i]];
+            double outside = emissivityOutside[i] == NONE ? ORDINARY_EMISSIVITY : in[emissivityOutside[i]];
             return AirLayer.resistance(in[thickness[i]], direction[i], inside, outside, AirLayer.MEAN_TEMPERATURE);
         }
         return in[thickness[i]] / (conductivity[i] == NONE ? tableConductivity[i] : in[conductivity[i]]);
