@@ -6,13 +6,17 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.SerializationFeature;
 import com.fasterxml.jackson.databind.json.JsonMapper;
+import com.fasterxml.jackson.databind.module.SimpleModule;
+import com.fasterxml.jackson.databind.ser.std.ToStringSerializer;
 import com.fasterxml.jackson.datatype.jdk8.Jdk8Module;
+import java.time.Instant;
 import org.treadwarm.sizing.Sizing;
 
 /** Writes answers: records as they are, what does not exist left out. */
 public final class Json {
     private static final ObjectMapper MAPPER = JsonMapper.builder()
             .addModule(new Jdk8Module())
+            .addModule(new SimpleModule().addSerializer(Instant.class, ToStringSerializer.instance))
             .serializationInclusion(JsonInclude.Include.NON_ABSENT)
             .enable(SerializationFeature.WRITE_ENUMS_USING_TO_STRING)
             .addMixIn(Sizing.FloorSizing.class, WithoutEmptyLists.class)

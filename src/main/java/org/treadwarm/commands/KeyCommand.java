@@ -1,0 +1,62 @@
+package org.treadwarm.commands;
+
+import java.nio.file.Path;
+import java.time.Clock;
+import java.util.Locale;
+import java.util.concurrent.Callable;
+import org.treadwarm.store.Scope;
+import org.treadwarm.store.Store;
+import org.treadwarm.store.StoreUnavailable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+
+/** Keys for other programs. */
+@Command(
+        name = "key",
+        description = "Keys for other programs.",
+        mixinStandardHelpOptions = true,
+        subcommands = KeyCommand.Create.class)
+public final class KeyCommand {
+    /** Makes a key and prints it, alone on the last line; works beside a running server. */
+    @Command(
+            name = "create",
+            description = "Make an API key and print it, alone on the last line. It is shown only this once.",
+            mixinStandardHelpOptions = true)
+    public static final class Create implements Callable<Integer> {
+        @Option(names = "--name", required = true, description = "what the key is for")
+        private String name;
+
+        @Option(names = "--scope", required = true, description = "size, read or write; each includes the ones before")
+        private String scope;
+
+        @Option(names = "--data", defaultValue = ServeCommand.DATA, description = "the data folder (${DEFAULT-VALUE})")
+        private Path data;
+
+        @Override
+        public Integer call() {
+            Scope wanted;
+            try {
+                wanted = Scope.valueOf(scope.toUpperCase(Locale.ROOT));
+            } catch (IllegalArgumentException e) {
+                System.err.println("The scope \"" + scope + "\" is not known: size, read or write.");
+                return 2;
+            }
+            if (name.isBlank() || name.length() > 100) {
+                System.err.println("The name has 1 to 100 characters.");
+                return 2;
+            }
+            try (Store store = Store.open(data, Clock.systemUTC())) {
+                String token = store.keys()
+                        .create(name.strip(), wanted, "the command line")
+                        .token();
+                System.out.println("The key \"" + name.strip() + "\" (" + scope.toLowerCase(Locale.ROOT)
+                        + ") is shown only this once:");
+                System.out.println(token);
+                return 0;
+            } catch (StoreUnavailable | IllegalArgumentException e) {
+                System.err.println(e.getMessage());
+                return 1;
+            }
+        }
+    }
+}

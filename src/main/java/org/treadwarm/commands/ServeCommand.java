@@ -1,0 +1,90 @@
+package org.treadwarm.commands;
+
+import io.javalin.util.JavalinBindException;
+import java.nio.file.Path;
+import java.time.Clock;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import java.util.concurrent.CountDownLatch;
+import org.treadwarm.jobs.Demo;
+import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.store.Store;
+import org.treadwarm.store.StoreUnavailable;
+import org.treadwarm.web.Server;
+import org.treadwarm.web.Settings;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+
+/** Starts the server. */
+@Command(
+        name = "serve",
+        description = "Start the server. This is what the program does when no command is named.",
+        mixinStandardHelpOptions = true)
+public final class ServeCommand implements Callable<Integer> {
+    /** The data folder when none is named. */
+    static final String DATA = "treadwarm-data";
+
+    @Option(
+            names = "--port",
+            defaultValue = "8080",
+            description = "port to listen on, 0 for any free one (${DEFAULT-VALUE})")
+    private int port;
+
+    @Option(names = "--bind", defaultValue = "127.0.0.1", description = "address to listen on (${DEFAULT-VALUE})")
+    private String bind;
+
+    @Option(names = "--data", defaultValue = DATA, description = "the data folder (${DEFAULT-VALUE})")
+    private Path data;
+
+    @Option(names = "--demo", description = "add the invented demo job, unless it is there already")
+    private boolean demo;
+
+    @Option(
+            names = "--host",
+            description = "a further name that browsers and clients may call this server by; may be repeated")
+    private List<String> hosts = List.of();
+
+    @Option(names = "--behind-tls", description = "a reverse proxy in front speaks TLS: mark cookies Secure")
+    private boolean behindTls;
+
+    @Override
+    public Integer call() throws InterruptedException {
+        if (port < 0 || port > 65535) {
+            System.err.println("The port is 0 to 65535, not " + port + ".");
+            return 2;
+        }
+        try (Store store = Store.open(data, Clock.systemUTC())) {
+            if (demo) {
+                Demo.addTo(new JobDesk(store.jobs()));
+            }
+            Server server = Server.start(new Settings(bind, port, hosts, behindTls), store);
+            announce(server.port(), store.people().inviteOwner());
+            CountDownLatch stopped = new CountDownLatch(1);
+            Runtime.getRuntime().addShutdownHook(new Thread(() -> {
+                server.close();
+                store.close();
+                stopped.countDown();
+            }));
+            stopped.await();
+            return 0;
+        } catch (StoreUnavailable e) {
+            System.err.println(e.getMessage());
+            return 1;
+        } catch (JavalinBindException e) {
+            System.err.println("The server cannot listen on " + bind + " port " + port
+                    + ": it is in use already, or not allowed. Choose another with --port or --bind.");
+            return 1;
+        }
+    }
+
+    /** Told on the console only: the link makes its visitor the owner, so it stands in no log. */
+    private void announce(int listening, Optional<String> invitation) {
+        String host = bind.equals("0.0.0.0") || bind.equals("::") ? "127.0.0.1" : bind;
+        String address = "http://" + (host.contains(":") ? "[" + host + "]" : host) + ":" + listening;
+        System.out.println("Treadwarm is at " + address + "/");
+        invitation.ifPresent(token ->
+                System.out.println("Become its owner, once, within 24 hours, at " + address + "/owner/" + token));
+        System.out.flush();
+    }
+}

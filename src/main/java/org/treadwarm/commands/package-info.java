@@ -1,0 +1,2 @@
+/** The commands of the program. */
+package org.treadwarm.commands;

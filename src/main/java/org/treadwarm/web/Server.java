@@ -1,0 +1,156 @@
+package org.treadwarm.web;
+
+import io.javalin.Javalin;
+import io.javalin.config.JavalinConfig;
+import io.javalin.http.Context;
+import io.javalin.http.HttpResponseException;
+import io.javalin.http.staticfiles.Location;
+import java.util.Locale;
+import java.util.UUID;
+import org.eclipse.jetty.server.HttpConfiguration;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
+import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.store.Store;
+import org.treadwarm.store.StoreUnavailable;
+import org.treadwarm.web.api.Api;
+import org.treadwarm.web.pages.Pages;
+import org.treadwarm.web.security.HostGuard;
+import org.treadwarm.web.security.KeyGuard;
+import org.treadwarm.web.security.SecureHeaders;
+import org.treadwarm.web.security.Visitors;
+
+/** The server: API and pages over one store. */
+public final class Server implements AutoCloseable {
+    private static final Logger LOG = LoggerFactory.getLogger(Server.class);
+    private static final long LARGEST_BODY = 16L * 1024 * 1024;
+
+    private final Javalin javalin;
+
+    private Server(Javalin javalin) {
+        this.javalin = javalin;
+    }
+
+    /**
+     * Starts the server.
+     *
+     * @throws io.javalin.util.JavalinBindException when the address or port cannot be listened on
+     */
+    public static Server start(Settings settings, Store store) {
+        HostGuard hosts = new HostGuard(settings.allowedHosts());
+        Visitors visitors = new Visitors(store.sessions(), settings.behindTls());
+        JobDesk desk = new JobDesk(store.jobs());
+        Api api = new Api(new KeyGuard(store.keys()), desk);
+        Pages pages = new Pages(store, desk, visitors);
+        Javalin javalin = Javalin.create(config -> {
+            basics(config);
+            config.routes.before(ctx -> {
+                SecureHeaders.set(ctx);
+                if (!hosts.admits(ctx)) {
+                    answerPlainly(ctx, 421, "host", "This server does not answer to that name");
+                    ctx.skipRemainingHandlers();
+                }
+            });
+            api.routes(config.routes);
+            pages.routes(config.routes);
+            faults(config, pages);
+        });
+        return new Server(javalin.start(settings.bind(), settings.port()));
+    }
+
+    /** The port it listens on. */
+    public int port() {
+        return javalin.port();
+    }
+
+    /** Stops after answering what has begun. */
+    @Override
+    public void close() {
+        javalin.stop();
+    }
+
+    private static void basics(JavalinConfig config) {
+        config.startup.showJavalinBanner = false;
+        config.startup.showOldJavalinVersionWarning = false;
+        config.startup.startupWatcherEnabled = false;
+        config.http.maxRequestSize = LARGEST_BODY;
+        config.http.prefer405over404 = true;
+        config.http.defaultContentType = "text/html; charset=utf-8";
+        config.jetty.modifyServer(server -> server.setStopTimeout(5000));
+        config.jetty.modifyHttpConfiguration((HttpConfiguration http) -> {
+            http.setSendServerVersion(false);
+            http.setIdleTimeout(30_000);
+        });
+        config.staticFiles.add(files -> {
+            files.hostedPath = "/static";
+            files.directory = "/static";
+            files.location = Location.CLASSPATH;
+        });
+    }
+
+    private static void faults(JavalinConfig config, Pages pages) {
+        config.routes.exception(HttpResponseException.class, (e, ctx) -> {
+            ctx.status(e.getStatus());
+            ctx.result("");
+            answer(ctx, pages, e.getStatus());
+        });
+        config.routes.exception(StoreUnavailable.class, (e, ctx) -> {
+            LOG.error("the store cannot be reached: {}", e.getMessage());
+            answer(ctx, pages, 503);
+        });
+        config.routes.exception(IllegalArgumentException.class, (e, ctx) -> {
+            LOG.warn("a request was refused deep inside: {}", e.getMessage());
+            answer(ctx, pages, 422);
+        });
+        config.routes.exception(Exception.class, (e, ctx) -> {
+            String reference = UUID.randomUUID().toString().substring(0, 8);
+            LOG.error("fault {}", reference, e);
+            ctx.attribute("reference", reference);
+            answer(ctx, pages, 500);
+        });
+        for (int status : new int[] {404, 405, 413}) {
+            config.routes.error(status, ctx -> {
+                if (!isAnswered(ctx)) {
+                    answer(ctx, pages, status);
+                }
+            });
+        }
+    }
+
+    private static boolean isAnswered(Context ctx) {
+        String type = ctx.res().getContentType();
+        return type != null
+                && (type.startsWith("application/problem+json") || type.startsWith("text/html"))
+                && ctx.attribute("answered") != null;
+    }
+
+    private static void answer(Context ctx, Pages pages, int status) {
+        ctx.attribute("answered", true);
+        ctx.status(status);
+        if (isApi(ctx)) {
+            answerPlainly(ctx, status, "http", title(ctx, status));
+        } else {
+            pages.fault(ctx, status, title(ctx, status));
+        }
+    }
+
+    private static boolean isApi(Context ctx) {
+        return ctx.path().startsWith("/api/");
+    }
+
+    private static void answerPlainly(Context ctx, int status, String kind, String title) {
+        Problems.plain(ctx, status, kind, title, title + ".");
+    }
+
+    private static String title(Context ctx, int status) {
+        return switch (status) {
+            case 404 -> "There is nothing here";
+            case 405 -> "This method is not served here";
+            case 413 -> "The body is too large";
+            case 422 -> "This cannot be kept as it is: it holds characters that are no text";
+            case 503 -> "The store cannot be reached just now; nothing was saved";
+            case 500 -> "A fault of the program, noted under " + ctx.attribute("reference");
+            default -> String.format(Locale.ROOT, "The request could not be answered (%d)", status);
+        };
+    }
+}

@@ -1,0 +1,149 @@
+package org.treadwarm.web.api;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.ArrayNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.lang.reflect.ParameterizedType;
+import java.lang.reflect.RecordComponent;
+import java.lang.reflect.Type;
+import java.time.Instant;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** Schemas of what is answered, from the records that hold it. Numbers carry their unit in the description. */
+final class AnswerSchemas {
+    private static final Map<String, String> UNITS = Map.ofEntries(
+            Map.entry("area", "m2"),
+            Map.entry("heatedArea", "m2"),
+            Map.entry("uValue", "W/(m2.K)"),
+            Map.entry("conductance", "W/K, or W/(m2.K) for what lies below a heated floor"),
+            Map.entry("temperature", "°C"),
+            Map.entry("indoorTemperature", "°C"),
+            Map.entry("outdoorTemperature", "°C"),
+            Map.entry("surfaceTemperature", "°C"),
+            Map.entry("heaterTemperature", "°C"),
+            Map.entry("dewPoint", "°C"),
+            Map.entry("holdsDownTo", "°C, outdoors"),
+            Map.entry("temperatureDifference", "K"),
+            Map.entry("heatFlow", "W"),
+            Map.entry("total", "W"),
+            Map.entry("transmission", "W"),
+            Map.entry("junctions", "W"),
+            Map.entry("air", "W"),
+            Map.entry("reheat", "W"),
+            Map.entry("gainsFromNeighbours", "W"),
+            Map.entry("heatLoss", "W"),
+            Map.entry("heaterPower", "W"),
+            Map.entry("installedPower", "W"),
+            Map.entry("requiredHeat", "W"),
+            Map.entry("shortfall", "W"),
+            Map.entry("supplement", "W"),
+            Map.entry("fromFloorAbove", "W"),
+            Map.entry("residual", "W"),
+            Map.entry("requiredFlux", "W/m2"),
+            Map.entry("carryingFlux", "W/m2"),
+            Map.entry("maximumFlux", "W/m2"),
+            Map.entry("margin", "W/m2"),
+            Map.entry("downwardFlux", "W/m2"),
+            Map.entry("edgeFlux", "W/m2"),
+            Map.entry("heaterFlux", "W/m2"),
+            Map.entry("resistance", "m2.K/W"),
+            Map.entry("framingResistance", "m2.K/W"),
+            Map.entry("resistanceAbove", "m2.K/W"),
+            Map.entry("resistanceBelow", "m2.K/W"),
+            Map.entry("upperLimit", "m2.K/W"),
+            Map.entry("lowerLimit", "m2.K/W"),
+            Map.entry("insideFilm", "m2.K/W"),
+            Map.entry("outsideFilm", "m2.K/W"),
+            Map.entry("buildUpHeight", "m"),
+            Map.entry("load", "kg/m2"),
+            Map.entry("characteristicDimension", "m"),
+            Map.entry("equivalentThickness", "m"),
+            Map.entry("conductivity", "W/(m.K)"),
+            Map.entry("conductivityFrom", "W/(m.K)"),
+            Map.entry("conductivityTo", "W/(m.K)"),
+            Map.entry("density", "kg/m3"),
+            Map.entry("specificHeat", "J/(kg.K)"),
+            Map.entry("voidToGround", "W/(m2.K)"),
+            Map.entry("voidToOutdoors", "W/(m2.K)"));
+
+    private final ObjectNode schemas;
+
+    AnswerSchemas(ObjectNode schemas) {
+        this.schemas = schemas;
+    }
+
+    /** Adds the schema of a record and of every record below it. */
+    void add(Class<?> type) {
+        if (schemas.has(type.getSimpleName())) {
+            return;
+        }
+        ObjectNode schema = schemas.putObject(type.getSimpleName());
+        schema.put("type", "object");
+        schema.put("additionalProperties", false);
+        ObjectNode properties = schema.putObject("properties");
+        ArrayNode required = schema.putArray("required");
+        for (RecordComponent component : type.getRecordComponents()) {
+            ObjectNode property = properties.putObject(component.getName());
+            boolean optional = property(property, component);
+            boolean omittedWhenEmpty = type.getSimpleName().equals("FloorSizing") && component.getType() == List.class;
+            if (!optional && !omittedWhenEmpty) {
+                required.add(component.getName());
+            }
+        }
+    }
+
+    private boolean property(ObjectNode property, RecordComponent component) {
+        Class<?> type = component.getType();
+        if (type == OptionalDouble.class) {
+            number(property, component.getName());
+            return true;
+        }
+        if (type == Optional.class) {
+            held(property, argument(component.getGenericType()), component.getName());
+            return true;
+        }
+        if (type == List.class) {
+            property.put("type", "array");
+            held(property.putObject("items"), argument(component.getGenericType()), component.getName());
+            return false;
+        }
+        held(property, type, component.getName());
+        return false;
+    }
+
+    private void held(ObjectNode property, Class<?> type, String name) {
+        if (type == String.class) {
+            property.put("type", "string");
+        } else if (type == Instant.class) {
+            property.put("type", "string").put("format", "date-time");
+        } else if (type == double.class) {
+            number(property, name);
+        } else if (type == int.class || type == long.class) {
+            property.put("type", "integer");
+        } else if (type == boolean.class) {
+            property.put("type", "boolean");
+        } else if (type == JsonNode.class) {
+            property.put("type", "object").put("description", "the survey as it was typed");
+        } else if (type.isEnum()) {
+            ArrayNode words = property.put("type", "string").putArray("enum");
+            for (Object constant : type.getEnumConstants()) {
+                words.add(constant.toString());
+            }
+        } else {
+            add(type);
+            property.put("$ref", "#/components/schemas/" + type.getSimpleName());
+        }
+    }
+
+    private static void number(ObjectNode property, String name) {
+        property.put("type", "number");
+        property.put("description", UNITS.getOrDefault(name, "a pure number"));
+    }
+
+    private static Class<?> argument(Type type) {
+        return (Class<?>) ((ParameterizedType) type).getActualTypeArguments()[0];
+    }
+}

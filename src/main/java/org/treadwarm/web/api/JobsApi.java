@@ -1,0 +1,286 @@
+package org.treadwarm.web.api;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import io.javalin.http.Context;
+import java.time.Instant;
+import java.util.ArrayList;
+import java.util.Iterator;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalLong;
+import org.treadwarm.jobs.Job;
+import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.jobs.JobDesk.Saving;
+import org.treadwarm.store.ApiKey;
+import org.treadwarm.store.Change;
+import org.treadwarm.store.RevisionHeader;
+import org.treadwarm.store.Scope;
+import org.treadwarm.survey.Pointer;
+import org.treadwarm.survey.Problem;
+import org.treadwarm.web.Problems;
+import org.treadwarm.web.security.KeyGuard;
+
+/** Jobs over the API: whole documents, every save a revision, no save over somebody else's. */
+final class JobsApi {
+    private static final int LONGEST_NAME = 200;
+
+    private final KeyGuard keys;
+    private final JobDesk desk;
+
+    JobsApi(KeyGuard keys, JobDesk desk) {
+        this.keys = keys;
+        this.desk = desk;
+    }
+
+    /** A job with its survey as typed. Problems stand there when it is a draft. */
+    record JobAnswer(
+            String id,
+            long revision,
+            String name,
+            boolean draft,
+            Instant savedAt,
+            String savedBy,
+            List<Problem> problems,
+            JsonNode survey) {
+        static JobAnswer of(Job job) {
+            return new JobAnswer(
+                    job.id(),
+                    job.revision(),
+                    job.name(),
+                    job.draft(),
+                    job.savedAt(),
+                    job.savedBy(),
+                    job.problems(),
+                    job.document());
+        }
+    }
+
+    /** One revision without its survey. */
+    record RevisionAnswer(
+            String id, long revision, String name, boolean draft, Instant savedAt, String savedBy, String note) {
+        static RevisionAnswer of(RevisionHeader header) {
+            return new RevisionAnswer(
+                    header.jobId(),
+                    header.revision(),
+                    header.name(),
+                    header.draft(),
+                    header.savedAt(),
+                    header.savedBy(),
+                    header.note());
+        }
+    }
+
+    /** A list of jobs. */
+    record JobsAnswer(List<RevisionAnswer> jobs) {}
+
+    /** A list of revisions. */
+    record RevisionsAnswer(List<RevisionAnswer> revisions) {}
+
+    private record JobBody(String name, JsonNode survey) {}
+
+    /** {@code GET /api/v1/jobs}. */
+    void list(Context ctx) {
+        if (keys.admit(ctx, Scope.READ).isPresent()) {
+            SizingApi.json(
+                    ctx,
+                    200,
+                    new JobsAnswer(desk.list().stream().map(RevisionAnswer::of).toList()));
+        }
+    }
+
+    /** {@code POST /api/v1/jobs}. */
+    void create(Context ctx) {
+        Optional<ApiKey> key = keys.admit(ctx, Scope.WRITE);
+        if (key.isEmpty()) {
+            return;
+        }
+        Optional<JobBody> body = body(ctx);
+        if (body.isPresent()) {
+            Job job = desk.create(body.get().name(), body.get().survey(), change(key.get()));
+            ctx.header("Location", "/api/v1/jobs/" + job.id());
+            answer(ctx, 201, job);
+        }
+    }
+
+    /** {@code GET /api/v1/jobs/{id}}. */
+    void get(Context ctx) {
+        if (keys.admit(ctx, Scope.READ).isPresent()) {
+            answerOrMissing(ctx, desk.current(ctx.pathParam("id")));
+        }
+    }
+
+    /** {@code GET /api/v1/jobs/{id}/revisions}. */
+    void revisions(Context ctx) {
+        if (keys.admit(ctx, Scope.READ).isEmpty()) {
+            return;
+        }
+        List<RevisionAnswer> revisions = desk.revisions(ctx.pathParam("id")).stream()
+                .map(RevisionAnswer::of)
+                .toList();
+        if (revisions.isEmpty()) {
+            missing(ctx);
+        } else {
+            SizingApi.json(ctx, 200, new RevisionsAnswer(revisions));
+        }
+    }
+
+    /** {@code GET /api/v1/jobs/{id}/revisions/{n}}. */
+    void revision(Context ctx) {
+        if (keys.admit(ctx, Scope.READ).isEmpty()) {
+            return;
+        }
+        OptionalLong number = number(ctx.pathParam("n"));
+        answerOrMissing(
+                ctx, number.isEmpty() ? Optional.empty() : desk.revision(ctx.pathParam("id"), number.getAsLong()));
+    }
+
+    /** {@code GET /api/v1/jobs/{id}/sizing}: of the newest revision. */
+    void sizing(Context ctx) {
+        if (keys.admit(ctx, Scope.READ).isEmpty()) {
+            return;
+        }
+        Optional<Job> job = desk.current(ctx.pathParam("id"));
+        if (job.isEmpty()) {
+            missing(ctx);
+        } else if (job.get().sizing().isEmpty()) {
+            Problems.invalid(ctx, job.get().problems());
+        } else {
+            ctx.header("ETag", tag(job.get().revision()));
+            SizingApi.json(ctx, 200, job.get().sizing().get());
+        }
+    }
+
+    /** {@code PUT /api/v1/jobs/{id}} with If-Match. */
+    void put(Context ctx) {
+        Optional<ApiKey> key = keys.admit(ctx, Scope.WRITE);
+        if (key.isEmpty()) {
+            return;
+        }
+        String id = ctx.pathParam("id");
+        if (desk.revisions(id).isEmpty()) {
+            missing(ctx);
+            return;
+        }
+        String match = ctx.header("If-Match");
+        if (match == null || match.isBlank()) {
+            Problems.plain(
+                    ctx,
+                    428,
+                    "if-match",
+                    "The revision that was changed is not named",
+                    "Send the job's ETag in the header If-Match, so that nobody's work is overwritten.");
+            return;
+        }
+        OptionalLong expected = revisionOf(match);
+        Optional<JobBody> body = body(ctx);
+        if (body.isEmpty()) {
+            return;
+        }
+        if (expected.isEmpty()) {
+            stale(ctx, desk.revisions(id).get(0).revision());
+            return;
+        }
+        Saving saving = desk.save(
+                id, expected.getAsLong(), body.get().name(), body.get().survey(), change(key.get()));
+        if (saving instanceof Saving.Saved saved) {
+            answer(ctx, 200, saved.job());
+        } else if (saving instanceof Saving.Stale stale) {
+            stale(ctx, stale.revision());
+        } else {
+            missing(ctx);
+        }
+    }
+
+    private static void stale(Context ctx, long current) {
+        ctx.header("ETag", tag(current));
+        Problems.plain(
+                ctx,
+                412,
+                "stale",
+                "The job was saved by somebody else in between",
+                "It is at revision " + current + " now. Fetch it, take its changes in, and send yours again.");
+    }
+
+    private static Change change(ApiKey key) {
+        return Change.by("key " + key.name());
+    }
+
+    private static String tag(long revision) {
+        return "\"" + revision + "\"";
+    }
+
+    private static OptionalLong revisionOf(String match) {
+        String plain = match.strip();
+        return plain.length() > 2 && plain.startsWith("\"") && plain.endsWith("\"")
+                ? number(plain.substring(1, plain.length() - 1))
+                : number(plain);
+    }
+
+    private static OptionalLong number(String text) {
+        return text.matches("[0-9]{1,15}") ? OptionalLong.of(Long.parseLong(text)) : OptionalLong.empty();
+    }
+
+    private static Optional<JobBody> body(Context ctx) {
+        Optional<JsonNode> tree = Bodies.read(ctx, Bodies.JOB);
+        if (tree.isEmpty()) {
+            return Optional.empty();
+        }
+        List<Problem> problems = problems(tree.get());
+        if (!problems.isEmpty()) {
+            Problems.invalid(ctx, problems);
+            return Optional.empty();
+        }
+        return Optional.of(new JobBody(
+                tree.get().get("name").textValue().strip(), tree.get().get("survey")));
+    }
+
+    private static List<Problem> problems(JsonNode tree) {
+        List<Problem> problems = new ArrayList<>();
+        if (!tree.isObject()) {
+            return List.of(new Problem("", "no object", "a job is an object", "{\"name\": ..., \"survey\": ...}"));
+        }
+        JsonNode name = tree.path("name");
+        String allowed = "1 to " + LONGEST_NAME + " characters";
+        if (!name.isTextual() || name.textValue().isBlank()) {
+            String given = name.isMissingNode() ? "nothing" : shortened(name.toString());
+            problems.add(new Problem("/name", given, "the job's name is missing", allowed));
+        } else if (name.textValue().strip().length() > LONGEST_NAME
+                || name.textValue().chars().anyMatch(Character::isISOControl)) {
+            problems.add(new Problem("/name", shortened(name.textValue()), "this name cannot be used", allowed));
+        }
+        if (!tree.path("survey").isObject()) {
+            String given = tree.path("survey").isMissingNode() ? "nothing" : "no object";
+            problems.add(new Problem("/survey", given, "the survey is missing", "an object"));
+        }
+        for (Iterator<String> keys = tree.fieldNames(); keys.hasNext(); ) {
+            String key = keys.next();
+            if (!key.equals("name") && !key.equals("survey")) {
+                problems.add(
+                        new Problem(Pointer.to("", key), shortened(key), "this is no key of a job", "name, survey"));
+            }
+        }
+        return problems;
+    }
+
+    private static String shortened(String text) {
+        return text.length() <= 100 ? text : text.substring(0, 99) + "…";
+    }
+
+    private static void answerOrMissing(Context ctx, Optional<Job> job) {
+        if (job.isPresent()) {
+            answer(ctx, 200, job.get());
+        } else {
+            missing(ctx);
+        }
+    }
+
+    private static void answer(Context ctx, int status, Job job) {
+        ctx.header("ETag", tag(job.revision()));
+        SizingApi.json(ctx, status, JobAnswer.of(job));
+    }
+
+    private static void missing(Context ctx) {
+        Problems.plain(
+                ctx, 404, "missing", "There is no such job or revision", "Nothing is kept at " + ctx.path() + ".");
+    }
+}

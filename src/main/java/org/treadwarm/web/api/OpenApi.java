@@ -1,0 +1,45 @@
+package org.treadwarm.web.api;
+
+import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import org.treadwarm.intake.AssemblyQuestion;
+import org.treadwarm.intake.Document;
+import org.treadwarm.sizing.AssemblyEvaluation;
+import org.treadwarm.sizing.Sizing;
+import org.treadwarm.survey.Survey;
+import org.treadwarm.tables.Material;
+import org.treadwarm.wire.ProblemDocument;
+
+/**
+ * The description of the API: the routes as written in the file, the schemas made from the declarations that read and write
+ * the documents, so that they cannot drift apart.
+ */
+final class OpenApi {
+    private OpenApi() {}
+
+    /** The OpenAPI 3.1 document as UTF-8 text. */
+    static byte[] document() {
+        ObjectMapper mapper = Document.mapper();
+        try (InputStream in = OpenApi.class.getResourceAsStream("/openapi.json")) {
+            ObjectNode description = (ObjectNode) mapper.readTree(in);
+            ObjectNode schemas = (ObjectNode) description.path("components").path("schemas");
+            new SurveySchemas(schemas).add(Survey.class);
+            new SurveySchemas(schemas).add(AssemblyQuestion.class);
+            AnswerSchemas answers = new AnswerSchemas(schemas);
+            answers.add(Sizing.class);
+            answers.add(AssemblyEvaluation.class);
+            answers.add(ProblemDocument.class);
+            answers.add(Material.class);
+            answers.add(JobsApi.JobAnswer.class);
+            answers.add(JobsApi.JobsAnswer.class);
+            answers.add(JobsApi.RevisionsAnswer.class);
+            answers.add(Api.Health.class);
+            return mapper.writeValueAsBytes(description);
+        } catch (IOException e) {
+            throw new UncheckedIOException("the description of the API cannot be made", e);
+        }
+    }
+}

@@ -1,0 +1,86 @@
+package org.treadwarm.web.api;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import io.javalin.http.Context;
+import java.util.Map;
+import java.util.Optional;
+import org.treadwarm.intake.AssemblyQuestion;
+import org.treadwarm.intake.Intake;
+import org.treadwarm.intake.Intake.Outcome;
+import org.treadwarm.jobs.Judgement;
+import org.treadwarm.sizing.AssemblyEvaluation;
+import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
+import org.treadwarm.store.Scope;
+import org.treadwarm.tables.Materials;
+import org.treadwarm.web.Problems;
+import org.treadwarm.web.security.KeyGuard;
+import org.treadwarm.wire.Json;
+
+/** Answers that keep nothing: sizings, evaluations of assemblies, the materials table. */
+final class SizingApi {
+    private final KeyGuard keys;
+
+    SizingApi(KeyGuard keys) {
+        this.keys = keys;
+    }
+
+    /** {@code POST /api/v1/sizings}: a survey in, a sizing out. */
+    void size(Context ctx) {
+        if (keys.admit(ctx, Scope.SIZE).isEmpty()) {
+            return;
+        }
+        Bodies.read(ctx, Bodies.SIZING).ifPresent(document -> answer(ctx, Judgement.of(document)));
+    }
+
+    /** Writes what a survey comes to; with the working when the query asks for it. */
+    static void answer(Context ctx, Judgement judged) {
+        if (judged.sizing().isEmpty()) {
+            Problems.invalid(ctx, judged.problems());
+            return;
+        }
+        json(ctx, 200, judged.sizing().get());
+    }
+
+    /** {@code POST /api/v1/assemblies/evaluations}: one assembly under given temperatures. */
+    void evaluate(Context ctx) {
+        if (keys.admit(ctx, Scope.SIZE).isEmpty()) {
+            return;
+        }
+        Optional<JsonNode> document = Bodies.read(ctx, Bodies.SIZING);
+        if (document.isEmpty()) {
+            return;
+        }
+        Outcome<AssemblyQuestion> outcome = Intake.assembly(document.get());
+        if (outcome instanceof Outcome.Accepted<AssemblyQuestion> accepted) {
+            AssemblyQuestion question = accepted.value();
+            Conditions conditions = new Conditions(
+                    question.outdoors(),
+                    question.indoorTemperature().value(),
+                    question.outdoorTemperature().value(),
+                    question.relativeHumidity().value());
+            json(ctx, 200, AssemblyEvaluation.of(question.assembly(), conditions));
+        } else if (outcome instanceof Outcome.Refused<AssemblyQuestion> refused) {
+            Problems.invalid(ctx, refused.problems());
+        }
+    }
+
+    /** {@code GET /api/v1/materials?find=}: rows of the materials table. */
+    void materials(Context ctx) {
+        if (keys.admit(ctx, Scope.SIZE).isEmpty()) {
+            return;
+        }
+        String find = Optional.ofNullable(ctx.queryParam("find")).orElse("");
+        json(ctx, 200, Map.of("materials", find.isBlank() ? Materials.all() : Materials.search(find)));
+    }
+
+    static void json(Context ctx, int status, Object answer) {
+        ctx.status(status);
+        ctx.contentType("application/json; charset=utf-8");
+        ctx.result(Json.bytes(answer));
+    }
+
+    static void json(Context ctx, int status, ObjectNode answer) {
+        json(ctx, status, (Object) answer);
+    }
+}
