@@ -3,6 +3,7 @@ package org.treadwarm.units;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Collectors;
 
 /**
@@ -16,6 +17,8 @@ import java.util.stream.Collectors;
 public final class ReadingParser {
     /** The longest text that is read. */
     public static final int LONGEST = 200;
+
+    private static final Set<String> FEET_OR_INCHES = Set.of("'", "\"", "′", "″", "’", "”", "''");
 
     private final String text;
     private final QuantityKind kind;
@@ -45,8 +48,8 @@ public final class ReadingParser {
         for (int i = 0; i < text.length(); i++) {
             char c = text.charAt(i);
             digit |= Character.isDigit(c) || fraction(c) > 0;
-            if (Character.isLetter(c) && c != 'x' && c != 'e' && c != 'E'
-                    || "'\"%°′″/[".indexOf(c) >= 0 && !isFractionBar(text, i)) {
+            if (Character.isLetter(c) && "xXeE".indexOf(c) < 0
+                    || "'\"%°′″’”/[".indexOf(c) >= 0 && !isFractionBar(text, i)) {
                 return false;
             }
         }
@@ -104,12 +107,8 @@ public final class ReadingParser {
         if (!Double.isFinite(value)) {
             throw new ReadingException("this number is too large");
         }
-        double plusOrMinus = spread.isPresent() ? spreadValue(spread.get(), value, end.or(() -> onlyUnit(terms))) : 0;
+        double plusOrMinus = spread.isPresent() ? spreadValue(spread.get(), value, end) : 0;
         return new Reading(value, plusOrMinus, text, Optional.empty());
-    }
-
-    private static Optional<Unit> onlyUnit(List<List<Factor>> terms) {
-        return terms.get(0).get(0).unit();
     }
 
     private Optional<Unit> endOfThermalR(Optional<String> endUnit) throws ReadingException {
@@ -159,6 +158,13 @@ public final class ReadingParser {
             }
             return end.isPresent() ? end.get().toSi(product) : product;
         }
+        if (lastUnitServesAll(term)) {
+            double product = 1;
+            for (Factor factor : term) {
+                product *= factor.number();
+            }
+            return term.get(term.size() - 1).unit().orElseThrow().toSi(product);
+        }
         double product = 1;
         int power = 0;
         for (Factor factor : term) {
@@ -177,6 +183,16 @@ public final class ReadingParser {
         return product;
     }
 
+    /** Whether a product within a sum is written like a whole one: bare factors, then the unit of the product. */
+    private boolean lastUnitServesAll(List<Factor> term) {
+        int last = term.size() - 1;
+        return last > 0
+                && term.size() == kind.lengthPower()
+                && term.get(last).unit().filter(unit -> unit.kind() == kind).isPresent()
+                && term.subList(0, last).stream()
+                        .allMatch(factor -> factor.unit().isEmpty());
+    }
+
     /** The unit that a bare factor in a product takes from the unit at the end: the length whose power that unit is. */
     private static Unit rootOf(Optional<Unit> end) {
         Unit unit = end.orElseThrow();
@@ -189,7 +205,7 @@ public final class ReadingParser {
         return new ReadingException("a product of " + lengths + " lengths is not " + kind.words());
     }
 
-    private double spreadValue(Spread spread, double value, Optional<Unit> own) throws ReadingException {
+    private double spreadValue(Spread spread, double value, Optional<Unit> end) throws ReadingException {
         boolean relative = spread.unit().isPresent() && spread.unit().get().equals("%") && kind != QuantityKind.RATIO;
         double plusOrMinus;
         if (relative) {
@@ -198,17 +214,36 @@ public final class ReadingParser {
             }
             plusOrMinus = Math.abs(value) * spread.number() / 100;
         } else if (spread.unit().isPresent()) {
-            plusOrMinus = unit(spread.unit().get(), kind.spreadKind()).toSi(spread.number());
-        } else if (own.isPresent()) {
-            Unit unit = own.get();
-            plusOrMinus = spread.number() * unit.numerator() / unit.denominator();
-        } else {
+            plusOrMinus =
+                    spreadUnit(unit(spread.unit().get(), kind.spreadKind())).toSi(spread.number());
+        } else if (end.isPresent()) {
+            Unit shared = kind == QuantityKind.TEMPERATURE ? end.get() : spreadUnit(end.get());
+            plusOrMinus = spread.number() * shared.numerator() / shared.denominator();
+        } else if (kind == QuantityKind.RATIO) {
             plusOrMinus = spread.number();
+        } else {
+            throw spreadWithoutUnit();
         }
         if (!Double.isFinite(plusOrMinus)) {
             throw new ReadingException("the spread is too large");
         }
+        if (kind == QuantityKind.RATIO && end.isPresent() && spread.unit().isEmpty() && plusOrMinus > Math.abs(value)) {
+            throw new ReadingException("it is not clear what the % belongs to; write both, as in 12 % ± 2 %");
+        }
         return plusOrMinus;
+    }
+
+    /** A product of lengths has a spread in its own kind of unit or in per cent, never in a length. */
+    private Unit spreadUnit(Unit unit) throws ReadingException {
+        if (unit.kind() != kind.spreadKind()) {
+            throw spreadWithoutUnit();
+        }
+        return unit;
+    }
+
+    private ReadingException spreadWithoutUnit() {
+        return new ReadingException("write the spread with its own unit, that of "
+                + kind.words().replaceFirst("^an? ", "") + ", or in %; for example in " + someUnits());
     }
 
     private List<Factor> product(double sign) throws ReadingException {
@@ -238,8 +273,8 @@ public final class ReadingParser {
         skipSpace();
         if (unit.symbol().equals("ft")
                 && unit.kind() == QuantityKind.LENGTH
-                && at < text.length()
-                && startsNumber(at)) {
+                && (startsNumber(at) || isHyphenBeforeDigit())) {
+            at += startsNumber(at) ? 0 : 1;
             double inches = number();
             skipSpace();
             String mark = at < text.length() && !startsOperator(at) && !startsPlusMinus(at) ? unitText() : "";
@@ -251,6 +286,11 @@ public final class ReadingParser {
             return new Factor(metres, UnitTable.find(QuantityKind.LENGTH, "m"));
         }
         return new Factor(number, Optional.of(unit));
+    }
+
+    /** The hyphen of 12'-6". */
+    private boolean isHyphenBeforeDigit() {
+        return at < text.length() && text.charAt(at) == '-' && isDigitAt(at + 1);
     }
 
     private Unit lengthLike(String unitText) throws ReadingException {
@@ -266,14 +306,13 @@ public final class ReadingParser {
      */
     private Optional<String> ownUnit() throws ReadingException {
         int start = at;
-        if (at >= text.length() || startsOperator(at)) {
+        if (at >= text.length() || startsOperator(at) || startsPlusMinus(at)) {
             return Optional.empty();
         }
         String unit = unitText();
         skipSpace();
         boolean more = at < text.length();
-        boolean feetOrInches =
-                unit.equals("'") || unit.equals("\"") || unit.equals("′") || unit.equals("″") || unit.equals("''");
+        boolean feetOrInches = FEET_OR_INCHES.contains(unit);
         if (more || feetOrInches) {
             if (more && startsPlusMinus(at)) {
                 at = start;
@@ -287,10 +326,10 @@ public final class ReadingParser {
 
     private Spread spread() throws ReadingException {
         skipSpace();
-        double number = number();
-        if (at < text.length() && text.charAt(at) == '-') {
+        if (at < text.length() && isMinus(text.charAt(at))) {
             throw new ReadingException("the spread must not be negative");
         }
+        double number = number();
         skipSpace();
         if (kind != QuantityKind.RATIO && at < text.length() && text.charAt(at) == '%') {
             at++;
@@ -317,7 +356,11 @@ public final class ReadingParser {
         if (at < text.length() && fraction(text.charAt(at)) > 0) {
             return whole + fraction(text.charAt(at++));
         }
-        boolean gap = skipSpace() || at < text.length() && text.charAt(at) == '-' && isDigitAt(at + 1);
+        boolean space = skipSpace();
+        if (space && at < text.length() && fraction(text.charAt(at)) > 0 && isWholeSince(start)) {
+            return whole + fraction(text.charAt(at++));
+        }
+        boolean gap = space || at < text.length() && text.charAt(at) == '-' && isDigitAt(at + 1);
         if (at < text.length() && text.charAt(at) == '-' && isDigitAt(at + 1)) {
             at++;
         }
@@ -337,8 +380,8 @@ public final class ReadingParser {
     }
 
     private boolean isWholeSince(int start) {
-        for (int i = start; i < text.length() && i < at; i++) {
-            if ((text.charAt(i) == '.' || text.charAt(i) == ',') && i < at) {
+        for (int i = start; i < at; i++) {
+            if (text.charAt(i) == '.' || text.charAt(i) == ',') {
                 return false;
             }
         }
@@ -414,7 +457,7 @@ public final class ReadingParser {
             }
             slash = c == '/';
             at++;
-            if ((c == '\'' || c == '′') && at < text.length() && text.charAt(at) != '\'') {
+            if ((c == '\'' || c == '′' || c == '’') && at < text.length() && text.charAt(at) != '\'') {
                 break;
             }
         }
@@ -434,6 +477,10 @@ public final class ReadingParser {
                 wanted.lengthPower() > 1 ? UnitTable.find(QuantityKind.LENGTH, unitText) : Optional.empty();
         if (root.isPresent()) {
             return root.get();
+        }
+        if (isDigit(unitText.charAt(0))) {
+            throw new ReadingException("\"" + unitText
+                    + "\" follows a number that is complete already; numbers are written without gaps, as in 1200.5");
         }
         String others =
                 UnitTable.kindsOf(unitText).stream().map(QuantityKind::words).collect(Collectors.joining(" or "));
@@ -469,7 +516,7 @@ public final class ReadingParser {
     }
 
     private double takeSign() {
-        if (at < text.length() && (text.charAt(at) == '-' || text.charAt(at) == '−' || text.charAt(at) == '–')) {
+        if (at < text.length() && isMinus(text.charAt(at))) {
             at++;
             skipSpace();
             return -1;
@@ -478,6 +525,10 @@ public final class ReadingParser {
             at++;
         }
         return 1;
+    }
+
+    private static boolean isMinus(char c) {
+        return c == '-' || c == '−' || c == '–';
     }
 
     private boolean takePlus() {
@@ -534,7 +585,11 @@ public final class ReadingParser {
     }
 
     private boolean isDigitAt(int i) {
-        return i < text.length() && text.charAt(i) >= '0' && text.charAt(i) <= '9';
+        return i < text.length() && isDigit(text.charAt(i));
+    }
+
+    private static boolean isDigit(char c) {
+        return c >= '0' && c <= '9';
     }
 
     private boolean skipSpace() {

@@ -183,7 +183,10 @@ public final class UnitTable {
                     "Btu/h.ft.F",
                     "Btu/(ft.h.°F)",
                     "Btu/h/ft/°F",
-                    "Btu/(hft°F)");
+                    "Btu/(hft°F)",
+                    "Btu/(hftF)",
+                    "Btu/hft°F",
+                    "Btu/hftF");
             add(
                     units,
                     kind,
@@ -194,7 +197,10 @@ public final class UnitTable {
                     "Btu.in/h.ft2.°F",
                     "Btu.in/(h.ft2.F)",
                     "Btu.in/h.ft2.F",
-                    "Btuin/(hft2°F)");
+                    "Btuin/(hft2°F)",
+                    "Btuin/(hft2F)",
+                    "Btuin/hft2°F",
+                    "Btuin/hft2F");
         }
         add(
                 units,
@@ -221,7 +227,10 @@ public final class UnitTable {
                 "Btu/h.ft2.F",
                 "Btu/(ft2.h.°F)",
                 "Btu/h/ft2/°F",
-                "Btu/(hft2°F)");
+                "Btu/(hft2°F)",
+                "Btu/(hft2F)",
+                "Btu/hft2°F",
+                "Btu/hft2F");
         add(units, RESISTANCE, "m2.K/W", 1, 1, SI, "m2K/W", "(m2.K)/W", "K.m2/W", "m2.°C/W");
         add(
                 units,
