@@ -321,7 +321,7 @@ final class PlanBuilder {
                 inputs.optional(pointer + "/wallUValue", ground.wallUValue()),
                 inputs.optional(pointer + "/ventArea", ground.ventArea()),
                 inputs.optional(pointer + "/windSpeed", ground.windSpeed()),
-                ground.shielding().factor()));
+                ground.shielding()));
         return grounds.size() - 1;
     }
 
