@@ -52,11 +52,6 @@ final class Addresses {
         return plan.factor[node] != Stack.NONE;
     }
 
-    /** Whether the answer has the paths of a node. */
-    boolean isAnswered(int node) {
-        return isRoom(node) || floats(node);
-    }
-
     /** Pointer of a room or floating space in the answer. */
     String pointer(int node) {
         return isRoom(node) ? "/rooms/" + node : "/spaces/" + plan.floating[node];

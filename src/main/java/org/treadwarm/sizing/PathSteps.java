@@ -27,7 +27,7 @@ final class PathSteps {
         PathRef[] paths = plan.paths[node];
         for (int i = 0; i < paths.length; i++) {
             String at = addresses.path(node, i);
-            conductance(at, node, paths[i], answers.get(i));
+            conductance(at, paths[i], answers.get(i));
             heat(at, node, paths[i], answers.get(i));
         }
         if (answers.size() > paths.length) {
@@ -41,14 +41,14 @@ final class PathSteps {
         }
     }
 
-    private void conductance(String at, int node, PathRef path, PathLoss answer) {
+    private void conductance(String at, PathRef path, PathLoss answer) {
         Link link = plan.links.get(path.link());
-        if (path.heard() && addresses.isAnswered(link.owner())) {
+        if (path.heard()) {
             heard(at, addresses.path(link.owner(), new PathRef(path.link(), false)), answer);
             return;
         }
         switch (link.kind()) {
-            case SURFACE -> surface(at, node, path, link, answer);
+            case SURFACE -> surface(at, link, answer);
             case OPENING -> opening(at, link);
             case JUNCTION ->
                 steps.add(
@@ -73,8 +73,8 @@ final class PathSteps {
         steps.add(at + key, "listed-on-the-other-side", "x", Symbol.of("x_listed", Addresses.sizing(there + key)));
     }
 
-    private void surface(String at, int node, PathRef path, Link link, PathLoss answer) {
-        area(at, node, path, link);
+    private void surface(String at, Link link, PathLoss answer) {
+        area(at, link);
         if (link.ground() == Stack.NONE) {
             steps.add(
                     at + "/uValue",
@@ -91,11 +91,11 @@ final class PathSteps {
         }
     }
 
-    private void area(String at, int node, PathRef path, Link link) {
+    private void area(String at, Link link) {
         List<String> openings = new ArrayList<>();
         for (int i = 0; i < link.openings(); i++) {
-            PathRef opening = new PathRef(link.firstOpening() + i, path.heard());
-            openings.add(Addresses.sizing(addresses.path(node, opening) + "/area"));
+            PathRef opening = new PathRef(link.firstOpening() + i, false);
+            openings.add(Addresses.sizing(addresses.path(link.owner(), opening) + "/area"));
         }
         List<Symbol> symbols = new ArrayList<>(extent(link));
         if (!openings.isEmpty()) {
