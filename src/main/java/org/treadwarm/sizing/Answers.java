@@ -151,13 +151,22 @@ final class Answers {
                     conductance == 0 ? empty() : of(numbers.difference(node, path)),
                     heat,
                     total > 0 ? of(heat / total) : empty(),
-                    link.ground() == Stack.NONE ? Optional.empty() : Optional.of(groundPath(link.ground()))));
+                    link.ground() == Stack.NONE
+                            ? Optional.empty()
+                            : Optional.of(groundPath(link.ground(), of(numbers.deckFilm(link))))));
         }
         return paths;
     }
 
-    private GroundPath groundPath(int ground) {
-        return new GroundPath(numbers.groundDimension[ground], numbers.groundThickness[ground], numbers.seasonal());
+    private GroundPath groundPath(int ground, OptionalDouble insideFilm) {
+        boolean suspended = plan.grounds.get(ground).suspended();
+        return new GroundPath(
+                numbers.groundDimension[ground],
+                numbers.groundThickness[ground],
+                numbers.seasonal(),
+                insideFilm,
+                suspended ? of(numbers.groundToSoil[ground]) : empty(),
+                suspended ? of(numbers.groundToOutdoors[ground]) : empty());
     }
 
     private static String kind(LinkKind kind) {
@@ -221,6 +230,8 @@ final class Answers {
                 none,
                 none,
                 none,
+                List.of(),
+                List.of(),
                 Optional.empty(),
                 List.of(),
                 List.of());
@@ -260,6 +271,8 @@ final class Answers {
                 BuildUp.load(given),
                 of(floor.resistanceAbove),
                 of(floor.resistanceBelow),
+                layers(plan.stacks.get(floor.plan.above()), given.above()),
+                layers(plan.stacks.get(floor.plan.below()), given.below()),
                 Optional.of(below(floor)),
                 edges(floor),
                 limits(floor, given));
@@ -276,9 +289,15 @@ final class Answers {
     private Below below(FloorEvaluation floor) {
         FloorPlan given = floor.plan;
         double temperature = (floor.downConstant + floor.downSlope * numbers.outdoor) / floor.downCoefficient;
-        return given.ground() == Stack.NONE
-                ? new Below(plan.nodeNames[given.other()], floor.downCoefficient, temperature, Optional.empty())
-                : new Below("ground", floor.downCoefficient, temperature, Optional.of(groundPath(given.ground())));
+        boolean bridged = plan.stacks.get(given.below()).frames > 0;
+        boolean onGround = given.ground() != Stack.NONE;
+        return new Below(
+                plan.nodeNames[onGround ? plan.ground : given.other()],
+                floor.downCoefficient,
+                temperature,
+                bridged ? of(numbers.upperLimit(given.below(), floor.filmBelow())) : empty(),
+                bridged ? of(numbers.lowerLimit(given.below(), floor.filmBelow())) : empty(),
+                onGround ? Optional.of(groundPath(given.ground(), empty())) : Optional.empty());
     }
 
     private List<Edge> edges(FloorEvaluation floor) {

@@ -150,6 +150,14 @@ final class Evaluation {
         return plan.stacks.get(stack).total(films, in, layerResistance, bridgeResistance, frames);
     }
 
+    double upperLimit(int stack, double films) {
+        return plan.stacks.get(stack).upperLimit(films, in, layerResistance, bridgeResistance, frames);
+    }
+
+    double lowerLimit(int stack, double films) {
+        return plan.stacks.get(stack).lowerLimit(films, in, layerResistance, bridgeResistance);
+    }
+
     private void links() {
         double pressure = AirHeat.pressureRatio(in[plan.site.altitude()]);
         List<Link> links = plan.links;
@@ -182,7 +190,7 @@ final class Evaluation {
         AssemblyPlan assembly = plan.assemblies.get(plan.faces.get(link.face()).assembly());
         uValue[i] = assembly.stack() == Stack.NONE
                 ? faceUValue[link.face()]
-                : unheatedGround(link.ground(), faceResistance[link.face()], assembly);
+                : unheatedGround(link.ground(), faceResistance[link.face()], deckFilm(link));
         conductance[i] = area[i] * uValue[i] * seasonal();
     }
 
@@ -195,8 +203,14 @@ final class Evaluation {
         return in[plan.site.season()] * in[plan.site.groundwater()];
     }
 
-    private double unheatedGround(int ground, double floorResistance, AssemblyPlan assembly) {
-        double inside = assembly.insideCoefficient() == Stack.NONE ? DECK_FILM : 1 / in[assembly.insideCoefficient()];
+    /** Film above an unheated floor on the ground. */
+    double deckFilm(Link link) {
+        int coefficient =
+                plan.assemblies.get(plan.faces.get(link.face()).assembly()).insideCoefficient();
+        return coefficient == Stack.NONE ? DECK_FILM : 1 / in[coefficient];
+    }
+
+    private double unheatedGround(int ground, double floorResistance, double inside) {
         if (!plan.grounds.get(ground).suspended()) {
             return slab(ground, inside + floorResistance + GROUND_FILM);
         }
@@ -233,7 +247,7 @@ final class Evaluation {
                 in[given.wallUValue()],
                 in[given.ventArea()],
                 in[given.windSpeed()],
-                given.shielding());
+                given.shielding().factor());
     }
 
     /** Volume flow of a link of air, m³/h, recovered heat taken off. */

@@ -73,7 +73,7 @@ final class FloorEvaluation {
 
     private void down() {
         if (plan.ground() == Stack.NONE) {
-            double film = plan.other() == whole.plan.outdoors ? OUTDOOR_FILM : INDOOR_FILM;
+            double film = filmBelow();
             double total = whole.resistance(plan.below(), film);
             resistanceBelow = total - film;
             downCoefficient = 1 / total;
@@ -97,6 +97,14 @@ final class FloorEvaluation {
         downCoefficient = share * (soil + outdoors);
         downConstant = share * soil * annualMean;
         downSlope = share * outdoors;
+    }
+
+    /** Film of the lower side that goes with the layers below, m²·K/W; 0 on the ground, whose formulas have it. */
+    double filmBelow() {
+        if (plan.ground() != Stack.NONE) {
+            return 0;
+        }
+        return plan.other() == whole.plan.outdoors ? OUTDOOR_FILM : INDOOR_FILM;
     }
 
     private void edge() {

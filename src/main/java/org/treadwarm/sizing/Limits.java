@@ -11,6 +11,8 @@ final class Limits {
     /** Highest surface temperature of a bathroom above its room temperature, K (as above). */
     static final double BATHROOM_RISE = 9;
 
+    static final String ZONE_SOURCE = "EN 1264-2:2008+A1:2012, clause 4, read in trade manuals";
+
     static final String SURFACE = "surface temperature, ";
     static final String COVERING = "covering surface temperature";
     static final String LAYER = "layer temperature: ";

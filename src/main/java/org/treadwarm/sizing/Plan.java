@@ -1,6 +1,7 @@
 package org.treadwarm.sizing;
 
 import java.util.List;
+import org.treadwarm.survey.Shielding;
 import org.treadwarm.survey.Survey;
 
 /**
@@ -53,7 +54,7 @@ final class Plan {
             int wallUValue,
             int ventArea,
             int windSpeed,
-            double shielding) {}
+            Shielding shielding) {}
 
     /**
      * A conductance between an owner and another node.

@@ -239,7 +239,9 @@ final class PlanBuilder {
         int other = nodes.get(surface.to());
         int area = extent(pointer, surface.area(), surface.width());
         int second = inputs.optional(pointer + "/height", surface.height());
-        int ground = surface.ground().isPresent()
+        boolean groundCounts =
+                survey.assemblies().get(surface.assembly()).uValue().isEmpty();
+        int ground = surface.ground().isPresent() && groundCounts
                 ? ground(pointer + "/ground", surface.ground().get(), floorArea)
                 : NONE;
         int face = face(surface.assembly(), side(other));
@@ -319,7 +321,7 @@ final class PlanBuilder {
                 inputs.optional(pointer + "/wallUValue", ground.wallUValue()),
                 inputs.optional(pointer + "/ventArea", ground.ventArea()),
                 inputs.optional(pointer + "/windSpeed", ground.windSpeed()),
-                ground.shielding().factor()));
+                ground.shielding()));
         return grounds.size() - 1;
     }
 

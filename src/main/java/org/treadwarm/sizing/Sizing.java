@@ -51,8 +51,17 @@ public record Sizing(
             OptionalDouble share,
             Optional<GroundPath> ground) {}
 
-    /** What ISO 13370 found for a path to the ground. */
-    public record GroundPath(double characteristicDimension, double equivalentThickness, double seasonalFactor) {}
+    /**
+     * What ISO 13370 found for a path to the ground: B' and dt in m, the season factor times the groundwater factor, the film
+     * above an unheated floor in m²·K/W, and Ug and Ux of a void below a suspended floor in W/(m²·K).
+     */
+    public record GroundPath(
+            double characteristicDimension,
+            double equivalentThickness,
+            double seasonalFactor,
+            OptionalDouble insideFilm,
+            OptionalDouble voidToGround,
+            OptionalDouble voidToOutdoors) {}
 
     /** What the heated floor must and may give. */
     public record FloorSizing(
@@ -80,6 +89,8 @@ public record Sizing(
             OptionalDouble load,
             OptionalDouble resistanceAbove,
             OptionalDouble resistanceBelow,
+            List<LayerSizing> layersAbove,
+            List<LayerSizing> layersBelow,
             Optional<Below> below,
             List<Edge> edges,
             List<Limit> limits) {}
@@ -93,8 +104,17 @@ public record Sizing(
             double heaterFlux,
             double heaterPower) {}
 
-    /** What the heater plane sees below: downward flux = conductance x (heater temperature - temperature). */
-    public record Below(String name, double conductance, double temperature, Optional<GroundPath> ground) {}
+    /**
+     * What the heater plane sees below: downward flux = conductance x (heater temperature - temperature). R' and R'' of the
+     * layers below, with the lower side's film unless they lie on the ground, where framing crosses them.
+     */
+    public record Below(
+            String name,
+            double conductance,
+            double temperature,
+            OptionalDouble upperLimit,
+            OptionalDouble lowerLimit,
+            Optional<GroundPath> ground) {}
 
     /** A junction that sees the heater plane, W/K and degrees Celsius. */
     public record Edge(String name, String to, double conductance, double temperature) {}

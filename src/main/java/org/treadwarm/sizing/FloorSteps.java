@@ -1,0 +1,154 @@
+package org.treadwarm.sizing;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.treadwarm.sizing.Plan.FloorPlan;
+import org.treadwarm.sizing.Plan.RoomIndexes;
+import org.treadwarm.sizing.Sizing.FloorSizing;
+
+/** Steps of a heated floor: what it must give, its margin, its temperatures and fluxes. */
+final class FloorSteps {
+    private final Plan plan;
+    private final Addresses addresses;
+    private final Steps steps;
+    private final FloorPlan floor;
+    private final String room;
+    private final String at;
+
+    FloorSteps(Plan plan, Addresses addresses, Steps steps, FloorPlan floor) {
+        this.plan = plan;
+        this.addresses = addresses;
+        this.steps = steps;
+        this.floor = floor;
+        this.room = addresses.pointer(floor.room());
+        this.at = room + "/floor";
+    }
+
+    void all(FloorSizing answer) {
+        demand();
+        margin(answer);
+        state(at, "/requiredFlux");
+        state(at + "/atCarryingFlux", "/carryingFlux");
+        if (answer.installedPower().isPresent()) {
+            steps.add(
+                    at + "/installedPower",
+                    "installed-power",
+                    "P",
+                    Symbol.of("p", addresses.input(floor.density())),
+                    answered("A_F", "/area"));
+        }
+    }
+
+    private void demand() {
+        RoomIndexes inputs = plan.roomIndexes[floor.room()];
+        steps.add(at + "/area", "heated-area", "A_F", Symbol.of("A_given", addresses.input(floor.area())));
+        steps.add(
+                at + "/requiredHeat",
+                "required-heat",
+                "phi_F",
+                Symbol.of("phi_HL", Addresses.sizing(room + "/heatLoss/total")),
+                Symbol.of("a", addresses.input(inputs.allowance())));
+        steps.add(
+                at + "/requiredFlux",
+                "required-flux",
+                "q",
+                answered("phi_F", "/requiredHeat"),
+                answered("A_F", "/area"));
+        steps.add(
+                at + "/supplement",
+                "supplement",
+                "phi_out",
+                answered("phi_short", "/shortfall"),
+                Symbol.of("phi_other", addresses.input(inputs.otherHeat())));
+    }
+
+    private void margin(FloorSizing answer) {
+        List<String> maxima = new ArrayList<>();
+        for (int i = 0; i < answer.limits().size(); i++) {
+            maxima.add(Addresses.sizing(at + "/limits/" + i + "/maximumFlux"));
+        }
+        steps.add(at + "/carryingFlux", "carrying-flux", "q_max", Symbol.all("q_limit", maxima));
+        steps.add(at + "/margin", "margin", "m", answered("q_max", "/carryingFlux"), answered("q", "/requiredFlux"));
+        if (answer.marginShare().isPresent()) {
+            steps.add(
+                    at + "/marginShare", "margin-share", "s", answered("m", "/margin"), answered("q", "/requiredFlux"));
+        }
+        steps.add(at + "/shortfall", "shortfall", "phi_short", answered("m", "/margin"), answered("A_F", "/area"));
+        if (answer.holdsDownTo().isPresent()) {
+            steps.addAgain(
+                    at + "/holdsDownTo",
+                    "holds-down-to",
+                    Symbol.of("q_max", Addresses.again(at + "/carryingFlux")),
+                    Symbol.of("q", Addresses.again(at + "/requiredFlux")));
+        }
+    }
+
+    /** Temperatures and fluxes with the floor giving a flux. */
+    private void state(String here, String fluxKey) {
+        Symbol flux = answered("q", fluxKey);
+        Symbol heater = Symbol.of("theta_h", Addresses.sizing(here + "/heaterTemperature"));
+        Symbol surface = Symbol.of("theta_F", Addresses.sizing(here + "/surfaceTemperature"));
+        steps.add(
+                here + "/surfaceTemperature",
+                "surface-temperature",
+                "theta_F",
+                Symbol.of("theta_i", addresses.temperature(floor.room())),
+                flux);
+        steps.add(
+                here + "/heaterTemperature",
+                "heater-temperature",
+                "theta_h",
+                surface,
+                flux,
+                answered("R_o", "/resistanceAbove"));
+        steps.add(
+                here + "/downwardFlux",
+                "downward-flux",
+                "q_u",
+                answered("U_u", "/below/conductance"),
+                heater,
+                answered("theta_u", "/below/temperature"));
+        edge(here + "/edgeFlux", heater);
+        steps.add(
+                here + "/heaterFlux",
+                "heater-flux",
+                "q_h",
+                flux,
+                Symbol.of("q_u", Addresses.sizing(here + "/downwardFlux")),
+                Symbol.of("q_e", Addresses.sizing(here + "/edgeFlux")));
+        steps.add(
+                here + "/heaterPower",
+                "heater-power",
+                "P",
+                Symbol.of("q_h", Addresses.sizing(here + "/heaterFlux")),
+                answered("A_F", "/area"));
+    }
+
+    private void edge(String here, Symbol heater) {
+        if (floor.edges().isEmpty()) {
+            steps.add(here, "no-edge-flux", "q_e");
+            return;
+        }
+        steps.add(
+                here,
+                "edge-flux",
+                "q_e",
+                Symbol.all("H_j", edges(at, floor, "/conductance")),
+                heater,
+                Symbol.all("theta_j", edges(at, floor, "/temperature")),
+                answered("A_F", "/area"));
+    }
+
+    /** Addresses of a number of every edge. */
+    static List<String> edges(String at, FloorPlan floor, String key) {
+        List<String> edges = new ArrayList<>();
+        for (int i = 0; i < floor.edges().size(); i++) {
+            edges.add(Addresses.sizing(at + "/edges/" + i + key));
+        }
+        return edges;
+    }
+
+    private Symbol answered(String name, String key) {
+        return Symbol.of(name, Addresses.sizing(at + key));
+    }
+}
