@@ -15,7 +15,6 @@ final class Connections {
     private final Map<String, List<String>> neighbours = new HashMap<>();
     private final Set<String> floating = new HashSet<>();
     private final Set<String> held = new HashSet<>();
-    private final Set<String> named = new HashSet<>();
 
     private Connections(Survey survey) {
         this.survey = survey;
@@ -46,7 +45,7 @@ final class Connections {
         survey.rooms().forEach(room -> join(room.name(), room.surfaces(), room.junctions()));
         Set<String> reached = reach();
         for (String name : survey.spaces().keySet()) {
-            if (floating.contains(name) && !reached.contains(name) && named.contains(name)) {
+            if (floating.contains(name) && !reached.contains(name)) {
                 findings.add(
                         Pointer.to("/spaces", name),
                         name,
@@ -64,9 +63,6 @@ final class Connections {
     }
 
     private void join(String owner, List<Surface> surfaces, List<Junction> junctions) {
-        if (!surfaces.isEmpty() || !junctions.isEmpty()) {
-            named.add(owner);
-        }
         surfaces.forEach(surface -> join(owner, surface.to()));
         junctions.stream()
                 .filter(junction -> junction.psi().value() * junction.length().value() > 0)
@@ -75,7 +71,6 @@ final class Connections {
     }
 
     private void join(String a, String b) {
-        named.add(b);
         boolean aFloats = floating.contains(a);
         boolean bFloats = floating.contains(b);
         if (aFloats && bFloats) {

@@ -1,14 +1,19 @@
 package org.treadwarm.survey;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Supplier;
 
 /** The problems found so far: each address once, the first finding counts. */
 public final class Findings {
     /** After so many, looking further helps nobody. */
     public static final int MOST = 1000;
+
+    /** After so many, no more nearest names are searched for: a search costs much, and so many slips are no slips. */
+    private static final int MOST_HINTS = 100;
 
     private final List<Problem> problems = new ArrayList<>();
     private final Set<String> pointers = new HashSet<>();
@@ -18,6 +23,15 @@ public final class Findings {
         if (problems.size() < MOST && pointers.add(pointer)) {
             problems.add(new Problem(pointer, given, message, allowed));
         }
+    }
+
+    /** Words that name the nearest of the listed names, to end a message with; empty when there is none to name. */
+    String hint(String given, Supplier<? extends Collection<String>> names) {
+        return problems.size() < MOST_HINTS
+                ? Nearest.to(given, names.get())
+                        .map(name -> "; did you mean \"" + name + "\"?")
+                        .orElse("")
+                : "";
     }
 
     /** Whether nothing was found at this address. */

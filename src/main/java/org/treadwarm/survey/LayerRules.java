@@ -6,7 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.treadwarm.physics.envelope.CombinedMethod;
 import org.treadwarm.tables.Material;
 import org.treadwarm.tables.Materials;
@@ -120,14 +120,10 @@ final class LayerRules {
         String name = layer.material().get();
         Optional<Material> row = Materials.find(name);
         if (row.isEmpty()) {
-            String nearest = Nearest.to(
-                            name, Materials.all().stream().map(Material::name).collect(Collectors.toList()))
-                    .map(known -> "; did you mean \"" + known + "\"?")
-                    .orElse("");
             findings.add(
                     pointer + "/material",
                     name,
-                    "the materials table has no \"" + name + "\"" + nearest,
+                    "the materials table has no \"" + name + "\"" + findings.hint(name, LayerRules::materialNames),
                     "a name from the table, or a conductivity beside it");
         } else if (row.get().conductivity().isEmpty()) {
             findings.add(
@@ -138,6 +134,12 @@ final class LayerRules {
                             + row.get().conductivityFrom().orElseThrow() + " to "
                             + row.get().conductivityTo().orElseThrow() + " W/(m.K), by the maker's sheet");
         }
+    }
+
+    private static List<String> materialNames() {
+        return Materials.all().stream()
+                .flatMap(row -> Stream.concat(Stream.of(row.name()), row.alsoCalled().stream()))
+                .toList();
     }
 
     private void airGap(String pointer, Layer layer, AirGap gap) {

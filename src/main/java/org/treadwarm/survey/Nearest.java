@@ -11,10 +11,12 @@ public final class Nearest {
 
     /** The nearest of the names by the fewest letters changed, if there are any names. */
     public static Optional<String> to(String given, Collection<String> names) {
-        String shortened = given.substring(0, Math.min(given.length(), 60)).toLowerCase(Locale.ROOT);
-        return names.stream()
-                .limit(2000)
-                .min(Comparator.comparingInt(name -> distance(shortened, name.toLowerCase(Locale.ROOT))));
+        String shortened = shortened(given);
+        return names.stream().limit(2000).min(Comparator.comparingInt(name -> distance(shortened, shortened(name))));
+    }
+
+    private static String shortened(String name) {
+        return name.substring(0, Math.min(name.length(), 60)).toLowerCase(Locale.ROOT);
     }
 
     /** Letters inserted, left out or replaced (Levenshtein, 1966). */

@@ -338,14 +338,11 @@ public final class Rules {
         }
         Space space = survey.spaces().get(to);
         if (space == null && !roomNames.contains(to)) {
-            Set<String> names = new HashSet<>(roomNames);
-            names.addAll(survey.spaces().keySet());
-            names.add(Survey.OUTDOORS);
-            names.add(Survey.GROUND);
-            String nearest = Nearest.to(to, names)
-                    .map(name -> "; did you mean \"" + name + "\"?")
-                    .orElse("");
-            findings.add(pointer, to, "no room or space is called \"" + to + "\"" + nearest, sides("outdoors, ground"));
+            findings.add(
+                    pointer,
+                    to,
+                    "no room or space is called \"" + to + "\"" + findings.hint(to, this::otherSides),
+                    sides("outdoors, ground"));
         } else if (space != null && space.temperatureFactor().isPresent() && !ownerIsRoom) {
             findings.add(
                     pointer,
@@ -355,16 +352,22 @@ public final class Rules {
         }
     }
 
+    private Set<String> otherSides() {
+        Set<String> names = new HashSet<>(roomNames);
+        names.addAll(survey.spaces().keySet());
+        names.add(Survey.OUTDOORS);
+        names.add(Survey.GROUND);
+        return names;
+    }
+
     private static String sides(String fixed) {
         return fixed + ", or the name of a space or of another room";
     }
 
     private void assembly(String pointer, String name) {
         if (findings.clean(pointer) && !survey.assemblies().containsKey(name)) {
-            String nearest = Nearest.to(name, survey.assemblies().keySet())
-                    .map(known -> "; did you mean \"" + known + "\"?")
-                    .orElse("");
-            findings.add(pointer, name, "no assembly is called \"" + name + "\"" + nearest, "the name of an assembly");
+            String hint = findings.hint(name, survey.assemblies()::keySet);
+            findings.add(pointer, name, "no assembly is called \"" + name + "\"" + hint, "the name of an assembly");
         }
     }
 
