@@ -2,19 +2,82 @@ package org.treadwarm.web.pages;
 
 import io.javalin.config.RoutesConfig;
 import io.javalin.http.Context;
+import io.javalin.http.Handler;
+import io.javalin.http.HttpStatus;
+import java.net.URLEncoder;
+import java.nio.charset.StandardCharsets;
+import java.util.Map;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.store.Store;
 import org.treadwarm.web.security.Visitors;
 
-/** The routes of the pages. */
+/** The routes of the pages. All but the way in need a session; every form carries its secret. */
 public final class Pages {
-    public Pages(Store store, JobDesk desk, Visitors visitors) {}
+    private final Visitors visitors;
+    private final View view;
+    private final EntryPages entry;
+    private final JobPages jobs;
+    private final PartPages parts;
+    private final QuickPages quick;
+    private final TablePages tables = new TablePages();
+
+    public Pages(Store store, JobDesk desk, Visitors visitors) {
+        this.visitors = visitors;
+        this.view = new View(visitors);
+        this.entry = new EntryPages(store, visitors, view);
+        this.jobs = new JobPages(desk, visitors, view);
+        this.parts = new PartPages(desk, visitors, view);
+        this.quick = new QuickPages(desk, visitors, view);
+    }
 
     /** Adds the routes. */
-    public void routes(RoutesConfig routes) {}
+    public void routes(RoutesConfig routes) {
+        routes.get("/sign-in", entry::signInForm);
+        routes.post("/sign-in", form(entry::signIn));
+        routes.post("/sign-out", form(entry::signOut));
+        routes.get("/owner/{token}", entry::ownerForm);
+        routes.post("/owner/{token}", form(entry::becomeOwner));
+        routes.get("/", ctx -> ctx.redirect("/jobs", HttpStatus.SEE_OTHER));
+        routes.get("/jobs", member(jobs::list));
+        routes.post("/jobs", member(form(jobs::create)));
+        routes.get("/jobs/{job}", member(jobs::show));
+        routes.post("/jobs/{job}", member(form(jobs::change)));
+        routes.get("/jobs/{job}/{part}/{name}", member(parts::show));
+        routes.post("/jobs/{job}/{part}/{name}", member(form(parts::save)));
+        routes.post("/jobs/{job}/{part}/{name}/preview", member(form(parts::preview)));
+        routes.get("/one-room", member(quick::show));
+        routes.post("/one-room", member(form(quick::change)));
+        routes.post("/one-room/preview", member(form(quick::preview)));
+        routes.get(
+                "/materials",
+                member(ctx -> view.show(ctx, 200, "materials", tables.materials(ctx.queryParam("find")))));
+        routes.get("/reading-help", member(ctx -> view.show(ctx, 200, "reading-help", tables.readingHelp())));
+        routes.get("/method", member(ctx -> view.show(ctx, 200, "method", tables.method())));
+    }
 
-    /** Shows a fault. */
+    /** Shows a fault as a page. */
     public void fault(Context ctx, int status, String title) {
-        ctx.html("<title>" + title + "</title>");
+        view.show(ctx, status, "fault", Map.of("title", title, "status", status));
+    }
+
+    private Handler member(Handler handler) {
+        return ctx -> {
+            if (visitors.session(ctx).isEmpty()) {
+                String back = ctx.method().toString().equals("GET") ? ctx.path() : "/jobs";
+                ctx.redirect("/sign-in?back=" + URLEncoder.encode(back, StandardCharsets.UTF_8), HttpStatus.SEE_OTHER);
+            } else {
+                handler.handle(ctx);
+            }
+        };
+    }
+
+    private Handler form(Handler handler) {
+        return ctx -> {
+            if (visitors.acceptsForm(ctx)) {
+                handler.handle(ctx);
+            } else {
+                fault(ctx, 403, "This form is not one of ours, or is too old; open the page again");
+            }
+        };
     }
 }

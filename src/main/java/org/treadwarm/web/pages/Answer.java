@@ -1,0 +1,291 @@
+package org.treadwarm.web.pages;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.treadwarm.draw.Sheet;
+import org.treadwarm.jobs.Partial;
+import org.treadwarm.sizing.AssemblyEvaluation;
+import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
+import org.treadwarm.sizing.Sizing;
+import org.treadwarm.sizing.Sizing.FloorSizing;
+import org.treadwarm.sizing.Sizing.FloorState;
+import org.treadwarm.sizing.Sizing.RoomSizing;
+import org.treadwarm.sizing.Sizing.SpaceSizing;
+import org.treadwarm.sizing.Sizing.Warning;
+import org.treadwarm.sizing.Verdict;
+import org.treadwarm.survey.Assembly;
+import org.treadwarm.survey.Room;
+import org.treadwarm.survey.Survey;
+import org.treadwarm.units.Numbers;
+
+/** What stands beside a form: the verdict, the drawings and the numbers of a part, as the document is now. */
+final class Answer {
+    private static final double INDOORS = 20;
+    private static final double HUMIDITY = 0.5;
+
+    private final Map<String, Object> model = new HashMap<>();
+
+    private Answer() {}
+
+    /** A line of numbers. */
+    public record Line(String name, String value, String note) {}
+
+    static Map<String, Object> of(JsonNode document, Part part) {
+        Partial partial = Partial.of(document);
+        Answer answer = new Answer();
+        answer.model.put("waiting", partial.judgement().problems().size());
+        answer.model.put(
+                "own",
+                partial.judgement().problems().stream()
+                        .filter(problem -> part.holds(problem.pointer()))
+                        .count());
+        answer.model.put("unfinished", partial.unfinished());
+        answer.model.put("verdict", "");
+        answer.model.put("pictures", List.of());
+        answer.model.put("lines", List.of());
+        answer.model.put("warnings", List.of());
+        answer.model.put("cautions", List.of());
+        answer.model.put("working", List.of());
+        if (part.isAssembly()) {
+            answer.assembly(document, part);
+        } else if (partial.judgement().sizing().isPresent()) {
+            Survey survey = partial.judgement().survey().orElseThrow();
+            Sizing sizing = partial.judgement().sizing().get();
+            if (part.isRoom()) {
+                answer.room(survey, sizing, part);
+            } else {
+                answer.space(sizing, part);
+            }
+        }
+        return answer.model;
+    }
+
+    private void room(Survey survey, Sizing sizing, Part part) {
+        for (int i = 0; i < sizing.rooms().size(); i++) {
+            RoomSizing answer = sizing.rooms().get(i);
+            if (answer.name().equals(part.title().strip())) {
+                room(survey, survey.rooms().get(i), sizing, i);
+            }
+        }
+    }
+
+    private void room(Survey survey, Room room, Sizing sizing, int index) {
+        RoomSizing answer = sizing.rooms().get(index);
+        FloorSizing floor = answer.floor();
+        model.put("verdict", verdict(floor));
+        model.put(
+                "mark",
+                floor.verdict() == Verdict.CARRIES
+                        ? "carries"
+                        : floor.verdict() == Verdict.NO_HEATED_FLOOR ? "none" : "short");
+        List<Picture> pictures = new ArrayList<>();
+        add(pictures, "Heat out, and heat from the floor", "balance", sheet -> Pictures.balance(answer, sheet));
+        add(pictures, "What the floor must give and may give", "limits", sheet -> Pictures.limits(answer, sheet));
+        add(pictures, "The heated floor in section", "floor", sheet -> Pictures.floor(room, answer, sheet));
+        model.put("pictures", pictures);
+        model.put("lines", lines(answer));
+        model.put(
+                "paths",
+                answer.heatLoss().paths().stream()
+                        .map(path -> new Line(
+                                path.name() + path.to().map(to -> " to " + to).orElse(""),
+                                Numbers.grouped(path.heatFlow()) + " W",
+                                pathNote(path)))
+                        .toList());
+        String pointer = "/rooms/" + index;
+        model.put(
+                "warnings",
+                sizing.warnings().stream()
+                        .filter(warning -> warning.pointer().equals(pointer)
+                                || warning.pointer().startsWith(pointer + "/"))
+                        .toList());
+        model.put("cautions", answer.cautions());
+        model.put("working", WorkingView.of(survey, sizing, pointer));
+    }
+
+    private static String pathNote(Sizing.PathLoss path) {
+        StringBuilder note = new StringBuilder();
+        path.area().ifPresent(area -> note.append(Numbers.fixed(area, 2)).append(" m2"));
+        path.uValue()
+                .ifPresent(u -> note.append(", U ").append(Numbers.fixed(u, 3)).append(" W/(m2.K)"));
+        path.temperatureDifference()
+                .ifPresent(difference -> note.append(note.length() > 0 ? ", " : "")
+                        .append(Numbers.fixed(difference, 1))
+                        .append(" K"));
+        return note.toString();
+    }
+
+    private static String verdict(FloorSizing floor) {
+        if (floor.verdict() == Verdict.NO_HEATED_FLOOR) {
+            return "No heated floor";
+        }
+        String margin = Numbers.fixed(Math.abs(floor.margin().orElseThrow()), 1) + " W/m2";
+        return floor.verdict() == Verdict.CARRIES
+                ? "The floor carries this room, with " + margin + " to spare"
+                : "The floor is short by " + margin + ": something else must add "
+                        + Numbers.grouped(floor.supplement().orElseThrow()) + " W";
+    }
+
+    private static List<Line> lines(RoomSizing answer) {
+        FloorSizing floor = answer.floor();
+        List<Line> lines = new ArrayList<>();
+        lines.add(new Line("Heat loss", Numbers.grouped(answer.heatLoss().total()) + " W", ""));
+        if (floor.verdict() == Verdict.NO_HEATED_FLOOR) {
+            return lines;
+        }
+        flux(lines, "Required flux", floor.requiredFlux(), "upward, on the design day");
+        flux(lines, "Carrying flux", floor.carryingFlux(), "the lowest limit");
+        flux(
+                lines,
+                "Margin",
+                floor.margin(),
+                floor.marginShare().isPresent()
+                        ? Numbers.fixed(100 * floor.marginShare().getAsDouble(), 0) + " % of the required flux"
+                        : "");
+        floor.holdsDownTo()
+                .ifPresent(cold -> lines.add(new Line("Holds down to", Numbers.fixed(cold, 1) + " °C", "outdoors")));
+        floor.holdsDownToReason()
+                .ifPresent(reason -> lines.add(
+                        new Line("Holds down to", reason.equals("never") ? "never" : "below -60 °C", "outdoors")));
+        if (floor.verdict() == Verdict.CARRIES) {
+            state(
+                    lines,
+                    "",
+                    new FloorState(
+                            floor.surfaceTemperature().orElseThrow(),
+                            floor.heaterTemperature().orElseThrow(),
+                            floor.downwardFlux().orElseThrow(),
+                            floor.edgeFlux().orElseThrow(),
+                            floor.heaterFlux().orElseThrow(),
+                            floor.heaterPower().orElseThrow()));
+        } else {
+            state(lines, "at the carrying flux", floor.atCarryingFlux().orElseThrow());
+            lines.add(new Line(
+                    "What it would take",
+                    Numbers.grouped(floor.heaterPower().orElseThrow()) + " W",
+                    "from the heater, with a surface of "
+                            + Numbers.fixed(floor.surfaceTemperature().orElseThrow(), 1) + " °C"));
+        }
+        floor.installedPower()
+                .ifPresent(power -> lines.add(new Line("Installed power", Numbers.grouped(power) + " W", "")));
+        floor.buildUpHeight()
+                .ifPresent(height ->
+                        lines.add(new Line("Build-up height", Numbers.fixed(1000 * height, 0) + " mm", "")));
+        floor.load().ifPresent(load -> lines.add(new Line("Dead load", Numbers.fixed(load, 0) + " kg/m2", "")));
+        answer.fromFloorAbove()
+                .ifPresent(heat ->
+                        lines.add(new Line("From the floor above", Numbers.grouped(heat) + " W", "not counted")));
+        return lines;
+    }
+
+    private static void flux(List<Line> lines, String name, OptionalDouble flux, String note) {
+        flux.ifPresent(value -> lines.add(new Line(name, Numbers.fixed(value, 1) + " W/m2", note)));
+    }
+
+    private static void state(List<Line> lines, String note, FloorState state) {
+        lines.add(new Line("Mean surface temperature", Numbers.fixed(state.surfaceTemperature(), 1) + " °C", note));
+        lines.add(new Line("Heater plane", Numbers.fixed(state.heaterTemperature(), 1) + " °C", note));
+        lines.add(new Line("Downward flux", Numbers.fixed(state.downwardFlux(), 1) + " W/m2", note));
+        if (state.edgeFlux() != 0) {
+            lines.add(new Line("Edge flux", Numbers.fixed(state.edgeFlux(), 1) + " W/m2", note));
+        }
+        lines.add(new Line("Heater power", Numbers.grouped(state.heaterPower()) + " W", note));
+    }
+
+    private void space(Sizing sizing, Part part) {
+        Optional<SpaceSizing> found = sizing.spaces().stream()
+                .filter(space -> space.name().equals(part.key().strip()))
+                .findFirst();
+        found.ifPresent(space -> {
+            model.put("verdict", "Settles at " + Numbers.fixed(space.temperature(), 1) + " °C on the design day");
+            model.put("mark", "none");
+            model.put(
+                    "paths",
+                    space.paths().stream()
+                            .map(path -> new Line(
+                                    path.name()
+                                            + path.to().map(to -> " to " + to).orElse(""),
+                                    Numbers.grouped(path.heatFlow()) + " W",
+                                    pathNote(path)))
+                            .toList());
+        });
+    }
+
+    private void assembly(JsonNode document, Part part) {
+        Optional<Assembly> read = Excerpt.assembly(document.at(part.pointer()));
+        if (read.isEmpty()) {
+            return;
+        }
+        double outdoor = Excerpt.outdoorTemperature(document).orElse(-5);
+        Assembly assembly = read.get();
+        AssemblyEvaluation answer = AssemblyEvaluation.of(assembly, new Conditions(true, INDOORS, outdoor, HUMIDITY));
+        model.put("verdict", "U " + Numbers.fixed(answer.uValue(), 3) + " W/(m2.K) towards outdoors");
+        model.put("mark", "none");
+        List<Picture> pictures = new ArrayList<>();
+        add(
+                pictures,
+                "Layers to scale, and the temperature through them",
+                "layers",
+                sheet -> Pictures.assembly(part.title(), assembly, answer, sheet));
+        model.put("pictures", pictures);
+        model.put("lines", assemblyLines(answer));
+        model.put(
+                "paths",
+                answer.interfaces().stream()
+                        .map(each -> new Line(each.name(), Numbers.fixed(each.temperature(), 1) + " °C", ""))
+                        .toList());
+        List<Warning> warnings = new ArrayList<>();
+        if (answer.temperatureFactor() < 0.7) {
+            warnings.add(new Warning(
+                    "cold-surface",
+                    part.pointer(),
+                    "The inside surface is cold: f_Rsi is " + Numbers.fixed(answer.temperatureFactor(), 2) + ".",
+                    "Below 0.70 mould is likely in a dwelling at 20 °C and 50 % (ISO 13788 and DIN 4108-2, from memory).",
+                    "Insulate it, or keep the room drier."));
+        }
+        model.put("warnings", warnings);
+    }
+
+    private static List<Line> assemblyLines(AssemblyEvaluation answer) {
+        List<Line> lines = new ArrayList<>();
+        lines.add(new Line("U-value", Numbers.fixed(answer.uValue(), 3) + " W/(m2.K)", "1/R"));
+        lines.add(new Line("Resistance R", Numbers.fixed(answer.resistance(), 3) + " m2.K/W", "films included"));
+        answer.upperLimit()
+                .ifPresent(upper -> lines.add(
+                        new Line("Upper limit R'", Numbers.fixed(upper, 3) + " m2.K/W", "paths side by side")));
+        answer.lowerLimit()
+                .ifPresent(lower ->
+                        lines.add(new Line("Lower limit R''", Numbers.fixed(lower, 3) + " m2.K/W", "layers averaged")));
+        answer.largestRelativeError()
+                .ifPresent(error -> lines.add(new Line(
+                        "Largest error", Numbers.fixed(100 * error, 1) + " %", "of the combined method, ISO 6946")));
+        lines.add(new Line("Inside film Rsi", Numbers.fixed(answer.insideFilm(), 2) + " m2.K/W", ""));
+        lines.add(new Line("Outside film Rse", Numbers.fixed(answer.outsideFilm(), 2) + " m2.K/W", ""));
+        lines.add(new Line(
+                "Temperature factor f_Rsi",
+                Numbers.fixed(answer.temperatureFactor(), 2),
+                "with Rsi 0.25; 0.70 and more is wanted"));
+        lines.add(new Line("Dew point indoors", Numbers.fixed(answer.dewPoint(), 1) + " °C", "at 20 °C and 50 %"));
+        return lines;
+    }
+
+    /** A drawing in two widths: one for a desk or a tablet, one for a narrow column. */
+    public record Picture(String title, String wide, String narrow) {}
+
+    private static void add(
+            List<Picture> pictures,
+            String title,
+            String id,
+            java.util.function.Function<Sheet, Optional<String>> draw) {
+        Optional<String> wide = draw.apply(new Sheet("w-" + id, 620));
+        Optional<String> narrow = draw.apply(Sheet.narrow("n-" + id));
+        if (wide.isPresent() && narrow.isPresent()) {
+            pictures.add(new Picture(title, wide.get(), narrow.get()));
+        }
+    }
+}

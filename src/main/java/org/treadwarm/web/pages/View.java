@@ -1,0 +1,39 @@
+package org.treadwarm.web.pages;
+
+import io.javalin.http.Context;
+import java.util.HashMap;
+import java.util.Locale;
+import java.util.Map;
+import org.thymeleaf.TemplateEngine;
+import org.thymeleaf.templatemode.TemplateMode;
+import org.thymeleaf.templateresolver.ClassLoaderTemplateResolver;
+import org.treadwarm.store.Session;
+import org.treadwarm.web.security.Visitors;
+
+/** Renders templates with what every page needs: who is signed in, and the secret of its forms. */
+final class View {
+    private final TemplateEngine engine = new TemplateEngine();
+    private final Visitors visitors;
+
+    View(Visitors visitors) {
+        this.visitors = visitors;
+        ClassLoaderTemplateResolver resolver = new ClassLoaderTemplateResolver(View.class.getClassLoader());
+        resolver.setPrefix("templates/");
+        resolver.setSuffix(".html");
+        resolver.setTemplateMode(TemplateMode.HTML);
+        resolver.setCharacterEncoding("UTF-8");
+        resolver.setCacheable(true);
+        engine.setTemplateResolver(resolver);
+    }
+
+    /** Answers with a page. */
+    void show(Context ctx, int status, String template, Map<String, Object> model) {
+        Map<String, Object> all = new HashMap<>(model);
+        all.put("csrf", visitors.formSecret(ctx));
+        all.put("person", visitors.session(ctx).map(Session::person).orElse(null));
+        all.put("path", ctx.path());
+        ctx.status(status);
+        ctx.contentType("text/html; charset=utf-8");
+        ctx.result(engine.process(template, new org.thymeleaf.context.Context(Locale.ENGLISH, all)));
+    }
+}
