@@ -239,6 +239,7 @@ final class PlanBuilder {
         int other = nodes.get(surface.to());
         int area = extent(pointer, surface.area(), surface.width());
         int second = inputs.optional(pointer + "/height", surface.height());
+        // A given U-value already holds the slab, so what the survey says of it has no effect.
         boolean groundCounts =
                 survey.assemblies().get(surface.assembly()).uValue().isEmpty();
         int ground = surface.ground().isPresent() && groundCounts
