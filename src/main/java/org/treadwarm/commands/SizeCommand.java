@@ -1,5 +1,6 @@
 package org.treadwarm.commands;
 
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
@@ -10,10 +11,13 @@ import java.util.concurrent.Callable;
 import org.treadwarm.intake.Document;
 import org.treadwarm.intake.NotJsonException;
 import org.treadwarm.jobs.Judgement;
+import org.treadwarm.sizing.Sizing;
 import org.treadwarm.survey.Problem;
+import org.treadwarm.survey.Survey;
 import org.treadwarm.wire.Json;
 import org.treadwarm.wire.PlainSheet;
 import org.treadwarm.wire.ProblemDocument;
+import org.treadwarm.wire.WorkingAnswer;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
@@ -32,6 +36,9 @@ public final class SizeCommand implements Callable<Integer> {
 
     @Option(names = "--plain", description = "print a readable sheet instead of JSON")
     private boolean plain;
+
+    @Option(names = "--working", description = "add the working: formula, source and inputs of every number")
+    private boolean working;
 
     @Override
     public Integer call() throws IOException {
@@ -64,18 +71,26 @@ public final class SizeCommand implements Callable<Integer> {
                 return refused(ProblemDocument.invalid(judged.problems()));
             }
             return new Outcome(
-                    false,
-                    plain
-                            ? PlainSheet.of(
-                                            judged.survey().orElseThrow(),
-                                            judged.sizing().get())
-                                    .getBytes(StandardCharsets.UTF_8)
-                            : Json.bytes(judged.sizing().get()));
+                    false, answer(judged.survey().orElseThrow(), judged.sizing().get()));
         } catch (NotJsonException e) {
             return refused(ProblemDocument.notJson(e.problem()));
         } catch (IOException | java.nio.file.InvalidPathException e) {
             return refused(ProblemDocument.notJson(new Problem("", file, "this file cannot be read", "a survey file")));
         }
+    }
+
+    private byte[] answer(Survey survey, Sizing sizing) {
+        if (plain) {
+            String sheet = PlainSheet.of(survey, sizing);
+            return (working ? sheet + "\n\n" + PlainSheet.working(survey, sizing) : sheet)
+                    .getBytes(StandardCharsets.UTF_8);
+        }
+        if (!working) {
+            return Json.bytes(sizing);
+        }
+        ObjectNode answer = (ObjectNode) Json.tree(sizing);
+        answer.set("working", Json.tree(WorkingAnswer.of(survey, sizing)));
+        return Json.bytes(answer);
     }
 
     private static Outcome refused(ProblemDocument problem) {

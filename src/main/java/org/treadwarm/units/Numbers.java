@@ -36,4 +36,9 @@ public final class Numbers {
         }
         return number < 0 && !digits.equals("0") ? "-" + text : text.toString();
     }
+
+    /** A unit as print has it: raised exponents and a dot for the product. */
+    public static String printed(String unit) {
+        return unit.replace("m2", "m²").replace("m3", "m³").replace('.', '·');
+    }
 }

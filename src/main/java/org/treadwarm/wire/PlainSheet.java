@@ -1,5 +1,6 @@
 package org.treadwarm.wire;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -31,6 +32,19 @@ public final class PlainSheet {
         sheet.head(survey, sizing);
         sizing.rooms().forEach(sheet::room);
         sheet.tail(sizing);
+        return sheet.text.toString().stripTrailing();
+    }
+
+    /** The working of a sizing as readable text. */
+    public static String working(Survey survey, Sizing sizing) {
+        PlainSheet sheet = new PlainSheet();
+        sheet.line("WORKING: every number, its formula and source, and the addresses of what went in");
+        JsonNode answer = Json.tree(sizing);
+        for (WorkingAnswer step : WorkingAnswer.of(survey, sizing)) {
+            sheet.line("%s = %s", step.address(), answer.at(step.address()).asText());
+            sheet.line("    %s  [%s]", step.formula(), step.source());
+            step.symbols().forEach((symbol, from) -> sheet.line("    %s: %s", symbol, String.join(", ", from)));
+        }
         return sheet.text.toString().stripTrailing();
     }
 

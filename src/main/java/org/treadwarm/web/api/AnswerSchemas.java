@@ -95,6 +95,13 @@ final class AnswerSchemas {
         }
     }
 
+    /** Adds a list to a schema that is there only when it was asked for. */
+    void addOptionalList(Class<?> type, String name, Class<?> items) {
+        ObjectNode properties = (ObjectNode) schemas.path(type.getSimpleName()).path("properties");
+        ObjectNode property = properties.putObject(name).put("type", "array");
+        property.putObject("items").put("$ref", "#/components/schemas/" + items.getSimpleName());
+    }
+
     private boolean property(ObjectNode property, RecordComponent component) {
         Class<?> type = component.getType();
         if (type == OptionalDouble.class) {
@@ -104,6 +111,11 @@ final class AnswerSchemas {
         if (type == Optional.class) {
             held(property, argument(component.getGenericType()), component.getName());
             return true;
+        }
+        if (type == Map.class) {
+            ObjectNode lists = property.put("type", "object").putObject("additionalProperties");
+            lists.put("type", "array").putObject("items").put("type", "string");
+            return false;
         }
         if (type == List.class) {
             property.put("type", "array");

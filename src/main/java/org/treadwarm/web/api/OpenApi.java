@@ -12,6 +12,7 @@ import org.treadwarm.sizing.Sizing;
 import org.treadwarm.survey.Survey;
 import org.treadwarm.tables.Material;
 import org.treadwarm.wire.ProblemDocument;
+import org.treadwarm.wire.WorkingAnswer;
 
 /**
  * The description of the API: the routes as written in the file, the schemas made from the declarations that read and write
@@ -30,6 +31,8 @@ final class OpenApi {
             new SurveySchemas(schemas).add(AssemblyQuestion.class);
             AnswerSchemas answers = new AnswerSchemas(schemas);
             answers.add(Sizing.class);
+            answers.add(WorkingAnswer.class);
+            answers.addOptionalList(Sizing.class, "working", WorkingAnswer.class);
             answers.add(AssemblyEvaluation.class);
             answers.add(ProblemDocument.class);
             answers.add(Material.class);

@@ -39,7 +39,16 @@ final class SizingApi {
             Problems.invalid(ctx, judged.problems());
             return;
         }
-        json(ctx, 200, judged.sizing().get());
+        if ("true".equals(ctx.queryParam("working"))) {
+            ObjectNode answer = (ObjectNode) Json.tree(judged.sizing().get());
+            answer.set(
+                    "working",
+                    Json.tree(WorkingAnswer.of(
+                            judged.survey().orElseThrow(), judged.sizing().get())));
+            json(ctx, 200, answer);
+        } else {
+            json(ctx, 200, judged.sizing().get());
+        }
     }
 
     /** {@code POST /api/v1/assemblies/evaluations}: one assembly under given temperatures. */
@@ -78,9 +87,5 @@ final class SizingApi {
         ctx.status(status);
         ctx.contentType("application/json; charset=utf-8");
         ctx.result(Json.bytes(answer));
-    }
-
-    static void json(Context ctx, int status, ObjectNode answer) {
-        json(ctx, status, (Object) answer);
     }
 }

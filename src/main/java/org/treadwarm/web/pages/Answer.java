@@ -110,9 +110,9 @@ final class Answer {
 
     private static String pathNote(Sizing.PathLoss path) {
         StringBuilder note = new StringBuilder();
-        path.area().ifPresent(area -> note.append(Numbers.fixed(area, 2)).append(" m2"));
+        path.area().ifPresent(area -> note.append(Numbers.fixed(area, 2)).append(" m²"));
         path.uValue()
-                .ifPresent(u -> note.append(", U ").append(Numbers.fixed(u, 3)).append(" W/(m2.K)"));
+                .ifPresent(u -> note.append(", U ").append(Numbers.fixed(u, 3)).append(" W/(m²·K)"));
         path.temperatureDifference()
                 .ifPresent(difference -> note.append(note.length() > 0 ? ", " : "")
                         .append(Numbers.fixed(difference, 1))
@@ -124,7 +124,7 @@ final class Answer {
         if (floor.verdict() == Verdict.NO_HEATED_FLOOR) {
             return "No heated floor";
         }
-        String margin = Numbers.fixed(Math.abs(floor.margin().orElseThrow()), 1) + " W/m2";
+        String margin = Numbers.fixed(Math.abs(floor.margin().orElseThrow()), 1) + " W/m²";
         return floor.verdict() == Verdict.CARRIES
                 ? "The floor carries this room, with " + margin + " to spare"
                 : "The floor is short by " + margin + ": something else must add "
@@ -176,7 +176,7 @@ final class Answer {
         floor.buildUpHeight()
                 .ifPresent(height ->
                         lines.add(new Line("Build-up height", Numbers.fixed(1000 * height, 0) + " mm", "")));
-        floor.load().ifPresent(load -> lines.add(new Line("Dead load", Numbers.fixed(load, 0) + " kg/m2", "")));
+        floor.load().ifPresent(load -> lines.add(new Line("Dead load", Numbers.fixed(load, 0) + " kg/m²", "")));
         answer.fromFloorAbove()
                 .ifPresent(heat ->
                         lines.add(new Line("From the floor above", Numbers.grouped(heat) + " W", "not counted")));
@@ -184,15 +184,15 @@ final class Answer {
     }
 
     private static void flux(List<Line> lines, String name, OptionalDouble flux, String note) {
-        flux.ifPresent(value -> lines.add(new Line(name, Numbers.fixed(value, 1) + " W/m2", note)));
+        flux.ifPresent(value -> lines.add(new Line(name, Numbers.fixed(value, 1) + " W/m²", note)));
     }
 
     private static void state(List<Line> lines, String note, FloorState state) {
         lines.add(new Line("Mean surface temperature", Numbers.fixed(state.surfaceTemperature(), 1) + " °C", note));
         lines.add(new Line("Heater plane", Numbers.fixed(state.heaterTemperature(), 1) + " °C", note));
-        lines.add(new Line("Downward flux", Numbers.fixed(state.downwardFlux(), 1) + " W/m2", note));
+        lines.add(new Line("Downward flux", Numbers.fixed(state.downwardFlux(), 1) + " W/m²", note));
         if (state.edgeFlux() != 0) {
-            lines.add(new Line("Edge flux", Numbers.fixed(state.edgeFlux(), 1) + " W/m2", note));
+            lines.add(new Line("Edge flux", Numbers.fixed(state.edgeFlux(), 1) + " W/m²", note));
         }
         lines.add(new Line("Heater power", Numbers.grouped(state.heaterPower()) + " W", note));
     }
@@ -224,7 +224,7 @@ final class Answer {
         double outdoor = Excerpt.outdoorTemperature(document).orElse(-5);
         Assembly assembly = read.get();
         AssemblyEvaluation answer = AssemblyEvaluation.of(assembly, new Conditions(true, INDOORS, outdoor, HUMIDITY));
-        model.put("verdict", "U " + Numbers.fixed(answer.uValue(), 3) + " W/(m2.K) towards outdoors");
+        model.put("verdict", "U " + Numbers.fixed(answer.uValue(), 3) + " W/(m²·K) towards outdoors");
         model.put("mark", "none");
         List<Picture> pictures = new ArrayList<>();
         add(
@@ -253,19 +253,19 @@ final class Answer {
 
     private static List<Line> assemblyLines(AssemblyEvaluation answer) {
         List<Line> lines = new ArrayList<>();
-        lines.add(new Line("U-value", Numbers.fixed(answer.uValue(), 3) + " W/(m2.K)", "1/R"));
-        lines.add(new Line("Resistance R", Numbers.fixed(answer.resistance(), 3) + " m2.K/W", "films included"));
+        lines.add(new Line("U-value", Numbers.fixed(answer.uValue(), 3) + " W/(m²·K)", "1/R"));
+        lines.add(new Line("Resistance R", Numbers.fixed(answer.resistance(), 3) + " m²·K/W", "films included"));
         answer.upperLimit()
                 .ifPresent(upper -> lines.add(
-                        new Line("Upper limit R'", Numbers.fixed(upper, 3) + " m2.K/W", "paths side by side")));
+                        new Line("Upper limit R'", Numbers.fixed(upper, 3) + " m²·K/W", "paths side by side")));
         answer.lowerLimit()
                 .ifPresent(lower ->
-                        lines.add(new Line("Lower limit R''", Numbers.fixed(lower, 3) + " m2.K/W", "layers averaged")));
+                        lines.add(new Line("Lower limit R''", Numbers.fixed(lower, 3) + " m²·K/W", "layers averaged")));
         answer.largestRelativeError()
                 .ifPresent(error -> lines.add(new Line(
                         "Largest error", Numbers.fixed(100 * error, 1) + " %", "of the combined method, ISO 6946")));
-        lines.add(new Line("Inside film Rsi", Numbers.fixed(answer.insideFilm(), 2) + " m2.K/W", ""));
-        lines.add(new Line("Outside film Rse", Numbers.fixed(answer.outsideFilm(), 2) + " m2.K/W", ""));
+        lines.add(new Line("Inside film Rsi", Numbers.fixed(answer.insideFilm(), 2) + " m²·K/W", ""));
+        lines.add(new Line("Outside film Rse", Numbers.fixed(answer.outsideFilm(), 2) + " m²·K/W", ""));
         lines.add(new Line(
                 "Temperature factor f_Rsi",
                 Numbers.fixed(answer.temperatureFactor(), 2),
@@ -282,7 +282,7 @@ final class Answer {
             String title,
             String id,
             java.util.function.Function<Sheet, Optional<String>> draw) {
-        Optional<String> wide = draw.apply(new Sheet("w-" + id, 620));
+        Optional<String> wide = draw.apply(new Sheet("w-" + id, 560));
         Optional<String> narrow = draw.apply(Sheet.narrow("n-" + id));
         if (wide.isPresent() && narrow.isPresent()) {
             pictures.add(new Picture(title, wide.get(), narrow.get()));

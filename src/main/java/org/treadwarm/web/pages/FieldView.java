@@ -1,6 +1,7 @@
 package org.treadwarm.web.pages;
 
 import java.util.List;
+import org.treadwarm.units.Numbers;
 
 /**
  * One field of a form.
@@ -39,6 +40,11 @@ public record FieldView(
         String suggestions) {
     /** One thing to choose: the word in the document, and its words on the page. */
     public record Choice(String value, String label, boolean chosen) {}
+
+    /** The unit as print has it. */
+    public String printedUnit() {
+        return Numbers.printed(unit);
+    }
 
     /** The ids of what describes the field to a screen reader. */
     public String describedBy() {

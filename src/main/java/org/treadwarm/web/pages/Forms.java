@@ -46,6 +46,22 @@ final class Forms {
             org.treadwarm.survey.Site.class,
             Assembly.class,
             Space.class);
+    private static final Set<String> SELDOM = Set.of(
+            "reheat",
+            "allowance",
+            "otherHeat",
+            "remark",
+            "reference",
+            "surveyedBy",
+            "surveyedOn",
+            "altitude",
+            "groundSeasonFactor",
+            "groundwaterFactor",
+            "dimensions",
+            "insideCoefficient",
+            "outsideCoefficient",
+            "maximumTemperature",
+            "spacing");
     private static final Map<String, String> ADD = Map.ofEntries(
             Map.entry("surfaces", "Add a surface"),
             Map.entry("openings", "Add an opening"),
@@ -115,8 +131,9 @@ final class Forms {
             boolean removable,
             String owner) {
         List<FieldView> fields = new ArrayList<>();
+        List<FieldView> more = new ArrayList<>();
         List<PartView> parts = new ArrayList<>();
-        List<FieldView> last = new ArrayList<>();
+        int before = errors.size();
         String error = takeError(pointer, title);
         for (Shape.Key each : Shape.of(type).keys().values()) {
             String at = Pointer.to(pointer, each.name());
@@ -130,12 +147,35 @@ final class Forms {
                     fields.add(field(node.path(each.name()).path(i), each, Pointer.to(at, i), title));
                 }
             } else {
-                (each.name().equals("remark") ? last : fields).add(field(node.path(each.name()), each, at, title));
+                (SELDOM.contains(each.name()) ? more : fields).add(field(node.path(each.name()), each, at, title));
             }
         }
-        fields.addAll(last);
+        boolean wrong = errors.size() > before;
         return new ObjectView(
-                pointer, id(pointer), key, title, List.copyOf(fields), List.copyOf(parts), removable, error);
+                pointer,
+                id(pointer),
+                key,
+                title,
+                Facts.of(node, type),
+                List.copyOf(fields),
+                List.copyOf(more),
+                more.stream().anyMatch(Forms::isUsed),
+                List.copyOf(parts),
+                removable,
+                error,
+                wrong || isNew(node));
+    }
+
+    private static boolean isUsed(FieldView field) {
+        boolean chosen = field.choices().stream()
+                .anyMatch(choice -> choice.chosen() && field.choices().indexOf(choice) > 0);
+        return !field.error().isEmpty()
+                || field.choices().isEmpty() && !field.value().isEmpty()
+                || chosen;
+    }
+
+    private static boolean isNew(JsonNode node) {
+        return node.isEmpty() || node.size() == 1 && node.has("id");
     }
 
     private boolean isShown(Shape.Key key, Class<?> type, JsonNode node) {

@@ -141,7 +141,7 @@ final class JobPages {
         List<TotalRow> rows = new ArrayList<>();
         rows.add(new TotalRow(
                 "Heat loss of the rooms", Numbers.grouped(sizing.total().heatLoss()) + " W"));
-        rows.add(new TotalRow("Heated area", Numbers.fixed(sizing.total().heatedArea(), 1) + " m2"));
+        rows.add(new TotalRow("Heated area", Numbers.fixed(sizing.total().heatedArea(), 1) + " m²"));
         rows.add(new TotalRow(
                 "Heater power at the required flux",
                 Numbers.grouped(sizing.total().heaterPower()) + " W"));
@@ -243,7 +243,7 @@ final class JobPages {
                 .filter(side -> side.uValue().isPresent())
                 .findFirst()
                 .map(side ->
-                        ", U " + Numbers.fixed(side.uValue().orElseThrow(), 3) + " W/(m2.K) towards " + side.side());
+                        ", U " + Numbers.fixed(side.uValue().orElseThrow(), 3) + " W/(m²·K) towards " + side.side());
     }
 
     void change(Context ctx) {

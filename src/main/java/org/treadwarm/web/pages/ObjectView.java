@@ -9,20 +9,28 @@ import java.util.List;
  * @param id its id in the page
  * @param key what it is, such as surfaces or heatedFloor
  * @param title its heading
+ * @param facts what it is in a few words, for when it is folded
  * @param fields its fields
+ * @param more fields that are seldom needed
+ * @param moreOpen whether any of those holds something
  * @param parts objects and lists within it, in order
  * @param removable whether it can be taken out
  * @param error what is wrong with it as a whole; empty for nothing
+ * @param open whether to unfold it at once: something in it is wrong, or it is new
  */
 public record ObjectView(
         String pointer,
         String id,
         String key,
         String title,
+        String facts,
         List<FieldView> fields,
+        List<FieldView> more,
+        boolean moreOpen,
         List<PartView> parts,
         boolean removable,
-        String error) {
+        String error,
+        boolean open) {
     /**
      * A part of an object: one object, a list of them, or the offer to add one.
      *

@@ -55,6 +55,11 @@ public record Part(String kind, String key, String title, String pointer, Class<
         return address.equals(pointer) || address.startsWith(pointer + "/");
     }
 
+    /** The heading of its form. */
+    String formTitle() {
+        return isRoom() ? "Room" : isAssembly() ? "Build-up" : "Space";
+    }
+
     /** Whether it is a room. */
     public boolean isRoom() {
         return kind.equals("rooms");

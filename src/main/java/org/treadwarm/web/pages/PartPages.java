@@ -58,7 +58,7 @@ final class PartPages {
         model.put("jobName", job.name());
         model.put("revision", revision);
         model.put("part", part);
-        model.put("form", forms.form(part.pointer(), part.title(), part.type()));
+        model.put("form", forms.form(part.pointer(), part.formTitle(), part.type()));
         model.put("errors", forms.errors());
         model.put("notice", notice);
         model.put("action", Links.part(job.id(), part.kind(), part.key()));

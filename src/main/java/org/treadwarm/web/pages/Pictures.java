@@ -32,7 +32,6 @@ import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Survey;
-import org.treadwarm.units.Numbers;
 import org.treadwarm.units.Reading;
 
 /** From answers to drawings. */

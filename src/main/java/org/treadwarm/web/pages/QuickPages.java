@@ -54,7 +54,7 @@ final class QuickPages {
         Map<String, Object> model = new HashMap<>();
         model.put("part", part);
         model.put("site", forms.form(SITE, "Site", Site.class));
-        model.put("form", forms.form(part.pointer(), "One room", part.type()));
+        model.put("form", forms.form(part.pointer(), part.formTitle(), part.type()));
         model.put("errors", forms.errors());
         model.put("notice", notice);
         model.put("action", "/one-room");
