@@ -16,6 +16,7 @@ import org.treadwarm.tables.Materials;
 import org.treadwarm.web.Problems;
 import org.treadwarm.web.security.KeyGuard;
 import org.treadwarm.wire.Json;
+import org.treadwarm.wire.WorkingAnswer;
 
 /** Answers that keep nothing: sizings, evaluations of assemblies, the materials table. */
 final class SizingApi {

@@ -94,7 +94,7 @@ final class Answer {
                 answer.heatLoss().paths().stream()
                         .map(path -> new Line(
                                 path.name() + path.to().map(to -> " to " + to).orElse(""),
-                                Numbers.grouped(path.heatFlow()) + " W",
+                                watts(path.heatFlow()),
                                 pathNote(path)))
                         .toList());
         String pointer = "/rooms/" + index;
@@ -127,14 +127,28 @@ final class Answer {
         String margin = Numbers.fixed(Math.abs(floor.margin().orElseThrow()), 1) + " W/m²";
         return floor.verdict() == Verdict.CARRIES
                 ? "The floor carries this room, with " + margin + " to spare"
-                : "The floor is short by " + margin + ": something else must add "
-                        + Numbers.grouped(floor.supplement().orElseThrow()) + " W";
+                : "The floor is short by " + margin + ": " + shortfall(floor);
+    }
+
+    /** Watts that no line break tears apart. */
+    private static String watts(double heat) {
+        return Numbers.grouped(heat).replace(' ', '\u00a0') + "\u00a0W";
+    }
+
+    private static String shortfall(FloorSizing floor) {
+        double missing = floor.shortfall().orElseThrow();
+        double supplement = floor.supplement().orElseThrow();
+        String left = "something else must add " + watts(supplement);
+        return supplement == missing
+                ? left
+                : "of the missing " + watts(missing) + ", heat that stays covers " + watts(missing - supplement) + "; "
+                        + left;
     }
 
     private static List<Line> lines(RoomSizing answer) {
         FloorSizing floor = answer.floor();
         List<Line> lines = new ArrayList<>();
-        lines.add(new Line("Heat loss", Numbers.grouped(answer.heatLoss().total()) + " W", ""));
+        lines.add(new Line("Heat loss", watts(answer.heatLoss().total()), ""));
         if (floor.verdict() == Verdict.NO_HEATED_FLOOR) {
             return lines;
         }
@@ -167,19 +181,17 @@ final class Answer {
             state(lines, "at the carrying flux", floor.atCarryingFlux().orElseThrow());
             lines.add(new Line(
                     "What it would take",
-                    Numbers.grouped(floor.heaterPower().orElseThrow()) + " W",
+                    watts(floor.heaterPower().orElseThrow()),
                     "from the heater, with a surface of "
                             + Numbers.fixed(floor.surfaceTemperature().orElseThrow(), 1) + " °C"));
         }
-        floor.installedPower()
-                .ifPresent(power -> lines.add(new Line("Installed power", Numbers.grouped(power) + " W", "")));
+        floor.installedPower().ifPresent(power -> lines.add(new Line("Installed power", watts(power), "")));
         floor.buildUpHeight()
                 .ifPresent(height ->
                         lines.add(new Line("Build-up height", Numbers.fixed(1000 * height, 0) + " mm", "")));
         floor.load().ifPresent(load -> lines.add(new Line("Dead load", Numbers.fixed(load, 0) + " kg/m²", "")));
         answer.fromFloorAbove()
-                .ifPresent(heat ->
-                        lines.add(new Line("From the floor above", Numbers.grouped(heat) + " W", "not counted")));
+                .ifPresent(heat -> lines.add(new Line("From the floor above", watts(heat), "not counted")));
         return lines;
     }
 
@@ -194,7 +206,7 @@ final class Answer {
         if (state.edgeFlux() != 0) {
             lines.add(new Line("Edge flux", Numbers.fixed(state.edgeFlux(), 1) + " W/m²", note));
         }
-        lines.add(new Line("Heater power", Numbers.grouped(state.heaterPower()) + " W", note));
+        lines.add(new Line("Heater power", watts(state.heaterPower()), note));
     }
 
     private void space(Sizing sizing, Part part) {
@@ -210,7 +222,7 @@ final class Answer {
                             .map(path -> new Line(
                                     path.name()
                                             + path.to().map(to -> " to " + to).orElse(""),
-                                    Numbers.grouped(path.heatFlow()) + " W",
+                                    watts(path.heatFlow()),
                                     pathNote(path)))
                             .toList());
         });

@@ -195,7 +195,6 @@ final class Pictures {
     }
 
     private static Bridge bridge(Bridging bridging) {
-        double share = bridging.share().value();
-        return new Bridge(share, bridging.frame().orElse("framing") + " " + Numbers.significant(100 * share, 3) + " %");
+        return new Bridge(bridging.share().value(), bridging.frame().orElse("framing"));
     }
 }
