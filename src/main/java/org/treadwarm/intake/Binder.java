@@ -37,7 +37,7 @@ final class Binder {
     /** The record of a tree; null when the tree is no object at all. */
     Record bind(JsonNode tree, Class<? extends Record> type, String pointer) {
         if (!tree.isObject()) {
-            findings.add(pointer, Document.shown(tree), "an object is expected here", "a JSON object");
+            findings.addUnread(pointer, Document.shown(tree), "an object is expected here", "a JSON object");
             return null;
         }
         Shape shape = Shape.of(type);
@@ -61,7 +61,7 @@ final class Binder {
                 findings.add(at, name, "\"parts\" is reserved for a later method", "leave it out");
                 continue;
             }
-            String shown = name.length() <= 60 ? name : name.substring(0, 59) + "…";
+            String shown = shown(name);
             String nearest = Nearest.to(name, shape.keys().keySet()).orElse("");
             findings.add(
                     at,
@@ -71,9 +71,16 @@ final class Binder {
         }
     }
 
+    private static String shown(String name) {
+        if (name.isBlank()) {
+            return "an empty name";
+        }
+        return name.length() <= 60 ? name : name.substring(0, 59) + "…";
+    }
+
     private Object value(JsonNode node, Shape.Key key, String pointer) {
         if (node != null && node.isNull()) {
-            findings.add(pointer, "null", "null is no value", "leave the key out");
+            findings.addUnread(pointer, "null", "null is no value", "leave the key out");
             return blank(key);
         }
         return switch (key.many()) {
@@ -93,7 +100,7 @@ final class Binder {
         if (!key.fallback().isEmpty()) {
             return fallback(key);
         }
-        findings.add(pointer, "nothing", "the " + key.label() + " is missing", allowed(key));
+        findings.addUnread(pointer, "nothing", "the " + key.label() + " is missing", allowed(key));
         return blank(key);
     }
 
@@ -153,7 +160,7 @@ final class Binder {
 
     private List<Object> list(JsonNode node, Shape.Key key, String pointer) {
         if (!node.isArray()) {
-            findings.add(pointer, Document.shown(node), "a list is expected here", "a JSON list");
+            findings.addUnread(pointer, Document.shown(node), "a list is expected here", "a JSON list");
             return List.of();
         }
         List<Object> items = new ArrayList<>(node.size());
@@ -166,7 +173,7 @@ final class Binder {
 
     private Map<String, Object> map(JsonNode node, Shape.Key key, String pointer) {
         if (!node.isObject()) {
-            findings.add(pointer, Document.shown(node), "an object of names is expected here", "a JSON object");
+            findings.addUnread(pointer, Document.shown(node), "an object of names is expected here", "a JSON object");
             return Map.of();
         }
         Map<String, Object> items = new LinkedHashMap<>();
@@ -179,7 +186,7 @@ final class Binder {
                 return;
             }
             Object item = one(entry.getValue(), key, at);
-            if (item != null && items.put(name, item) != null) {
+            if (items.put(name, item == null ? blankOne(key) : item) != null) {
                 findings.add(at, name, "this name stands twice", "each name once");
             }
         });
@@ -270,7 +277,7 @@ final class Binder {
                         Nearest.to(name, List.of("reading", "basis", "remark")).orElseThrow();
                 findings.add(
                         Pointer.to(pointer, name),
-                        name.length() <= 60 ? name : name.substring(0, 59) + "…",
+                        shown(name),
                         "this is no key of a reading; the nearest is \"" + nearest + "\"",
                         "reading, basis, remark");
             }
