@@ -151,9 +151,16 @@ final class Answers {
                     conductance == 0 ? empty() : of(numbers.difference(node, path)),
                     heat,
                     total > 0 ? of(heat / total) : empty(),
-                    link.ground() == Stack.NONE ? Optional.empty() : Optional.of(groundPath(link.ground()))));
+                    groundPath(link)));
         }
         return paths;
+    }
+
+    /** Left out for a given U-value, which stands for the ground too. */
+    private Optional<GroundPath> groundPath(Link link) {
+        boolean byLayers = link.ground() != Stack.NONE
+                && plan.assemblies.get(plan.faces.get(link.face()).assembly()).stack() != Stack.NONE;
+        return byLayers ? Optional.of(groundPath(link.ground())) : Optional.empty();
     }
 
     private GroundPath groundPath(int ground) {
@@ -242,7 +249,7 @@ final class Answers {
                 of(required),
                 of(floor.carryingFlux),
                 of(margin),
-                required == 0 ? empty() : of(margin / required),
+                Double.isFinite(margin / required) ? of(margin / required) : empty(),
                 of(shortfall),
                 of(Math.max(0, shortfall - otherHeat)),
                 holds ? of(floor.holdsDownTo) : empty(),
