@@ -8,7 +8,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.concurrent.ConcurrentHashMap;
 import java.util.stream.Collectors;
 import org.treadwarm.survey.Findings;
 import org.treadwarm.survey.Nearest;
@@ -16,7 +15,7 @@ import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Shape;
 import org.treadwarm.survey.Word;
 import org.treadwarm.units.Basis;
-import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Declared;
 import org.treadwarm.units.Reading;
 import org.treadwarm.units.ReadingException;
 import org.treadwarm.units.ReadingParser;
@@ -26,8 +25,6 @@ import org.treadwarm.units.ReadingParser;
  * read and judged too; a survey with findings is never sized.
  */
 final class Binder {
-    private static final Map<Shape.Key, Reading> FALLBACKS = new ConcurrentHashMap<>();
-
     private final Findings findings;
 
     Binder(Findings findings) {
@@ -37,7 +34,7 @@ final class Binder {
     /** The record of a tree; null when the tree is no object at all. */
     Record bind(JsonNode tree, Class<? extends Record> type, String pointer) {
         if (!tree.isObject()) {
-            findings.add(pointer, Document.shown(tree), "an object is expected here", "a JSON object");
+            findings.addUnread(pointer, Document.shown(tree), "an object is expected here", "a JSON object");
             return null;
         }
         Shape shape = Shape.of(type);
@@ -45,7 +42,9 @@ final class Binder {
         Object[] values = new Object[shape.keys().size()];
         int i = 0;
         for (Shape.Key key : shape.keys().values()) {
-            values[i++] = value(tree.get(key.name()), key, Pointer.to(pointer, key.name()));
+            JsonNode node = tree.get(key.name());
+            boolean silent = node == null && !key.required();
+            values[i++] = value(node, key, silent ? pointer : Pointer.to(pointer, key.name()));
         }
         return shape.make(values);
     }
@@ -61,7 +60,7 @@ final class Binder {
                 findings.add(at, name, "\"parts\" is reserved for a later method", "leave it out");
                 continue;
             }
-            String shown = name.length() <= 60 ? name : name.substring(0, 59) + "…";
+            String shown = shown(name);
             String nearest = Nearest.to(name, shape.keys().keySet()).orElse("");
             findings.add(
                     at,
@@ -71,9 +70,16 @@ final class Binder {
         }
     }
 
+    private static String shown(String name) {
+        if (name.isBlank()) {
+            return "an empty name";
+        }
+        return name.length() <= 60 ? name : name.substring(0, 59) + "…";
+    }
+
     private Object value(JsonNode node, Shape.Key key, String pointer) {
         if (node != null && node.isNull()) {
-            findings.add(pointer, "null", "null is no value", "leave the key out");
+            findings.addUnread(pointer, "null", "null is no value", "leave the key out");
             return blank(key);
         }
         return switch (key.many()) {
@@ -90,28 +96,11 @@ final class Binder {
     }
 
     private Object absent(Shape.Key key, String pointer) {
-        if (!key.fallback().isEmpty()) {
-            return fallback(key);
+        if (key.fallbackValue().isPresent()) {
+            return key.fallbackValue().get();
         }
-        findings.add(pointer, "nothing", "the " + key.label() + " is missing", allowed(key));
+        findings.addUnread(pointer, "nothing", "the " + key.label() + " is missing", allowed(key));
         return blank(key);
-    }
-
-    private static Object fallback(Shape.Key key) {
-        return switch (key.holds()) {
-            case QUANTITY -> FALLBACKS.computeIfAbsent(key, Binder::fallbackReading);
-            case WORD -> word(key, key.fallback()).orElseThrow();
-            default -> key.fallback();
-        };
-    }
-
-    private static Reading fallbackReading(Shape.Key key) {
-        try {
-            return ReadingParser.parse(
-                    key.fallback(), key.quantity().orElseThrow().kind());
-        } catch (ReadingException e) {
-            throw new IllegalStateException("the fallback of " + key.name() + " is no reading", e);
-        }
     }
 
     private Object blank(Shape.Key key) {
@@ -153,7 +142,7 @@ final class Binder {
 
     private List<Object> list(JsonNode node, Shape.Key key, String pointer) {
         if (!node.isArray()) {
-            findings.add(pointer, Document.shown(node), "a list is expected here", "a JSON list");
+            findings.addUnread(pointer, Document.shown(node), "a list is expected here", "a JSON list");
             return List.of();
         }
         List<Object> items = new ArrayList<>(node.size());
@@ -166,7 +155,7 @@ final class Binder {
 
     private Map<String, Object> map(JsonNode node, Shape.Key key, String pointer) {
         if (!node.isObject()) {
-            findings.add(pointer, Document.shown(node), "an object of names is expected here", "a JSON object");
+            findings.addUnread(pointer, Document.shown(node), "an object of names is expected here", "a JSON object");
             return Map.of();
         }
         Map<String, Object> items = new LinkedHashMap<>();
@@ -179,7 +168,7 @@ final class Binder {
                 return;
             }
             Object item = one(entry.getValue(), key, at);
-            if (item != null && items.put(name, item) != null) {
+            if (items.put(name, item == null ? blankOne(key) : item) != null) {
                 findings.add(at, name, "this name stands twice", "each name once");
             }
         });
@@ -192,7 +181,7 @@ final class Binder {
             return "";
         }
         String text = node.textValue().strip();
-        int longest = key.wording().orElseThrow().longest();
+        int longest = key.longest();
         boolean control = text.chars().anyMatch(c -> Character.isISOControl(c) && c != '\n' && c != '\r' && c != '\t');
         if (text.length() > longest || control) {
             findings.add(
@@ -237,7 +226,7 @@ final class Binder {
         return key.words().stream().map(Word::word).collect(Collectors.joining(", "));
     }
 
-    private Reading quantity(JsonNode node, Quantity declared, String pointer) {
+    private Reading quantity(JsonNode node, Declared declared, String pointer) {
         if (node.isObject()) {
             return readingObject(node, declared, pointer);
         }
@@ -261,7 +250,7 @@ final class Binder {
         }
     }
 
-    private Reading readingObject(JsonNode node, Quantity declared, String pointer) {
+    private Reading readingObject(JsonNode node, Declared declared, String pointer) {
         JsonNode reading = node.get("reading");
         for (Iterator<String> names = node.fieldNames(); names.hasNext(); ) {
             String name = names.next();
@@ -270,7 +259,7 @@ final class Binder {
                         Nearest.to(name, List.of("reading", "basis", "remark")).orElseThrow();
                 findings.add(
                         Pointer.to(pointer, name),
-                        name.length() <= 60 ? name : name.substring(0, 59) + "…",
+                        shown(name),
                         "this is no key of a reading; the nearest is \"" + nearest + "\"",
                         "reading, basis, remark");
             }
@@ -301,7 +290,7 @@ final class Binder {
         return value;
     }
 
-    private Reading inRange(Reading reading, JsonNode node, Quantity declared, String pointer) {
+    private Reading inRange(Reading reading, JsonNode node, Declared declared, String pointer) {
         if (!Ranges.possible(reading.value(), declared)) {
             findings.add(
                     pointer,
@@ -324,7 +313,7 @@ final class Binder {
     private static String allowed(Shape.Key key) {
         return switch (key.holds()) {
             case QUANTITY -> Ranges.words(key.quantity().orElseThrow());
-            case TEXT -> "1 to " + key.wording().orElseThrow().longest() + " characters";
+            case TEXT -> "1 to " + key.longest() + " characters";
             case WORD -> "one of " + words(key);
             case OBJECT -> "an object";
         };

@@ -103,6 +103,9 @@ public final class Document {
     /** What was given, as text for a message: shortened to 200 characters. */
     static String shown(JsonNode node) {
         String text = node.isTextual() ? node.textValue() : node.isContainerNode() ? container(node) : node.toString();
+        if (text.isBlank()) {
+            return "an empty text";
+        }
         return text.length() <= 200 ? text : text.substring(0, 199) + "…";
     }
 

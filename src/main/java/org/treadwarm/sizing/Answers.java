@@ -253,7 +253,7 @@ final class Answers {
                 of(required),
                 of(floor.carryingFlux),
                 of(margin),
-                required == 0 ? empty() : of(margin / required),
+                Double.isFinite(margin / required) ? of(margin / required) : empty(),
                 of(shortfall),
                 of(Math.max(0, shortfall - otherHeat)),
                 holds ? of(floor.holdsDownTo) : empty(),

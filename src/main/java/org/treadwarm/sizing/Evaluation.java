@@ -1,6 +1,7 @@
 package org.treadwarm.sizing;
 
 import java.util.List;
+import java.util.Optional;
 import org.treadwarm.physics.air.AirHeat;
 import org.treadwarm.physics.ground.SlabOnGround;
 import org.treadwarm.physics.ground.SuspendedFloor;
@@ -12,6 +13,7 @@ import org.treadwarm.sizing.Plan.Link;
 import org.treadwarm.sizing.Plan.LinkKind;
 import org.treadwarm.sizing.Plan.PathRef;
 import org.treadwarm.sizing.Plan.Side;
+import org.treadwarm.survey.Pointer;
 import org.treadwarm.tables.Films;
 
 /**
@@ -116,6 +118,30 @@ final class Evaluation {
         return true;
     }
 
+    /** The address of the first room whose numbers are not finite, when there is one. */
+    Optional<String> boundless() {
+        for (int room = 0; room < plan.rooms; room++) {
+            if (!Double.isFinite(roomConstant[room] + roomSlope[room] * outdoor)) {
+                return Optional.of("/rooms/" + room);
+            }
+            if (floors[room] != null && !floors[room].isFinite()) {
+                return Optional.of("/rooms/" + room + "/heatedFloor");
+            }
+        }
+        for (int ground = 0; ground < groundDimension.length; ground++) {
+            double numbers = groundDimension[ground] + groundToSoil[ground] + groundToOutdoors[ground];
+            if (!Double.isFinite(numbers)) {
+                return Optional.of(plan.addresses.get(plan.grounds.get(ground).perimeter()));
+            }
+        }
+        for (int space = 0; space < plan.floatingNodes.length; space++) {
+            if (!Double.isFinite(temperature[plan.floatingNodes[space]])) {
+                return Optional.of(Pointer.to("/spaces", plan.nodeNames[plan.floatingNodes[space]]));
+            }
+        }
+        return Optional.empty();
+    }
+
     private void face(int number) {
         Face face = plan.faces.get(number);
         AssemblyPlan assembly = plan.assemblies.get(face.assembly());
@@ -187,6 +213,9 @@ final class Evaluation {
             conductance[i] = area[i] * uValue[i];
             return;
         }
+        if (link.ground() != Stack.NONE) {
+            groundDimension[link.ground()] = dimension(plan.grounds.get(link.ground()));
+        }
         AssemblyPlan assembly = plan.assemblies.get(plan.faces.get(link.face()).assembly());
         uValue[i] = assembly.stack() == Stack.NONE
                 ? faceUValue[link.face()]
@@ -220,11 +249,15 @@ final class Evaluation {
         return groundUValue[ground];
     }
 
+    private double dimension(GroundPlan given) {
+        return SlabOnGround.characteristicDimension(in[given.area()], in[given.perimeter()]);
+    }
+
     /** Transmittance of a slab with films and floor of this resistance. */
     double slab(int ground, double resistance) {
         GroundPlan given = plan.grounds.get(ground);
         double soil = in[given.soil()];
-        double dimension = SlabOnGround.characteristicDimension(in[given.area()], in[given.perimeter()]);
+        double dimension = dimension(given);
         double thickness = SlabOnGround.equivalentThickness(in[given.wall()], soil, resistance);
         groundDimension[ground] = dimension;
         groundThickness[ground] = thickness;
@@ -236,7 +269,7 @@ final class Evaluation {
     void suspended(int ground) {
         GroundPlan given = plan.grounds.get(ground);
         double soil = in[given.soil()];
-        double dimension = SlabOnGround.characteristicDimension(in[given.area()], in[given.perimeter()]);
+        double dimension = dimension(given);
         double thickness = SlabOnGround.equivalentThickness(in[given.wall()], soil, DECK_FILM + GROUND_FILM);
         groundDimension[ground] = dimension;
         groundThickness[ground] = thickness;

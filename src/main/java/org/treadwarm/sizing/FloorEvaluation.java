@@ -71,6 +71,13 @@ final class FloorEvaluation {
         holdsDownTo = lowestOutdoor();
     }
 
+    /** Whether every number of the floor is finite; a limit or a lowest outdoor temperature that is infinite means that there is none. */
+    boolean isFinite() {
+        double made = heaterFlux(requiredFlux, whole.outdoor) + heaterFlux(carryingFlux, whole.outdoor);
+        double below = (downConstant + downSlope * whole.outdoor) / downCoefficient;
+        return Double.isFinite(made * area + requiredHeat + below + edgeCoefficient) && !Double.isNaN(holdsDownTo);
+    }
+
     private void down() {
         if (plan.ground() == Stack.NONE) {
             double film = filmBelow();

@@ -2,7 +2,7 @@ package org.treadwarm.sizing;
 
 import org.treadwarm.survey.Problem;
 
-/** The balances of the floating spaces have no answer; carries the problem to show. */
+/** The balances of a survey have no answer in finite numbers; carries the problem to show. */
 public final class NoBalanceException extends Exception {
     private static final long serialVersionUID = 1L;
 

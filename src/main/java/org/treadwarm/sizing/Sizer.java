@@ -1,5 +1,6 @@
 package org.treadwarm.sizing;
 
+import java.util.Optional;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Survey;
 
@@ -11,7 +12,8 @@ public final class Sizer {
      * Sizes every room of a survey.
      *
      * @param survey one that intake accepted
-     * @throws NoBalanceException when floating spaces have no steady temperature, as negative psi values can bring about
+     * @throws NoBalanceException when floating spaces have no steady temperature, as negative psi values can bring about, or
+     *     when an area or length is so near to nothing that numbers made with it are beyond all bounds
      */
     public static Sizing size(Survey survey) throws NoBalanceException {
         Plan plan = Plan.of(survey);
@@ -22,6 +24,14 @@ public final class Sizer {
                     plan.floatingNodes.length + " unheated spaces",
                     "the unheated spaces have no steady temperature: their losses and negative psi values cancel",
                     "losses that add up to more than nothing for every unheated space"));
+        }
+        Optional<String> boundless = evaluation.boundless();
+        if (boundless.isPresent()) {
+            throw new NoBalanceException(new Problem(
+                    boundless.get(),
+                    "numbers beyond all bounds",
+                    "an area or length here is so small that what is divided by it is beyond all bounds",
+                    "areas and lengths of things that can be built"));
         }
         return new Answers(evaluation).sizing();
     }

@@ -19,8 +19,8 @@ import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Space;
 import org.treadwarm.survey.Surface;
 import org.treadwarm.survey.Survey;
+import org.treadwarm.units.Declared;
 import org.treadwarm.units.Numbers;
-import org.treadwarm.units.Quantity;
 import org.treadwarm.units.QuantityKind;
 import org.treadwarm.units.Reading;
 
@@ -43,7 +43,7 @@ final class Warnings {
     }
 
     List<Warning> all() {
-        Readings.visit(survey, "", this::implausible);
+        Readings.visit(survey, "", Warnings::isImplausible, this::implausible);
         site();
         assemblies();
         grounds();
@@ -58,11 +58,14 @@ final class Warnings {
         warnings.add(new Warning(code, pointer, message, why, settle));
     }
 
-    private void implausible(String pointer, Quantity declared, Reading reading) {
+    private static boolean isImplausible(Declared declared, Reading reading) {
         double value = reading.value();
-        if (value >= declared.plausibleFrom() && value <= declared.plausibleTo() || isPlausibleZero(value, declared)) {
-            return;
-        }
+        return !(value >= declared.plausibleFrom() && value <= declared.plausibleTo())
+                && !isPlausibleZero(value, declared);
+    }
+
+    private void implausible(String pointer, Declared declared, Reading reading) {
+        double value = reading.value();
         boolean low = value < declared.plausibleFrom();
         String unit = declared.kind().siUnit();
         add(
@@ -77,7 +80,7 @@ final class Warnings {
                 "Look at the reading as it was typed, \"" + reading.typed() + "\", and take it again if in doubt.");
     }
 
-    private static boolean isPlausibleZero(double value, Quantity declared) {
+    private static boolean isPlausibleZero(double value, Declared declared) {
         return value == 0 && declared.min() == 0 && declared.kind() != QuantityKind.RESISTANCE;
     }
 

@@ -17,12 +17,30 @@ public final class Findings {
 
     private final List<Problem> problems = new ArrayList<>();
     private final Set<String> pointers = new HashSet<>();
+    private final Set<String> unread = new HashSet<>();
 
-    /** Adds a problem, unless its address has one already. */
+    /** Adds a problem, unless its address has one already or lies in what could not be read. */
     public void add(String pointer, String given, String message, String allowed) {
-        if (problems.size() < MOST && pointers.add(pointer)) {
+        if (problems.size() < MOST && !isUnread(pointer) && pointers.add(pointer)) {
             problems.add(new Problem(pointer, given, message, allowed));
         }
+    }
+
+    /** Adds a problem that leaves everything below its address unread, so that nothing more is found there. */
+    public void addUnread(String pointer, String given, String message, String allowed) {
+        add(pointer, given, message, allowed);
+        unread.add(pointer);
+    }
+
+    private boolean isUnread(String pointer) {
+        for (int end = pointer.lastIndexOf('/');
+                !unread.isEmpty() && end >= 0;
+                end = pointer.lastIndexOf('/', end - 1)) {
+            if (unread.contains(pointer.substring(0, end))) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** Words that name the nearest of the listed names, to end a message with; empty when there is none to name. */
@@ -34,9 +52,9 @@ public final class Findings {
                 : "";
     }
 
-    /** Whether nothing was found at this address. */
+    /** Whether what stands at this address was read, be it a reading alone or with its basis, and nothing was found there. */
     public boolean clean(String pointer) {
-        return !pointers.contains(pointer);
+        return !pointers.contains(pointer) && !pointers.contains(pointer + "/reading") && !isUnread(pointer);
     }
 
     /** Whether nothing was found at all. */

@@ -3,7 +3,7 @@ package org.treadwarm.survey;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Declared;
 import org.treadwarm.units.Reading;
 
 /** Walks every reading of a survey with its address and its declaration. */
@@ -11,31 +11,67 @@ public final class Readings {
     /** What is told of each reading. */
     @FunctionalInterface
     public interface Visitor {
-        void reading(String pointer, Quantity declared, Reading reading);
+        void reading(String pointer, Declared declared, Reading reading);
     }
 
-    private Readings() {}
+    /** Which readings are told of. */
+    @FunctionalInterface
+    public interface Choice {
+        boolean wants(Declared declared, Reading reading);
+    }
 
-    /** Visits every reading below a record, in document order. */
-    public static void visit(Record record, String pointer, Visitor visitor) {
-        for (Shape.Key key : Shape.of(record.getClass()).keys().values()) {
-            visitValue(key, key.in(record), Pointer.to(pointer, key.name()), visitor);
+    private final Choice choice;
+    private final Visitor visitor;
+
+    /** The way down to an object, so that an address is written out only when it is told. */
+    private record Trail(Trail above, String step) {
+        @Override
+        public String toString() {
+            return above == null ? step : Pointer.to(above.toString(), step);
         }
     }
 
-    private static void visitValue(Shape.Key key, Object value, String pointer, Visitor visitor) {
+    private Readings(Choice choice, Visitor visitor) {
+        this.choice = choice;
+        this.visitor = visitor;
+    }
+
+    /** Visits every reading below a record, in document order. */
+    public static void visit(Record record, String pointer, Visitor visitor) {
+        visit(record, pointer, (declared, reading) -> true, visitor);
+    }
+
+    /** Visits the readings below a record that a choice wants, in document order. */
+    public static void visit(Record record, String pointer, Choice choice, Visitor visitor) {
+        new Readings(choice, visitor).record(record, new Trail(null, pointer));
+    }
+
+    private void record(Record record, Trail trail) {
+        for (Shape.Key key : Shape.of(record.getClass()).holdingReadings()) {
+            value(key, key.in(record), trail, key.name());
+        }
+    }
+
+    private void value(Shape.Key key, Object value, Trail trail, String step) {
         if (value instanceof Reading reading) {
-            visitor.reading(pointer, key.quantity().orElseThrow(), reading);
-        } else if (value instanceof Record record) {
-            visit(record, pointer, visitor);
+            Declared declared = key.quantity().orElseThrow();
+            if (choice.wants(declared, reading)) {
+                visitor.reading(new Trail(trail, step).toString(), declared, reading);
+            }
         } else if (value instanceof Optional<?> optional) {
-            optional.ifPresent(held -> visitValue(key, held, pointer, visitor));
+            if (optional.isPresent()) {
+                value(key, optional.get(), trail, step);
+            }
+        } else if (value instanceof Record record) {
+            record(record, new Trail(trail, step));
         } else if (value instanceof List<?> list) {
+            Trail below = list.isEmpty() ? trail : new Trail(trail, step);
             for (int i = 0; i < list.size(); i++) {
-                visitValue(key, list.get(i), Pointer.to(pointer, i), visitor);
+                value(key, list.get(i), below, Integer.toString(i));
             }
         } else if (value instanceof Map<?, ?> map) {
-            map.forEach((name, held) -> visitValue(key, held, Pointer.to(pointer, (String) name), visitor));
+            Trail below = new Trail(trail, step);
+            map.forEach((name, held) -> value(key, held, below, (String) name));
         }
     }
 }

@@ -53,9 +53,8 @@ public final class Rules {
         }
         new Listings(survey, findings).check();
         if (onGround && survey.site().annualMeanTemperature().isEmpty()) {
-            findings.add(
+            missing(
                     "/site/annualMeanTemperature",
-                    "nothing",
                     "something lies on the ground, so the annual mean outdoor temperature is needed",
                     "-60 to 60 °C");
         }
@@ -188,8 +187,8 @@ public final class Rules {
 
     private void room(String pointer, Room room) {
         surfaces(pointer, room.name(), true, room.surfaces(), Optional.of(room));
-        junctions(
-                pointer, room.name(), room.junctions(), true, room.heatedFloor().isPresent());
+        boolean heated = room.heatedFloor().isPresent() || !findings.clean(pointer + "/heatedFloor");
+        junctions(pointer, room.name(), room.junctions(), true, heated);
         room.air().ifPresent(air -> air(pointer + "/air", air));
         room.heatedFloor().ifPresent(floor -> heatedFloor(pointer + "/heatedFloor", room, floor));
     }
@@ -445,6 +444,8 @@ public final class Rules {
     }
 
     private void missing(String pointer, String message, String allowed) {
-        findings.add(pointer, "nothing", message, allowed);
+        if (findings.clean(pointer)) {
+            findings.add(pointer, "nothing", message, allowed);
+        }
     }
 }

@@ -11,8 +11,11 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
+import org.treadwarm.units.Declared;
 import org.treadwarm.units.Quantity;
 import org.treadwarm.units.Reading;
+import org.treadwarm.units.ReadingException;
+import org.treadwarm.units.ReadingParser;
 import org.treadwarm.units.Wording;
 
 /**
@@ -24,6 +27,7 @@ public final class Shape {
 
     private final Class<? extends Record> type;
     private final Map<String, Key> keys;
+    private final Key[] holding;
     private final Constructor<?> constructor;
 
     /** What a key holds. */
@@ -50,40 +54,28 @@ public final class Shape {
      * @param many how many of it
      * @param type Reading, String, the enum of words, or the record of the object
      * @param quantity its declaration, when it holds a quantity
-     * @param wording its words, when it holds anything else
+     * @param label its label
+     * @param help its sentence of help; empty for none
+     * @param longest the most characters of a text
+     * @param fallback the text that stands when it is left out; empty for none
+     * @param fallbackValue what that text means
+     * @param component where a record keeps it
      */
     public record Key(
             String name,
             Holds holds,
             Many many,
             Class<?> type,
-            Optional<Quantity> quantity,
-            Optional<Wording> wording,
+            Optional<Declared> quantity,
+            String label,
+            String help,
+            int longest,
+            String fallback,
+            Optional<Object> fallbackValue,
             RecordComponent component) {
         /** Whether the document must have it. */
         public boolean required() {
-            return many == Many.ONE && fallback().isEmpty();
-        }
-
-        /** The text that stands when it is left out; empty for none. */
-        public String fallback() {
-            return quantity.map(Quantity::fallback)
-                    .or(() -> wording.map(Wording::fallback))
-                    .orElse("");
-        }
-
-        /** Its label. */
-        public String label() {
-            return quantity.map(Quantity::label)
-                    .or(() -> wording.map(Wording::label))
-                    .orElse(name);
-        }
-
-        /** Its sentence of help; empty for none. */
-        public String help() {
-            return quantity.map(Quantity::help)
-                    .or(() -> wording.map(Wording::help))
-                    .orElse("");
+            return many == Many.ONE && fallback.isEmpty();
         }
 
         /** What a record holds under this key. */
@@ -115,6 +107,9 @@ public final class Shape {
             keys.put(key.name(), key);
             parameters[i] = components[i].getType();
         }
+        holding = keys.values().stream()
+                .filter(key -> key.holds() == Holds.QUANTITY || key.holds() == Holds.OBJECT)
+                .toArray(Key[]::new);
         try {
             this.constructor = type.getDeclaredConstructor(parameters);
         } catch (NoSuchMethodException e) {
@@ -142,6 +137,11 @@ public final class Shape {
         return keys;
     }
 
+    /** The keys below which readings may lie. */
+    Key[] holdingReadings() {
+        return holding;
+    }
+
     /** A record of this shape from the values of its keys, in order. */
     public Record make(Object[] values) {
         try {
@@ -160,14 +160,47 @@ public final class Shape {
         Holds holds = held == Reading.class
                 ? Holds.QUANTITY
                 : held == String.class ? Holds.TEXT : held.isEnum() ? Holds.WORD : Holds.OBJECT;
+        Optional<Declared> quantity =
+                Optional.ofNullable(component.getAnnotation(Quantity.class)).map(Declared::by);
+        Optional<Wording> wording = Optional.ofNullable(component.getAnnotation(Wording.class));
+        String fallback = quantity.map(Declared::fallback)
+                .or(() -> wording.map(Wording::fallback))
+                .orElse("");
         return new Key(
                 component.getName(),
                 holds,
                 many,
                 held,
-                Optional.ofNullable(component.getAnnotation(Quantity.class)),
-                Optional.ofNullable(component.getAnnotation(Wording.class)),
+                quantity,
+                quantity.map(Declared::label)
+                        .or(() -> wording.map(Wording::label))
+                        .orElse(component.getName()),
+                quantity.map(Declared::help)
+                        .or(() -> wording.map(Wording::help))
+                        .orElse(""),
+                wording.map(Wording::longest).orElse(0),
+                fallback,
+                fallback.isEmpty() ? Optional.empty() : Optional.of(meaning(fallback, holds, held, quantity)),
                 component);
+    }
+
+    private static Object meaning(String text, Holds holds, Class<?> type, Optional<Declared> quantity) {
+        if (holds == Holds.WORD) {
+            for (Object constant : type.getEnumConstants()) {
+                if (((Word) constant).word().equals(text)) {
+                    return constant;
+                }
+            }
+            throw new IllegalStateException(text + " is no " + type.getSimpleName());
+        }
+        if (holds == Holds.TEXT) {
+            return text;
+        }
+        try {
+            return ReadingParser.parse(text, quantity.orElseThrow().kind());
+        } catch (ReadingException e) {
+            throw new IllegalStateException(text + " is no reading", e);
+        }
     }
 
     private static Class<?> lastArgument(Type type) {

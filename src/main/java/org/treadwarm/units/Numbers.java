@@ -8,8 +8,11 @@ import java.math.RoundingMode;
 public final class Numbers {
     private Numbers() {}
 
-    /** A number with a fixed count of decimals, halves away from zero, never "-0". */
+    /** A number with a fixed count of decimals, halves away from zero, never "-0"; ∞ for an infinite one. */
     public static String fixed(double number, int decimals) {
+        if (Double.isInfinite(number)) {
+            return infinite(number);
+        }
         BigDecimal rounded = new BigDecimal(Double.toString(number)).setScale(decimals, RoundingMode.HALF_UP);
         if (rounded.signum() == 0) {
             rounded = BigDecimal.ZERO.setScale(decimals);
@@ -17,8 +20,11 @@ public final class Numbers {
         return rounded.toPlainString();
     }
 
-    /** A number with a count of significant digits and no trailing zeros. */
+    /** A number with a count of significant digits and no trailing zeros; ∞ for an infinite one. */
     public static String significant(double number, int digits) {
+        if (Double.isInfinite(number)) {
+            return infinite(number);
+        }
         if (number == 0) {
             return "0";
         }
@@ -27,8 +33,15 @@ public final class Numbers {
         return rounded.stripTrailingZeros().toPlainString();
     }
 
-    /** A whole number with a space between thousands. */
+    private static String infinite(double number) {
+        return number > 0 ? "∞" : "-∞";
+    }
+
+    /** A whole number with a space between thousands; ∞ for an infinite one. */
     public static String grouped(double number) {
+        if (Double.isInfinite(number)) {
+            return infinite(number);
+        }
         String digits = fixed(Math.abs(number), 0);
         StringBuilder text = new StringBuilder(digits);
         for (int i = digits.length() - 3; i > 0; i -= 3) {

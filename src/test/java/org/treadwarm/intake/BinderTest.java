@@ -11,6 +11,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.treadwarm.properties.Surveys;
 import org.treadwarm.properties.Trees;
 import org.treadwarm.survey.Problem;
@@ -138,6 +139,50 @@ class BinderTest {
                     .extracting(Problem::pointer)
                     .contains(pointer);
         }
+    }
+
+    @ParameterizedTest
+    @ValueSource(
+            strings = {
+                "/site",
+                "/assemblies/roof",
+                "/assemblies/roof/layers/0",
+                "/assemblies/roof/layers/1/thickness",
+                "/assemblies/timber wall/layers/1/bridging",
+                "/assemblies/timber wall/layers/3/airGap",
+                "/spaces/loft",
+                "/spaces/loft/air",
+                "/rooms/0/surfaces",
+                "/rooms/0/surfaces/0",
+                "/rooms/0/surfaces/0/area",
+                "/rooms/0/surfaces/0/openings/0",
+                "/rooms/0/surfaces/4/ground",
+                "/rooms/0/junctions/0",
+                "/rooms/0/air",
+                "/rooms/0/air/recovery",
+                "/rooms/0/heatedFloor",
+                "/rooms/0/heatedFloor/ground",
+                "/rooms/0/heatedFloor/above/0",
+                "/rooms/0/heatedFloor/heater",
+            })
+    void oneMistakeIsToldOnce(String pointer) {
+        assertThat(changed(pointer, Trees.json("true")))
+                .extracting(Problem::pointer)
+                .containsExactly(pointer);
+        assertThat(changed(pointer, NullNode.instance))
+                .extracting(Problem::pointer)
+                .containsExactly(pointer);
+    }
+
+    @Test
+    void aReadingThatCouldNotBeReadIsNotMissedAsWell() {
+        String thickness = "/assemblies/roof/layers/1/thickness";
+        assertThat(changed(thickness, Trees.json("{'reading': -1}")))
+                .extracting(Problem::pointer)
+                .containsExactly(thickness + "/reading");
+        assertThat(changed("/rooms/0/surfaces/0/area", Trees.json("{'reading': 'wide'}")))
+                .extracting(Problem::pointer)
+                .containsExactly("/rooms/0/surfaces/0/area/reading");
     }
 
     @ParameterizedTest

@@ -15,7 +15,7 @@ import org.treadwarm.properties.Surveys;
 import org.treadwarm.properties.Trees;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Readings;
-import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Declared;
 
 /** Possible ranges: a bound is accepted or refused as declared, the next number beyond it is refused. */
 class RangesTest {
@@ -88,7 +88,7 @@ class RangesTest {
 
     @ParameterizedTest(name = "{0}")
     @MethodSource("everyReading")
-    void holdForEveryReading(String pointer, Quantity declared) {
+    void holdForEveryReading(String pointer, Declared declared) {
         assertThat(at(pointer, declared.min()).isEmpty()).isEqualTo(!declared.moreThanMin());
         assertThat(at(pointer, declared.max()).isEmpty()).isEqualTo(!declared.lessThanMax());
         assertRefused(pointer, Math.nextDown(declared.min()));
@@ -99,7 +99,7 @@ class RangesTest {
 
     @ParameterizedTest(name = "{0}")
     @MethodSource("everyReading")
-    void plausibleRangesLieInsidePossibleOnes(String pointer, Quantity declared) {
+    void plausibleRangesLieInsidePossibleOnes(String pointer, Declared declared) {
         assertThat(declared.plausibleFrom()).isLessThan(declared.plausibleTo());
         assertThat(Math.max(declared.plausibleFrom(), declared.min())).isBetween(declared.min(), declared.max());
         assertThat(Math.min(declared.plausibleTo(), declared.max())).isBetween(declared.min(), declared.max());

@@ -13,7 +13,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.treadwarm.survey.Readings;
-import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Declared;
 
 /** Every reading of the survey with everything in it moves some number of the answer, or stands in the list of those that do not. */
 class EachInputMattersTest {
@@ -51,14 +51,14 @@ class EachInputMattersTest {
 
     @ParameterizedTest(name = "{0}")
     @MethodSource("readings")
-    void movesANumber(String pointer, Quantity declared, double value) {
+    void movesANumber(String pointer, Declared declared, double value) {
         ObjectNode changed = SURVEY.deepCopy();
         Trees.set(changed, pointer, DoubleNode.valueOf(moved(declared, value)));
         boolean moved = !Trees.numbers(Surveys.answer(changed)).equals(Trees.numbers(ANSWER));
         assertThat(moved).isEqualTo(!WITHOUT_EFFECT.containsKey(pointer));
     }
 
-    private static double moved(Quantity declared, double value) {
+    private static double moved(Declared declared, double value) {
         if (declared.whole()) {
             return value + 1;
         }

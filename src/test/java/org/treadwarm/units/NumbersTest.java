@@ -2,6 +2,7 @@ package org.treadwarm.units;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
@@ -37,5 +38,12 @@ class NumbersTest {
     @CsvSource({"0, 0", "999, 999", "1000, 1 000", "1234567.5, 1 234 568", "-10000, -10 000", "-0.4, 0"})
     void groupsThousands(double number, String expected) {
         assertThat(Numbers.grouped(number)).isEqualTo(expected);
+    }
+
+    @Test
+    void writesWhatHasNoEnd() {
+        assertThat(Numbers.fixed(Double.POSITIVE_INFINITY, 2)).isEqualTo("∞");
+        assertThat(Numbers.significant(Double.NEGATIVE_INFINITY, 3)).isEqualTo("-∞");
+        assertThat(Numbers.grouped(Double.NEGATIVE_INFINITY)).isEqualTo("-∞");
     }
 }

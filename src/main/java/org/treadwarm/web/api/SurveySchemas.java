@@ -6,7 +6,7 @@ import org.treadwarm.intake.Ranges;
 import org.treadwarm.survey.Shape;
 import org.treadwarm.survey.Word;
 import org.treadwarm.units.Basis;
-import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Declared;
 import org.treadwarm.units.ReadingParser;
 
 /** Schemas of what is sent in, from the shapes that read it. */
@@ -63,7 +63,7 @@ final class SurveySchemas {
             case QUANTITY -> quantity(property, key.quantity().orElseThrow());
             case TEXT -> {
                 property.put("type", "string");
-                property.put("maxLength", key.wording().orElseThrow().longest());
+                property.put("maxLength", key.longest());
                 describe(property, key);
             }
             case WORD -> {
@@ -82,7 +82,7 @@ final class SurveySchemas {
         }
     }
 
-    private static void quantity(ObjectNode property, Quantity declared) {
+    private static void quantity(ObjectNode property, Declared declared) {
         String unit = declared.kind().siUnit().isEmpty()
                 ? "a pure ratio"
                 : "in " + declared.kind().siUnit();

@@ -11,7 +11,7 @@ import java.util.Optional;
 import org.treadwarm.intake.Document;
 import org.treadwarm.survey.Shape;
 import org.treadwarm.survey.Survey;
-import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Declared;
 import org.treadwarm.units.ReadingParser;
 
 /**
@@ -126,7 +126,7 @@ final class FormData {
         }
     }
 
-    private static String withUnit(String typed, Quantity declared) {
+    private static String withUnit(String typed, Declared declared) {
         String unit = Forms.unit(declared);
         return !unit.isEmpty() && ReadingParser.isBare(typed) ? typed + SHOWN_UNIT + unit : typed;
     }
@@ -134,7 +134,7 @@ final class FormData {
     /** Puts an assumption where somebody said "not known". */
     void assume(List<String> path, Class<? extends Record> root, JsonNode start) {
         declared(path, Shape.of(root)).filter(key -> key.quantity().isPresent()).ifPresent(key -> {
-            Quantity quantity = key.quantity().get();
+            Declared quantity = key.quantity().get();
             if (!quantity.assume().isEmpty()) {
                 write(path, root, start, "0");
                 JsonNode owner = start;

@@ -24,7 +24,7 @@ import org.treadwarm.survey.Space;
 import org.treadwarm.survey.Surface;
 import org.treadwarm.survey.Survey;
 import org.treadwarm.survey.Word;
-import org.treadwarm.units.Quantity;
+import org.treadwarm.units.Declared;
 import org.treadwarm.web.pages.FieldView.Choice;
 import org.treadwarm.web.pages.ObjectView.PartView;
 
@@ -260,7 +260,7 @@ final class Forms {
         String text = shown(node);
         String label = capital(key.label());
         if (key.holds() == Shape.Holds.QUANTITY) {
-            Quantity declared = key.quantity().orElseThrow();
+            Declared declared = key.quantity().orElseThrow();
             String unit = unit(declared);
             return new FieldView(
                     pointer,
@@ -300,7 +300,7 @@ final class Forms {
     }
 
     /** The unit shown beside a field of a quantity. */
-    static String unit(Quantity declared) {
+    static String unit(Declared declared) {
         return declared.formUnit().isEmpty() ? declared.kind().siUnit() : declared.formUnit();
     }
 

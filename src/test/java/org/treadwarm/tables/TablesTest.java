@@ -1,0 +1,62 @@
+package org.treadwarm.tables;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.Locale;
+import org.junit.jupiter.api.Test;
+
+/** What must hold in every row of the tables. */
+class TablesTest {
+    @Test
+    void everyMaterialConductsAndNamesItsSource() {
+        assertThat(Materials.all()).isNotEmpty().allSatisfy(row -> {
+            assertThat(row.source()).isNotBlank();
+            assertThat(row.confidence()).isIn("read", "memory");
+            assertThat(row.family()).isNotBlank();
+            if (row.conductivity().isPresent()) {
+                assertThat(row.conductivity().getAsDouble()).isBetween(0.001, 500.0);
+            } else {
+                assertThat(row.conductivityFrom().orElseThrow())
+                        .isLessThanOrEqualTo(row.conductivityTo().orElseThrow());
+            }
+            row.density().ifPresent(density -> assertThat(density).isBetween(0.5, 25_000.0));
+            row.specificHeat().ifPresent(heat -> assertThat(heat).isBetween(50.0, 20_000.0));
+        });
+    }
+
+    @Test
+    void materialsAreFoundByEitherNameAndAnyCapitals() {
+        Materials.all().forEach(row -> {
+            assertThat(Materials.find(row.name().toUpperCase(Locale.ROOT))).contains(row);
+            row.alsoCalled()
+                    .forEach(name -> assertThat(Materials.find(name)).as(name).contains(row));
+        });
+        assertThat(Materials.find("moonstone")).isEmpty();
+        assertThat(Materials.search("gypsum")).isNotEmpty().isSubsetOf(Materials.all());
+        assertThat(Materials.search("no such words at all")).isEmpty();
+    }
+
+    @Test
+    void filmsFallWithTheConvection() {
+        assertThat(Films.inside("up")).isLessThan(Films.inside("horizontal"));
+        assertThat(Films.inside("horizontal")).isLessThan(Films.inside("down"));
+        assertThat(Films.all())
+                .hasSize(3)
+                .allSatisfy(film -> assertThat(film.source()).isNotBlank());
+    }
+
+    @Test
+    void coveringsAndJunctionsNameTheirSource() {
+        assertThat(Coverings.all()).isNotEmpty().allSatisfy(row -> {
+            assertThat(row.resistance()).isNotNegative();
+            assertThat(row.source()).isNotBlank();
+        });
+        assertThat(PsiDefaults.all()).isNotEmpty().allSatisfy(row -> {
+            assertThat(row.source()).isNotBlank();
+            assertThat(row.external().isPresent()
+                            || row.overallInternal().isPresent()
+                            || row.internal().isPresent())
+                    .isTrue();
+        });
+    }
+}
