@@ -7,7 +7,6 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
-import java.util.Iterator;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.function.BiConsumer;
@@ -68,10 +67,7 @@ public final class Trees {
                 visit(pointer + "/" + i, node.get(i), visitor);
             }
         }
-        for (Iterator<Map.Entry<String, JsonNode>> fields = node.fields(); fields.hasNext(); ) {
-            Map.Entry<String, JsonNode> field = fields.next();
-            visit(pointer + "/" + escape(field.getKey()), field.getValue(), visitor);
-        }
+        node.properties().forEach(field -> visit(pointer + "/" + escape(field.getKey()), field.getValue(), visitor));
     }
 
     /** A key as it stands in a pointer (RFC 6901). */
