@@ -77,7 +77,7 @@ class EachInputMattersTest {
     @Test
     void theSurveyHasEveryQuantityThatCanBeDeclared() {
         List<String> used = readings().stream()
-                .map(reading -> ((Quantity) reading.get()[1]).label())
+                .map(reading -> ((Declared) reading.get()[1]).label())
                 .distinct()
                 .toList();
         assertThat(used).hasSizeGreaterThan(45);

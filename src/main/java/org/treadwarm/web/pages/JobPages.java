@@ -343,7 +343,10 @@ final class JobPages {
                 }
                 ObjectNode fresh = all.putObject(name);
                 if (parts.equals("spaces")) {
-                    fresh.put("kind", "unheated");
+                    fresh.put("kind", "unheated")
+                            .putObject("temperatureFactor")
+                            .put("reading", "0.8")
+                            .put("basis", "assumed");
                 }
             }
             case "assume" -> {
