@@ -2,6 +2,7 @@ package org.treadwarm;
 
 import java.util.Arrays;
 import org.treadwarm.commands.CheckCommand;
+import org.treadwarm.commands.HealthCommand;
 import org.treadwarm.commands.KeyCommand;
 import org.treadwarm.commands.ServeCommand;
 import org.treadwarm.commands.SizeCommand;
@@ -14,7 +15,8 @@ import picocli.CommandLine.Command;
         description = "Sizes heated floors: what flux a floor must give, what it may give, and the margin between.",
         mixinStandardHelpOptions = true,
         version = "Treadwarm 1.0.0, method version 1",
-        subcommands = {ServeCommand.class, SizeCommand.class, CheckCommand.class, KeyCommand.class})
+        subcommands = {ServeCommand.class, SizeCommand.class, CheckCommand.class, KeyCommand.class, HealthCommand.class
+        })
 public final class Treadwarm {
     private Treadwarm() {}
 

@@ -1,0 +1,22 @@
+# Build: the jar, with the program's own tests left to "mvn verify".
+FROM maven:3.9-eclipse-temurin-17 AS build
+WORKDIR /src
+COPY pom.xml .
+COPY .mvn .mvn
+COPY src src
+COPY templates templates
+COPY static static
+RUN mvn -B -ntp -q -DskipTests package
+
+# Run: a JRE, the jar, a user without rights, one volume for everything that is kept.
+FROM eclipse-temurin:17-jre
+RUN useradd --system --uid 10001 --home-dir /data treadwarm && mkdir /data && chown treadwarm /data
+COPY --from=build /src/target/treadwarm.jar /opt/treadwarm.jar
+USER treadwarm
+VOLUME /data
+EXPOSE 8080
+HEALTHCHECK --interval=30s --timeout=5s --start-period=20s CMD \
+  ["java", "-cp", "/opt/treadwarm.jar", "org.treadwarm.Treadwarm", "health", "--port", "8080"]
+ENTRYPOINT ["java", "-XX:MaxRAMPercentage=60", "-jar", "/opt/treadwarm.jar"]
+# The container listens on every address of its own; publish the port to loopback or behind a proxy that speaks TLS.
+CMD ["serve", "--bind", "0.0.0.0", "--port", "8080", "--data", "/data"]
