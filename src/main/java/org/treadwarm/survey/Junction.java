@@ -33,9 +33,13 @@ public record Junction(
                 label = "length")
         Reading length,
 
-        @Wording(label = "to", fallback = "outdoors") String to,
+        @Wording(label = "other side", fallback = "outdoors")
+        String to,
 
-        @Wording(label = "at", help = "A wall foot of a heated slab sees the heater, not the room.", fallback = "room")
+        @Wording(
+                label = "warm side",
+                help = "A wall foot of a heated slab sees the heater, not the room.",
+                fallback = "room")
         JunctionPlace at) {
     /** What it is called: its name, or "junction". */
     public String title() {

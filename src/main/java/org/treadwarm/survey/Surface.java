@@ -45,7 +45,7 @@ public record Surface(
                 label = "height")
         Optional<Reading> height,
 
-        @Wording(label = "to", help = "What lies on the other side: outdoors, ground, a space or another room.")
+        @Wording(label = "other side", help = "What lies on the other side: outdoors, ground, a space or another room.")
         String to,
 
         @Wording(label = "openings") List<Opening> openings,

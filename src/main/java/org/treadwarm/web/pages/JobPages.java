@@ -128,10 +128,31 @@ final class JobPages {
         model.put("assemblies", assemblies(job.id(), document, sizing));
         model.put("total", sizing.map(Sizing::total).orElse(null));
         model.put("totals", sizing.map(JobPages::totals).orElse(List.of()));
-        model.put("warnings", sizing.map(Sizing::warnings).orElse(List.of()));
+        model.put("warnings", sizing.map(all -> looks(job, all)).orElse(List.of()));
         model.put("unfinished", partial.unfinished());
-        model.put("problems", job.problems());
+        model.put(
+                "problems",
+                job.problems().stream()
+                        .map(problem -> new Look(
+                                Place.of(job.id(), document, problem.pointer()),
+                                problem.message(),
+                                "",
+                                problem.allowed()))
+                        .toList());
         view.show(ctx, status, "job", model);
+    }
+
+    /** Something to look at, with where it is. */
+    public record Look(Place place, String message, String why, String remedy) {}
+
+    private static List<Look> looks(Job job, Sizing sizing) {
+        return sizing.warnings().stream()
+                .map(warning -> new Look(
+                        Place.of(job.id(), job.document(), warning.pointer()),
+                        warning.message().replace("m2", "m²"),
+                        warning.why().replace("m2", "m²"),
+                        warning.settle()))
+                .toList();
     }
 
     /** A line of the totals. */
