@@ -159,7 +159,7 @@ final class Binder {
             return Map.of();
         }
         Map<String, Object> items = new LinkedHashMap<>();
-        node.fields().forEachRemaining(entry -> {
+        node.properties().forEach(entry -> {
             String at = Pointer.to(pointer, entry.getKey());
             String name = entry.getKey().strip();
             if (name.isEmpty() || name.length() > 200) {

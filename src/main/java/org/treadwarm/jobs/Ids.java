@@ -33,9 +33,8 @@ final class Ids {
             parts(room, old);
         }
         survey.path("spaces")
-                .fields()
-                .forEachRemaining(
-                        space -> parts(space.getValue(), before.path("spaces").path(space.getKey())));
+                .properties()
+                .forEach(space -> parts(space.getValue(), before.path("spaces").path(space.getKey())));
     }
 
     private void collect(JsonNode rooms) {

@@ -6,7 +6,6 @@ import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
 import java.util.HashSet;
-import java.util.Iterator;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -31,8 +30,7 @@ final class Pieces {
         }
         List<Piece> pieces = new ArrayList<>();
         ObjectNode rest = Document.mapper().createObjectNode();
-        for (Iterator<Map.Entry<String, JsonNode>> fields = survey.fields(); fields.hasNext(); ) {
-            Map.Entry<String, JsonNode> field = fields.next();
+        for (Map.Entry<String, JsonNode> field : survey.properties()) {
             if (PARTS.contains(field.getKey())) {
                 pieces.add(new Piece(field.getKey(), field.getKey(), text(field.getValue())));
             } else if (!field.getKey().equals("rooms")) {

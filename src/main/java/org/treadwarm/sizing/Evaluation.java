@@ -371,8 +371,8 @@ final class Evaluation {
         double sum = 0;
         double perOutdoor = 0;
         for (PathRef path : plan.paths[room]) {
-            sum += conductance[path.link()] * (constant[room] - otherConstant(room, path));
-            perOutdoor -= conductance[path.link()] * otherSlope(room, path);
+            sum += conductance[path.link()] * (constant[room] - constantSeenFrom(room, otherNode(path)));
+            perOutdoor -= conductance[path.link()] * slopeSeenFrom(otherNode(path));
         }
         double reheat = in[plan.roomIndexes[room].reheat()] * in[plan.roomIndexes[room].floorArea()];
         roomConstant[room] = sum + reheat;
@@ -382,14 +382,6 @@ final class Evaluation {
     private int otherNode(PathRef path) {
         Link link = plan.links.get(path.link());
         return path.heard() ? link.owner() : link.other();
-    }
-
-    private double otherConstant(int room, PathRef path) {
-        return constantSeenFrom(room, otherNode(path));
-    }
-
-    private double otherSlope(int room, PathRef path) {
-        return slopeSeenFrom(otherNode(path));
     }
 
     /** The part of a node's temperature that does not move with the outdoor temperature, as a room sees it. */

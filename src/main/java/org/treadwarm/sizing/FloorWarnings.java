@@ -41,15 +41,11 @@ final class FloorWarnings {
             "pvc",
             "plastic");
 
-    private final Plan plan;
     private final Survey survey;
-    private final Evaluation numbers;
     private final List<Warning> warnings;
 
-    FloorWarnings(Plan plan, Evaluation numbers, List<Warning> warnings) {
-        this.plan = plan;
-        this.survey = plan.survey;
-        this.numbers = numbers;
+    FloorWarnings(Survey survey, List<Warning> warnings) {
+        this.survey = survey;
         this.warnings = warnings;
     }
 
@@ -63,8 +59,8 @@ final class FloorWarnings {
         areas(pointer, room, floor);
         below(pointer, room, floor, answer.floor());
         covering(pointer, floor, answer.floor());
-        flux(pointer, room, floor, answer.floor());
-        heater(pointer, floor, answer.floor());
+        flux(pointer, answer.floor());
+        heater(pointer, floor);
         sameTwo(i, room, floor);
     }
 
@@ -215,7 +211,7 @@ final class FloorWarnings {
         return TENDER.stream().anyMatch(words::contains);
     }
 
-    private void flux(String pointer, Room room, HeatedFloor floor, FloorSizing answer) {
+    private void flux(String pointer, FloorSizing answer) {
         double required = answer.requiredFlux().orElseThrow();
         if (required > HIGH_FLUX) {
             add(
@@ -236,7 +232,7 @@ final class FloorWarnings {
         }
     }
 
-    private void heater(String pointer, HeatedFloor floor, FloorSizing answer) {
+    private void heater(String pointer, HeatedFloor floor) {
         floor.heater().ifPresent(heater -> {
             if (heater.kind() == HeaterKind.WATER && heater.spacing().isEmpty()) {
                 add(

@@ -269,7 +269,7 @@ final class Warnings {
         changes(pointer + "/air", room.air(), volume);
         gains(i, pointer);
         if (room.heatedFloor().isPresent()) {
-            new FloorWarnings(plan, numbers, warnings).check(i, room, rooms.get(i));
+            new FloorWarnings(survey, warnings).check(i, room, rooms.get(i));
         }
     }
 

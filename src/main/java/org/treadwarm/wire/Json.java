@@ -17,7 +17,8 @@ public final class Json {
     private static final ObjectMapper MAPPER = JsonMapper.builder()
             .addModule(new Jdk8Module())
             .addModule(new SimpleModule().addSerializer(Instant.class, ToStringSerializer.instance))
-            .serializationInclusion(JsonInclude.Include.NON_ABSENT)
+            .defaultPropertyInclusion(
+                    JsonInclude.Value.construct(JsonInclude.Include.NON_ABSENT, JsonInclude.Include.NON_ABSENT))
             .enable(SerializationFeature.WRITE_ENUMS_USING_TO_STRING)
             .addMixIn(Sizing.FloorSizing.class, WithoutEmptyLists.class)
             .build();

@@ -139,6 +139,7 @@ public final class PlainSheet {
                 line("    %s %s %s", warning.message(), warning.why(), warning.settle());
             }
         }
+        cautions(sizing);
         line(
                 "On the safe side: season factor on the heated plane at its design temperature; heat of floors into other");
         line(

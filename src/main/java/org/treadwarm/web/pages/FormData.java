@@ -4,7 +4,6 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
-import java.util.Iterator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -207,8 +206,7 @@ final class FormData {
     static void tidy(JsonNode node) {
         if (node instanceof ObjectNode object) {
             List<String> empty = new ArrayList<>();
-            for (Iterator<Map.Entry<String, JsonNode>> fields = object.fields(); fields.hasNext(); ) {
-                Map.Entry<String, JsonNode> field = fields.next();
+            for (Map.Entry<String, JsonNode> field : object.properties()) {
                 tidy(field.getValue());
                 if (field.getValue().isArray() && field.getValue().isEmpty()) {
                     empty.add(field.getKey());

@@ -94,7 +94,7 @@ final class Forms {
                 unplaced.put(problem.pointer(), problem);
             }
         }
-        ObjectView view = object(document.at(pointer), pointer, "form", title, type, false, "");
+        ObjectView view = object(document.at(pointer), pointer, "form", title, type, false);
         unplaced.values()
                 .forEach(problem -> errors.add(new ErrorView(id(pointer), "", problem.message(), problem.allowed())));
         unplaced.clear();
@@ -123,13 +123,7 @@ final class Forms {
     }
 
     private ObjectView object(
-            JsonNode node,
-            String pointer,
-            String key,
-            String title,
-            Class<? extends Record> type,
-            boolean removable,
-            String owner) {
+            JsonNode node, String pointer, String key, String title, Class<? extends Record> type, boolean removable) {
         List<FieldView> fields = new ArrayList<>();
         List<FieldView> more = new ArrayList<>();
         List<PartView> parts = new ArrayList<>();
@@ -221,10 +215,10 @@ final class Forms {
         if (list) {
             for (int i = 0; i < node.size(); i++) {
                 String at = Pointer.to(pointer, i);
-                items.add(object(node.get(i), at, key.name(), itemTitle(node.get(i), type, i), type, true, pointer));
+                items.add(object(node.get(i), at, key.name(), itemTitle(node.get(i), type, i), type, true));
             }
         } else if (!node.isMissingNode() || ALWAYS_OPEN.contains(key.name())) {
-            items.add(object(node, pointer, key.name(), capital(key.label()), type, isRemovable(key), pointer));
+            items.add(object(node, pointer, key.name(), capital(key.label()), type, isRemovable(key)));
         }
         String add = list || items.isEmpty() ? ADD.getOrDefault(key.name(), "") : "";
         return new PartView(

@@ -220,7 +220,7 @@ final class JobPages {
 
     private static List<PartRow> spaces(String job, JsonNode document, Optional<Sizing> sizing) {
         List<PartRow> rows = new ArrayList<>();
-        document.path("spaces").fields().forEachRemaining(entry -> {
+        document.path("spaces").properties().forEach(entry -> {
             JsonNode space = entry.getValue();
             String words;
             if (space.path("kind").asText().equals("held")) {
@@ -246,7 +246,7 @@ final class JobPages {
 
     private static List<PartRow> assemblies(String job, JsonNode document, Optional<Sizing> sizing) {
         List<PartRow> rows = new ArrayList<>();
-        document.path("assemblies").fields().forEachRemaining(entry -> {
+        document.path("assemblies").properties().forEach(entry -> {
             JsonNode assembly = entry.getValue();
             String words = assembly.has("uValue")
                     ? "U " + Forms.shown(assembly.path("uValue"))

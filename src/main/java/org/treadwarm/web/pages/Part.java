@@ -114,7 +114,7 @@ public record Part(String kind, String key, String title, String pointer, Class<
             return key;
         }
         List<Map.Entry<String, JsonNode>> entries = new ArrayList<>();
-        all.fields().forEachRemaining(entry -> entries.add(Map.entry(entry.getKey(), entry.getValue())));
+        all.properties().forEach(entry -> entries.add(Map.entry(entry.getKey(), entry.getValue())));
         all.removeAll();
         entries.forEach(entry -> all.set(entry.getKey().equals(key) ? name : entry.getKey(), entry.getValue()));
         renameIn(document, kind.equals("spaces") ? "to" : "assembly", name);
