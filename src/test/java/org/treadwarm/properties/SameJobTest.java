@@ -195,6 +195,9 @@ class SameJobTest {
         for (String list : List.of("rooms", "spaces")) {
             answer.get(list).forEach(node -> {
                 ObjectNode owner = node.deepCopy();
+                // The lists of layers repeat the survey's own lists, so they are longer where a layer was split.
+                owner.findParents("layersAbove").forEach(parent -> ((ObjectNode) parent).remove("layersAbove"));
+                owner.findParents("layersBelow").forEach(parent -> ((ObjectNode) parent).remove("layersBelow"));
                 if (!withPaths) {
                     owner.remove("paths");
                     owner.findParents("paths").forEach(parent -> ((ObjectNode) parent).remove("paths"));
