@@ -76,7 +76,10 @@ public final class Server implements AutoCloseable {
         config.http.maxRequestSize = LARGEST_BODY;
         config.http.prefer405over404 = true;
         config.http.defaultContentType = "text/html; charset=utf-8";
-        config.jetty.modifyServer(server -> server.setStopTimeout(5000));
+        config.jetty.modifyServer(server -> {
+            server.setStopTimeout(5000);
+            server.setErrorHandler(new UnreadableRequests());
+        });
         config.jetty.modifyHttpConfiguration((HttpConfiguration http) -> {
             http.setSendServerVersion(false);
             http.setIdleTimeout(30_000);

@@ -5,7 +5,6 @@ import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import org.treadwarm.intake.Document;
 import org.treadwarm.survey.Shape;
@@ -41,7 +40,7 @@ final class FormData {
     private void write(ObjectNode owner, List<String> path, Shape shape, String typed) {
         String name = path.get(0);
         Shape.Key key = shape.keys().get(name);
-        if (key == null) {
+        if (key == null || name.equals("id")) {
             return;
         }
         if (key.holds() == Shape.Holds.OBJECT && path.size() > 1) {
@@ -61,7 +60,7 @@ final class FormData {
             }
         } else if (key.many() == Shape.Many.LIST && path.size() == 2) {
             item(owner, key, index(path.get(1)), typed);
-        } else if (path.size() == 1) {
+        } else if (path.size() == 1 && key.holds() != Shape.Holds.OBJECT && key.many() != Shape.Many.LIST) {
             value(owner, key, typed);
         }
     }
@@ -188,34 +187,27 @@ final class FormData {
         }
     }
 
-    /** Takes an object out. */
+    /** Takes an object out; a list that has become empty goes with it. */
     void remove(List<String> path, JsonNode start) {
-        JsonNode owner = start;
-        for (String step : path.subList(0, path.size() - 1)) {
-            owner = owner.isArray() ? owner.path(index(step)) : owner.path(step);
-        }
+        List<String> above = path.subList(0, path.size() - 1);
+        JsonNode owner = at(above, start);
         String last = path.get(path.size() - 1);
         if (owner instanceof ObjectNode object) {
             object.remove(last);
         } else if (owner instanceof ArrayNode list && index(last) >= 0 && index(last) < list.size()) {
             list.remove(index(last));
+            if (list.isEmpty()) {
+                remove(above, start);
+            }
         }
     }
 
-    /** Lists that have become empty are taken out, so that an untouched form leaves the document as it was. */
-    static void tidy(JsonNode node) {
-        if (node instanceof ObjectNode object) {
-            List<String> empty = new ArrayList<>();
-            for (Map.Entry<String, JsonNode> field : object.properties()) {
-                tidy(field.getValue());
-                if (field.getValue().isArray() && field.getValue().isEmpty()) {
-                    empty.add(field.getKey());
-                }
-            }
-            object.remove(empty);
-        } else if (node.isArray()) {
-            node.forEach(FormData::tidy);
+    private static JsonNode at(List<String> path, JsonNode start) {
+        JsonNode node = start;
+        for (String step : path) {
+            node = node.isArray() ? node.path(index(step)) : node.path(step);
         }
+        return node;
     }
 
     /** The steps of a pointer, unescaped. */

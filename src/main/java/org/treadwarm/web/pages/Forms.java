@@ -213,7 +213,7 @@ final class Forms {
         boolean list = key.many() == Shape.Many.LIST;
         List<ObjectView> items = new ArrayList<>();
         if (list) {
-            for (int i = 0; i < node.size(); i++) {
+            for (int i = 0; node.isArray() && i < node.size(); i++) {
                 String at = Pointer.to(pointer, i);
                 items.add(object(node.get(i), at, key.name(), itemTitle(node.get(i), type, i), type, true));
             }

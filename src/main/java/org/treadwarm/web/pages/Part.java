@@ -26,7 +26,7 @@ public record Part(String kind, String key, String title, String pointer, Class<
     static Optional<Part> find(JsonNode document, String kind, String key) {
         if (kind.equals("rooms")) {
             for (int i = 0; i < document.path("rooms").size(); i++) {
-                JsonNode room = document.path("rooms").get(i);
+                JsonNode room = document.path("rooms").path(i);
                 if (room.path("id").asText().equals(key)) {
                     return Optional.of(room(i, key, room.path("name").asText()));
                 }
@@ -75,7 +75,6 @@ public record Part(String kind, String key, String title, String pointer, Class<
         FormData data = new FormData();
         JsonNode own = document.at(pointer);
         fields.forEach((name, values) -> within(name).ifPresent(steps -> data.write(steps, type, own, values.get(0))));
-        FormData.tidy(own);
     }
 
     /** The steps below this part of a field's name. */

@@ -1,0 +1,27 @@
+package org.treadwarm.web;
+
+import java.nio.ByteBuffer;
+import org.eclipse.jetty.http.HttpHeader;
+import org.eclipse.jetty.server.Request;
+import org.eclipse.jetty.server.Response;
+import org.eclipse.jetty.util.Callback;
+import org.treadwarm.wire.Json;
+import org.treadwarm.wire.ProblemDocument;
+
+/**
+ * Answers requests that no route ever sees, such as those with an address that cannot be decoded or headers that are too
+ * long. Who asked is not known there, so everybody gets a problem document.
+ */
+final class UnreadableRequests implements Request.Handler {
+    @Override
+    public boolean handle(Request request, Response response, Callback callback) {
+        int status = response.getStatus();
+        response.getHeaders().put(HttpHeader.CONTENT_TYPE, ProblemDocument.MEDIA_TYPE);
+        response.getHeaders().put(HttpHeader.CACHE_CONTROL, "no-store");
+        response.getHeaders().put("X-Content-Type-Options", "nosniff");
+        ProblemDocument problem =
+                ProblemDocument.plain(status, "http", "The request could not be read", "It was refused unread.");
+        response.write(true, ByteBuffer.wrap(Json.bytes(problem)), callback);
+        return true;
+    }
+}

@@ -1,0 +1,123 @@
+package org.treadwarm.web;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.Clock;
+import java.util.Comparator;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import java.util.stream.Stream;
+import org.treadwarm.intake.Document;
+import org.treadwarm.jobs.Job;
+import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.store.Change;
+import org.treadwarm.store.OwnerCreation;
+import org.treadwarm.store.Person;
+import org.treadwarm.store.Scope;
+import org.treadwarm.store.Session;
+import org.treadwarm.store.Store;
+
+/** A server over a store of its own in a new folder, with a key of every scope and, when asked for, an owner. */
+public final class RunningServer implements AutoCloseable {
+    /** The owner's name; invented. */
+    public static final String OWNER = "Ottilie of Quillfen Floors";
+
+    /** The owner's password. */
+    public static final String PASSWORD = "a floor that holds the room";
+
+    private final Path folder;
+    private final Store store;
+    private final Server server;
+    private final Map<Scope, String> keys = new EnumMap<>(Scope.class);
+
+    private RunningServer(Path folder) {
+        this.folder = folder;
+        this.store = Store.open(folder, Clock.systemUTC());
+        this.server = Server.start(new Settings("127.0.0.1", 0, List.of(), false), store);
+        for (Scope scope : Scope.values()) {
+            keys.put(scope, store.keys().create("tests", scope, "tests").token());
+        }
+    }
+
+    /** Starts one on any free port. */
+    public static RunningServer start() {
+        try {
+            return new RunningServer(Files.createTempDirectory("treadwarm-test"));
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    /** Its address without a path. */
+    public String origin() {
+        return "http://127.0.0.1:" + server.port();
+    }
+
+    /** The port it listens on. */
+    public int port() {
+        return server.port();
+    }
+
+    /** A key of this scope. */
+    public String key(Scope scope) {
+        return keys.get(scope);
+    }
+
+    /** What it keeps. */
+    public Store store() {
+        return store;
+    }
+
+    /** Its jobs. */
+    public JobDesk desk() {
+        return new JobDesk(store.jobs());
+    }
+
+    /** Makes the owner. */
+    public Person owner() {
+        String token = store.people().inviteOwner().orElseThrow();
+        return ((OwnerCreation.Created) store.people().createOwner(token, OWNER, PASSWORD)).owner();
+    }
+
+    /** A new session of somebody. */
+    public Session session(Person person) {
+        return store.sessions().start(person);
+    }
+
+    /** Starts a job with this survey. */
+    public Job job(String name, JsonNode survey) {
+        return desk().create(name, survey, Change.by("tests"));
+    }
+
+    /** The job as it is now. */
+    public Job now(Job job) {
+        return desk().current(job.id()).orElseThrow();
+    }
+
+    /** The invented survey of nearly every feature. */
+    public static ObjectNode studio() {
+        try (InputStream in = RunningServer.class.getResourceAsStream("/surveys/studio.json")) {
+            return (ObjectNode) Document.mapper().readTree(in);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    @Override
+    public void close() {
+        server.close();
+        store.close();
+        try (Stream<Path> files = Files.walk(folder)) {
+            files.sorted(Comparator.reverseOrder())
+                    .forEach(file -> file.toFile().delete());
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+}

@@ -1,0 +1,71 @@
+package org.treadwarm.web;
+
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.net.CookieManager;
+import java.net.HttpCookie;
+import java.net.URI;
+import java.net.http.HttpClient;
+import java.net.http.HttpRequest;
+import java.net.http.HttpRequest.BodyPublishers;
+import java.net.http.HttpResponse.BodyHandlers;
+import java.time.Duration;
+import org.treadwarm.store.Session;
+
+/** Somebody at a browser without script. */
+final class Visitor {
+    private final RunningServer server;
+    private final CookieManager cookies = new CookieManager();
+    private final HttpClient client = HttpClient.newBuilder()
+            .cookieHandler(cookies)
+            .followRedirects(HttpClient.Redirect.NEVER)
+            .version(HttpClient.Version.HTTP_1_1)
+            .build();
+
+    /** A stranger. */
+    Visitor(RunningServer server) {
+        this.server = server;
+    }
+
+    /** Somebody who is signed in. */
+    Visitor(RunningServer server, Session session) {
+        this(server);
+        HttpCookie cookie = new HttpCookie("treadwarm-session", session.token());
+        cookie.setPath("/");
+        cookie.setVersion(0);
+        cookies.getCookieStore().add(URI.create(server.origin()), cookie);
+    }
+
+    /** Opens a page, without following where it leads. */
+    Page open(String path) {
+        return send(request(path).GET());
+    }
+
+    /** Sends a form, without following where it leads. */
+    Page send(Form form) {
+        return send(request(form.action())
+                .header("Content-Type", "application/x-www-form-urlencoded")
+                .POST(BodyPublishers.ofString(form.encoded())));
+    }
+
+    /** Sends a form and opens the page that it leads to. */
+    Page submit(Form form) {
+        Page answer = send(form);
+        return answer.status() == 303 ? open(URI.create(answer.location()).getRawPath()) : answer;
+    }
+
+    private HttpRequest.Builder request(String path) {
+        return HttpRequest.newBuilder(URI.create(server.origin()).resolve(path)).timeout(Duration.ofSeconds(30));
+    }
+
+    private Page send(HttpRequest.Builder request) {
+        try {
+            return Page.of(client.send(request.build(), BodyHandlers.ofString()));
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        } catch (InterruptedException e) {
+            Thread.currentThread().interrupt();
+            throw new IllegalStateException(e);
+        }
+    }
+}
