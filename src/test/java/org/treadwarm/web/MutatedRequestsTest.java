@@ -1,0 +1,136 @@
+package org.treadwarm.web;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.net.Socket;
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Random;
+import org.junit.jupiter.api.Test;
+import org.treadwarm.jobs.Job;
+import org.treadwarm.store.Scope;
+
+/** Requests to every route of the API, each spoiled at random but repeatably: no fault, and every refusal says so. */
+class MutatedRequestsTest {
+    private static final int MUTANTS = 2000;
+    private static final long SEED = 20_261_103;
+    private static final List<String> ODD = List.of(
+            "",
+            " ",
+            "%00",
+            "%zz",
+            "..",
+            "%2F",
+            ";",
+            "?",
+            "#",
+            "\u00e9",
+            "null",
+            "-1",
+            "99999999999999999999",
+            "\t",
+            "a".repeat(3000),
+            "\"",
+            "{}",
+            "[]",
+            "1e999",
+            "NaN",
+            "\\u0000",
+            "\ud83c",
+            ": :",
+            "${7*7}",
+            "'--",
+            "*",
+            "0");
+
+    private final Random random = new Random(SEED);
+
+    @Test
+    void noneIsAFaultAndEveryRefusalIsAProblem() throws Exception {
+        try (RunningServer server = RunningServer.start()) {
+            Job job = server.job("yard", RunningServer.studio());
+            List<RawRequest> seeds = seeds(server, job.id());
+            List<String> faults = new ArrayList<>();
+            int refused = 0;
+            for (int i = 0; i < MUTANTS; i++) {
+                RawRequest request = mutant(seeds.get(i % seeds.size()));
+                RawAnswer answer = send(server, request);
+                if (answer.status() >= 300) {
+                    refused++;
+                }
+                answer.fault(request.isOfApi()).ifPresent(fault -> faults.add(fault + " after " + request.shown()));
+            }
+            assertThat(faults).isEmpty();
+            assertThat(refused).isGreaterThan(MUTANTS / 2);
+            assertThat(server.desk().revision(job.id(), 1).orElseThrow().document())
+                    .isEqualTo(job.document());
+            assertThat(server.store().keys().find(server.key(Scope.WRITE))).isPresent();
+        }
+    }
+
+    private static List<RawRequest> seeds(RunningServer server, String job) {
+        String survey = RunningServer.studio().toString();
+        String body = "{\"name\": \"yard\", \"survey\": " + survey + "}";
+        String key = server.key(Scope.WRITE);
+        String jobs = "/api/v1/jobs";
+        return List.of(
+                RawRequest.get("/api/v1/health", key),
+                RawRequest.get("/api/v1/openapi.json", key),
+                RawRequest.get("/api/v1/materials?find=oak", key),
+                RawRequest.get(jobs, key),
+                RawRequest.get(jobs + "/" + job, key),
+                RawRequest.get(jobs + "/" + job + "/sizing", key),
+                RawRequest.get(jobs + "/" + job + "/revisions", key),
+                RawRequest.get(jobs + "/" + job + "/revisions/1", key),
+                RawRequest.with("POST", "/api/v1/sizings?working=true", key, survey),
+                RawRequest.with(
+                        "POST",
+                        "/api/v1/assemblies/evaluations",
+                        key,
+                        RunningServer.studio().at("/assemblies/shed wall").toString()),
+                RawRequest.with("POST", jobs, key, body),
+                RawRequest.with("PUT", jobs + "/" + job, key, body).header("If-Match", "\"1\""));
+    }
+
+    private RawRequest mutant(RawRequest seed) {
+        RawRequest request = seed;
+        int times = 1 + random.nextInt(3);
+        for (int i = 0; i < times; i++) {
+            request = switch (random.nextInt(4)) {
+                case 0 -> request.path(spoiled(request.path()));
+                case 1 -> request.spoilHeader(random.nextInt(100), this::spoiled);
+                case 2 -> request.method(pick(List.of("GET", "POST", "PUT", "DELETE", "PATCH", "HEAD", "BREW", "get")));
+                default -> request.body(spoiled(request.body()));
+            };
+        }
+        return request;
+    }
+
+    private String pick(List<String> choices) {
+        return choices.get(random.nextInt(choices.size()));
+    }
+
+    /** The text with something cut out, put in, doubled or replaced somewhere. */
+    private String spoiled(String text) {
+        int from = random.nextInt(text.length() + 1);
+        int to = Math.min(text.length(), from + random.nextInt(12));
+        return switch (random.nextInt(5)) {
+            case 0 -> text.substring(0, from) + text.substring(to);
+            case 1 -> text.substring(0, from) + pick(ODD) + text.substring(from);
+            case 2 -> text.substring(0, to) + text.substring(from);
+            case 3 -> text.substring(0, from) + pick(ODD) + text.substring(to);
+            default -> text.substring(0, from) + (char) random.nextInt(0x2000) + text.substring(to);
+        };
+    }
+
+    private static RawAnswer send(RunningServer server, RawRequest request) throws Exception {
+        try (Socket socket = new Socket("127.0.0.1", server.port())) {
+            socket.setSoTimeout(30_000);
+            socket.getOutputStream().write(request.bytes());
+            socket.getOutputStream().flush();
+            socket.shutdownOutput();
+            return RawAnswer.of(new String(socket.getInputStream().readAllBytes(), StandardCharsets.UTF_8));
+        }
+    }
+}
