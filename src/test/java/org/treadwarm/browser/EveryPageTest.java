@@ -1,0 +1,154 @@
+package org.treadwarm.browser;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.deque.html.axecore.playwright.AxeBuilder;
+import com.deque.html.axecore.results.Rule;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import com.microsoft.playwright.Browser;
+import com.microsoft.playwright.Page;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.AfterAll;
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.extension.ExtendWith;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
+import org.treadwarm.jobs.Demo;
+import org.treadwarm.store.Session;
+import org.treadwarm.web.RunningServer;
+
+/** What holds on every page: no barrier, no complaint of the browser, nothing wider than the page, nothing too small. */
+@ExtendWith(Chromium.class)
+class EveryPageTest {
+    private static final List<String> RULES =
+            List.of("wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22a", "wcag22aa");
+    private static final int SMALLEST_TARGET = 44;
+
+    private static RunningServer server;
+    private static RunningServer withoutOwner;
+    private static String invitation;
+    private static Session session;
+    private static String demo;
+    private static String broken;
+
+    @BeforeAll
+    static void start() {
+        server = RunningServer.start();
+        session = server.session(server.owner());
+        demo = "/jobs/" + server.job("Sallowby house", Demo.survey()).id();
+        ObjectNode survey = RunningServer.studio();
+        ObjectNode room = (ObjectNode) survey.get("rooms").get(0);
+        room.put("height", "so high").remove("indoorTemperature");
+        ((ObjectNode) room.at("/surfaces/0")).put("assembly", "").put("to", "nowhere");
+        ((ObjectNode) room.at("/heatedFloor/heater")).remove("kind");
+        broken = "/jobs/" + server.job("Unfinished", survey).id();
+        withoutOwner = RunningServer.start();
+        invitation = withoutOwner.store().people().inviteOwner().orElseThrow();
+    }
+
+    @AfterAll
+    static void stop() {
+        server.close();
+        withoutOwner.close();
+    }
+
+    static Stream<String> pages() {
+        String room = server.desk()
+                .current(demo.substring("/jobs/".length()))
+                .orElseThrow()
+                .document()
+                .at("/rooms/0/id")
+                .textValue();
+        Stream<String> jobs = Stream.of(
+                "/jobs",
+                demo,
+                demo + "/rooms/" + room,
+                broken,
+                broken + "/rooms/studio-1",
+                broken + "/spaces/loft",
+                broken + "/spaces/stair",
+                broken + "/spaces/shop%20next%20door",
+                broken + "/assemblies/shed%20wall",
+                broken + "/assemblies/new%20sash");
+        return Stream.concat(
+                jobs, Stream.of("/one-room", "/materials", "/reading-help", "/method", "/nothing-here", "/sign-in"));
+    }
+
+    static Stream<String> pagesBeforeTheOwner() {
+        return Stream.of("/sign-in", "/owner/" + invitation, "/owner/spent");
+    }
+
+    @ParameterizedTest
+    @MethodSource("pages")
+    void isForEverybody(String path, Browser browser) {
+        try (Tab tab = Tab.desk(server, browser).as(session).open(path)) {
+            assertForEverybody(tab);
+        }
+    }
+
+    @ParameterizedTest
+    @MethodSource("pagesBeforeTheOwner")
+    void isForEverybodyBeforeThereIsAnOwner(String path, Browser browser) {
+        try (Tab tab = Tab.desk(withoutOwner, browser).open(path)) {
+            assertForEverybody(tab);
+        }
+    }
+
+    private static void assertForEverybody(Tab tab) {
+        Page page = tab.page();
+        List<String> faults = new ArrayList<>();
+        for (int width : new int[] {390, 820, 1280}) {
+            page.setViewportSize(width, 1180);
+            tooWide(page).forEach(what -> faults.add(width + " px: too wide: " + what));
+            tooSmall(page).forEach(what -> faults.add(width + " px: too small: " + what));
+            if (width != 390) {
+                barriers(page).forEach(what -> faults.add(width + " px: " + what));
+            }
+        }
+        faults.addAll(tab.complaints());
+        assertThat(faults).isEmpty();
+    }
+
+    private static List<String> barriers(Page page) {
+        List<String> barriers = new ArrayList<>();
+        for (Rule rule : new AxeBuilder(page)
+                .setLegacyMode(true)
+                .withTags(RULES)
+                .analyze()
+                .getViolations()) {
+            rule.getNodes()
+                    .forEach(node -> barriers.add(rule.getId() + ": " + node.getTarget() + " " + node.getHtml() + " "
+                            + node.getFailureSummary()));
+        }
+        return barriers;
+    }
+
+    /** Whatever sticks out of the page where the page itself would have to be scrolled sideways. */
+    @SuppressWarnings("unchecked")
+    private static List<String> tooWide(Page page) {
+        return (List<String>) page.evaluate("""
+                () => {
+                  const width = document.documentElement.clientWidth;
+                  if (document.documentElement.scrollWidth <= width) { return []; }
+                  return [...document.querySelectorAll('body *')]
+                      .filter(each => each.getBoundingClientRect().right > width + 0.5)
+                      .slice(0, 5)
+                      .map(each => each.outerHTML.slice(0, 150));
+                }""");
+    }
+
+    /** Buttons and fields that a gloved finger would miss. */
+    @SuppressWarnings("unchecked")
+    private static List<String> tooSmall(Page page) {
+        return (List<String>) page.evaluate("""
+                smallest => [...document.querySelectorAll('button, input, select, textarea, summary')]
+                    .filter(each => each.type !== 'hidden' && each.tabIndex >= 0)
+                    .filter(each => each.checkVisibility())
+                    .filter(each => each.getBoundingClientRect().height < smallest)
+                    .slice(0, 5)
+                    .map(each => each.getBoundingClientRect().height + ' ' + each.outerHTML.slice(0, 150))
+                """, SMALLEST_TARGET);
+    }
+}
