@@ -1,6 +1,5 @@
 package org.treadwarm.commands;
 
-import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
@@ -17,7 +16,6 @@ import org.treadwarm.survey.Survey;
 import org.treadwarm.wire.Json;
 import org.treadwarm.wire.PlainSheet;
 import org.treadwarm.wire.ProblemDocument;
-import org.treadwarm.wire.WorkingAnswer;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
@@ -85,12 +83,7 @@ public final class SizeCommand implements Callable<Integer> {
             return (working ? sheet + "\n\n" + PlainSheet.working(survey, sizing) : sheet)
                     .getBytes(StandardCharsets.UTF_8);
         }
-        if (!working) {
-            return Json.bytes(sizing);
-        }
-        ObjectNode answer = (ObjectNode) Json.tree(sizing);
-        answer.set("working", Json.tree(WorkingAnswer.of(survey, sizing)));
-        return Json.bytes(answer);
+        return working ? Json.withWorking(survey, sizing) : Json.bytes(sizing);
     }
 
     private static Outcome refused(ProblemDocument problem) {

@@ -93,6 +93,9 @@ public final class Server implements AutoCloseable {
 
     private static void faults(JavalinConfig config, Pages pages) {
         config.routes.exception(HttpResponseException.class, (e, ctx) -> {
+            if (e.getStatus() == 413) {
+                Drain.rest(ctx);
+            }
             ctx.status(e.getStatus());
             ctx.result("");
             answer(ctx, pages, e.getStatus());

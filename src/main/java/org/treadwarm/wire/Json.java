@@ -7,10 +7,12 @@ import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.SerializationFeature;
 import com.fasterxml.jackson.databind.json.JsonMapper;
 import com.fasterxml.jackson.databind.module.SimpleModule;
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import com.fasterxml.jackson.databind.ser.std.ToStringSerializer;
 import com.fasterxml.jackson.datatype.jdk8.Jdk8Module;
 import java.time.Instant;
 import org.treadwarm.sizing.Sizing;
+import org.treadwarm.survey.Survey;
 
 /** Writes answers: records as they are, what does not exist left out. */
 public final class Json {
@@ -40,6 +42,13 @@ public final class Json {
         } catch (JsonProcessingException e) {
             throw new IllegalStateException("an answer cannot be written", e);
         }
+    }
+
+    /** A sizing as UTF-8 text, with its working. */
+    public static byte[] withWorking(Survey survey, Sizing sizing) {
+        ObjectNode answer = MAPPER.valueToTree(sizing);
+        answer.set("working", tree(WorkingAnswer.of(survey, sizing)));
+        return bytes(answer);
     }
 
     /** An answer as a tree. */

@@ -6,6 +6,7 @@ import java.util.Locale;
 import java.util.Optional;
 import org.treadwarm.intake.Document;
 import org.treadwarm.intake.NotJsonException;
+import org.treadwarm.web.Drain;
 import org.treadwarm.web.Problems;
 import org.treadwarm.wire.ProblemDocument;
 
@@ -31,6 +32,7 @@ final class Bodies {
             return Optional.empty();
         }
         if (ctx.req().getContentLengthLong() > most) {
+            Drain.rest(ctx);
             tooLarge(ctx, most);
             return Optional.empty();
         }

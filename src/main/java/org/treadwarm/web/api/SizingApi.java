@@ -1,7 +1,6 @@
 package org.treadwarm.web.api;
 
 import com.fasterxml.jackson.databind.JsonNode;
-import com.fasterxml.jackson.databind.node.ObjectNode;
 import io.javalin.http.Context;
 import java.util.Map;
 import java.util.Optional;
@@ -11,12 +10,12 @@ import org.treadwarm.intake.Intake.Outcome;
 import org.treadwarm.jobs.Judgement;
 import org.treadwarm.sizing.AssemblyEvaluation;
 import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
+import org.treadwarm.sizing.Sizing;
 import org.treadwarm.store.Scope;
 import org.treadwarm.tables.Materials;
 import org.treadwarm.web.Problems;
 import org.treadwarm.web.security.KeyGuard;
 import org.treadwarm.wire.Json;
-import org.treadwarm.wire.WorkingAnswer;
 
 /** Answers that keep nothing: sizings, evaluations of assemblies, the materials table. */
 final class SizingApi {
@@ -40,16 +39,9 @@ final class SizingApi {
             Problems.invalid(ctx, judged.problems());
             return;
         }
-        if ("true".equals(ctx.queryParam("working"))) {
-            ObjectNode answer = (ObjectNode) Json.tree(judged.sizing().get());
-            answer.set(
-                    "working",
-                    Json.tree(WorkingAnswer.of(
-                            judged.survey().orElseThrow(), judged.sizing().get())));
-            json(ctx, 200, answer);
-        } else {
-            json(ctx, 200, judged.sizing().get());
-        }
+        Sizing sizing = judged.sizing().get();
+        boolean working = "true".equals(ctx.queryParam("working"));
+        json(ctx, 200, working ? Json.withWorking(judged.survey().orElseThrow(), sizing) : Json.bytes(sizing));
     }
 
     /** {@code POST /api/v1/assemblies/evaluations}: one assembly under given temperatures. */
@@ -85,8 +77,12 @@ final class SizingApi {
     }
 
     static void json(Context ctx, int status, Object answer) {
+        json(ctx, status, Json.bytes(answer));
+    }
+
+    private static void json(Context ctx, int status, byte[] text) {
         ctx.status(status);
         ctx.contentType("application/json; charset=utf-8");
-        ctx.result(Json.bytes(answer));
+        ctx.result(text);
     }
 }
