@@ -96,6 +96,42 @@ class SavingTogetherPagesTest {
     }
 
     @Test
+    void theFormOfAJobKeepsWhatOthersHaveSavedInFieldsNobodyTouched() {
+        Form one = visitorsJob(first);
+        Form other = visitorsJob(second);
+        first.send(one.type("/site/outdoorTemperature", "-12")
+                .type("job-name", "Mill Lane")
+                .press("save"));
+
+        assertThat(second.send(other.type("new-name", "attic").press("add-room"))
+                        .status())
+                .isEqualTo(303);
+
+        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-12");
+        assertThat(server.now(job).name()).isEqualTo("Mill Lane");
+        assertThat(kept("/rooms/2/name").textValue()).isEqualTo("attic");
+    }
+
+    @Test
+    void aFieldOfTheSiteThatBothChangedIsHeldBackWithWhatWasTyped() {
+        Form one = visitorsJob(first);
+        Form other = visitorsJob(second);
+        first.send(one.type("/site/outdoorTemperature", "-12").press("save"));
+
+        Page held = second.send(other.type("/site/outdoorTemperature", "-14").press("save"));
+
+        assertThat(held.status()).isEqualTo(409);
+        assertThat(held.value("/site/outdoorTemperature")).isEqualTo("-14");
+        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-12");
+        assertThat(second.send(held.form("new-name").press("save")).status()).isEqualTo(303);
+        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-14");
+    }
+
+    private Form visitorsJob(Visitor visitor) {
+        return visitor.open("/jobs/" + job.id()).form("new-name");
+    }
+
+    @Test
     void aRoomThatMovedInTheListIsStillWrittenTo() {
         Form other = form(second, "rooms/shower-1");
         first.send(form(first, "rooms/studio-1").press("remove-part"));

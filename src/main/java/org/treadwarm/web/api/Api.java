@@ -2,6 +2,7 @@ package org.treadwarm.web.api;
 
 import io.javalin.config.RoutesConfig;
 import io.javalin.http.Context;
+import io.javalin.http.Handler;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.web.security.KeyGuard;
@@ -25,18 +26,24 @@ public final class Api {
 
     /** Adds the routes. */
     public void routes(RoutesConfig routes) {
-        routes.get(ROOT + "/health", Api::health);
-        routes.get(ROOT + "/openapi.json", this::description);
+        get(routes, ROOT + "/health", Api::health);
+        get(routes, ROOT + "/openapi.json", this::description);
         routes.post(ROOT + "/sizings", sizing::size);
         routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate);
-        routes.get(ROOT + "/materials", sizing::materials);
-        routes.get(ROOT + "/jobs", jobs::list);
+        get(routes, ROOT + "/materials", sizing::materials);
+        get(routes, ROOT + "/jobs", jobs::list);
         routes.post(ROOT + "/jobs", jobs::create);
-        routes.get(ROOT + "/jobs/{id}", jobs::get);
+        get(routes, ROOT + "/jobs/{id}", jobs::get);
         routes.put(ROOT + "/jobs/{id}", jobs::put);
-        routes.get(ROOT + "/jobs/{id}/sizing", jobs::sizing);
-        routes.get(ROOT + "/jobs/{id}/revisions", jobs::revisions);
-        routes.get(ROOT + "/jobs/{id}/revisions/{n}", jobs::revision);
+        get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing);
+        get(routes, ROOT + "/jobs/{id}/revisions", jobs::revisions);
+        get(routes, ROOT + "/jobs/{id}/revisions/{n}", jobs::revision);
+    }
+
+    /** HEAD answers as GET does, without the body. */
+    private static void get(RoutesConfig routes, String path, Handler handler) {
+        routes.get(path, handler);
+        routes.head(path, handler);
     }
 
     private static void health(Context ctx) {

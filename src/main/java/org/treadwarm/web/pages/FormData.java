@@ -129,6 +129,15 @@ final class FormData {
         return !unit.isEmpty() && ReadingParser.isBare(typed) ? typed + SHOWN_UNIT + unit : typed;
     }
 
+    /** The text that a form shows for one field. */
+    String shown(List<String> path, Class<? extends Record> root, JsonNode start) {
+        String unit = declared(path, Shape.of(root))
+                .flatMap(Shape.Key::quantity)
+                .map(Forms::unit)
+                .orElse("");
+        return withoutUnit(Forms.shown(at(path, start)), unit);
+    }
+
     /** Puts an assumption where somebody said "not known". */
     void assume(List<String> path, Class<? extends Record> root, JsonNode start) {
         declared(path, Shape.of(root)).filter(key -> key.quantity().isPresent()).ifPresent(key -> {

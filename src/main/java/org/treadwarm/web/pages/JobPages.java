@@ -15,6 +15,7 @@ import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.jobs.JobDesk.Saving;
+import org.treadwarm.jobs.Judgement;
 import org.treadwarm.jobs.Partial;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.FloorSizing;
@@ -111,8 +112,11 @@ final class JobPages {
     }
 
     private void show(Context ctx, int status, Job job, List<ErrorView> more, String notice) {
-        JsonNode document = job.document();
-        Forms forms = new Forms(document, job.problems());
+        show(ctx, status, job, job.document(), more, notice);
+    }
+
+    private void show(Context ctx, int status, Job job, JsonNode document, List<ErrorView> more, String notice) {
+        Forms forms = new Forms(document, Judgement.of(document).problems());
         ObjectView site = forms.form("/site", "Site", Site.class);
         Partial partial = Partial.of(document);
         Optional<Sizing> sizing = partial.judgement().sizing();
@@ -278,19 +282,64 @@ final class JobPages {
         String action = EntryPages.text(ctx, "do");
         FormData data = new FormData();
         ObjectNode site = document.path("site") instanceof ObjectNode known ? known : document.putObject("site");
+        Job shown = shown(ctx, job);
+        List<ErrorView> errors = new ArrayList<>(writeSite(ctx, data, site, shown));
+        String name = name(ctx, job, shown);
+        String notice = act(ctx, action, document, data, site);
+        if (!notice.isEmpty()) {
+            errors.add(new ErrorView("new-name", "", notice, ""));
+        }
+        if (errors.isEmpty()) {
+            save(ctx, job, name, document, action);
+        } else {
+            show(ctx, notice.isEmpty() ? 409 : 422, job, document, errors, "");
+        }
+    }
+
+    /** The revision that the form was made from. */
+    private Job shown(Context ctx, Job current) {
+        String revision = EntryPages.text(ctx, "revision");
+        return revision.matches("[0-9]{1,15}")
+                ? desk.revision(current.id(), Long.parseLong(revision)).orElse(current)
+                : current;
+    }
+
+    /**
+     * Writes what was typed about the site; fields that nobody touched keep what others have saved since. A field that both
+     * changed is told of.
+     */
+    private static List<ErrorView> writeSite(Context ctx, FormData data, ObjectNode site, Job shown) {
+        List<ErrorView> conflicts = new ArrayList<>();
         ctx.formParamMap().forEach((field, values) -> {
-            if (field.startsWith("/site/")) {
-                data.write(FormData.steps(field.substring("/site".length())), Site.class, site, values.get(0));
+            if (!field.startsWith("/site/")) {
+                return;
+            }
+            List<String> steps = FormData.steps(field.substring("/site".length()));
+            String typed = values.get(0).strip();
+            String before =
+                    data.shown(steps, Site.class, shown.document().path("site")).strip();
+            String now = data.shown(steps, Site.class, site).strip();
+            if (typed.equals(before)) {
+                return;
+            }
+            data.write(steps, Site.class, site, typed);
+            if (!now.equals(before) && !now.equals(typed)) {
+                conflicts.add(new ErrorView(
+                        Forms.id(field),
+                        "Site",
+                        "Somebody else has made this \"" + now
+                                + "\" meanwhile. Yours stands in the field, not kept yet: save"
+                                + " again to let it stand.",
+                        ""));
             }
         });
-        String notice = act(ctx, action, document, data, site);
-        String jobName = EntryPages.text(ctx, "job-name").strip();
-        String name = jobName.isEmpty() || jobName.length() > LONGEST_NAME ? job.name() : jobName;
-        if (!notice.isEmpty()) {
-            show(ctx, 422, job, List.of(new ErrorView("new-name", "", notice, "")), "");
-            return;
-        }
-        save(ctx, job, name, document, action);
+        return conflicts;
+    }
+
+    private static String name(Context ctx, Job job, Job shown) {
+        String typed = EntryPages.text(ctx, "job-name").strip();
+        boolean unchanged = typed.isEmpty() || typed.length() > LONGEST_NAME || typed.equals(shown.name());
+        return unchanged ? job.name() : typed;
     }
 
     private void save(Context ctx, Job job, String name, ObjectNode document, String action) {
