@@ -26,7 +26,8 @@ import org.treadwarm.wire.Json;
 
 /**
  * The request rate of {@code POST /api/v1/sizings} beside that of a bare handler of the same framework that parses the same JSON
- * and echoes it, in one run, over loopback, with the same clients: turn about, several rounds, the median of each.
+ * and echoes it, in one run, over loopback, with the same clients: turn about, several rounds, the median of each. With the
+ * argument "hold" it only keeps the two servers up and writes a script for Debian's wrk, whose clients cost less.
  */
 public final class RequestRate {
     private static final int CLIENTS = 8;
@@ -56,6 +57,10 @@ public final class RequestRate {
                     store.keys().create("rate", Scope.SIZE, "the benchmark").token();
             URI echo = URI.create("http://127.0.0.1:" + bare.port() + "/echo");
             URI size = URI.create("http://127.0.0.1:" + server.port() + "/api/v1/sizings");
+            if (arguments.length > 0 && arguments[0].equals("hold")) {
+                hold(folder, body, key, echo, size);
+                return;
+            }
             rate(echo, body, key, WARM_UP_SECONDS);
             rate(size, body, key, WARM_UP_SECONDS);
             List<Double> echoes = new ArrayList<>();
@@ -76,6 +81,22 @@ public final class RequestRate {
                     sizingRate / bareRate);
         } finally {
             bare.stop();
+        }
+    }
+
+    /** Keeps both servers up for a load generator of one's own, until standard input ends. */
+    private static void hold(Path folder, byte[] body, String key, URI echo, URI size) throws IOException {
+        Path script = folder.resolve("post.lua");
+        Files.writeString(
+                script,
+                "wrk.method = 'POST'\nwrk.headers['Content-Type'] = 'application/json'\n"
+                        + "wrk.headers['Authorization'] = 'Bearer " + key + "'\nlocal f = io.open('"
+                        + Files.write(folder.resolve("body.json"), body) + "')\nwrk.body = f:read('*a')\n");
+        System.out.println("script " + script);
+        System.out.println("echo " + echo);
+        System.out.println("size " + size);
+        while (System.in.read() >= 0) {
+            // Standard input is still open.
         }
     }
 

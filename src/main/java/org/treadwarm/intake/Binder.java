@@ -182,7 +182,7 @@ final class Binder {
         }
         String text = node.textValue().strip();
         int longest = key.longest();
-        boolean control = text.chars().anyMatch(c -> Character.isISOControl(c) && c != '\n' && c != '\r' && c != '\t');
+        boolean control = hasControl(text);
         if (text.length() > longest || control) {
             findings.add(
                     pointer,
@@ -198,6 +198,16 @@ final class Binder {
             findings.add(pointer, "an empty text", "the " + key.label() + " is empty", allowed(key));
         }
         return text;
+    }
+
+    private static boolean hasControl(String text) {
+        for (int i = 0; i < text.length(); i++) {
+            char c = text.charAt(i);
+            if (Character.isISOControl(c) && c != '\n' && c != '\r' && c != '\t') {
+                return true;
+            }
+        }
+        return false;
     }
 
     private Object word(JsonNode node, Shape.Key key, String pointer) {

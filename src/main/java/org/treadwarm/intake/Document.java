@@ -29,6 +29,7 @@ public final class Document {
                             .maxNumberLength(200)
                             .build())
                     .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
+                    .enable(StreamReadFeature.USE_FAST_DOUBLE_PARSER)
                     .build())
             .build();
 

@@ -57,6 +57,11 @@ public final class Findings {
         return !pointers.contains(pointer) && !pointers.contains(pointer + "/reading") && !isUnread(pointer);
     }
 
+    /** Whether nothing was found at an address below another; the address is put together only when that can matter. */
+    public boolean clean(String above, String below) {
+        return pointers.isEmpty() || clean(above + below);
+    }
+
     /** Whether nothing was found at all. */
     public boolean isEmpty() {
         return problems.isEmpty();

@@ -24,7 +24,7 @@ final class LayerRules {
     }
 
     void assembly(String pointer, Assembly assembly) {
-        boolean judged = findings.clean(pointer + "/layers") && findings.clean(pointer + "/uValue");
+        boolean judged = findings.clean(pointer, "/layers") && findings.clean(pointer, "/uValue");
         if (assembly.uValue().isPresent() && !assembly.layers().isEmpty()) {
             findings.add(
                     pointer,
@@ -81,12 +81,12 @@ final class LayerRules {
     }
 
     private void layer(String pointer, Layer layer) {
-        boolean judged = findings.clean(pointer + "/resistance")
-                && findings.clean(pointer + "/thickness")
-                && findings.clean(pointer + "/conductivity")
-                && findings.clean(pointer + "/material")
-                && findings.clean(pointer + "/airGap")
-                && findings.clean(pointer + "/airGap/thickness");
+        boolean judged = findings.clean(pointer, "/resistance")
+                && findings.clean(pointer, "/thickness")
+                && findings.clean(pointer, "/conductivity")
+                && findings.clean(pointer, "/material")
+                && findings.clean(pointer, "/airGap")
+                && findings.clean(pointer, "/airGap/thickness");
         if (!judged) {
             return;
         }
@@ -161,7 +161,7 @@ final class LayerRules {
 
     private void bridging(String pointer, Layer layer, Bridging bridging) {
         String at = pointer + "/bridging";
-        if (!findings.clean(at + "/conductivity") || !findings.clean(at + "/resistance")) {
+        if (!findings.clean(at, "/conductivity") || !findings.clean(at, "/resistance")) {
             return;
         }
         if (bridging.conductivity().isPresent() == bridging.resistance().isPresent()) {
@@ -172,7 +172,7 @@ final class LayerRules {
                     "exactly one of conductivity and resistance");
         } else if (bridging.conductivity().isPresent()
                 && layer.anyThickness().isEmpty()
-                && findings.clean(pointer + "/thickness")) {
+                && findings.clean(pointer, "/thickness")) {
             findings.add(
                     at + "/conductivity",
                     bridging.conductivity().get().typed(),

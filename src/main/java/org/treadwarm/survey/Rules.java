@@ -134,7 +134,7 @@ public final class Rules {
     }
 
     private void space(String pointer, String name, Space space) {
-        if (!findings.clean(pointer + "/kind")) {
+        if (!findings.clean(pointer, "/kind")) {
             return;
         }
         if (space.kind() == SpaceKind.HELD) {
@@ -187,7 +187,7 @@ public final class Rules {
 
     private void room(String pointer, Room room) {
         surfaces(pointer, room.name(), true, room.surfaces(), Optional.of(room));
-        boolean heated = room.heatedFloor().isPresent() || !findings.clean(pointer + "/heatedFloor");
+        boolean heated = room.heatedFloor().isPresent() || !findings.clean(pointer, "/heatedFloor");
         junctions(pointer, room.name(), room.junctions(), true, heated);
         room.air().ifPresent(air -> air(pointer + "/air", air));
         room.heatedFloor().ifPresent(floor -> heatedFloor(pointer + "/heatedFloor", room, floor));
@@ -206,7 +206,7 @@ public final class Rules {
         if (!ground) {
             otherSide(pointer + "/to", surface.to(), owner, isRoom);
             surface.ground()
-                    .filter(given -> findings.clean(pointer + "/to"))
+                    .filter(given -> findings.clean(pointer, "/to"))
                     .ifPresent(given -> findings.add(
                             pointer + "/ground",
                             "ground",
@@ -288,7 +288,7 @@ public final class Rules {
     }
 
     private void groundFloor(String pointer, Ground ground) {
-        if (!findings.clean(pointer + "/kind")) {
+        if (!findings.clean(pointer, "/kind")) {
             return;
         }
         boolean suspended = ground.kind() == GroundKind.SUSPENDED;
@@ -374,9 +374,9 @@ public final class Rules {
         int ways = (air.changeRate().isPresent() ? 1 : 0)
                 + (air.flow().isPresent() ? 1 : 0)
                 + (air.supply().isPresent() ? 1 : 0);
-        boolean judged = findings.clean(pointer + "/changeRate")
-                && findings.clean(pointer + "/flow")
-                && findings.clean(pointer + "/supply");
+        boolean judged = findings.clean(pointer, "/changeRate")
+                && findings.clean(pointer, "/flow")
+                && findings.clean(pointer, "/supply");
         if (ways != 1 && judged) {
             findings.add(
                     pointer,
@@ -397,7 +397,7 @@ public final class Rules {
     }
 
     private void heatedFloor(String pointer, Room room, HeatedFloor floor) {
-        boolean judged = findings.clean(pointer + "/ground") && findings.clean(pointer + "/to");
+        boolean judged = findings.clean(pointer, "/ground") && findings.clean(pointer, "/to");
         if (floor.ground().isPresent() == floor.to().isPresent() && judged) {
             findings.add(
                     pointer,
@@ -435,7 +435,7 @@ public final class Rules {
         floor.heater()
                 .filter(heater ->
                         heater.kind() == HeaterKind.WATER && heater.density().isPresent())
-                .filter(heater -> findings.clean(pointer + "/heater/kind"))
+                .filter(heater -> findings.clean(pointer, "/heater/kind"))
                 .ifPresent(heater -> findings.add(
                         pointer + "/heater/density",
                         heater.density().get().typed(),

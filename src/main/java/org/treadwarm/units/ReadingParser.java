@@ -121,15 +121,33 @@ public final class ReadingParser {
 
     private Optional<Unit> resolveEnd(Optional<String> endUnit, List<List<Factor>> terms) throws ReadingException {
         if (endUnit.isEmpty()) {
-            boolean bare =
-                    terms.stream().flatMap(List::stream).anyMatch(f -> f.unit().isEmpty());
-            if (bare && kind != QuantityKind.RATIO) {
+            if (kind != QuantityKind.RATIO && hasBareFactor(terms)) {
                 throw new ReadingException(
                         "the unit is missing: " + kind.words() + " is asked for, for example in " + someUnits());
             }
             return Optional.empty();
         }
         return Optional.of(unit(endUnit.get(), kind));
+    }
+
+    private static boolean hasBareFactor(List<List<Factor>> terms) {
+        for (List<Factor> term : terms) {
+            for (Factor factor : term) {
+                if (factor.unit().isEmpty()) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    private static boolean isBare(List<Factor> term) {
+        for (Factor factor : term) {
+            if (factor.unit().isPresent()) {
+                return false;
+            }
+        }
+        return true;
     }
 
     private double sum(List<List<Factor>> terms, Optional<Unit> end) throws ReadingException {
@@ -147,8 +165,7 @@ public final class ReadingParser {
         if (term.size() > 1 && kind.lengthPower() < 2) {
             throw new ReadingException("a product is read only for an area or a volume, not for " + kind.words());
         }
-        boolean bare = term.stream().allMatch(f -> f.unit().isEmpty());
-        if (bare && (end.isEmpty() || end.get().kind() == kind)) {
+        if (isBare(term) && (end.isEmpty() || end.get().kind() == kind)) {
             if (term.size() > 1 && term.size() != kind.lengthPower()) {
                 throw wrongProduct(term.size());
             }

@@ -55,7 +55,9 @@ public final class UnitTable {
 
     /** The unit of a kind that is written so, if there is one. */
     public static Optional<Unit> find(QuantityKind kind, String text) {
-        return Optional.ofNullable(BY_KIND.get(kind).get(normal(text)));
+        Map<String, Unit> ofKind = BY_KIND.get(kind);
+        Unit asWritten = ofKind.get(text);
+        return Optional.ofNullable(asWritten != null ? asWritten : ofKind.get(normal(text)));
     }
 
     /** The kinds that know this unit text, for telling somebody that metres do not measure heat. */

@@ -1,7 +1,9 @@
 package org.treadwarm.wire;
 
 import com.fasterxml.jackson.annotation.JsonInclude;
+import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.core.StreamWriteFeature;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.SerializationFeature;
@@ -16,7 +18,9 @@ import org.treadwarm.survey.Survey;
 
 /** Writes answers: records as they are, what does not exist left out. */
 public final class Json {
-    private static final ObjectMapper MAPPER = JsonMapper.builder()
+    private static final ObjectMapper MAPPER = JsonMapper.builder(JsonFactory.builder()
+                    .enable(StreamWriteFeature.USE_FAST_DOUBLE_WRITER)
+                    .build())
             .addModule(new Jdk8Module())
             .addModule(new SimpleModule().addSerializer(Instant.class, ToStringSerializer.instance))
             .defaultPropertyInclusion(
