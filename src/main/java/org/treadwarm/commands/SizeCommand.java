@@ -11,7 +11,6 @@ import org.treadwarm.intake.Document;
 import org.treadwarm.intake.NotJsonException;
 import org.treadwarm.jobs.Judgement;
 import org.treadwarm.sizing.Sizing;
-import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Survey;
 import org.treadwarm.wire.Json;
 import org.treadwarm.wire.PlainSheet;
@@ -73,7 +72,7 @@ public final class SizeCommand implements Callable<Integer> {
         } catch (NotJsonException e) {
             return refused(ProblemDocument.notJson(e.problem()));
         } catch (IOException | java.nio.file.InvalidPathException e) {
-            return refused(ProblemDocument.notJson(new Problem("", file, "this file cannot be read", "a survey file")));
+            return refused(ProblemDocument.unreadable(file));
         }
     }
 

@@ -192,7 +192,7 @@ final class Binder {
             return "";
         }
         if (text.isEmpty()) {
-            if (key.many() == Shape.Many.OPTIONAL) {
+            if (key.many() == Shape.Many.OPTIONAL && !key.name().equals("id")) {
                 return null;
             }
             findings.add(pointer, "an empty text", "the " + key.label() + " is empty", allowed(key));
@@ -305,7 +305,7 @@ final class Binder {
             findings.add(
                     pointer,
                     Document.shown(node),
-                    "the " + declared.label() + " is outside what is possible",
+                    "the " + declared.label() + " is outside what is possible" + help(declared),
                     Ranges.words(declared));
             return Reading.of(Double.NaN);
         }
@@ -318,6 +318,10 @@ final class Binder {
             return Reading.of(Double.NaN);
         }
         return reading;
+    }
+
+    private static String help(Declared declared) {
+        return declared.help().isEmpty() ? "" : ". " + declared.help();
     }
 
     private static String allowed(Shape.Key key) {

@@ -10,7 +10,10 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.json.JsonMapper;
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.util.List;
+import java.util.Map;
+import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Problem;
 
 /** JSON text as a tree, or what keeps it from being JSON. */
@@ -47,10 +50,51 @@ public final class Document {
      */
     public static JsonNode read(byte[] json) throws NotJsonException {
         try (JsonParser parser = MAPPER.createParser(json)) {
-            return read(parser);
+            JsonNode tree = read(parser);
+            if (mayHoldHalfCharacters(json)) {
+                refuseHalfCharacters(tree, "");
+            }
+            return tree;
         } catch (IOException e) {
             throw new NotJsonException(new Problem("", "the text", "this could not be read", "JSON in UTF-8"));
         }
+    }
+
+    /** Only an escape can write half of a character that needs two. */
+    private static boolean mayHoldHalfCharacters(byte[] json) {
+        for (int i = 0; i + 2 < json.length; i++) {
+            if (json[i] == '\\' && json[i + 1] == 'u' && (json[i + 2] == 'd' || json[i + 2] == 'D')) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private static void refuseHalfCharacters(JsonNode node, String pointer) throws NotJsonException {
+        if (node.isTextual() && isHalf(node.textValue())) {
+            throw halfCharacter(pointer);
+        }
+        for (Map.Entry<String, JsonNode> field : node.properties()) {
+            String at = Pointer.to(pointer, field.getKey());
+            if (isHalf(field.getKey())) {
+                throw halfCharacter(pointer);
+            }
+            refuseHalfCharacters(field.getValue(), at);
+        }
+        if (node.isArray()) {
+            for (int i = 0; i < node.size(); i++) {
+                refuseHalfCharacters(node.get(i), Pointer.to(pointer, i));
+            }
+        }
+    }
+
+    private static boolean isHalf(String text) {
+        return !StandardCharsets.UTF_8.newEncoder().canEncode(text);
+    }
+
+    private static NotJsonException halfCharacter(String pointer) {
+        return new NotJsonException(new Problem(
+                pointer, "half a character", "this text holds half of a character", "whole Unicode characters"));
     }
 
     private static JsonNode read(JsonParser parser) throws NotJsonException, IOException {
@@ -103,6 +147,9 @@ public final class Document {
 
     /** What was given, as text for a message: shortened to 200 characters. */
     static String shown(JsonNode node) {
+        if (node.isNumber() && !Double.isFinite(node.doubleValue())) {
+            return "a number beyond all bounds";
+        }
         String text = node.isTextual() ? node.textValue() : node.isContainerNode() ? container(node) : node.toString();
         if (text.isBlank()) {
             return "an empty text";

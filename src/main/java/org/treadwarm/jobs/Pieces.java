@@ -1,7 +1,11 @@
 package org.treadwarm.jobs;
 
+import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.core.StreamReadConstraints;
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.databind.json.JsonMapper;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
@@ -20,6 +24,16 @@ final class Pieces {
     private static final String REST = "survey";
     private static final String WHOLE = "document";
     private static final String ROOM = "room";
+    /** Reads back whatever was kept: what stands in a draft may be longer than what the door lets in. */
+    private static final ObjectMapper KEPT = JsonMapper.builder(JsonFactory.builder()
+                    .streamReadConstraints(StreamReadConstraints.builder()
+                            .maxStringLength(Integer.MAX_VALUE)
+                            .maxNumberLength(Integer.MAX_VALUE)
+                            .maxNameLength(Integer.MAX_VALUE)
+                            .build())
+                    .build())
+            .build();
+
     private static final List<String> PARTS = List.of("site", "assemblies", "spaces");
 
     private Pieces() {}
@@ -86,7 +100,7 @@ final class Pieces {
 
     private static JsonNode tree(String text) {
         try {
-            return Document.mapper().readTree(text);
+            return KEPT.readTree(text);
         } catch (JsonProcessingException e) {
             throw new IllegalStateException("a stored part of a survey cannot be read", e);
         }

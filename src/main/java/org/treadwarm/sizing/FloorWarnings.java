@@ -59,7 +59,7 @@ final class FloorWarnings {
         areas(pointer, room, floor);
         below(pointer, room, floor, answer.floor());
         covering(pointer, floor, answer.floor());
-        flux(pointer, answer.floor());
+        flux(pointer, floor, answer.floor());
         heater(pointer, floor);
         sameTwo(i, room, floor);
     }
@@ -127,6 +127,7 @@ final class FloorWarnings {
                     "At the wall foot the warm slab meets the cold outside.",
                     "List the wall foot with its psi, or leave it out knowingly.");
         }
+        Warnings.metal(pointer + "/below", floor.below(), warnings);
         Minimum least = minimum(floor);
         double below = answer.resistanceBelow().orElseThrow();
         if (below < least.resistance()) {
@@ -203,15 +204,23 @@ final class FloorWarnings {
         }
     }
 
+    private static boolean isScreed(Layer layer) {
+        String words = words(layer);
+        return words.contains("screed") || words.contains("concrete") || words.contains("mortar");
+    }
+
     private static boolean isTender(Layer layer) {
-        String words = Stream.of(layer.name(), layer.material())
+        return TENDER.stream().anyMatch(words(layer)::contains);
+    }
+
+    private static String words(Layer layer) {
+        return Stream.of(layer.name(), layer.material())
                 .flatMap(Optional::stream)
                 .reduce("", (a, b) -> a + " " + b)
                 .toLowerCase(Locale.ROOT);
-        return TENDER.stream().anyMatch(words::contains);
     }
 
-    private void flux(String pointer, FloorSizing answer) {
+    private void flux(String pointer, HeatedFloor floor, FloorSizing answer) {
         double required = answer.requiredFlux().orElseThrow();
         if (required > HIGH_FLUX) {
             add(
@@ -222,7 +231,7 @@ final class FloorWarnings {
                     "Lose less heat first: insulation, windows, draughts; or heat more of the floor.");
         }
         double heater = answer.heaterTemperature().orElseThrow();
-        if (heater > HOT_PLANE) {
+        if (heater > HOT_PLANE && floor.above().stream().anyMatch(FloorWarnings::isScreed)) {
             add(
                     "hot-heater-plane",
                     pointer,

@@ -12,6 +12,7 @@ import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.Warning;
 import org.treadwarm.survey.Air;
 import org.treadwarm.survey.Assembly;
+import org.treadwarm.survey.Bridging;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Readings;
@@ -28,6 +29,9 @@ import org.treadwarm.units.Reading;
 final class Warnings {
     /** Temperature rise allowed between the two limits of the combined method (ISO 6946:2017, 6.7.2, from memory). */
     private static final double MOST_LIMIT_RATIO = 1.5;
+
+    /** No metal used in building conducts less, no other material more, W/(m·K) (common practice, no source). */
+    private static final double LEAST_OF_METALS = 10;
 
     private final Plan plan;
     private final Survey survey;
@@ -154,7 +158,23 @@ final class Warnings {
                         "Leave the coefficient out, or describe the layers.");
             }
             layersWithoutUse(pointer + "/layers", assembly.layers());
+            metal(pointer + "/layers", assembly.layers(), warnings);
             i++;
+        }
+    }
+
+    /** Metal through a layer is outside the scope of the combined method, however little of it there is. */
+    static void metal(String pointer, List<Layer> layers, List<Warning> warnings) {
+        for (int k = 0; k < layers.size(); k++) {
+            double conductivity = Answers.value(layers.get(k).bridging().flatMap(Bridging::conductivity));
+            if (conductivity > LEAST_OF_METALS) {
+                warnings.add(new Warning(
+                        "metal-through-layer",
+                        Pointer.to(pointer, k) + "/bridging",
+                        "Metal seems to cross this layer.",
+                        "Metal through insulation is out of scope of the combined method of ISO 6946 (from memory).",
+                        "A two-dimensional calculation by ISO 10211, or the maker's tested U-value."));
+            }
         }
     }
 

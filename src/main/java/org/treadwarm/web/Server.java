@@ -4,6 +4,7 @@ import io.javalin.Javalin;
 import io.javalin.config.JavalinConfig;
 import io.javalin.http.Context;
 import io.javalin.http.HttpResponseException;
+import io.javalin.http.MethodNotAllowedResponse;
 import io.javalin.http.staticfiles.Location;
 import java.util.Locale;
 import java.util.UUID;
@@ -93,6 +94,9 @@ public final class Server implements AutoCloseable {
 
     private static void faults(JavalinConfig config, Pages pages) {
         config.routes.exception(HttpResponseException.class, (e, ctx) -> {
+            if (e instanceof MethodNotAllowedResponse) {
+                ctx.header("Allow", e.getDetails().getOrDefault("availableMethods", ""));
+            }
             if (e.getStatus() == 413) {
                 Drain.rest(ctx);
             }
@@ -141,7 +145,7 @@ public final class Server implements AutoCloseable {
     }
 
     private static boolean isApi(Context ctx) {
-        return ctx.path().startsWith("/api/");
+        return ctx.path().startsWith("/api/") || ctx.path().equals("/api");
     }
 
     private static void answerPlainly(Context ctx, int status, String kind, String title) {

@@ -87,6 +87,9 @@ public final class PlainSheet {
         floor.holdsDownTo()
                 .ifPresent(cold -> line("    %-48s %9s °C", "holds down to outdoors", Numbers.fixed(cold, 1)));
         floor.holdsDownToReason().ifPresent(reason -> line("    %-48s %9s", "holds down to outdoors", reason));
+        number("installed power", floor.installedPower(), 0, "W");
+        floor.buildUpHeight().ifPresent(height -> number("build-up height", OptionalDouble.of(1000 * height), 0, "mm"));
+        number("dead load", floor.load(), 0, "kg/m2");
         boolean carries = floor.verdict() == Verdict.CARRIES;
         if (!carries) {
             number("something else must add", floor.supplement(), 0, "W");
@@ -106,9 +109,6 @@ public final class PlainSheet {
                 floor.downwardFlux().orElseThrow(),
                 floor.edgeFlux().orElseThrow(),
                 floor.heaterPower().orElseThrow());
-        number("installed power", floor.installedPower(), 0, "W");
-        floor.buildUpHeight().ifPresent(height -> number("build-up height", OptionalDouble.of(1000 * height), 0, "mm"));
-        number("dead load", floor.load(), 0, "kg/m2");
         line("  Limits");
         for (Limit limit : floor.limits()) {
             line(

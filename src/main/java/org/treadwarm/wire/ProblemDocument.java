@@ -1,6 +1,7 @@
 package org.treadwarm.wire;
 
 import java.util.List;
+import org.treadwarm.survey.Findings;
 import org.treadwarm.survey.Problem;
 
 /**
@@ -28,9 +29,21 @@ public record ProblemDocument(String type, String title, int status, String deta
 
     /** A survey, or another document, that has problems. */
     public static ProblemDocument invalid(List<Problem> problems) {
-        String detail = problems.size() == 1 ? "There is 1 problem." : "There are " + problems.size() + " problems.";
+        String detail = problems.size() == 1
+                ? "There is 1 problem."
+                : problems.size() < Findings.MOST
+                        ? "There are " + problems.size() + " problems."
+                        : "There are " + problems.size() + " problems or more; the first " + problems.size()
+                                + " are listed.";
         return new ProblemDocument(
                 "urn:treadwarm:problem:invalid", "The document has problems", 422, detail, List.copyOf(problems));
+    }
+
+    /** A file that cannot be read. */
+    public static ProblemDocument unreadable(String file) {
+        Problem problem = new Problem("", file, "this file cannot be read", "a survey file, or - for standard input");
+        return new ProblemDocument(
+                "urn:treadwarm:problem:file", "The file cannot be read", 400, problem.message(), List.of(problem));
     }
 
     /** A problem that has no address in a document. */

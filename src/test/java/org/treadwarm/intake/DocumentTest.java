@@ -95,4 +95,18 @@ class DocumentTest {
         assertThat(refused("{\"" + longest + "x\":1}").message()).contains("too long");
         assertThat(refused("{\"a\":" + "1".repeat(201) + "}").message()).contains("too long");
     }
+
+    @Test
+    void halfACharacterIsNoText() {
+        for (String json :
+                java.util.List.of("{\"rooms\": [{\"name\": \"a\\ud800b\"}]}", "{\"rooms\": [{\"\\udc00\": 1}]}")) {
+            org.assertj.core.api.Assertions.assertThatThrownBy(
+                            () -> Document.read(json.getBytes(java.nio.charset.StandardCharsets.UTF_8)))
+                    .isInstanceOfSatisfying(
+                            NotJsonException.class,
+                            refused -> org.assertj.core.api.Assertions.assertThat(
+                                            refused.problem().pointer())
+                                    .startsWith("/rooms/0"));
+        }
+    }
 }

@@ -40,6 +40,8 @@ class WarningsTest {
                 "/assemblies/party wall/uValue | 8 | unusual-u-value | /assemblies/party wall",
                 "/assemblies/shed wall/layers/1/thickness | 0.95 | unusual-u-value | /assemblies/shed wall",
                 "/assemblies/shed wall/layers/1/bridging/conductivity | 50 | bridging-limits-far-apart | /assemblies/shed wall/layers",
+                "/assemblies/shed wall/layers/1/bridging | {'share': 0.0005, 'conductivity': 17} | metal-through-layer | /assemblies/shed wall/layers/1/bridging",
+                "/rooms/0/heatedFloor/below/0/bridging | {'share': 0.0005, 'conductivity': 50} | metal-through-layer | /rooms/0/heatedFloor/below/0/bridging",
                 "/assemblies/shed wall | {'uValue': 2} | cold-surface | /assemblies/shed wall",
                 "/assemblies/shed wall | {'layers': [{'resistance': 0.5}]} | cold-surface | /assemblies/shed wall",
                 "/assemblies/new sash/insideCoefficient | 8 | coefficient-without-effect | /assemblies/new sash",

@@ -101,7 +101,7 @@ class JobsApiTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"\"1\"", "\"3\"", "\"x\"", "W/\"2\"", "*", "\"-1\"", "\"99999999999999999999\""})
+    @ValueSource(strings = {"\"1\"", "\"3\"", "\"x\"", "W/\"2\"", "\"-1\"", "\"99999999999999999999\""})
     void savesNothingFromAnotherRevision(String match) {
         String id = idOf(create("yard", RunningServer.studio()));
         put(id, "\"1\"", body("second", RunningServer.studio())).statusCode(200);
@@ -133,6 +133,14 @@ class JobsApiTest {
                 .body("survey.rooms.name", contains("studio", "shower room"));
         get("/jobs/{id}/sizing", id).statusCode(422).body("errors.pointer", hasItem("/site/outdoorTemperature"));
         get("/jobs").body("jobs.find { it.id == '" + id + "' }.draft", equalTo(true));
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"*", "\"zz\", \"1\"", "\"1\""})
+    void savesFromAnyTagThatNamesTheRevision(String match) {
+        String id = idOf(create("first", RunningServer.studio()));
+
+        put(id, match, body("second", RunningServer.studio())).statusCode(200).header("ETag", "\"2\"");
     }
 
     @Test
@@ -190,7 +198,8 @@ class JobsApiTest {
         api.json(Scope.WRITE, "{\"name\": \"half \\ud83c of one\", \"survey\": {}}")
                 .post("/jobs")
                 .then()
-                .statusCode(422);
+                .statusCode(400)
+                .body("errors.pointer", contains("/name"));
     }
 
     @Test

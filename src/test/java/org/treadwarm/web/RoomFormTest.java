@@ -346,4 +346,38 @@ class RoomFormTest {
         assertThat(visitor.open(path()).status()).isEqualTo(404);
         assertThat(server.desk().revision(job.id(), 1).orElseThrow().document()).isEqualTo(job.document());
     }
+
+    @Test
+    void aTextTooLongIsKeptInADraftThatCanBeOpenedAndMended() {
+        String tooLong = "x".repeat(10_500);
+
+        assertThat(visitor.send(form().type("/rooms/0/name", tooLong).press("save"))
+                        .status())
+                .isEqualTo(422);
+
+        Page page = visitor.open(path());
+        assertThat(page.status()).isEqualTo(200);
+        assertThat(page.value("/rooms/0/name")).isEqualTo(tooLong);
+        assertThat(visitor.open("/jobs/" + job.id()).status()).isEqualTo(200);
+        assertThat(visitor.send(page.form("revision")
+                                .type("/rooms/0/name", "studio")
+                                .press("save"))
+                        .status())
+                .isEqualTo(303);
+        assertThat(server.now(job).draft()).isFalse();
+    }
+
+    @Test
+    void aNameThatCannotBeTakenIsHeldBackWithWhatWasTyped() {
+        for (String name : List.of("", "x".repeat(201), "stud partition")) {
+            Page assembly = visitor.open("/jobs/" + job.id() + "/assemblies/shed%20wall");
+
+            Page answer = visitor.send(
+                    assembly.form("revision").type("part-name", name).press("save"));
+
+            assertThat(answer.status()).isEqualTo(422);
+            assertThat(answer.value("part-name")).isEqualTo(name);
+        }
+        assertThat(server.now(job).revision()).isEqualTo(1);
+    }
 }

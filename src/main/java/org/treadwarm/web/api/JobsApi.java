@@ -171,7 +171,7 @@ final class JobsApi {
                     "Send the job's ETag in the header If-Match, so that nobody's work is overwritten.");
             return;
         }
-        OptionalLong expected = revisionOf(match);
+        OptionalLong expected = expected(match, desk.revisions(id).get(0).revision());
         Optional<JobBody> body = body(ctx);
         if (body.isEmpty()) {
             return;
@@ -209,11 +209,22 @@ final class JobsApi {
         return "\"" + revision + "\"";
     }
 
-    private static OptionalLong revisionOf(String match) {
-        String plain = match.strip();
-        return plain.length() > 2 && plain.startsWith("\"") && plain.endsWith("\"")
-                ? number(plain.substring(1, plain.length() - 1))
-                : number(plain);
+    /**
+     * The revision that a change was made from (RFC 9110, 13.1.1): any for *, the current one where the list names it, else
+     * one that was named. Weak tags never match.
+     */
+    private static OptionalLong expected(String match, long current) {
+        OptionalLong named = OptionalLong.empty();
+        for (String each : match.split(",", -1)) {
+            String tag = each.strip();
+            boolean quoted = tag.length() > 2 && tag.startsWith("\"") && tag.endsWith("\"");
+            OptionalLong revision = number(quoted ? tag.substring(1, tag.length() - 1) : tag);
+            if (tag.equals("*") || revision.isPresent() && revision.getAsLong() == current) {
+                return OptionalLong.of(current);
+            }
+            named = revision.isPresent() ? revision : named;
+        }
+        return named;
     }
 
     private static OptionalLong number(String text) {

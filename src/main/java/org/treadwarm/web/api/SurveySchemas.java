@@ -4,6 +4,7 @@ import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import org.treadwarm.intake.Ranges;
 import org.treadwarm.survey.Shape;
+import org.treadwarm.survey.Survey;
 import org.treadwarm.survey.Word;
 import org.treadwarm.units.Basis;
 import org.treadwarm.units.Declared;
@@ -37,6 +38,10 @@ final class SurveySchemas {
             }
             many(properties.putObject(key.name()), key);
         }
+        if (type == Survey.class) {
+            required.add("rooms");
+            ((ObjectNode) properties.get("rooms")).put("minItems", 1);
+        }
         if (required.isEmpty()) {
             schema.remove("required");
         }
@@ -64,6 +69,9 @@ final class SurveySchemas {
             case TEXT -> {
                 property.put("type", "string");
                 property.put("maxLength", key.longest());
+                if (key.name().equals("id")) {
+                    property.put("pattern", "^[A-Za-z0-9-]{1,40}$");
+                }
                 describe(property, key);
             }
             case WORD -> {

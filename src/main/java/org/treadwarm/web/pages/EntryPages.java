@@ -2,10 +2,14 @@ package org.treadwarm.web.pages;
 
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
+import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.treadwarm.store.OwnerCreation;
+import org.treadwarm.store.PasswordRule;
+import org.treadwarm.store.PersonName;
 import org.treadwarm.store.SignIn;
 import org.treadwarm.store.Store;
 import org.treadwarm.web.security.Visitors;
@@ -66,39 +70,50 @@ final class EntryPages {
 
     void ownerForm(Context ctx) {
         boolean open = store.people().invitationIsOpen(ctx.pathParam("token"));
-        ownerForm(ctx, open ? 200 : 404, "", open ? "" : linkRefused(), open);
+        ownerForm(ctx, open ? 200 : 404, "", open, open ? List.of() : List.of(linkRefused()));
     }
 
-    private void ownerForm(Context ctx, int status, String name, String error, boolean open) {
+    private void ownerForm(Context ctx, int status, String name, boolean open, List<ErrorView> errors) {
         Map<String, Object> model = new HashMap<>();
         model.put("token", ctx.pathParam("token"));
         model.put("name", name);
-        model.put("error", error);
+        model.put("errors", errors);
+        errors.forEach(error -> model.put(error.target() + "Error", error.message()));
         model.put("open", open);
         view.show(ctx, status, "owner", model);
     }
 
-    private static String linkRefused() {
-        return "This link is spent or too old. Start the program again for a new one, if there is no owner yet.";
+    private static ErrorView linkRefused() {
+        return new ErrorView(
+                "content",
+                "",
+                "This link is spent or too old. Start the program again for a new one, if there is no owner yet.",
+                "");
     }
 
     void becomeOwner(Context ctx) {
         String name = text(ctx, "name");
         String password = text(ctx, "password");
+        List<ErrorView> errors = new ArrayList<>();
+        if (!PersonName.accepts(name)) {
+            errors.add(new ErrorView("name", "", "A name has 1 to 100 characters.", ""));
+        }
+        if (!PasswordRule.accepts(password)) {
+            errors.add(new ErrorView("password", "", "A password has 10 to 200 characters.", ""));
+        }
         if (!password.equals(text(ctx, "again"))) {
-            ownerForm(ctx, 422, name, "The two passwords are not the same.", true);
+            errors.add(new ErrorView("again", "", "The two passwords are not the same.", ""));
+        }
+        if (!errors.isEmpty() && store.people().invitationIsOpen(ctx.pathParam("token"))) {
+            ownerForm(ctx, 422, name, true, errors);
             return;
         }
         OwnerCreation result = store.people().createOwner(ctx.pathParam("token"), name, password);
         if (result instanceof OwnerCreation.Created created) {
             visitors.begin(ctx, store.sessions().start(created.owner()));
             ctx.redirect("/jobs", HttpStatus.SEE_OTHER);
-        } else if (result instanceof OwnerCreation.NameRefused) {
-            ownerForm(ctx, 422, name, "A name has 1 to 100 characters.", true);
-        } else if (result instanceof OwnerCreation.PasswordRefused) {
-            ownerForm(ctx, 422, name, "A password has 10 to 200 characters.", true);
         } else {
-            ownerForm(ctx, 404, name, linkRefused(), false);
+            ownerForm(ctx, 404, name, false, List.of(linkRefused()));
         }
     }
 

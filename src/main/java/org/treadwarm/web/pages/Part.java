@@ -106,12 +106,20 @@ public record Part(String kind, String key, String title, String pointer, Class<
         return isRoom() || newName.isEmpty() || newName.equals(key) ? key : rename(document, newName);
     }
 
-    /** Gives a space or an assembly another name, everywhere it is named; keeps the old one if the new is taken. */
+    /** Why a new name cannot be taken; empty when it can. */
+    String refusal(JsonNode document, String name) {
+        if (isRoom() || name.equals(key)) {
+            return "";
+        }
+        if (name.isEmpty() || name.length() > 200) {
+            return "A name has 1 to 200 characters.";
+        }
+        return document.path(kind).has(name) ? "This name is taken already." : "";
+    }
+
+    /** Gives a space or an assembly another name, everywhere it is named. */
     private String rename(ObjectNode document, String name) {
         ObjectNode all = (ObjectNode) document.path(kind);
-        if (all.has(name) || name.length() > 200) {
-            return key;
-        }
         List<Map.Entry<String, JsonNode>> entries = new ArrayList<>();
         all.properties().forEach(entry -> entries.add(Map.entry(entry.getKey(), entry.getValue())));
         all.removeAll();

@@ -4,7 +4,9 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
+import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.treadwarm.jobs.Job;
@@ -20,6 +22,9 @@ import org.treadwarm.web.security.Visitors;
  * button, as a draft if need be.
  */
 final class PartPages {
+    private static final String WANTED_NAME = "wanted-name";
+    private static final String NAME_ERROR = "name-error";
+
     private final JobDesk desk;
     private final Visitors visitors;
     private final View view;
@@ -54,12 +59,22 @@ final class PartPages {
     private void show(Context ctx, int status, Job job, JsonNode document, Part part, String notice, long revision) {
         Forms forms = new Forms(document, Judgement.of(document).problems());
         Map<String, Object> model = new HashMap<>();
+        String nameError =
+                Optional.<String>ofNullable(ctx.attribute(NAME_ERROR)).orElse("");
+        model.put(
+                "partName",
+                Optional.<String>ofNullable(ctx.attribute(WANTED_NAME)).orElse(part.key()));
+        model.put("nameError", nameError);
         model.put("jobId", job.id());
         model.put("jobName", job.name());
         model.put("revision", revision);
         model.put("part", part);
         model.put("form", forms.form(part.pointer(), part.formTitle(), part.type()));
-        model.put("errors", forms.errors());
+        List<ErrorView> errors = new ArrayList<>(forms.errors());
+        if (!nameError.isEmpty()) {
+            errors.add(0, new ErrorView("part-name", "Name", nameError, ""));
+        }
+        model.put("errors", errors);
         model.put("notice", notice);
         model.put("action", Links.part(job.id(), part.kind(), part.key()));
         model.put("back", "/jobs/" + job.id());
@@ -96,8 +111,24 @@ final class PartPages {
         ObjectNode document = (ObjectNode) job.document().deepCopy();
         part.get().write(document, ctx.formParamMap());
         String action = EntryPages.text(ctx, "do");
-        String renamed = part.get()
-                .act(document, action, EntryPages.text(ctx, "part-name").strip());
+        String wanted = Optional.ofNullable(ctx.formParam("part-name"))
+                .orElse(part.get().key())
+                .strip();
+        String refusal = part.get().refusal(document, wanted);
+        String renamed = part.get().act(document, action, refusal.isEmpty() ? wanted : "");
+        if (!refusal.isEmpty()) {
+            ctx.attribute(WANTED_NAME, wanted);
+            ctx.attribute(NAME_ERROR, refusal);
+            show(
+                    ctx,
+                    422,
+                    job,
+                    document,
+                    part.get(),
+                    "Not kept yet: the name must be put right first.",
+                    job.revision());
+            return;
+        }
         if (isOvertaken(ctx, job, part.get())) {
             String who = job.savedBy();
             show(

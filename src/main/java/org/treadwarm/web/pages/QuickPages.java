@@ -53,6 +53,8 @@ final class QuickPages {
         Forms forms = new Forms(document, Judgement.of(document).problems());
         Map<String, Object> model = new HashMap<>();
         model.put("part", part);
+        model.put("partName", "");
+        model.put("nameError", "");
         model.put("site", forms.form(SITE, "Site", Site.class));
         model.put("form", forms.form(part.pointer(), part.formTitle(), part.type()));
         model.put("errors", forms.errors());
