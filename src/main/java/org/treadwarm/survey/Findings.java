@@ -26,6 +26,13 @@ public final class Findings {
         }
     }
 
+    /** Adds that something is missing, unless a finding there tells already why it could not be read. */
+    void missing(String pointer, String message, String allowed) {
+        if (clean(pointer)) {
+            add(pointer, "nothing", message, allowed);
+        }
+    }
+
     /** Adds a problem that leaves everything below its address unread, so that nothing more is found there. */
     public void addUnread(String pointer, String given, String message, String allowed) {
         add(pointer, given, message, allowed);

@@ -1,0 +1,53 @@
+package org.treadwarm.survey;
+
+import java.util.HashSet;
+import java.util.Set;
+
+/** What surfaces, junctions and heated floors may lead to: outdoors, a space or another room. */
+final class OtherSides {
+    private final Survey survey;
+    private final Findings findings;
+    private final Set<String> roomNames;
+
+    OtherSides(Survey survey, Findings findings, Set<String> roomNames) {
+        this.survey = survey;
+        this.findings = findings;
+        this.roomNames = roomNames;
+    }
+
+    void check(String pointer, String to, String owner, boolean ownerIsRoom) {
+        if (!findings.clean(pointer) || to.equals(Survey.OUTDOORS)) {
+            return;
+        }
+        if (to.equals(owner)) {
+            findings.add(pointer, to, "this leads back to where it comes from", sides("outdoors"));
+            return;
+        }
+        Space space = survey.spaces().get(to);
+        if (space == null && !roomNames.contains(to)) {
+            findings.add(
+                    pointer,
+                    to,
+                    "no room or space is called \"" + to + "\"" + findings.hint(to, this::names),
+                    sides("outdoors, ground"));
+        } else if (space != null && space.temperatureFactor().isPresent() && !ownerIsRoom) {
+            findings.add(
+                    pointer,
+                    to,
+                    "only rooms may look at a space that is known by its temperature factor",
+                    "a space of its own temperature, a room, or outdoors");
+        }
+    }
+
+    private Set<String> names() {
+        Set<String> names = new HashSet<>(roomNames);
+        names.addAll(survey.spaces().keySet());
+        names.add(Survey.OUTDOORS);
+        names.add(Survey.GROUND);
+        return names;
+    }
+
+    static String sides(String fixed) {
+        return fixed + ", or the name of a space or of another room";
+    }
+}
