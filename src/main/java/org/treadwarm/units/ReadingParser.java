@@ -18,6 +18,8 @@ public final class ReadingParser {
     /** The longest text that is read. */
     public static final int LONGEST = 200;
 
+    private static final int INCHES_IN_A_FOOT = 12;
+
     private final String text;
     private final QuantityKind kind;
     private final ReadingScanner scanner;
@@ -140,6 +142,9 @@ public final class ReadingParser {
         Optional<Unit> inch = UnitTable.find(QuantityKind.LENGTH, mark);
         if (inch.isEmpty() || !inch.get().symbol().equals("in")) {
             throw new ReadingException("after feet, inches are written with \" or in, as in 12' 6 1/2\"");
+        }
+        if (inches >= INCHES_IN_A_FOOT) {
+            throw new ReadingException("after feet there are less than 12 inches");
         }
         double metres = foot.toSi(feet) + Math.copySign(inch.get().toSi(inches), feet);
         return new Factor(metres, UnitTable.find(QuantityKind.LENGTH, "m"));

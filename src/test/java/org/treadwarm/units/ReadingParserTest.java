@@ -241,4 +241,11 @@ class ReadingParserTest {
     void textsWithAUnitOrWithoutANumberDoNot(String text) {
         assertThat(ReadingParser.isBare(text)).isFalse();
     }
+
+    @Test
+    void afterFeetThereAreLessThanTwelveInches() {
+        org.assertj.core.api.Assertions.assertThatThrownBy(() -> ReadingParser.parse("12' 13\"", QuantityKind.LENGTH))
+                .isInstanceOf(ReadingException.class)
+                .hasMessageContaining("12 inches");
+    }
 }

@@ -295,4 +295,15 @@ class JobFormTest {
             }
         }
     }
+
+    @Test
+    void aJobNameThatCannotBeTakenIsHeldBackWithWhatWasTyped() {
+        for (String name : List.of("", "x".repeat(201))) {
+            Page page = visitor.send(form().type("job-name", name).press("save"));
+
+            assertThat(page.status()).isEqualTo(422);
+            assertThat(page.value("job-name")).isEqualTo(name);
+        }
+        assertThat(server.now(job).name()).isEqualTo("yard");
+    }
 }

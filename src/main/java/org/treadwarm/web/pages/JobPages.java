@@ -79,7 +79,7 @@ final class JobPages {
     }
 
     private void show(Context ctx, int status, Job job, JsonNode document, List<ErrorView> more, String notice) {
-        view.show(ctx, status, "job", new JobView(job, document).model(more, notice));
+        view.show(ctx, status, "job", new JobView(job, document).model(typedName(ctx, job), more, notice));
     }
 
     void change(Context ctx) {
@@ -99,13 +99,17 @@ final class JobPages {
         JobActions actions =
                 new JobActions(document, EntryPages.text(ctx, "new-name").strip());
         String notice = actions.act(action, data, site);
+        boolean conflict = !errors.isEmpty();
+        if (!isName(EntryPages.text(ctx, "job-name"))) {
+            errors.add(new ErrorView("job-name", "", "A job's name has 1 to " + LONGEST_NAME + " characters.", ""));
+        }
         if (!notice.isEmpty()) {
             errors.add(new ErrorView("new-name", "", notice, ""));
         }
         if (errors.isEmpty()) {
             save(ctx, job, name, document, actions, action);
         } else {
-            show(ctx, notice.isEmpty() ? 409 : 422, job, document, errors, "");
+            show(ctx, conflict ? 409 : 422, job, document, errors, "");
         }
     }
 
@@ -151,8 +155,16 @@ final class JobPages {
 
     private static String name(Context ctx, Job job, Job shown) {
         String typed = EntryPages.text(ctx, "job-name").strip();
-        boolean unchanged = typed.isEmpty() || typed.length() > LONGEST_NAME || typed.equals(shown.name());
-        return unchanged ? job.name() : typed;
+        return typed.equals(shown.name()) ? job.name() : typed;
+    }
+
+    /** The name that stands in the field: the one that was sent, or the job's. */
+    private static String typedName(Context ctx, Job job) {
+        return Optional.ofNullable(ctx.formParam("job-name")).orElse(job.name());
+    }
+
+    private static boolean isName(String text) {
+        return !text.isBlank() && text.strip().length() <= LONGEST_NAME;
     }
 
     private void save(Context ctx, Job job, String name, ObjectNode document, JobActions actions, String action) {

@@ -66,13 +66,14 @@ final class JobView {
     }
 
     /** What the page is made from. */
-    Map<String, Object> model(List<ErrorView> more, String notice) {
+    Map<String, Object> model(String jobName, List<ErrorView> more, String notice) {
         Forms forms = new Forms(document, Judgement.of(document).problems());
         ObjectView site = forms.form("/site", "Site", Site.class);
         List<ErrorView> errors = new ArrayList<>(more);
         errors.addAll(forms.errors());
         Map<String, Object> model = new HashMap<>();
         model.put("job", job);
+        model.put("jobName", jobName);
         model.put("site", site);
         model.put("errors", errors);
         model.put("notice", notice);
@@ -97,7 +98,7 @@ final class JobView {
     private List<Look> warnings(Sizing all) {
         return all.warnings().stream()
                 .map(warning -> new Look(
-                        Place.of(job.id(), job.document(), warning.pointer()),
+                        Place.of(job.id(), document, warning.pointer()),
                         warning.message().replace("m2", "m²"),
                         warning.why().replace("m2", "m²"),
                         warning.settle()))
