@@ -1,7 +1,9 @@
 package org.treadwarm.sizing;
 
+import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Stream;
 import org.treadwarm.sizing.Sizing.FloorSizing;
@@ -43,10 +45,14 @@ final class FloorWarnings {
 
     private final Survey survey;
     private final List<Warning> warnings;
+    private final Map<String, Integer> roomNumbers = new HashMap<>();
 
     FloorWarnings(Survey survey, List<Warning> warnings) {
         this.survey = survey;
         this.warnings = warnings;
+        for (int i = 0; i < survey.rooms().size(); i++) {
+            roomNumbers.put(survey.rooms().get(i).name(), i);
+        }
     }
 
     private void add(String code, String pointer, String message, String why, String settle) {
@@ -274,10 +280,9 @@ final class FloorWarnings {
                 twice(i, floor, "/rooms/" + i + "/surfaces/" + k, own.get(k));
             }
         }
-        for (int r = 0; r < survey.rooms().size(); r++) {
-            if (survey.rooms().get(r).name().equals(other)) {
-                heard(i, room, floor, "/rooms/" + r, survey.rooms().get(r).surfaces());
-            }
+        Integer below = roomNumbers.get(other);
+        if (below != null) {
+            heard(i, room, floor, "/rooms/" + below, survey.rooms().get(below).surfaces());
         }
         Space space = survey.spaces().get(other);
         if (space != null) {

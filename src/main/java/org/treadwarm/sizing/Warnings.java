@@ -38,12 +38,14 @@ final class Warnings {
     private final Evaluation numbers;
     private final List<RoomSizing> rooms;
     private final List<Warning> warnings = new ArrayList<>();
+    private final FloorWarnings floorWarnings;
 
     Warnings(Plan plan, Evaluation numbers, List<RoomSizing> rooms) {
         this.plan = plan;
         this.survey = plan.survey;
         this.numbers = numbers;
         this.rooms = rooms;
+        this.floorWarnings = new FloorWarnings(survey, warnings);
     }
 
     List<Warning> all() {
@@ -227,13 +229,12 @@ final class Warnings {
     }
 
     private void spaces() {
+        boolean[] named = namedNodes();
         int node = plan.rooms;
         for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
             String pointer = Pointer.to("/spaces", entry.getKey());
             Space space = entry.getValue();
-            boolean alone = plan.paths[node].length == 0 && !isUnder(node);
-            boolean unnamed = isUnnamed(node);
-            if (alone || unnamed) {
+            if (!named[node]) {
                 add(
                         "space-not-named",
                         pointer,
@@ -246,22 +247,19 @@ final class Warnings {
         }
     }
 
-    private boolean isUnder(int node) {
-        for (Plan.FloorPlan floor : plan.floors) {
-            if (floor != null && floor.other() == node) {
-                return true;
-            }
-        }
-        return false;
-    }
-
-    private boolean isUnnamed(int node) {
+    /** Which nodes something leads to, or lead to a room or space themselves. */
+    private boolean[] namedNodes() {
+        boolean[] named = new boolean[plan.nodeNames.length];
         for (Link link : plan.links) {
-            if (link.other() == node || link.owner() == node && link.other() < plan.outdoors) {
-                return false;
+            named[link.other()] = true;
+            named[link.owner()] |= link.other() < plan.outdoors;
+        }
+        for (Plan.FloorPlan floor : plan.floors) {
+            if (floor != null && floor.other() != Stack.NONE) {
+                named[floor.other()] = true;
             }
         }
-        return !isUnder(node);
+        return named;
     }
 
     private void changes(String pointer, java.util.Optional<Air> air, double volume) {
@@ -289,7 +287,7 @@ final class Warnings {
         changes(pointer + "/air", room.air(), volume);
         gains(i, pointer);
         if (room.heatedFloor().isPresent()) {
-            new FloorWarnings(survey, warnings).check(i, room, rooms.get(i));
+            floorWarnings.check(i, room, rooms.get(i));
         }
     }
 
