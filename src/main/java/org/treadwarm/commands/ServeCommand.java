@@ -54,6 +54,7 @@ public final class ServeCommand implements Callable<Integer> {
             System.err.println("The port is 0 to 65535, not " + port + ".");
             return 2;
         }
+        Server.warmUp();
         try (Store store = Store.open(data, Clock.systemUTC())) {
             if (demo) {
                 Demo.addTo(new JobDesk(store.jobs()));

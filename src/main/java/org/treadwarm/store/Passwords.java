@@ -4,6 +4,7 @@ import com.password4j.Argon2Function;
 import com.password4j.types.Argon2;
 import java.nio.charset.StandardCharsets;
 import java.text.Normalizer;
+import java.util.Base64;
 import java.util.concurrent.Semaphore;
 import java.util.function.Supplier;
 
@@ -15,10 +16,12 @@ import java.util.function.Supplier;
 final class Passwords {
     private static final int SALT_BYTES = 16;
     private static final int HASHINGS_AT_ONCE = 2;
-    private static final Argon2Function FUNCTION = Argon2Function.getInstance(19 * 1024, 2, 1, 32, Argon2.ID);
+    private static final int HASH_BYTES = 32;
+    private static final Argon2Function FUNCTION = Argon2Function.getInstance(19 * 1024, 2, 1, HASH_BYTES, Argon2.ID);
 
     private final Semaphore places = new Semaphore(HASHINGS_AT_ONCE, true);
-    private final String hashOfNothing = hash(Secrets.token());
+    private final String hashOfNothing =
+            "$argon2id$v=19$m=19456,t=2,p=1$" + random(SALT_BYTES) + "$" + random(HASH_BYTES);
 
     /** The hash with its salt and cost in one text, in the usual "$argon2id$..." form. */
     String hash(String password) {
@@ -32,7 +35,11 @@ final class Passwords {
                 Argon2Function.getInstanceFromHash(hash).check(bytes(password), hash.getBytes(StandardCharsets.UTF_8)));
     }
 
-    /** A hash no known password has; trying one against it takes as long as against a real hash. */
+    private static String random(int bytes) {
+        return Base64.getEncoder().withoutPadding().encodeToString(Secrets.bytes(bytes));
+    }
+
+    /** A hash no known password has, made up and not computed; trying one against it takes as long as against a real hash. */
     String hashOfNothing() {
         return hashOfNothing;
     }

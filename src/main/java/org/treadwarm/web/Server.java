@@ -9,6 +9,7 @@ import io.javalin.http.staticfiles.Location;
 import java.util.Locale;
 import java.util.UUID;
 import org.eclipse.jetty.server.HttpConfiguration;
+import org.eclipse.jetty.server.ServerConnector;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 import org.treadwarm.jobs.JobDesk;
@@ -57,6 +58,20 @@ public final class Server implements AutoCloseable {
             faults(config, pages);
         });
         return new Server(javalin.start(settings.bind(), settings.port()));
+    }
+
+    /**
+     * Loads what a server needs, on a thread of its own, so that a start can open the store meanwhile; nothing depends on it.
+     */
+    public static void warmUp() {
+        Thread thread = new Thread(
+                () -> {
+                    Javalin.create(Server::basics);
+                    new ServerConnector(new org.eclipse.jetty.server.Server());
+                },
+                "warm-up");
+        thread.setDaemon(true);
+        thread.start();
     }
 
     /** The port it listens on. */

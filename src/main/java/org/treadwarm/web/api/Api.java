@@ -14,11 +14,15 @@ public final class Api {
 
     private final SizingApi sizing;
     private final JobsApi jobs;
-    private final byte[] description = OpenApi.document();
 
     public Api(KeyGuard keys, JobDesk desk) {
         this.sizing = new SizingApi(keys);
         this.jobs = new JobsApi(keys, desk);
+    }
+
+    /** The description of the API, made when it is first asked for. */
+    private static final class Description {
+        static final byte[] TEXT = OpenApi.document();
     }
 
     /** What {@code GET /api/v1/health} says. */
@@ -52,6 +56,6 @@ public final class Api {
 
     private void description(Context ctx) {
         ctx.contentType("application/json; charset=utf-8");
-        ctx.result(description);
+        ctx.result(Description.TEXT);
     }
 }
