@@ -1,7 +1,7 @@
 package org.treadwarm.draw;
 
 /**
- * Hatching of materials in section, in the manner of ISO 128-50: strokes on a pale ground, one pattern per family,
+ * Hatching of materials in section, in the manner of ISO 128-50 (from memory): strokes on a pale ground, one pattern per family,
  * told apart without colour.
  */
 final class Hatch {

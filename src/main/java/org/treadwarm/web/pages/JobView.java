@@ -80,7 +80,6 @@ final class JobView {
         model.put("rooms", rooms());
         model.put("spaces", spaces());
         model.put("assemblies", assemblies());
-        model.put("total", sizing.map(Sizing::total).orElse(null));
         model.put("totals", sizing.map(JobView::totals).orElse(List.of()));
         model.put("warnings", sizing.map(this::warnings).orElse(List.of()));
         model.put("unfinished", partial.unfinished());
