@@ -1,6 +1,7 @@
 package org.treadwarm;
 
-import java.util.Arrays;
+import java.util.List;
+import java.util.stream.Stream;
 import org.treadwarm.commands.CheckCommand;
 import org.treadwarm.commands.HealthCommand;
 import org.treadwarm.commands.KeyCommand;
@@ -18,26 +19,24 @@ import picocli.CommandLine.Command;
         subcommands = {ServeCommand.class, SizeCommand.class, CheckCommand.class, KeyCommand.class, HealthCommand.class
         })
 public final class Treadwarm {
+    private static final String SERVE = "serve";
+
     private Treadwarm() {}
 
     /** Runs a command and ends the process with its status. */
     public static void main(String[] args) {
-        CommandLine program = new CommandLine(new Treadwarm());
-        System.exit(program.execute(withDefault(program, args)));
+        String[] named = withDefault(args);
+        if (named[0].equals(SERVE)) {
+            ServeCommand.prepare();
+        }
+        System.exit(new CommandLine(new Treadwarm()).execute(named));
     }
 
     /** The arguments with "serve" in front, unless they name a command or ask for help. */
-    private static String[] withDefault(CommandLine program, String[] args) {
+    private static String[] withDefault(String[] args) {
         boolean named = args.length > 0
-                && (program.getSubcommands().containsKey(args[0])
-                        || Arrays.asList("-h", "--help", "-V", "--version").contains(args[0])
-                        || !args[0].startsWith("-"));
-        if (named) {
-            return args;
-        }
-        String[] more = new String[args.length + 1];
-        more[0] = "serve";
-        System.arraycopy(args, 0, more, 1, args.length);
-        return more;
+                && (!args[0].startsWith("-")
+                        || List.of("-h", "--help", "-V", "--version").contains(args[0]));
+        return named ? args : Stream.concat(Stream.of(SERVE), Stream.of(args)).toArray(String[]::new);
     }
 }

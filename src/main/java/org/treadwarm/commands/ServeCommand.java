@@ -13,6 +13,7 @@ import org.treadwarm.store.Store;
 import org.treadwarm.store.StoreUnavailable;
 import org.treadwarm.web.Server;
 import org.treadwarm.web.Settings;
+import org.treadwarm.web.WarmUp;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 
@@ -48,13 +49,17 @@ public final class ServeCommand implements Callable<Integer> {
     @Option(names = "--behind-tls", description = "a reverse proxy in front speaks TLS: mark cookies Secure")
     private boolean behindTls;
 
+    /** Begins to load the server, on another thread, while the command line is read and the store opened. */
+    public static void prepare() {
+        WarmUp.begin();
+    }
+
     @Override
     public Integer call() throws InterruptedException {
         if (port < 0 || port > 65535) {
             System.err.println("The port is 0 to 65535, not " + port + ".");
             return 2;
         }
-        Server.warmUp();
         try (Store store = Store.open(data, Clock.systemUTC())) {
             if (demo) {
                 Demo.addTo(new JobDesk(store.jobs()));

@@ -5,11 +5,9 @@ import io.javalin.config.JavalinConfig;
 import io.javalin.http.Context;
 import io.javalin.http.HttpResponseException;
 import io.javalin.http.MethodNotAllowedResponse;
-import io.javalin.http.staticfiles.Location;
 import java.util.Locale;
 import java.util.UUID;
 import org.eclipse.jetty.server.HttpConfiguration;
-import org.eclipse.jetty.server.ServerConnector;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 import org.treadwarm.jobs.JobDesk;
@@ -53,25 +51,12 @@ public final class Server implements AutoCloseable {
                     ctx.skipRemainingHandlers();
                 }
             });
+            new Assets().routes(config.routes);
             api.routes(config.routes);
             pages.routes(config.routes);
             faults(config, pages);
         });
         return new Server(javalin.start(settings.bind(), settings.port()));
-    }
-
-    /**
-     * Loads what a server needs, on a thread of its own, so that a start can open the store meanwhile; nothing depends on it.
-     */
-    public static void warmUp() {
-        Thread thread = new Thread(
-                () -> {
-                    Javalin.create(Server::basics);
-                    new ServerConnector(new org.eclipse.jetty.server.Server());
-                },
-                "warm-up");
-        thread.setDaemon(true);
-        thread.start();
     }
 
     /** The port it listens on. */
@@ -85,7 +70,7 @@ public final class Server implements AutoCloseable {
         javalin.stop();
     }
 
-    private static void basics(JavalinConfig config) {
+    static void basics(JavalinConfig config) {
         config.startup.showJavalinBanner = false;
         config.startup.showOldJavalinVersionWarning = false;
         config.startup.startupWatcherEnabled = false;
@@ -99,11 +84,6 @@ public final class Server implements AutoCloseable {
         config.jetty.modifyHttpConfiguration((HttpConfiguration http) -> {
             http.setSendServerVersion(false);
             http.setIdleTimeout(30_000);
-        });
-        config.staticFiles.add(files -> {
-            files.hostedPath = "/static";
-            files.directory = "/static";
-            files.location = Location.CLASSPATH;
         });
     }
 

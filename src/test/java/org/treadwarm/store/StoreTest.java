@@ -11,10 +11,12 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.attribute.PosixFilePermissions;
 import java.time.Clock;
+import java.util.Comparator;
 import java.util.concurrent.CyclicBarrier;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -39,6 +41,19 @@ class StoreTest {
                 .isEqualTo("rwx------");
         assertThat(PosixFilePermissions.toString(Files.getPosixFilePermissions(folder.resolve("treadwarm.sqlite"))))
                 .isEqualTo("rw-------");
+    }
+
+    @Test
+    void namesTheNewestMigrationScriptAsItsVersion() throws Exception {
+        Path scripts = Path.of(Schema.class
+                .getResource("/db/migration/V1__jobs_people_keys.sql")
+                .toURI());
+        try (Stream<Path> all = Files.list(scripts.getParent())) {
+            assertThat(all.map(script -> script.getFileName().toString())
+                            .map(name -> name.substring(1, name.indexOf("__")))
+                            .max(Comparator.comparingInt(Integer::parseInt)))
+                    .contains(Schema.VERSION);
+        }
     }
 
     @Test

@@ -6,6 +6,7 @@ import io.javalin.http.Handler;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.web.security.KeyGuard;
+import org.treadwarm.wire.Json;
 
 /** The routes of the API. */
 public final class Api {
@@ -27,6 +28,13 @@ public final class Api {
 
     /** What {@code GET /api/v1/health} says. */
     record Health(String status, String method) {}
+
+    private static final Health HEALTH = new Health("ok", Sizing.METHOD_VERSION);
+
+    /** Writes a first answer, to nobody, so that what writes answers is loaded. */
+    public static void warmUp() {
+        Json.bytes(HEALTH);
+    }
 
     /** Adds the routes. */
     public void routes(RoutesConfig routes) {
@@ -51,7 +59,7 @@ public final class Api {
     }
 
     private static void health(Context ctx) {
-        SizingApi.json(ctx, 200, new Health("ok", Sizing.METHOD_VERSION));
+        SizingApi.json(ctx, 200, HEALTH);
     }
 
     private void description(Context ctx) {

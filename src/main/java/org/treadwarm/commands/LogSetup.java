@@ -1,0 +1,41 @@
+package org.treadwarm.commands;
+
+import ch.qos.logback.classic.Level;
+import ch.qos.logback.classic.Logger;
+import ch.qos.logback.classic.LoggerContext;
+import ch.qos.logback.classic.encoder.PatternLayoutEncoder;
+import ch.qos.logback.classic.spi.Configurator;
+import ch.qos.logback.classic.spi.ConfiguratorRank;
+import ch.qos.logback.classic.spi.ILoggingEvent;
+import ch.qos.logback.core.ConsoleAppender;
+import ch.qos.logback.core.spi.ContextAwareBase;
+
+/**
+ * What is logged, and how: warnings and faults, one line each, on the error stream.
+ *
+ * <p>The logging library finds this class as a service. A configuration file would mean the same, but reading one loads
+ * an XML parser and some 300 classes at every start.
+ */
+@ConfiguratorRank(ConfiguratorRank.CUSTOM_HIGH_PRIORITY)
+public final class LogSetup extends ContextAwareBase implements Configurator {
+    private static final String LINE = "%d{yyyy-MM-dd'T'HH:mm:ss.SSSX, UTC} %-5level %logger{20} %msg%n%xThrowable{20}";
+
+    @Override
+    public ExecutionStatus configure(LoggerContext context) {
+        PatternLayoutEncoder encoder = new PatternLayoutEncoder();
+        encoder.setContext(context);
+        encoder.setPattern(LINE);
+        encoder.start();
+        ConsoleAppender<ILoggingEvent> console = new ConsoleAppender<>();
+        console.setContext(context);
+        console.setTarget("System.err");
+        console.setEncoder(encoder);
+        console.start();
+        Logger root = context.getLogger(org.slf4j.Logger.ROOT_LOGGER_NAME);
+        root.setLevel(Level.WARN);
+        root.addAppender(console);
+        // It warns of every client that sends an odd Host header; the host guard answers those.
+        context.getLogger("org.eclipse.jetty.util.HostPort").setLevel(Level.ERROR);
+        return ExecutionStatus.DO_NOT_INVOKE_NEXT_IF_ANY;
+    }
+}
