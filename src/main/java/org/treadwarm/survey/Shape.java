@@ -104,6 +104,8 @@ public final class Shape {
         Class<?>[] parameters = new Class<?>[components.length];
         for (int i = 0; i < components.length; i++) {
             Key key = key(components[i]);
+            // The accessor is public already; this spares a check at each call.
+            key.component().getAccessor().setAccessible(true);
             keys.put(key.name(), key);
             parameters[i] = components[i].getType();
         }
