@@ -46,4 +46,14 @@ public final class Intake {
         }
         return findings.isEmpty() ? new Outcome.Accepted<>(question) : new Outcome.Refused<>(findings.all());
     }
+
+    /** Reads one floor section. */
+    public static Outcome<SectionQuestion> section(JsonNode tree) {
+        Findings findings = new Findings();
+        SectionQuestion question = (SectionQuestion) new Binder(findings).bind(tree, SectionQuestion.class, "");
+        if (question != null) {
+            question.check(findings);
+        }
+        return findings.isEmpty() ? new Outcome.Accepted<>(question) : new Outcome.Refused<>(findings.all());
+    }
 }

@@ -27,7 +27,7 @@ public final class Findings {
     }
 
     /** Adds that something is missing, unless a finding there tells already why it could not be read. */
-    void missing(String pointer, String message, String allowed) {
+    public void missing(String pointer, String message, String allowed) {
         if (clean(pointer)) {
             add(pointer, "nothing", message, allowed);
         }

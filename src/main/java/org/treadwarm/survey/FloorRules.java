@@ -1,5 +1,9 @@
 package org.treadwarm.survey;
 
+import java.util.Optional;
+import org.treadwarm.units.Numbers;
+import org.treadwarm.units.Reading;
+
 /** What must hold for the heated floor of a room. */
 final class FloorRules {
     private final Findings findings;
@@ -54,13 +58,55 @@ final class FloorRules {
 
     private void heater(String pointer, HeatedFloor floor) {
         floor.heater()
-                .filter(heater ->
-                        heater.kind() == HeaterKind.WATER && heater.density().isPresent())
                 .filter(heater -> findings.clean(pointer, "/heater/kind"))
-                .ifPresent(heater -> findings.add(
-                        pointer + "/heater/density",
-                        heater.density().get().typed(),
-                        "only an electric heater has an installed density",
-                        "leave it out"));
+                .ifPresent(heater -> heater(pointer + "/heater", heater));
+    }
+
+    private void heater(String pointer, Heater heater) {
+        if (heater.kind() == HeaterKind.WATER) {
+            notHis(pointer + "/density", heater.density(), "only an electric heater has an installed density");
+            notHis(pointer + "/linearPower", heater.linearPower(), "only an electric heater has a power per metre");
+            notHis(pointer + "/voltage", heater.voltage(), "only an electric heater has a voltage");
+        } else {
+            notHis(pointer + "/wallThickness", heater.wallThickness(), "only a pipe has a wall");
+            notHis(pointer + "/wallConductivity", heater.wallConductivity(), "only a pipe has a wall");
+            notHis(
+                    pointer + "/supplyTemperature",
+                    heater.supplyTemperature(),
+                    "only warm water has a supply temperature");
+            notHis(pointer + "/spread", heater.spread(), "only warm water has a spread");
+            notHis(pointer + "/feederLength", heater.feederLength(), "only warm water has feeders");
+        }
+        sizes(pointer, heater);
+    }
+
+    private void notHis(String pointer, Optional<Reading> reading, String message) {
+        reading.ifPresent(given -> findings.add(pointer, given.typed(), message, "leave it out"));
+    }
+
+    private void sizes(String pointer, Heater heater) {
+        boolean water = heater.kind() == HeaterKind.WATER;
+        double diameter = value(heater.diameter(), water ? Heater.PIPE_DIAMETER : Heater.CABLE_DIAMETER);
+        if (water && 2 * value(heater.wallThickness(), Heater.WALL_THICKNESS) >= diameter) {
+            findings.add(
+                    pointer + (heater.wallThickness().isPresent() ? "/wallThickness" : "/diameter"),
+                    heater.wallThickness()
+                            .or(heater::diameter)
+                            .map(Reading::typed)
+                            .orElse(""),
+                    "the pipe's wall leaves no room for the water",
+                    "a wall of less than half the diameter");
+        }
+        heater.spacing()
+                .filter(spacing -> spacing.value() <= diameter)
+                .ifPresent(spacing -> findings.add(
+                        pointer + "/spacing",
+                        spacing.typed(),
+                        "the cables or pipes would lie inside one another",
+                        "more than the outside diameter of " + Numbers.significant(diameter * 1000, 3) + " mm"));
+    }
+
+    private static double value(Optional<Reading> reading, double otherwise) {
+        return reading.map(Reading::value).orElse(otherwise);
     }
 }

@@ -16,6 +16,8 @@ public enum QuantityKind {
     RESISTANCE("m2.K/W", "a thermal resistance", 0),
     HEAT_FLUX("W/m2", "a heat flux", 0),
     POWER("W", "a heat flow", 0),
+    LINEAR_POWER("W/m", "a heat per metre", 0),
+    VOLTAGE("V", "a voltage", 0),
     CHANGE_RATE("1/h", "an air change rate", 0),
     AIR_FLOW("m3/s", "an air flow", 0),
     AREA_PER_LENGTH("m2/m", "an opening area per metre", 0),

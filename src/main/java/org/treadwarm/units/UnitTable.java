@@ -8,6 +8,7 @@ import static org.treadwarm.units.QuantityKind.CONDUCTIVITY;
 import static org.treadwarm.units.QuantityKind.DENSITY;
 import static org.treadwarm.units.QuantityKind.HEAT_FLUX;
 import static org.treadwarm.units.QuantityKind.LENGTH;
+import static org.treadwarm.units.QuantityKind.LINEAR_POWER;
 import static org.treadwarm.units.QuantityKind.LINEAR_TRANSMITTANCE;
 import static org.treadwarm.units.QuantityKind.POWER;
 import static org.treadwarm.units.QuantityKind.RATIO;
@@ -17,6 +18,7 @@ import static org.treadwarm.units.QuantityKind.SPEED;
 import static org.treadwarm.units.QuantityKind.TEMPERATURE;
 import static org.treadwarm.units.QuantityKind.TEMPERATURE_DIFFERENCE;
 import static org.treadwarm.units.QuantityKind.TRANSMITTANCE;
+import static org.treadwarm.units.QuantityKind.VOLTAGE;
 import static org.treadwarm.units.QuantityKind.VOLUME;
 
 import java.util.ArrayList;
@@ -267,6 +269,9 @@ public final class UnitTable {
         add(units, POWER, "W", 1, 1, SI);
         add(units, POWER, "kW", 1000, 1, SI);
         add(units, POWER, "Btu/h", BTU_JOULES, 3600, BTU, "Btuh");
+        add(units, LINEAR_POWER, "W/m", 1, 1, SI);
+        add(units, LINEAR_POWER, "W/ft", 10000, 3048, YARD);
+        add(units, VOLTAGE, "V", 1, 1, SI, "volt", "volts");
     }
 
     private static void air(List<Unit> units) {

@@ -12,6 +12,7 @@ import static tech.units.indriya.unit.Units.MINUTE;
 import static tech.units.indriya.unit.Units.PERCENT;
 import static tech.units.indriya.unit.Units.SECOND;
 import static tech.units.indriya.unit.Units.SQUARE_METRE;
+import static tech.units.indriya.unit.Units.VOLT;
 import static tech.units.indriya.unit.Units.WATT;
 
 import java.util.HashMap;
@@ -81,6 +82,8 @@ final class UnitOracle {
         si.put(QuantityKind.RESISTANCE, SQUARE_METRE.multiply(KELVIN).divide(WATT));
         si.put(QuantityKind.HEAT_FLUX, WATT.divide(SQUARE_METRE));
         si.put(QuantityKind.POWER, WATT);
+        si.put(QuantityKind.LINEAR_POWER, WATT.divide(METRE));
+        si.put(QuantityKind.VOLTAGE, VOLT);
         si.put(QuantityKind.CHANGE_RATE, HOUR.inverse());
         si.put(QuantityKind.AIR_FLOW, CUBIC_METRE.divide(SECOND));
         si.put(QuantityKind.AREA_PER_LENGTH, SQUARE_METRE.divide(METRE));
@@ -106,6 +109,9 @@ final class UnitOracle {
         units.put("J/(kg.K)", JOULE.divide(KILOGRAM.multiply(KELVIN)));
         units.put("kJ/(kg.K)", MetricPrefix.KILO(JOULE).divide(KILOGRAM.multiply(KELVIN)));
         units.put("Btu/(lb.°F)", BTU.divide(USCustomary.POUND.multiply(RANKINE)));
+        units.put("W/m", WATT.divide(METRE));
+        units.put("W/ft", WATT.divide(FOOT));
+        units.put("V", VOLT);
         units.put("%", PERCENT);
         return units;
     }
