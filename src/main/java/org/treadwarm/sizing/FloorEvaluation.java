@@ -154,6 +154,13 @@ final class FloorEvaluation {
         return flux + downwardFlux(heater, outdoor) + edgeFlux(heater, outdoor);
     }
 
+    /** Heat that the heater makes, W/m²: as given, or the cable's power over its spacing. For a heater that {@link Plan.HeaterPlan#hasDensity()}. */
+    double density() {
+        return plan.heater().density() == Stack.NONE
+                ? whole.in[plan.heater().linearPower()] / whole.in[plan.heater().spacing()]
+                : whole.in[plan.heater().density()];
+    }
+
     double zoneMaximum() {
         return switch (zone) {
             case OCCUPIED -> Limits.OCCUPIED;
@@ -190,17 +197,16 @@ final class FloorEvaluation {
     }
 
     private double heaterLimit(double outdoor) {
-        if (plan.density() == Stack.NONE) {
+        if (!plan.heater().hasDensity()) {
             return Double.POSITIVE_INFINITY;
         }
         double atRoom = downwardFlux(room, outdoor) + edgeFlux(room, outdoor);
-        return HeatedFloor.fluxOfDensity(
-                whole.in[plan.density()], room, resistanceAbove, downCoefficient + edgeCoefficient, atRoom);
+        return HeatedFloor.fluxOfDensity(density(), room, resistanceAbove, downCoefficient + edgeCoefficient, atRoom);
     }
 
     /** The lowest of the limits that do not depend on the outdoor temperature. */
     private double fixedLimit() {
-        double lowest = plan.density() == Stack.NONE ? Double.POSITIVE_INFINITY : whole.in[plan.density()];
+        double lowest = plan.heater().hasDensity() ? density() : Double.POSITIVE_INFINITY;
         for (int i = 0; i < limits.length - 1; i++) {
             lowest = Math.min(lowest, limits[i]);
         }
@@ -210,7 +216,7 @@ final class FloorEvaluation {
     private boolean carriesAt(double outdoor) {
         double required = requiredHeat(outdoor) / area;
         return required == 0
-                || required <= fixedLimit() && (plan.density() == Stack.NONE || excessDensity(outdoor) <= 0);
+                || required <= fixedLimit() && (!plan.heater().hasDensity() || excessDensity(outdoor) <= 0);
     }
 
     /**
@@ -231,7 +237,7 @@ final class FloorEvaluation {
         double allowance = whole.in[whole.plan.roomIndexes[plan.room()].allowance()];
         double heat = fixedLimit() * area / (1 + allowance);
         double byFixed = Math.max(COLDEST, (heat - whole.roomConstant[plan.room()]) / slope);
-        if (plan.density() == Stack.NONE || excessDensity(byFixed) <= 0) {
+        if (!plan.heater().hasDensity() || excessDensity(byFixed) <= 0) {
             return byFixed;
         }
         double unneeded = Math.min(room, -whole.roomConstant[plan.room()] / slope);
@@ -242,7 +248,7 @@ final class FloorEvaluation {
 
     /** What the heater would have to make above its density to give the required flux, W/m². */
     private double excessDensity(double outdoor) {
-        return heaterFlux(requiredHeat(outdoor) / area, outdoor) - whole.in[plan.density()];
+        return heaterFlux(requiredHeat(outdoor) / area, outdoor) - density();
     }
 
     private double rootOfDensity(double from, double to, double fluxSlope) {

@@ -30,11 +30,25 @@ final class FloorSteps {
         state(at, "/requiredFlux");
         state(at + "/atCarryingFlux", "/carryingFlux");
         if (answer.installedPower().isPresent()) {
+            if (floor.heater().density() == Stack.NONE) {
+                steps.add(
+                        at + "/installedDensity",
+                        "density-of-cable",
+                        "p",
+                        Symbol.of("p_l", addresses.input(floor.heater().linearPower())),
+                        Symbol.of("T", addresses.input(floor.heater().spacing())));
+            } else {
+                steps.add(
+                        at + "/installedDensity",
+                        "density-given",
+                        "p",
+                        Symbol.of("p_given", addresses.input(floor.heater().density())));
+            }
             steps.add(
                     at + "/installedPower",
                     "installed-power",
                     "P",
-                    Symbol.of("p", addresses.input(floor.density())),
+                    answered("p", "/installedDensity"),
                     answered("A_F", "/area"));
         }
     }

@@ -37,8 +37,8 @@ final class LimitSteps {
         for (LayerLimit limit : floor.layerLimits()) {
             layer(limit, answer.limits().get(next));
         }
-        if (floor.density() != Stack.NONE) {
-            heater(answer.limits().get(next));
+        if (floor.heater().hasDensity()) {
+            heater(answer.limits().get(next), answer.installedDensity().orElseThrow());
         }
         for (int i = 0; i < answer.limits().size(); i++) {
             steps.add(
@@ -82,10 +82,10 @@ final class LimitSteps {
         steps.add(here, "layer-limit", "q_max", Symbol.of("theta_max", maximum), room, Symbol.all("R", above));
     }
 
-    private void heater(Limit answer) {
+    private void heater(Limit answer, double made) {
         String here = claim();
-        Symbol density = Symbol.of("p", addresses.input(floor.density()));
-        if (answer.maximumFlux() == plan.values[floor.density()]) {
+        Symbol density = answered("p", "/installedDensity");
+        if (answer.maximumFlux() == made) {
             steps.add(here, "heater-limit-nothing-lost", "q_max", density);
             return;
         }

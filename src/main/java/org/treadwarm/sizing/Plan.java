@@ -110,7 +110,24 @@ final class Plan {
             List<EdgePlan> edges,
             int maximumSurface,
             List<LayerLimit> layerLimits,
-            int density) {}
+            HeaterPlan heater) {}
+
+    /** What makes the heat; indexes are -1 for what is not given, all of them when there is no heater. */
+    record HeaterPlan(
+            boolean water,
+            int density,
+            int spacing,
+            int diameter,
+            int wallThickness,
+            int wallConductivity,
+            int linearPower,
+            int supplyTemperature,
+            int spread) {
+        /** Whether the heat it makes per m² is known: given, or by the cable's power and spacing. */
+        boolean hasDensity() {
+            return density != Stack.NONE || linearPower != Stack.NONE && spacing != Stack.NONE;
+        }
+    }
 
     /** A layer above the heater with a highest temperature of its own. */
     record LayerLimit(String name, int layer, int maximum) {}

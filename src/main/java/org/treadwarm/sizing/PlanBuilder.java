@@ -13,6 +13,7 @@ import org.treadwarm.sizing.Plan.EdgePlan;
 import org.treadwarm.sizing.Plan.Face;
 import org.treadwarm.sizing.Plan.FloorPlan;
 import org.treadwarm.sizing.Plan.GroundPlan;
+import org.treadwarm.sizing.Plan.HeaterPlan;
 import org.treadwarm.sizing.Plan.LayerLimit;
 import org.treadwarm.sizing.Plan.Link;
 import org.treadwarm.sizing.Plan.LinkKind;
@@ -26,6 +27,7 @@ import org.treadwarm.survey.Ground;
 import org.treadwarm.survey.GroundKind;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Heater;
+import org.treadwarm.survey.HeaterKind;
 import org.treadwarm.survey.Junction;
 import org.treadwarm.survey.JunctionPlace;
 import org.treadwarm.survey.Layer;
@@ -351,7 +353,20 @@ final class PlanBuilder {
                 edges("/rooms/" + node + "/junctions", room.junctions()),
                 inputs.optional(pointer + "/maximumSurfaceTemperature", floor.maximumSurfaceTemperature()),
                 List.copyOf(limits),
-                inputs.optional(pointer + "/heater/density", floor.heater().flatMap(Heater::density)));
+                heater(pointer + "/heater", floor.heater()));
+    }
+
+    private HeaterPlan heater(String pointer, Optional<Heater> heater) {
+        return new HeaterPlan(
+                heater.map(given -> given.kind() == HeaterKind.WATER).orElse(false),
+                inputs.optional(pointer + "/density", heater.flatMap(Heater::density)),
+                inputs.optional(pointer + "/spacing", heater.flatMap(Heater::spacing)),
+                inputs.optional(pointer + "/diameter", heater.flatMap(Heater::diameter)),
+                inputs.optional(pointer + "/wallThickness", heater.flatMap(Heater::wallThickness)),
+                inputs.optional(pointer + "/wallConductivity", heater.flatMap(Heater::wallConductivity)),
+                inputs.optional(pointer + "/linearPower", heater.flatMap(Heater::linearPower)),
+                inputs.optional(pointer + "/supplyTemperature", heater.flatMap(Heater::supplyTemperature)),
+                inputs.optional(pointer + "/spread", heater.flatMap(Heater::spread)));
     }
 
     private List<EdgePlan> edges(String pointer, List<Junction> junctions) {

@@ -84,6 +84,7 @@ public record Sizing(
             OptionalDouble heaterFlux,
             OptionalDouble heaterPower,
             Optional<FloorState> atCarryingFlux,
+            OptionalDouble installedDensity,
             OptionalDouble installedPower,
             OptionalDouble buildUpHeight,
             OptionalDouble load,
