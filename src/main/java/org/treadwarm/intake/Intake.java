@@ -6,6 +6,7 @@ import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Findings;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Rules;
+import org.treadwarm.survey.SectionQuestion;
 import org.treadwarm.survey.Survey;
 
 /** The door for documents: a tree in, a survey out, or every problem it has. */

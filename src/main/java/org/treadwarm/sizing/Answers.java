@@ -235,7 +235,9 @@ final class Answers {
                 List.of(),
                 Optional.empty(),
                 List.of(),
-                List.of());
+                List.of(),
+                Optional.empty(),
+                Optional.empty());
     }
 
     private FloorSizing floor(FloorEvaluation floor) {
@@ -260,7 +262,7 @@ final class Answers {
                 holds ? of(floor.holdsDownTo) : empty(),
                 holds ? Optional.empty() : Optional.of(floor.holdsDownTo < 0 ? "beyond -60" : "never"),
                 of(state.surfaceTemperature()),
-                Optional.of("mean (plane)"),
+                Optional.of(floor.section == null ? "mean (plane)" : "warmest point (section)"),
                 of(state.heaterTemperature()),
                 of(state.downwardFlux()),
                 of(state.edgeFlux()),
@@ -277,10 +279,22 @@ final class Answers {
                 layers(plan.stacks.get(floor.plan.below()), given.below()),
                 Optional.of(below(floor)),
                 edges(floor),
-                limits(floor, given));
+                limits(floor, given),
+                floor.section == null ? Optional.empty() : Optional.of(new SectionAnswers(floor, given).all()),
+                floor.sectionReason.isEmpty() ? Optional.empty() : Optional.of(floor.sectionReason));
     }
 
     private FloorState state(FloorEvaluation floor, double flux) {
+        if (floor.section != null) {
+            SectionFloor.State state = floor.section.at(flux, numbers.outdoor);
+            return new FloorState(
+                    state.warmest(),
+                    state.heater(),
+                    state.downward(),
+                    state.edge(),
+                    state.made(),
+                    state.made() * floor.area);
+        }
         double heater = floor.heaterTemperature(flux);
         double down = floor.downwardFlux(heater, numbers.outdoor);
         double edge = floor.edgeFlux(heater, numbers.outdoor);
@@ -329,7 +343,8 @@ final class Answers {
                     Limits.LAYER + floor.plan.layerLimits().get(i).name(),
                     Limits.LAYER_SOURCE);
         }
-        addLimit(limits, floor, floor.limits.length - 1, Limits.HEATER, Limits.HEATER_SOURCE);
+        addLimit(limits, floor, floor.limits.length - 2, Limits.HEATER, Limits.HEATER_SOURCE);
+        addLimit(limits, floor, floor.limits.length - 1, Limits.WATER, Limits.WATER_SOURCE);
         return List.copyOf(limits);
     }
 

@@ -49,6 +49,7 @@ final class Evaluation {
     final double[] roomSlope;
     final FloorEvaluation[] floors;
     final Network network;
+    final Sections sections = new Sections();
     double[] in;
     double outdoor;
     double residual;

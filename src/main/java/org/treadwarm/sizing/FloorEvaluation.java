@@ -1,6 +1,8 @@
 package org.treadwarm.sizing;
 
+import java.util.Optional;
 import org.treadwarm.physics.floor.HeatedFloor;
+import org.treadwarm.physics.section.FloorResponse;
 import org.treadwarm.sizing.Plan.EdgePlan;
 import org.treadwarm.sizing.Plan.FloorPlan;
 import org.treadwarm.sizing.Plan.LayerLimit;
@@ -19,8 +21,8 @@ final class FloorEvaluation {
     private static final double OUTDOOR_FILM = Films.outside("down");
     private static final double GROUND_FILM = Films.outside("down");
 
-    /** Limits beside those of the layers: zone, covering, heater. */
-    private static final int OTHER_LIMITS = 3;
+    /** Limits beside those of the layers: zone, covering, density of the heater, supply of the water. */
+    private static final int OTHER_LIMITS = 4;
 
     final FloorPlan plan;
     final double[] limits;
@@ -29,6 +31,10 @@ final class FloorEvaluation {
     double room;
     double resistanceAbove;
     double resistanceBelow;
+
+    /** From the heater plane to what lies below, without factors of the season, m²·K/W. */
+    double resistanceDown;
+
     double downCoefficient;
     double downConstant;
     double downSlope;
@@ -41,6 +47,12 @@ final class FloorEvaluation {
     double carryingFlux;
     int governing;
     double holdsDownTo;
+
+    /** The floor solved between its cables or pipes; null when the heater has no spacing or cannot be solved. */
+    SectionFloor section;
+
+    /** Why a floor with a spacing is not solved; empty when it is, or has none. */
+    String sectionReason = "";
 
     private final Evaluation whole;
     private final Zone zone;
@@ -68,7 +80,8 @@ final class FloorEvaluation {
         requiredHeat = requiredHeat(whole.outdoor);
         requiredFlux = requiredHeat / area;
         limits();
-        holdsDownTo = lowestOutdoor();
+        section();
+        holdsDownTo = section == null ? lowestOutdoor() : section.lowestOutdoor();
     }
 
     /** Whether every number of the floor is finite; a limit or a lowest outdoor temperature that is infinite means that there is none. */
@@ -83,6 +96,7 @@ final class FloorEvaluation {
             double film = filmBelow();
             double total = whole.resistance(plan.below(), film);
             resistanceBelow = total - film;
+            resistanceDown = total;
             downCoefficient = 1 / total;
             downConstant = downCoefficient * whole.constantSeenFrom(plan.room(), plan.other());
             downSlope = downCoefficient * whole.slopeSeenFrom(plan.other());
@@ -91,7 +105,9 @@ final class FloorEvaluation {
         resistanceBelow = whole.resistance(plan.below(), 0);
         double annualMean = whole.in[whole.plan.site.annualMean()];
         if (!whole.plan.grounds.get(plan.ground()).suspended()) {
-            downCoefficient = whole.seasonal() * whole.slab(plan.ground(), resistanceBelow + GROUND_FILM);
+            double slab = whole.slab(plan.ground(), resistanceBelow + GROUND_FILM);
+            resistanceDown = 1 / slab;
+            downCoefficient = whole.seasonal() * slab;
             downConstant = downCoefficient * annualMean;
             downSlope = 0;
             return;
@@ -101,6 +117,7 @@ final class FloorEvaluation {
         double soil = whole.seasonal() * whole.groundToSoil[plan.ground()];
         double outdoors = whole.groundToOutdoors[plan.ground()];
         double share = floor / (floor + soil + outdoors);
+        resistanceDown = 1 / floor + 1 / (whole.groundToSoil[plan.ground()] + outdoors);
         downCoefficient = share * (soil + outdoors);
         downConstant = share * soil * annualMean;
         downSlope = share * outdoors;
@@ -170,7 +187,7 @@ final class FloorEvaluation {
     }
 
     private void limits() {
-        int last = limits.length - 1;
+        int last = limits.length - 2;
         limits[0] = HeatedFloor.flux(zoneMaximum() - room);
         limits[1] = plan.maximumSurface() == Stack.NONE
                 ? Double.POSITIVE_INFINITY
@@ -187,13 +204,43 @@ final class FloorEvaluation {
             limits[2 + i] = HeatedFloor.fluxAtTemperature(whole.in[limit.maximum()], room, down);
         }
         limits[last] = heaterLimit(whole.outdoor);
+        limits[last + 1] = Double.POSITIVE_INFINITY;
+        govern();
+    }
+
+    private void govern() {
         governing = 0;
-        for (int i = 1; i <= last; i++) {
+        for (int i = 1; i < limits.length; i++) {
             if (limits[i] < limits[governing]) {
                 governing = i;
             }
         }
         carryingFlux = limits[governing];
+    }
+
+    private void section() {
+        section = null;
+        sectionReason = "";
+        if (plan.heater().spacing() == Stack.NONE) {
+            return;
+        }
+        SectionGeometry.Made made = SectionGeometry.of(this, whole);
+        if (made.geometry().isEmpty()) {
+            sectionReason = made.whyNot();
+            return;
+        }
+        Optional<FloorResponse> response = whole.sections.of(made.geometry().get());
+        if (response.isEmpty()) {
+            sectionReason = whole.sections.whyNot();
+            return;
+        }
+        section = new SectionFloor(this, made.geometry().get(), response.get());
+        section.limits(limits);
+        govern();
+    }
+
+    Evaluation whole() {
+        return whole;
     }
 
     private double heaterLimit(double outdoor) {
@@ -207,7 +254,7 @@ final class FloorEvaluation {
     /** The lowest of the limits that do not depend on the outdoor temperature. */
     private double fixedLimit() {
         double lowest = plan.heater().hasDensity() ? density() : Double.POSITIVE_INFINITY;
-        for (int i = 0; i < limits.length - 1; i++) {
+        for (int i = 0; i < limits.length - 2; i++) {
             lowest = Math.min(lowest, limits[i]);
         }
         return lowest;

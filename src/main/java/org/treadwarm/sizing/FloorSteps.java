@@ -27,8 +27,21 @@ final class FloorSteps {
     void all(FloorSizing answer) {
         demand();
         margin(answer);
-        state(at, "/requiredFlux");
-        state(at + "/atCarryingFlux", "/carryingFlux");
+        boolean section = answer.section().isPresent();
+        if (section && floor.heater().water()) {
+            int spread = floor.heater().spread();
+            if (spread == Stack.NONE) {
+                steps.add(at + "/section/spread", "spread-usual", "sigma");
+            } else {
+                steps.add(
+                        at + "/section/spread",
+                        "spread-given",
+                        "sigma",
+                        Symbol.of("sigma_given", addresses.input(spread)));
+            }
+        }
+        state(at, "/requiredFlux", section ? at + "/section/atRequiredFlux" : "");
+        state(at + "/atCarryingFlux", "/carryingFlux", section ? at + "/section/atCarryingFlux" : "");
         if (answer.installedPower().isPresent()) {
             if (floor.heater().density() == Stack.NONE) {
                 steps.add(
@@ -97,24 +110,12 @@ final class FloorSteps {
         }
     }
 
-    /** Temperatures and fluxes with the floor giving a flux. */
-    private void state(String here, String fluxKey) {
+    /** Temperatures and fluxes with the floor giving a flux; solved ones come from the state of the section, when it has an address. */
+    private void state(String here, String fluxKey, String section) {
         Symbol flux = answered("q", fluxKey);
-        Symbol heater = Symbol.of("theta_h", Addresses.sizing(here + "/heaterTemperature"));
-        Symbol surface = Symbol.of("theta_F", Addresses.sizing(here + "/surfaceTemperature"));
-        steps.add(
-                here + "/surfaceTemperature",
-                "surface-temperature",
-                "theta_F",
-                Symbol.of("theta_i", addresses.temperature(floor.room())),
-                flux);
-        steps.add(
-                here + "/heaterTemperature",
-                "heater-temperature",
-                "theta_h",
-                surface,
-                flux,
-                answered("R_o", "/resistanceAbove"));
+        Symbol heater = section.isEmpty()
+                ? plane(here, flux)
+                : solved(here, section, flux, Symbol.of("q_u", Addresses.sizing(here + "/downwardFlux")));
         steps.add(
                 here + "/downwardFlux",
                 "downward-flux",
@@ -136,6 +137,52 @@ final class FloorSteps {
                 "P",
                 Symbol.of("q_h", Addresses.sizing(here + "/heaterFlux")),
                 answered("A_F", "/area"));
+    }
+
+    /** Steps of a solved section; gives its mean heater plane. */
+    private Symbol solved(String here, String section, Symbol flux, Symbol down) {
+        rise(here + "/surfaceTemperature", section + "/surface", flux, down);
+        rise(here + "/heaterTemperature", section + "/heater", flux, down);
+        rise(section + "/heaterPlane", section + "/plane", flux, down);
+        steps.add(
+                section + "/surfaceMean",
+                "surface-temperature",
+                "theta_F",
+                Symbol.of("theta_i", addresses.temperature(floor.room())),
+                flux);
+        return Symbol.of("theta_h", Addresses.sizing(section + "/heaterPlane"));
+    }
+
+    private void rise(String pointer, String split, Symbol flux, Symbol down) {
+        steps.add(
+                pointer,
+                "section-temperature",
+                "theta",
+                Symbol.of("theta_i", addresses.temperature(floor.room())),
+                Symbol.of("s_o", Addresses.sizing(split + "/perUpwardFlux")),
+                flux,
+                Symbol.of("s_u", Addresses.sizing(split + "/perDownwardFlux")),
+                down);
+    }
+
+    /** Steps of the plane model; gives its heater plane. */
+    private Symbol plane(String here, Symbol flux) {
+        Symbol heater = Symbol.of("theta_h", Addresses.sizing(here + "/heaterTemperature"));
+        Symbol surface = Symbol.of("theta_F", Addresses.sizing(here + "/surfaceTemperature"));
+        steps.add(
+                here + "/surfaceTemperature",
+                "surface-temperature",
+                "theta_F",
+                Symbol.of("theta_i", addresses.temperature(floor.room())),
+                flux);
+        steps.add(
+                here + "/heaterTemperature",
+                "heater-temperature",
+                "theta_h",
+                surface,
+                flux,
+                answered("R_o", "/resistanceAbove"));
+        return heater;
     }
 
     private void edge(String here, Symbol heater) {

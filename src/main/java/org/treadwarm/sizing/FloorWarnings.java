@@ -11,6 +11,7 @@ import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.Warning;
 import org.treadwarm.survey.Ground;
 import org.treadwarm.survey.HeatedFloor;
+import org.treadwarm.survey.Heater;
 import org.treadwarm.survey.HeaterKind;
 import org.treadwarm.survey.Junction;
 import org.treadwarm.survey.JunctionPlace;
@@ -66,7 +67,7 @@ final class FloorWarnings {
         below(pointer, room, floor, answer.floor());
         covering(pointer, floor, answer.floor());
         flux(pointer, floor, answer.floor());
-        heater(pointer, floor);
+        heater(pointer, floor, answer.floor());
         sameTwo(i, room, floor);
     }
 
@@ -247,7 +248,7 @@ final class FloorWarnings {
         }
     }
 
-    private void heater(String pointer, HeatedFloor floor) {
+    private void heater(String pointer, HeatedFloor floor, FloorSizing answer) {
         floor.heater().ifPresent(heater -> {
             if (heater.kind() == HeaterKind.WATER && heater.spacing().isEmpty()) {
                 add(
@@ -257,15 +258,32 @@ final class FloorWarnings {
                         "Without a spacing of the pipes there is no limit for the water.",
                         "Lay the circuit out before ordering.");
             }
-            if (heater.spacing().isPresent()) {
-                add(
-                        "spacing-not-used",
-                        pointer + "/heater/spacing",
-                        "The spacing does not enter this sizing.",
-                        "Method 1 takes the heater as a plane: between cables or pipes the surface is cooler, above them warmer.",
-                        "Keep a reserve to the surface limit.");
-            }
+            answer.sectionReason()
+                    .ifPresent(reason -> add(
+                            "spacing-not-solved",
+                            pointer + "/heater/spacing",
+                            "The floor between the cables or pipes was not solved: " + reason + ".",
+                            "The heater is taken as a plane: between cables or pipes the surface is cooler, above them warmer.",
+                            "Give thickness and conductivity of the layer that holds the heater; keep a reserve to the surface limit."));
+            density(pointer + "/heater", heater);
         });
+    }
+
+    private void density(String pointer, Heater heater) {
+        if (heater.density().isEmpty()
+                || heater.linearPower().isEmpty()
+                || heater.spacing().isEmpty()) {
+            return;
+        }
+        double made = heater.linearPower().get().value() / heater.spacing().get().value();
+        if (Math.abs(made - heater.density().get().value()) > 0.05 * made) {
+            add(
+                    "density-differs",
+                    pointer + "/density",
+                    "The cable's power over its spacing is " + Numbers.fixed(made, 0) + " W/m2, not the density given.",
+                    "The density given is what this sizing uses.",
+                    "Correct one of density, power per metre and spacing.");
+        }
     }
 
     /** A surface and a heated floor between the same two rooms or spaces are most likely the same construction twice. */

@@ -30,6 +30,22 @@ final class LimitSteps {
     }
 
     void all(FloorSizing answer) {
+        if (answer.section().isPresent()) {
+            solved(answer);
+        } else {
+            plane(answer);
+        }
+        for (int i = 0; i < answer.limits().size(); i++) {
+            steps.add(
+                    at + "/limits/" + i + "/margin",
+                    "margin",
+                    "m",
+                    answered("q_max", "/limits/" + i + "/maximumFlux"),
+                    answered("q", "/requiredFlux"));
+        }
+    }
+
+    private void plane(FloorSizing answer) {
         zone(claim());
         if (floor.maximumSurface() != Stack.NONE) {
             surface(claim(), "covering-limit", addresses.input(floor.maximumSurface()));
@@ -40,14 +56,73 @@ final class LimitSteps {
         if (floor.heater().hasDensity()) {
             heater(answer.limits().get(next), answer.installedDensity().orElseThrow());
         }
-        for (int i = 0; i < answer.limits().size(); i++) {
-            steps.add(
-                    at + "/limits/" + i + "/margin",
-                    "margin",
-                    "m",
-                    answered("q_max", "/limits/" + i + "/maximumFlux"),
-                    answered("q", "/requiredFlux"));
+    }
+
+    /** Limits of a solved section, in the same order. */
+    private void solved(FloorSizing answer) {
+        String maximum = TableNumbers.zone(zone);
+        if (zone == Zone.BATHROOM) {
+            reached(answer, "section-bathroom-limit", Symbol.of("Delta_theta", maximum));
+        } else {
+            reached(answer, "section-limit", Symbol.of("theta_max", maximum), room);
         }
+        if (floor.maximumSurface() != Stack.NONE) {
+            reached(answer, "section-limit", Symbol.of("theta_max", addresses.input(floor.maximumSurface())), room);
+        }
+        for (LayerLimit limit : floor.layerLimits()) {
+            if (isNext(answer, Limits.LAYER + limit.name())) {
+                reached(answer, "section-limit", Symbol.of("theta_max", addresses.input(limit.maximum())), room);
+            }
+        }
+        if (floor.heater().hasDensity()) {
+            density(answer.limits().get(next), answer.installedDensity().orElseThrow());
+        }
+        if (isNext(answer, Limits.WATER)) {
+            supply(answer);
+        }
+    }
+
+    private boolean isNext(FloorSizing answer, String name) {
+        return next < answer.limits().size() && answer.limits().get(next).name().equals(name);
+    }
+
+    /** A limit that a temperature of the section reaches, or has reached without any flux. */
+    private void reached(FloorSizing answer, String formula, Symbol... maximum) {
+        boolean already = answer.limits().get(next).maximumFlux() == 0;
+        String found = at + "/section/limits/" + next;
+        List<Symbol> symbols = new ArrayList<>(List.of(maximum));
+        if (!already) {
+            symbols.add(Symbol.of("s_o", Addresses.sizing(found + "/temperature/perUpwardFlux")));
+        }
+        symbols.add(Symbol.of("s_u", Addresses.sizing(found + "/temperature/perDownwardFlux")));
+        symbols.add(Symbol.of("q_u", Addresses.sizing(found + "/downwardFlux")));
+        steps.add(claim(), formula + (already ? "-already-reached" : ""), "q_max", symbols.toArray(new Symbol[0]));
+    }
+
+    private void density(Limit answer, double made) {
+        String found = at + "/section/limits/" + next;
+        Symbol density = answered("p", "/installedDensity");
+        if (answer.maximumFlux() == made) {
+            steps.add(claim(), "heater-limit-nothing-lost", "q_max", density);
+            return;
+        }
+        steps.add(
+                claim(),
+                answer.maximumFlux() == 0 ? "section-heater-limit-all-lost" : "section-heater-limit",
+                "q_max",
+                density,
+                Symbol.of("q_u", Addresses.sizing(found + "/downwardFlux")),
+                Symbol.of("q_e", Addresses.sizing(found + "/edgeFlux")));
+    }
+
+    private void supply(FloorSizing answer) {
+        Symbol supply = Symbol.of("theta_V", addresses.input(floor.heater().supplyTemperature()));
+        Symbol spread = answered("sigma", "/section/spread");
+        if (answer.limits().get(next).maximumFlux() == 0) {
+            steps.add(claim(), "section-water-limit-too-cold", "q_max");
+            return;
+        }
+        reached(answer, "section-water-limit", supply, spread, room);
     }
 
     /** Pointer of the next limit's flux. */

@@ -3,6 +3,7 @@ package org.treadwarm.sizing;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.treadwarm.sizing.SectionEvaluation.SectionAccuracy;
 
 /**
  * The answer for a survey: numbers only, in SI units (temperatures in degrees Celsius), never rounded. A number that does not
@@ -94,7 +95,57 @@ public record Sizing(
             List<LayerSizing> layersBelow,
             Optional<Below> below,
             List<Edge> edges,
-            List<Limit> limits) {}
+            List<Limit> limits,
+            Optional<SectionSizing> section,
+            Optional<String> sectionReason) {}
+
+    /**
+     * The floor solved between its cables or pipes.
+     *
+     * @param spacing axis to axis, m
+     * @param diameter of the cable or pipe, outside, m
+     * @param heaterLayer the layer that holds it, lying on the layers below
+     * @param spread between supply and return of the water, K
+     * @param limits what was found at each of the floor's limits, in their order
+     */
+    public record SectionSizing(
+            double spacing,
+            double diameter,
+            String heaterLayer,
+            OptionalDouble spread,
+            SectionState atRequiredFlux,
+            SectionState atCarryingFlux,
+            List<SectionLimit> limits,
+            SectionAccuracy accuracy) {}
+
+    /**
+     * A solved floor at one flux, degrees Celsius.
+     *
+     * @param heaterPlane mean over the upper face of the layers below
+     * @param heaterTemperature mean of the cable's skin or the pipe's outside
+     * @param waterTemperature mean of the water in the pipe
+     * @param supplyTemperature of the water, for its spread
+     * @param layers highest temperature of each layer above, at its lower face; of the one that holds the heater, at the heater
+     */
+    public record SectionState(
+            double flux,
+            double surfaceMean,
+            double surfaceMaximum,
+            double surfaceMinimum,
+            double heaterPlane,
+            double heaterTemperature,
+            OptionalDouble waterTemperature,
+            OptionalDouble supplyTemperature,
+            List<SectionEvaluation.WarmFace> layers,
+            FluxSplit surface,
+            FluxSplit plane,
+            FluxSplit heater) {}
+
+    /** How far a temperature rises over the room's with the upward and with the downward flux, K per W/m², at this flux. */
+    public record FluxSplit(double perUpwardFlux, double perDownwardFlux) {}
+
+    /** What goes down and out at the edge at a limit, W/m², and how the limited temperature rises with the fluxes there. */
+    public record SectionLimit(double downwardFlux, double edgeFlux, Optional<FluxSplit> temperature) {}
 
     /** A floor at one flux. */
     public record FloorState(

@@ -96,6 +96,7 @@ public final class PlainSheet {
             line("  At the carrying flux:");
             Sizing.FloorState state = floor.atCarryingFlux().orElseThrow();
             state(
+                    floor.section().isPresent(),
                     state.surfaceTemperature(),
                     state.heaterTemperature(),
                     state.downwardFlux(),
@@ -104,6 +105,7 @@ public final class PlainSheet {
             line("  What it would take at the required flux:");
         }
         state(
+                floor.section().isPresent(),
                 floor.surfaceTemperature().orElseThrow(),
                 floor.heaterTemperature().orElseThrow(),
                 floor.downwardFlux().orElseThrow(),
@@ -117,9 +119,9 @@ public final class PlainSheet {
         }
     }
 
-    private void state(double surface, double heater, double down, double edge, double power) {
-        number("mean surface temperature", OptionalDouble.of(surface), 1, "°C");
-        number("heater plane temperature", OptionalDouble.of(heater), 1, "°C");
+    private void state(boolean solved, double surface, double heater, double down, double edge, double power) {
+        number(solved ? "warmest point of the surface" : "mean surface temperature", OptionalDouble.of(surface), 1, "°C");
+        number(solved ? "cable or pipe, outside" : "heater plane temperature", OptionalDouble.of(heater), 1, "°C");
         number("downward flux", OptionalDouble.of(down), 1, "W/m2");
         number("edge flux", OptionalDouble.of(edge), 1, "W/m2");
         number("heater power", OptionalDouble.of(power), 0, "W");

@@ -42,6 +42,7 @@ public final class Api {
         get(routes, ROOT + "/openapi.json", this::description);
         routes.post(ROOT + "/sizings", sizing::size);
         routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate);
+        routes.post(ROOT + "/sections", sizing::section);
         get(routes, ROOT + "/materials", sizing::materials);
         get(routes, ROOT + "/jobs", jobs::list);
         routes.post(ROOT + "/jobs", jobs::create);

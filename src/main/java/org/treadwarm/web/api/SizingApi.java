@@ -2,16 +2,20 @@ package org.treadwarm.web.api;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
+import java.time.Duration;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.CancellationException;
 import org.treadwarm.intake.AssemblyQuestion;
 import org.treadwarm.intake.Intake;
 import org.treadwarm.intake.Intake.Outcome;
 import org.treadwarm.jobs.Judgement;
 import org.treadwarm.sizing.AssemblyEvaluation;
 import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
+import org.treadwarm.sizing.SectionEvaluation;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.store.Scope;
+import org.treadwarm.survey.SectionQuestion;
 import org.treadwarm.tables.Materials;
 import org.treadwarm.web.Problems;
 import org.treadwarm.web.security.KeyGuard;
@@ -19,6 +23,8 @@ import org.treadwarm.wire.Json;
 
 /** Answers that keep nothing: sizings, evaluations of assemblies, the materials table. */
 final class SizingApi {
+    private static final Duration LONGEST = Duration.ofSeconds(10);
+
     private final KeyGuard keys;
 
     SizingApi(KeyGuard keys) {
@@ -64,6 +70,35 @@ final class SizingApi {
             json(ctx, 200, AssemblyEvaluation.of(question.assembly(), conditions));
         } else if (outcome instanceof Outcome.Refused<AssemblyQuestion> refused) {
             Problems.invalid(ctx, refused.problems());
+        }
+    }
+
+    /** {@code POST /api/v1/sections}: one floor solved between its cables or pipes. */
+    void section(Context ctx) {
+        if (keys.admit(ctx, Scope.SIZE).isEmpty()) {
+            return;
+        }
+        Optional<JsonNode> document = Bodies.read(ctx, Bodies.SIZING);
+        if (document.isEmpty()) {
+            return;
+        }
+        Outcome<SectionQuestion> outcome = Intake.section(document.get());
+        if (outcome instanceof Outcome.Accepted<SectionQuestion> accepted) {
+            solve(ctx, accepted.value());
+        } else if (outcome instanceof Outcome.Refused<SectionQuestion> refused) {
+            Problems.invalid(ctx, refused.problems());
+        }
+    }
+
+    private static void solve(Context ctx, SectionQuestion question) {
+        long end = System.nanoTime() + LONGEST.toNanos();
+        try {
+            json(ctx, 200, SectionEvaluation.of(question, () -> System.nanoTime() > end));
+        } catch (CancellationException e) {
+            Problems.plain(
+                    ctx, 422, "too-long", "This section takes too long", "It was not solved within " + LONGEST.toSeconds() + " seconds.");
+        } catch (IllegalStateException e) {
+            Problems.plain(ctx, 422, "not-solved", "This section cannot be solved", e.getMessage() + ".");
         }
     }
 

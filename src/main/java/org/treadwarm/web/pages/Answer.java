@@ -14,6 +14,8 @@ import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FloorState;
+import org.treadwarm.sizing.Sizing.SectionSizing;
+import org.treadwarm.sizing.Sizing.SectionState;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.SpaceSizing;
 import org.treadwarm.sizing.Sizing.Warning;
@@ -176,9 +178,14 @@ final class Answer {
                             floor.downwardFlux().orElseThrow(),
                             floor.edgeFlux().orElseThrow(),
                             floor.heaterFlux().orElseThrow(),
-                            floor.heaterPower().orElseThrow()));
+                            floor.heaterPower().orElseThrow()),
+                    floor.section().map(SectionSizing::atRequiredFlux));
         } else {
-            state(lines, "at the carrying flux", floor.atCarryingFlux().orElseThrow());
+            state(
+                    lines,
+                    "at the carrying flux",
+                    floor.atCarryingFlux().orElseThrow(),
+                    floor.section().map(SectionSizing::atCarryingFlux));
             lines.add(new Line(
                     "What it would take",
                     watts(floor.heaterPower().orElseThrow()),
@@ -199,14 +206,31 @@ final class Answer {
         flux.ifPresent(value -> lines.add(new Line(name, Numbers.fixed(value, 1) + " W/m²", note)));
     }
 
-    private static void state(List<Line> lines, String note, FloorState state) {
-        lines.add(new Line("Mean surface temperature", Numbers.fixed(state.surfaceTemperature(), 1) + " °C", note));
-        lines.add(new Line("Heater plane", Numbers.fixed(state.heaterTemperature(), 1) + " °C", note));
+    private static void state(List<Line> lines, String note, FloorState state, Optional<SectionState> section) {
+        if (section.isPresent()) {
+            solved(lines, note, section.get());
+        } else {
+            degrees(lines, "Mean surface temperature", state.surfaceTemperature(), note);
+            degrees(lines, "Heater plane", state.heaterTemperature(), note);
+        }
         lines.add(new Line("Downward flux", Numbers.fixed(state.downwardFlux(), 1) + " W/m²", note));
         if (state.edgeFlux() != 0) {
             lines.add(new Line("Edge flux", Numbers.fixed(state.edgeFlux(), 1) + " W/m²", note));
         }
         lines.add(new Line("Heater power", watts(state.heaterPower()), note));
+    }
+
+    private static void solved(List<Line> lines, String note, SectionState section) {
+        degrees(lines, "Warmest point of the surface", section.surfaceMaximum(), "over a cable or pipe");
+        degrees(lines, "Mean surface temperature", section.surfaceMean(), note);
+        degrees(lines, "Coolest point of the surface", section.surfaceMinimum(), "midway between two");
+        degrees(lines, "Cable or pipe, outside", section.heaterTemperature(), note);
+        section.waterTemperature().ifPresent(water -> degrees(lines, "Water, mean", water, note));
+        section.supplyTemperature().ifPresent(supply -> degrees(lines, "Water, supply", supply, note));
+    }
+
+    private static void degrees(List<Line> lines, String name, double temperature, String note) {
+        lines.add(new Line(name, Numbers.fixed(temperature, 1) + " °C", note));
     }
 
     private void space(Sizing sizing, Part part) {

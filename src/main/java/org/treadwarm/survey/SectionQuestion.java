@@ -1,11 +1,7 @@
-package org.treadwarm.intake;
+package org.treadwarm.survey;
 
 import java.util.List;
 import java.util.Optional;
-import org.treadwarm.survey.Findings;
-import org.treadwarm.survey.Layer;
-import org.treadwarm.survey.Rules;
-import org.treadwarm.survey.Word;
 import org.treadwarm.units.Quantity;
 import org.treadwarm.units.QuantityKind;
 import org.treadwarm.units.Reading;
@@ -23,17 +19,17 @@ public record SectionQuestion(
                 label = "spacing of the cables or pipes, axis to axis")
         Reading spacing,
 
-        @Wording(label = "above the finished surface") Above above,
-        @Wording(label = "below the last layer") Below below,
+        @Wording(label = "above the finished surface") SectionAbove above,
+        @Wording(label = "below the last layer") SectionBelow below,
 
         @Wording(label = "layers", help = "From the finished surface down; at most 20.")
         List<Layer> layers,
 
-        @Wording(label = "heater") Embedded heater) {
+        @Wording(label = "heater") SectionHeater heater) {
     private static final int MOST_LAYERS = 20;
 
     /** What the finished surface gives its heat to: a temperature, and a coefficient or the basic characteristic. */
-    public record Above(
+    public record SectionAbove(
             @Quantity(kind = QuantityKind.TEMPERATURE, min = -60, max = 60, label = "room temperature")
             Reading temperature,
 
@@ -56,7 +52,7 @@ public record SectionQuestion(
     }
 
     /** What the last layer gives its heat to. */
-    public record Below(
+    public record SectionBelow(
             @Quantity(kind = QuantityKind.TEMPERATURE, min = -60, max = 60, label = "temperature below")
             Reading temperature,
 
@@ -81,7 +77,7 @@ public record SectionQuestion(
     }
 
     /** The pipe or cable in its layer. */
-    public record Embedded(
+    public record SectionHeater(
             @Wording(label = "kind of heater") EmbeddedKind kind,
 
             @Wording(label = "layer that holds it", help = "The name of one of the layers.")
@@ -132,8 +128,9 @@ public record SectionQuestion(
         return found;
     }
 
-    void check(Findings findings) {
-        Rules.checkLayers("/layers", layers, findings);
+    /** Adds what is wrong within the section to the findings. */
+    public void check(Findings findings) {
+        new LayerRules(findings).layers("/layers", layers);
         for (int i = 0; i < layers.size(); i++) {
             if (layers.get(i).bridging().isPresent()) {
                 findings.add("/layers/" + i + "/bridging", "framing", "a section has no framing", "leave it out");

@@ -1,0 +1,237 @@
+package org.treadwarm.sizing;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import org.treadwarm.physics.section.FloorResponse;
+import org.treadwarm.physics.section.FloorState;
+import org.treadwarm.sizing.Plan.LayerLimit;
+import org.treadwarm.sizing.Sizing.FluxSplit;
+import org.treadwarm.survey.Heater;
+
+/**
+ * A heated floor that is solved between its cables or pipes. Its mean surface temperature follows from the flux as everywhere
+ * (EN 1264-2); how much warmer it is over the heaters, how warm the heaters are, and what goes down, comes from the section.
+ *
+ * <p>Downward the section's own condition is the resistance to what lies below. Where the survey's balance asks for more, as the
+ * season factor on the ground does, the temperature below is set so that the section's downward flux is that balance's, with the
+ * heater's temperature there being the mean over the upper face of the layers below.
+ */
+final class SectionFloor {
+    private static final double HIGHEST_FLUX = 1e5;
+
+    final FloorEvaluation plane;
+    final SectionGeometry geometry;
+    final FloorResponse response;
+
+    private final double downwardResistance;
+
+    /** Temperatures in degrees Celsius and heat in W/m² at one flux and outdoor temperature. */
+    record State(
+            double flux,
+            double below,
+            double mean,
+            double warmest,
+            double coldest,
+            double plane,
+            double downward,
+            double edge,
+            double heater,
+            double water,
+            double[] faces) {
+        /** Heat that the heater makes. */
+        double made() {
+            return flux + downward + edge;
+        }
+    }
+
+    SectionFloor(FloorEvaluation plane, SectionGeometry geometry, FloorResponse response) {
+        this.plane = plane;
+        this.geometry = geometry;
+        this.response = response;
+        this.downwardResistance = plane.resistanceBelow + 1 / geometry.coefficientBelow();
+    }
+
+    /** The floor giving a flux at an outdoor temperature. */
+    State at(double flux, double outdoor) {
+        double below = (plane.downConstant + plane.downSlope * outdoor) / plane.downCoefficient;
+        double atZero = response.at(flux, plane.room, 0).downwardFlux();
+        double perKelvin = response.at(flux, plane.room, 1).downwardFlux() - atZero;
+        double open = 1 - plane.downCoefficient * downwardResistance;
+        double equivalent =
+                (plane.downCoefficient * below + atZero * open) / (plane.downCoefficient - perKelvin * open);
+        return solved(flux, equivalent, outdoor);
+    }
+
+    private State solved(double flux, double below, double outdoor) {
+        FloorState state = response.at(flux, plane.room, below);
+        double heaterPlane = below + state.downwardFlux() * downwardResistance;
+        return new State(
+                flux,
+                below,
+                state.mean(),
+                state.maximum(),
+                state.minimum(),
+                heaterPlane,
+                state.downwardFlux(),
+                plane.edgeFlux(heaterPlane, outdoor),
+                state.heater(),
+                state.water(),
+                state.faces());
+    }
+
+    /** How a temperature of the floor rises over the room's with the upward and the downward flux; at one flux both are linear. */
+    FluxSplit split(Rising temperature, double flux, double outdoor) {
+        State here = at(flux, outdoor);
+        State cooler = solved(flux, here.below() - 10, outdoor);
+        double perDownward =
+                (temperature.of(cooler) - temperature.of(here)) / (cooler.downward() - here.downward());
+        double left = temperature.of(here) - plane.room - perDownward * here.downward();
+        return new FluxSplit(flux > 0 ? left / flux : 0, perDownward);
+    }
+
+    /** A number of a state that rises with the flux. */
+    interface Rising {
+        double of(State state);
+    }
+
+    /** What may not be exceeded: a number of a state, and its maximum. */
+    record Bound(int slot, Rising number, double maximum) {}
+
+    /** The bounds of the survey, each with the slot of its limit. */
+    List<Bound> bounds() {
+        double[] in = plane.whole().in;
+        List<Bound> bounds = new ArrayList<>();
+        bounds.add(new Bound(0, State::warmest, plane.zoneMaximum()));
+        if (plane.plan.maximumSurface() != Stack.NONE) {
+            bounds.add(new Bound(1, State::warmest, in[plane.plan.maximumSurface()]));
+        }
+        List<LayerLimit> layers = plane.plan.layerLimits();
+        for (int i = 0; i < layers.size(); i++) {
+            int layer = layers.get(i).layer();
+            bounds.add(new Bound(2 + i, state -> state.faces()[layer], in[layers.get(i).maximum()]));
+        }
+        int last = 2 + layers.size();
+        if (plane.plan.heater().hasDensity()) {
+            bounds.add(new Bound(last, State::made, plane.density()));
+        }
+        if (plane.plan.heater().supplyTemperature() != Stack.NONE) {
+            bounds.add(new Bound(last + 1, State::water, meanWater(in[plane.plan.heater().supplyTemperature()])));
+        }
+        return bounds;
+    }
+
+    /** Mean temperature of the water for a supply temperature: the room's and the logarithmic mean over-temperature (EN 1264-2). */
+    double meanWater(double supply) {
+        double over = supply - plane.room;
+        double spread = spread();
+        return over <= spread ? Double.NEGATIVE_INFINITY : plane.room + spread / Math.log(over / (over - spread));
+    }
+
+    /** Supply temperature at which the water has a mean temperature: the inverse of {@link #meanWater}. */
+    double supply(double meanWater) {
+        double spread = spread();
+        return plane.room - spread / Math.expm1(-spread / (meanWater - plane.room));
+    }
+
+    /** Between supply and return, K. */
+    double spread() {
+        int given = plane.plan.heater().spread();
+        return given == Stack.NONE ? Heater.SPREAD : plane.whole().in[given];
+    }
+
+    /** Puts the largest flux that each bound allows into its slot. */
+    void limits(double[] limits) {
+        double outdoor = plane.whole().outdoor;
+        Arrays.fill(limits, Double.POSITIVE_INFINITY);
+        for (Bound bound : bounds()) {
+            limits[bound.slot()] = largestFlux(bound.number(), bound.maximum(), outdoor);
+        }
+        int density = 2 + plane.plan.layerLimits().size();
+        if (plane.plan.heater().hasDensity()) {
+            limits[density] = Math.min(limits[density], plane.density());
+        }
+    }
+
+    /** As {@link FloorEvaluation#holdsDownTo}. */
+    double lowestOutdoor() {
+        List<Bound> bounds = bounds();
+        if (carriesAt(FloorEvaluation.COLDEST, bounds)) {
+            return Double.NEGATIVE_INFINITY;
+        }
+        if (!carriesAt(plane.room, bounds)) {
+            return Double.POSITIVE_INFINITY;
+        }
+        double low = FloorEvaluation.COLDEST;
+        double high = plane.room;
+        while (high - low > 1e-11 * (1 + Math.abs(low))) {
+            double middle = (low + high) / 2;
+            if (carriesAt(middle, bounds)) {
+                high = middle;
+            } else {
+                low = middle;
+            }
+        }
+        return high;
+    }
+
+    private boolean carriesAt(double outdoor, List<Bound> bounds) {
+        double required = plane.requiredHeat(outdoor) / plane.area;
+        if (required == 0) {
+            return true;
+        }
+        if (plane.plan.heater().hasDensity() && required > plane.density()) {
+            return false;
+        }
+        State state = at(required, outdoor);
+        return bounds.stream().allMatch(bound -> bound.number().of(state) <= bound.maximum());
+    }
+
+    /** The largest flux at which a rising number stays at or below a maximum; 0 when it is above already without any flux. */
+    private double largestFlux(Rising number, double maximum, double outdoor) {
+        if (number.of(at(0, outdoor)) >= maximum) {
+            return 0;
+        }
+        double low = 0;
+        double high = 50;
+        while (number.of(at(high, outdoor)) < maximum) {
+            low = high;
+            high *= 2;
+            if (high > HIGHEST_FLUX) {
+                return Double.POSITIVE_INFINITY;
+            }
+        }
+        return root(number, maximum, outdoor, low, high);
+    }
+
+    /** The secant through both ends of a bracket; an end that stays is given half its weight, so that it does not stay for ever. */
+    private double root(Rising number, double maximum, double outdoor, double from, double to) {
+        double low = from;
+        double high = to;
+        double atLow = number.of(at(low, outdoor)) - maximum;
+        double atHigh = number.of(at(high, outdoor)) - maximum;
+        int kept = 0;
+        for (int step = 0; step < 200 && high - low > 1e-12 * high; step++) {
+            double next = high - atHigh * (high - low) / (atHigh - atLow);
+            if (!(next > low && next < high)) {
+                next = (low + high) / 2;
+            }
+            double atNext = number.of(at(next, outdoor)) - maximum;
+            if (atNext == 0) {
+                return next;
+            }
+            if (atNext < 0) {
+                low = next;
+                atLow = atNext;
+                atHigh = kept > 0 ? atHigh / 2 : atHigh;
+                kept = 1;
+            } else {
+                high = next;
+                atHigh = atNext;
+                atLow = kept < 0 ? atLow / 2 : atLow;
+                kept = -1;
+            }
+        }
+        return low;
+    }
+}

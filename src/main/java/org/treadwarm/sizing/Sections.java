@@ -1,0 +1,58 @@
+package org.treadwarm.sizing;
+
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+import org.treadwarm.physics.section.FloorResponse;
+
+/**
+ * Solved sections, remembered by their geometry over all sizings, so that only the first sizing of a floor waits for it. One
+ * sizing solves a bounded number of new ones.
+ */
+final class Sections {
+    /** The most floors remembered; each takes a few kilobytes. */
+    private static final int MOST_KEPT = 500;
+
+    /** The most floors that one sizing solves anew, so that its time is bounded. */
+    private static final int MOST_NEW = 100;
+
+    private static final Map<SectionGeometry, FloorResponse> KEPT =
+            new LinkedHashMap<>(2 * MOST_KEPT, 0.75f, true) {
+                @Override
+                protected boolean removeEldestEntry(Map.Entry<SectionGeometry, FloorResponse> eldest) {
+                    return size() > MOST_KEPT;
+                }
+            };
+
+    private int solved;
+    private String whyNot = "";
+
+    /** The response of a geometry; empty when it cannot be had, and {@link #whyNot()} then says why. */
+    Optional<FloorResponse> of(SectionGeometry geometry) {
+        synchronized (KEPT) {
+            FloorResponse known = KEPT.get(geometry);
+            if (known != null) {
+                return Optional.of(known);
+            }
+        }
+        if (solved == MOST_NEW) {
+            whyNot = "one sizing solves at most " + MOST_NEW + " different floors";
+            return Optional.empty();
+        }
+        solved++;
+        try {
+            FloorResponse response = geometry.solve();
+            synchronized (KEPT) {
+                KEPT.put(geometry, response);
+            }
+            return Optional.of(response);
+        } catch (IllegalArgumentException | IllegalStateException problem) {
+            whyNot = problem.getMessage();
+            return Optional.empty();
+        }
+    }
+
+    String whyNot() {
+        return whyNot;
+    }
+}
