@@ -42,19 +42,40 @@ public final class Conduction {
         boolean linear = section.edges().stream().noneMatch(edge -> edge.condition() instanceof BasicCharacteristic);
         int iterations = 0;
         for (int step = 0; step < MOST_FILM_STEPS; step++) {
-            Convergence last = linear(balances, known, guess, tolerance, stopped);
+            ConjugateGradients solver = new ConjugateGradients(balances.lattice);
+            Convergence last = solveDifferences(balances, solver, known, 1, guess, tolerance, stopped);
             iterations += last.iterations();
             if (linear || adaptFilms(balances, known, guess) <= FILM_TOLERANCE) {
-                return new Field(balances, known, guess, new Convergence(last.residual(), iterations));
+                return new Field(balances, known, 1, guess, new Convergence(last.residual(), iterations));
             }
             balances.filmsChanged();
         }
         throw new IllegalStateException("the films of the basic characteristic did not settle");
     }
 
+    /** Solves once, with the films as they are, for known temperatures and so many times the cables' heat. */
+    static Field linear(
+            Balances balances,
+            ConjugateGradients solver,
+            double[] known,
+            double heatFactor,
+            double[] guess,
+            double tolerance,
+            BooleanSupplier stopped) {
+        Convergence convergence =
+                solveDifferences(balances, solver, known, heatFactor, guess, tolerance, stopped);
+        return new Field(balances, known, heatFactor, guess, convergence);
+    }
+
     /** Temperatures are solved as differences from one of the known ones, so that what is left over is measured by real heat. */
-    private static Convergence linear(
-            Balances balances, double[] known, double[] guess, double tolerance, BooleanSupplier stopped) {
+    private static Convergence solveDifferences(
+            Balances balances,
+            ConjugateGradients solver,
+            double[] known,
+            double heatFactor,
+            double[] guess,
+            double tolerance,
+            BooleanSupplier stopped) {
         double reference = known[0];
         double[] differences = new double[known.length];
         for (int i = 0; i < known.length; i++) {
@@ -63,8 +84,7 @@ public final class Conduction {
         for (int cell = 0; cell < guess.length; cell++) {
             guess[cell] = balances.isSolid(cell) ? guess[cell] - reference : 0;
         }
-        double[] load = balances.load(differences, 1);
-        Convergence convergence = new ConjugateGradients(balances.lattice).solve(load, guess, tolerance, stopped);
+        Convergence convergence = solver.solve(balances.load(differences, heatFactor), guess, tolerance, stopped);
         for (int cell = 0; cell < guess.length; cell++) {
             guess[cell] += reference;
         }

@@ -4,13 +4,15 @@ package org.treadwarm.physics.section;
 public final class Field {
     private final Balances balances;
     private final double[] known;
+    private final double heatFactor;
     private final double[] temperature;
     private final double[] heat;
     private final Convergence convergence;
 
-    Field(Balances balances, double[] known, double[] temperature, Convergence convergence) {
+    Field(Balances balances, double[] known, double heatFactor, double[] temperature, Convergence convergence) {
         this.balances = balances;
         this.known = known;
+        this.heatFactor = heatFactor;
         this.temperature = temperature;
         this.heat = balances.links.heat(temperature, known);
         this.convergence = convergence;
@@ -47,7 +49,7 @@ public final class Field {
         for (double made : balances.heat) {
             sum += made;
         }
-        return sum;
+        return heatFactor * sum;
     }
 
     /** What the heat made and the heat given away differ by, relative to all heat that is given away or taken in. */
