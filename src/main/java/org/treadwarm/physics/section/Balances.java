@@ -1,0 +1,242 @@
+package org.treadwarm.physics.section;
+
+import java.util.Arrays;
+import org.treadwarm.physics.section.Section.Air;
+import org.treadwarm.physics.section.Section.Block;
+import org.treadwarm.physics.section.Section.Edge;
+import org.treadwarm.physics.section.Section.Sheet;
+import org.treadwarm.physics.section.Section.Side;
+
+/**
+ * The heat balances of a section's cells by finite volumes (ISO 10211:2017 asks for balances of cells; two half cells in series
+ * between middles, so that fluxes through layers are exact).
+ */
+final class Balances {
+    /** Marks a cell of solid material. */
+    private static final int SOLID = -1;
+
+    /** Marks a cell without material. */
+    private static final int EMPTY = -2;
+
+    final Section section;
+    final Grid grid;
+    final Lattice lattice;
+
+    /** Links from cells to known temperatures. */
+    final KnownLinks links;
+
+    /** Heat made in each cell, W/m. */
+    final double[] heat;
+
+    private final double[] conductivity;
+    private final int[] kind;
+    private final double[] sheets;
+
+    Balances(Section section, Grid grid) {
+        this.section = section;
+        this.grid = grid;
+        this.lattice = new Lattice(grid.columns(), grid.rows());
+        this.links = new KnownLinks(section.knownCount());
+        this.heat = new double[lattice.cells()];
+        this.conductivity = new double[lattice.cells()];
+        this.kind = new int[lattice.cells()];
+        this.sheets = new double[grid.columns() * (grid.rows() + 1)];
+        paint();
+        lay();
+        joinInside();
+        for (int edge = 0; edge < section.edges().size(); edge++) {
+            joinEdge(edge, section.edges().get(edge));
+        }
+        Circles.join(this);
+        hold();
+    }
+
+    private void paint() {
+        Arrays.fill(kind, EMPTY);
+        for (Block block : section.blocks()) {
+            paint(block.left(), block.right(), block.bottom(), block.top(), SOLID, block.conductivity());
+        }
+        for (int i = 0; i < section.airs().size(); i++) {
+            Air air = section.airs().get(i);
+            paint(
+                    air.left(),
+                    air.right(),
+                    air.bottom(),
+                    air.top(),
+                    section.edges().size() + i,
+                    0);
+        }
+    }
+
+    private void paint(double left, double right, double bottom, double top, int mark, double conducts) {
+        for (int row = 0; row < grid.rows(); row++) {
+            double y = grid.y(row);
+            for (int column = 0; y > bottom && y < top && column < grid.columns(); column++) {
+                if (grid.x(column) > left && grid.x(column) < right) {
+                    kind[lattice.cell(column, row)] = mark;
+                    conductivity[lattice.cell(column, row)] = conducts;
+                }
+            }
+        }
+    }
+
+    private void lay() {
+        for (Sheet sheet : section.sheets()) {
+            int line = grid.lineAt(sheet.height());
+            for (int column = 0; column < grid.columns(); column++) {
+                if (grid.x(column) > sheet.left() && grid.x(column) < sheet.right()) {
+                    sheets[line * grid.columns() + column] += sheet.resistance();
+                }
+            }
+        }
+    }
+
+    private void joinInside() {
+        for (int row = 0; row < grid.rows(); row++) {
+            for (int column = 0; column < grid.columns(); column++) {
+                int cell = lattice.cell(column, row);
+                if (column + 1 < grid.columns()) {
+                    joinRight(cell, column, row);
+                }
+                if (row + 1 < grid.rows()) {
+                    joinUp(cell, column, row);
+                }
+            }
+        }
+    }
+
+    private void joinRight(int cell, int column, int row) {
+        int next = cell + 1;
+        double area = grid.height(row);
+        if (kind[cell] == SOLID && kind[next] == SOLID) {
+            lattice.right[cell] = area / (halfWidth(column, row) + halfWidth(column + 1, row));
+        } else if (kind[cell] == SOLID && kind[next] >= 0) {
+            known(cell, Heading.RIGHT, kind[next], area, halfWidth(column, row), upright(kind[next]));
+        } else if (kind[cell] >= 0 && kind[next] == SOLID) {
+            known(next, Heading.LEFT, kind[cell], area, halfWidth(column + 1, row), upright(kind[cell]));
+        }
+    }
+
+    private void joinUp(int cell, int column, int row) {
+        int above = cell + grid.columns();
+        double area = grid.width(column);
+        double sheet = sheet(column, row + 1);
+        if (kind[cell] == SOLID && kind[above] == SOLID) {
+            lattice.up[cell] = area / (halfHeight(column, row) + sheet + halfHeight(column, row + 1));
+        } else if (kind[cell] == SOLID && kind[above] >= 0) {
+            known(cell, Heading.UP, kind[above], area, halfHeight(column, row) + sheet, level(kind[above]));
+        } else if (kind[cell] >= 0 && kind[above] == SOLID) {
+            known(above, Heading.DOWN, kind[cell], area, halfHeight(column, row + 1) + sheet, level(kind[cell]));
+        }
+    }
+
+    private double level(int known) {
+        return section.airs().get(known - section.edges().size()).levelFilm();
+    }
+
+    private double upright(int known) {
+        return section.airs().get(known - section.edges().size()).uprightFilm();
+    }
+
+    private void joinEdge(int known, Edge edge) {
+        boolean upright = edge.side() == Side.LEFT || edge.side() == Side.RIGHT;
+        int count = upright ? grid.rows() : grid.columns();
+        for (int i = 0; i < count; i++) {
+            if (edge.holds(upright ? grid.y(i) : grid.x(i))) {
+                int column = upright ? (edge.side() == Side.LEFT ? 0 : grid.columns() - 1) : i;
+                int row = upright ? i : (edge.side() == Side.BOTTOM ? 0 : grid.rows() - 1);
+                joinEdge(known, edge, column, row);
+            }
+        }
+    }
+
+    private void joinEdge(int known, Edge edge, int column, int row) {
+        int cell = lattice.cell(column, row);
+        if (kind[cell] != SOLID) {
+            return;
+        }
+        double film = film(edge.condition());
+        switch (edge.side()) {
+            case LEFT -> known(cell, Heading.LEFT, known, grid.height(row), halfWidth(column, row), film);
+            case RIGHT -> known(cell, Heading.RIGHT, known, grid.height(row), halfWidth(column, row), film);
+            case BOTTOM ->
+                known(cell, Heading.DOWN, known, grid.width(column), halfHeight(column, row) + sheet(column, 0), film);
+            case TOP ->
+                known(
+                        cell,
+                        Heading.UP,
+                        known,
+                        grid.width(column),
+                        halfHeight(column, row) + sheet(column, grid.rows()),
+                        film);
+        }
+    }
+
+    /** The film's resistance; that of the basic characteristic at first for a surface 9 K warmer than the room. */
+    private static double film(Condition condition) {
+        if (condition instanceof Condition.Film film) {
+            return 1 / film.coefficient();
+        }
+        return condition instanceof Condition.Held ? 0 : 1 / Condition.BasicCharacteristic.coefficient(9);
+    }
+
+    private void known(int cell, Heading heading, int known, double area, double inside, double film) {
+        links.add(cell, heading, known, area, inside, film);
+    }
+
+    /** Puts the links to known temperatures into the lattice, and 0 into cells that are no unknowns. */
+    private void hold() {
+        Arrays.fill(lattice.held, 0);
+        links.addTo(lattice.held);
+        for (int cell = 0; cell < lattice.cells(); cell++) {
+            if (kind[cell] != SOLID) {
+                lattice.held[cell] = 1;
+            }
+        }
+    }
+
+    /** Takes over films that have changed. */
+    void filmsChanged() {
+        hold();
+    }
+
+    /** Takes a cell out of the unknowns: it is inside a known temperature. */
+    void replace(int cell, int known) {
+        kind[cell] = known;
+    }
+
+    boolean isSolid(int cell) {
+        return kind[cell] == SOLID;
+    }
+
+    /** The known temperature that fills a cell, or a negative number for a solid or empty cell. */
+    int knownIn(int cell) {
+        return kind[cell];
+    }
+
+    double conductivity(int cell) {
+        return conductivity[cell];
+    }
+
+    double sheet(int column, int line) {
+        return sheets[line * grid.columns() + column];
+    }
+
+    double halfWidth(int column, int row) {
+        return grid.width(column) / 2 / conductivity[lattice.cell(column, row)];
+    }
+
+    double halfHeight(int column, int row) {
+        return grid.height(row) / 2 / conductivity[lattice.cell(column, row)];
+    }
+
+    /** Right-hand side for known temperatures and so many times the cables' heat. */
+    double[] load(double[] known, double heatFactor) {
+        double[] load = new double[lattice.cells()];
+        for (int cell = 0; cell < load.length; cell++) {
+            load[cell] = heatFactor * heat[cell];
+        }
+        links.addHeat(known, load);
+        return load;
+    }
+}

@@ -1,0 +1,89 @@
+package org.treadwarm.physics.section;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.SortedSet;
+import java.util.TreeSet;
+
+/**
+ * Places the lines of a grid in one direction: close together where the temperature bends, and smoothly farther apart from there
+ * on, so that the error falls with the square of the cell size.
+ */
+final class GridLines {
+    /** Parts of an interval in which the wanted cell size is integrated. */
+    private static final int PARTS = 64;
+
+    private final SortedSet<Double> fixed = new TreeSet<>();
+    private final List<Fine> fines = new ArrayList<>();
+    private final double growth;
+    private final double coarsest;
+
+    /** Cells of one size between two positions. */
+    private record Fine(double from, double to, double size) {
+        double wanted(double position, double growth) {
+            return size + growth * Math.max(0, Math.max(from - position, position - to));
+        }
+    }
+
+    /**
+     * No lines yet.
+     *
+     * @param growth by how much cells grow per metre of distance from a fine stretch
+     * @param coarsest largest cell, m
+     */
+    GridLines(double growth, double coarsest) {
+        this.growth = growth;
+        this.coarsest = coarsest;
+    }
+
+    /** A line that must be there. */
+    GridLines at(double position) {
+        fixed.add(position);
+        return this;
+    }
+
+    /** Cells of a size between two positions, which are lines themselves. */
+    GridLines fine(double from, double to, double size) {
+        fines.add(new Fine(from, to, size));
+        return at(from).at(to);
+    }
+
+    /** The lines. */
+    double[] lines() {
+        List<Double> lines = new ArrayList<>();
+        double before = Double.NaN;
+        for (double position : fixed) {
+            if (!lines.isEmpty()) {
+                fill(before, position, lines);
+            }
+            lines.add(position);
+            before = position;
+        }
+        return lines.stream().mapToDouble(Double::doubleValue).toArray();
+    }
+
+    /** Inner lines at equal steps of the integral of one over the wanted size. */
+    private void fill(double from, double to, List<Double> lines) {
+        double[] count = new double[PARTS + 1];
+        double part = (to - from) / PARTS;
+        for (int i = 0; i < PARTS; i++) {
+            count[i + 1] = count[i] + part / wanted(from + (i + 0.5) * part);
+        }
+        int cells = Math.max(2, (int) Math.ceil(count[PARTS] - 1e-6));
+        for (int line = 1; line < cells; line++) {
+            double goal = count[PARTS] * line / cells;
+            int found = Arrays.binarySearch(count, goal);
+            int i = found >= 0 ? found : -found - 2;
+            lines.add(from + part * (i + (goal - count[i]) / (count[i + 1] - count[i])));
+        }
+    }
+
+    private double wanted(double position) {
+        double size = coarsest;
+        for (Fine fine : fines) {
+            size = Math.min(size, fine.wanted(position, growth));
+        }
+        return size;
+    }
+}
