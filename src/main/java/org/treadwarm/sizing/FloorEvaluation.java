@@ -224,6 +224,10 @@ final class FloorEvaluation {
         if (plan.heater().spacing() == Stack.NONE) {
             return;
         }
+        if (!(requiredFlux <= SectionFloor.HIGHEST_FLUX)) {
+            sectionReason = "the required flux is far beyond what any floor gives";
+            return;
+        }
         SectionGeometry.Made made = SectionGeometry.of(this, whole);
         if (made.geometry().isEmpty()) {
             sectionReason = made.whyNot();

@@ -259,12 +259,13 @@ final class FloorWarnings {
                         "Lay the circuit out before ordering.");
             }
             answer.sectionReason()
-                    .ifPresent(reason -> add(
-                            "spacing-not-solved",
-                            pointer + "/heater/spacing",
-                            "The floor between the cables or pipes was not solved: " + reason + ".",
-                            "The heater is taken as a plane: between cables or pipes the surface is cooler, above them warmer.",
-                            "Give thickness and conductivity of the layer that holds the heater; keep a reserve to the surface limit."));
+                    .ifPresent(
+                            reason -> add(
+                                    "spacing-not-solved",
+                                    pointer + "/heater/spacing",
+                                    "The floor between the cables or pipes was not solved: " + reason + ".",
+                                    "The heater is taken as a plane: between cables or pipes the surface is cooler, above them warmer.",
+                                    "Give thickness and conductivity of the layer that holds the heater; keep a reserve to the surface limit."));
             density(pointer + "/heater", heater);
         });
     }
@@ -275,7 +276,8 @@ final class FloorWarnings {
                 || heater.spacing().isEmpty()) {
             return;
         }
-        double made = heater.linearPower().get().value() / heater.spacing().get().value();
+        double made =
+                heater.linearPower().get().value() / heater.spacing().get().value();
         if (Math.abs(made - heater.density().get().value()) > 0.05 * made) {
             add(
                     "density-differs",

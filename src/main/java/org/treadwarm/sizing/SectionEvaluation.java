@@ -2,7 +2,6 @@ package org.treadwarm.sizing;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.OptionalDouble;
 import java.util.function.BooleanSupplier;
 import org.treadwarm.physics.envelope.HeatFlow;
 import org.treadwarm.physics.section.Condition;

@@ -18,13 +18,15 @@ import org.treadwarm.survey.Heater;
  * heater's temperature there being the mean over the upper face of the layers below.
  */
 final class SectionFloor {
-    private static final double HIGHEST_FLUX = 1e5;
+    /** The largest flux looked at, W/m²; no floor comes near it. */
+    static final double HIGHEST_FLUX = 4000;
 
     final FloorEvaluation plane;
     final SectionGeometry geometry;
     final FloorResponse response;
 
     private final double downwardResistance;
+    private final FloorState buffer;
 
     /** Temperatures in degrees Celsius and heat in W/m² at one flux and outdoor temperature. */
     record State(
@@ -49,43 +51,50 @@ final class SectionFloor {
         this.plane = plane;
         this.geometry = geometry;
         this.response = response;
+        this.buffer = response.newState();
         this.downwardResistance = plane.resistanceBelow + 1 / geometry.coefficientBelow();
     }
 
-    /** The floor giving a flux at an outdoor temperature. */
+    /** The floor giving a flux of at most {@link #HIGHEST_FLUX} at an outdoor temperature. */
     State at(double flux, double outdoor) {
         double below = (plane.downConstant + plane.downSlope * outdoor) / plane.downCoefficient;
-        double atZero = response.at(flux, plane.room, 0).downwardFlux();
-        double perKelvin = response.at(flux, plane.room, 1).downwardFlux() - atZero;
+        double atZero = downward(flux, 0);
+        double perKelvin = downward(flux, 1) - atZero;
         double open = 1 - plane.downCoefficient * downwardResistance;
         double equivalent =
                 (plane.downCoefficient * below + atZero * open) / (plane.downCoefficient - perKelvin * open);
         return solved(flux, equivalent, outdoor);
     }
 
+    private double downward(double flux, double below) {
+        response.evaluate(flux, plane.room, below, buffer);
+        return buffer.downwardFlux();
+    }
+
     private State solved(double flux, double below, double outdoor) {
-        FloorState state = response.at(flux, plane.room, below);
-        double heaterPlane = below + state.downwardFlux() * downwardResistance;
+        response.evaluate(flux, plane.room, below, buffer);
+        double heaterPlane = below + buffer.downwardFlux() * downwardResistance;
+        double[] faces = new double[buffer.layers()];
+        Arrays.setAll(faces, buffer::warmFace);
         return new State(
                 flux,
                 below,
-                state.mean(),
-                state.maximum(),
-                state.minimum(),
+                buffer.surfaceMean(),
+                buffer.surfaceMaximum(),
+                buffer.surfaceMinimum(),
                 heaterPlane,
-                state.downwardFlux(),
+                buffer.downwardFlux(),
                 plane.edgeFlux(heaterPlane, outdoor),
-                state.heater(),
-                state.water(),
-                state.faces());
+                buffer.heaterTemperature(),
+                plane.plan.heater().water() ? buffer.waterTemperature() : Double.NaN,
+                faces);
     }
 
     /** How a temperature of the floor rises over the room's with the upward and the downward flux; at one flux both are linear. */
     FluxSplit split(Rising temperature, double flux, double outdoor) {
         State here = at(flux, outdoor);
         State cooler = solved(flux, here.below() - 10, outdoor);
-        double perDownward =
-                (temperature.of(cooler) - temperature.of(here)) / (cooler.downward() - here.downward());
+        double perDownward = (temperature.of(cooler) - temperature.of(here)) / (cooler.downward() - here.downward());
         double left = temperature.of(here) - plane.room - perDownward * here.downward();
         return new FluxSplit(flux > 0 ? left / flux : 0, perDownward);
     }
@@ -109,14 +118,16 @@ final class SectionFloor {
         List<LayerLimit> layers = plane.plan.layerLimits();
         for (int i = 0; i < layers.size(); i++) {
             int layer = layers.get(i).layer();
-            bounds.add(new Bound(2 + i, state -> state.faces()[layer], in[layers.get(i).maximum()]));
+            bounds.add(new Bound(
+                    2 + i, state -> state.faces()[layer], in[layers.get(i).maximum()]));
         }
         int last = 2 + layers.size();
         if (plane.plan.heater().hasDensity()) {
             bounds.add(new Bound(last, State::made, plane.density()));
         }
         if (plane.plan.heater().supplyTemperature() != Stack.NONE) {
-            bounds.add(new Bound(last + 1, State::water, meanWater(in[plane.plan.heater().supplyTemperature()])));
+            bounds.add(new Bound(
+                    last + 1, State::water, meanWater(in[plane.plan.heater().supplyTemperature()])));
         }
         return bounds;
     }
@@ -180,7 +191,7 @@ final class SectionFloor {
         if (required == 0) {
             return true;
         }
-        if (plane.plan.heater().hasDensity() && required > plane.density()) {
+        if (required > HIGHEST_FLUX || plane.plan.heater().hasDensity() && required > plane.density()) {
             return false;
         }
         State state = at(required, outdoor);
@@ -195,11 +206,11 @@ final class SectionFloor {
         double low = 0;
         double high = 50;
         while (number.of(at(high, outdoor)) < maximum) {
-            low = high;
-            high *= 2;
-            if (high > HIGHEST_FLUX) {
+            if (high == HIGHEST_FLUX) {
                 return Double.POSITIVE_INFINITY;
             }
+            low = high;
+            high = Math.min(HIGHEST_FLUX, 2 * high);
         }
         return root(number, maximum, outdoor, low, high);
     }

@@ -3,13 +3,15 @@ package org.treadwarm.sizing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.treadwarm.physics.section.Condition;
 import org.treadwarm.physics.section.FloorHeater;
 import org.treadwarm.physics.section.FloorHeater.HeatingCable;
 import org.treadwarm.physics.section.FloorHeater.WaterPipe;
 import org.treadwarm.physics.section.FloorLayer;
-import org.treadwarm.physics.section.FloorResponse;
 import org.treadwarm.physics.section.FloorLayer.Resisting;
 import org.treadwarm.physics.section.FloorLayer.Solid;
+import org.treadwarm.physics.section.FloorResponse;
+import org.treadwarm.physics.section.FloorSection;
 import org.treadwarm.sizing.Plan.HeaterPlan;
 import org.treadwarm.survey.Heater;
 
@@ -33,9 +35,15 @@ record SectionGeometry(double spacing, List<FloorLayer> layers, FloorHeater heat
         layers = List.copyOf(layers);
     }
 
-    /** Solves it. */
+    /**
+     * Solves it.
+     *
+     * @throws IllegalArgumentException if it cannot be built
+     * @throws IllegalStateException if its error does not fall within the cells allowed
+     */
     FloorResponse solve() {
-        return FloorResponse.of(spacing, layers, heater, coefficientBelow);
+        Condition.Film film = new Condition.Film(0, coefficientBelow);
+        return FloorResponse.of(new FloorSection(spacing, layers, heater, film, film), () -> false);
     }
 
     /** What was made of a floor: its geometry, or why there is none. */
@@ -75,8 +83,7 @@ record SectionGeometry(double spacing, List<FloorLayer> layers, FloorHeater heat
                 : new HeatingCable(holding, depth, diameter, 0);
         below(floor, whole, layers);
         double rest = Math.max(LEAST_BELOW, floor.resistanceDown - floor.resistanceBelow);
-        return new Made(
-                Optional.of(new SectionGeometry(in[heater.spacing()], layers, embedded, 1 / rest)), "");
+        return new Made(Optional.of(new SectionGeometry(in[heater.spacing()], layers, embedded, 1 / rest)), "");
     }
 
     private static void below(FloorEvaluation floor, Evaluation whole, List<FloorLayer> layers) {

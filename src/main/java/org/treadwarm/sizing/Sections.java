@@ -16,13 +16,12 @@ final class Sections {
     /** The most floors that one sizing solves anew, so that its time is bounded. */
     private static final int MOST_NEW = 100;
 
-    private static final Map<SectionGeometry, FloorResponse> KEPT =
-            new LinkedHashMap<>(2 * MOST_KEPT, 0.75f, true) {
-                @Override
-                protected boolean removeEldestEntry(Map.Entry<SectionGeometry, FloorResponse> eldest) {
-                    return size() > MOST_KEPT;
-                }
-            };
+    private static final Map<SectionGeometry, FloorResponse> KEPT = new LinkedHashMap<>(2 * MOST_KEPT, 0.75f, true) {
+        @Override
+        protected boolean removeEldestEntry(Map.Entry<SectionGeometry, FloorResponse> eldest) {
+            return size() > MOST_KEPT;
+        }
+    };
 
     private int solved;
     private String whyNot = "";

@@ -120,7 +120,11 @@ public final class PlainSheet {
     }
 
     private void state(boolean solved, double surface, double heater, double down, double edge, double power) {
-        number(solved ? "warmest point of the surface" : "mean surface temperature", OptionalDouble.of(surface), 1, "°C");
+        number(
+                solved ? "warmest point of the surface" : "mean surface temperature",
+                OptionalDouble.of(surface),
+                1,
+                "°C");
         number(solved ? "cable or pipe, outside" : "heater plane temperature", OptionalDouble.of(heater), 1, "°C");
         number("downward flux", OptionalDouble.of(down), 1, "W/m2");
         number("edge flux", OptionalDouble.of(edge), 1, "W/m2");

@@ -96,7 +96,11 @@ final class SizingApi {
             json(ctx, 200, SectionEvaluation.of(question, () -> System.nanoTime() > end));
         } catch (CancellationException e) {
             Problems.plain(
-                    ctx, 422, "too-long", "This section takes too long", "It was not solved within " + LONGEST.toSeconds() + " seconds.");
+                    ctx,
+                    422,
+                    "too-long",
+                    "This section takes too long",
+                    "It was not solved within " + LONGEST.toSeconds() + " seconds.");
         } catch (IllegalStateException e) {
             Problems.plain(ctx, 422, "not-solved", "This section cannot be solved", e.getMessage() + ".");
         }
