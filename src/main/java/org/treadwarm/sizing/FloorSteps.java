@@ -28,20 +28,9 @@ final class FloorSteps {
         demand();
         margin(answer);
         boolean section = answer.section().isPresent();
-        if (section && floor.heater().water()) {
-            int spread = floor.heater().spread();
-            if (spread == Stack.NONE) {
-                steps.add(at + "/section/spread", "spread-usual", "sigma");
-            } else {
-                steps.add(
-                        at + "/section/spread",
-                        "spread-given",
-                        "sigma",
-                        Symbol.of("sigma_given", addresses.input(spread)));
-            }
-        }
         state(at, "/requiredFlux", section ? at + "/section/atRequiredFlux" : "");
         state(at + "/atCarryingFlux", "/carryingFlux", section ? at + "/section/atCarryingFlux" : "");
+        answer.section().ifPresent(solved -> new SectionSteps(addresses, steps, floor).all(solved));
         if (answer.installedPower().isPresent()) {
             if (floor.heater().density() == Stack.NONE) {
                 steps.add(
@@ -115,7 +104,7 @@ final class FloorSteps {
         Symbol flux = answered("q", fluxKey);
         Symbol heater = section.isEmpty()
                 ? plane(here, flux)
-                : solved(here, section, flux, Symbol.of("q_u", Addresses.sizing(here + "/downwardFlux")));
+                : Symbol.of("theta_h", Addresses.sizing(section + "/heaterPlane"));
         steps.add(
                 here + "/downwardFlux",
                 "downward-flux",
@@ -137,32 +126,6 @@ final class FloorSteps {
                 "P",
                 Symbol.of("q_h", Addresses.sizing(here + "/heaterFlux")),
                 answered("A_F", "/area"));
-    }
-
-    /** Steps of a solved section; gives its mean heater plane. */
-    private Symbol solved(String here, String section, Symbol flux, Symbol down) {
-        rise(here + "/surfaceTemperature", section + "/surface", flux, down);
-        rise(here + "/heaterTemperature", section + "/heater", flux, down);
-        rise(section + "/heaterPlane", section + "/plane", flux, down);
-        steps.add(
-                section + "/surfaceMean",
-                "surface-temperature",
-                "theta_F",
-                Symbol.of("theta_i", addresses.temperature(floor.room())),
-                flux);
-        return Symbol.of("theta_h", Addresses.sizing(section + "/heaterPlane"));
-    }
-
-    private void rise(String pointer, String split, Symbol flux, Symbol down) {
-        steps.add(
-                pointer,
-                "section-temperature",
-                "theta",
-                Symbol.of("theta_i", addresses.temperature(floor.room())),
-                Symbol.of("s_o", Addresses.sizing(split + "/perUpwardFlux")),
-                flux,
-                Symbol.of("s_u", Addresses.sizing(split + "/perDownwardFlux")),
-                down);
     }
 
     /** Steps of the plane model; gives its heater plane. */

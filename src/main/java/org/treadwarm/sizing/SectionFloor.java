@@ -93,8 +93,9 @@ final class SectionFloor {
     /** How a temperature of the floor rises over the room's with the upward and the downward flux; at one flux both are linear. */
     FluxSplit split(Rising temperature, double flux, double outdoor) {
         State here = at(flux, outdoor);
-        State cooler = solved(flux, here.below() - 10, outdoor);
-        double perDownward = (temperature.of(cooler) - temperature.of(here)) / (cooler.downward() - here.downward());
+        // Away from the room's temperature, so that the warmest point stays where it is.
+        State near = solved(flux, here.below() + Math.copySign(0.1, here.below() - plane.room), outdoor);
+        double perDownward = (temperature.of(near) - temperature.of(here)) / (near.downward() - here.downward());
         double left = temperature.of(here) - plane.room - perDownward * here.downward();
         return new FluxSplit(flux > 0 ? left / flux : 0, perDownward);
     }
