@@ -1,13 +1,13 @@
 package org.treadwarm.sizing;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.BooleanSupplier;
 import org.treadwarm.physics.envelope.HeatFlow;
 import org.treadwarm.physics.floor.HeatedFloor;
 import org.treadwarm.physics.warmup.BuildUp;
 import org.treadwarm.physics.warmup.Film;
-import org.treadwarm.physics.warmup.Moment;
 import org.treadwarm.physics.warmup.PowerCut;
 import org.treadwarm.physics.warmup.Reheat;
 import org.treadwarm.physics.warmup.Room;
@@ -81,30 +81,57 @@ public record WarmUpEvaluation(
     }
 
     /**
+     * The room above the floor, everything per m² of heated floor; see {@link Room}.
+     *
+     * @param airCapacity J/(m²·K)
+     * @param massCapacity J/(m²·K)
+     * @param massCoupling W/(m²·K)
+     * @param lossCoefficient W/(m²·K)
+     * @param outdoorTemperature degrees Celsius
+     * @param otherGain W/m²
+     */
+    public record RoomHeat(
+            double airCapacity,
+            double massCapacity,
+            double massCoupling,
+            double lossCoefficient,
+            double outdoorTemperature,
+            double otherGain) {
+        Room room() {
+            return new Room(airCapacity, massCapacity, massCoupling, lossCoefficient, outdoorTemperature, otherGain);
+        }
+    }
+
+    /**
      * What is asked of it.
      *
      * @param density heat of the heater, W/m²
-     * @param watched the temperature that counts
+     * @param operative whether the mean of air and mass counts, not the air
      * @param from setback, degrees Celsius
      * @param to setpoint, degrees Celsius, at least the setback
      * @param within hours in which the room is to be warm; empty for none
      * @param lookedAt hours after which nothing more is looked at
      */
     public record Task(
-            double density, Watched watched, double from, double to, OptionalDouble within, double lookedAt) {}
+            double density, boolean operative, double from, double to, OptionalDouble within, double lookedAt) {
+        Watched watched() {
+            return operative ? Watched.OPERATIVE : Watched.AIR;
+        }
+    }
 
     /** Evaluates a floor that intake accepted; CancellationException when it is stopped. */
-    public static WarmUpEvaluation of(Floor floor, Room room, Task task, BooleanSupplier stopped) {
+    public static WarmUpEvaluation of(Floor floor, RoomHeat roomHeat, Task task, BooleanSupplier stopped) {
         BuildUp buildUp = floor.buildUp();
+        Room room = roomHeat.room();
         WarmUp warmUp = new WarmUp(buildUp, room);
         State start = warmUp.heldByHeating(task.from());
         Wait wait = warmUp.waitFor(start, task.density(), task.watched(), task.to(), task.lookedAt() * HOUR, stopped);
-        boolean warmAtOnce = temperature(warmUp.moment(start), task.watched()) >= task.to();
+        boolean warmAtOnce = warmUp.value(start, task.watched()) >= task.to();
         OptionalDouble hours = warmAtOnce ? OptionalDouble.of(0) : hours(wait.seconds());
         OptionalDouble needed = OptionalDouble.empty();
         OptionalDouble reheat = OptionalDouble.empty();
         if (task.within().isPresent()) {
-            var found = Reheat.of(
+            Optional<Reheat> found = Reheat.of(
                     buildUp,
                     room,
                     task.watched(),
@@ -134,15 +161,6 @@ public record WarmUpEvaluation(
         return warmUp.curve(start, density, hours * HOUR, PARTS, stopped).moments().stream()
                 .map(moment -> new CurvePoint(moment.seconds() / HOUR, moment.surface(), moment.air(), moment.heater()))
                 .toList();
-    }
-
-    private static double temperature(Moment moment, Watched watched) {
-        return switch (watched) {
-            case AIR -> moment.air();
-            case OPERATIVE -> (moment.air() + moment.mass()) / 2;
-            case SURFACE -> moment.surface();
-            case HEATER -> moment.heater();
-        };
     }
 
     private static OptionalDouble hours(OptionalDouble seconds) {

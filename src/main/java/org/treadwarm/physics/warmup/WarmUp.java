@@ -92,6 +92,11 @@ public final class WarmUp {
         return chain.moment(0, checked(state).temperatures());
     }
 
+    /** One temperature of a state, degrees Celsius. */
+    public double value(State state, Watched watched) {
+        return chain.value(watched, checked(state).temperatures());
+    }
+
     /** Waits, with the heater at a density, until a temperature has come to a target from either side, for so long at most. */
     public Wait waitFor(
             State start, double density, Watched watched, double target, double mostSeconds, BooleanSupplier stopped) {
