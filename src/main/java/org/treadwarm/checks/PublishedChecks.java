@@ -30,7 +30,7 @@ public final class PublishedChecks {
         return CASES.get(set);
     }
 
-    /** The published cases on a file's subjects that are not run, with the reasons; none for {@link CaseSet#TABLES}. */
+    /** The published cases on a file's subjects that are not run, with the reasons; none for most files. */
     public static List<LeftOut> leftOut(CaseSet set) {
         return CaseFile.leftOut(set);
     }

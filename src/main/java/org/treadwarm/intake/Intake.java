@@ -57,4 +57,14 @@ public final class Intake {
         }
         return findings.isEmpty() ? new Outcome.Accepted<>(question) : new Outcome.Refused<>(findings.all());
     }
+
+    /** Reads one heated floor together with the setback to warm up from. */
+    public static Outcome<WarmUpQuestion> warmUp(JsonNode tree) {
+        Findings findings = new Findings();
+        WarmUpQuestion question = (WarmUpQuestion) new Binder(findings).bind(tree, WarmUpQuestion.class, "");
+        if (question != null) {
+            question.check(findings);
+        }
+        return findings.isEmpty() ? new Outcome.Accepted<>(question) : new Outcome.Refused<>(findings.all());
+    }
 }

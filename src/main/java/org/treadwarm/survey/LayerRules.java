@@ -17,6 +17,9 @@ final class LayerRules {
     private static final String WAYS =
             "one of: resistance; thickness with conductivity; thickness with material; airGap";
 
+    /** The most layers on one side of a heater whose warming up is computed. */
+    private static final int MOST_WARMED = 20;
+
     private final Findings findings;
 
     LayerRules(Findings findings) {
@@ -61,6 +64,34 @@ final class LayerRules {
                     frames.size() + " frames",
                     "too many frames cross each other here",
                     "at most " + CombinedMethod.MOST_FRAMES + " that are not in register");
+        }
+    }
+
+    /** The layers hold heat, so their density and specific heat must be known wherever they are no bare resistance. */
+    void layersThatHoldHeat(String pointer, List<Layer> layers) {
+        if (layers.size() > MOST_WARMED) {
+            findings.add(pointer, layers.size() + " layers", "there are too many layers", "at most " + MOST_WARMED);
+        }
+        layers(pointer, layers);
+        for (int i = 0; i < layers.size(); i++) {
+            Layer layer = layers.get(i);
+            String at = pointer + "/" + i;
+            if (!findings.clean(at) || !findings.clean(at, "/material") || LayerMatter.isResistanceAlone(layer)) {
+                continue;
+            }
+            List<String> missing = LayerMatter.of(layer).missing();
+            if (missing.contains("density")) {
+                findings.missing(
+                        at + "/density",
+                        "the density is missing, and no material tells it, so the heat the layer holds is not known",
+                        "0.5 to 25000 kg/m3");
+            }
+            if (missing.contains("specificHeat")) {
+                findings.missing(
+                        at + "/specificHeat",
+                        "the specific heat capacity is missing, and no material tells it, so the heat the layer holds is not known",
+                        "50 to 20000 J/(kg.K)");
+            }
         }
     }
 

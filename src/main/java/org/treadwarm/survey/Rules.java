@@ -1,5 +1,7 @@
 package org.treadwarm.survey;
 
+import java.util.List;
+
 /** What must hold between the parts of a survey. Parts that have a problem of their own already are not judged again. */
 public final class Rules {
     /** The most unheated spaces that float; their temperatures are solved together. */
@@ -37,6 +39,11 @@ public final class Rules {
     /** Adds what is wrong within one assembly, addressed from the root. */
     public static void checkAssembly(Assembly assembly, Findings findings) {
         new LayerRules(findings).assembly("", assembly);
+    }
+
+    /** Adds what is wrong with layers whose warming up is to be computed. */
+    public static void checkLayersThatHoldHeat(String pointer, List<Layer> layers, Findings findings) {
+        new LayerRules(findings).layersThatHoldHeat(pointer, layers);
     }
 
     private void check() {

@@ -15,7 +15,7 @@ import java.util.OptionalDouble;
  * @param density kg/m³
  * @param specificHeat J/(kg·K)
  * @param vapourResistance vapour resistance factor mu as printed, wet to dry; empty when unknown
- * @param confidence "read" or "memory"
+ * @param confidence "read" or "memory"; the source tells what is from elsewhere than the conductivity
  * @param source where the row comes from
  */
 public record Material(

@@ -24,6 +24,8 @@ public enum QuantityKind {
     SPEED("m/s", "a speed", 0),
     DENSITY("kg/m3", "a density", 0),
     SPECIFIC_HEAT("J/(kg.K)", "a specific heat capacity", 0),
+    AREAL_HEAT_CAPACITY("J/(m2.K)", "a heat capacity per area", 0),
+    DURATION("h", "a time", 0),
     RATIO("", "a pure ratio", 0);
 
     private final String siUnit;

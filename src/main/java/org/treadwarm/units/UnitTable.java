@@ -2,10 +2,12 @@ package org.treadwarm.units;
 
 import static org.treadwarm.units.QuantityKind.AIR_FLOW;
 import static org.treadwarm.units.QuantityKind.AREA;
+import static org.treadwarm.units.QuantityKind.AREAL_HEAT_CAPACITY;
 import static org.treadwarm.units.QuantityKind.AREA_PER_LENGTH;
 import static org.treadwarm.units.QuantityKind.CHANGE_RATE;
 import static org.treadwarm.units.QuantityKind.CONDUCTIVITY;
 import static org.treadwarm.units.QuantityKind.DENSITY;
+import static org.treadwarm.units.QuantityKind.DURATION;
 import static org.treadwarm.units.QuantityKind.HEAT_FLUX;
 import static org.treadwarm.units.QuantityKind.LENGTH;
 import static org.treadwarm.units.QuantityKind.LINEAR_POWER;
@@ -135,6 +137,7 @@ public final class UnitTable {
         heat(units);
         air(units);
         matter(units);
+        times(units);
         add(units, RATIO, "%", 1, 100, SI, "percent");
         return List.copyOf(units);
     }
@@ -293,6 +296,26 @@ public final class UnitTable {
         add(units, SPECIFIC_HEAT, "J/(kg.K)", 1, 1, SI, "J/kgK", "J/kg/K", "J/(kgK)");
         add(units, SPECIFIC_HEAT, "kJ/(kg.K)", 1000, 1, SI, "kJ/kgK", "kJ/kg/K", "kJ/(kgK)");
         add(units, SPECIFIC_HEAT, "Btu/(lb.°F)", BTU_JOULES * 9, POUND * 5, BTU, "Btu/lb.°F", "Btu/(lb.F)", "Btu/lb.F");
+    }
+
+    private static void times(List<Unit> units) {
+        add(units, AREAL_HEAT_CAPACITY, "J/(m2.K)", 1, 1, SI, "J/m2K", "J/m2.K", "J/m2/K", "J/(m2K)");
+        add(units, AREAL_HEAT_CAPACITY, "kJ/(m2.K)", 1000, 1, SI, "kJ/m2K", "kJ/m2.K", "kJ/m2/K", "kJ/(m2K)");
+        add(units, AREAL_HEAT_CAPACITY, "W.h/(m2.K)", 3600, 1, SI, "Wh/(m2.K)", "Wh/m2K", "Wh/m2.K", "Wh/(m2K)");
+        add(
+                units,
+                AREAL_HEAT_CAPACITY,
+                "Btu/(ft2.°F)",
+                BTU_JOULES * 9,
+                FOOT * FOOT * 5,
+                BTU,
+                "Btu/ft2.°F",
+                "Btu/(ft2.F)",
+                "Btu/ft2.F");
+        add(units, DURATION, "h", 1, 1, SI, "hr", "hour", "hours");
+        add(units, DURATION, "min", 1, 60, SI, "minute", "minutes");
+        add(units, DURATION, "s", 1, 3600, SI);
+        add(units, DURATION, "d", 24, 1, SI, "day", "days");
     }
 
     private static void add(

@@ -24,6 +24,17 @@ class TablesTest {
         });
     }
 
+    /** Of the rows with but a range of conductivities, the maker's sheet must tell the rest too. */
+    @Test
+    void everyMaterialWithItsConductivityHoldsHeat() {
+        assertThat(Materials.all())
+                .filteredOn(row -> row.conductivity().isPresent())
+                .allSatisfy(row -> {
+                    assertThat(row.density()).as(row.name()).isPresent();
+                    assertThat(row.specificHeat()).as(row.name()).isPresent();
+                });
+    }
+
     @Test
     void materialsAreFoundByEitherNameAndAnyCapitals() {
         Materials.all().forEach(row -> {

@@ -90,6 +90,8 @@ final class UnitOracle {
         si.put(QuantityKind.SPEED, METRE.divide(SECOND));
         si.put(QuantityKind.DENSITY, KILOGRAM.divide(CUBIC_METRE));
         si.put(QuantityKind.SPECIFIC_HEAT, JOULE.divide(KILOGRAM.multiply(KELVIN)));
+        si.put(QuantityKind.AREAL_HEAT_CAPACITY, JOULE.divide(SQUARE_METRE.multiply(KELVIN)));
+        si.put(QuantityKind.DURATION, HOUR);
         si.put(QuantityKind.RATIO, AbstractUnit.ONE);
         return si;
     }
@@ -112,8 +114,20 @@ final class UnitOracle {
         units.put("W/m", WATT.divide(METRE));
         units.put("W/ft", WATT.divide(FOOT));
         units.put("V", VOLT);
+        times(units);
         units.put("%", PERCENT);
         return units;
+    }
+
+    private static void times(Map<String, Unit<?>> units) {
+        units.put("J/(m2.K)", JOULE.divide(SQUARE_METRE.multiply(KELVIN)));
+        units.put("kJ/(m2.K)", MetricPrefix.KILO(JOULE).divide(SQUARE_METRE.multiply(KELVIN)));
+        units.put("W.h/(m2.K)", WATT.multiply(HOUR).divide(SQUARE_METRE.multiply(KELVIN)));
+        units.put("Btu/(ft2.°F)", BTU.divide(SQUARE_FOOT.multiply(RANKINE)));
+        units.put("h", HOUR);
+        units.put("min", MINUTE);
+        units.put("s", SECOND);
+        units.put("d", HOUR.multiply(24));
     }
 
     private static void lengths(Map<String, Unit<?>> units) {

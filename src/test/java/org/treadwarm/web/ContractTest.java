@@ -71,6 +71,7 @@ class ContractTest {
                         "/api/v1/health",
                         "/api/v1/sizings",
                         "/api/v1/assemblies/evaluations",
+                        "/api/v1/warmups",
                         "/api/v1/materials",
                         "/api/v1/jobs",
                         "/api/v1/jobs/{id}",

@@ -89,6 +89,11 @@ class MutatedRequestsTest {
                         "/api/v1/assemblies/evaluations",
                         key,
                         RunningServer.studio().at("/assemblies/shed wall").toString()),
+                RawRequest.with(
+                        "POST",
+                        "/api/v1/warmups",
+                        key,
+                        WarmUpsApiTest.question().toString()),
                 RawRequest.with("POST", jobs, key, body),
                 RawRequest.with("PUT", jobs + "/" + job, key, body).header("If-Match", "\"1\""));
     }

@@ -8,10 +8,10 @@ package org.treadwarm.physics.floor;
  */
 public final class HeatedFloor {
     /** Coefficient of the basic characteristic. */
-    static final double COEFFICIENT = 8.92;
+    public static final double COEFFICIENT = 8.92;
 
     /** Exponent of the basic characteristic. */
-    static final double EXPONENT = 1.1;
+    public static final double EXPONENT = 1.1;
 
     private HeatedFloor() {}
 

@@ -66,6 +66,17 @@ final class AnswerSchemas {
             Map.entry("conductivityTo", "W/(m.K)"),
             Map.entry("density", "kg/m3"),
             Map.entry("specificHeat", "J/(kg.K)"),
+            Map.entry("hours", "h"),
+            Map.entry("reached", "°C"),
+            Map.entry("steadyDensity", "W/m2"),
+            Map.entry("densityNeeded", "W/m2"),
+            Map.entry("WarmUpEvaluation.reheat", "W/m2 of heated floor"),
+            Map.entry("hour", "h"),
+            Map.entry("CurvePoint.floor", "°C"),
+            Map.entry("CurvePoint.air", "°C"),
+            Map.entry("CurvePoint.heater", "°C"),
+            Map.entry("hoursToFive", "h"),
+            Map.entry("hoursToFreezing", "h"),
             Map.entry("voidToGround", "W/(m2.K)"),
             Map.entry("voidToOutdoors", "W/(m2.K)"));
 
@@ -105,11 +116,11 @@ final class AnswerSchemas {
     private boolean property(ObjectNode property, RecordComponent component) {
         Class<?> type = component.getType();
         if (type == OptionalDouble.class) {
-            number(property, component.getName());
+            number(property, component.getDeclaringRecord(), component.getName());
             return true;
         }
         if (type == Optional.class) {
-            held(property, argument(component.getGenericType()), component.getName());
+            held(property, argument(component.getGenericType()), component);
             return true;
         }
         if (type == Map.class) {
@@ -119,20 +130,20 @@ final class AnswerSchemas {
         }
         if (type == List.class) {
             property.put("type", "array");
-            held(property.putObject("items"), argument(component.getGenericType()), component.getName());
+            held(property.putObject("items"), argument(component.getGenericType()), component);
             return false;
         }
-        held(property, type, component.getName());
+        held(property, type, component);
         return false;
     }
 
-    private void held(ObjectNode property, Class<?> type, String name) {
+    private void held(ObjectNode property, Class<?> type, RecordComponent component) {
         if (type == String.class) {
             property.put("type", "string");
         } else if (type == Instant.class) {
             property.put("type", "string").put("format", "date-time");
         } else if (type == double.class) {
-            number(property, name);
+            number(property, component.getDeclaringRecord(), component.getName());
         } else if (type == int.class || type == long.class) {
             property.put("type", "integer");
         } else if (type == boolean.class) {
@@ -150,9 +161,11 @@ final class AnswerSchemas {
         }
     }
 
-    private static void number(ObjectNode property, String name) {
+    /** The unit goes by the name alone, unless the record gives that name another meaning. */
+    private static void number(ObjectNode property, Class<?> record, String name) {
+        String unit = UNITS.getOrDefault(name, "a pure number");
         property.put("type", "number");
-        property.put("description", UNITS.getOrDefault(name, "a pure number"));
+        property.put("description", UNITS.getOrDefault(record.getSimpleName() + "." + name, unit));
     }
 
     private static Class<?> argument(Type type) {

@@ -14,10 +14,12 @@ public final class Api {
     public static final String ROOT = "/api/v1";
 
     private final SizingApi sizing;
+    private final WarmUpApi warmUps;
     private final JobsApi jobs;
 
     public Api(KeyGuard keys, JobDesk desk) {
         this.sizing = new SizingApi(keys);
+        this.warmUps = new WarmUpApi(keys);
         this.jobs = new JobsApi(keys, desk);
     }
 
@@ -43,6 +45,7 @@ public final class Api {
         routes.post(ROOT + "/sizings", sizing::size);
         routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate);
         routes.post(ROOT + "/sections", sizing::section);
+        routes.post(ROOT + "/warmups", warmUps::answer);
         get(routes, ROOT + "/materials", sizing::materials);
         get(routes, ROOT + "/jobs", jobs::list);
         routes.post(ROOT + "/jobs", jobs::create);
