@@ -62,6 +62,7 @@ final class Bindings {
                         UnitChecks.bindings(),
                         HeatedFloorChecks.bindings(),
                         WaterFloorChecks.bindings(),
+                        CircuitChecks.bindings(),
                         TableChecks.bindings())
                 .forEach(all::putAll);
         return Map.copyOf(all);
