@@ -63,6 +63,7 @@ final class Bindings {
                         HeatedFloorChecks.bindings(),
                         WaterFloorChecks.bindings(),
                         CircuitChecks.bindings(),
+                        ElectricChecks.bindings(),
                         TableChecks.bindings())
                 .forEach(all::putAll);
         return Map.copyOf(all);

@@ -3,9 +3,11 @@ package org.treadwarm.sizing;
 import java.util.List;
 import org.treadwarm.physics.PracticeLimit;
 import org.treadwarm.physics.PracticeLimit.Sense;
+import org.treadwarm.physics.electric.BreakerPractice;
+import org.treadwarm.tables.Breakers;
 import org.treadwarm.tables.PracticeLimits;
 
-/** The limits of practice, by subject. */
+/** The limits of practice, by subject, and the ratings of breakers. */
 public final class Practice {
     private Practice() {}
 
@@ -17,6 +19,26 @@ public final class Practice {
     /** Limits of electric cables. */
     public static List<PracticeLimit> electric() {
         return of("electric");
+    }
+
+    /** Breakers of European practice. */
+    public static BreakerPractice europeanBreakers() {
+        return breakers("european");
+    }
+
+    /** Breakers of US practice, used to 80 % for loads that last for hours. */
+    public static BreakerPractice usBreakers() {
+        return breakers("us");
+    }
+
+    private static BreakerPractice breakers(String practice) {
+        List<Breakers.Row> rows = Breakers.all().stream()
+                .filter(row -> row.practice().equals(practice))
+                .toList();
+        return new BreakerPractice(
+                rows.stream().map(Breakers.Row::rating).toList(),
+                rows.get(0).continuousShare(),
+                rows.get(0).source());
     }
 
     private static List<PracticeLimit> of(String subject) {
