@@ -6,24 +6,18 @@ import java.util.Locale;
 /** The sets of cases, in the order in which they are shown. */
 public enum CaseSet {
     /** Envelope, ground, rooms, moisture and units. */
-    ENVELOPE("envelope"),
+    ENVELOPE,
     /** Heated floors. */
-    FLOOR("floor", "floor-heaters"),
+    FLOOR,
     /** Rows of the program's own tables, and a few more values. */
-    TABLES("tables");
-
-    private final List<String> files;
-
-    CaseSet(String... files) {
-        this.files = List.of(files);
-    }
+    TABLES;
 
     /** The names of its files. */
     List<String> files() {
-        return files;
+        return this == FLOOR ? List.of(word(), "floor-heaters") : List.of(word());
     }
 
-    /** The name of its part of the cases that are left out. */
+    /** The name of its first file, and of its part of the cases that are left out. */
     String word() {
         return name().toLowerCase(Locale.ROOT);
     }

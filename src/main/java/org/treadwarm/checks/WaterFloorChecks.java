@@ -61,11 +61,11 @@ final class WaterFloorChecks {
     }
 
     private static DoubleStream values(Line table) {
-        return table.entries().stream().mapToDouble(Line.Entry::value);
+        return table.points().stream().mapToDouble(Line.Point::value);
     }
 
     private static DoubleStream values(Grid table) {
-        return table.entries().stream().mapToDouble(Grid.Entry::value);
+        return table.cells().stream().mapToDouble(Grid.Cell::value);
     }
 
     private static Map<String, DoubleStream> screedCharacteristic(Inputs given) {

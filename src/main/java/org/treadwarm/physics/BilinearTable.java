@@ -1,15 +1,17 @@
 package org.treadwarm.physics;
 
 import java.util.Map;
+import java.util.NavigableMap;
 import java.util.Set;
 import java.util.TreeMap;
+import java.util.stream.Collectors;
 
 /** A function known on a grid of two arguments, taken as bilinear between neighbours and as unknown outside. */
 public final class BilinearTable {
     private final String rowName;
-    private final TreeMap<Double, LinearTable> rows;
+    private final NavigableMap<Double, LinearTable> rows;
 
-    private BilinearTable(String rowName, TreeMap<Double, LinearTable> rows) {
+    private BilinearTable(String rowName, NavigableMap<Double, LinearTable> rows) {
         this.rowName = rowName;
         this.rows = rows;
     }
@@ -23,8 +25,7 @@ public final class BilinearTable {
      * @throws IllegalArgumentException unless there are rows, all with the same columns and finite numbers
      */
     public static BilinearTable of(String rowName, String columnName, Map<Double, Map<Double, Double>> values) {
-        Set<Set<Double>> columns =
-                values.values().stream().map(Map::keySet).collect(java.util.stream.Collectors.toSet());
+        Set<Set<Double>> columns = values.values().stream().map(Map::keySet).collect(Collectors.toSet());
         if (columns.size() != 1) {
             throw new IllegalArgumentException(
                     "a table over the " + rowName + " needs rows with the same columns, not " + columns);

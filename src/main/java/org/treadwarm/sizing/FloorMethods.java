@@ -46,13 +46,13 @@ public final class FloorMethods {
     private static LinearTable line(Line table) {
         return LinearTable.of(
                 table.argument(),
-                table.entries().stream().collect(Collectors.toMap(Line.Entry::argument, Line.Entry::value)));
+                table.points().stream().collect(Collectors.toMap(Line.Point::argument, Line.Point::value)));
     }
 
     private static BilinearTable grid(Grid table) {
-        Map<Double, Map<Double, Double>> rows = table.entries().stream()
+        Map<Double, Map<Double, Double>> rows = table.cells().stream()
                 .collect(Collectors.groupingBy(
-                        Grid.Entry::row, TreeMap::new, Collectors.toMap(Grid.Entry::column, Grid.Entry::value)));
+                        Grid.Cell::row, TreeMap::new, Collectors.toMap(Grid.Cell::column, Grid.Cell::value)));
         return BilinearTable.of(table.row(), table.column(), rows);
     }
 }

@@ -16,15 +16,15 @@ public final class FloorFactors {
      * A factor over one argument.
      *
      * @param argument what it depends on, with its unit
-     * @param entries in the order of the table
+     * @param points in the order of the table
      */
-    public record Line(String argument, List<Entry> entries) {
+    public record Line(String argument, List<Point> points) {
         public Line {
-            entries = List.copyOf(entries);
+            points = List.copyOf(points);
         }
 
         /** One row. */
-        public record Entry(double argument, double value, String source) {}
+        public record Point(double argument, double value, String source) {}
     }
 
     /**
@@ -32,15 +32,15 @@ public final class FloorFactors {
      *
      * @param row what it depends on first, with its unit
      * @param column what it depends on second, with its unit
-     * @param entries in the order of the table
+     * @param cells in the order of the table
      */
-    public record Grid(String row, String column, List<Entry> entries) {
+    public record Grid(String row, String column, List<Cell> cells) {
         public Grid {
-            entries = List.copyOf(entries);
+            cells = List.copyOf(cells);
         }
 
         /** One row. */
-        public record Entry(double row, double column, double value, String source) {}
+        public record Cell(double row, double column, double value, String source) {}
     }
 
     /** a_T of types A and C by the resistance of the covering. */
@@ -94,21 +94,21 @@ public final class FloorFactors {
     }
 
     private static Line line(String file, String argument, String value) {
-        List<Line.Entry> entries = new ArrayList<>();
+        List<Line.Point> points = new ArrayList<>();
         Csv.rows(file)
-                .forEach(row -> entries.add(
-                        new Line.Entry(Csv.required(row, argument), Csv.required(row, value), row.get("source"))));
-        return new Line(argument, entries);
+                .forEach(row -> points.add(
+                        new Line.Point(Csv.required(row, argument), Csv.required(row, value), row.get("source"))));
+        return new Line(argument, points);
     }
 
     private static Grid grid(String file, String column, String value) {
-        List<Grid.Entry> entries = new ArrayList<>();
+        List<Grid.Cell> cells = new ArrayList<>();
         Csv.rows(file)
-                .forEach(row -> entries.add(new Grid.Entry(
+                .forEach(row -> cells.add(new Grid.Cell(
                         Csv.required(row, SPACING),
                         Csv.required(row, column),
                         Csv.required(row, value),
                         row.get("source"))));
-        return new Grid(SPACING, column, entries);
+        return new Grid(SPACING, column, cells);
     }
 }

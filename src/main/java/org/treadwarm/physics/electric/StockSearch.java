@@ -73,8 +73,8 @@ final class StockSearch {
         double left = Math.max(0, demand.area() - total(StockItem::matArea));
         double cableLength = total(StockItem::cableLength);
         OptionalDouble spacing = cableLength > 0 ? OptionalDouble.of(left / cableLength) : OptionalDouble.empty();
-        if (spacing.isPresent() && spacing.getAsDouble() < demand.leastSpacing() * (1 - ROUNDING)
-                || !keepsLargestDensity(spacing)) {
+        boolean tooClose = spacing.isPresent() && spacing.getAsDouble() < demand.leastSpacing() * (1 - ROUNDING);
+        if (tooClose || !keepsLargestDensity(spacing)) {
             return;
         }
         StockChoice choice =

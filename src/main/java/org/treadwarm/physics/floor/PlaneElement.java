@@ -1,5 +1,7 @@
 package org.treadwarm.physics.floor;
 
+import org.treadwarm.physics.Require;
+
 /**
  * Coefficient K_H of floors with plane heating elements (type D): K_H = 6.5 a_B 1.06 a_U.
  *
@@ -23,6 +25,8 @@ public final class PlaneElement {
      * @param covering R of the covering, m²·K/W, at least 0
      */
     public static double coefficient(double coverResistance, double covering) {
+        Require.within("resistance of the cover", coverResistance, 0, Double.MAX_VALUE);
+        Require.within("resistance of the covering", covering, 0, Double.MAX_VALUE);
         double bare = SYSTEM_COEFFICIENT * SPACING_FACTOR * coverFactor(coverResistance);
         return bare / (1 + bare * covering);
     }

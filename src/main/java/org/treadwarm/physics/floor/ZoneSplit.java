@@ -9,9 +9,6 @@ import org.treadwarm.physics.Require;
  * that the strip is at most 1 m wide.
  */
 public final class ZoneSplit {
-    /** Largest width of the peripheral strip, m. */
-    public static final double LARGEST_WIDTH = 1;
-
     private ZoneSplit() {}
 
     /**

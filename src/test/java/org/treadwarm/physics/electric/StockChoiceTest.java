@@ -16,7 +16,7 @@ import org.treadwarm.physics.electric.StockItem.Extent.Mat;
 
 /** Choice among a stock: known choices, ties, and a slow search written another way. */
 class StockChoiceTest {
-    private static final int DRAWS = 200;
+    private static final int DRAWS = 60;
 
     private static StockItem mat(double area, double power) {
         return new StockItem("mat " + area, new Mat(area), power);
