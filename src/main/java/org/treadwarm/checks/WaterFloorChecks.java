@@ -40,32 +40,42 @@ final class WaterFloorChecks {
 
     private static Map<String, DoubleStream> screedTables(Inputs given) {
         return Map.of(
-                "aT", values(FloorFactors.screedSpacing()),
-                "aU", values(FloorFactors.screedCover()),
-                "aD", values(FloorFactors.screedDiameter()));
+                "aT", values(FloorFactors.screedSpacing(), given.numbers("R")),
+                "aU", values(FloorFactors.screedCover(), given, "T", "R"),
+                "aD", values(FloorFactors.screedDiameter(), given, "T", "R"));
     }
 
     private static Map<String, DoubleStream> limitTables(Inputs given) {
         return Map.of(
-                "BG", values(FloorFactors.limitCoefficient()),
-                "nG", values(FloorFactors.limitExponent()),
-                "BG_thick", values(FloorFactors.thickLimitCoefficient()),
-                "nG_thick", values(FloorFactors.thickLimitExponent()));
+                "BG", values(FloorFactors.limitCoefficient(), given, "T_BG", "su_over_lambda"),
+                "nG", values(FloorFactors.limitExponent(), given, "T_nG", "su_over_lambda"),
+                "BG_thick", values(FloorFactors.thickLimitCoefficient(), given.numbers("su_over_T")),
+                "nG_thick", values(FloorFactors.thickLimitExponent(), given.numbers("su_over_T")));
     }
 
     private static Map<String, DoubleStream> sheetTables(Inputs given) {
         return Map.of(
-                "aT", values(FloorFactors.sheetSpacing()),
-                "aK", values(FloorFactors.sheetContact()),
-                "bu", values(FloorFactors.sheetScreedShare()));
+                "aT", values(FloorFactors.sheetSpacing(), given.numbers("su_over_lambda")),
+                "aK", values(FloorFactors.sheetContact(), given.numbers("T")),
+                "bu", values(FloorFactors.sheetScreedShare(), given.numbers("T")));
     }
 
-    private static DoubleStream values(Line table) {
-        return table.points().stream().mapToDouble(Line.Point::value);
+    private static DoubleStream values(Line table, DoubleStream arguments) {
+        return arguments.map(argument -> table.points().stream()
+                .filter(point -> point.argument() == argument)
+                .mapToDouble(Line.Point::value)
+                .findFirst()
+                .orElseThrow());
     }
 
-    private static DoubleStream values(Grid table) {
-        return table.cells().stream().mapToDouble(Grid.Cell::value);
+    private static DoubleStream values(Grid table, Inputs given, String rows, String columns) {
+        return given.numbers(rows)
+                .flatMap(row -> given.numbers(columns)
+                        .map(column -> table.cells().stream()
+                                .filter(cell -> cell.row() == row && cell.column() == column)
+                                .mapToDouble(Grid.Cell::value)
+                                .findFirst()
+                                .orElseThrow()));
     }
 
     private static Map<String, DoubleStream> screedCharacteristic(Inputs given) {
