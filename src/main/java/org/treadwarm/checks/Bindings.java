@@ -62,6 +62,9 @@ final class Bindings {
                         UnitChecks.bindings(),
                         HeatedFloorChecks.bindings(),
                         WarmUpChecks.bindings(),
+                        WaterFloorChecks.bindings(),
+                        CircuitChecks.bindings(),
+                        ElectricChecks.bindings(),
                         TableChecks.bindings())
                 .forEach(all::putAll);
         return Map.copyOf(all);

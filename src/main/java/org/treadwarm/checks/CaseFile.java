@@ -14,18 +14,18 @@ import org.treadwarm.intake.Document;
 final class CaseFile {
     private CaseFile() {}
 
-    /** The cases of a file. */
+    /** The cases of a set, file by file. */
     static List<CheckCase> cases(CaseSet set) {
         List<CheckCase> cases = new ArrayList<>();
-        tree(set.file()).path("cases").forEach(node -> cases.add(checkCase(node)));
+        set.files().forEach(file -> tree(file).path("cases").forEach(node -> cases.add(checkCase(node))));
         return List.copyOf(cases);
     }
 
-    /** The cases that were left out of a file. */
+    /** The cases that were left out of a set. */
     static List<LeftOut> leftOut(CaseSet set) {
         List<LeftOut> leftOut = new ArrayList<>();
         tree("left-out")
-                .path(set.file())
+                .path(set.word())
                 .forEach(node -> leftOut.add(new LeftOut(
                         node.path("id").asText(), node.path("reason").asText())));
         return List.copyOf(leftOut);

@@ -17,7 +17,6 @@ final class HeatedFloorChecks {
                 Map.entry("en1264-aB-*", HeatedFloorChecks::coveringFactor),
                 Map.entry("en1264-phi", HeatedFloorChecks::limitConversion),
                 Map.entry("en1264-down-*", HeatedFloorChecks::downward),
-                Map.entry("en1264-worked-1", HeatedFloorChecks::worked),
                 Map.entry("floor-heating-downward", HeatedFloorChecks::envelopeDownward),
                 Map.entry("en1264-surface-limits", HeatedFloorChecks::surfaceLimits),
                 Map.entry("nonlin-1d-*", HeatedFloorChecks::throughResistance),
@@ -60,13 +59,6 @@ final class HeatedFloorChecks {
                         given.number("q"),
                         given.number("ti"),
                         given.number("tu"))));
-    }
-
-    private static Map<String, DoubleStream> worked(Inputs given) {
-        double up = TableMethod.resistanceUp(given.number("R_B"), given.number("su"), given.number("lambda_E"));
-        double down = TableMethod.downwardFlux(
-                up, given.number("R_u"), given.number("q"), given.number("th_i"), given.number("th_u"));
-        return Map.of("Ro", DoubleStream.of(up), "qu", DoubleStream.of(down));
     }
 
     private static Map<String, DoubleStream> envelopeDownward(Inputs given) {

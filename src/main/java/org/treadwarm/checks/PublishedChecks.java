@@ -25,12 +25,12 @@ public final class PublishedChecks {
         return cases.stream().flatMap(PublishedChecks::values).toList();
     }
 
-    /** The cases of a file. */
+    /** The cases of a set. */
     public static List<CheckCase> cases(CaseSet set) {
         return CASES.get(set);
     }
 
-    /** The published cases on a file's subjects that are not run, with the reasons; none for most files. */
+    /** The published cases on a set's subjects that are not run, with the reasons; none for many sets. */
     public static List<LeftOut> leftOut(CaseSet set) {
         return CaseFile.leftOut(set);
     }

@@ -2,6 +2,7 @@ package org.treadwarm.tables;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.List;
 import java.util.Locale;
 import org.junit.jupiter.api.Test;
 
@@ -69,5 +70,68 @@ class TablesTest {
                             || row.internal().isPresent())
                     .isTrue();
         });
+    }
+
+    @Test
+    void factorsOfWarmWaterFloorsNameTheirSource() {
+        assertThat(List.of(
+                        FloorFactors.screedSpacing(),
+                        FloorFactors.thickLimitCoefficient(),
+                        FloorFactors.thickLimitExponent(),
+                        FloorFactors.sheetSpacing(),
+                        FloorFactors.sheetContact(),
+                        FloorFactors.sheetScreedShare()))
+                .allSatisfy(line -> assertThat(line.points())
+                        .isNotEmpty()
+                        .allSatisfy(row -> assertThat(row.source()).contains("from memory, not read")));
+        assertThat(List.of(
+                        FloorFactors.screedCover(),
+                        FloorFactors.screedDiameter(),
+                        FloorFactors.limitCoefficient(),
+                        FloorFactors.limitExponent()))
+                .allSatisfy(grid -> assertThat(grid.cells())
+                        .isNotEmpty()
+                        .allSatisfy(row -> assertThat(row.source()).contains("from memory, not read")));
+    }
+
+    /** A wider spacing makes the surface less even, a thicker screed more even: B_G and n_G must run in one direction. */
+    @Test
+    void limitCurvesFallWithTheSpacingAndRiseWithTheCover() {
+        runsOneWay(FloorFactors.limitCoefficient(), 1);
+        runsOneWay(FloorFactors.limitExponent(), -1);
+    }
+
+    private static void runsOneWay(FloorFactors.Grid grid, int sign) {
+        for (FloorFactors.Grid.Cell one : grid.cells()) {
+            for (FloorFactors.Grid.Cell other : grid.cells()) {
+                if (one.column() == other.column() && one.row() < other.row()) {
+                    assertThat(sign * one.value())
+                            .as("%s and %s", one, other)
+                            .isGreaterThanOrEqualTo(sign * other.value());
+                }
+                if (one.row() == other.row() && one.column() < other.column()) {
+                    assertThat(sign * one.value())
+                            .as("%s and %s", one, other)
+                            .isLessThanOrEqualTo(sign * other.value());
+                }
+            }
+        }
+    }
+
+    @Test
+    void practiceAndMixturesNameTheirSource() {
+        assertThat(PracticeLimits.all()).isNotEmpty().allSatisfy(row -> {
+            assertThat(row.source()).isNotBlank();
+            assertThat(row.unit()).isNotBlank();
+            assertThat(row.subject()).isIn("water", "electric");
+            assertThat(row.sense()).isIn("at most", "at least");
+        });
+        assertThat(Breakers.all()).isNotEmpty().allSatisfy(row -> {
+            assertThat(row.source()).isNotBlank();
+            assertThat(row.continuousShare()).isGreaterThan(0).isLessThanOrEqualTo(1);
+        });
+        assertThat(Glycols.propylene())
+                .hasSize(9)
+                .allSatisfy(row -> assertThat(row.source()).isNotBlank());
     }
 }

@@ -7,7 +7,8 @@ package org.treadwarm.physics.floor;
  * <p>Source: EN 1264-2:2008+A1:2012, clause 6 and annex A (from memory).
  */
 public final class TableMethod {
-    private static final double SURFACE = 10.8;
+    /** Exchange coefficient of a heated floor, W/(m²·K): EN 1264-2 (from memory). */
+    static final double SURFACE = 10.8;
 
     private TableMethod() {}
 
