@@ -61,6 +61,7 @@ final class Bindings {
                         MoistureChecks.bindings(),
                         UnitChecks.bindings(),
                         HeatedFloorChecks.bindings(),
+                        SectionChecks.bindings(),
                         TableChecks.bindings())
                 .forEach(all::putAll);
         return Map.copyOf(all);

@@ -8,6 +8,8 @@ public enum CaseSet {
     ENVELOPE,
     /** Heated floors. */
     FLOOR,
+    /** Conduction through sections. */
+    SECTION,
     /** Rows of the program's own tables, and a few more values. */
     TABLES;
 

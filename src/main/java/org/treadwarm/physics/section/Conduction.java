@@ -62,8 +62,7 @@ public final class Conduction {
             double[] guess,
             double tolerance,
             BooleanSupplier stopped) {
-        Convergence convergence =
-                solveDifferences(balances, solver, known, heatFactor, guess, tolerance, stopped);
+        Convergence convergence = solveDifferences(balances, solver, known, heatFactor, guess, tolerance, stopped);
         return new Field(balances, known, heatFactor, guess, convergence);
     }
 

@@ -115,7 +115,8 @@ public final class FloorResponse {
                     error(perDifference[number], weights, solved[0][number]),
                     error(perFlux[number], weights, solved[1][number]));
             if (worst > INTERPOLATION_GOAL) {
-                throw new IllegalStateException("the response to the coefficient above cannot be interpolated: error " + worst);
+                throw new IllegalStateException(
+                        "the response to the coefficient above cannot be interpolated: error " + worst);
             }
         }
     }
@@ -160,8 +161,9 @@ public final class FloorResponse {
      */
     public void evaluateAt(double coefficient, double flux, double room, double below, FloorState state) {
         if (!(flux >= 0) || !(coefficient >= LOWEST && coefficient <= HIGHEST)) {
-            throw new IllegalArgumentException("a floor's response is known for fluxes of at least 0 W/m² and coefficients from "
-                    + LOWEST + " to " + HIGHEST + " W/(m²·K), not for " + flux + " and " + coefficient);
+            throw new IllegalArgumentException(
+                    "a floor's response is known for fluxes of at least 0 W/m² and coefficients from " + LOWEST + " to "
+                            + HIGHEST + " W/(m²·K), not for " + flux + " and " + coefficient);
         }
         weigh(Math.log(coefficient), state.weights);
         double difference = room - below;

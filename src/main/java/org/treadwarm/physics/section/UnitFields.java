@@ -59,8 +59,8 @@ final class UnitFields {
     /** The numbers of a field in the order of {@link FloorResponse}, then the flux upward. */
     private double[] numbers(
             Balances balances, ConjugateGradients solver, double[] known, double heatFactor, double[] guess) {
-        Field field = Conduction.linear(
-                balances, solver, known, heatFactor, guess, FloorSection.RESIDUAL_GOAL, stopped);
+        Field field =
+                Conduction.linear(balances, solver, known, heatFactor, guess, FloorSection.RESIDUAL_GOAL, stopped);
         FloorReading reading = new FloorReading(layout, field);
         int layers = layout.layers().size();
         double[] numbers = new double[FloorResponse.FACES + layers + 1];
