@@ -65,6 +65,7 @@ final class Bindings {
                         WaterFloorChecks.bindings(),
                         CircuitChecks.bindings(),
                         ElectricChecks.bindings(),
+                        SectionChecks.bindings(),
                         TableChecks.bindings())
                 .forEach(all::putAll);
         return Map.copyOf(all);

@@ -11,6 +11,8 @@ public enum CaseSet {
     FLOOR,
     /** Warming up and cooling down. */
     WARMUP,
+    /** Conduction through sections. */
+    SECTION,
     /** Rows of the program's own tables, and a few more values. */
     TABLES;
 

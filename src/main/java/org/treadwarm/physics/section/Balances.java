@@ -230,6 +230,37 @@ final class Balances {
         return grid.height(row) / 2 / conductivity[lattice.cell(column, row)];
     }
 
+    /** Flux out of a solid cell through one of its faces, W/m²; 0 through an adiabatic one. */
+    double flux(int column, int row, Heading side, double[] temperature, double[] known) {
+        int cell = lattice.cell(column, row);
+        int link = links.find(cell, side);
+        if (link != KnownLinks.NONE) {
+            return links.flux(link, temperature, known);
+        }
+        return switch (side) {
+            case LEFT ->
+                column == 0
+                        ? 0
+                        : lattice.right[cell - 1] * (temperature[cell] - temperature[cell - 1]) / grid.height(row);
+            case RIGHT ->
+                column + 1 == grid.columns()
+                        ? 0
+                        : lattice.right[cell] * (temperature[cell] - temperature[cell + 1]) / grid.height(row);
+            case DOWN ->
+                row == 0
+                        ? 0
+                        : lattice.up[cell - grid.columns()]
+                                * (temperature[cell] - temperature[cell - grid.columns()])
+                                / grid.width(column);
+            case UP ->
+                row + 1 == grid.rows()
+                        ? 0
+                        : lattice.up[cell]
+                                * (temperature[cell] - temperature[cell + grid.columns()])
+                                / grid.width(column);
+        };
+    }
+
     /** Right-hand side for known temperatures and so many times the cables' heat. */
     double[] load(double[] known, double heatFactor) {
         double[] load = new double[lattice.cells()];

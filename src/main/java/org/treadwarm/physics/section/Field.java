@@ -90,31 +90,8 @@ public final class Field {
         return known;
     }
 
-    /** Temperature at a point, by straight lines between the middles of cells; beyond the outermost middles as there. */
+    /** Temperature at a point; inside pipes and air, theirs. Points outside count as on the edge. */
     public double temperature(double x, double y) {
-        Grid grid = balances.grid;
-        int column = grid.columnAt(x);
-        int row = grid.rowAt(y);
-        int west = Math.max(0, x < grid.x(column) ? column - 1 : column);
-        int south = Math.max(0, y < grid.y(row) ? row - 1 : row);
-        int east = Math.min(west + 1, grid.columns() - 1);
-        int north = Math.min(south + 1, grid.rows() - 1);
-        double shareEast = share(x, grid.x(west), grid.x(east));
-        double shareNorth = share(y, grid.y(south), grid.y(north));
-        double low = mix(at(west, south), at(east, south), shareEast);
-        double high = mix(at(west, north), at(east, north), shareEast);
-        return mix(low, high, shareNorth);
-    }
-
-    private double at(int column, int row) {
-        return temperature[balances.lattice.cell(column, row)];
-    }
-
-    private static double share(double position, double from, double to) {
-        return to > from ? Math.max(0, Math.min(1, (position - from) / (to - from))) : 0;
-    }
-
-    private static double mix(double a, double b, double share) {
-        return a + (b - a) * share;
+        return new PointReading(balances, temperature, known).at(x, y);
     }
 }

@@ -140,17 +140,6 @@ final class FloorLayout {
         for (double level : top) {
             rows.at(level);
         }
-        return new Grid(columns, distinct(rows.lines()));
-    }
-
-    /** Lines that coincide but for rounding are one. */
-    private double[] distinct(double[] lines) {
-        List<Double> kept = new ArrayList<>();
-        for (double line : lines) {
-            if (kept.isEmpty() || line - kept.get(kept.size() - 1) > 1e-9 * height) {
-                kept.add(line);
-            }
-        }
-        return kept.stream().mapToDouble(Double::doubleValue).toArray();
+        return new Grid(columns, rows.lines());
     }
 }

@@ -1,8 +1,6 @@
 package org.treadwarm.physics.section;
 
 import java.util.Arrays;
-import java.util.HashMap;
-import java.util.Map;
 import org.treadwarm.physics.section.FloorHeater.WaterPipe;
 
 /** Reads the numbers of a floor off a computed section. Every one of them is linear in the temperatures. */
@@ -14,22 +12,12 @@ final class FloorReading {
     private final Field field;
     private final Balances balances;
     private final Grid grid;
-    private final Map<Integer, Integer> linksUp = new HashMap<>();
-    private final Map<Integer, Integer> linksDown = new HashMap<>();
 
     FloorReading(FloorLayout layout, Field field) {
         this.layout = layout;
         this.field = field;
         this.balances = field.balances();
         this.grid = balances.grid;
-        KnownLinks links = balances.links;
-        for (int link = 0; link < links.count(); link++) {
-            if (links.heading(link) == Heading.UP) {
-                linksUp.put(links.cell(link), link);
-            } else if (links.heading(link) == Heading.DOWN) {
-                linksDown.put(links.cell(link), link);
-            }
-        }
     }
 
     /** Flux from the finished surface, W/m². */
@@ -68,8 +56,9 @@ final class FloorReading {
     double[] surface() {
         double[] surface = new double[grid.columns()];
         for (int column = 0; column < surface.length; column++) {
-            int link = linksUp.get(balances.lattice.cell(column, grid.rows() - 1));
-            surface[column] = field.known()[FloorLayout.ABOVE] + flux(link) * balances.links.film(link);
+            int link = balances.links.find(balances.lattice.cell(column, grid.rows() - 1), Heading.UP);
+            double flux = balances.links.flux(link, field.temperatures(), field.known());
+            surface[column] = field.known()[FloorLayout.ABOVE] + flux * balances.links.film(link);
         }
         return surface;
     }
@@ -147,19 +136,10 @@ final class FloorReading {
 
     /** Upward flux through a line, W/m². */
     private double flux(int column, int line) {
-        int above = balances.lattice.cell(column, line);
-        int below = above - grid.columns();
-        if (line > 0 && linksUp.containsKey(below)) {
-            return flux(linksUp.get(below));
-        }
-        if (line < grid.rows() && linksDown.containsKey(above)) {
-            return -flux(linksDown.get(above));
-        }
         double[] temperature = field.temperatures();
-        return balances.lattice.up[below] * (temperature[below] - temperature[above]) / grid.width(column);
-    }
-
-    private double flux(int link) {
-        return balances.links.flux(link, field.temperatures(), field.known());
+        if (line > 0 && balances.isSolid(balances.lattice.cell(column, line - 1))) {
+            return balances.flux(column, line - 1, Heading.UP, temperature, field.known());
+        }
+        return -balances.flux(column, line, Heading.DOWN, temperature, field.known());
     }
 }

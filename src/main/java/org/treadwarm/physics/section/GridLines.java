@@ -10,7 +10,7 @@ import java.util.TreeSet;
  * Places the lines of a grid in one direction: close together where the temperature bends, and smoothly farther apart from there
  * on, so that the error falls with the square of the cell size.
  */
-final class GridLines {
+public final class GridLines {
     /** Parts of an interval in which the wanted cell size is integrated. */
     private static final int PARTS = 64;
 
@@ -32,33 +32,34 @@ final class GridLines {
      * @param growth by how much cells grow per metre of distance from a fine stretch
      * @param coarsest largest cell, m
      */
-    GridLines(double growth, double coarsest) {
+    public GridLines(double growth, double coarsest) {
         this.growth = growth;
         this.coarsest = coarsest;
     }
 
     /** A line that must be there. */
-    GridLines at(double position) {
+    public GridLines at(double position) {
         fixed.add(position);
         return this;
     }
 
     /** Cells of a size between two positions, which are lines themselves. */
-    GridLines fine(double from, double to, double size) {
+    public GridLines fine(double from, double to, double size) {
         fines.add(new Fine(from, to, size));
         return at(from).at(to);
     }
 
-    /** The lines. */
-    double[] lines() {
+    /** The lines; such as coincide but for rounding are one. */
+    public double[] lines() {
         List<Double> lines = new ArrayList<>();
-        double before = Double.NaN;
+        double same = 1e-9 * (fixed.last() - fixed.first());
+        lines.add(fixed.first());
         for (double position : fixed) {
-            if (!lines.isEmpty()) {
+            double before = lines.get(lines.size() - 1);
+            if (position - before > same) {
                 fill(before, position, lines);
+                lines.add(position);
             }
-            lines.add(position);
-            before = position;
         }
         return lines.stream().mapToDouble(Double::doubleValue).toArray();
     }

@@ -1,10 +1,18 @@
 package org.treadwarm.physics.section;
 
 import java.util.Arrays;
+import java.util.HashMap;
+import java.util.Map;
 
 /** Links from cells to known temperatures, in flat lists. */
 final class KnownLinks {
+    /** No link. */
+    static final int NONE = -1;
+
+    private static final int SIDES = Heading.values().length;
+
     private final int knownCount;
+    private final Map<Integer, Integer> places = new HashMap<>();
     private int count;
     private int[] cell = new int[64];
     private int[] known = new int[64];
@@ -42,7 +50,17 @@ final class KnownLinks {
         area[count] = face;
         inside[count] = insideResistance;
         film[count] = filmResistance;
+        places.put(place(from, side), count);
         count++;
+    }
+
+    private static int place(int from, Heading side) {
+        return SIDES * from + side.ordinal();
+    }
+
+    /** The link that leaves a cell by a side, or {@link #NONE}. */
+    int find(int from, Heading side) {
+        return places.getOrDefault(place(from, side), NONE);
     }
 
     int count() {

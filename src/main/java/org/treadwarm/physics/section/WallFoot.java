@@ -1,0 +1,234 @@
+package org.treadwarm.physics.section;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.BooleanSupplier;
+import org.treadwarm.physics.section.FloorLayer.Solid;
+import org.treadwarm.physics.section.Section.Air;
+import org.treadwarm.physics.section.Section.Block;
+
+/**
+ * The foot of an outer wall beside a heated slab on the ground, in section, as a thermal coupling L2D and a psi value.
+ *
+ * <p>Source: ISO 10211:2017, clauses 5 and 7 (from memory): the floor up to its middle, B'/2 wide; ground 2.5 times the whole floor's
+ * width beside and below; cuts and planes of symmetry adiabatic. Inside counts as one temperature: the heated plane under the floor and
+ * the air along the wall.
+ *
+ * @param halfWidth half the floor's characteristic dimension B', m
+ * @param slab layers under the heated plane, from above; they end at the wall
+ * @param heatedPlane height of the heated plane above the ground outside, m, at least 0
+ * @param wall the wall and its foundation
+ * @param edge upright insulation between slab and wall
+ * @param soilConductivity W/(m·K)
+ * @param insideFilm resistance along the wall, m²·K/W
+ * @param outsideFilm resistance outside, m²·K/W
+ */
+public record WallFoot(
+        double halfWidth,
+        List<Solid> slab,
+        double heatedPlane,
+        Wall wall,
+        Optional<EdgeInsulation> edge,
+        double soilConductivity,
+        double insideFilm,
+        double outsideFilm) {
+    /** Ground beside and below, in widths of the whole floor. */
+    static final double GROUND_WIDTHS = 2.5;
+
+    /** Cells grow by this much per metre of distance from the wall's foot, on the first grid. */
+    private static final double GROWTH = 0.2;
+
+    /** Cells across the wall, on the first grid. */
+    private static final int CELLS_IN_WALL = 6;
+
+    /**
+     * Cells where the heated plane ends at the wall or at the edge insulation, m. The flux grows there without bound, at the wall as the
+     * distance to the power of -2/3: a given temperature meets an almost adiabatic face at an angle of 270°.
+     */
+    private static final double CORNER = 2e-4;
+
+    /** Assumed order of the coupling's error; 1 to 1.6 is observed. */
+    private static final double CORNER_ORDER = 1;
+
+    /** Assumed order of the error where a film ends beside an adiabatic stretch; 2 is observed. */
+    private static final double EDGE_ORDER = 1.5;
+
+    public WallFoot {
+        slab = List.copyOf(slab);
+        Require.positive("half width of the floor, m", halfWidth);
+        Require.notNegative("height of the heated plane above the ground, m", heatedPlane);
+        Require.positive("conductivity of the soil, W/(m·K)", soilConductivity);
+        Require.positive("film along the wall, m²·K/W", insideFilm);
+        Require.positive("film outside, m²·K/W", outsideFilm);
+        Require.that(!slab.isEmpty(), "a slab must have at least one layer");
+        edge.ifPresent(strip -> Require.that(
+                strip.thickness() < halfWidth, "edge insulation must be thinner than half the floor's width"));
+    }
+
+    /**
+     * The wall, of one material that stands for its build-up.
+     *
+     * @param thickness m
+     * @param conductivity thickness over the resistance of the build-up without films, W/(m·K)
+     * @param height from the heated plane to the cut, m; at least 1 m, and three thicknesses (ISO 10211:2017, 5.2.3, from memory)
+     * @param foundation depth of its foot below the ground outside, m
+     */
+    public record Wall(double thickness, double conductivity, double height, double foundation) {
+        public Wall {
+            Require.positive("thickness of the wall, m", thickness);
+            Require.positive("conductivity of the wall, W/(m·K)", conductivity);
+            Require.that(
+                    height >= Math.max(1, 3 * thickness),
+                    "the wall must reach 1 m and three thicknesses above the heated plane, not " + height + " m");
+            Require.notNegative("depth of the foundation, m", foundation);
+        }
+    }
+
+    /**
+     * A strip of insulation along the slab's edge, against the wall.
+     *
+     * @param thickness m
+     * @param conductivity W/(m·K)
+     * @param depth from the heated plane down, m
+     */
+    public record EdgeInsulation(double thickness, double conductivity, double depth) {
+        public EdgeInsulation {
+            Require.positive("thickness of the edge insulation, m", thickness);
+            Require.positive("conductivity of the edge insulation, W/(m·K)", conductivity);
+            Require.positive("depth of the edge insulation, m", depth);
+        }
+    }
+
+    /**
+     * The coupling and what its psi value is made of.
+     *
+     * @param stopped asked at every step of the solver whether to give up
+     */
+    public WallFootCoupling solve(BooleanSupplier stopped) {
+        Refinement.Answer coupling =
+                Refinement.of(section(), grid(), field -> field.heatToAir(0), CORNER_ORDER, stopped);
+        double slabCoefficient = slabTransmittance(
+                halfWidth, wall.thickness(), soilConductivity, slabResistance(), outsideFilm, stopped);
+        return new WallFootCoupling(
+                coupling.value(),
+                slabCoefficient,
+                1 / (insideFilm + wall.thickness() / wall.conductivity() + outsideFilm),
+                halfWidth,
+                wall.height(),
+                coupling.accuracy());
+    }
+
+    /** Resistance of the slab's layers, m²·K/W. */
+    public double slabResistance() {
+        return slab.stream().mapToDouble(FloorLayer::resistance).sum();
+    }
+
+    /**
+     * Transmittance of a long slab with the ground below it, computed in section: the slab as a resistance on the ground, and nothing but
+     * an adiabatic stretch where the wall stands.
+     *
+     * @param halfWidth half the floor's width, m
+     * @param wallThickness m
+     * @param soilConductivity W/(m·K)
+     * @param resistance from the inside temperature to the ground's surface, m²·K/W, more than 0
+     * @param outsideFilm resistance outside, m²·K/W, more than 0
+     * @param stopped asked at every step of the solver whether to give up
+     * @return W/(m²·K) of the floor
+     */
+    public static double slabTransmittance(
+            double halfWidth,
+            double wallThickness,
+            double soilConductivity,
+            double resistance,
+            double outsideFilm,
+            BooleanSupplier stopped) {
+        double ground = GROUND_WIDTHS * 2 * halfWidth;
+        double outer = halfWidth + wallThickness;
+        Section section = Section.of(
+                List.of(new Block(0, outer + ground, 0, ground, soilConductivity)),
+                List.of(
+                        new Section.Edge(Section.Side.TOP, 0, halfWidth, new Condition.Film(1, 1 / resistance)),
+                        new Section.Edge(
+                                Section.Side.TOP, outer, outer + ground, new Condition.Film(0, 1 / outsideFilm))));
+        double size = wallThickness / CELLS_IN_WALL;
+        Grid grid = new Grid(
+                new GridLines(GROWTH, ground)
+                        .fine(halfWidth, outer, size)
+                        .at(0)
+                        .at(outer + ground)
+                        .lines(),
+                new GridLines(GROWTH, ground)
+                        .fine(ground - size, ground, size)
+                        .at(0)
+                        .lines());
+        return Refinement.of(section, grid, field -> field.heatToEdge(1) / halfWidth, EDGE_ORDER, stopped)
+                .value();
+    }
+
+    private double ground() {
+        return GROUND_WIDTHS * 2 * halfWidth;
+    }
+
+    private double plane() {
+        return ground() + heatedPlane;
+    }
+
+    private double width() {
+        return halfWidth + wall.thickness() + ground();
+    }
+
+    private double top() {
+        return plane() + wall.height();
+    }
+
+    private Section section() {
+        double outer = halfWidth + wall.thickness();
+        List<Block> blocks = new ArrayList<>();
+        blocks.add(new Block(0, width(), 0, ground(), soilConductivity));
+        if (heatedPlane > 0) {
+            blocks.add(new Block(0, halfWidth, ground(), plane(), soilConductivity));
+        }
+        double level = plane();
+        for (Solid layer : slab) {
+            blocks.add(new Block(0, halfWidth, level - layer.thickness(), level, layer.conductivity()));
+            level -= layer.thickness();
+        }
+        edge.ifPresent(strip -> blocks.add(new Block(
+                halfWidth - strip.thickness(), halfWidth, plane() - strip.depth(), plane(), strip.conductivity())));
+        blocks.add(new Block(halfWidth, outer, ground() - wall.foundation(), top(), wall.conductivity()));
+        List<Air> airs = new ArrayList<>();
+        airs.add(new Air(outer, width(), ground(), top(), 0, outsideFilm, outsideFilm));
+        airs.add(new Air(0, halfWidth, plane(), top(), 1, 0, insideFilm));
+        // The heated plane ends at the strip, whose top sees the room.
+        edge.ifPresent(strip ->
+                airs.add(new Air(halfWidth - strip.thickness(), halfWidth, plane(), top(), 1, insideFilm, insideFilm)));
+        return new Section(blocks, List.of(), List.of(), airs, List.of(), List.of());
+    }
+
+    private Grid grid() {
+        double size = wall.thickness() / CELLS_IN_WALL;
+        double outer = halfWidth + wall.thickness();
+        GridLines columns = new GridLines(GROWTH, ground())
+                .fine(halfWidth, outer, size)
+                .at(0)
+                .at(width());
+        GridLines rows = new GridLines(GROWTH, ground()).at(0).at(top()).at(ground() - wall.foundation());
+        rows.fine(ground() - size, ground(), size)
+                .fine(plane() - size, plane(), size)
+                .at(plane());
+        columns.fine(halfWidth - CORNER, halfWidth + CORNER, CORNER);
+        rows.fine(plane() - CORNER, plane() + CORNER, CORNER);
+        double level = plane();
+        for (Solid layer : slab) {
+            level -= layer.thickness();
+            rows.at(level);
+        }
+        if (edge.isPresent()) {
+            columns.fine(
+                    halfWidth - edge.get().thickness(), halfWidth, edge.get().thickness() / 2);
+            rows.at(plane() - edge.get().depth());
+        }
+        return new Grid(columns.lines(), rows.lines());
+    }
+}
