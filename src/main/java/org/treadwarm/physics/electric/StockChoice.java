@@ -28,19 +28,20 @@ public record StockChoice(
     public record Pieces(StockItem item, int count) {}
 
     /**
-     * The best choice by an exact search over all combinations: the least bare area (to 1 mm²), then the fewest pieces, then the
+     * The best choice of all combinations: the least bare area (to 1 mm²), then the fewest pieces, then the
      * lowest power (to 1 mW), then more of what stands earlier in the stock. A combination counts when its mats fit into the
      * area, its power reaches the required density over the whole area, and no part that is covered exceeds the largest
      * density, nor any run the least spacing.
      *
      * @return empty when no combination counts
-     * @throws IllegalArgumentException when there are too many combinations to look at
+     * @throws IllegalArgumentException when there are too many combinations to look at, as of many items of odd areas and powers
      */
     public static Optional<StockChoice> best(CoverDemand demand, List<StockItem> stock) {
         return new StockSearch(demand, stock).best();
     }
 
-    int count() {
+    /** How many pieces in all. */
+    public int count() {
         return pieces.stream().mapToInt(Pieces::count).sum();
     }
 }

@@ -1,87 +1,95 @@
 package org.treadwarm.physics.electric;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.function.ToDoubleFunction;
 import org.treadwarm.physics.electric.StockChoice.Pieces;
 
-/** Walks through all combinations of a stock whose mats fit and whose power and length do not exceed what an area takes. */
+/**
+ * Goes through the stock item by item and keeps, of all combinations so far that cover the same area with the same length,
+ * power and strongest cable, only the one that is to be preferred: what can be added to them, and what that makes, is the same.
+ * So the search is exact, and its work grows with the number of different sums instead of the number of combinations.
+ */
 final class StockSearch {
-    private static final int MOST_LOOKS = 2_000_000;
+    private static final int MOST_LOOKS = 500_000;
 
     /** Room for the rounding of floating-point numbers, as a share. */
     private static final double ROUNDING = 1e-9;
 
-    private static final Comparator<StockChoice> ORDER = Comparator.comparingLong(
-                    (StockChoice choice) -> Math.round(choice.bareArea() * 1e6))
-            .thenComparingInt(StockChoice::count)
-            .thenComparingLong(choice -> Math.round(choice.power() * 1e3));
+    /** Fewest pieces first, then more of what stands earlier in the stock. */
+    private static final Comparator<Combination> PREFERRED =
+            Comparator.comparingInt(Combination::pieces).thenComparing(Combination::counts, StockSearch::moreOfEarlier);
 
     private final CoverDemand demand;
     private final List<StockItem> stock;
-    private final int[] counts;
-    private Optional<StockChoice> best = Optional.empty();
     private int looks;
 
     StockSearch(CoverDemand demand, List<StockItem> stock) {
         this.demand = demand;
         this.stock = List.copyOf(stock);
-        this.counts = new int[stock.size()];
+    }
+
+    /** What sums must be equal, to 1 mm², 1 mm and 1 mW, for two combinations to be alike. */
+    private record Sums(long squareMillimetres, long millimetres, long milliwatts, double strongest) {}
+
+    /** So many of each item up to some place in the stock; strongest is the largest W/m of the cables among them. */
+    private record Combination(
+            List<Integer> counts, int pieces, double matArea, double cableLength, double power, double strongest) {
+        static final Combination NOTHING = new Combination(List.of(), 0, 0, 0, 0, 0);
+
+        Combination with(StockItem item, int count) {
+            List<Integer> extended = new ArrayList<>(counts);
+            extended.add(count);
+            double perMetre = count > 0 && item.cableLength() > 0 ? item.power() / item.cableLength() : 0;
+            return new Combination(
+                    List.copyOf(extended),
+                    pieces + count,
+                    matArea + count * item.matArea(),
+                    cableLength + count * item.cableLength(),
+                    power + count * item.power(),
+                    Math.max(strongest, perMetre));
+        }
+
+        Sums sums() {
+            return new Sums(
+                    Math.round(matArea * 1e6), Math.round(cableLength * 1e3), Math.round(power * 1e3), strongest);
+        }
     }
 
     Optional<StockChoice> best() {
-        walk(0);
-        return best;
+        Collection<Combination> combinations = List.of(Combination.NOTHING);
+        for (StockItem item : stock) {
+            combinations = extended(combinations, item);
+        }
+        Comparator<Combination> order = Comparator.comparingLong(
+                        (Combination combination) -> Math.round(bareArea(combination) * 1e6))
+                .thenComparingInt(Combination::pieces)
+                .thenComparingLong(combination -> combination.sums().milliwatts())
+                .thenComparing(PREFERRED);
+        return combinations.stream().filter(this::answers).min(order).map(this::choice);
     }
 
-    /** Tries every count of the items from one on, large counts first, so that of equal choices the first found stays. */
-    private void walk(int index) {
-        if (index == stock.size()) {
-            judge();
-            return;
+    private Collection<Combination> extended(Collection<Combination> combinations, StockItem item) {
+        Map<Sums, Combination> extended = new LinkedHashMap<>();
+        for (Combination combination : combinations) {
+            int count = 0;
+            Combination with = combination.with(item, 0);
+            while (fits(with)) {
+                look();
+                extended.merge(with.sums(), with, (one, other) -> PREFERRED.compare(one, other) <= 0 ? one : other);
+                count++;
+                if (isTooDense(item)) {
+                    break;
+                }
+                with = combination.with(item, count);
+            }
         }
-        int most = 0;
-        counts[index] = 1;
-        while (fits()) {
-            most = counts[index];
-            counts[index]++;
-            look();
-        }
-        for (int count = most; count >= 0; count--) {
-            counts[index] = count;
-            walk(index + 1);
-        }
-    }
-
-    private boolean fits() {
-        double matArea = total(StockItem::matArea);
-        double cableLength = total(StockItem::cableLength);
-        return matArea <= demand.area() * (1 + ROUNDING)
-                && cableLength * demand.leastSpacing() <= demand.area() * (1 + ROUNDING)
-                && total(StockItem::power) <= demand.area() * demand.largestDensity() * (1 + ROUNDING);
-    }
-
-    private void judge() {
-        look();
-        double power = total(StockItem::power);
-        if (power < demand.area() * demand.requiredDensity() * (1 - ROUNDING)) {
-            return;
-        }
-        double left = Math.max(0, demand.area() - total(StockItem::matArea));
-        double cableLength = total(StockItem::cableLength);
-        OptionalDouble spacing = cableLength > 0 ? OptionalDouble.of(left / cableLength) : OptionalDouble.empty();
-        boolean tooClose = spacing.isPresent() && spacing.getAsDouble() < demand.leastSpacing() * (1 - ROUNDING);
-        if (tooClose || !keepsLargestDensity(spacing)) {
-            return;
-        }
-        StockChoice choice =
-                new StockChoice(pieces(), power, power / demand.area(), cableLength > 0 ? 0 : left, spacing);
-        if (best.isEmpty() || ORDER.compare(choice, best.get()) < 0) {
-            best = Optional.of(choice);
-        }
+        return extended.values();
     }
 
     private void look() {
@@ -92,35 +100,58 @@ final class StockSearch {
         }
     }
 
-    private boolean keepsLargestDensity(OptionalDouble spacing) {
-        for (int i = 0; i < counts.length; i++) {
-            StockItem item = stock.get(i);
-            if (counts[i] > 0 && density(item, spacing) > demand.largestDensity() * (1 + ROUNDING)) {
-                return false;
-            }
+    /** Whether more may be added: what does not fit fits even less with more. */
+    private boolean fits(Combination combination) {
+        return combination.matArea() <= demand.area() * (1 + ROUNDING)
+                && combination.cableLength() * demand.leastSpacing() <= demand.area() * (1 + ROUNDING)
+                && combination.power() <= demand.area() * demand.largestDensity() * (1 + ROUNDING);
+    }
+
+    private boolean isTooDense(StockItem item) {
+        return item.matArea() > 0 && item.power() / item.matArea() > demand.largestDensity() * (1 + ROUNDING);
+    }
+
+    private boolean answers(Combination combination) {
+        if (combination.power() < demand.area() * demand.requiredDensity() * (1 - ROUNDING)) {
+            return false;
         }
-        return true;
+        if (combination.cableLength() == 0) {
+            return true;
+        }
+        double spacing = left(combination) / combination.cableLength();
+        return spacing >= demand.leastSpacing() * (1 - ROUNDING)
+                && combination.strongest() / spacing <= demand.largestDensity() * (1 + ROUNDING);
     }
 
-    private static double density(StockItem item, OptionalDouble spacing) {
-        return item.power() / (item.matArea() + item.cableLength() * spacing.orElse(0));
+    /** Area that the mats leave, m². */
+    private double left(Combination combination) {
+        return Math.max(0, demand.area() - combination.matArea());
     }
 
-    private List<Pieces> pieces() {
+    private double bareArea(Combination combination) {
+        return combination.cableLength() > 0 ? 0 : left(combination);
+    }
+
+    private StockChoice choice(Combination combination) {
         List<Pieces> pieces = new ArrayList<>();
-        for (int i = 0; i < counts.length; i++) {
-            if (counts[i] > 0) {
-                pieces.add(new Pieces(stock.get(i), counts[i]));
+        for (int i = 0; i < stock.size(); i++) {
+            if (combination.counts().get(i) > 0) {
+                pieces.add(new Pieces(stock.get(i), combination.counts().get(i)));
             }
         }
-        return pieces;
+        OptionalDouble spacing = combination.cableLength() > 0
+                ? OptionalDouble.of(left(combination) / combination.cableLength())
+                : OptionalDouble.empty();
+        return new StockChoice(
+                pieces, combination.power(), combination.power() / demand.area(), bareArea(combination), spacing);
     }
 
-    private double total(ToDoubleFunction<StockItem> of) {
-        double total = 0;
-        for (int i = 0; i < counts.length; i++) {
-            total += counts[i] * of.applyAsDouble(stock.get(i));
+    private static int moreOfEarlier(List<Integer> one, List<Integer> other) {
+        for (int i = 0; i < one.size(); i++) {
+            if (!one.get(i).equals(other.get(i))) {
+                return other.get(i) - one.get(i);
+            }
         }
-        return total;
+        return 0;
     }
 }

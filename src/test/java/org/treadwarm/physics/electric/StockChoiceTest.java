@@ -78,10 +78,26 @@ class StockChoiceTest {
                 .isEmpty();
     }
 
+    /**
+     * Mats of one density in steps of half a square metre make few different sums, so a large area is no harder. The 119 halves
+     * of a square metre need a mat of odd halves, at most 7, beside which four of 24 are too few: six pieces.
+     */
+    @Test
+    void choosesForALargeRoom() {
+        List<StockItem> stock = IntStream.of(1, 2, 3, 4, 5, 6, 7, 8, 10, 12, 14, 16, 20, 24)
+                .mapToObj(halves -> mat(halves / 2.0, halves * 75.0))
+                .toList();
+        StockChoice choice =
+                StockChoice.best(new CoverDemand(59.7, 120, 200, 0.08), stock).orElseThrow();
+        assertThat(choice.bareArea()).isCloseTo(0.2, within(1e-9));
+        assertThat(choice.count()).isEqualTo(6);
+        assertThat(choice.power()).isCloseTo(59.5 * 150, within(1e-9));
+    }
+
     @Test
     void refusesMoreCombinationsThanItCanLookAt() {
         List<StockItem> many = IntStream.rangeClosed(1, 12)
-                .mapToObj(i -> mat(0.1 + 0.01 * i, 15 + i))
+                .mapToObj(i -> mat(0.1 + 0.01 * Math.sqrt(i), 15 + Math.cbrt(i)))
                 .toList();
         assertThatIllegalArgumentException()
                 .isThrownBy(() -> StockChoice.best(new CoverDemand(50, 100, 200, 0.08), many))
