@@ -43,6 +43,7 @@ final class Answers {
     private final Evaluation numbers;
     private final double[] fromAbove;
     private final boolean[] hasFloorAbove;
+    private WaterLayouts waters;
 
     Answers(Evaluation numbers) {
         this.numbers = numbers;
@@ -59,6 +60,7 @@ final class Answers {
                 hasFloorAbove[floor.plan.other()] = true;
             }
         }
+        waters = WaterLayouts.of(numbers);
         List<RoomSizing> rooms = new ArrayList<>(plan.rooms);
         for (int i = 0; i < plan.rooms; i++) {
             rooms.add(room(i));
@@ -187,7 +189,7 @@ final class Answers {
                 List.copyOf(paths(node, 0)));
     }
 
-    private static Total total(List<RoomSizing> rooms) {
+    private Total total(List<RoomSizing> rooms) {
         double loss = 0;
         double power = 0;
         double area = 0;
@@ -200,7 +202,7 @@ final class Answers {
             installed += room.floor().installedPower().orElse(0);
             anyInstalled |= room.floor().installedPower().isPresent();
         }
-        return new Total(loss, power, anyInstalled ? of(installed) : empty(), area);
+        return new Total(loss, power, anyInstalled ? of(installed) : empty(), area, waters.total());
     }
 
     private static FloorSizing noFloor() {
@@ -236,6 +238,8 @@ final class Answers {
                 Optional.empty(),
                 List.of(),
                 List.of(),
+                Optional.empty(),
+                Optional.empty(),
                 Optional.empty(),
                 Optional.empty());
     }
@@ -281,7 +285,9 @@ final class Answers {
                 edges(floor),
                 limits(floor, given),
                 floor.section == null ? Optional.empty() : Optional.of(new SectionAnswers(floor, given).all()),
-                floor.sectionReason.isEmpty() ? Optional.empty() : Optional.of(floor.sectionReason));
+                floor.sectionReason.isEmpty() ? Optional.empty() : Optional.of(floor.sectionReason),
+                ElectricLayouts.of(floor, given),
+                waters.of(floor.plan.room()));
     }
 
     private FloorState state(FloorEvaluation floor, double flux) {

@@ -97,7 +97,89 @@ public record Sizing(
             List<Edge> edges,
             List<Limit> limits,
             Optional<SectionSizing> section,
-            Optional<String> sectionReason) {}
+            Optional<String> sectionReason,
+            Optional<ElectricLayout> electric,
+            Optional<WaterLayout> water) {}
+
+    /**
+     * How an electric heater is fed.
+     *
+     * @param voltage V
+     * @param cableLength of the runs at their spacing, m
+     * @param elements equal parts, each fed whole, as few as the largest usual breaker allows
+     * @param powerAtLowVoltage of the whole heater at 10 % less voltage, W
+     * @param powerAtHighVoltage of the whole heater at 10 % more voltage, W
+     */
+    public record ElectricLayout(
+            double voltage,
+            OptionalDouble cableLength,
+            List<HeatingElementLayout> elements,
+            double powerAtLowVoltage,
+            double powerAtHighVoltage,
+            List<PracticeJudgement> limits) {}
+
+    /** One element: W, A, the rating of its breaker in A, and the resistances in ohm to find when it is put into service. */
+    public record HeatingElementLayout(
+            double power,
+            double current,
+            double breaker,
+            double resistance,
+            double lowestResistance,
+            double highestResistance) {}
+
+    /**
+     * The loops of a warm-water floor, all alike, at the flux that the floor gives: the required one, or the carrying one when that is
+     * less.
+     *
+     * @param meanOvertemperature of the water over the room, K
+     * @param heat that the water leaves, W
+     * @param massFlow of all loops, kg/s
+     * @param volumeFlow of all loops, m³/s
+     * @param loopLength of one loop with its feeders, m
+     * @param pressureDrop of one loop, Pa; straight pipe, without bends and fittings
+     * @param waterContent of all loops, m³
+     * @param tableCoefficient K_H of the standard table method, W/(m²·K), to stand beside the section's result
+     * @param tableMeanOvertemperature what that method asks of the water for the same flux, K
+     */
+    public record WaterLayout(
+            double supplyTemperature,
+            double returnTemperature,
+            double spread,
+            double meanOvertemperature,
+            double heat,
+            double massFlow,
+            double volumeFlow,
+            int loops,
+            double loopLength,
+            double velocity,
+            double reynolds,
+            double frictionFactor,
+            double pressureDrop,
+            double waterContent,
+            OptionalDouble tableCoefficient,
+            OptionalDouble tableMeanOvertemperature,
+            List<PracticeJudgement> limits) {}
+
+    /** A value beside a limit of practice, in SI units and degrees Celsius; what is left is negative when it is beyond. */
+    public record PracticeJudgement(String name, double value, double limit, double margin, String source) {}
+
+    /**
+     * The warm water of the whole job: one supply temperature, which the room that needs the hottest water governs, and the balance of
+     * its loops.
+     *
+     * @param pressure drop of the worst loop, Pa: what the pump gives beside manifold and boiler
+     */
+    public record WaterTotal(
+            double supplyTemperature,
+            String governingRoom,
+            double massFlow,
+            double volumeFlow,
+            double pressure,
+            double waterContent,
+            List<LoopValve> valves) {}
+
+    /** A loop's valve: kg/s through it, the drop of its pipe and what the valve takes away, Pa. */
+    public record LoopValve(String room, int loop, double massFlow, double drop, double throttled) {}
 
     /**
      * The floor solved between its cables or pipes.
@@ -183,7 +265,12 @@ public record Sizing(
             List<PathLoss> paths) {}
 
     /** Sums over the rooms. */
-    public record Total(double heatLoss, double heaterPower, OptionalDouble installedPower, double heatedArea) {}
+    public record Total(
+            double heatLoss,
+            double heaterPower,
+            OptionalDouble installedPower,
+            double heatedArea,
+            Optional<WaterTotal> water) {}
 
     /** An assembly as it was used: its layers, and its resistance towards each kind of other side. */
     public record AssemblySizing(String name, List<LayerSizing> layers, List<SideSizing> sides) {}

@@ -48,6 +48,7 @@ public final class Working {
             paths.all(plan.floatingNodes[i], space.paths());
         }
         new TotalSteps(plan, addresses, steps).all(sizing);
+        sizing.total().water().ifPresent(water -> new LayoutSteps(addresses, steps).total(sizing.rooms(), water));
         new AssemblySteps(plan, addresses, steps).all(sizing.assemblies());
         return steps.all();
     }
@@ -58,5 +59,8 @@ public final class Working {
         new BuildUpSteps(plan, addresses, steps, floor, given).all(answer);
         new BelowSteps(plan, addresses, steps, floor).all(answer);
         new LimitSteps(plan, addresses, steps, floor, given.zone()).all(answer);
+        LayoutSteps layouts = new LayoutSteps(addresses, steps);
+        answer.electric().ifPresent(layout -> layouts.electric(floor, layout));
+        answer.water().ifPresent(layout -> layouts.water(floor, layout));
     }
 }

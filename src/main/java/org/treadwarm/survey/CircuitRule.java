@@ -1,32 +1,25 @@
 package org.treadwarm.survey;
 
-/** How much of a breaker's rating a heater that runs for hours may draw; the local code decides. Common practice, no source. */
+import java.util.Locale;
+
+/** Whose breakers an electric heater hangs on; the local code decides. Common practice, no source. */
 public enum CircuitRule implements Word {
-    FULL("full", "the whole rating", 1),
-    EIGHTY_PERCENT("80 percent", "80 % of the rating, as US practice has it for continuous loads", 0.8);
+    EUROPEAN("European ratings, used whole"),
+    US("US ratings, used to 80 % for loads that last for hours");
 
-    private final String word;
     private final String label;
-    private final double share;
 
-    CircuitRule(String word, String label, double share) {
-        this.word = word;
+    CircuitRule(String label) {
         this.label = label;
-        this.share = share;
     }
 
     @Override
     public String word() {
-        return word;
+        return name().toLowerCase(Locale.ROOT);
     }
 
     @Override
     public String label() {
         return label;
-    }
-
-    /** The share of the rating that may be drawn. */
-    public double share() {
-        return share;
     }
 }

@@ -88,10 +88,7 @@ public record Heater(
                 assumeWhy = "Nominal voltage of many public mains (IEC 60038, from memory); read the heater's label.")
         Optional<Reading> voltage,
 
-        @Wording(
-                label = "share of a breaker that may be drawn for hours",
-                help = "The local code decides.",
-                fallback = "full")
+        @Wording(label = "breakers of an electric heater", help = "The local code decides.", fallback = "european")
         CircuitRule circuitRule,
 
         @Quantity(

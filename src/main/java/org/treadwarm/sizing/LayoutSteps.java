@@ -1,0 +1,132 @@
+package org.treadwarm.sizing;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.IntStream;
+import org.treadwarm.sizing.Plan.FloorPlan;
+import org.treadwarm.sizing.Sizing.ElectricLayout;
+import org.treadwarm.sizing.Sizing.PracticeJudgement;
+import org.treadwarm.sizing.Sizing.RoomSizing;
+import org.treadwarm.sizing.Sizing.WaterLayout;
+import org.treadwarm.sizing.Sizing.WaterTotal;
+
+/** Steps of how a floor is fed: electric elements, or loops of warm water. */
+final class LayoutSteps {
+    private final Addresses addresses;
+    private final Steps steps;
+
+    LayoutSteps(Addresses addresses, Steps steps) {
+        this.addresses = addresses;
+        this.steps = steps;
+    }
+
+    void electric(FloorPlan floor, ElectricLayout layout) {
+        String floorAt = addresses.pointer(floor.room()) + "/floor";
+        String at = floorAt + "/electric";
+        Symbol voltage = symbol("U", at + "/voltage");
+        Symbol power = symbol("P", floorAt + "/installedPower");
+        steps.add(
+                at + "/voltage",
+                "voltage-given",
+                "x",
+                Symbol.of("x_given", Addresses.survey("/rooms/" + floor.room() + "/heatedFloor/heater/voltage")));
+        if (layout.cableLength().isPresent()) {
+            steps.add(
+                    at + "/cableLength",
+                    "cable-length",
+                    "l",
+                    symbol("A_F", floorAt + "/area"),
+                    Symbol.of("T", addresses.input(floor.heater().spacing())));
+        }
+        steps.add(at + "/powerAtLowVoltage", "power-at-low-voltage", "P_low", power);
+        steps.add(at + "/powerAtHighVoltage", "power-at-high-voltage", "P_high", power);
+        List<String> all = IntStream.range(0, layout.elements().size())
+                .mapToObj(i -> Addresses.sizing(at + "/elements/" + i + "/power"))
+                .toList();
+        for (int i = 0; i < layout.elements().size(); i++) {
+            String element = at + "/elements/" + i;
+            Symbol own = symbol("P_e", element + "/power");
+            steps.add(element + "/power", "element-power", "P_e", power, Symbol.all("P_each", all));
+            steps.add(element + "/current", "element-current", "I", own, voltage);
+            steps.add(element + "/breaker", "chosen", "x");
+            steps.add(element + "/resistance", "element-resistance", "R", voltage, own);
+            Symbol resistance = symbol("R", element + "/resistance");
+            steps.add(element + "/lowestResistance", "lowest-element-resistance", "R_low", resistance);
+            steps.add(element + "/highestResistance", "highest-element-resistance", "R_high", resistance);
+        }
+        judged(at, layout.limits());
+    }
+
+    void water(FloorPlan floor, WaterLayout layout) {
+        String floorAt = addresses.pointer(floor.room()) + "/floor";
+        String at = floorAt + "/water";
+        Symbol supply = symbol("theta_V", at + "/supplyTemperature");
+        Symbol spread = symbol("sigma", at + "/spread");
+        Symbol over = symbol("Delta_theta_H", at + "/meanOvertemperature");
+        Symbol room = Symbol.of("theta_i", addresses.temperature(floor.room()));
+        chosen(at, "supplyTemperature", "heat", "massFlow", "volumeFlow", "loops", "loopLength", "velocity");
+        chosen(at, "reynolds", "frictionFactor", "pressureDrop", "waterContent", "meanOvertemperature");
+        steps.add(at + "/spread", "spread-of-loop", "sigma", supply, room, over);
+        steps.add(at + "/returnTemperature", "return-temperature", "theta_R", supply, spread);
+        if (layout.tableCoefficient().isPresent()) {
+            chosen(at, "tableCoefficient");
+            steps.add(
+                    at + "/tableMeanOvertemperature",
+                    "table-overtemperature",
+                    "Delta_theta_H",
+                    symbol("q", floorAt + "/requiredFlux"),
+                    symbol("q_max", floorAt + "/carryingFlux"),
+                    symbol("K_H", at + "/tableCoefficient"));
+        }
+        judged(at, layout.limits());
+    }
+
+    /** The water of the whole job. */
+    void total(List<RoomSizing> rooms, WaterTotal water) {
+        String at = "/total/water";
+        List<String> flows = new ArrayList<>();
+        List<String> contents = new ArrayList<>();
+        List<String> supplies = new ArrayList<>();
+        List<String> drops = new ArrayList<>();
+        for (int i = 0; i < rooms.size(); i++) {
+            if (rooms.get(i).floor().water().isPresent()) {
+                String floor = "/rooms/" + i + "/floor/water";
+                flows.add(Addresses.sizing(floor + "/massFlow"));
+                contents.add(Addresses.sizing(floor + "/waterContent"));
+                supplies.add(Addresses.sizing(floor + "/supplyTemperature"));
+                drops.add(Addresses.sizing(floor + "/pressureDrop"));
+            }
+        }
+        steps.add(at + "/supplyTemperature", "hottest-supply", "theta_V", Symbol.all("theta_room", supplies));
+        steps.add(at + "/massFlow", "sum-of-flows", "m", Symbol.all("m_room", flows));
+        steps.add(at + "/waterContent", "sum-of-contents", "V", Symbol.all("V_room", contents));
+        steps.add(at + "/pressure", "worst-loop", "p", Symbol.all("p_loop", drops));
+        chosen(at, "volumeFlow");
+        for (int i = 0; i < water.valves().size(); i++) {
+            String valve = at + "/valves/" + i;
+            chosen(valve, "loop", "massFlow", "drop");
+            steps.add(
+                    valve + "/throttled",
+                    "throttled",
+                    "p_valve",
+                    symbol("p", at + "/pressure"),
+                    symbol("p_loop", valve + "/drop"));
+        }
+    }
+
+    private void judged(String at, List<PracticeJudgement> limits) {
+        for (int i = 0; i < limits.size(); i++) {
+            chosen(at + "/limits/" + i, "value", "limit", "margin");
+        }
+    }
+
+    private void chosen(String at, String... keys) {
+        for (String key : keys) {
+            steps.add(at + "/" + key, "chosen", "x");
+        }
+    }
+
+    private static Symbol symbol(String name, String pointer) {
+        return Symbol.of(name, Addresses.sizing(pointer));
+    }
+}
