@@ -3,7 +3,8 @@ package org.treadwarm.physics.warmup;
 /**
  * How fine time and space are divided.
  *
- * @param tolerance largest estimated error of one time step at any node, K, more than 0
+ * @param tolerance largest estimated error of one time step at any node, K, or K per 100 °C of a node that is hotter, more
+ *     than 0
  * @param refinement into how many equal parts each cell of the standard grid is divided, 1 to 64
  */
 public record Accuracy(double tolerance, int refinement) {

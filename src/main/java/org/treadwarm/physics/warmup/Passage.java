@@ -7,7 +7,7 @@ import java.util.function.BooleanSupplier;
 final class Passage {
     private static final int MOST_STEPS = 50_000;
     private static final double FIRST_STEP = 1;
-    private static final double SHORTEST_STEP = 1e-9;
+    private static final double SHORTEST_STEP = 1e-12;
     private static final double SAFETY = 0.9;
 
     /** How near a target is met, K, and how near its step, as a share of it. */

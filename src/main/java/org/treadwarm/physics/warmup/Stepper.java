@@ -17,7 +17,10 @@ final class Stepper {
     private static final double INSTANT = 1e-25;
 
     private static final int MOST_ITERATIONS = 30;
-    private static final double CONVERGED = 1e-11;
+    private static final double CONVERGED = 1e-10;
+
+    /** Beyond it errors count relative to the temperature, °C: no room, but the plane of a heater wrapped up far too well. */
+    private static final double HOT = 100;
 
     private final Chain chain;
     private final int nodes;
@@ -152,9 +155,13 @@ final class Stepper {
         solve();
         double largest = 0;
         for (int i = 0; i < nodes; i++) {
-            largest = Math.max(largest, Math.abs(change[i]));
+            largest = Math.max(largest, relative(change[i], next[i]));
         }
         return largest;
+    }
+
+    private static double relative(double change, double temperature) {
+        return Math.abs(change) / Math.max(1, Math.abs(temperature) / HOT);
     }
 
     /** Solves capacity (T - base)/implicit = flows(T) by Newton's method from the temperatures given. */
@@ -171,7 +178,7 @@ final class Stepper {
             double largest = 0;
             for (int i = 0; i < nodes; i++) {
                 temperatures[i] += change[i];
-                largest = Math.max(largest, Math.abs(change[i]));
+                largest = Math.max(largest, relative(change[i], temperatures[i]));
             }
             if (linear || largest < CONVERGED) {
                 return true;

@@ -167,6 +167,15 @@ class WarmUpTest {
     }
 
     @Test
+    void whatIsColdAlreadyTakesNoTime() {
+        assertThat(PowerCut.of(linear, 4, 24 * HOUR, NEVER).secondsToFive()).hasValue(0);
+        WarmUp mild = new WarmUp(Floors.screed(), new Room(9045, 150_000, 8, 1.2, 8, 0));
+        assertThat(PowerCut.of(mild, 4, 240 * HOUR, NEVER).secondsToFive())
+                .as("it would be 8 °C and more without heat, and never cools to 5 °C")
+                .isEmpty();
+    }
+
+    @Test
     void samplesAtEqualTimes() {
         Curve curve = linear.curve(linear.held(16), 150, 6 * HOUR, 12, NEVER);
         assertThat(curve.moments()).hasSize(13);
