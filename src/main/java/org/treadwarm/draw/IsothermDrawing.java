@@ -1,11 +1,8 @@
 package org.treadwarm.draw;
 
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Collections;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.stream.Collectors;
 
 /**
@@ -17,9 +14,6 @@ public final class IsothermDrawing {
     private static final double AXIS = 46;
     private static final double ARROW = 46;
     private static final double GROUND = 20;
-    private static final Stroke ISOTHERM = new Stroke(Palette.INK, 1.25, "");
-    /** Under each isotherm, so that the hatching does not run into it. */
-    private static final Stroke HALO = new Stroke(Palette.PAPER, 4, "");
 
     private final Canvas canvas;
     private final Sheet sheet;
@@ -72,8 +66,9 @@ public final class IsothermDrawing {
         LayerNumbers.draw(canvas, plane, spans, scale.width(), top - space, bottom() + space);
         canvas.line(new Point(scale.left(), top), new Point(scale.right(), top), Stroke.HEAVY);
         SideLabels labels = new SideLabels(scale.right(), sheet.width() - MARGIN);
-        List<String> unlabelled = isotherms(labels);
-        heaters(labels);
+        IsothermPainter painter = new IsothermPainter(canvas, scale, field, levels, spans);
+        List<String> unlabelled = painter.isotherms(labels);
+        painter.heaters(labels);
         double end = Math.max(bottom() + GROUND, top - ARROW + labels.height());
         labels.draw(canvas, top - ARROW, end);
         double under = beneath(Math.max(0, space - GROUND), end);
@@ -85,86 +80,6 @@ public final class IsothermDrawing {
 
     private double bottom() {
         return spans.get(spans.size() - 1).end();
-    }
-
-    private double axis() {
-        return scale.down(top, section.heater().depth(), false, false);
-    }
-
-    private double radius() {
-        return Math.max(2.5, section.heater().diameter() / 2 * scale.scale());
-    }
-
-    /**
-     * Draws the isotherms, each broken for its temperature; where there is no room it stands at the right, if the line
-     * goes there. Returns the temperatures that stand nowhere.
-     */
-    private List<String> isotherms(SideLabels labels) {
-        Isolines isolines = new Isolines(field.columns(), field.rows(top), field.temperatures());
-        Map<Double, List<List<Point>>> lines = new LinkedHashMap<>();
-        levels.values().forEach(level -> lines.put(level, isolines.at(level)));
-        Box frame = new Box(scale.left(), top, scale.width(), bottom() - top);
-        // Right of the heater in the middle, where the lines are neither level nor upright.
-        double wanted = scale.middle() + Math.max(0.25 * scale.pitch(), radius() + 12);
-        IsothermLabels places = new IsothermLabels(frame.grown(-3), wanted, taken());
-        List<String> unlabelled = new ArrayList<>();
-        List<List<Point>> pieces = new ArrayList<>();
-        lines.forEach((level, line) -> {
-            String text = levels.text(level);
-            List<Box> gap = places.place(level, text, lines);
-            line.forEach(whole -> pieces.addAll(LineBreak.outside(whole, gap)));
-            if (gap.isEmpty() && !line.isEmpty() && !beside(line, text + "\u00a0°C", labels)) {
-                unlabelled.add(text);
-            }
-            gap.forEach(box -> label(box, text));
-        });
-        pieces.forEach(piece -> canvas.polyline(piece, HALO));
-        pieces.forEach(piece -> canvas.polyline(piece, ISOTHERM));
-        return unlabelled;
-    }
-
-    private boolean beside(List<List<Point>> lines, String text, SideLabels labels) {
-        return lines.stream()
-                .flatMap(List::stream)
-                .filter(point -> point.x() > scale.right() - 0.01)
-                .findFirst()
-                .map(point -> {
-                    labels.add(point.y(), text);
-                    return true;
-                })
-                .orElse(false);
-    }
-
-    private void label(Box box, String text) {
-        canvas.rectangle(box.grown(-1), Palette.PAPER, Stroke.NONE);
-        canvas.text(new Point(box.middleX(), box.middleY()), text, TextStyle.PLAIN.at(TextStyle.Anchor.MIDDLE));
-    }
-
-    /** Faces of layers, bands, heaters and the leader to the heater's words. */
-    private List<Box> taken() {
-        List<Box> taken = new ArrayList<>();
-        for (LayerSpan span : spans) {
-            boolean band = span.drawn() == LayerSpan.Drawn.SYMBOL;
-            taken.add(new Box(scale.left(), span.start(), scale.width(), band ? span.end() - span.start() : 1));
-        }
-        scale.axes().forEach(x -> taken.add(new Box(x, axis(), 0, 0).grown(radius() + 2)));
-        double last = scale.axes().get(scale.spacings() - 1);
-        taken.add(new Box(last, axis() - 1, scale.right() - last, 2));
-        return taken;
-    }
-
-    private void heaters(SideLabels labels) {
-        double last = scale.axes().get(scale.spacings() - 1) + radius();
-        canvas.line(new Point(last, axis()), new Point(scale.right(), axis()), Stroke.LEADER);
-        for (double x : scale.axes()) {
-            Point at = new Point(x, axis());
-            canvas.circle(at, radius() + 2, Palette.PAPER, Stroke.NONE);
-            canvas.circle(at, radius(), radius() > 9 ? Palette.PALE_ACCENT : Palette.ACCENT, Stroke.HEAVY);
-        }
-        labels.add(
-                axis(),
-                section.heater().words(),
-                "axis " + Figures.thickness(section.heater().depth()) + " down");
     }
 
     /** An upright arrow with its number beside it. */

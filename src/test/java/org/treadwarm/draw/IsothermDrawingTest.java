@@ -16,7 +16,7 @@ class IsothermDrawingTest {
     void namesSurfaceHeaterAndWhereHeatGoes() {
         assertThat(words(Sheet.wide("i"), SectionSamples.cable()))
                 .contains("highest\n28.7 °C", "mean\n28.5 °C", "lowest\n28.3 °C", "limit\n31.0 °C")
-                .contains("cable 6 mm\naxis 40 mm down", "spacing 150 mm", "heat up\n70.0 W/m²", "heat down\n11.8 W/m²")
+                .contains("cable 6 mm\naxis at 40 mm", "spacing 150 mm", "heat up\n70.0 W/m²", "heat down\n11.8 W/m²")
                 .contains("Lines of equal temperature every 1 K, from 24 to 32 °C.", "beneath: ground, 9.0 °C");
     }
 
@@ -35,6 +35,29 @@ class IsothermDrawingTest {
             }
             assertThat(words).contains("No room for a number at: 32 °C.");
         }
+    }
+
+    @Test
+    void drawsAFloorAtOneTemperatureWithoutALimit() {
+        IsothermSection cable = SectionSamples.cable();
+        TemperatureField even = new TemperatureField(
+                new double[] {0, 0.075}, new double[] {0.01, 0.1}, new double[][] {{20, 20}, {20, 20}});
+        String words = words(
+                Sheet.wide("i"),
+                new IsothermSection(
+                        cable.name(),
+                        cable.room(),
+                        cable.layers(),
+                        cable.heater(),
+                        cable.spacing(),
+                        even,
+                        new SurfaceProfile(List.of(20.0, 20.0), 20, 20, 20, OptionalDouble.empty()),
+                        cable.beneath(),
+                        0,
+                        0));
+        assertThat(words)
+                .contains("No isotherms: the temperatures hardly differ.", "mean\n20.0 °C")
+                .doesNotContain("limit");
     }
 
     @Test
