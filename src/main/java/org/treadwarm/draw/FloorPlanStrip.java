@@ -11,7 +11,7 @@ import java.util.OptionalDouble;
  * @param width size from left to right in m, 0.3 to 100
  * @param length size from top to bottom in m, 0.3 to 100
  * @param heatedArea heated area in m² to be named, above 0, if it is known
- * @param units what stands on the floor for good, at most 20, within the room
+ * @param units what stands on the floor for good, at most 12, within the room
  * @param runs how cable or pipe is laid
  * @param zone a strip along the walls with a spacing of its own, if there is one; it leaves some of the room
  * @param loops into how many circuits the floor, but for that strip, is divided, 1 to 50
@@ -27,7 +27,9 @@ public record FloorPlanStrip(
         Optional<PeripheralZone> zone,
         int loops,
         Optional<PlanMark> mark) {
-    private static final int MOST_UNITS = 20;
+    /** Their letters end before those of the marks. */
+    private static final int MOST_UNITS = 12;
+
     private static final int MOST_LOOPS = 50;
     /** In m; places are sums, which may miss the wall by a little. */
     private static final double ROUNDING = 1e-6;

@@ -45,9 +45,7 @@ final class SurfaceChart {
         canvas.rectangle(new Box(scale.left(), top, scale.width(), height), Palette.NONE, Stroke.THIN);
         List<Point> line = new ArrayList<>();
         for (int i = 0; i < columns.length; i++) {
-            if (!Double.isNaN(temperatures[i])) {
-                line.add(new Point(columns[i], y(top, temperatures[i])));
-            }
+            line.add(new Point(columns[i], y(top, temperatures[i])));
         }
         canvas.polyline(line, Stroke.ACCENT);
         labels(top).draw(canvas, top, top + height);
