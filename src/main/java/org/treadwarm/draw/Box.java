@@ -25,4 +25,17 @@ record Box(double x, double y, double width, double height) {
     double middleY() {
         return y + height / 2;
     }
+
+    /** The box with so much added on every side. */
+    Box grown(double by) {
+        return new Box(x - by, y - by, width + 2 * by, height + 2 * by);
+    }
+
+    boolean holds(Box other) {
+        return other.x >= x && other.right() <= right() && other.y >= y && other.bottom() <= bottom();
+    }
+
+    boolean meets(Box other) {
+        return other.x < right() && other.right() > x && other.y < bottom() && other.bottom() > y;
+    }
 }

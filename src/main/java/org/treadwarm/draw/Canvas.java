@@ -99,6 +99,11 @@ final class Canvas {
         return pattern("gain", Hatch::gain);
     }
 
+    /** The fill of what stands on a floor in plan. */
+    String unitHatch() {
+        return pattern("unit", Hatch::unit);
+    }
+
     private String pattern(String word, Function<String, Svg> drawn) {
         String id = sheet.idPrefix() + "-hatch-" + word;
         if (patterns.add(id)) {

@@ -23,6 +23,18 @@ final class Checks {
         return value;
     }
 
+    static void positive(String what, double value) {
+        if (drawable(what, value) <= 0) {
+            throw new IllegalArgumentException(what + " must be above 0, not " + value);
+        }
+    }
+
+    static void within(String what, double value, double least, double most) {
+        if (!(value >= least && value <= most)) {
+            throw new IllegalArgumentException(what + " is " + least + " to " + most + ", not " + value);
+        }
+    }
+
     /** In °C, above absolute zero and below any fire. */
     static void temperature(String what, double value) {
         if (!(value >= -273.15 && value <= 1000)) {

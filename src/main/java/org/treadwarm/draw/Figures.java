@@ -41,6 +41,22 @@ final class Figures {
         return rounded(millimetres, whole ? 0 : 1) + JOIN + "mm";
     }
 
+    /** Hours and whole minutes from hours, such as "2 h 40 min"; whole hours from two days on. */
+    static String duration(double hours) {
+        long minutes = decimal(hours * 60).setScale(0, RoundingMode.HALF_UP).longValueExact();
+        if (minutes >= 48 * 60) {
+            return rounded(hours, 0) + JOIN + "h";
+        }
+        String whole = minutes / 60 + JOIN + "h";
+        String rest = minutes % 60 + JOIN + "min";
+        return minutes < 60 ? rest : minutes % 60 == 0 ? whole : whole + JOIN + rest;
+    }
+
+    /** Metres with two decimals. */
+    static String metres(double metres) {
+        return rounded(metres, 2) + JOIN + "m";
+    }
+
     /** Whole percent from a fraction; a share that would round to nothing is said to be under 1 %. */
     static String percent(double fraction) {
         if (fraction > 0 && fraction < 0.005) {

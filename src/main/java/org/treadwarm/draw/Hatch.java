@@ -44,6 +44,11 @@ final class Hatch {
         return tile(id, 9, 9, Palette.PAPER).add(stroke("M-1 -1 L10 10 M-1 8 L1 10 M8 -1 L10 1"));
     }
 
+    /** For what stands on a floor in plan. */
+    static Svg unit(String id) {
+        return tile(id, 8, 8, Palette.PAPER).add(stroke("M-1 9 L9 -1 M-1 1 L1 -1 M7 9 L9 7"));
+    }
+
     private static Svg tile(String id, double width, double height, String ground) {
         return Svg.element("pattern")
                 .with("id", id)

@@ -135,13 +135,13 @@ class DrawingsTest {
         return (random.nextDouble() - 0.25) * Math.pow(10, random.nextInt(5));
     }
 
-    private static String name(Random random) {
+    static String name(Random random) {
         return some(random, 7, 1).stream()
                 .map(i -> WORDS[random.nextInt(WORDS.length)])
                 .collect(Collectors.joining(" "));
     }
 
-    private static List<Layer> layers(Random random, int least) {
+    static List<Layer> layers(Random random, int least) {
         return some(random, 15, least).stream()
                 .map(i -> {
                     double thickness = Math.pow(10, -random.nextDouble() * 4);
