@@ -19,11 +19,11 @@ import org.treadwarm.physics.section.FloorSection;
 import org.treadwarm.physics.section.FloorTemperatures;
 import org.treadwarm.physics.section.Grid;
 import org.treadwarm.physics.section.GridLines;
+import org.treadwarm.physics.section.GroundStrip;
 import org.treadwarm.physics.section.Section;
 import org.treadwarm.physics.section.Section.Block;
 import org.treadwarm.physics.section.Section.Edge;
 import org.treadwarm.physics.section.Section.Side;
-import org.treadwarm.physics.section.WallFoot;
 
 /** Conduction through sections: cases of ISO 10211, heated floors and slabs on the ground. */
 final class SectionChecks {
@@ -157,7 +157,7 @@ final class SectionChecks {
     private static Map<String, DoubleStream> slab(Inputs given) {
         double soil = given.number("lambda_g");
         double resistance = (given.number("d_t") - given.number("w")) / soil - OUTSIDE_FILM;
-        double got = WallFoot.slabTransmittance(
+        double got = GroundStrip.transmittance(
                 given.number("B") / 2, given.number("w"), soil, resistance, OUTSIDE_FILM, () -> false);
         return Map.of("U_numeric", DoubleStream.of(got));
     }

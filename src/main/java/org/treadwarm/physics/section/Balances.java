@@ -1,10 +1,7 @@
 package org.treadwarm.physics.section;
 
 import java.util.Arrays;
-import org.treadwarm.physics.section.Section.Air;
-import org.treadwarm.physics.section.Section.Block;
 import org.treadwarm.physics.section.Section.Edge;
-import org.treadwarm.physics.section.Section.Sheet;
 import org.treadwarm.physics.section.Section.Side;
 
 /**
@@ -12,12 +9,6 @@ import org.treadwarm.physics.section.Section.Side;
  * between middles, so that fluxes through layers are exact).
  */
 final class Balances {
-    /** Marks a cell of solid material. */
-    private static final int SOLID = -1;
-
-    /** Marks a cell without material. */
-    private static final int EMPTY = -2;
-
     final Section section;
     final Grid grid;
     final Lattice lattice;
@@ -28,9 +19,7 @@ final class Balances {
     /** Heat made in each cell, W/m. */
     final double[] heat;
 
-    private final double[] conductivity;
-    private final int[] kind;
-    private final double[] sheets;
+    final Materials materials;
 
     Balances(Section section, Grid grid) {
         this.section = section;
@@ -38,57 +27,13 @@ final class Balances {
         this.lattice = new Lattice(grid.columns(), grid.rows());
         this.links = new KnownLinks(section.knownCount());
         this.heat = new double[lattice.cells()];
-        this.conductivity = new double[lattice.cells()];
-        this.kind = new int[lattice.cells()];
-        this.sheets = new double[grid.columns() * (grid.rows() + 1)];
-        paint();
-        lay();
+        this.materials = new Materials(section, grid);
         joinInside();
         for (int edge = 0; edge < section.edges().size(); edge++) {
             joinEdge(edge, section.edges().get(edge));
         }
         Circles.join(this);
         hold();
-    }
-
-    private void paint() {
-        Arrays.fill(kind, EMPTY);
-        for (Block block : section.blocks()) {
-            paint(block.left(), block.right(), block.bottom(), block.top(), SOLID, block.conductivity());
-        }
-        for (int i = 0; i < section.airs().size(); i++) {
-            Air air = section.airs().get(i);
-            paint(
-                    air.left(),
-                    air.right(),
-                    air.bottom(),
-                    air.top(),
-                    section.edges().size() + i,
-                    0);
-        }
-    }
-
-    private void paint(double left, double right, double bottom, double top, int mark, double conducts) {
-        for (int row = 0; row < grid.rows(); row++) {
-            double y = grid.y(row);
-            for (int column = 0; y > bottom && y < top && column < grid.columns(); column++) {
-                if (grid.x(column) > left && grid.x(column) < right) {
-                    kind[lattice.cell(column, row)] = mark;
-                    conductivity[lattice.cell(column, row)] = conducts;
-                }
-            }
-        }
-    }
-
-    private void lay() {
-        for (Sheet sheet : section.sheets()) {
-            int line = grid.lineAt(sheet.height());
-            for (int column = 0; column < grid.columns(); column++) {
-                if (grid.x(column) > sheet.left() && grid.x(column) < sheet.right()) {
-                    sheets[line * grid.columns() + column] += sheet.resistance();
-                }
-            }
-        }
     }
 
     private void joinInside() {
@@ -108,25 +53,50 @@ final class Balances {
     private void joinRight(int cell, int column, int row) {
         int next = cell + 1;
         double area = grid.height(row);
-        if (kind[cell] == SOLID && kind[next] == SOLID) {
-            lattice.right[cell] = area / (halfWidth(column, row) + halfWidth(column + 1, row));
-        } else if (kind[cell] == SOLID && kind[next] >= 0) {
-            known(cell, Heading.RIGHT, kind[next], area, halfWidth(column, row), upright(kind[next]));
-        } else if (kind[cell] >= 0 && kind[next] == SOLID) {
-            known(next, Heading.LEFT, kind[cell], area, halfWidth(column + 1, row), upright(kind[cell]));
+        if (materials.isSolid(cell) && materials.isSolid(next)) {
+            lattice.right[cell] = area / (materials.halfWidth(column, row) + materials.halfWidth(column + 1, row));
+        } else if (materials.isSolid(cell) && materials.knownIn(next) >= 0) {
+            known(
+                    cell,
+                    Heading.RIGHT,
+                    materials.knownIn(next),
+                    area,
+                    materials.halfWidth(column, row),
+                    upright(materials.knownIn(next)));
+        } else if (materials.knownIn(cell) >= 0 && materials.isSolid(next)) {
+            known(
+                    next,
+                    Heading.LEFT,
+                    materials.knownIn(cell),
+                    area,
+                    materials.halfWidth(column + 1, row),
+                    upright(materials.knownIn(cell)));
         }
     }
 
     private void joinUp(int cell, int column, int row) {
         int above = cell + grid.columns();
         double area = grid.width(column);
-        double sheet = sheet(column, row + 1);
-        if (kind[cell] == SOLID && kind[above] == SOLID) {
-            lattice.up[cell] = area / (halfHeight(column, row) + sheet + halfHeight(column, row + 1));
-        } else if (kind[cell] == SOLID && kind[above] >= 0) {
-            known(cell, Heading.UP, kind[above], area, halfHeight(column, row) + sheet, level(kind[above]));
-        } else if (kind[cell] >= 0 && kind[above] == SOLID) {
-            known(above, Heading.DOWN, kind[cell], area, halfHeight(column, row + 1) + sheet, level(kind[cell]));
+        double sheet = materials.sheet(column, row + 1);
+        if (materials.isSolid(cell) && materials.isSolid(above)) {
+            lattice.up[cell] =
+                    area / (materials.halfHeight(column, row) + sheet + materials.halfHeight(column, row + 1));
+        } else if (materials.isSolid(cell) && materials.knownIn(above) >= 0) {
+            known(
+                    cell,
+                    Heading.UP,
+                    materials.knownIn(above),
+                    area,
+                    materials.halfHeight(column, row) + sheet,
+                    level(materials.knownIn(above)));
+        } else if (materials.knownIn(cell) >= 0 && materials.isSolid(above)) {
+            known(
+                    above,
+                    Heading.DOWN,
+                    materials.knownIn(cell),
+                    area,
+                    materials.halfHeight(column, row + 1) + sheet,
+                    level(materials.knownIn(cell)));
         }
     }
 
@@ -152,22 +122,28 @@ final class Balances {
 
     private void joinEdge(int known, Edge edge, int column, int row) {
         int cell = lattice.cell(column, row);
-        if (kind[cell] != SOLID) {
+        if (!materials.isSolid(cell)) {
             return;
         }
         double film = film(edge.condition());
         switch (edge.side()) {
-            case LEFT -> known(cell, Heading.LEFT, known, grid.height(row), halfWidth(column, row), film);
-            case RIGHT -> known(cell, Heading.RIGHT, known, grid.height(row), halfWidth(column, row), film);
+            case LEFT -> known(cell, Heading.LEFT, known, grid.height(row), materials.halfWidth(column, row), film);
+            case RIGHT -> known(cell, Heading.RIGHT, known, grid.height(row), materials.halfWidth(column, row), film);
             case BOTTOM ->
-                known(cell, Heading.DOWN, known, grid.width(column), halfHeight(column, row) + sheet(column, 0), film);
+                known(
+                        cell,
+                        Heading.DOWN,
+                        known,
+                        grid.width(column),
+                        materials.halfHeight(column, row) + materials.sheet(column, 0),
+                        film);
             case TOP ->
                 known(
                         cell,
                         Heading.UP,
                         known,
                         grid.width(column),
-                        halfHeight(column, row) + sheet(column, grid.rows()),
+                        materials.halfHeight(column, row) + materials.sheet(column, grid.rows()),
                         film);
         }
     }
@@ -189,7 +165,7 @@ final class Balances {
         Arrays.fill(lattice.held, 0);
         links.addTo(lattice.held);
         for (int cell = 0; cell < lattice.cells(); cell++) {
-            if (kind[cell] != SOLID) {
+            if (!materials.isSolid(cell)) {
                 lattice.held[cell] = 1;
             }
         }
@@ -198,36 +174,6 @@ final class Balances {
     /** Takes over films that have changed. */
     void filmsChanged() {
         hold();
-    }
-
-    /** Takes a cell out of the unknowns: it is inside a known temperature. */
-    void replace(int cell, int known) {
-        kind[cell] = known;
-    }
-
-    boolean isSolid(int cell) {
-        return kind[cell] == SOLID;
-    }
-
-    /** The known temperature that fills a cell, or a negative number for a solid or empty cell. */
-    int knownIn(int cell) {
-        return kind[cell];
-    }
-
-    double conductivity(int cell) {
-        return conductivity[cell];
-    }
-
-    double sheet(int column, int line) {
-        return sheets[line * grid.columns() + column];
-    }
-
-    double halfWidth(int column, int row) {
-        return grid.width(column) / 2 / conductivity[lattice.cell(column, row)];
-    }
-
-    double halfHeight(int column, int row) {
-        return grid.height(row) / 2 / conductivity[lattice.cell(column, row)];
     }
 
     /** Flux out of a solid cell through one of its faces, W/m²; 0 through an adiabatic one. */

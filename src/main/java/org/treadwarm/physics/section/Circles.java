@@ -55,7 +55,7 @@ final class Circles {
         Require.that(total > 0, "the grid is too coarse for a cable of a radius of " + cable.radius() + " m");
         for (int cell = 0; cell < covered.length; cell++) {
             if (covered[cell] > 0) {
-                Require.that(balances.isSolid(cell), "a cable must lie in solid material");
+                Require.that(balances.materials.isSolid(cell), "a cable must lie in solid material");
                 balances.heat[cell] += heat * covered[cell] / total;
             }
         }

@@ -7,7 +7,7 @@ import org.treadwarm.physics.section.Condition.BasicCharacteristic;
 /** Steady conduction through a section on one grid. */
 public final class Conduction {
     /** Most cells of a grid; a bound on memory and time of any one request. */
-    public static final int MOST_CELLS = 4_000_000;
+    public static final int MOST_CELLS = 1_200_000;
 
     /** Relative change of the films at which the basic characteristic counts as met. */
     private static final double FILM_TOLERANCE = 1e-9;
@@ -81,7 +81,7 @@ public final class Conduction {
             differences[i] = known[i] - reference;
         }
         for (int cell = 0; cell < guess.length; cell++) {
-            guess[cell] = balances.isSolid(cell) ? guess[cell] - reference : 0;
+            guess[cell] = balances.materials.isSolid(cell) ? guess[cell] - reference : 0;
         }
         Convergence convergence = solver.solve(balances.load(differences, heatFactor), guess, tolerance, stopped);
         for (int cell = 0; cell < guess.length; cell++) {

@@ -22,8 +22,8 @@ public final class Field {
     /** Cells inside pipes and air show those temperatures. */
     private void fillKnown() {
         for (int cell = 0; cell < temperature.length; cell++) {
-            if (balances.knownIn(cell) >= 0) {
-                temperature[cell] = known[balances.knownIn(cell)];
+            if (balances.materials.knownIn(cell) >= 0) {
+                temperature[cell] = known[balances.materials.knownIn(cell)];
             }
         }
     }

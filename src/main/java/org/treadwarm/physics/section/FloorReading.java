@@ -126,18 +126,18 @@ final class FloorReading {
     private double overLine(int column, int line) {
         int above = balances.lattice.cell(column, line);
         double flux = flux(column, line);
-        if (balances.isSolid(above)) {
-            return field.temperatures()[above] + flux * balances.halfHeight(column, line);
+        if (balances.materials.isSolid(above)) {
+            return field.temperatures()[above] + flux * balances.materials.halfHeight(column, line);
         }
         int below = above - grid.columns();
         return field.temperatures()[below]
-                - flux * (balances.halfHeight(column, line - 1) + balances.sheet(column, line));
+                - flux * (balances.materials.halfHeight(column, line - 1) + balances.materials.sheet(column, line));
     }
 
     /** Upward flux through a line, W/m². */
     private double flux(int column, int line) {
         double[] temperature = field.temperatures();
-        if (line > 0 && balances.isSolid(balances.lattice.cell(column, line - 1))) {
+        if (line > 0 && balances.materials.isSolid(balances.lattice.cell(column, line - 1))) {
             return balances.flux(column, line - 1, Heading.UP, temperature, field.known());
         }
         return -balances.flux(column, line, Heading.DOWN, temperature, field.known());

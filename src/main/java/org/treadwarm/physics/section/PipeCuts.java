@@ -104,7 +104,7 @@ final class PipeCuts {
                 to - pipe.y(),
                 conductivity(cell),
                 conductivity(above),
-                balances.sheet(column, row + 1));
+                balances.materials.sheet(column, row + 1));
         boolean wet = pipe.holdsWater(grid.x(column), from);
         boolean wetNext = pipe.holdsWater(grid.x(column), to);
         lattice.up[cell] = join(line, inner, outer, wet, wetNext, grid.width(column), share, cell, above, false);
@@ -154,8 +154,8 @@ final class PipeCuts {
     }
 
     private double conductivity(int cell) {
-        Require.that(balances.isSolid(cell), "a pipe must lie in solid material");
-        return balances.conductivity(cell);
+        Require.that(balances.materials.isSolid(cell), "a pipe must lie in solid material");
+        return balances.materials.conductivity(cell);
     }
 
     /** The integral of the cosine sqrt(1 - (u/r)²) over u from..to, inside the inner circle. */
@@ -174,7 +174,7 @@ final class PipeCuts {
         for (int row = 0; row < grid.rows(); row++) {
             for (int column = 0; column < grid.columns(); column++) {
                 if (pipe.holdsWater(grid.x(column), grid.y(row))) {
-                    balances.replace(lattice.cell(column, row), known);
+                    balances.materials.replace(lattice.cell(column, row), known);
                 }
             }
         }

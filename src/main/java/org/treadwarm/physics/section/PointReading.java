@@ -21,7 +21,7 @@ final class PointReading {
         int column = grid.columnAt(x);
         int row = grid.rowAt(y);
         int cell = balances.lattice.cell(column, row);
-        if (!balances.isSolid(cell)) {
+        if (!balances.materials.isSolid(cell)) {
             return temperature[cell];
         }
         Heading across = x < grid.x(column) ? Heading.LEFT : Heading.RIGHT;
@@ -40,14 +40,14 @@ final class PointReading {
     /** Temperature of a solid cell's face, on the cell's side of it. */
     private double face(int column, int row, Heading side) {
         boolean across = side == Heading.LEFT || side == Heading.RIGHT;
-        double half = across ? balances.halfWidth(column, row) : balances.halfHeight(column, row);
+        double half = across ? balances.materials.halfWidth(column, row) : balances.materials.halfHeight(column, row);
         return temperature[balances.lattice.cell(column, row)]
                 - balances.flux(column, row, side, temperature, known) * half;
     }
 
     /** A corner: what each cell around it would have there, those of higher conductivity counting more. */
     private double corner(int column, int row, Heading across, Heading upward) {
-        boolean sheet = balances.sheet(column, upward == Heading.UP ? row + 1 : row) > 0;
+        boolean sheet = balances.materials.sheet(column, upward == Heading.UP ? row + 1 : row) > 0;
         double sum = 0;
         double weights = 0;
         for (int beside = 0; beside < 2; beside++) {
@@ -60,8 +60,8 @@ final class PointReading {
                     Heading toLevel = over == 0 ? upward : opposite(upward);
                     double there =
                             face(nearColumn, nearRow, toSide) + face(nearColumn, nearRow, toLevel) - temperature[cell];
-                    sum += balances.conductivity(cell) * there;
-                    weights += balances.conductivity(cell);
+                    sum += balances.materials.conductivity(cell) * there;
+                    weights += balances.materials.conductivity(cell);
                 }
             }
         }
@@ -73,7 +73,7 @@ final class PointReading {
                 && column < grid.columns()
                 && row >= 0
                 && row < grid.rows()
-                && balances.isSolid(balances.lattice.cell(column, row));
+                && balances.materials.isSolid(balances.lattice.cell(column, row));
     }
 
     private static Heading opposite(Heading heading) {

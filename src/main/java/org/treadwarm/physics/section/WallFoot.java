@@ -33,15 +33,6 @@ public record WallFoot(
         double soilConductivity,
         double insideFilm,
         double outsideFilm) {
-    /** Ground beside and below, in widths of the whole floor. */
-    static final double GROUND_WIDTHS = 2.5;
-
-    /** Cells grow by this much per metre of distance from the wall's foot, on the first grid. */
-    private static final double GROWTH = 0.2;
-
-    /** Cells across the wall, on the first grid. */
-    private static final int CELLS_IN_WALL = 6;
-
     /**
      * Cells where the heated plane ends at the wall or at the edge insulation, m. The flux grows there without bound, at the wall as the
      * distance to the power of -2/3: a given temperature meets an almost adiabatic face at an angle of 270°.
@@ -50,9 +41,6 @@ public record WallFoot(
 
     /** Assumed order of the coupling's error; 1 to 1.6 is observed. */
     private static final double CORNER_ORDER = 1;
-
-    /** Assumed order of the error where a film ends beside an adiabatic stretch; 2 is observed. */
-    private static final double EDGE_ORDER = 1.5;
 
     public WallFoot {
         slab = List.copyOf(slab);
@@ -108,7 +96,7 @@ public record WallFoot(
     public WallFootCoupling solve(BooleanSupplier stopped) {
         Refinement.Answer coupling =
                 Refinement.of(section(), grid(), field -> field.heatToAir(0), CORNER_ORDER, stopped);
-        double slabCoefficient = slabTransmittance(
+        double slabCoefficient = GroundStrip.transmittance(
                 halfWidth, wall.thickness(), soilConductivity, slabResistance(), outsideFilm, stopped);
         return new WallFootCoupling(
                 coupling.value(),
@@ -124,50 +112,8 @@ public record WallFoot(
         return slab.stream().mapToDouble(FloorLayer::resistance).sum();
     }
 
-    /**
-     * Transmittance of a long slab with the ground below it, computed in section: the slab as a resistance on the ground, and nothing but
-     * an adiabatic stretch where the wall stands.
-     *
-     * @param halfWidth half the floor's width, m
-     * @param wallThickness m
-     * @param soilConductivity W/(m·K)
-     * @param resistance from the inside temperature to the ground's surface, m²·K/W, more than 0
-     * @param outsideFilm resistance outside, m²·K/W, more than 0
-     * @param stopped asked at every step of the solver whether to give up
-     * @return W/(m²·K) of the floor
-     */
-    public static double slabTransmittance(
-            double halfWidth,
-            double wallThickness,
-            double soilConductivity,
-            double resistance,
-            double outsideFilm,
-            BooleanSupplier stopped) {
-        double ground = GROUND_WIDTHS * 2 * halfWidth;
-        double outer = halfWidth + wallThickness;
-        Section section = Section.of(
-                List.of(new Block(0, outer + ground, 0, ground, soilConductivity)),
-                List.of(
-                        new Section.Edge(Section.Side.TOP, 0, halfWidth, new Condition.Film(1, 1 / resistance)),
-                        new Section.Edge(
-                                Section.Side.TOP, outer, outer + ground, new Condition.Film(0, 1 / outsideFilm))));
-        double size = wallThickness / CELLS_IN_WALL;
-        Grid grid = new Grid(
-                new GridLines(GROWTH, ground)
-                        .fine(halfWidth, outer, size)
-                        .at(0)
-                        .at(outer + ground)
-                        .lines(),
-                new GridLines(GROWTH, ground)
-                        .fine(ground - size, ground, size)
-                        .at(0)
-                        .lines());
-        return Refinement.of(section, grid, field -> field.heatToEdge(1) / halfWidth, EDGE_ORDER, stopped)
-                .value();
-    }
-
     private double ground() {
-        return GROUND_WIDTHS * 2 * halfWidth;
+        return GroundStrip.GROUND_WIDTHS * 2 * halfWidth;
     }
 
     private double plane() {
@@ -207,13 +153,14 @@ public record WallFoot(
     }
 
     private Grid grid() {
-        double size = wall.thickness() / CELLS_IN_WALL;
+        double size = wall.thickness() / GroundStrip.CELLS_IN_WALL;
         double outer = halfWidth + wall.thickness();
-        GridLines columns = new GridLines(GROWTH, ground())
+        GridLines columns = new GridLines(GroundStrip.GROWTH, ground())
                 .fine(halfWidth, outer, size)
                 .at(0)
                 .at(width());
-        GridLines rows = new GridLines(GROWTH, ground()).at(0).at(top()).at(ground() - wall.foundation());
+        GridLines rows =
+                new GridLines(GroundStrip.GROWTH, ground()).at(0).at(top()).at(ground() - wall.foundation());
         rows.fine(ground() - size, ground(), size)
                 .fine(plane() - size, plane(), size)
                 .at(plane());

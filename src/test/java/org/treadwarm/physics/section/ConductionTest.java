@@ -182,7 +182,7 @@ class ConductionTest {
         Grid grid = Grid.uniform(1, 2, 2001, 2000);
         assertThatThrownBy(() -> Conduction.solve(square(), grid, 1e-10, () -> false))
                 .isInstanceOf(IllegalArgumentException.class)
-                .hasMessageContaining("at most 4000000 cells");
+                .hasMessageContaining("at most 1200000 cells");
     }
 
     @Test
