@@ -266,6 +266,16 @@ final class FloorWarnings {
                                     "The floor between the cables or pipes was not solved: " + reason + ".",
                                     "The heater is taken as a plane: between cables or pipes the surface is cooler, above them warmer.",
                                     "Give thickness and conductivity of the layer that holds the heater; keep a reserve to the surface limit."));
+            if (heater.kind() == HeaterKind.WATER
+                    && answer.section().isPresent()
+                    && answer.water().isEmpty()) {
+                add(
+                        "loops-not-laid",
+                        pointer + "/heater",
+                        "No loops are laid for this floor.",
+                        "It gives no heat, needs water above 95 °C, or no number of loops keeps 100 m and 25 kPa.",
+                        "Look at the flux, the feeders and the pipe; another manifold may be nearer.");
+            }
             density(pointer + "/heater", heater);
         });
     }

@@ -74,8 +74,11 @@ final class LayoutSteps {
                     at + "/tableMeanOvertemperature",
                     "table-overtemperature",
                     "Delta_theta_H",
-                    symbol("q", floorAt + "/requiredFlux"),
-                    symbol("q_max", floorAt + "/carryingFlux"),
+                    Symbol.all(
+                            "q_each",
+                            List.of(
+                                    Addresses.sizing(floorAt + "/requiredFlux"),
+                                    Addresses.sizing(floorAt + "/carryingFlux"))),
                     symbol("K_H", at + "/tableCoefficient"));
         }
         judged(at, layout.limits());

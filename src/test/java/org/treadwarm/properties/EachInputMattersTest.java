@@ -22,8 +22,7 @@ class EachInputMattersTest {
 
     /** Readings without effect on a number, each with its reason. */
     private static final Map<String, String> WITHOUT_EFFECT = Map.ofEntries(
-            Map.entry("/rooms/0/heatedFloor/heater/spacing", "method 1 takes the heater as a plane; a warning says so"),
-            Map.entry("/rooms/2/heatedFloor/heater/spacing", "method 1 takes the heater as a plane; a warning says so"),
+            Map.entry("/rooms/0/heatedFloor/heater/linearPower", "the density is given too, and is what counts"),
             Map.entry(
                     "/rooms/0/heatedFloor/below/0/maximumTemperature", "a warning when the heater is warmer, no limit"),
             Map.entry(

@@ -70,7 +70,9 @@ class WarningsTest {
                 "/rooms/0/air/changeRate | 4 | high-flux | /rooms/0/heatedFloor",
                 "/rooms/0/heatedFloor/above/1/conductivity | 0.05 | hot-heater-plane | /rooms/0/heatedFloor",
                 "/rooms/0/heatedFloor/heater | {'kind': 'water'} | water-not-checked | /rooms/0/heatedFloor/heater",
-                "/rooms/0/heatedFloor/heater | {'kind': 'water', 'spacing': 0.15} | spacing-not-used | /rooms/0/heatedFloor/heater/spacing",
+                "/rooms/0/heatedFloor/heater | {'kind': 'electric', 'spacing': 0.15, 'diameter': 0.09} | spacing-not-solved | /rooms/0/heatedFloor/heater/spacing",
+                "/rooms/0/heatedFloor/heater | {'kind': 'water', 'spacing': 0.15, 'feederLength': 200} | loops-not-laid | /rooms/0/heatedFloor/heater",
+                "/rooms/0/heatedFloor/heater | {'kind': 'electric', 'spacing': 0.1, 'linearPower': 15, 'density': 100} | density-differs | /rooms/0/heatedFloor/heater/density",
             })
     void isRaisedAtItsAddress(String pointer, String value, String code, String address) {
         List<Warning> warnings = warnings(changed(pointer, value));
