@@ -11,6 +11,7 @@ import org.treadwarm.draw.Sheet;
 import org.treadwarm.jobs.Partial;
 import org.treadwarm.sizing.AssemblyEvaluation;
 import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
+import org.treadwarm.sizing.SectionView;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FloorState;
@@ -50,6 +51,7 @@ final class Answer {
         answer.model.put("verdict", "");
         answer.model.put("pictures", List.of());
         answer.model.put("lines", List.of());
+        answer.model.put("layouts", List.of());
         answer.model.put("warnings", List.of());
         answer.model.put("cautions", List.of());
         answer.model.put("working", List.of());
@@ -89,8 +91,17 @@ final class Answer {
         add(pictures, "Heat out, and heat from the floor", "balance", sheet -> Pictures.balance(answer, sheet));
         add(pictures, "What the floor must give and may give", "limits", sheet -> Pictures.limits(answer, sheet));
         add(pictures, "The heated floor in section", "floor", sheet -> Pictures.floor(room, answer, sheet));
+        if (floor.section().isPresent()) {
+            Optional<SectionView> view = SectionView.of(survey, index);
+            add(
+                    pictures,
+                    "The floor between its cables or pipes",
+                    "isotherms",
+                    sheet -> Pictures.isotherms(room, answer, view, sheet));
+        }
         model.put("pictures", pictures);
         model.put("lines", lines(answer));
+        model.put("layouts", LayoutLines.of(answer.name(), floor, sizing.total()));
         model.put(
                 "paths",
                 answer.heatLoss().paths().stream()

@@ -1,6 +1,7 @@
 package org.treadwarm.web.pages;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -17,21 +18,31 @@ import org.treadwarm.draw.FloorSection;
 import org.treadwarm.draw.FluxLimit;
 import org.treadwarm.draw.FluxScale;
 import org.treadwarm.draw.HeatPath;
+import org.treadwarm.draw.HeaterCut;
+import org.treadwarm.draw.IsothermDrawing;
+import org.treadwarm.draw.IsothermSection;
 import org.treadwarm.draw.LimitScale;
 import org.treadwarm.draw.MaterialFamily;
 import org.treadwarm.draw.Sheet;
+import org.treadwarm.draw.SurfaceProfile;
+import org.treadwarm.draw.TemperatureField;
 import org.treadwarm.sizing.AssemblyEvaluation;
+import org.treadwarm.sizing.SectionView;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FloorState;
+import org.treadwarm.sizing.Sizing.LayerSizing;
 import org.treadwarm.sizing.Sizing.RoomSizing;
+import org.treadwarm.sizing.Sizing.SectionState;
 import org.treadwarm.sizing.Verdict;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Bridging;
 import org.treadwarm.survey.Direction;
 import org.treadwarm.survey.HeatedFloor;
+import org.treadwarm.survey.HeaterKind;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Survey;
+import org.treadwarm.units.Numbers;
 import org.treadwarm.units.Reading;
 
 /** From answers to drawings. */
@@ -130,6 +141,72 @@ final class Pictures {
                 down,
                 floor.edges().isEmpty() ? OptionalDouble.empty() : OptionalDouble.of(edge));
         return Optional.of(FloorBuildUpDrawing.draw(sheet, section));
+    }
+
+    /** The floor solved between its cables or pipes, with its isotherms; empty when it is not solved or cannot be drawn. */
+    static Optional<String> isotherms(Room room, RoomSizing answer, Optional<SectionView> view, Sheet sheet) {
+        FloorSizing floor = answer.floor();
+        if (view.isEmpty() || floor.section().isEmpty()) {
+            return Optional.empty();
+        }
+        HeatedFloor given = room.heatedFloor().orElseThrow();
+        boolean carries = floor.verdict() == Verdict.CARRIES;
+        SectionState state = carries
+                ? floor.section().get().atRequiredFlux()
+                : floor.section().get().atCarryingFlux();
+        double down = carries
+                ? floor.downwardFlux().orElseThrow()
+                : floor.atCarryingFlux().orElseThrow().downwardFlux();
+        SectionView solved = view.get();
+        List<org.treadwarm.draw.Layer> layers = new ArrayList<>(solved(given.above(), floor.layersAbove()));
+        layers.addAll(solved(given.below(), floor.layersBelow()));
+        boolean water = given.heater().orElseThrow().kind() == HeaterKind.WATER;
+        String words = (water ? "pipe " : "cable ") + Numbers.significant(1000 * solved.diameter(), 3) + " mm";
+        try {
+            return Optional.of(IsothermDrawing.draw(
+                    sheet,
+                    new IsothermSection(
+                            answer.name(),
+                            new AirSide(answer.name(), answer.indoorTemperature()),
+                            layers,
+                            new HeaterCut(words, solved.heaterDepth(), solved.diameter()),
+                            solved.spacing(),
+                            new TemperatureField(solved.x(), solved.depth(), solved.temperature()),
+                            new SurfaceProfile(
+                                    Arrays.stream(solved.surface()).boxed().toList(),
+                                    Math.max(state.surfaceMaximum(), state.surfaceMean()),
+                                    state.surfaceMean(),
+                                    Math.min(state.surfaceMinimum(), state.surfaceMean()),
+                                    OptionalDouble.of(solved.surfaceLimit())),
+                            beneath(given, floor),
+                            state.flux(),
+                            down)));
+        } catch (IllegalArgumentException beyondAnyDrawing) {
+            return Optional.empty();
+        }
+    }
+
+    /** Layers as a section takes them: one known by its resistance has no thickness there. */
+    private static List<org.treadwarm.draw.Layer> solved(List<Layer> given, List<LayerSizing> sized) {
+        List<org.treadwarm.draw.Layer> layers =
+                layers(given, sized.stream().map(LayerSizing::resistance).toList());
+        List<org.treadwarm.draw.Layer> solved = new ArrayList<>();
+        for (int i = 0; i < given.size(); i++) {
+            org.treadwarm.draw.Layer layer = layers.get(i);
+            boolean solid =
+                    given.get(i).resistance().isEmpty() && given.get(i).airGap().isEmpty();
+            solved.add(
+                    solid
+                            ? layer
+                            : new org.treadwarm.draw.Layer(
+                                    layer.name(),
+                                    OptionalDouble.empty(),
+                                    layer.resistance(),
+                                    layer.family(),
+                                    layer.bridge(),
+                                    layer.remarks()));
+        }
+        return solved;
     }
 
     private static Beneath beneath(HeatedFloor given, FloorSizing floor) {

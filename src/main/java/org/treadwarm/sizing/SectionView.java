@@ -1,0 +1,141 @@
+package org.treadwarm.sizing;
+
+import java.util.Optional;
+import org.treadwarm.physics.section.Condition.Film;
+import org.treadwarm.physics.section.FloorHeater;
+import org.treadwarm.physics.section.FloorHeater.HeatingCable;
+import org.treadwarm.physics.section.FloorHeater.WaterPipe;
+import org.treadwarm.physics.section.FloorLayer;
+import org.treadwarm.physics.section.FloorLayer.Resisting;
+import org.treadwarm.physics.section.FloorLayer.Solid;
+import org.treadwarm.physics.section.FloorSection;
+import org.treadwarm.physics.section.TemperatureMap;
+import org.treadwarm.survey.Survey;
+
+/**
+ * The temperatures of a solved floor at the flux it gives, for drawing: half a spacing from the axis of a heater, by rows from the
+ * finished surface down. The arrays belong to whoever asked. Layers without a thickness are not seen in the rows; the surface is that
+ * above all layers.
+ *
+ * @param spacing axis to axis, m
+ * @param heaterDepth of the axis below the surface, layers without a thickness not counted, m
+ * @param diameter of the cable or pipe, m
+ * @param x of the columns, m
+ * @param depth of the rows, m
+ * @param temperature by row, then by column, degrees Celsius; NaN inside the heater
+ * @param surface temperature of the finished surface by column, degrees Celsius
+ * @param surfaceLimit what its warmest point may have, degrees Celsius
+ */
+@SuppressWarnings("ArrayRecordComponent")
+public record SectionView(
+        double spacing,
+        double heaterDepth,
+        double diameter,
+        double[] x,
+        double[] depth,
+        double[][] temperature,
+        double[] surface,
+        double surfaceLimit) {
+    private static final int COLUMNS = 61;
+
+    /** About so far apart are the rows, m. */
+    private static final double ROW = 0.002;
+
+    private static final int MOST_ROWS = 200;
+
+    /**
+     * The temperatures of a room's floor; empty when it has no solved section or gives no heat.
+     *
+     * @param survey one that was sized
+     * @param room its number
+     */
+    public static Optional<SectionView> of(Survey survey, int room) {
+        Plan plan = Plan.of(survey);
+        Evaluation evaluation = new Evaluation(plan);
+        if (!evaluation.evaluate(plan.values)) {
+            return Optional.empty();
+        }
+        FloorEvaluation floor = evaluation.floors[room];
+        double flux = floor == null ? 0 : Math.min(floor.requiredFlux, floor.carryingFlux);
+        if (floor == null || floor.section == null || !(flux > 0)) {
+            return Optional.empty();
+        }
+        return Optional.of(view(floor, flux, floor.section.at(flux, evaluation.outdoor)));
+    }
+
+    private static SectionView view(FloorEvaluation floor, double flux, SectionFloor.State state) {
+        SectionGeometry geometry = floor.section.geometry;
+        double coefficient = flux / (state.mean() - floor.room);
+        FloorSection section = new FloorSection(
+                geometry.spacing(),
+                geometry.layers(),
+                driven(geometry, flux, state),
+                new Film(floor.room, coefficient),
+                new Film(state.below(), geometry.coefficientBelow()));
+        double height =
+                geometry.layers().stream().mapToDouble(SectionView::thickness).sum();
+        int rows = (int) Math.max(20, Math.min(MOST_ROWS, Math.ceil(height / ROW)));
+        TemperatureMap map = section.solve().map(COLUMNS, rows);
+        double axis = axis(geometry);
+        double radius = geometry.heater().diameter() / 2;
+        double[] depth = new double[rows];
+        double[][] temperature = new double[rows][];
+        for (int row = 0; row < rows; row++) {
+            depth[row] = Math.max(0, height - map.y()[rows - 1 - row]);
+            temperature[row] = map.temperature()[rows - 1 - row];
+            for (int column = 0; column < COLUMNS; column++) {
+                if (Math.hypot(map.x()[column], depth[row] - axis) < radius) {
+                    temperature[row][column] = Double.NaN;
+                }
+            }
+        }
+        double share = 1 / (1 + coefficient * covering(geometry));
+        double[] surface = new double[COLUMNS];
+        for (int column = 0; column < COLUMNS; column++) {
+            surface[column] = floor.room + (temperature[0][column] - floor.room) * share;
+        }
+        int covering = floor.plan.maximumSurface();
+        double limit = covering == Stack.NONE
+                ? floor.zoneMaximum()
+                : Math.min(floor.zoneMaximum(), floor.whole().in[covering]);
+        return new SectionView(
+                geometry.spacing(), axis, geometry.heater().diameter(), map.x(), depth, temperature, surface, limit);
+    }
+
+    /** The heater with what heats it in this state. */
+    private static FloorHeater driven(SectionGeometry geometry, double flux, SectionFloor.State state) {
+        FloorHeater heater = geometry.heater();
+        if (heater instanceof WaterPipe pipe) {
+            return new WaterPipe(
+                    pipe.layer(),
+                    pipe.depth(),
+                    pipe.diameter(),
+                    pipe.wallThickness(),
+                    pipe.wallConductivity(),
+                    pipe.insideCoefficient(),
+                    state.water());
+        }
+        return new HeatingCable(
+                heater.layer(), heater.depth(), heater.diameter(), (flux + state.downward()) * geometry.spacing());
+    }
+
+    private static double thickness(FloorLayer layer) {
+        return layer instanceof Solid solid ? solid.thickness() : 0;
+    }
+
+    private static double axis(SectionGeometry geometry) {
+        double above = geometry.layers().stream()
+                .limit(geometry.heater().layer())
+                .mapToDouble(SectionView::thickness)
+                .sum();
+        return above + geometry.heater().depth();
+    }
+
+    /** Resistance of the layers without thickness on top, m²·K/W. */
+    private static double covering(SectionGeometry geometry) {
+        return geometry.layers().stream()
+                .takeWhile(layer -> layer instanceof Resisting)
+                .mapToDouble(FloorLayer::resistance)
+                .sum();
+    }
+}

@@ -1,0 +1,141 @@
+package org.treadwarm.web.pages;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.treadwarm.sizing.Sizing.ElectricLayout;
+import org.treadwarm.sizing.Sizing.FloorSizing;
+import org.treadwarm.sizing.Sizing.HeatingElementLayout;
+import org.treadwarm.sizing.Sizing.LoopValve;
+import org.treadwarm.sizing.Sizing.PracticeJudgement;
+import org.treadwarm.sizing.Sizing.Total;
+import org.treadwarm.sizing.Sizing.WaterLayout;
+import org.treadwarm.sizing.Sizing.WaterTotal;
+import org.treadwarm.units.Numbers;
+import org.treadwarm.web.pages.Answer.Line;
+
+/** What a fitter needs to feed a floor: elements and circuits, or loops and their valves. */
+final class LayoutLines {
+    private final List<Layout> layouts = new ArrayList<>();
+
+    /** A headed table of lines, with a sentence below it. */
+    public record Layout(String title, List<Line> lines, String note) {}
+
+    private LayoutLines() {}
+
+    static List<Layout> of(String room, FloorSizing floor, Total total) {
+        LayoutLines lines = new LayoutLines();
+        floor.electric().ifPresent(lines::electric);
+        floor.water().ifPresent(layout -> lines.water(room, layout, total));
+        return List.copyOf(lines.layouts);
+    }
+
+    private void electric(ElectricLayout layout) {
+        List<Line> lines = new ArrayList<>();
+        lines.add(line("Supply", layout.voltage(), 0, "V", ""));
+        layout.cableLength()
+                .ifPresent(length -> lines.add(line("Cable in the floor", length, 1, "m", "area / spacing")));
+        int number = 1;
+        for (HeatingElementLayout element : layout.elements()) {
+            String name = layout.elements().size() == 1 ? "Element" : "Element " + number++;
+            lines.add(line(name, element.power(), 0, "W", "on a circuit of its own"));
+            lines.add(line(name + ", current", element.current(), 2, "A", ""));
+            lines.add(line(
+                    name + ", breaker", element.breaker(), 0, "A", "smallest usual rating; the local code decides"));
+            lines.add(line(
+                    name + ", resistance",
+                    element.resistance(),
+                    1,
+                    "Ω",
+                    "measure before and after covering: " + Numbers.fixed(element.lowestResistance(), 1) + " to "
+                            + Numbers.fixed(element.highestResistance(), 1) + " Ω; the maker's figure decides"));
+        }
+        lines.add(line("Power at 10 % less voltage", layout.powerAtLowVoltage(), 0, "W", "81 %"));
+        lines.add(line("Power at 10 % more voltage", layout.powerAtHighVoltage(), 0, "W", "121 %"));
+        limits(lines, layout.limits());
+        layouts.add(new Layout(
+                "Electric layout",
+                lines,
+                "Record the insulation resistance between conductors and earth before and after covering. Put the floor sensor"
+                        + " midway between two runs, in a conduit; a residual-current device of 30 mA and a limit of the floor's"
+                        + " temperature are usual. A licensed electrician connects it, by the local code."));
+    }
+
+    private void water(String room, WaterLayout layout, Total total) {
+        List<Line> lines = new ArrayList<>();
+        lines.add(line("Supply", layout.supplyTemperature(), 1, "°C", governed(room, total)));
+        lines.add(line(
+                "Return", layout.returnTemperature(), 1, "°C", "spread " + Numbers.fixed(layout.spread(), 1) + " K"));
+        lines.add(line(
+                "Loops",
+                layout.loops(),
+                0,
+                "",
+                "of " + Numbers.fixed(layout.loopLength(), 1) + " m each, feeders included"));
+        lines.add(line(
+                "Flow of one loop",
+                60_000 * layout.volumeFlow() / layout.loops(),
+                2,
+                "l/min",
+                Numbers.fixed(3600 * layout.massFlow() / layout.loops(), 1) + " kg/h"));
+        lines.add(line("Flow of the room", 60_000 * layout.volumeFlow(), 2, "l/min", ""));
+        lines.add(line(
+                "Drop of one loop",
+                layout.pressureDrop() / 1000,
+                2,
+                "kPa",
+                "straight pipe; " + Numbers.fixed(layout.velocity(), 2) + " m/s, Re "
+                        + Numbers.grouped(layout.reynolds())));
+        total.water().ifPresent(water -> valve(lines, room, water));
+        lines.add(line("Water in the loops", 1000 * layout.waterContent(), 1, "l", ""));
+        layout.tableMeanOvertemperature()
+                .ifPresent(table -> lines.add(line(
+                        "Standard table method",
+                        table,
+                        1,
+                        "K",
+                        "mean over-temperature of the water by EN 1264-2 (from memory); the section says "
+                                + Numbers.fixed(layout.meanOvertemperature(), 1) + " K, and is what is used")));
+        limits(lines, layout.limits());
+        layouts.add(
+                new Layout(
+                        "Warm-water layout",
+                        lines,
+                        "Drops are of straight pipe without bends, fittings and manifold. Flush, vent and test the pressure before the floor"
+                                + " is covered; heat a screed up by its maker's rules; protect against frost when switched off."));
+    }
+
+    private static String governed(String room, Total total) {
+        return total.water()
+                .map(water -> water.governingRoom().equals(room)
+                        ? "this room governs the job"
+                        : water.governingRoom() + " governs the job")
+                .orElse("");
+    }
+
+    private static void valve(List<Line> lines, String room, WaterTotal water) {
+        water.valves().stream()
+                .filter(valve -> valve.room().equals(room))
+                .findFirst()
+                .map(LoopValve::throttled)
+                .ifPresent(throttled -> lines.add(line(
+                        "To be throttled at each valve",
+                        throttled / 1000,
+                        2,
+                        "kPa",
+                        "against the worst loop of the job")));
+    }
+
+    private static void limits(List<Line> lines, List<PracticeJudgement> limits) {
+        for (PracticeJudgement limit : limits) {
+            lines.add(new Line(
+                    "Practice: " + limit.name(),
+                    limit.margin() >= 0 ? "kept" : "beyond",
+                    Numbers.significant(limit.value(), 3) + " against " + Numbers.significant(limit.limit(), 3)
+                            + " (SI); " + limit.source()));
+        }
+    }
+
+    private static Line line(String name, double value, int decimals, String unit, String note) {
+        return new Line(name, Numbers.fixed(value, decimals) + (unit.isEmpty() ? "" : " " + unit), note);
+    }
+}
