@@ -1,7 +1,11 @@
 package org.treadwarm.web.pages;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.stream.Collectors;
 import org.treadwarm.sizing.Sizing.ElectricLayout;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.HeatingElementLayout;
@@ -84,7 +88,7 @@ final class LayoutLines {
                 2,
                 "kPa",
                 "straight pipe; " + Numbers.fixed(layout.velocity(), 2) + " m/s, Re "
-                        + Numbers.grouped(layout.reynolds())));
+                        + Numbers.fixed(layout.reynolds(), 0)));
         total.water().ifPresent(water -> valve(lines, room, water));
         lines.add(line("Water in the loops", 1000 * layout.waterContent(), 1, "l", ""));
         layout.tableMeanOvertemperature()
@@ -125,14 +129,40 @@ final class LayoutLines {
                         "against the worst loop of the job")));
     }
 
+    /** One line for each quantity, with every limit of practice beside it. */
     private static void limits(List<Line> lines, List<PracticeJudgement> limits) {
-        for (PracticeJudgement limit : limits) {
+        Map<String, List<PracticeJudgement>> byName = new LinkedHashMap<>();
+        limits.forEach(limit ->
+                byName.computeIfAbsent(limit.name(), name -> new ArrayList<>()).add(limit));
+        byName.forEach((name, of) -> {
+            boolean kept = of.stream().allMatch(limit -> limit.margin() >= 0);
+            String all = of.stream()
+                    .map(limit -> shown(name, limit.limit()) + ", " + limit.source()
+                            + (limit.margin() < 0 ? ": beyond it" : ""))
+                    .collect(Collectors.joining("; "));
             lines.add(new Line(
-                    "Practice: " + limit.name(),
-                    limit.margin() >= 0 ? "kept" : "beyond",
-                    Numbers.significant(limit.value(), 3) + " against " + Numbers.significant(limit.limit(), 3)
-                            + " (SI); " + limit.source()));
-        }
+                    name.substring(0, 1).toUpperCase(Locale.ROOT) + name.substring(1),
+                    shown(name, of.get(0).value()),
+                    (kept ? "kept: " : "look again: ") + (isMost(of.get(0)) ? "at most " : "at least ") + all));
+        });
+    }
+
+    private static boolean isMost(PracticeJudgement limit) {
+        return Math.abs(limit.limit() - limit.value() - limit.margin()) <= 1e-9 * Math.abs(limit.limit());
+    }
+
+    private static String shown(String name, double value) {
+        return switch (name) {
+            case "loop length" -> Numbers.fixed(value, 0) + " m";
+            case "pressure drop" -> Numbers.fixed(value / 1000, 1) + " kPa";
+            case "velocity" -> Numbers.fixed(value, 2) + " m/s";
+            case "spread" -> Numbers.fixed(value, 1) + " K";
+            case "supply temperature" -> Numbers.fixed(value, 1) + " °C";
+            case "spacing" -> Numbers.fixed(1000 * value, 0) + " mm";
+            case "density under timber" -> Numbers.fixed(value, 0) + " W/m²";
+            case "power per metre under timber" -> Numbers.fixed(value, 1) + " W/m";
+            default -> Numbers.fixed(value, 0);
+        };
     }
 
     private static Line line(String name, double value, int decimals, String unit, String note) {
