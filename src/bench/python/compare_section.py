@@ -5,7 +5,7 @@ the upper and lower edge, the other edges adiabatic. Both sides set the balances
 
     mvn -q -o test-compile
     mvn -q -o dependency:build-classpath -Dmdep.outputFile=target/classpath
-    OMP_NUM_THREADS=1 OPENBLAS_NUM_THREADS=1 /usr/bin/python3 src/bench/python/compare_section.py 316 1000
+    OMP_NUM_THREADS=1 OPENBLAS_NUM_THREADS=1 python3 src/bench/python/compare_section.py 316 1000
 
 Arguments: numbers of cells along each side. Times are of setting up and solving, without reading and writing.
 """

@@ -52,7 +52,7 @@ final class SectionChecks {
                         new Edge(Side.TOP, 0, width, new Held(given.number("top_C"))),
                         new Edge(Side.LEFT, 0, height, new Held(given.number("left_bottom_C"))),
                         new Edge(Side.BOTTOM, 0, width, new Held(given.number("left_bottom_C")))));
-        Field field = Conduction.solve(section, Grid.uniform(width, height, 64, 128), RESIDUAL, () -> false);
+        Field field = Conduction.solve(section, Grid.uniform(width, height, 128, 256), RESIDUAL, () -> false);
         Map<String, DoubleStream> rows = new HashMap<>();
         given.numbers("y_from_top").forEach(y -> {
             String name = "T_row_" + String.format(Locale.ROOT, "%.2f", y);

@@ -110,6 +110,11 @@ final class Balances {
 
     private void joinEdge(int known, Edge edge) {
         boolean upright = edge.side() == Side.LEFT || edge.side() == Side.RIGHT;
+        if (upright) {
+            grid.requireUpward(edge.from(), edge.to());
+        } else {
+            grid.requireAcross(edge.from(), edge.to());
+        }
         int count = upright ? grid.rows() : grid.columns();
         for (int i = 0; i < count; i++) {
             if (edge.holds(upright ? grid.y(i) : grid.x(i))) {

@@ -33,12 +33,13 @@ public final class FloorResponse {
     /** Place of the first layer's warm face among the numbers. */
     static final int FACES = 5;
 
-    private static final int NODES = 7;
+    /** Numbers of points that are tried; the first one serves all floors but those whose heater lies bare at the surface. */
+    private static final int[] POINTS = {7, 13, 25};
 
     private final FloorLayout layout;
     private final Accuracy accuracy;
-    private final double[] nodes = new double[NODES];
-    private final double[] barycentric = new double[NODES];
+    private final double[] nodes;
+    private final double[] barycentric;
 
     /** What each number rises by with 1 K between above and below at the same flux, by number, then by node. */
     private final double[][] perDifference;
@@ -46,16 +47,18 @@ public final class FloorResponse {
     /** What each number rises by with 1 W/m² upward, by number, then by node. */
     private final double[][] perFlux;
 
-    private FloorResponse(FloorLayout layout, Accuracy accuracy) {
+    private FloorResponse(FloorLayout layout, Accuracy accuracy, int points) {
         this.layout = layout;
         this.accuracy = accuracy;
+        this.nodes = new double[points];
+        this.barycentric = new double[points];
         int numbers = FACES + layout.layers().size();
-        this.perDifference = new double[numbers][NODES];
-        this.perFlux = new double[numbers][NODES];
+        this.perDifference = new double[numbers][points];
+        this.perFlux = new double[numbers][points];
         double middle = (Math.log(LOWEST) + Math.log(HIGHEST)) / 2;
         double half = (Math.log(HIGHEST) - Math.log(LOWEST)) / 2;
-        for (int i = 0; i < NODES; i++) {
-            double angle = Math.PI * (i + 0.5) / NODES;
+        for (int i = 0; i < points; i++) {
+            double angle = Math.PI * (i + 0.5) / points;
             nodes[i] = middle - half * Math.cos(angle);
             barycentric[i] = (i % 2 == 0 ? 1 : -1) * Math.sin(angle);
         }
@@ -77,17 +80,27 @@ public final class FloorResponse {
                         new Film(0, 10),
                         new Film(0, floor.below().coefficient()))
                 .solve(stopped);
-        FloorResponse response = new FloorResponse(floor.layout(), typical.accuracy());
         UnitFields fields = new UnitFields(floor, typical.field().grid(), stopped);
-        for (int node = 0; node < NODES; node++) {
-            double[][] factors = fields.factors(Math.exp(response.nodes[node]));
-            for (int number = 0; number < response.perFlux.length; number++) {
-                response.perDifference[number][node] = factors[0][number];
-                response.perFlux[number][node] = factors[1][number];
+        double error = Double.NaN;
+        for (int points : POINTS) {
+            FloorResponse response = new FloorResponse(floor.layout(), typical.accuracy(), points);
+            response.fill(fields);
+            error = response.interpolationError(fields);
+            if (error <= INTERPOLATION_GOAL) {
+                return response;
             }
         }
-        response.check(fields);
-        return response;
+        throw new IllegalStateException("the response to the coefficient above cannot be interpolated: error " + error);
+    }
+
+    private void fill(UnitFields fields) {
+        for (int node = 0; node < nodes.length; node++) {
+            double[][] factors = fields.factors(Math.exp(nodes[node]));
+            for (int number = 0; number < perFlux.length; number++) {
+                perDifference[number][node] = factors[0][number];
+                perFlux[number][node] = factors[1][number];
+            }
+        }
     }
 
     static FloorHeater heater(FloorHeater heater, double drive) {
@@ -104,21 +117,18 @@ public final class FloorResponse {
         return new HeatingCable(heater.layer(), heater.depth(), heater.diameter(), drive);
     }
 
-    /** Compares the interpolation with fields solved between the first two points, where it is worst. */
-    private void check(UnitFields fields) {
+    /** The largest difference from fields solved between the first two points, where it is worst. */
+    private double interpolationError(UnitFields fields) {
         double between = (nodes[0] + nodes[1]) / 2;
         double[][] solved = fields.factors(Math.exp(between));
-        double[] weights = new double[NODES];
+        double[] weights = new double[nodes.length];
         weigh(between, weights);
+        double worst = 0;
         for (int number = 0; number < perFlux.length; number++) {
-            double worst = Math.max(
-                    error(perDifference[number], weights, solved[0][number]),
-                    error(perFlux[number], weights, solved[1][number]));
-            if (worst > INTERPOLATION_GOAL) {
-                throw new IllegalStateException(
-                        "the response to the coefficient above cannot be interpolated: error " + worst);
-            }
+            worst = Math.max(worst, error(perDifference[number], weights, solved[0][number]));
+            worst = Math.max(worst, error(perFlux[number], weights, solved[1][number]));
         }
+        return worst;
     }
 
     private static double error(double[] values, double[] weights, double solved) {
@@ -128,7 +138,7 @@ public final class FloorResponse {
 
     /** Room for the answers of {@link #evaluate}. */
     public FloorState newState() {
-        return new FloorState(NODES, perFlux.length);
+        return new FloorState(nodes.length, perFlux.length);
     }
 
     /** How far the numbers can be trusted, as found at a coefficient above of 10 W/(m²·K). */
@@ -184,7 +194,7 @@ public final class FloorResponse {
     /** Weights of the nodes at a place: J.-P. Berrut, L. N. Trefethen, "Barycentric Lagrange interpolation", 2004 (from memory). */
     private void weigh(double place, double[] weights) {
         double sum = 0;
-        for (int i = 0; i < NODES; i++) {
+        for (int i = 0; i < weights.length; i++) {
             double distance = place - nodes[i];
             if (distance == 0) {
                 Arrays.fill(weights, 0);
@@ -194,14 +204,14 @@ public final class FloorResponse {
             weights[i] = barycentric[i] / distance;
             sum += weights[i];
         }
-        for (int i = 0; i < NODES; i++) {
+        for (int i = 0; i < weights.length; i++) {
             weights[i] /= sum;
         }
     }
 
     private static double interpolate(double[] values, double[] weights) {
         double sum = 0;
-        for (int i = 0; i < NODES; i++) {
+        for (int i = 0; i < weights.length; i++) {
             sum += values[i] * weights[i];
         }
         return sum;

@@ -104,12 +104,38 @@ public final class Grid {
      * @throws IllegalArgumentException when there is none
      */
     int lineAt(double height) {
-        for (int line = 0; line < upward.length; line++) {
-            if (Math.abs(upward[line] - height) <= 1e-9 * (upward[upward.length - 1] - upward[0])) {
+        int line = lineAt(upward, height);
+        Require.that(line >= 0, "no grid line at a height of " + height + " m");
+        return line;
+    }
+
+    private static int lineAt(double[] lines, double position) {
+        double slack = 1e-9 * (lines[lines.length - 1] - lines[0]);
+        for (int line = 0; line < lines.length; line++) {
+            if (Math.abs(lines[line] - position) <= slack) {
                 return line;
             }
         }
-        throw new IllegalArgumentException("no grid line at a height of " + height + " m");
+        return -1;
+    }
+
+    /** Refuses borders inside the grid that do not lie on vertical lines. */
+    void requireAcross(double... positions) {
+        require("x = ", across, positions);
+    }
+
+    /** Refuses borders inside the grid that do not lie on horizontal lines. */
+    void requireUpward(double... positions) {
+        require("y = ", upward, positions);
+    }
+
+    private static void require(String coordinate, double[] lines, double... positions) {
+        for (double position : positions) {
+            boolean inside = position > lines[0] && position < lines[lines.length - 1];
+            Require.that(
+                    !inside || lineAt(lines, position) >= 0,
+                    "the grid has no line at the border " + coordinate + position + " m");
+        }
     }
 
     /** The column a position lies in; the first or the last one for a position beyond them. */

@@ -1,7 +1,6 @@
 package org.treadwarm.physics.section;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import java.util.SortedSet;
 import java.util.TreeSet;
@@ -11,8 +10,8 @@ import java.util.TreeSet;
  * on, so that the error falls with the square of the cell size.
  */
 public final class GridLines {
-    /** Parts of an interval in which the wanted cell size is integrated. */
-    private static final int PARTS = 64;
+    /** Steps over a cell's wanted size in which that size is integrated. */
+    private static final int STEPS_IN_CELL = 8;
 
     private final SortedSet<Double> fixed = new TreeSet<>();
     private final List<Fine> fines = new ArrayList<>();
@@ -66,17 +65,25 @@ public final class GridLines {
 
     /** Inner lines at equal steps of the integral of one over the wanted size. */
     private void fill(double from, double to, List<Double> lines) {
-        double[] count = new double[PARTS + 1];
-        double part = (to - from) / PARTS;
-        for (int i = 0; i < PARTS; i++) {
-            count[i + 1] = count[i] + part / wanted(from + (i + 0.5) * part);
+        List<Double> places = new ArrayList<>(List.of(from));
+        List<Double> counts = new ArrayList<>(List.of(0.0));
+        double count = 0;
+        for (double place = from; place < to; ) {
+            double next = Math.min(to, place + wanted(place) / STEPS_IN_CELL);
+            count += (next - place) / wanted((place + next) / 2);
+            places.add(next);
+            counts.add(count);
+            place = next;
         }
-        int cells = Math.max(2, (int) Math.ceil(count[PARTS] - 1e-6));
+        int cells = Math.max(2, (int) Math.ceil(count - 1e-6));
+        int after = 1;
         for (int line = 1; line < cells; line++) {
-            double goal = count[PARTS] * line / cells;
-            int found = Arrays.binarySearch(count, goal);
-            int i = found >= 0 ? found : -found - 2;
-            lines.add(from + part * (i + (goal - count[i]) / (count[i + 1] - count[i])));
+            double goal = count * line / cells;
+            while (counts.get(after) < goal) {
+                after++;
+            }
+            double share = (goal - counts.get(after - 1)) / (counts.get(after) - counts.get(after - 1));
+            lines.add(places.get(after - 1) + share * (places.get(after) - places.get(after - 1)));
         }
     }
 

@@ -47,6 +47,8 @@ final class Materials {
     }
 
     private void paint(double left, double right, double bottom, double top, int mark, double conducts) {
+        grid.requireAcross(left, right);
+        grid.requireUpward(bottom, top);
         for (int row = 0; row < grid.rows(); row++) {
             double y = grid.y(row);
             for (int column = 0; y > bottom && y < top && column < grid.columns(); column++) {
@@ -60,6 +62,7 @@ final class Materials {
 
     private void lay() {
         for (Sheet sheet : section.sheets()) {
+            grid.requireAcross(sheet.left(), sheet.right());
             int line = grid.lineAt(sheet.height());
             for (int column = 0; column < grid.columns(); column++) {
                 if (grid.x(column) > sheet.left() && grid.x(column) < sheet.right()) {

@@ -186,6 +186,17 @@ class ConductionTest {
     }
 
     @Test
+    void refusesAGridThatCutsThroughMaterials() {
+        Grid grid = Grid.uniform(1, 2, 8, 15);
+        Section section = Section.of(
+                List.of(new Block(0, 1, 0, 2, 1), new Block(0, 1, 0.5, 1, 2)),
+                List.of(new Edge(Side.TOP, 0, 1, new Held(20))));
+        assertThatThrownBy(() -> Conduction.solve(section, grid, 1e-10, () -> false))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("no line at the border y = 0.5 m");
+    }
+
+    @Test
     void refusesAColdFloorUnderTheBasicCharacteristic() {
         Section section = Section.of(
                 List.of(new Block(0, 0.1, 0, 0.05, 1)),

@@ -4,11 +4,15 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.treadwarm.physics.floor.HeatedFloor;
 import org.treadwarm.physics.section.Condition.Film;
+import org.treadwarm.physics.section.FloorHeater.HeatingCable;
+import org.treadwarm.physics.section.FloorLayer.Resisting;
+import org.treadwarm.physics.section.FloorLayer.Solid;
 
 /** The response agrees with sections solved one by one. */
 class FloorResponseTest {
@@ -17,6 +21,18 @@ class FloorResponseTest {
     void agreesWithASectionSolvedForTheSameCoefficient(double coefficient) {
         agrees(Floors.wet(0.15, 0.05), coefficient);
         agrees(Floors.electric(0.12, 0.006, 0, 110), coefficient);
+    }
+
+    @Test
+    void agreesForACableBareAtTheSurfaceToo() {
+        FloorSection bare = new FloorSection(
+                0.25,
+                List.of(new Solid("board", 0.005, 0.1), new Resisting("insulation", 0.8)),
+                new HeatingCable(0, 0.002, 0.0028, 25),
+                new Film(20, 10.8),
+                new Film(10, 6));
+        agrees(bare, 3.3);
+        agrees(bare, 10);
     }
 
     private static void agrees(FloorSection floor, double coefficient) {
