@@ -28,6 +28,9 @@ public record SectionQuestion(
         @Wording(label = "heater") SectionHeater heater) {
     private static final int MOST_LAYERS = 20;
 
+    /** A pipe that lies on the next layer touches it but for the rounding of its sizes, m. */
+    private static final double ROUNDING = 1e-12;
+
     /** What the finished surface gives its heat to: a temperature, and a coefficient or the basic characteristic. */
     public record SectionAbove(
             @Quantity(kind = QuantityKind.TEMPERATURE, min = -60, max = 60, label = "room temperature")
@@ -199,8 +202,8 @@ public record SectionQuestion(
                     heater.layer(),
                     "the layer that holds the heater has no thickness and conductivity",
                     "a layer with thickness and conductivity or material");
-        } else if (heater.depth().value() < radius
-                || heater.depth().value() > thickness.get().value() - radius) {
+        } else if (heater.depth().value() < radius - ROUNDING
+                || heater.depth().value() > thickness.get().value() - radius + ROUNDING) {
             findings.add(
                     "/heater/depth",
                     heater.depth().typed(),

@@ -114,9 +114,13 @@ class SectionSizingTest {
 
         assertThat(solved.surfaceBasis()).contains("warmest point (section)");
         assertThat(solved.carryingFlux().orElseThrow())
-                .isCloseTo(flat.carryingFlux().orElseThrow(), within(0.01 * flat.carryingFlux().orElseThrow()));
+                .isCloseTo(
+                        flat.carryingFlux().orElseThrow(),
+                        within(0.01 * flat.carryingFlux().orElseThrow()));
         assertThat(solved.downwardFlux().orElseThrow())
-                .isCloseTo(flat.downwardFlux().orElseThrow(), within(0.01 * flat.requiredFlux().orElseThrow()));
+                .isCloseTo(
+                        flat.downwardFlux().orElseThrow(),
+                        within(0.01 * flat.requiredFlux().orElseThrow()));
     }
 
     @Test
@@ -146,8 +150,9 @@ class SectionSizingTest {
         assertThat(hall.loopLength())
                 .isCloseTo(18 / 0.15 / hall.loops() + 6, within(1e-9))
                 .isLessThanOrEqualTo(100);
-        assertThat(water.valves()).allSatisfy(valve -> assertThat(valve.drop() + valve.throttled())
-                .isCloseTo(water.pressure(), within(1e-6)));
+        assertThat(water.valves())
+                .allSatisfy(valve ->
+                        assertThat(valve.drop() + valve.throttled()).isCloseTo(water.pressure(), within(1e-6)));
         assertThat(water.massFlow()).isCloseTo(hall.massFlow(), within(1e-12));
     }
 
