@@ -14,6 +14,7 @@ import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.SpaceSizing;
+import org.treadwarm.sizing.Sizing.WaterTotal;
 import org.treadwarm.sizing.Verdict;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.survey.Site;
@@ -120,7 +121,20 @@ final class JobView {
         if (supplement > 0) {
             rows.add(new TotalRow("Something else must add", Numbers.grouped(supplement) + " W"));
         }
+        all.total().water().ifPresent(water -> water(rows, water));
         return rows;
+    }
+
+    /** The warm water of the job: what the boiler and the pump must give, apart from manifold and pipes to it. */
+    private static void water(List<TotalRow> rows, WaterTotal water) {
+        rows.add(new TotalRow(
+                "Supply of the warm water",
+                Numbers.fixed(water.supplyTemperature(), 1) + " °C, governed by " + water.governingRoom()));
+        rows.add(new TotalRow("Loops", Integer.toString(water.valves().size())));
+        rows.add(new TotalRow("Flow of the pump", Numbers.fixed(60_000 * water.volumeFlow(), 2) + " l/min"));
+        rows.add(new TotalRow(
+                "Drop of the worst loop", Numbers.fixed(water.pressure() / 1000, 1) + " kPa, straight pipe"));
+        rows.add(new TotalRow("Water in the loops", Numbers.fixed(1000 * water.waterContent(), 1) + " l"));
     }
 
     private List<RoomRow> rooms() {
