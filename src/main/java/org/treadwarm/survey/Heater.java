@@ -60,7 +60,7 @@ public record Heater(
                 min = 0.01,
                 max = 500,
                 plausibleFrom = 0.15,
-                plausibleTo = 400,
+                plausibleTo = 390,
                 label = "conductivity of the pipe's wall",
                 help = "0.35 W/(m.K) when left out: cross-linked polyethylene (EN 1264-2, from memory).")
         Optional<Reading> wallConductivity,
@@ -115,6 +115,7 @@ public record Heater(
                 kind = QuantityKind.LENGTH,
                 min = 0,
                 max = 500,
+                plausibleFrom = 0.1,
                 plausibleTo = 60,
                 label = "length of both feeders of a loop, from the manifold and back")
         Optional<Reading> feederLength) {
