@@ -137,13 +137,14 @@ final class LayoutLines {
         byName.forEach((name, of) -> {
             boolean kept = of.stream().allMatch(limit -> limit.margin() >= 0);
             String all = of.stream()
-                    .map(limit -> shown(name, limit.limit()) + ", " + limit.source()
+                    .map(limit -> (isMost(limit) ? "at most " : "at least ") + shown(name, limit.limit()) + ", "
+                            + limit.source()
                             + (limit.margin() < 0 ? ": beyond it" : ""))
                     .collect(Collectors.joining("; "));
             lines.add(new Line(
                     name.substring(0, 1).toUpperCase(Locale.ROOT) + name.substring(1),
                     shown(name, of.get(0).value()),
-                    (kept ? "kept: " : "look again: ") + (isMost(of.get(0)) ? "at most " : "at least ") + all));
+                    (kept ? "kept: " : "look again: ") + all));
         });
     }
 
