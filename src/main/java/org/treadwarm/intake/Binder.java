@@ -1,6 +1,7 @@
 package org.treadwarm.intake;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.Iterator;
@@ -12,6 +13,7 @@ import java.util.stream.Collectors;
 import org.treadwarm.survey.Findings;
 import org.treadwarm.survey.Nearest;
 import org.treadwarm.survey.Pointer;
+import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Shape;
 import org.treadwarm.survey.Word;
 import org.treadwarm.units.Basis;
@@ -25,6 +27,9 @@ import org.treadwarm.units.ReadingParser;
  * read and judged too; a survey with findings is never sized.
  */
 final class Binder {
+    private static final String REHEAT = "reheat";
+    private static final String WARM_UP = "warmUp";
+
     private final Findings findings;
 
     Binder(Findings findings) {
@@ -41,12 +46,35 @@ final class Binder {
         refuseUnknownKeys(tree, shape, pointer);
         Object[] values = new Object[shape.keys().size()];
         int i = 0;
+        boolean goalAsReheat = type == Room.class && isGoal(tree.get(REHEAT));
         for (Shape.Key key : shape.keys().values()) {
-            JsonNode node = tree.get(key.name());
+            String name = goalAsReheat && key.name().equals(WARM_UP) ? REHEAT : key.name();
+            JsonNode node = goalAsReheat && key.name().equals(REHEAT) ? null : tree.get(name);
             boolean silent = node == null && !key.required();
-            values[i++] = value(node, key, silent ? pointer : Pointer.to(pointer, key.name()));
+            values[i++] = value(node, key, silent ? pointer : Pointer.to(pointer, name));
+        }
+        if (goalAsReheat && tree.has(WARM_UP)) {
+            findings.add(
+                    Pointer.to(pointer, WARM_UP),
+                    "reheat and warmUp",
+                    "a setback is described once",
+                    "reheat with from and within, or warmUp");
         }
         return shape.make(values);
+    }
+
+    /** A reheat may be written as the setback that it is to be computed from. */
+    private static boolean isGoal(JsonNode reheat) {
+        return reheat != null && reheat.isObject() && (reheat.has("from") || reheat.has("within"));
+    }
+
+    /** Gives rooms that have a setback for a reheat its own key, under which pages show it. */
+    static void nameGoals(JsonNode survey) {
+        for (JsonNode room : survey.path("rooms")) {
+            if (room instanceof ObjectNode object && isGoal(object.get(REHEAT)) && !object.has(WARM_UP)) {
+                object.set(WARM_UP, object.remove(REHEAT));
+            }
+        }
     }
 
     private void refuseUnknownKeys(JsonNode tree, Shape shape, String pointer) {

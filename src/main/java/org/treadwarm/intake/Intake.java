@@ -26,6 +26,11 @@ public final class Intake {
         }
     }
 
+    /** Brings a document that is to be kept into the form in which pages show it; what it says stays the same. */
+    public static void tidy(JsonNode survey) {
+        Binder.nameGoals(survey);
+    }
+
     /** Reads a survey. */
     public static Outcome<Survey> survey(JsonNode tree) {
         Findings findings = new Findings();

@@ -110,7 +110,7 @@ final class Answers {
                 case AIR -> air += heat;
             }
         }
-        double reheat = numbers.in[plan.roomIndexes[room].reheat()] * numbers.in[plan.roomIndexes[room].floorArea()];
+        double reheat = numbers.reheat[room];
         double total = transmission + junctions + air + reheat;
         List<PathLoss> paths = paths(room, total > 0 ? total : 0);
         if (reheat > 0) {
@@ -241,6 +241,8 @@ final class Answers {
                 Optional.empty(),
                 Optional.empty(),
                 Optional.empty(),
+                Optional.empty(),
+                Optional.empty(),
                 Optional.empty());
     }
 
@@ -287,7 +289,9 @@ final class Answers {
                 floor.section == null ? Optional.empty() : Optional.of(new SectionAnswers(floor, given).all()),
                 floor.sectionReason.isEmpty() ? Optional.empty() : Optional.of(floor.sectionReason),
                 ElectricLayouts.of(floor, given),
-                waters.of(floor.plan.room()));
+                waters.of(floor.plan.room()),
+                floor.warmUp.map(WarmUpFloor::answer),
+                floor.warmUpReason.isEmpty() ? Optional.empty() : Optional.of(floor.warmUpReason));
     }
 
     private FloorState state(FloorEvaluation floor, double flux) {

@@ -41,12 +41,22 @@ final class BalanceSteps {
         sum(loss + "/junctions", "junction-heat-loss", node, path -> kind(path) == LinkKind.JUNCTION);
         sum(loss + "/air", "air-heat-loss", node, path -> kind(path) == LinkKind.AIR);
         RoomIndexes room = plan.roomIndexes[node];
-        steps.add(
-                loss + "/reheat",
-                "reheat",
-                "phi_RH",
-                Symbol.of("q_RH", addresses.input(room.reheat())),
-                Symbol.of("A", addresses.input(room.floorArea())));
+        if (answer.floor().warmup().isPresent()) {
+            String floor = addresses.pointer(node) + "/floor";
+            steps.add(
+                    loss + "/reheat",
+                    "reheat-computed",
+                    "phi_RH",
+                    Symbol.of("q_RH", Addresses.sizing(floor + "/warmup/reheatFlux")),
+                    Symbol.of("A_F", Addresses.sizing(floor + "/area")));
+        } else {
+            steps.add(
+                    loss + "/reheat",
+                    "reheat",
+                    "phi_RH",
+                    Symbol.of("q_RH", addresses.input(room.reheat())),
+                    Symbol.of("A", addresses.input(room.floorArea())));
+        }
         sum(
                 loss + "/gainsFromNeighbours",
                 "gains-from-neighbours",

@@ -47,6 +47,7 @@ final class Evaluation {
     final double[] temperature;
     final double[] roomConstant;
     final double[] roomSlope;
+    final double[] reheat;
     final FloorEvaluation[] floors;
     final Network network;
     final Sections sections = new Sections();
@@ -83,6 +84,7 @@ final class Evaluation {
         temperature = new double[nodes];
         roomConstant = new double[plan.rooms];
         roomSlope = new double[plan.rooms];
+        reheat = new double[plan.rooms];
         floors = new FloorEvaluation[plan.rooms];
         for (int i = 0; i < plan.rooms; i++) {
             floors[i] = plan.floors[i] == null ? null : new FloorEvaluation(this, plan.floors[i]);
@@ -376,6 +378,7 @@ final class Evaluation {
             perOutdoor -= conductance[path.link()] * slopeSeenFrom(otherNode(path));
         }
         double reheat = in[plan.roomIndexes[room].reheat()] * in[plan.roomIndexes[room].floorArea()];
+        this.reheat[room] = reheat;
         roomConstant[room] = sum + reheat;
         roomSlope[room] = perOutdoor;
     }
@@ -383,6 +386,12 @@ final class Evaluation {
     private int otherNode(PathRef path) {
         Link link = plan.links.get(path.link());
         return path.heard() ? link.owner() : link.other();
+    }
+
+    /** Raises the heat a room needs by a reheat that is computed, W. */
+    void addReheat(int room, double heat) {
+        reheat[room] += heat;
+        roomConstant[room] += heat;
     }
 
     /** The part of a node's temperature that does not move with the outdoor temperature, as a room sees it. */

@@ -51,6 +51,12 @@ final class FloorEvaluation {
     /** The floor solved between its cables or pipes; null when the heater has no spacing or cannot be solved. */
     SectionFloor section;
 
+    /** How the floor warms its room after the setback that the survey gives; empty without one, or when it cannot be followed. */
+    Optional<WarmUpFloor> warmUp = Optional.empty();
+
+    /** Why a setback is not followed; empty when it is, or there is none. */
+    String warmUpReason = "";
+
     /** Why a floor with a spacing is not solved; empty when it is, or has none. */
     String sectionReason = "";
 
@@ -77,6 +83,7 @@ final class FloorEvaluation {
         resistanceAbove = whole.resistance(plan.above(), 0);
         down();
         edge();
+        warmUp();
         requiredHeat = requiredHeat(whole.outdoor);
         requiredFlux = requiredHeat / area;
         limits();
@@ -216,6 +223,18 @@ final class FloorEvaluation {
             }
         }
         carryingFlux = limits[governing];
+    }
+
+    private void warmUp() {
+        warmUp = Optional.empty();
+        warmUpReason = "";
+        if (whole.plan.roomIndexes[plan.room()].setback() == Stack.NONE) {
+            return;
+        }
+        WarmUpFloor.Made made = WarmUpFloor.of(this);
+        warmUp = made.floor();
+        warmUpReason = made.whyNot();
+        warmUp.ifPresent(found -> whole.addReheat(plan.room(), found.reheat()));
     }
 
     private void section() {

@@ -90,7 +90,9 @@ final class FloorSteps {
                     at + "/marginShare", "margin-share", "s", answered("m", "/margin"), answered("q", "/requiredFlux"));
         }
         steps.add(at + "/shortfall", "shortfall", "phi_short", answered("m", "/margin"), answered("A_F", "/area"));
-        if (answer.holdsDownTo().isPresent()) {
+        if (answer.holdsDownTo().isPresent() && plan.roomIndexes[floor.room()].setback() != Stack.NONE) {
+            steps.add(at + "/holdsDownTo", "holds-down-to-with-setback", "x");
+        } else if (answer.holdsDownTo().isPresent()) {
             steps.addAgain(
                     at + "/holdsDownTo",
                     "holds-down-to",

@@ -68,6 +68,7 @@ final class FloorWarnings {
         covering(pointer, floor, answer.floor());
         flux(pointer, floor, answer.floor());
         heater(pointer, floor, answer.floor());
+        warmUp("/rooms/" + i + "/warmUp", answer.floor());
         sameTwo(i, room, floor);
     }
 
@@ -278,6 +279,29 @@ final class FloorWarnings {
             }
             density(pointer + "/heater", heater);
         });
+    }
+
+    private void warmUp(String pointer, FloorSizing answer) {
+        answer.warmupReason()
+                .ifPresent(reason -> add(
+                        "warm-up-not-followed",
+                        pointer,
+                        "The warming up is not followed, and no reheat is counted: " + reason + ".",
+                        "Without it the room may be slow to warm.",
+                        "Give density and specific heat of the layers, or a reheat per floor area."));
+        answer.warmup()
+                .filter(found -> found.density() < found.densityNeeded() * (1 - 1e-9))
+                .ifPresent(found -> add(
+                        "warm-up-too-slow",
+                        pointer,
+                        "The installed " + Numbers.fixed(found.density(), 0) + " W/m2 warm the room "
+                                + (found.hours().isPresent()
+                                        ? "in " + Numbers.fixed(found.hours().getAsDouble(), 1) + " h"
+                                        : "not within 72 h")
+                                + ", not in " + Numbers.fixed(found.within(), 1) + " h; that takes "
+                                + Numbers.fixed(found.densityNeeded(), 0) + " W/m2.",
+                        "A heavy floor warms slowly, and its heater also makes up for what is lost meanwhile.",
+                        "A shallower setback, a longer time, less heat loss or more density."));
     }
 
     private void density(String pointer, Heater heater) {

@@ -4,9 +4,11 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.treadwarm.sizing.Plan.FloorPlan;
+import org.treadwarm.sizing.Plan.RoomIndexes;
 import org.treadwarm.sizing.Sizing.ElectricLayout;
 import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.sizing.Sizing.RoomSizing;
+import org.treadwarm.sizing.Sizing.WarmUpSizing;
 import org.treadwarm.sizing.Sizing.WaterLayout;
 import org.treadwarm.sizing.Sizing.WaterTotal;
 
@@ -82,6 +84,30 @@ final class LayoutSteps {
                     symbol("K_H", at + "/tableCoefficient"));
         }
         judged(at, layout.limits());
+    }
+
+    /** Warming up after a setback. */
+    void warmUp(FloorPlan floor, RoomIndexes inputs, WarmUpSizing found) {
+        String at = addresses.pointer(floor.room()) + "/floor/warmup";
+        steps.add(at + "/from", "setback-given", "x", Symbol.of("x_given", addresses.input(inputs.setback())));
+        steps.add(at + "/within", "setback-given", "x", Symbol.of("x_given", addresses.input(inputs.warmUpTime())));
+        followed(at, "reheatFlux", "steadyDensity", "densityNeeded", "density", "lossCoefficient", "airCapacity");
+        followed(at, "massCapacity", "massCoupling");
+        if (found.hours().isPresent()) {
+            followed(at, "hours");
+        }
+        if (found.hoursToFive().isPresent()) {
+            followed(at, "hoursToFive");
+        }
+        if (found.hoursToFreezing().isPresent()) {
+            followed(at, "hoursToFreezing");
+        }
+    }
+
+    private void followed(String at, String... keys) {
+        for (String key : keys) {
+            steps.add(at + "/" + key, "followed", "x");
+        }
     }
 
     /** The water of the whole job. */

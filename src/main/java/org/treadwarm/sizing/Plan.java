@@ -162,7 +162,8 @@ final class Plan {
     record SiteIndexes(int outdoor, int annualMean, int altitude, int season, int groundwater) {}
 
     /** Inputs of a room. */
-    record RoomIndexes(int floorArea, int reheat, int allowance, int otherHeat) {}
+    record RoomIndexes(
+            int floorArea, int height, int reheat, int setback, int warmUpTime, int allowance, int otherHeat) {}
 
     Plan(PlanBuilder built) {
         survey = built.survey;

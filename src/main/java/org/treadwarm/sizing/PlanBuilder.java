@@ -39,6 +39,7 @@ import org.treadwarm.survey.Space;
 import org.treadwarm.survey.SpaceKind;
 import org.treadwarm.survey.Surface;
 import org.treadwarm.survey.Survey;
+import org.treadwarm.survey.WarmUpGoal;
 import org.treadwarm.tables.Films;
 import org.treadwarm.units.Reading;
 
@@ -172,7 +173,10 @@ final class PlanBuilder {
         int height = inputs.add(pointer + "/height", room.height());
         roomIndexes[i] = new RoomIndexes(
                 floorArea,
+                height,
                 inputs.add(pointer + "/reheat", room.reheat()),
+                inputs.optional(pointer + "/warmUp/from", room.warmUp().map(WarmUpGoal::from)),
+                inputs.optional(pointer + "/warmUp/within", room.warmUp().map(WarmUpGoal::within)),
                 inputs.add(pointer + "/allowance", room.allowance()),
                 inputs.add(pointer + "/otherHeat", room.otherHeat()));
         exchanges(pointer, i, room.surfaces(), room.junctions(), room.air(), floorArea, height);

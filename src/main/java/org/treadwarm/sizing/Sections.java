@@ -14,7 +14,7 @@ final class Sections {
     private static final int MOST_KEPT = 500;
 
     /** The most floors that one sizing solves anew, so that its time is bounded. */
-    private static final int MOST_NEW = 100;
+    static final int MOST_NEW = 100;
 
     private static final Map<SectionGeometry, FloorResponse> KEPT = new LinkedHashMap<>(2 * MOST_KEPT, 0.75f, true) {
         @Override
@@ -24,6 +24,7 @@ final class Sections {
     };
 
     private int solved;
+    private int followed;
     private String whyNot = "";
 
     /** The response of a geometry; empty when it cannot be had, and {@link #whyNot()} then says why. */
@@ -49,6 +50,11 @@ final class Sections {
             whyNot = problem.getMessage();
             return Optional.empty();
         }
+    }
+
+    /** Whether this sizing may follow one more floor through time. */
+    boolean mayFollow() {
+        return followed++ < MOST_NEW;
     }
 
     String whyNot() {

@@ -99,7 +99,42 @@ public record Sizing(
             Optional<SectionSizing> section,
             Optional<String> sectionReason,
             Optional<ElectricLayout> electric,
-            Optional<WaterLayout> water) {}
+            Optional<WaterLayout> water,
+            Optional<WarmUpSizing> warmup,
+            Optional<String> warmupReason) {}
+
+    /**
+     * How the floor warms its room after a setback on the design day. What the room holds is assumed: the capacities and the coupling
+     * stand here so that they can be looked at.
+     *
+     * @param from setback temperature, degrees Celsius
+     * @param within hours to be warm again
+     * @param reheatFlux what the heat load is raised by, W/m² of heated floor
+     * @param steadyDensity heat of the heater that keeps the room warm, W/m²
+     * @param densityNeeded heat of the heater that warms it in time, W/m²
+     * @param density the density looked at: the installed one, or the needed one where none is installed, W/m²
+     * @param hours with that density; left out when the room is not warm within 72 h
+     * @param lossCoefficient of the room, W/(m²·K) of heated floor
+     * @param airCapacity J/(m²·K) of heated floor
+     * @param massCapacity J/(m²·K) of heated floor
+     * @param massCoupling between air and mass, W/(m²·K)
+     * @param hoursToFive when the heater fails in steady state, until the room is at 5 °C; left out when not within 72 h
+     * @param hoursToFreezing the same until the heater plane is at 0 °C
+     */
+    public record WarmUpSizing(
+            double from,
+            double within,
+            double reheatFlux,
+            double steadyDensity,
+            double densityNeeded,
+            double density,
+            OptionalDouble hours,
+            double lossCoefficient,
+            double airCapacity,
+            double massCapacity,
+            double massCoupling,
+            OptionalDouble hoursToFive,
+            OptionalDouble hoursToFreezing) {}
 
     /**
      * How an electric heater is fed.

@@ -62,5 +62,6 @@ public final class Working {
         LayoutSteps layouts = new LayoutSteps(addresses, steps);
         answer.electric().ifPresent(layout -> layouts.electric(floor, layout));
         answer.water().ifPresent(layout -> layouts.water(floor, layout));
+        answer.warmup().ifPresent(found -> layouts.warmUp(floor, plan.roomIndexes[floor.room()], found));
     }
 }

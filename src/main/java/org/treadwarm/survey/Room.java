@@ -62,6 +62,12 @@ public record Room(
                 fallback = "0 W/m2")
         Reading reheat,
 
+        @Wording(
+                label = "warming up after a setback",
+                help =
+                        "Instead of a reheat per floor area: the reheat is then computed from the floor's and the room's heat.")
+        Optional<WarmUpGoal> warmUp,
+
         @Quantity(
                 kind = QuantityKind.RATIO,
                 min = 0,

@@ -71,11 +71,32 @@ public final class Rules {
         survey.assemblies().forEach((name, assembly) -> layers.assembly(Pointer.to("/assemblies", name), assembly));
     }
 
+    private void warmUp(String pointer, Room room, WarmUpGoal goal, boolean heated) {
+        if (room.reheat().value() > 0) {
+            findings.add(
+                    pointer + "/reheat",
+                    room.reheat().typed(),
+                    "a reheat is either given or computed from a setback",
+                    "0 W/m2 beside warmUp, or no warmUp");
+        }
+        if (!heated) {
+            findings.add(pointer + "/warmUp", "no heated floor", "only a heated floor warms a room up", "leave it out");
+        }
+        if (goal.from().value() > room.indoorTemperature().value()) {
+            findings.add(
+                    pointer + "/warmUp/from",
+                    goal.from().typed(),
+                    "a setback is no warmer than the room",
+                    "at most the indoor temperature");
+        }
+    }
+
     private void room(String pointer, Room room) {
         surfaces.check(pointer, room.name(), true, room.surfaces());
         boolean heated = room.heatedFloor().isPresent() || !findings.clean(pointer, "/heatedFloor");
         junctions.check(pointer, room.name(), room.junctions(), true, heated);
         room.air().ifPresent(given -> air.check(pointer + "/air", given));
+        room.warmUp().ifPresent(goal -> warmUp(pointer, room, goal, heated));
         room.heatedFloor().ifPresent(floor -> floors.check(pointer + "/heatedFloor", room, floor));
     }
 }

@@ -39,12 +39,16 @@ class EachInputMattersTest {
                     "/assemblies/timber wall/layers/3/airGap/thickness",
                     "wide enough for its air to turn over, it insulates no better when wider (ISO 6946)"));
 
+    /** A reheat that is left at 0 W/m², for beside a setback any other is refused. */
+    private static final String BESIDE_A_SETBACK = "/rooms/2/reheat";
+
     static List<Arguments> readings() {
         List<Arguments> readings = new ArrayList<>();
-        Readings.visit(
-                Surveys.accepted(SURVEY),
-                "",
-                (pointer, declared, reading) -> readings.add(Arguments.of(pointer, declared, reading.value())));
+        Readings.visit(Surveys.accepted(SURVEY), "", (pointer, declared, reading) -> {
+            if (!pointer.equals(BESIDE_A_SETBACK)) {
+                readings.add(Arguments.of(pointer, declared, reading.value()));
+            }
+        });
         return readings;
     }
 

@@ -8,6 +8,7 @@ import java.util.Iterator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
+import org.treadwarm.intake.Intake;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.jobs.JobDesk.Saving;
@@ -241,6 +242,7 @@ final class JobsApi {
             Problems.invalid(ctx, problems);
             return Optional.empty();
         }
+        Intake.tidy(tree.get().get("survey"));
         return Optional.of(new JobBody(
                 tree.get().get("name").textValue().strip(), tree.get().get("survey")));
     }

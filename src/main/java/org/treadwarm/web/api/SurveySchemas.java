@@ -3,8 +3,10 @@ package org.treadwarm.web.api;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import org.treadwarm.intake.Ranges;
+import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Shape;
 import org.treadwarm.survey.Survey;
+import org.treadwarm.survey.WarmUpGoal;
 import org.treadwarm.survey.Word;
 import org.treadwarm.units.Basis;
 import org.treadwarm.units.Declared;
@@ -37,6 +39,11 @@ final class SurveySchemas {
                 add((Class<? extends Record>) key.type());
             }
             many(properties.putObject(key.name()), key);
+        }
+        if (type == Room.class) {
+            ((ArrayNode) properties.get("reheat").get("oneOf"))
+                    .addObject()
+                    .put("$ref", "#/components/schemas/" + WarmUpGoal.class.getSimpleName());
         }
         if (type == Survey.class) {
             required.add("rooms");

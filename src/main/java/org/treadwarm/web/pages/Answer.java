@@ -21,6 +21,7 @@ import org.treadwarm.sizing.Sizing.SectionState;
 import org.treadwarm.sizing.Sizing.SpaceSizing;
 import org.treadwarm.sizing.Sizing.Warning;
 import org.treadwarm.sizing.Verdict;
+import org.treadwarm.sizing.WarmUpView;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Survey;
@@ -98,6 +99,14 @@ final class Answer {
                     "The floor between its cables or pipes",
                     "isotherms",
                     sheet -> Pictures.isotherms(room, answer, view, sheet));
+        }
+        if (floor.warmup().isPresent()) {
+            WarmUpView.of(survey, index)
+                    .ifPresent(morning -> add(
+                            pictures,
+                            "The morning after a setback",
+                            "warmup",
+                            sheet -> Pictures.warmUp(answer, morning, sheet)));
         }
         model.put("pictures", pictures);
         model.put("lines", lines(answer));

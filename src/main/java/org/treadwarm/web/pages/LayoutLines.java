@@ -12,6 +12,7 @@ import org.treadwarm.sizing.Sizing.HeatingElementLayout;
 import org.treadwarm.sizing.Sizing.LoopValve;
 import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.sizing.Sizing.Total;
+import org.treadwarm.sizing.Sizing.WarmUpSizing;
 import org.treadwarm.sizing.Sizing.WaterLayout;
 import org.treadwarm.sizing.Sizing.WaterTotal;
 import org.treadwarm.units.Numbers;
@@ -30,6 +31,7 @@ final class LayoutLines {
         LayoutLines lines = new LayoutLines();
         floor.electric().ifPresent(lines::electric);
         floor.water().ifPresent(layout -> lines.water(room, layout, total));
+        floor.warmup().ifPresent(lines::warmUp);
         return List.copyOf(lines.layouts);
     }
 
@@ -106,6 +108,38 @@ final class LayoutLines {
                         lines,
                         "Drops are of straight pipe without bends, fittings and manifold. Flush, vent and test the pressure before the floor"
                                 + " is covered; heat a screed up by its maker's rules; protect against frost when switched off."));
+    }
+
+    private void warmUp(WarmUpSizing found) {
+        List<Line> lines = new ArrayList<>();
+        lines.add(
+                line("Setback", found.from(), 1, "°C", "warm again within " + Numbers.fixed(found.within(), 1) + " h"));
+        lines.add(line("Reheat", found.reheatFlux(), 1, "W/m²", "of heated floor, counted in the heat loss"));
+        lines.add(line("Density needed", found.densityNeeded(), 0, "W/m²", "to be warm in that time"));
+        lines.add(new Line(
+                "Warm after",
+                found.hours().isPresent() ? Numbers.fixed(found.hours().getAsDouble(), 1) + " h" : "not in 72 h",
+                "at " + Numbers.fixed(found.density(), 0) + " W/m²"));
+        lines.add(new Line(
+                "Without power",
+                found.hoursToFive().isPresent()
+                        ? Numbers.fixed(found.hoursToFive().getAsDouble(), 0) + " h"
+                        : "over 72 h",
+                "until the room is at 5 °C"));
+        lines.add(new Line(
+                "Without power",
+                found.hoursToFreezing().isPresent()
+                        ? Numbers.fixed(found.hoursToFreezing().getAsDouble(), 0) + " h"
+                        : "over 72 h",
+                "until the heater plane is at 0 °C: water in pipes may freeze"));
+        layouts.add(new Layout(
+                "Warming up",
+                lines,
+                "On the design day, after a setback that has lasted. What the room holds is assumed (common practice, no source): "
+                        + Numbers.fixed(found.airCapacity() / 1000, 1) + " kJ/(m²·K) with the air, "
+                        + Numbers.fixed(found.massCapacity() / 1000, 0)
+                        + " kJ/(m²·K) in walls and furniture, coupled by "
+                        + Numbers.fixed(found.massCoupling(), 1) + " W/(m²·K), all per m² of heated floor."));
     }
 
     private static String governed(String room, Total total) {

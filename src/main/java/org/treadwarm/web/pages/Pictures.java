@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.Function;
 import org.treadwarm.draw.AirSide;
 import org.treadwarm.draw.Balance;
 import org.treadwarm.draw.BalanceDrawing;
@@ -26,6 +27,10 @@ import org.treadwarm.draw.MaterialFamily;
 import org.treadwarm.draw.Sheet;
 import org.treadwarm.draw.SurfaceProfile;
 import org.treadwarm.draw.TemperatureField;
+import org.treadwarm.draw.Threshold;
+import org.treadwarm.draw.Trace;
+import org.treadwarm.draw.WarmUpCurve;
+import org.treadwarm.draw.WarmUpDrawing;
 import org.treadwarm.sizing.AssemblyEvaluation;
 import org.treadwarm.sizing.SectionView;
 import org.treadwarm.sizing.Sizing.FloorSizing;
@@ -34,6 +39,8 @@ import org.treadwarm.sizing.Sizing.LayerSizing;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.SectionState;
 import org.treadwarm.sizing.Verdict;
+import org.treadwarm.sizing.WarmUpEvaluation;
+import org.treadwarm.sizing.WarmUpEvaluation.CurvePoint;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Bridging;
 import org.treadwarm.survey.Direction;
@@ -184,6 +191,33 @@ final class Pictures {
         } catch (IllegalArgumentException beyondAnyDrawing) {
             return Optional.empty();
         }
+    }
+
+    /** The room's morning after a setback; empty when it is warm at once or cannot be drawn. */
+    static Optional<String> warmUp(RoomSizing room, WarmUpEvaluation morning, Sheet sheet) {
+        List<CurvePoint> curve = morning.curve();
+        try {
+            return curve.size() < 2
+                    ? Optional.empty()
+                    : Optional.of(WarmUpDrawing.draw(
+                            sheet,
+                            new WarmUpCurve(
+                                    WarmUpCurve.Event.WARM_UP,
+                                    room.name(),
+                                    curve.stream().map(CurvePoint::hour).toList(),
+                                    List.of(
+                                            trace(Trace.Place.HEATER, curve, CurvePoint::heater),
+                                            trace(Trace.Place.SURFACE, curve, CurvePoint::floor),
+                                            trace(Trace.Place.AIR, curve, CurvePoint::air)),
+                                    List.of(new Threshold(
+                                            "setpoint", room.indoorTemperature(), Trace.Place.AIR, morning.hours())))));
+        } catch (IllegalArgumentException beyondAnyDrawing) {
+            return Optional.empty();
+        }
+    }
+
+    private static Trace trace(Trace.Place place, List<CurvePoint> curve, Function<CurvePoint, Double> temperature) {
+        return new Trace(place, curve.stream().map(temperature).toList());
     }
 
     /** Layers as a section takes them: one known by its resistance has no thickness there. */
