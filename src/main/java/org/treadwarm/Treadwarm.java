@@ -5,6 +5,7 @@ import java.util.stream.Stream;
 import org.treadwarm.commands.CheckCommand;
 import org.treadwarm.commands.HealthCommand;
 import org.treadwarm.commands.KeyCommand;
+import org.treadwarm.commands.RehearseCommand;
 import org.treadwarm.commands.ServeCommand;
 import org.treadwarm.commands.SizeCommand;
 import picocli.CommandLine;
@@ -16,7 +17,13 @@ import picocli.CommandLine.Command;
         description = "Sizes heated floors: what flux a floor must give, what it may give, and the margin between.",
         mixinStandardHelpOptions = true,
         version = "Treadwarm 1.0.0, method version 1",
-        subcommands = {ServeCommand.class, SizeCommand.class, CheckCommand.class, KeyCommand.class, HealthCommand.class
+        subcommands = {
+            ServeCommand.class,
+            SizeCommand.class,
+            CheckCommand.class,
+            KeyCommand.class,
+            HealthCommand.class,
+            RehearseCommand.class
         })
 public final class Treadwarm {
     private static final String SERVE = "serve";
