@@ -31,7 +31,9 @@ final class ElectricLayouts {
     /** Largest usual breaker of a heating circuit in the US, A; common practice, no source. */
     private static final double US_BREAKER = 20;
 
+    /** Mains at the ends of what they may be; common practice, no source. */
     private static final double LOW_VOLTAGE = 0.9;
+
     private static final double HIGH_VOLTAGE = 1.1;
 
     /** More elements than this in one floor are a slip of the survey. */

@@ -10,7 +10,6 @@ import org.treadwarm.survey.Zone;
 
 /** Steps of the largest fluxes that a heated floor's limits allow, in the order of the answer: zone, covering, layers, heater. */
 final class LimitSteps {
-    private final Plan plan;
     private final Addresses addresses;
     private final Steps steps;
     private final FloorPlan floor;
@@ -19,8 +18,7 @@ final class LimitSteps {
     private final Symbol room;
     private int next;
 
-    LimitSteps(Plan plan, Addresses addresses, Steps steps, FloorPlan floor, Zone zone) {
-        this.plan = plan;
+    LimitSteps(Addresses addresses, Steps steps, FloorPlan floor, Zone zone) {
         this.addresses = addresses;
         this.steps = steps;
         this.floor = floor;

@@ -1,8 +1,9 @@
 package org.treadwarm.sizing;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.stream.Stream;
+import java.util.stream.IntStream;
 import org.treadwarm.physics.warmup.Reheat;
 import org.treadwarm.physics.warmup.Watched;
 import org.treadwarm.sizing.Plan.RoomIndexes;
@@ -11,6 +12,7 @@ import org.treadwarm.sizing.WarmUpEvaluation.Floor;
 import org.treadwarm.sizing.WarmUpEvaluation.RoomHeat;
 import org.treadwarm.sizing.WarmUpEvaluation.Task;
 import org.treadwarm.survey.HeatedFloor;
+import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.LayerMatter;
 
 /**
@@ -21,6 +23,8 @@ import org.treadwarm.survey.LayerMatter;
  * @param room what loses and holds heat above it
  * @param task what is asked
  * @param reheatHeat what the heat load rises by, W
+ * @param found the densities that it takes, and the flux by which the heat load rises
+ * @param evaluation the morning with the density looked at
  */
 record WarmUpFloor(
         Floor floor, RoomHeat room, Task task, double reheatHeat, Reheat found, WarmUpEvaluation evaluation) {
@@ -50,13 +54,9 @@ record WarmUpFloor(
         Evaluation whole = floor.whole();
         int number = floor.plan.room();
         HeatedFloor given = whole.plan.survey.rooms().get(number).heatedFloor().orElseThrow();
-        Optional<String> missing = Stream.concat(given.above().stream(), given.below().stream())
-                .filter(layer -> !LayerMatter.isResistanceAlone(layer)
-                        && !LayerMatter.of(layer).missing().isEmpty())
-                .map(layer -> layer.title(1))
-                .findFirst();
+        Optional<String> missing = silent(given.above(), "above").or(() -> silent(given.below(), "below"));
         if (missing.isPresent()) {
-            return Made.not("density or specific heat of \"" + missing.get() + "\" is not known");
+            return Made.not("density or specific heat of " + missing.get() + " is not known");
         }
         double span = floor.room - whole.outdoor;
         double loss = whole.roomConstant[number] + whole.roomSlope[number] * whole.outdoor;
@@ -71,6 +71,15 @@ record WarmUpFloor(
         } catch (IllegalArgumentException | ArithmeticException problem) {
             return Made.not(problem.getMessage());
         }
+    }
+
+    /** The first layer that does not say what heat it holds. */
+    private static Optional<String> silent(List<Layer> layers, String where) {
+        return IntStream.range(0, layers.size())
+                .filter(i -> !LayerMatter.isResistanceAlone(layers.get(i))
+                        && !LayerMatter.of(layers.get(i)).missing().isEmpty())
+                .mapToObj(i -> "\"" + layers.get(i).title(i + 1) + "\" " + where + " the heater")
+                .findFirst();
     }
 
     private static Made followed(FloorEvaluation evaluated, HeatedFloor given, double lossCoefficient) {

@@ -58,7 +58,7 @@ public final class Working {
         new FloorSteps(plan, addresses, steps, floor).all(answer);
         new BuildUpSteps(plan, addresses, steps, floor, given).all(answer);
         new BelowSteps(plan, addresses, steps, floor).all(answer);
-        new LimitSteps(plan, addresses, steps, floor, given.zone()).all(answer);
+        new LimitSteps(addresses, steps, floor, given.zone()).all(answer);
         LayoutSteps layouts = new LayoutSteps(addresses, steps);
         answer.electric().ifPresent(layout -> layouts.electric(floor, layout));
         answer.water().ifPresent(layout -> layouts.water(floor, layout));
