@@ -2,8 +2,6 @@ package org.treadwarm.sizing;
 
 import java.util.Optional;
 import org.treadwarm.physics.section.Condition.Film;
-import org.treadwarm.physics.section.FloorHeater;
-import org.treadwarm.physics.section.FloorHeater.HeatingCable;
 import org.treadwarm.physics.section.FloorHeater.WaterPipe;
 import org.treadwarm.physics.section.FloorLayer;
 import org.treadwarm.physics.section.FloorLayer.Resisting;
@@ -66,10 +64,12 @@ public record SectionView(
     private static SectionView view(FloorEvaluation floor, double flux, SectionFloor.State state) {
         SectionGeometry geometry = floor.section.geometry;
         double coefficient = flux / (state.mean() - floor.room);
+        boolean water = geometry.heater() instanceof WaterPipe;
+        double drive = water ? state.water() : (flux + state.downward()) * geometry.spacing();
         FloorSection section = new FloorSection(
                 geometry.spacing(),
                 geometry.layers(),
-                driven(geometry, flux, state),
+                geometry.heater().driven(drive),
                 new Film(floor.room, coefficient),
                 new Film(state.below(), geometry.coefficientBelow()));
         double height =
@@ -100,23 +100,6 @@ public record SectionView(
                 : Math.min(floor.zoneMaximum(), floor.whole().in[covering]);
         return new SectionView(
                 geometry.spacing(), axis, geometry.heater().diameter(), map.x(), depth, temperature, surface, limit);
-    }
-
-    /** The heater with what heats it in this state. */
-    private static FloorHeater driven(SectionGeometry geometry, double flux, SectionFloor.State state) {
-        FloorHeater heater = geometry.heater();
-        if (heater instanceof WaterPipe pipe) {
-            return new WaterPipe(
-                    pipe.layer(),
-                    pipe.depth(),
-                    pipe.diameter(),
-                    pipe.wallThickness(),
-                    pipe.wallConductivity(),
-                    pipe.insideCoefficient(),
-                    state.water());
-        }
-        return new HeatingCable(
-                heater.layer(), heater.depth(), heater.diameter(), (flux + state.downward()) * geometry.spacing());
     }
 
     private static double thickness(FloorLayer layer) {

@@ -6,7 +6,6 @@ import static org.assertj.core.api.Assertions.within;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import org.junit.jupiter.api.Test;
 import org.treadwarm.physics.section.Condition.Film;
-import org.treadwarm.physics.section.FloorHeater.HeatingCable;
 import org.treadwarm.physics.section.FloorHeater.WaterPipe;
 import org.treadwarm.physics.section.FloorSection;
 import org.treadwarm.physics.section.FloorTemperatures;
@@ -54,24 +53,12 @@ class SectionSizingTest {
 
     private static FloorTemperatures solved(FloorEvaluation floor, double flux, SectionFloor.State state) {
         SectionGeometry geometry = floor.section.geometry;
-        var heater = geometry.heater() instanceof WaterPipe pipe
-                ? new WaterPipe(
-                        pipe.layer(),
-                        pipe.depth(),
-                        pipe.diameter(),
-                        pipe.wallThickness(),
-                        pipe.wallConductivity(),
-                        pipe.insideCoefficient(),
-                        state.water())
-                : new HeatingCable(
-                        geometry.heater().layer(),
-                        geometry.heater().depth(),
-                        geometry.heater().diameter(),
-                        (flux + state.downward()) * geometry.spacing());
+        boolean water = geometry.heater() instanceof WaterPipe;
+        double drive = water ? state.water() : (flux + state.downward()) * geometry.spacing();
         return new FloorSection(
                         geometry.spacing(),
                         geometry.layers(),
-                        heater,
+                        geometry.heater().driven(drive),
                         new Film(floor.room, flux / (state.mean() - floor.room)),
                         new Film(state.below(), geometry.coefficientBelow()))
                 .solve();

@@ -12,6 +12,13 @@ public sealed interface FloorHeater {
     double diameter();
 
     /**
+     * The same heater with another drive.
+     *
+     * @param drive water temperature of a pipe, degrees Celsius; heat of a cable, W per metre
+     */
+    FloorHeater driven(double drive);
+
+    /**
      * A pipe with warm water.
      *
      * @param wallThickness m, more than 0 and less than the radius
@@ -47,6 +54,11 @@ public sealed interface FloorHeater {
                 double water) {
             return new Section.Pipe(x, y, diameter / 2, wall, conductivity, coefficient, water);
         }
+
+        @Override
+        public WaterPipe driven(double drive) {
+            return new WaterPipe(layer, depth, diameter, wallThickness, wallConductivity, insideCoefficient, drive);
+        }
     }
 
     /**
@@ -58,6 +70,11 @@ public sealed interface FloorHeater {
         public HeatingCable {
             Require.positive("diameter of a cable, m", diameter);
             Require.finite("heat of a cable, W/m", heat);
+        }
+
+        @Override
+        public HeatingCable driven(double drive) {
+            return new HeatingCable(layer, depth, diameter, drive);
         }
     }
 }

@@ -76,7 +76,7 @@ public final class FloorResponse {
         FloorTemperatures typical = new FloorSection(
                         floor.spacing(),
                         floor.layers(),
-                        heater(floor.heater(), floor.heater() instanceof WaterPipe ? 20 : 100 * floor.spacing()),
+                        floor.heater().driven(floor.heater() instanceof WaterPipe ? 20 : 100 * floor.spacing()),
                         new Film(0, 10),
                         new Film(0, floor.below().coefficient()))
                 .solve(stopped);
@@ -101,20 +101,6 @@ public final class FloorResponse {
                 perFlux[number][node] = factors[1][number];
             }
         }
-    }
-
-    static FloorHeater heater(FloorHeater heater, double drive) {
-        if (heater instanceof WaterPipe pipe) {
-            return new WaterPipe(
-                    pipe.layer(),
-                    pipe.depth(),
-                    pipe.diameter(),
-                    pipe.wallThickness(),
-                    pipe.wallConductivity(),
-                    pipe.insideCoefficient(),
-                    drive);
-        }
-        return new HeatingCable(heater.layer(), heater.depth(), heater.diameter(), drive);
     }
 
     /** The largest difference from fields solved between the first two points, where it is worst. */

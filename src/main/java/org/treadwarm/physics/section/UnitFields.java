@@ -51,7 +51,7 @@ final class UnitFields {
 
     /** The floor with everything at 0 °C; a cable gives 1 W/m². */
     private Section section(double coefficient) {
-        FloorHeater heater = FloorResponse.heater(floor.heater(), wet ? 0 : floor.spacing());
+        FloorHeater heater = floor.heater().driven(wet ? 0 : floor.spacing());
         return new FloorLayout(floor.spacing(), floor.layers(), heater)
                 .section(new Film(0, coefficient), new Film(0, floor.below().coefficient()));
     }
