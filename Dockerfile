@@ -1,5 +1,9 @@
+# Bases of one's own are named with --build-arg: a JDK 17 with Maven to build, a Java 17 runtime to run.
+ARG BUILD_BASE=maven:3.9-eclipse-temurin-17
+ARG RUN_BASE=eclipse-temurin:17-jre
+
 # Build: the jar, with the program's own tests left to "mvn verify".
-FROM maven:3.9-eclipse-temurin-17 AS build
+FROM ${BUILD_BASE} AS build
 WORKDIR /src
 COPY pom.xml .
 COPY .mvn .mvn
@@ -9,11 +13,12 @@ COPY static static
 RUN mvn -B -ntp -q -DskipTests package
 
 # Run: a JRE, the jar, a user without rights, one volume for everything that is kept.
-FROM eclipse-temurin:17-jre
-RUN useradd --system --uid 10001 --home-dir /data treadwarm && mkdir /data && chown treadwarm /data
+FROM ${RUN_BASE}
+RUN useradd --system --uid 10001 --home-dir /data treadwarm && install -d -o treadwarm -m 700 /data
 COPY --from=build /src/target/treadwarm.jar /opt/treadwarm.jar
 # An archive of loaded classes shortens every start by a third.
-RUN java -XX:ArchiveClassesAtExit=/opt/treadwarm.jsa -jar /opt/treadwarm.jar rehearse
+RUN java -XX:ArchiveClassesAtExit=/opt/treadwarm.jsa -Xlog:cds=off -Xlog:cds+dynamic=off \
+    -jar /opt/treadwarm.jar rehearse
 USER treadwarm
 VOLUME /data
 EXPOSE 8080
