@@ -47,6 +47,9 @@ import org.treadwarm.units.Reading;
 final class PlanBuilder {
     private static final int NONE = Stack.NONE;
 
+    /** Own surfaces, heard surfaces, own junctions, heard junctions, air. */
+    private static final int RANKS = 5;
+
     final Survey survey;
     final Inputs inputs = new Inputs();
     final int rooms;
@@ -409,24 +412,47 @@ final class PlanBuilder {
 
     /** The paths of every room and space: own surfaces, heard surfaces, own junctions, heard junctions, air. */
     PathRef[][] paths() {
-        List<List<PathRef>> lists = new ArrayList<>();
-        for (int i = 0; i < rooms + spaces + 2; i++) {
-            lists.add(new ArrayList<>());
-        }
-        collect(lists, false, LinkKind.SURFACE, LinkKind.OPENING);
-        collect(lists, true, LinkKind.SURFACE, LinkKind.OPENING);
-        collect(lists, false, LinkKind.JUNCTION, LinkKind.JUNCTION);
-        collect(lists, true, LinkKind.JUNCTION, LinkKind.JUNCTION);
-        collect(lists, false, LinkKind.AIR, LinkKind.AIR);
-        return lists.stream().map(list -> list.toArray(new PathRef[0])).toArray(PathRef[][]::new);
-    }
-
-    private void collect(List<List<PathRef>> lists, boolean heard, LinkKind one, LinkKind two) {
-        for (int i = 0; i < links.size(); i++) {
-            Link link = links.get(i);
-            if (link.kind() == one || link.kind() == two) {
-                lists.get(heard ? link.other() : link.owner()).add(new PathRef(i, heard));
+        int[][] counts = new int[rooms + spaces + 2][RANKS];
+        for (Link link : links) {
+            counts[link.owner()][rank(link, false)]++;
+            if (isHeard(link)) {
+                counts[link.other()][rank(link, true)]++;
             }
         }
+        PathRef[][] paths = new PathRef[counts.length][];
+        for (int node = 0; node < paths.length; node++) {
+            paths[node] = new PathRef[startsOf(counts[node])];
+        }
+        for (int i = 0; i < links.size(); i++) {
+            Link link = links.get(i);
+            paths[link.owner()][counts[link.owner()][rank(link, false)]++] = new PathRef(i, false);
+            if (isHeard(link)) {
+                paths[link.other()][counts[link.other()][rank(link, true)]++] = new PathRef(i, true);
+            }
+        }
+        return paths;
+    }
+
+    private static boolean isHeard(Link link) {
+        return link.kind() != LinkKind.AIR;
+    }
+
+    private static int rank(Link link, boolean heard) {
+        return switch (link.kind()) {
+            case SURFACE, OPENING -> heard ? 1 : 0;
+            case JUNCTION -> heard ? 3 : 2;
+            case AIR -> 4;
+        };
+    }
+
+    /** Turns counts into the places where each rank starts, and gives their sum. */
+    private static int startsOf(int[] counts) {
+        int sum = 0;
+        for (int rank = 0; rank < counts.length; rank++) {
+            int count = counts[rank];
+            counts[rank] = sum;
+            sum += count;
+        }
+        return sum;
     }
 }

@@ -8,6 +8,9 @@ import org.treadwarm.units.Reading;
 
 /** Walks every reading of a survey with its address and its declaration. */
 public final class Readings {
+    /** Steps of the longest address there can be, with room to spare; the shapes nest, they do not recur. */
+    private static final int DEEPEST = 32;
+
     /** What is told of each reading. */
     @FunctionalInterface
     public interface Visitor {
@@ -23,17 +26,20 @@ public final class Readings {
     private final Choice choice;
     private final Visitor visitor;
 
-    /** The way down to an object, so that an address is written out only when it is told. */
-    private record Trail(Trail above, String step) {
-        @Override
-        public String toString() {
-            return above == null ? step : Pointer.to(above.toString(), step);
-        }
-    }
+    // The way down, so that an address is written out only when it is told: step 0 is an address, the others are names
+    // of
+    // keys, or places in lists where the name is absent.
+    private final String[] names;
+    private final int[] places;
+    private int depth;
 
-    private Readings(Choice choice, Visitor visitor) {
+    private Readings(Choice choice, Visitor visitor, String pointer) {
         this.choice = choice;
         this.visitor = visitor;
+        this.names = new String[DEEPEST];
+        this.places = new int[DEEPEST];
+        this.names[0] = pointer;
+        this.depth = 1;
     }
 
     /** Visits every reading below a record, in document order. */
@@ -43,35 +49,54 @@ public final class Readings {
 
     /** Visits the readings below a record that a choice wants, in document order. */
     public static void visit(Record record, String pointer, Choice choice, Visitor visitor) {
-        new Readings(choice, visitor).record(record, new Trail(null, pointer));
+        new Readings(choice, visitor, pointer).record(record);
     }
 
-    private void record(Record record, Trail trail) {
+    private String address() {
+        String address = names[0];
+        for (int i = 1; i < depth; i++) {
+            address = names[i] == null ? Pointer.to(address, places[i]) : Pointer.to(address, names[i]);
+        }
+        return address;
+    }
+
+    private void record(Record record) {
         for (Shape.Key key : Shape.of(record.getClass()).holdingReadings()) {
-            value(key, key.in(record), trail, key.name());
+            Object value = key.in(record);
+            if (value instanceof Optional<?> optional) {
+                if (optional.isEmpty()) {
+                    continue;
+                }
+                value = optional.get();
+            }
+            names[depth++] = key.name();
+            value(key, value);
+            depth--;
         }
     }
 
-    private void value(Shape.Key key, Object value, Trail trail, String step) {
+    private void value(Shape.Key key, Object value) {
         if (value instanceof Reading reading) {
             Declared declared = key.quantity().orElseThrow();
             if (choice.wants(declared, reading)) {
-                visitor.reading(new Trail(trail, step).toString(), declared, reading);
-            }
-        } else if (value instanceof Optional<?> optional) {
-            if (optional.isPresent()) {
-                value(key, optional.get(), trail, step);
+                visitor.reading(address(), declared, reading);
             }
         } else if (value instanceof Record record) {
-            record(record, new Trail(trail, step));
+            record(record);
         } else if (value instanceof List<?> list) {
-            Trail below = list.isEmpty() ? trail : new Trail(trail, step);
+            names[depth++] = null;
             for (int i = 0; i < list.size(); i++) {
-                value(key, list.get(i), below, Integer.toString(i));
+                places[depth - 1] = i;
+                value(key, list.get(i));
             }
+            depth--;
         } else if (value instanceof Map<?, ?> map) {
-            Trail below = new Trail(trail, step);
-            map.forEach((name, held) -> value(key, held, below, (String) name));
+            depth++;
+            map.forEach((name, held) -> {
+                names[depth - 1] = (String) name;
+                value(key, held);
+            });
+            depth--;
         }
     }
 }
