@@ -62,8 +62,10 @@ final class Answers {
         }
         waters = WaterLayouts.of(numbers);
         List<RoomSizing> rooms = new ArrayList<>(plan.rooms);
+        Warnings warnings = new Warnings(plan, numbers);
         for (int i = 0; i < plan.rooms; i++) {
             rooms.add(room(i));
+            warnings.room(i, rooms.get(i));
         }
         List<SpaceSizing> spaces = new ArrayList<>();
         for (int node : plan.floatingNodes) {
@@ -76,7 +78,7 @@ final class Answers {
                 total(rooms),
                 assemblies,
                 new NetworkSolution(plan.floatingNodes.length, numbers.residual),
-                new Warnings(plan, numbers, rooms).all(),
+                warnings.all(),
                 new Method(Sizing.METHOD_VERSION));
     }
 

@@ -3,6 +3,8 @@ package org.treadwarm.sizing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Stream;
 import org.treadwarm.physics.moisture.SurfaceTemperature;
 import org.treadwarm.sizing.Plan.Face;
 import org.treadwarm.sizing.Plan.Link;
@@ -36,28 +38,55 @@ final class Warnings {
     private final Plan plan;
     private final Survey survey;
     private final Evaluation numbers;
-    private final List<RoomSizing> rooms;
     private final List<Warning> warnings = new ArrayList<>();
+    private final List<Warning> unusual = new ArrayList<>();
+    private final List<Warning> ofRooms = new ArrayList<>();
     private final FloorWarnings floorWarnings;
 
-    Warnings(Plan plan, Evaluation numbers, List<RoomSizing> rooms) {
+    Warnings(Plan plan, Evaluation numbers) {
         this.plan = plan;
         this.survey = plan.survey;
         this.numbers = numbers;
-        this.rooms = rooms;
-        this.floorWarnings = new FloorWarnings(survey, warnings);
+        this.floorWarnings = new FloorWarnings(survey, ofRooms);
     }
 
+    /**
+     * Looks at a room. To be called for each room in survey order, best as soon as its answer stands: in a job of many
+     * rooms, coming back to a room later costs more than looking at it.
+     */
+    void room(int i, RoomSizing answer) {
+        Room room = survey.rooms().get(i);
+        String pointer = "/rooms/" + i;
+        Readings.visit(room, pointer, Warnings::isImplausible, this::implausible);
+        double volume = room.air()
+                .flatMap(Air::volume)
+                .map(Reading::value)
+                .orElse(room.floorArea().value() * room.height().value());
+        changes(pointer + "/air", room.air(), volume, ofRooms);
+        gains(i, answer, pointer);
+        if (room.heatedFloor().isPresent()) {
+            floorWarnings.check(i, room, answer);
+        }
+    }
+
+    /** All there is to say, once every room has been looked at. */
     List<Warning> all() {
-        Readings.visit(survey, "", Warnings::isImplausible, this::implausible);
+        List<Warning> unusualInRooms = List.copyOf(unusual);
+        unusual.clear();
+        Readings.visit(survey.site(), "/site", Warnings::isImplausible, this::implausible);
+        survey.assemblies().forEach((name, assembly) -> unusualIn("/assemblies", name, assembly));
+        survey.spaces().forEach((name, space) -> unusualIn("/spaces", name, space));
         site();
         assemblies();
         grounds();
         spaces();
-        for (int i = 0; i < rooms.size(); i++) {
-            room(i, survey.rooms().get(i));
-        }
-        return List.copyOf(warnings);
+        return Stream.of(unusual, unusualInRooms, warnings, ofRooms)
+                .flatMap(List::stream)
+                .toList();
+    }
+
+    private void unusualIn(String parent, String name, Record record) {
+        Readings.visit(record, Pointer.to(parent, name), Warnings::isImplausible, this::implausible);
     }
 
     private void add(String code, String pointer, String message, String why, String settle) {
@@ -74,7 +103,7 @@ final class Warnings {
         double value = reading.value();
         boolean low = value < declared.plausibleFrom();
         String unit = declared.kind().siUnit();
-        add(
+        unusual.add(new Warning(
                 "unusual-reading",
                 pointer,
                 "The " + declared.label() + " of " + Numbers.significant(value, 6) + (unit.isEmpty() ? "" : " " + unit)
@@ -83,7 +112,7 @@ final class Warnings {
                         + Numbers.significant(low ? declared.plausibleFrom() : declared.plausibleTo(), 6)
                         + (unit.isEmpty() ? "" : " " + unit)
                         + " (common practice, no source); a slip of the unit or of the decimal mark is likely.",
-                "Look at the reading as it was typed, \"" + reading.typed() + "\", and take it again if in doubt.");
+                "Look at the reading as it was typed, \"" + reading.typed() + "\", and take it again if in doubt."));
     }
 
     private static boolean isPlausibleZero(double value, Declared declared) {
@@ -242,7 +271,7 @@ final class Warnings {
                         "It has no effect on any room.",
                         "Name it as the other side of a surface, or leave it out.");
             }
-            changes(pointer + "/air", space.air(), Answers.value(space.air().flatMap(Air::volume)));
+            changes(pointer + "/air", space.air(), Answers.value(space.air().flatMap(Air::volume)), warnings);
             node++;
         }
     }
@@ -262,37 +291,23 @@ final class Warnings {
         return named;
     }
 
-    private void changes(String pointer, java.util.Optional<Air> air, double volume) {
+    private static void changes(String pointer, Optional<Air> air, double volume, List<Warning> warnings) {
         if (air.isEmpty() || volume <= 0 || air.get().changeRate().isPresent()) {
             return;
         }
         double flow = Answers.value(air.get().flow()) + Answers.value(air.get().supply());
         double rate = flow * 3600 / volume;
         if (rate > 5) {
-            add(
+            warnings.add(new Warning(
                     "many-air-changes",
                     pointer,
                     "This flow replaces the air " + Numbers.significant(rate, 3) + " times an hour.",
                     "More than 5 air changes are unusual (common practice, no source).",
-                    "Check the flow's unit and the volume.");
+                    "Check the flow's unit and the volume."));
         }
     }
 
-    private void room(int i, Room room) {
-        String pointer = "/rooms/" + i;
-        double volume = room.air()
-                .flatMap(Air::volume)
-                .map(Reading::value)
-                .orElse(room.floorArea().value() * room.height().value());
-        changes(pointer + "/air", room.air(), volume);
-        gains(i, pointer);
-        if (room.heatedFloor().isPresent()) {
-            floorWarnings.check(i, room, rooms.get(i));
-        }
-    }
-
-    private void gains(int i, String pointer) {
-        RoomSizing room = rooms.get(i);
+    private void gains(int i, RoomSizing room, String pointer) {
         double gains = room.heatLoss().gainsFromNeighbours();
         double losses = room.heatLoss().total() + gains;
         if (gains <= 0.1 * losses || losses <= 0) {
@@ -304,13 +319,13 @@ final class Warnings {
                         + Numbers.fixed(
                                 losses * (1 + allowance) / room.floor().area().getAsDouble(), 1) + " W/m2."
                 : "";
-        add(
+        ofRooms.add(new Warning(
                 "gains-from-neighbours",
                 pointer,
                 "Warmer neighbours cover " + Numbers.fixed(100 * gains / losses, 0) + " % of this room's losses."
                         + without,
                 "They may be off on the coldest day.",
-                "Agree with the client whether the neighbours' heat may be counted on.");
+                "Agree with the client whether the neighbours' heat may be counted on."));
     }
 
     /** Whether a surface is a piece of the floor. */
