@@ -4,10 +4,10 @@ import java.nio.file.Path;
 import java.time.Clock;
 
 /**
- * Everything the program keeps, in one folder: jobs with all their revisions, people, sessions, keys and the audit list.
+ * Everything the program keeps, in one folder or database: jobs with all their revisions, people, sessions, keys and the audit list.
  *
- * <p>All parts may be used from any number of threads. Several processes may open the same folder at once. Every change
- * is one transaction and on disk when its method returns. Changes of jobs, people and keys, and sign-ins, append to the
+ * <p>All parts may be used from any number of threads. Several processes may open the same folder or database at once. Every
+ * change is one transaction, made alone, and on disk when its method returns. Changes of jobs, people and keys, and sign-ins, append to the
  * audit list in the same transaction.
  */
 public final class Store implements AutoCloseable {
@@ -28,12 +28,18 @@ public final class Store implements AutoCloseable {
     }
 
     /**
-     * Opens the folder, creating it and its tables as needed.
+     * Opens the folder or database, creating folder and tables as needed.
      *
-     * @throws StoreUnavailable if the folder cannot be written, its file is no database, or a newer program wrote it
+     * @throws StoreUnavailable if it cannot be written or reached, is no database of this program, or a newer program
+     *     wrote it
      */
+    public static Store open(DataHome home, Clock clock) {
+        return new Store(Database.open(Engine.of(home)), clock);
+    }
+
+    /** Opens a folder. */
     public static Store open(Path folder, Clock clock) {
-        return new Store(Database.open(folder), clock);
+        return open(DataHome.folder(folder), clock);
     }
 
     public Jobs jobs() {

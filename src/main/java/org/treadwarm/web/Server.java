@@ -101,6 +101,7 @@ public final class Server implements AutoCloseable {
         });
         config.routes.exception(StoreUnavailable.class, (e, ctx) -> {
             LOG.error("the store cannot be reached: {}", e.getMessage());
+            ctx.attribute("changeMayBeMade", e.changeMayBeMade());
             answer(ctx, pages, 503);
         });
         config.routes.exception(IllegalArgumentException.class, (e, ctx) -> {
@@ -153,7 +154,10 @@ public final class Server implements AutoCloseable {
             case 405 -> "This method is not served here";
             case 413 -> "The body is too large";
             case 422 -> "This cannot be kept as it is: it holds characters that are no text";
-            case 503 -> "The store cannot be reached just now; nothing was saved";
+            case 503 ->
+                Boolean.TRUE.equals(ctx.attribute("changeMayBeMade"))
+                        ? "The connection to the store broke while saving; look whether the change is there before saving it again"
+                        : "The store cannot be reached just now; nothing was saved";
             case 500 -> "A fault of the program, noted under " + ctx.attribute("reference");
             default -> String.format(Locale.ROOT, "The request could not be answered (%d)", status);
         };

@@ -42,14 +42,15 @@ class FullDiskTest {
             database.changeIfPossible(handle ->
                     handle.execute("insert into piece (sha256, body) values ('0', ?)", "large".repeat(100_000)));
 
-            assertThat(new DataFile(folder).count("piece")).isZero();
+            assertThat(new DataFile(DataHome.folder(folder)).count("piece")).isZero();
         }
     }
 
     private Database withoutRoom() {
-        SQLiteDataSource connections = SqliteFile.connections(folder);
-        long pages = Long.parseLong(new DataFile(folder).text("pragma page_count"));
+        SqliteFile engine = new SqliteFile(folder);
+        SQLiteDataSource connections = engine.connections();
+        long pages = Long.parseLong(new DataFile(DataHome.folder(folder)).text("pragma page_count"));
         connections.getConfig().setMaxPageCount((int) pages + 20);
-        return new Database(folder, SqliteFile.pool(connections));
+        return new Database(engine, engine.pool(connections));
     }
 }

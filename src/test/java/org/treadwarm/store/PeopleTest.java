@@ -8,20 +8,30 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.Parameter;
+import org.junit.jupiter.params.ParameterizedClass;
+import org.junit.jupiter.params.provider.EnumSource;
 
+@ParameterizedClass
+@EnumSource(Kind.class)
 class PeopleTest {
+    @Parameter
+    Kind kind;
+
     static final String PASSWORD = "long enough, invented";
 
     @TempDir
     Path folder;
 
     private final TestClock clock = new TestClock();
+    private DataHome home;
     private Store store;
     private People people;
 
     @BeforeEach
     void open() {
-        store = Store.open(folder, clock);
+        home = kind.emptyHome(folder);
+        store = Store.open(home, clock);
         people = store.people();
     }
 
@@ -52,7 +62,7 @@ class PeopleTest {
         assertThat(people.invitationIsOpen(token)).isFalse();
         assertThat(people.createOwner(token, "Ben", PASSWORD)).isEqualTo(new OwnerCreation.LinkRefused());
         assertThat(people.inviteOwner()).isEmpty();
-        assertThat(new DataFile(folder).count("person")).isEqualTo(1);
+        assertThat(new DataFile(home).count("person")).isEqualTo(1);
     }
 
     @Test
@@ -90,7 +100,7 @@ class PeopleTest {
     @Test
     void keepsNoSecretInTheClear() {
         String token = people.inviteOwner().orElseThrow();
-        DataFile file = new DataFile(folder);
+        DataFile file = new DataFile(home);
         assertThat(file.text("select sha256 from owner_invitation")).isEqualTo(Secrets.sha256(token));
 
         people.createOwner(token, "Anna", PASSWORD);
