@@ -34,6 +34,8 @@ public final class LogSetup extends ContextAwareBase implements Configurator {
         Logger root = context.getLogger(org.slf4j.Logger.ROOT_LOGGER_NAME);
         root.setLevel(Level.WARN);
         root.addAppender(console);
+        // It warns, with a trace, of every connection that breaks; the store says the same in a line.
+        context.getLogger("com.zaxxer.hikari").setLevel(Level.ERROR);
         // It warns of every client that sends an odd Host header; the host guard answers those.
         context.getLogger("org.eclipse.jetty.util.HostPort").setLevel(Level.ERROR);
         return ExecutionStatus.DO_NOT_INVOKE_NEXT_IF_ANY;

@@ -4,6 +4,10 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.file.Path;
 import java.time.Duration;
+import java.util.List;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -95,6 +99,21 @@ class PeopleTest {
         assertThat(people.createOwner(token, "  ", PASSWORD)).isEqualTo(new OwnerCreation.NameRefused());
         assertThat(people.createOwner(token, "An\nna", PASSWORD)).isEqualTo(new OwnerCreation.NameRefused());
         assertThat(people.createOwner(token, "Anna", "ten chars!")).isInstanceOf(OwnerCreation.Created.class);
+    }
+
+    @Test
+    void ofTwoWhoUseTheLinkAtOnceOneBecomesTheOwner() throws Exception {
+        String token = people.inviteOwner().orElseThrow();
+        ExecutorService threads = Executors.newFixedThreadPool(2);
+        try (Store other = Store.open(home, clock)) {
+            Future<OwnerCreation> one = threads.submit(() -> people.createOwner(token, "Anna", PASSWORD));
+            Future<OwnerCreation> two = threads.submit(() -> other.people().createOwner(token, "Ben", PASSWORD));
+
+            assertThat(List.of(one.get(), two.get())).containsOnlyOnce(new OwnerCreation.LinkRefused());
+            assertThat(new DataFile(home).count("person")).isEqualTo(1);
+        } finally {
+            threads.shutdownNow();
+        }
     }
 
     @Test

@@ -66,6 +66,7 @@ class SignInTest {
         assertThat(people.signIn("Anna Quill", "x".repeat(5000))).isEqualTo(REFUSED);
         assertThat(people.signIn("Nobody", PASSWORD)).isEqualTo(REFUSED);
         assertThat(people.signIn("", "")).isEqualTo(REFUSED);
+        assertThat(people.signIn("Anna\0Quill", PASSWORD)).isEqualTo(REFUSED);
     }
 
     @Test
