@@ -33,25 +33,35 @@ final class HomeOptions {
     DataHome home() {
         Optional<String> fromEnvironment = databaseOfEnvironment();
         if (folder.isPresent() && (database.isPresent() || fromEnvironment.isPresent())) {
-            throw refused("A folder (--data) and a database (" + (database.isPresent() ? "--database" : VARIABLE)
-                    + ") are both named; name one of them.");
+            throw refused(
+                    command,
+                    "A folder (--data) and a database (" + (database.isPresent() ? "--database" : VARIABLE)
+                            + ") are both named; name one of them.");
         }
         Optional<String> url = database.or(() -> fromEnvironment);
-        return url.isPresent() ? databaseAt(url.get()) : DataHome.folder(folder.orElse(Path.of(FOLDER)));
+        return url.isPresent() ? databaseAt(command, url.get()) : DataHome.folder(folder.orElse(Path.of(FOLDER)));
+    }
+
+    /**
+     * The folder, for what is done with files only.
+     *
+     * @param otherwise what to do instead with a database
+     * @throws ParameterException if a database is named
+     */
+    Path folder(String otherwise) {
+        if (home() instanceof DataHome.Folder found) {
+            return found.path();
+        }
+        throw refused(command, "This is for a data folder, and a database is named. " + otherwise + ".");
     }
 
     /** The database at an address that was typed. */
-    DataHome databaseAt(String url) {
+    static DataHome.Postgresql databaseAt(CommandSpec command, String url) {
         try {
             return DataHome.database(url);
         } catch (IllegalArgumentException e) {
-            throw refused(e.getMessage());
+            throw refused(command, e.getMessage());
         }
-    }
-
-    /** The folder that was named, or the usual one, whatever the environment says. */
-    Path folderOnly() {
-        return folder.orElse(Path.of(FOLDER));
     }
 
     /** The address in the environment; empty if it is not set or blank. */
@@ -59,7 +69,7 @@ final class HomeOptions {
         return Optional.ofNullable(System.getenv(VARIABLE)).filter(url -> !url.isBlank());
     }
 
-    ParameterException refused(String message) {
+    static ParameterException refused(CommandSpec command, String message) {
         return new ParameterException(command.commandLine(), message);
     }
 }

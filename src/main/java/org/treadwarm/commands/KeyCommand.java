@@ -5,7 +5,6 @@ import java.util.Locale;
 import java.util.concurrent.Callable;
 import org.treadwarm.store.Scope;
 import org.treadwarm.store.Store;
-import org.treadwarm.store.StoreUnavailable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -53,7 +52,7 @@ public final class KeyCommand {
                         + ") is shown only this once:");
                 System.out.println(token);
                 return 0;
-            } catch (StoreUnavailable | IllegalArgumentException e) {
+            } catch (IllegalArgumentException e) {
                 System.err.println(e.getMessage());
                 return 1;
             }

@@ -9,7 +9,6 @@ import java.util.concurrent.CountDownLatch;
 import org.treadwarm.jobs.Demo;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.store.Store;
-import org.treadwarm.store.StoreUnavailable;
 import org.treadwarm.web.Server;
 import org.treadwarm.web.Settings;
 import org.treadwarm.web.WarmUp;
@@ -57,7 +56,7 @@ public final class ServeCommand implements Callable<Integer> {
             System.err.println("The port is 0 to 65535, not " + port + ".");
             return 2;
         }
-        try (Store store = Store.open(data.home(), Clock.systemUTC())) {
+        try (Store store = Store.openToServe(data.home(), Clock.systemUTC())) {
             if (demo) {
                 Demo.addTo(new JobDesk(store.jobs()));
             }
@@ -71,9 +70,6 @@ public final class ServeCommand implements Callable<Integer> {
             }));
             stopped.await();
             return 0;
-        } catch (StoreUnavailable e) {
-            System.err.println(e.getMessage());
-            return 1;
         } catch (JavalinBindException e) {
             System.err.println("The server cannot listen on " + bind + " port " + port
                     + ": it is in use already, or not allowed. Choose another with --port or --bind.");

@@ -32,7 +32,7 @@ public sealed interface DataHome {
      *
      * @throws IllegalArgumentException if it is no address of a PostgreSQL database; the message does not repeat it
      */
-    static DataHome database(String url) {
+    static Postgresql database(String url) {
         if (!url.startsWith(ADDRESS) || org.postgresql.Driver.parseURL(url, null) == null) {
             throw new IllegalArgumentException(
                     "The address of the database cannot be used (it is not repeated here, as it"

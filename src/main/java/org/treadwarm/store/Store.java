@@ -2,6 +2,8 @@ package org.treadwarm.store;
 
 import java.nio.file.Path;
 import java.time.Clock;
+import java.time.Duration;
+import java.util.Optional;
 
 /**
  * Everything the program keeps, in one folder or database: jobs with all their revisions, people, sessions, keys and the audit list.
@@ -11,15 +13,19 @@ import java.time.Clock;
  * audit list in the same transaction.
  */
 public final class Store implements AutoCloseable {
+    private static final Duration LONGEST_CHECK = Duration.ofSeconds(10);
+
     private final Database database;
+    private final Optional<FolderLock> lock;
     private final Audit audit;
     private final Jobs jobs;
     private final People people;
     private final Sessions sessions;
     private final ApiKeys keys;
 
-    private Store(Database database, Clock clock) {
+    private Store(Database database, Clock clock, Optional<FolderLock> lock) {
         this.database = database;
+        this.lock = lock;
         this.audit = new Audit(database, clock);
         this.jobs = new Jobs(database, audit, clock);
         this.people = new People(database, audit, clock);
@@ -34,12 +40,33 @@ public final class Store implements AutoCloseable {
      *     wrote it
      */
     public static Store open(DataHome home, Clock clock) {
-        return new Store(Database.open(Engine.of(home)), clock);
+        return new Store(Database.open(Engine.of(home)), clock, Optional.empty());
     }
 
     /** Opens a folder. */
     public static Store open(Path folder, Clock clock) {
         return open(DataHome.folder(folder), clock);
+    }
+
+    /**
+     * Opens the folder or database as {@link #open} does, for a server: a folder is looked through for damage, at most ten
+     * seconds long, and belongs to this server alone until the store is closed. A database may have several servers.
+     *
+     * @throws StoreUnavailable also if another server has the folder, or its file is damaged
+     */
+    public static Store openToServe(DataHome home, Clock clock) {
+        if (!(home instanceof DataHome.Folder folder)) {
+            return open(home, clock);
+        }
+        FolderLock lock = FolderLock.take(folder.path());
+        try {
+            SqliteFile engine = new SqliteFile(folder.path());
+            StartCheck.run(engine, LONGEST_CHECK);
+            return new Store(Database.open(engine), clock, Optional.of(lock));
+        } catch (RuntimeException problem) {
+            lock.close();
+            throw problem;
+        }
     }
 
     public Jobs jobs() {
@@ -65,5 +92,6 @@ public final class Store implements AutoCloseable {
     @Override
     public void close() {
         database.close();
+        lock.ifPresent(FolderLock::close);
     }
 }

@@ -127,8 +127,7 @@ class PostgresTest {
 
     @Test
     void commitsReachTheDiskWhateverTheDatabaseIsSetTo() {
-        DataHome home = DataHome.database(
-                ((DataHome.Postgresql) TestPostgres.emptyHome()).url() + "&options=-csynchronous_commit=off");
+        DataHome home = DataHome.database(TestPostgres.emptyHome().url() + "&options=-csynchronous_commit=off");
         try (Database database = Database.open(Engine.of(home))) {
             assertThat(database.<String>read(handle -> handle.createQuery("show synchronous_commit")
                             .mapTo(String.class)

@@ -30,7 +30,7 @@ public final class TestPostgres {
     public static DataHome.Postgresql emptyHome() {
         String schema = "place_" + SCHEMAS.incrementAndGet();
         execute("create schema " + schema);
-        return (DataHome.Postgresql) DataHome.database(address("postgres") + "&currentSchema=" + schema);
+        return DataHome.database(address("postgres") + "&currentSchema=" + schema);
     }
 
     /** The address of a database of this server, there or not. */
