@@ -36,6 +36,9 @@ sealed interface Engine permits SqliteFile, Postgres {
     /** What a failure means to the person who runs the program; empty if it is a fault of the program. */
     Optional<String> explain(SQLException problem);
 
+    /** Whether a failure means that the disk is full. */
+    boolean isFull(SQLException problem);
+
     /** Whether a commit that failed so may have been made all the same. */
     boolean leavesCommitUnknown(SQLException problem);
 }

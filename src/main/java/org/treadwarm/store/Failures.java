@@ -18,7 +18,8 @@ final class Failures {
         return all(problem).map(engine::explain).flatMap(Optional::stream).findFirst();
     }
 
-    private static Stream<SQLException> all(Throwable problem) {
+    /** All failures of the database among the causes, the outermost first. */
+    static Stream<SQLException> all(Throwable problem) {
         return Stream.iterate(problem, cause -> cause != null, Throwable::getCause)
                 .filter(SQLException.class::isInstance)
                 .map(SQLException.class::cast);

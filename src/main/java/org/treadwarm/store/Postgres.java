@@ -26,6 +26,8 @@ record Postgres(DataHome.Postgresql home) implements Engine {
     private static final int POOL_SIZE = 6;
     private static final int POOL_WAIT_MILLISECONDS = 6000;
 
+    private static final String FULL = "53100";
+
     /** Any number will do that no other program on the same database takes. */
     private static final int LOCK = 0x74776172;
 
@@ -107,7 +109,7 @@ record Postgres(DataHome.Postgresql home) implements Engine {
             case "3F000" -> Optional.of("it has no schema of this name, or none that this account may use");
             case "25006" -> Optional.of("it is read-only");
             case "42501" -> Optional.of("this account has not the right to make or change its tables");
-            case "53100" -> Optional.of("the disk of the database server is full; free some space and try again");
+            case FULL -> Optional.of("the disk of the database server is full; free some space and try again");
             case "53300" -> Optional.of("the database server takes no more connections; try again");
             case "55P03" -> Optional.of("another program keeps it locked; try again");
             case "57014" -> Optional.of("it took too long to answer; try again");
@@ -125,6 +127,11 @@ record Postgres(DataHome.Postgresql home) implements Engine {
         return problem instanceof SQLTransientConnectionException
                 ? Optional.of("too many requests wait for a connection; try again")
                 : Optional.empty();
+    }
+
+    @Override
+    public boolean isFull(SQLException problem) {
+        return FULL.equals(problem.getSQLState());
     }
 
     @Override

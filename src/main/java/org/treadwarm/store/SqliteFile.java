@@ -23,6 +23,7 @@ import org.sqlite.SQLiteDataSource;
 record SqliteFile(Path folder) implements Engine {
     static final String NAME = "treadwarm.sqlite";
 
+    private static final int FULL = 13;
     private static final int BUSY_TIMEOUT_MILLISECONDS = 5000;
     private static final int POOL_SIZE = 6;
 
@@ -92,7 +93,7 @@ record SqliteFile(Path folder) implements Engine {
             case 8 -> Optional.of("the data file cannot be written: it, or its folder, is read-only");
             case 10 -> Optional.of("the disk reported a fault while the data file was read or written");
             case 11 -> Optional.of("the data file is damaged; restore a backup");
-            case 13 -> Optional.of("the disk is full; free some space and try again");
+            case FULL -> Optional.of("the disk is full; free some space and try again");
             case 14 -> Optional.of("the data file cannot be opened; look at the rights of the folder");
             case 26 -> Optional.of("the file " + NAME + " in it is not a database");
             default ->
@@ -100,6 +101,11 @@ record SqliteFile(Path folder) implements Engine {
                         ? Optional.of("too many requests wait for the data file; try again")
                         : Optional.empty();
         };
+    }
+
+    @Override
+    public boolean isFull(SQLException problem) {
+        return (problem.getErrorCode() & 0xff) == FULL;
     }
 
     /** A commit that failed is rolled back when the file is next used. */

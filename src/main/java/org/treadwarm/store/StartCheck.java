@@ -22,10 +22,15 @@ final class StartCheck {
 
     private StartCheck() {}
 
-    /** @throws StoreUnavailable if damage is found, or the file cannot be read */
-    static void run(SqliteFile engine, Duration atMost) {
+    /**
+     * Looks through the file.
+     *
+     * @return whether it was looked through to its end
+     * @throws StoreUnavailable if damage is found, or the file cannot be read
+     */
+    static boolean run(SqliteFile engine, Duration atMost) {
         if (isEmpty(engine)) {
-            return;
+            return true;
         }
         long end = System.nanoTime() + atMost.toNanos();
         try (Connection connection = engine.connections().getConnection();
@@ -37,24 +42,29 @@ final class StartCheck {
                 }
             });
             try (ResultSet found = statement.executeQuery("pragma quick_check(1)")) {
-                String first = found.next() ? found.getString(1) : "ok";
-                if (!first.equals("ok")) {
+                String all = found.next() ? found.getString(1) : "ok";
+                if (!all.equals("ok")) {
                     throw StoreUnavailable.of(
                             engine,
-                            "the data file is damaged ("
-                                    + first.lines().findFirst().orElse("") + "); restore a backup",
-                            new SQLException(first));
+                            "the data file is damaged (" + firstFinding(all) + "); restore a backup",
+                            new SQLException(all));
                 }
+                return true;
             } finally {
                 ProgressHandler.clearHandler(connection);
             }
         } catch (SQLException problem) {
             if ((problem.getErrorCode() & 0xff) == INTERRUPTED) {
                 LOG.warn("The data file was looked through for {} only, not to its end.", atMost);
-                return;
+                return false;
             }
             throw StoreUnavailable.of(engine, engine.explain(problem).orElseGet(problem::getMessage), problem);
         }
+    }
+
+    /** The first line that is not the heading of a database's findings. */
+    private static String firstFinding(String all) {
+        return all.lines().filter(line -> !line.startsWith("***")).findFirst().orElse(all);
     }
 
     private static boolean isEmpty(SqliteFile engine) {

@@ -23,7 +23,7 @@ public final class Store implements AutoCloseable {
     private final Sessions sessions;
     private final ApiKeys keys;
 
-    private Store(Database database, Clock clock, Optional<FolderLock> lock) {
+    Store(Database database, Clock clock, Optional<FolderLock> lock) {
         this.database = database;
         this.lock = lock;
         this.audit = new Audit(database, clock);

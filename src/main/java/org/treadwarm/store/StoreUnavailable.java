@@ -3,27 +3,41 @@ package org.treadwarm.store;
 /**
  * What keeps the data cannot be used as it is: full disk, no right to write, a damaged or foreign file, a newer schema, a
  * database that does not answer. The message is written for the person who runs the program. A change that ends with
- * this exception was not made, unless {@link #changeMayBeMade} says that nobody knows.
+ * this exception was not made, unless its reason is {@link Reason#BROKEN_COMMIT}.
  */
 public final class StoreUnavailable extends RuntimeException {
-    private final boolean changeMayBeMade;
+    private final Reason reason;
+
+    /** What those who only use the program are told. */
+    public enum Reason {
+        /** It cannot be used; nothing was changed. */
+        OUT_OF_REACH,
+        /** The disk is full; nothing was changed. */
+        NO_ROOM,
+        /** The connection broke in the moment of the commit: the change may have been made or not. */
+        BROKEN_COMMIT
+    }
 
     StoreUnavailable(String message) {
         super(message);
-        this.changeMayBeMade = false;
+        this.reason = Reason.OUT_OF_REACH;
     }
 
     StoreUnavailable(String message, Throwable cause) {
-        this(message, cause, false);
+        this(message, cause, Reason.OUT_OF_REACH);
     }
 
-    private StoreUnavailable(String message, Throwable cause, boolean changeMayBeMade) {
+    private StoreUnavailable(String message, Throwable cause, Reason reason) {
         super(message, cause);
-        this.changeMayBeMade = changeMayBeMade;
+        this.reason = reason;
     }
 
     static StoreUnavailable of(Engine engine, String meaning, Throwable cause) {
-        return new StoreUnavailable("The " + engine.name() + " cannot be used: " + meaning + ".", cause);
+        boolean full = Failures.all(cause).anyMatch(engine::isFull);
+        return new StoreUnavailable(
+                "The " + engine.name() + " cannot be used: " + meaning + ".",
+                cause,
+                full ? Reason.NO_ROOM : Reason.OUT_OF_REACH);
     }
 
     static StoreUnavailable whileCommitting(Engine engine, Throwable cause) {
@@ -31,11 +45,11 @@ public final class StoreUnavailable extends RuntimeException {
                 "The connection to the " + engine.name() + " broke while a change was being committed; it may have been"
                         + " made or not.",
                 cause,
-                true);
+                Reason.BROKEN_COMMIT);
     }
 
-    /** Whether the connection broke in the moment of the commit, so that the change may have been made or not. */
-    public boolean changeMayBeMade() {
-        return changeMayBeMade;
+    /** Why, in so far as it concerns those who only use the program. */
+    public Reason reason() {
+        return reason;
     }
 }

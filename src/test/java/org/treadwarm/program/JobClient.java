@@ -43,10 +43,18 @@ final class JobClient {
         return counted(send("/jobs/" + id + "/revisions/" + revision, "GET", "", "*"));
     }
 
+    /** What a server answers. */
+    record Answer(int status, String text) {}
+
     /** Saves from a revision; the status. */
     int save(String id, long revision, String name, int count) throws IOException, InterruptedException {
-        return send("/jobs/" + id, "PUT", body(name, count), "\"" + revision + "\"")
-                .statusCode();
+        return put(id, revision, name, count).status();
+    }
+
+    /** Saves from a revision. */
+    Answer put(String id, long revision, String name, int count) throws IOException, InterruptedException {
+        HttpResponse<String> answer = send("/jobs/" + id, "PUT", body(name, count), "\"" + revision + "\"");
+        return new Answer(answer.statusCode(), answer.body());
     }
 
     private static String body(String name, int count) {

@@ -136,9 +136,14 @@ final class Program implements AutoCloseable {
         throw new IllegalStateException("the program ended");
     }
 
+    /** Asks it to stop, as the system's SIGTERM does. */
+    void askToStop() {
+        process.destroy();
+    }
+
     /** Asks it to stop; whether it did. */
     boolean stop() {
-        process.destroy();
+        askToStop();
         try {
             return process.waitFor(PATIENCE_SECONDS, TimeUnit.SECONDS);
         } catch (InterruptedException e) {

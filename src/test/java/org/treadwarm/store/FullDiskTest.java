@@ -36,6 +36,20 @@ class FullDiskTest {
     }
 
     @Test
+    void aStartThatDoesNotFitSaysSo() {
+        SqliteFile engine = new SqliteFile(folder);
+        SQLiteDataSource connections = engine.connections();
+        connections.getConfig().setMaxPageCount(2);
+
+        assertThatThrownBy(() -> Schema.migrate(connections, engine))
+                .isInstanceOfSatisfying(
+                        StoreUnavailable.class,
+                        problem -> assertThat(problem.reason()).isEqualTo(StoreUnavailable.Reason.NO_ROOM))
+                .hasMessage("The data folder " + folder
+                        + " cannot be used: the disk is full; free some space and try again.");
+    }
+
+    @Test
     void aMarkThatDoesNotFitIsLeftOut() {
         Store.open(folder, clock).close();
         try (Database database = withoutRoom()) {

@@ -92,7 +92,7 @@ class PostgresTest {
                     }))
                     .isInstanceOfSatisfying(
                             StoreUnavailable.class,
-                            e -> assertThat(e.changeMayBeMade()).isFalse());
+                            e -> assertThat(e.reason()).isEqualTo(StoreUnavailable.Reason.OUT_OF_REACH));
 
             assertThat(new DataFile(home).count("job")).isZero();
             database.change(handle -> handle.execute("insert into job (id, created_at) values ('e', 'f')"));
@@ -113,7 +113,7 @@ class PostgresTest {
                     }))
                     .isInstanceOfSatisfying(
                             StoreUnavailable.class,
-                            e -> assertThat(e.changeMayBeMade()).isTrue())
+                            e -> assertThat(e.reason()).isEqualTo(StoreUnavailable.Reason.BROKEN_COMMIT))
                     .hasMessageContaining("may have been made or not");
         }
     }
