@@ -79,7 +79,8 @@ class BackupTest {
                 Backup.write(folder, place.resolve("copy" + i));
             }
             stop.set(true);
-            assertThat(store.jobs().revisions(id)).hasSize(Math.toIntExact(saved.get()));
+            int newest = Math.toIntExact(saved.get());
+            assertThat(store.jobs().revisions(id)).hasSize(newest);
         } finally {
             stop.set(true);
             thread.shutdownNow();
