@@ -2,12 +2,16 @@ package org.treadwarm;
 
 import java.util.List;
 import java.util.stream.Stream;
+import org.treadwarm.commands.BackupCommand;
 import org.treadwarm.commands.CheckCommand;
 import org.treadwarm.commands.HealthCommand;
 import org.treadwarm.commands.KeyCommand;
+import org.treadwarm.commands.MoveCommand;
 import org.treadwarm.commands.RehearseCommand;
+import org.treadwarm.commands.RestoreCommand;
 import org.treadwarm.commands.ServeCommand;
 import org.treadwarm.commands.SizeCommand;
+import org.treadwarm.commands.StoreFaults;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 
@@ -22,6 +26,9 @@ import picocli.CommandLine.Command;
             SizeCommand.class,
             CheckCommand.class,
             KeyCommand.class,
+            BackupCommand.class,
+            RestoreCommand.class,
+            MoveCommand.class,
             HealthCommand.class,
             RehearseCommand.class
         })
@@ -36,7 +43,9 @@ public final class Treadwarm {
         if (named[0].equals(SERVE)) {
             ServeCommand.prepare();
         }
-        System.exit(new CommandLine(new Treadwarm()).execute(named));
+        System.exit(new CommandLine(new Treadwarm())
+                .setExecutionExceptionHandler(new StoreFaults())
+                .execute(named));
     }
 
     /** The arguments with "serve" in front, unless they name a command or ask for help. */

@@ -1,13 +1,12 @@
 package org.treadwarm.commands;
 
-import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
 import java.util.concurrent.Callable;
 import org.treadwarm.store.Scope;
 import org.treadwarm.store.Store;
-import org.treadwarm.store.StoreUnavailable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** Keys for other programs. */
@@ -29,8 +28,8 @@ public final class KeyCommand {
         @Option(names = "--scope", required = true, description = "size, read or write; each includes the ones before")
         private String scope;
 
-        @Option(names = "--data", defaultValue = ServeCommand.DATA, description = "the data folder (${DEFAULT-VALUE})")
-        private Path data;
+        @Mixin
+        private HomeOptions data;
 
         @Override
         public Integer call() {
@@ -45,7 +44,7 @@ public final class KeyCommand {
                 System.err.println("The name has 1 to 100 characters.");
                 return 2;
             }
-            try (Store store = Store.open(data, Clock.systemUTC())) {
+            try (Store store = Store.open(data.home(), Clock.systemUTC())) {
                 String token = store.keys()
                         .create(name.strip(), wanted, "the command line")
                         .token();
@@ -53,7 +52,7 @@ public final class KeyCommand {
                         + ") is shown only this once:");
                 System.out.println(token);
                 return 0;
-            } catch (StoreUnavailable | IllegalArgumentException e) {
+            } catch (IllegalArgumentException e) {
                 System.err.println(e.getMessage());
                 return 1;
             }

@@ -8,7 +8,9 @@ import ch.qos.logback.classic.spi.Configurator;
 import ch.qos.logback.classic.spi.ConfiguratorRank;
 import ch.qos.logback.classic.spi.ILoggingEvent;
 import ch.qos.logback.core.ConsoleAppender;
+import ch.qos.logback.core.filter.Filter;
 import ch.qos.logback.core.spi.ContextAwareBase;
+import ch.qos.logback.core.spi.FilterReply;
 
 /**
  * What is logged, and how: warnings and faults, one line each, on the error stream.
@@ -30,12 +32,23 @@ public final class LogSetup extends ContextAwareBase implements Configurator {
         console.setContext(context);
         console.setTarget("System.err");
         console.setEncoder(encoder);
+        console.addFilter(new ToldOtherwise());
         console.start();
         Logger root = context.getLogger(org.slf4j.Logger.ROOT_LOGGER_NAME);
         root.setLevel(Level.WARN);
         root.addAppender(console);
+        // It warns, with a trace, of every connection that breaks; the store says the same in a line.
+        context.getLogger("com.zaxxer.hikari").setLevel(Level.ERROR);
         // It warns of every client that sends an odd Host header; the host guard answers those.
         context.getLogger("org.eclipse.jetty.util.HostPort").setLevel(Level.ERROR);
         return ExecutionStatus.DO_NOT_INVOKE_NEXT_IF_ANY;
+    }
+
+    /** The command that serves says itself, in words, why the server did not start. */
+    private static final class ToldOtherwise extends Filter<ILoggingEvent> {
+        @Override
+        public FilterReply decide(ILoggingEvent event) {
+            return event.getMessage().equals("Failed to start Javalin") ? FilterReply.DENY : FilterReply.NEUTRAL;
+        }
     }
 }

@@ -1,7 +1,6 @@
 package org.treadwarm.commands;
 
 import io.javalin.util.JavalinBindException;
-import java.nio.file.Path;
 import java.time.Clock;
 import java.util.List;
 import java.util.Optional;
@@ -10,11 +9,11 @@ import java.util.concurrent.CountDownLatch;
 import org.treadwarm.jobs.Demo;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.store.Store;
-import org.treadwarm.store.StoreUnavailable;
 import org.treadwarm.web.Server;
 import org.treadwarm.web.Settings;
 import org.treadwarm.web.WarmUp;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** Starts the server. */
@@ -23,9 +22,6 @@ import picocli.CommandLine.Option;
         description = "Start the server. This is what the program does when no command is named.",
         mixinStandardHelpOptions = true)
 public final class ServeCommand implements Callable<Integer> {
-    /** The data folder when none is named. */
-    static final String DATA = "treadwarm-data";
-
     @Option(
             names = "--port",
             defaultValue = "8080",
@@ -35,8 +31,8 @@ public final class ServeCommand implements Callable<Integer> {
     @Option(names = "--bind", defaultValue = "127.0.0.1", description = "address to listen on (${DEFAULT-VALUE})")
     private String bind;
 
-    @Option(names = "--data", defaultValue = DATA, description = "the data folder (${DEFAULT-VALUE})")
-    private Path data;
+    @Mixin
+    private HomeOptions data;
 
     @Option(names = "--demo", description = "add the invented demo job, unless it is there already")
     private boolean demo;
@@ -60,7 +56,7 @@ public final class ServeCommand implements Callable<Integer> {
             System.err.println("The port is 0 to 65535, not " + port + ".");
             return 2;
         }
-        try (Store store = Store.open(data, Clock.systemUTC())) {
+        try (Store store = Store.openToServe(data.home(), Clock.systemUTC())) {
             if (demo) {
                 Demo.addTo(new JobDesk(store.jobs()));
             }
@@ -74,9 +70,6 @@ public final class ServeCommand implements Callable<Integer> {
             }));
             stopped.await();
             return 0;
-        } catch (StoreUnavailable e) {
-            System.err.println(e.getMessage());
-            return 1;
         } catch (JavalinBindException e) {
             System.err.println("The server cannot listen on " + bind + " port " + port
                     + ": it is in use already, or not allowed. Choose another with --port or --bind.");

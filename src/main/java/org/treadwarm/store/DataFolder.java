@@ -2,9 +2,12 @@ package org.treadwarm.store;
 
 import java.io.IOException;
 import java.nio.channels.FileChannel;
+import java.nio.file.AccessDeniedException;
 import java.nio.file.FileAlreadyExistsException;
+import java.nio.file.FileSystemException;
 import java.nio.file.FileSystems;
 import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardOpenOption;
 import java.nio.file.attribute.FileAttribute;
@@ -16,25 +19,37 @@ final class DataFolder {
 
     private DataFolder() {}
 
+    /** What is done with a folder's files. */
+    interface Work {
+        void run() throws IOException;
+    }
+
     /**
      * Creates the folder and the data file as needed, then runs the preparation while no other process prepares the
-     * same folder. Closing the file ends the lock.
+     * same folder.
      */
     static void prepare(Path folder, Runnable preparation) {
+        whileNobodyPrepares(folder, () -> {
+            createFile(folder.resolve(SqliteFile.NAME));
+            preparation.run();
+        });
+    }
+
+    /** Does something while no process opens the folder anew. Closing the file ends the lock. */
+    static void whileNobodyPrepares(Path folder, Work work) {
         synchronized (ONE_PREPARATION_IN_THIS_PROCESS) {
             create(folder);
             try (FileChannel channel = FileChannel.open(
                     folder.resolve("treadwarm.lock"), StandardOpenOption.CREATE, StandardOpenOption.WRITE)) {
                 channel.lock();
-                createFile(folder.resolve(SqliteFile.NAME));
-                preparation.run();
+                work.run();
             } catch (IOException problem) {
                 throw notWritable(folder, problem);
             }
         }
     }
 
-    private static void create(Path folder) {
+    static void create(Path folder) {
         try {
             if (!Files.isDirectory(folder)) {
                 Files.createDirectories(folder, ownerOnly("rwx------"));
@@ -43,14 +58,20 @@ final class DataFolder {
             throw new StoreUnavailable("The data folder " + folder + " is a file, not a folder.", problem);
         } catch (IOException problem) {
             throw new StoreUnavailable(
-                    "The data folder " + folder + " does not exist and cannot be created: " + problem + ".", problem);
+                    "The data folder " + folder + " does not exist and cannot be created: " + reason(problem) + ".",
+                    problem);
         }
     }
 
     private static void createFile(Path file) throws IOException {
         if (!Files.exists(file)) {
-            Files.createFile(file, ownerOnly("rw-------"));
+            createOwnersFile(file);
         }
+    }
+
+    /** A new file for its owner alone. */
+    static void createOwnersFile(Path file) throws IOException {
+        Files.createFile(file, ownerOnly("rw-------"));
     }
 
     private static FileAttribute<?>[] ownerOnly(String permissions) {
@@ -62,7 +83,24 @@ final class DataFolder {
         };
     }
 
-    private static StoreUnavailable notWritable(Path folder, IOException problem) {
-        return new StoreUnavailable("The data folder " + folder + " cannot be written: " + problem + ".", problem);
+    static StoreUnavailable notWritable(Path folder, IOException problem) {
+        return new StoreUnavailable(
+                "The data folder " + folder + " cannot be written: " + reason(problem) + ".", problem);
+    }
+
+    /** What went wrong with a file, for people. */
+    static String reason(IOException problem) {
+        String file =
+                problem instanceof FileSystemException known && known.getFile() != null ? known.getFile() : "a file";
+        if (problem instanceof AccessDeniedException) {
+            return "there is no right to " + file;
+        }
+        if (problem instanceof NoSuchFileException) {
+            return file + " cannot be made";
+        }
+        if (problem instanceof FileSystemException known && known.getReason() != null) {
+            return file + ": " + known.getReason();
+        }
+        return file + ": " + problem.getMessage();
     }
 }

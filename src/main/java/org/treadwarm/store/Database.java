@@ -1,9 +1,10 @@
 package org.treadwarm.store;
 
 import com.zaxxer.hikari.HikariDataSource;
-import java.nio.file.Path;
 import java.sql.Connection;
 import java.sql.SQLException;
+import java.util.Optional;
+import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.concurrent.locks.ReentrantLock;
 import java.util.function.Consumer;
 import java.util.function.Function;
@@ -13,56 +14,66 @@ import org.jdbi.v3.core.Jdbi;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 
-/** Runs reads and changes against the data file and turns its failures into {@link StoreUnavailable}. */
+/** Runs reads and changes against the database and turns its failures into {@link StoreUnavailable}. */
 final class Database implements AutoCloseable {
     private static final Logger LOG = LoggerFactory.getLogger(Database.class);
 
-    private final Path folder;
+    /** The state that PostgreSQL reports for text it cannot keep (SQLSTATE of its appendix A, from memory). */
+    private static final String NOT_ENCODABLE = "22021";
+
+    private final Engine engine;
     private final HikariDataSource pool;
     private final Jdbi jdbi;
 
-    // SQLite lets one writer in at a time and makes the others poll, in no order. Queueing them here is fair.
+    // One writer at a time is let in. SQLite makes the others poll, in no order; PostgreSQL makes each keep a
+    // connection.
+    // Queueing them here is fair and keeps the connections for readers.
     private final ReentrantLock writing = new ReentrantLock(true);
 
-    Database(Path folder, HikariDataSource pool) {
-        this.folder = folder;
+    Database(Engine engine, HikariDataSource pool) {
+        this.engine = engine;
         this.pool = pool;
         this.jdbi = Jdbi.create(pool);
     }
 
-    static Database open(Path folder) {
-        DataSource connections = SqliteFile.connections(folder);
-        DataFolder.prepare(folder, () -> {
-            probe(connections, folder);
-            Schema.migrate(connections, folder);
+    static Database open(Engine engine) {
+        DataSource connections = engine.connections();
+        engine.prepare(() -> {
+            probe(connections, engine);
+            Schema.migrate(connections, engine);
         });
-        return new Database(folder, SqliteFile.pool(connections));
+        return new Database(engine, engine.pool(connections));
     }
 
-    private static void probe(DataSource connections, Path folder) {
+    private static void probe(DataSource connections, Engine engine) {
         try (Connection connection = connections.getConnection()) {
-            connection.getMetaData().getTables(null, null, null, null).close();
+            connection.getMetaData().getTables(null, null, "job", null).close();
         } catch (SQLException problem) {
-            throw unavailable(folder, SqliteFile.explain(problem).orElseGet(problem::getMessage), problem);
+            throw StoreUnavailable.of(engine, engine.explain(problem).orElseGet(problem::getMessage), problem);
         }
     }
 
     /** Each statement of a read sees the newest committed state; there is no transaction around them. */
     <T> T read(Function<Handle, T> question) {
-        return guarded(() -> jdbi.withHandle(question::apply));
+        return guarded(new AtomicBoolean(), () -> jdbi.withHandle(question::apply));
     }
 
     /** One transaction, alone against all other changes of this and of other processes. */
     <T> T change(Function<Handle, T> change) {
+        AtomicBoolean committing = new AtomicBoolean();
         writing.lock();
         try {
-            return guarded(() -> jdbi.withHandle(handle -> {
-                SqliteFile.beforeBegin(handle.getConnection());
-                return handle.inTransaction(begun -> {
-                    SqliteFile.afterBegin(begun.getConnection());
-                    return change.apply(begun);
-                });
-            }));
+            return guarded(
+                    committing,
+                    () -> jdbi.withHandle(handle -> {
+                        engine.beforeBegin(handle.getConnection());
+                        return handle.inTransaction(begun -> {
+                            engine.afterBegin(begun.getConnection());
+                            T result = change.apply(begun);
+                            committing.set(true);
+                            return result;
+                        });
+                    }));
         } finally {
             writing.unlock();
         }
@@ -89,29 +100,30 @@ final class Database implements AutoCloseable {
         T run() throws SQLException;
     }
 
-    private <T> T guarded(Work<T> work) {
+    private <T> T guarded(AtomicBoolean committing, Work<T> work) {
         try {
             return work.run();
         } catch (StoreUnavailable problem) {
             throw problem;
         } catch (SQLException | RuntimeException problem) {
-            throw translated(problem);
+            throw translated(problem, committing.get());
         }
     }
 
-    private RuntimeException translated(Exception problem) {
-        for (Throwable cause = problem; cause != null; cause = cause.getCause()) {
-            if (cause instanceof SQLException failure) {
-                return SqliteFile.explain(failure)
-                        .<RuntimeException>map(meaning -> unavailable(folder, meaning, problem))
-                        .orElseGet(
-                                () -> new IllegalStateException("The store failed: " + failure.getMessage(), problem));
-            }
+    private RuntimeException translated(Exception problem, boolean committing) {
+        Optional<SQLException> failure = Failures.of(problem);
+        if (failure.isEmpty()) {
+            return problem instanceof RuntimeException fault ? fault : new IllegalStateException(problem);
         }
-        return problem instanceof RuntimeException fault ? fault : new IllegalStateException(problem);
-    }
-
-    private static StoreUnavailable unavailable(Path folder, String meaning, Exception problem) {
-        return new StoreUnavailable("The data folder " + folder + " cannot be used: " + meaning + ".", problem);
+        if (NOT_ENCODABLE.equals(failure.get().getSQLState())) {
+            return new IllegalArgumentException("A text holds a NUL or half a character", problem);
+        }
+        if (committing && engine.leavesCommitUnknown(failure.get())) {
+            return StoreUnavailable.whileCommitting(engine, problem);
+        }
+        return Failures.explain(engine, problem)
+                .<RuntimeException>map(meaning -> StoreUnavailable.of(engine, meaning, problem))
+                .orElseGet(() -> new IllegalStateException(
+                        "The store failed: " + failure.get().getMessage(), problem));
     }
 }

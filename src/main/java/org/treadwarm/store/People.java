@@ -79,7 +79,8 @@ public final class People {
         if (wait.isPresent()) {
             return new SignIn.Wait(wait.get());
         }
-        Optional<Account> account = database.read(handle -> find(handle, key));
+        Optional<Account> account =
+                PersonName.accepts(name) ? database.read(handle -> find(handle, key)) : Optional.empty();
         String hash = account.map(Account::passwordHash).orElseGet(passwords::hashOfNothing);
         // A password outside the rule matches no account; hashing a short text instead bounds the work.
         boolean matches = passwords.matches(PasswordRule.accepts(password) ? password : "", hash);

@@ -1,6 +1,5 @@
 package org.treadwarm.store;
 
-import java.nio.file.Path;
 import java.sql.Connection;
 import java.sql.ResultSet;
 import java.sql.SQLException;
@@ -21,7 +20,7 @@ final class Schema {
     private Schema() {}
 
     /** @throws StoreUnavailable if a newer program changed the tables, or they are not this program's */
-    static void migrate(DataSource connections, Path folder) {
+    static void migrate(DataSource connections, Engine engine) {
         Optional<String> last = lastMigration(connections);
         if (last.equals(Optional.of(VERSION))) {
             return;
@@ -32,12 +31,15 @@ final class Schema {
                 .load();
         try {
             if (last.isPresent()) {
-                refuseNewer(flyway, folder);
+                refuseNewer(flyway, engine);
             }
             flyway.migrate();
         } catch (FlywayException problem) {
-            throw new StoreUnavailable(
-                    "The tables in the data folder " + folder + " cannot be used: " + problem.getMessage(), problem);
+            throw Failures.explain(engine, problem)
+                    .map(meaning -> StoreUnavailable.of(engine, meaning, problem))
+                    .orElseGet(() -> new StoreUnavailable(
+                            "The tables in the " + engine.name() + " cannot be used: " + problem.getMessage(),
+                            problem));
         }
     }
 
@@ -56,13 +58,13 @@ final class Schema {
         }
     }
 
-    private static void refuseNewer(Flyway flyway, Path folder) {
+    private static void refuseNewer(Flyway flyway, Engine engine) {
         MigrationInfo[] all = flyway.info().all();
         Optional<MigrationVersion> newest = newest(all, false);
         Optional<MigrationVersion> known = newest(all, true);
         if (newest.isPresent() && known.isPresent() && newest.get().compareTo(known.get()) > 0) {
             throw new StoreUnavailable(
-                    "The data folder " + folder + " was last used by a newer Treadwarm (tables of version "
+                    "The " + engine.name() + " was last used by a newer Treadwarm (tables of version "
                             + newest.get() + "; this program knows up to " + known.get()
                             + "). Start the newer program, or restore a backup from before its first start.");
         }

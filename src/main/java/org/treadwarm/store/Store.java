@@ -2,24 +2,30 @@ package org.treadwarm.store;
 
 import java.nio.file.Path;
 import java.time.Clock;
+import java.time.Duration;
+import java.util.Optional;
 
 /**
- * Everything the program keeps, in one folder: jobs with all their revisions, people, sessions, keys and the audit list.
+ * Everything the program keeps, in one folder or database: jobs with all their revisions, people, sessions, keys and the audit list.
  *
- * <p>All parts may be used from any number of threads. Several processes may open the same folder at once. Every change
- * is one transaction and on disk when its method returns. Changes of jobs, people and keys, and sign-ins, append to the
+ * <p>All parts may be used from any number of threads. Several processes may open the same folder or database at once. Every
+ * change is one transaction, made alone, and on disk when its method returns. Changes of jobs, people and keys, and sign-ins, append to the
  * audit list in the same transaction.
  */
 public final class Store implements AutoCloseable {
+    private static final Duration LONGEST_CHECK = Duration.ofSeconds(10);
+
     private final Database database;
+    private final Optional<FolderLock> lock;
     private final Audit audit;
     private final Jobs jobs;
     private final People people;
     private final Sessions sessions;
     private final ApiKeys keys;
 
-    private Store(Database database, Clock clock) {
+    Store(Database database, Clock clock, Optional<FolderLock> lock) {
         this.database = database;
+        this.lock = lock;
         this.audit = new Audit(database, clock);
         this.jobs = new Jobs(database, audit, clock);
         this.people = new People(database, audit, clock);
@@ -28,12 +34,39 @@ public final class Store implements AutoCloseable {
     }
 
     /**
-     * Opens the folder, creating it and its tables as needed.
+     * Opens the folder or database, creating folder and tables as needed.
      *
-     * @throws StoreUnavailable if the folder cannot be written, its file is no database, or a newer program wrote it
+     * @throws StoreUnavailable if it cannot be written or reached, is no database of this program, or a newer program
+     *     wrote it
      */
+    public static Store open(DataHome home, Clock clock) {
+        return new Store(Database.open(Engine.of(home)), clock, Optional.empty());
+    }
+
+    /** Opens a folder. */
     public static Store open(Path folder, Clock clock) {
-        return new Store(Database.open(folder), clock);
+        return open(DataHome.folder(folder), clock);
+    }
+
+    /**
+     * Opens the folder or database as {@link #open} does, for a server: a folder is looked through for damage, at most ten
+     * seconds long, and belongs to this server alone until the store is closed. A database may have several servers.
+     *
+     * @throws StoreUnavailable also if another server has the folder, or its file is damaged
+     */
+    public static Store openToServe(DataHome home, Clock clock) {
+        if (!(home instanceof DataHome.Folder folder)) {
+            return open(home, clock);
+        }
+        FolderLock lock = FolderLock.take(folder.path());
+        try {
+            SqliteFile engine = new SqliteFile(folder.path());
+            StartCheck.run(engine, LONGEST_CHECK);
+            return new Store(Database.open(engine), clock, Optional.of(lock));
+        } catch (RuntimeException problem) {
+            lock.close();
+            throw problem;
+        }
     }
 
     public Jobs jobs() {
@@ -59,5 +92,6 @@ public final class Store implements AutoCloseable {
     @Override
     public void close() {
         database.close();
+        lock.ifPresent(FolderLock::close);
     }
 }

@@ -5,8 +5,11 @@ import io.javalin.config.JavalinConfig;
 import io.javalin.http.Context;
 import io.javalin.http.HttpResponseException;
 import io.javalin.http.MethodNotAllowedResponse;
+import java.time.Duration;
 import java.util.Locale;
 import java.util.UUID;
+import org.eclipse.jetty.server.AbstractConnector;
+import org.eclipse.jetty.server.Connector;
 import org.eclipse.jetty.server.HttpConfiguration;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
@@ -23,6 +26,7 @@ import org.treadwarm.web.security.Visitors;
 /** The server: API and pages over one store. */
 public final class Server implements AutoCloseable {
     private static final Logger LOG = LoggerFactory.getLogger(Server.class);
+    private static final Duration IDLE = Duration.ofSeconds(30);
     private static final long LARGEST_BODY = 16L * 1024 * 1024;
 
     private final Javalin javalin;
@@ -37,6 +41,11 @@ public final class Server implements AutoCloseable {
      * @throws io.javalin.util.JavalinBindException when the address or port cannot be listened on
      */
     public static Server start(Settings settings, Store store) {
+        return start(settings, store, IDLE);
+    }
+
+    /** Starts one that gives a connection up when nothing comes or goes on it for so long. */
+    static Server start(Settings settings, Store store, Duration idle) {
         HostGuard hosts = new HostGuard(settings.allowedHosts());
         Visitors visitors = new Visitors(store.sessions(), settings.behindTls());
         JobDesk desk = new JobDesk(store.jobs());
@@ -44,6 +53,7 @@ public final class Server implements AutoCloseable {
         Pages pages = new Pages(store, desk, visitors);
         Javalin javalin = Javalin.create(config -> {
             basics(config);
+            config.jetty.modifyHttpConfiguration(http -> http.setIdleTimeout(idle.toMillis()));
             config.routes.before(ctx -> {
                 SecureHeaders.set(ctx);
                 if (!hosts.admits(ctx)) {
@@ -56,7 +66,11 @@ public final class Server implements AutoCloseable {
             pages.routes(config.routes);
             faults(config, pages);
         });
-        return new Server(javalin.start(settings.bind(), settings.port()));
+        javalin.start(settings.bind(), settings.port());
+        for (Connector connector : javalin.jettyServer().server().getConnectors()) {
+            ((AbstractConnector) connector).setIdleTimeout(idle.toMillis());
+        }
+        return new Server(javalin);
     }
 
     /** The port it listens on. */
@@ -83,7 +97,6 @@ public final class Server implements AutoCloseable {
         });
         config.jetty.modifyHttpConfiguration((HttpConfiguration http) -> {
             http.setSendServerVersion(false);
-            http.setIdleTimeout(30_000);
         });
     }
 
@@ -101,6 +114,7 @@ public final class Server implements AutoCloseable {
         });
         config.routes.exception(StoreUnavailable.class, (e, ctx) -> {
             LOG.error("the store cannot be reached: {}", e.getMessage());
+            ctx.attribute("reason", e.reason());
             answer(ctx, pages, 503);
         });
         config.routes.exception(IllegalArgumentException.class, (e, ctx) -> {
@@ -153,9 +167,19 @@ public final class Server implements AutoCloseable {
             case 405 -> "This method is not served here";
             case 413 -> "The body is too large";
             case 422 -> "This cannot be kept as it is: it holds characters that are no text";
-            case 503 -> "The store cannot be reached just now; nothing was saved";
+            case 503 -> unavailable(ctx.attribute("reason"));
             case 500 -> "A fault of the program, noted under " + ctx.attribute("reference");
             default -> String.format(Locale.ROOT, "The request could not be answered (%d)", status);
+        };
+    }
+
+    private static String unavailable(StoreUnavailable.Reason reason) {
+        return switch (reason) {
+            case OUT_OF_REACH -> "The store cannot be reached just now; nothing was saved";
+            case NO_ROOM -> "The store's disk is full; nothing was saved";
+            case BROKEN_COMMIT ->
+                "The connection to the store broke while saving; look whether the change is there before"
+                        + " saving it again";
         };
     }
 }

@@ -97,7 +97,13 @@ class ArchitectureTest {
             .that(notIn("store"))
             .should()
             .dependOnClassesThat(resideInAnyPackage(
-                    "java.sql..", "javax.sql..", "org.jdbi..", "com.zaxxer..", "org.flywaydb..", "org.sqlite.."));
+                    "java.sql..",
+                    "javax.sql..",
+                    "org.jdbi..",
+                    "com.zaxxer..",
+                    "org.flywaydb..",
+                    "org.sqlite..",
+                    "org.postgresql.."));
 
     @ArchTest
     static final ArchRule COMMAND_LINE_STANDS_IN_COMMANDS_ALONE =

@@ -9,12 +9,13 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 
-/** The packaged program in a process of its own. Every wait for it ends. */
+/** The program in a process of its own, packaged when there is a jar to test. Every wait for it ends. */
 final class Program implements AutoCloseable {
     private static final int PATIENCE_SECONDS = 90;
 
@@ -35,17 +36,28 @@ final class Program implements AutoCloseable {
 
     /** Starts it, to be waited for. */
     static Program start(String... arguments) {
-        return new Program(process(arguments));
+        return start(Map.of(), arguments);
     }
 
-    private static Process process(String... arguments) {
+    /** Starts it with additions to the environment. */
+    static Program start(Map<String, String> environment, String... arguments) {
+        return new Program(process(environment, arguments));
+    }
+
+    private static Process process(Map<String, String> environment, String... arguments) {
         List<String> command = new ArrayList<>();
         command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
-        command.add("-jar");
-        command.add(System.getProperty("treadwarm.jar"));
+        command.add("-Xmx512m");
+        String jar = System.getProperty("treadwarm.jar");
+        command.addAll(
+                jar != null
+                        ? List.of("-jar", jar)
+                        : List.of("-cp", System.getProperty("java.class.path"), "org.treadwarm.Treadwarm"));
         command.addAll(List.of(arguments));
         try {
-            return new ProcessBuilder(command).start();
+            ProcessBuilder builder = new ProcessBuilder(command);
+            builder.environment().putAll(environment);
+            return builder.start();
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
@@ -58,7 +70,15 @@ final class Program implements AutoCloseable {
 
     /** Runs it to its end with this input. */
     static Result runWith(byte[] input, String... arguments) {
-        Process process = process(arguments);
+        return finish(process(Map.of(), arguments), input);
+    }
+
+    /** Runs it to its end with additions to the environment. */
+    static Result runIn(Map<String, String> environment, String... arguments) {
+        return finish(process(environment, arguments), new byte[0]);
+    }
+
+    private static Result finish(Process process, byte[] input) {
         CompletableFuture<String> output = CompletableFuture.supplyAsync(() -> all(process.getInputStream()));
         CompletableFuture<String> errors = CompletableFuture.supplyAsync(() -> all(process.getErrorStream()));
         try (OutputStream in = process.getOutputStream()) {
@@ -116,11 +136,26 @@ final class Program implements AutoCloseable {
         throw new IllegalStateException("the program ended");
     }
 
+    /** Asks it to stop, as the system's SIGTERM does. */
+    void askToStop() {
+        process.destroy();
+    }
+
     /** Asks it to stop; whether it did. */
     boolean stop() {
-        process.destroy();
+        askToStop();
         try {
             return process.waitFor(PATIENCE_SECONDS, TimeUnit.SECONDS);
+        } catch (InterruptedException e) {
+            Thread.currentThread().interrupt();
+            throw new IllegalStateException(e);
+        }
+    }
+
+    /** Ends it at once, as the system's kill -9 does. */
+    void kill() {
+        try {
+            process.destroyForcibly().waitFor();
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
             throw new IllegalStateException(e);

@@ -10,18 +10,28 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.Parameter;
+import org.junit.jupiter.params.ParameterizedClass;
+import org.junit.jupiter.params.provider.EnumSource;
 
+@ParameterizedClass
+@EnumSource(Kind.class)
 class ApiKeysTest {
+    @Parameter
+    Kind kind;
+
     @TempDir
     Path folder;
 
     private final TestClock clock = new TestClock();
+    private DataHome home;
     private Store store;
     private ApiKeys keys;
 
     @BeforeEach
     void open() {
-        store = Store.open(folder, clock);
+        home = kind.emptyHome(folder);
+        store = Store.open(home, clock);
         keys = store.keys();
     }
 
@@ -40,7 +50,7 @@ class ApiKeysTest {
         assertThat(created.key().lastUsed()).isEmpty();
         assertThat(keys.find(created.token())).map(ApiKey::scope).contains(Scope.READ);
         assertThat(keys.find("tw_guess")).isEmpty();
-        assertThat(new DataFile(folder).text("select sha256 from api_key")).isEqualTo(Secrets.sha256(created.token()));
+        assertThat(new DataFile(home).text("select sha256 from api_key")).isEqualTo(Secrets.sha256(created.token()));
     }
 
     @Test

@@ -1,14 +1,13 @@
 package org.treadwarm.store;
 
-import java.nio.file.Path;
 import org.jdbi.v3.core.Jdbi;
 
-/** Looks into and meddles with the data file behind the store's back. */
+/** Looks into and meddles with the tables behind the store's back. */
 final class DataFile {
     private final Jdbi jdbi;
 
-    DataFile(Path folder) {
-        jdbi = Jdbi.create(SqliteFile.connections(folder));
+    DataFile(DataHome home) {
+        jdbi = Jdbi.create(Engine.of(home).connections());
     }
 
     long count(String table) {

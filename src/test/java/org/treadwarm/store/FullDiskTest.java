@@ -36,20 +36,35 @@ class FullDiskTest {
     }
 
     @Test
+    void aStartThatDoesNotFitSaysSo() {
+        SqliteFile engine = new SqliteFile(folder);
+        SQLiteDataSource connections = engine.connections();
+        connections.getConfig().setMaxPageCount(2);
+
+        assertThatThrownBy(() -> Schema.migrate(connections, engine))
+                .isInstanceOfSatisfying(
+                        StoreUnavailable.class,
+                        problem -> assertThat(problem.reason()).isEqualTo(StoreUnavailable.Reason.NO_ROOM))
+                .hasMessage("The data folder " + folder
+                        + " cannot be used: the disk is full; free some space and try again.");
+    }
+
+    @Test
     void aMarkThatDoesNotFitIsLeftOut() {
         Store.open(folder, clock).close();
         try (Database database = withoutRoom()) {
             database.changeIfPossible(handle ->
                     handle.execute("insert into piece (sha256, body) values ('0', ?)", "large".repeat(100_000)));
 
-            assertThat(new DataFile(folder).count("piece")).isZero();
+            assertThat(new DataFile(DataHome.folder(folder)).count("piece")).isZero();
         }
     }
 
     private Database withoutRoom() {
-        SQLiteDataSource connections = SqliteFile.connections(folder);
-        long pages = Long.parseLong(new DataFile(folder).text("pragma page_count"));
+        SqliteFile engine = new SqliteFile(folder);
+        SQLiteDataSource connections = engine.connections();
+        long pages = Long.parseLong(new DataFile(DataHome.folder(folder)).text("pragma page_count"));
         connections.getConfig().setMaxPageCount((int) pages + 20);
-        return new Database(folder, SqliteFile.pool(connections));
+        return new Database(engine, engine.pool(connections));
     }
 }

@@ -14,18 +14,28 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.Parameter;
+import org.junit.jupiter.params.ParameterizedClass;
+import org.junit.jupiter.params.provider.EnumSource;
 
+@ParameterizedClass
+@EnumSource(Kind.class)
 class JobsTest {
+    @Parameter
+    Kind kind;
+
     @TempDir
     Path folder;
 
     private final TestClock clock = new TestClock();
+    private DataHome home;
     private Store store;
     private Jobs jobs;
 
     @BeforeEach
     void open() {
-        store = Store.open(folder, clock);
+        home = kind.emptyHome(folder);
+        store = Store.open(home, clock);
         jobs = store.jobs();
     }
 
@@ -85,7 +95,7 @@ class JobsTest {
 
     @Test
     void theSameContentAgainIsARevisionThatTakesNoNewRoom() {
-        DataFile file = new DataFile(folder);
+        DataFile file = new DataFile(home);
         String id = jobs.create(job("Mill Lane", "a"), BY_ANNA).jobId();
         long pieces = file.count("piece");
 
@@ -112,7 +122,7 @@ class JobsTest {
 
     @Test
     void oneRoomOfAThousandAddsOnePieceAndOnePageOfTheList() {
-        DataFile file = new DataFile(folder);
+        DataFile file = new DataFile(home);
         String id = jobs.create(jobOf(1000, -1, ""), BY_ANNA).jobId();
         assertThat(file.count("piece")).isEqualTo(1000);
         assertThat(file.count("manifest")).isEqualTo(16 + 1);
@@ -131,7 +141,7 @@ class JobsTest {
         jobs.create(job("One", "same", "same"), BY_ANNA);
         jobs.create(job("Two", "same", "same"), BY_ANNA);
 
-        assertThat(new DataFile(folder).count("piece")).isEqualTo(2);
+        assertThat(new DataFile(home).count("piece")).isEqualTo(2);
     }
 
     @Test
@@ -150,7 +160,7 @@ class JobsTest {
     @Test
     void saysWhenATextIsDamagedOrMissing() {
         String id = jobs.create(job("Mill Lane", "kitchen"), BY_ANNA).jobId();
-        DataFile file = new DataFile(folder);
+        DataFile file = new DataFile(home);
 
         file.execute("update piece set body = 'kitten' where body = 'kitchen'");
         assertThatThrownBy(() -> jobs.current(id))

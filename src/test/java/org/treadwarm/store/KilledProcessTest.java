@@ -75,7 +75,8 @@ class KilledProcessTest {
                     .forEach(revision -> assertThat(store.jobs().revision(id, revision))
                             .map(JobRevision::content)
                             .contains(SavingChild.content(revision)));
-            assertThat(new DataFile(folder).text("pragma integrity_check")).isEqualTo("ok");
+            assertThat(new DataFile(DataHome.folder(folder)).text("pragma integrity_check"))
+                    .isEqualTo("ok");
             return newest;
         }
     }

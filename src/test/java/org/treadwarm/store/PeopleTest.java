@@ -4,24 +4,38 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.file.Path;
 import java.time.Duration;
+import java.util.List;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.Parameter;
+import org.junit.jupiter.params.ParameterizedClass;
+import org.junit.jupiter.params.provider.EnumSource;
 
+@ParameterizedClass
+@EnumSource(Kind.class)
 class PeopleTest {
+    @Parameter
+    Kind kind;
+
     static final String PASSWORD = "long enough, invented";
 
     @TempDir
     Path folder;
 
     private final TestClock clock = new TestClock();
+    private DataHome home;
     private Store store;
     private People people;
 
     @BeforeEach
     void open() {
-        store = Store.open(folder, clock);
+        home = kind.emptyHome(folder);
+        store = Store.open(home, clock);
         people = store.people();
     }
 
@@ -52,7 +66,7 @@ class PeopleTest {
         assertThat(people.invitationIsOpen(token)).isFalse();
         assertThat(people.createOwner(token, "Ben", PASSWORD)).isEqualTo(new OwnerCreation.LinkRefused());
         assertThat(people.inviteOwner()).isEmpty();
-        assertThat(new DataFile(folder).count("person")).isEqualTo(1);
+        assertThat(new DataFile(home).count("person")).isEqualTo(1);
     }
 
     @Test
@@ -88,9 +102,24 @@ class PeopleTest {
     }
 
     @Test
+    void ofTwoWhoUseTheLinkAtOnceOneBecomesTheOwner() throws Exception {
+        String token = people.inviteOwner().orElseThrow();
+        ExecutorService threads = Executors.newFixedThreadPool(2);
+        try (Store other = Store.open(home, clock)) {
+            Future<OwnerCreation> one = threads.submit(() -> people.createOwner(token, "Anna", PASSWORD));
+            Future<OwnerCreation> two = threads.submit(() -> other.people().createOwner(token, "Ben", PASSWORD));
+
+            assertThat(List.of(one.get(), two.get())).containsOnlyOnce(new OwnerCreation.LinkRefused());
+            assertThat(new DataFile(home).count("person")).isEqualTo(1);
+        } finally {
+            threads.shutdownNow();
+        }
+    }
+
+    @Test
     void keepsNoSecretInTheClear() {
         String token = people.inviteOwner().orElseThrow();
-        DataFile file = new DataFile(folder);
+        DataFile file = new DataFile(home);
         assertThat(file.text("select sha256 from owner_invitation")).isEqualTo(Secrets.sha256(token));
 
         people.createOwner(token, "Anna", PASSWORD);

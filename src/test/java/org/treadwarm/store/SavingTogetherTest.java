@@ -16,8 +16,16 @@ import java.util.concurrent.Future;
 import java.util.concurrent.TimeUnit;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.Parameter;
+import org.junit.jupiter.params.ParameterizedClass;
+import org.junit.jupiter.params.provider.EnumSource;
 
+@ParameterizedClass
+@EnumSource(Kind.class)
 class SavingTogetherTest {
+    @Parameter
+    Kind kind;
+
     private static final int ROUNDS = 25;
 
     @TempDir
@@ -25,15 +33,17 @@ class SavingTogetherTest {
 
     @Test
     void ofTwoThreadsExactlyOneSavesEachRevision() throws Exception {
-        try (Store store = Store.open(folder, Clock.systemUTC())) {
+        DataHome home = kind.emptyHome(folder);
+        try (Store store = Store.open(home, Clock.systemUTC())) {
             race(store, store);
         }
     }
 
     @Test
-    void ofTwoStoresOnOneFolderExactlyOneSavesEachRevision() throws Exception {
-        try (Store store = Store.open(folder, Clock.systemUTC());
-                Store other = Store.open(folder, Clock.systemUTC())) {
+    void ofTwoStoresOnOneHomeExactlyOneSavesEachRevision() throws Exception {
+        DataHome home = kind.emptyHome(folder);
+        try (Store store = Store.open(home, Clock.systemUTC());
+                Store other = Store.open(home, Clock.systemUTC())) {
             race(store, other);
         }
     }

@@ -9,19 +9,29 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.Parameter;
+import org.junit.jupiter.params.ParameterizedClass;
+import org.junit.jupiter.params.provider.EnumSource;
 
+@ParameterizedClass
+@EnumSource(Kind.class)
 class SessionsTest {
+    @Parameter
+    Kind kind;
+
     @TempDir
     Path folder;
 
     private final TestClock clock = new TestClock();
+    private DataHome home;
     private Store store;
     private Sessions sessions;
     private Person owner;
 
     @BeforeEach
     void open() {
-        store = Store.open(folder, clock);
+        home = kind.emptyHome(folder);
+        store = Store.open(home, clock);
         sessions = store.sessions();
         owner = PeopleTest.createOwner(store);
     }
@@ -40,7 +50,7 @@ class SessionsTest {
         assertThat(session.person()).isEqualTo(owner);
         assertThat(sessions.find("")).isEmpty();
         assertThat(sessions.find(Secrets.sha256(session.token()))).isEmpty();
-        assertThat(new DataFile(folder).text("select sha256 from session")).isEqualTo(Secrets.sha256(session.token()));
+        assertThat(new DataFile(home).text("select sha256 from session")).isEqualTo(Secrets.sha256(session.token()));
         assertThat(session.toString()).doesNotContain(session.token()).doesNotContain(session.csrfToken());
     }
 
@@ -60,7 +70,7 @@ class SessionsTest {
 
     @Test
     void notesUsesToTheMinute() {
-        DataFile file = new DataFile(folder);
+        DataFile file = new DataFile(home);
         String token = sessions.start(owner).token();
         clock.pass(Duration.ofMillis(59_999));
         sessions.find(token);
@@ -80,7 +90,7 @@ class SessionsTest {
         sessions.start(owner);
         clock.pass(Duration.ofDays(14));
         sessions.start(owner);
-        assertThat(new DataFile(folder).count("session")).isEqualTo(1);
+        assertThat(new DataFile(home).count("session")).isEqualTo(1);
     }
 
     @Test

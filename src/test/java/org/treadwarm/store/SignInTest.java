@@ -9,21 +9,31 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.Parameter;
+import org.junit.jupiter.params.ParameterizedClass;
+import org.junit.jupiter.params.provider.EnumSource;
 
+@ParameterizedClass
+@EnumSource(Kind.class)
 class SignInTest {
+    @Parameter
+    Kind kind;
+
     private static final SignIn REFUSED = new SignIn.Refused();
 
     @TempDir
     Path folder;
 
     private final TestClock clock = new TestClock();
+    private DataHome home;
     private Store store;
     private People people;
     private Person owner;
 
     @BeforeEach
     void open() {
-        store = Store.open(folder, clock);
+        home = kind.emptyHome(folder);
+        store = Store.open(home, clock);
         people = store.people();
         owner = PeopleTest.createOwner(store);
     }
@@ -56,6 +66,7 @@ class SignInTest {
         assertThat(people.signIn("Anna Quill", "x".repeat(5000))).isEqualTo(REFUSED);
         assertThat(people.signIn("Nobody", PASSWORD)).isEqualTo(REFUSED);
         assertThat(people.signIn("", "")).isEqualTo(REFUSED);
+        assertThat(people.signIn("Anna\0Quill", PASSWORD)).isEqualTo(REFUSED);
     }
 
     @Test
@@ -115,7 +126,7 @@ class SignInTest {
     void keepsNoNamesThatWereTyped() {
         people.signIn("hunter2 typed into the wrong field", "wrong password");
 
-        assertThat(new DataFile(folder).text("select name_sha256 from sign_in_failure"))
+        assertThat(new DataFile(home).text("select name_sha256 from sign_in_failure"))
                 .matches("[0-9a-f]{64}");
     }
 }

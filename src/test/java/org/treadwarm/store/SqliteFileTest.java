@@ -19,14 +19,14 @@ class SqliteFileTest {
     void aTransactionHoldsTheWriteLockFromItsBeginToItsCommitOnly() throws SQLException {
         try (Connection writer = impatient().getConnection();
                 Connection other = impatient().getConnection()) {
-            SqliteFile.beforeBegin(writer);
+            engine().beforeBegin(writer);
             writer.setAutoCommit(false);
-            SqliteFile.afterBegin(writer);
+            engine().afterBegin(writer);
             execute(writer, "select 1");
             assertThatThrownBy(() -> execute(other, "create table refused (id integer)"))
                     .isInstanceOfSatisfying(
                             SQLException.class,
-                            problem -> assertThat(SqliteFile.explain(problem))
+                            problem -> assertThat(engine().explain(problem))
                                     .hasValueSatisfying(text -> assertThat(text).contains("locked")));
 
             execute(writer, "create table made (id integer)");
@@ -42,12 +42,16 @@ class SqliteFileTest {
             assertThatThrownBy(() -> execute(connection, "select nonsense"))
                     .isInstanceOfSatisfying(
                             SQLException.class,
-                            problem -> assertThat(SqliteFile.explain(problem)).isEmpty());
+                            problem -> assertThat(engine().explain(problem)).isEmpty());
         }
     }
 
+    private SqliteFile engine() {
+        return new SqliteFile(folder);
+    }
+
     private SQLiteDataSource impatient() {
-        SQLiteDataSource connections = SqliteFile.connections(folder);
+        SQLiteDataSource connections = engine().connections();
         connections.getConfig().setBusyTimeout(0);
         return connections;
     }

@@ -110,7 +110,7 @@ class StoreTest {
     @Test
     void writesAheadAndWaitsForTheDisk() {
         open(place).close();
-        DataFile file = new DataFile(place);
+        DataFile file = new DataFile(DataHome.folder(place));
 
         assertThat(file.text("pragma journal_mode")).isEqualTo("wal");
         assertThat(file.text("pragma synchronous")).isEqualTo("2");
@@ -120,7 +120,7 @@ class StoreTest {
     @Test
     void refusesTablesOfANewerProgram() {
         open(place).close();
-        DataFile file = new DataFile(place);
+        DataFile file = new DataFile(DataHome.folder(place));
         file.execute("insert into flyway_schema_history select 2, '7', 'from the future', type, 'V7__future.sql', 1,"
                 + " installed_by, installed_on, execution_time, success from flyway_schema_history");
 
@@ -132,7 +132,7 @@ class StoreTest {
 
     @Test
     void refusesTablesOfAnotherProgram() {
-        new DataFile(place).execute("create table stamps (id integer)");
+        new DataFile(DataHome.folder(place)).execute("create table stamps (id integer)");
 
         assertThatThrownBy(() -> open(place)).isInstanceOf(StoreUnavailable.class);
     }

@@ -14,28 +14,37 @@ import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import io.restassured.response.Response;
 import io.restassured.response.ValidatableResponse;
-import org.junit.jupiter.api.AfterAll;
-import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.AfterParameterizedClassInvocation;
+import org.junit.jupiter.params.BeforeParameterizedClassInvocation;
+import org.junit.jupiter.params.Parameter;
+import org.junit.jupiter.params.ParameterizedClass;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.treadwarm.intake.Document;
 import org.treadwarm.intake.NotJsonException;
+import org.treadwarm.store.Kind;
 import org.treadwarm.store.Scope;
 
 /** Jobs over HTTP: every save a revision, and no save over somebody else's. */
+@ParameterizedClass
+@EnumSource(Kind.class)
 class JobsApiTest {
+    @Parameter
+    Kind kind;
+
     private static RunningServer server;
     private static ApiClient api;
 
-    @BeforeAll
-    static void start() {
-        server = RunningServer.start();
+    @BeforeParameterizedClassInvocation
+    static void start(Kind kind) {
+        server = RunningServer.start(kind);
         api = new ApiClient(server);
     }
 
-    @AfterAll
+    @AfterParameterizedClassInvocation
     static void stop() {
         server.close();
     }

@@ -17,6 +17,8 @@ import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.store.Change;
+import org.treadwarm.store.DataHome;
+import org.treadwarm.store.Kind;
 import org.treadwarm.store.OwnerCreation;
 import org.treadwarm.store.Person;
 import org.treadwarm.store.Scope;
@@ -36,9 +38,9 @@ public final class RunningServer implements AutoCloseable {
     private final Server server;
     private final Map<Scope, String> keys = new EnumMap<>(Scope.class);
 
-    private RunningServer(Path folder) {
+    private RunningServer(Path folder, DataHome home) {
         this.folder = folder;
-        this.store = Store.open(folder, Clock.systemUTC());
+        this.store = Store.open(home, Clock.systemUTC());
         this.server = Server.start(new Settings("127.0.0.1", 0, List.of(), false), store);
         for (Scope scope : Scope.values()) {
             keys.put(scope, store.keys().create("tests", scope, "tests").token());
@@ -47,8 +49,14 @@ public final class RunningServer implements AutoCloseable {
 
     /** Starts one on any free port. */
     public static RunningServer start() {
+        return start(Kind.SQLITE);
+    }
+
+    /** Starts one on any free port, over a database of this kind. */
+    public static RunningServer start(Kind kind) {
         try {
-            return new RunningServer(Files.createTempDirectory("treadwarm-test"));
+            Path folder = Files.createTempDirectory("treadwarm-test");
+            return new RunningServer(folder, kind.emptyHome(folder));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
