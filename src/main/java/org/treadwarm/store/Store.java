@@ -17,13 +17,18 @@ public final class Store implements AutoCloseable {
     private final People people;
     private final Sessions sessions;
     private final ApiKeys keys;
+    private final Team team;
+    private final Links links;
 
     private Store(Database database, Clock clock) {
         this.database = database;
         this.audit = new Audit(database, clock);
         this.jobs = new Jobs(database, audit, clock);
-        this.people = new People(database, audit, clock);
-        this.sessions = new Sessions(database, clock);
+        Passwords passwords = new Passwords();
+        this.people = new People(database, audit, passwords, clock);
+        this.sessions = new Sessions(database, audit, clock);
+        this.team = new Team(database, audit, clock);
+        this.links = new Links(database, audit, passwords, clock);
         this.keys = new ApiKeys(database, audit, clock);
     }
 
@@ -42,6 +47,14 @@ public final class Store implements AutoCloseable {
 
     public People people() {
         return people;
+    }
+
+    public Team team() {
+        return team;
+    }
+
+    public Links links() {
+        return links;
     }
 
     public Sessions sessions() {

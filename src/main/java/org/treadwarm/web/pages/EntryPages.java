@@ -49,7 +49,7 @@ final class EntryPages {
 
     void signIn(Context ctx) {
         String name = text(ctx, "name");
-        SignIn result = store.people().signIn(name, text(ctx, "password"));
+        SignIn result = store.people().signIn(name, text(ctx, "password"), ctx.ip());
         if (result instanceof SignIn.SignedIn signedIn) {
             visitors.begin(ctx, store.sessions().start(signedIn.person()));
             String back = text(ctx, "back");
