@@ -5,6 +5,7 @@ import java.util.stream.Stream;
 import org.treadwarm.commands.CheckCommand;
 import org.treadwarm.commands.HealthCommand;
 import org.treadwarm.commands.KeyCommand;
+import org.treadwarm.commands.OwnerLinkCommand;
 import org.treadwarm.commands.RehearseCommand;
 import org.treadwarm.commands.ServeCommand;
 import org.treadwarm.commands.SizeCommand;
@@ -22,6 +23,7 @@ import picocli.CommandLine.Command;
             SizeCommand.class,
             CheckCommand.class,
             KeyCommand.class,
+            OwnerLinkCommand.class,
             HealthCommand.class,
             RehearseCommand.class
         })

@@ -5,6 +5,7 @@ import io.javalin.config.JavalinConfig;
 import io.javalin.http.Context;
 import io.javalin.http.HttpResponseException;
 import io.javalin.http.MethodNotAllowedResponse;
+import java.util.List;
 import java.util.Locale;
 import java.util.UUID;
 import org.eclipse.jetty.server.HttpConfiguration;
@@ -15,6 +16,7 @@ import org.treadwarm.store.Store;
 import org.treadwarm.store.StoreUnavailable;
 import org.treadwarm.web.api.Api;
 import org.treadwarm.web.pages.Pages;
+import org.treadwarm.web.security.Gate;
 import org.treadwarm.web.security.HostGuard;
 import org.treadwarm.web.security.KeyGuard;
 import org.treadwarm.web.security.SecureHeaders;
@@ -38,10 +40,11 @@ public final class Server implements AutoCloseable {
      */
     public static Server start(Settings settings, Store store) {
         HostGuard hosts = new HostGuard(settings.allowedHosts());
-        Visitors visitors = new Visitors(store.sessions(), settings.behindTls());
+        Visitors visitors = new Visitors(store.sessions(), settings.behindTls(), settings.behindProxy());
         JobDesk desk = new JobDesk(store.jobs());
-        Api api = new Api(new KeyGuard(store.keys()), desk);
+        Api api = new Api(desk);
         Pages pages = new Pages(store, desk, visitors);
+        Gate gate = new Gate(visitors, new KeyGuard(store.keys()), pages::refuseRole);
         Javalin javalin = Javalin.create(config -> {
             basics(config);
             config.routes.before(ctx -> {
@@ -51,17 +54,24 @@ public final class Server implements AutoCloseable {
                     ctx.skipRemainingHandlers();
                 }
             });
+            config.routes.beforeMatched(gate::check);
             new Assets().routes(config.routes);
             api.routes(config.routes);
             pages.routes(config.routes);
             faults(config, pages);
         });
+        ServedRoute.of(javalin);
         return new Server(javalin.start(settings.bind(), settings.port()));
     }
 
     /** The port it listens on. */
     public int port() {
         return javalin.port();
+    }
+
+    /** Every route it serves. */
+    List<ServedRoute> routes() {
+        return ServedRoute.of(javalin);
     }
 
     /** Stops after answering what has begun. */

@@ -17,8 +17,10 @@ import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.store.Change;
+import org.treadwarm.store.LinkUse;
 import org.treadwarm.store.OwnerCreation;
 import org.treadwarm.store.Person;
+import org.treadwarm.store.Role;
 import org.treadwarm.store.Scope;
 import org.treadwarm.store.Session;
 import org.treadwarm.store.Store;
@@ -36,10 +38,10 @@ public final class RunningServer implements AutoCloseable {
     private final Server server;
     private final Map<Scope, String> keys = new EnumMap<>(Scope.class);
 
-    private RunningServer(Path folder) {
+    private RunningServer(Path folder, boolean behindProxy) {
         this.folder = folder;
         this.store = Store.open(folder, Clock.systemUTC());
-        this.server = Server.start(new Settings("127.0.0.1", 0, List.of(), false), store);
+        this.server = Server.start(new Settings("127.0.0.1", 0, List.of(), false, behindProxy), store);
         for (Scope scope : Scope.values()) {
             keys.put(scope, store.keys().create("tests", scope, "tests").token());
         }
@@ -47,8 +49,17 @@ public final class RunningServer implements AutoCloseable {
 
     /** Starts one on any free port. */
     public static RunningServer start() {
+        return start(false);
+    }
+
+    /** Starts one that believes a proxy in front of it. */
+    static RunningServer behindProxy() {
+        return start(true);
+    }
+
+    private static RunningServer start(boolean behindProxy) {
         try {
-            return new RunningServer(Files.createTempDirectory("treadwarm-test"));
+            return new RunningServer(Files.createTempDirectory("treadwarm-test"), behindProxy);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
@@ -83,6 +94,17 @@ public final class RunningServer implements AutoCloseable {
     public Person owner() {
         String token = store.people().inviteOwner().orElseThrow();
         return ((OwnerCreation.Created) store.people().createOwner(token, OWNER, PASSWORD)).owner();
+    }
+
+    /** Makes the account of somebody invited, with the owner's password. */
+    public Person member(String name, Role role) {
+        String token = store.links().invite(name, role, OWNER).token();
+        return ((LinkUse.Done) store.links().join(token, name, PASSWORD)).person();
+    }
+
+    /** Every route it serves. */
+    List<ServedRoute> routes() {
+        return server.routes();
     }
 
     /** A new session of somebody. */
