@@ -7,6 +7,7 @@ import org.treadwarm.commands.CheckCommand;
 import org.treadwarm.commands.HealthCommand;
 import org.treadwarm.commands.KeyCommand;
 import org.treadwarm.commands.MoveCommand;
+import org.treadwarm.commands.OwnerLinkCommand;
 import org.treadwarm.commands.RehearseCommand;
 import org.treadwarm.commands.RestoreCommand;
 import org.treadwarm.commands.ServeCommand;
@@ -29,6 +30,7 @@ import picocli.CommandLine.Command;
             BackupCommand.class,
             RestoreCommand.class,
             MoveCommand.class,
+            OwnerLinkCommand.class,
             HealthCommand.class,
             RehearseCommand.class
         })

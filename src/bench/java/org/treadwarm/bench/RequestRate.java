@@ -52,7 +52,7 @@ public final class RequestRate {
                 })
                 .start("127.0.0.1", 0);
         try (Store store = Store.open(folder, Clock.systemUTC());
-                Server server = Server.start(new Settings("127.0.0.1", 0, List.of(), false), store)) {
+                Server server = Server.start(new Settings("127.0.0.1", 0, List.of(), false, false), store)) {
             String key =
                     store.keys().create("rate", Scope.SIZE, "the benchmark").token();
             URI echo = URI.create("http://127.0.0.1:" + bare.port() + "/echo");

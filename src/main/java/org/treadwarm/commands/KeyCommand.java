@@ -1,8 +1,11 @@
 package org.treadwarm.commands;
 
 import java.time.Clock;
+import java.time.Instant;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.concurrent.Callable;
+import org.treadwarm.store.KeyTerm;
 import org.treadwarm.store.Scope;
 import org.treadwarm.store.Store;
 import picocli.CommandLine.Command;
@@ -28,6 +31,9 @@ public final class KeyCommand {
         @Option(names = "--scope", required = true, description = "size, read or write; each includes the ones before")
         private String scope;
 
+        @Option(names = "--expires", description = "the last day it works, to its end in UTC, such as 2027-03-31")
+        private Optional<String> expires;
+
         @Mixin
         private HomeOptions data;
 
@@ -44,9 +50,14 @@ public final class KeyCommand {
                 System.err.println("The name has 1 to 100 characters.");
                 return 2;
             }
+            Optional<Instant> end = expires.flatMap(day -> KeyTerm.endOf(day, Instant.now()));
+            if (expires.isPresent() && end.isEmpty()) {
+                System.err.println("--expires is " + KeyTerm.ALLOWED + ", not \"" + expires.get() + "\".");
+                return 2;
+            }
             try (Store store = Store.open(data.home(), Clock.systemUTC())) {
                 String token = store.keys()
-                        .create(name.strip(), wanted, "the command line")
+                        .create(name.strip(), wanted, end, "the command line")
                         .token();
                 System.out.println("The key \"" + name.strip() + "\" (" + scope.toLowerCase(Locale.ROOT)
                         + ") is shown only this once:");

@@ -26,7 +26,7 @@ public final class RehearseCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         Path folder = Files.createTempDirectory("treadwarm-rehearsal");
         try (Store store = Store.open(folder, Clock.systemUTC());
-                Server server = Server.start(new Settings("127.0.0.1", 0, List.of(), false), store)) {
+                Server server = Server.start(new Settings("127.0.0.1", 0, List.of(), false, false), store)) {
             store.people().inviteOwner();
             for (String path : List.of("/api/v1/health", "/sign-in", "/static/treadwarm.css")) {
                 int status = status(server.port(), path);

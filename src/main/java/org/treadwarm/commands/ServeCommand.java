@@ -45,6 +45,11 @@ public final class ServeCommand implements Callable<Integer> {
     @Option(names = "--behind-tls", description = "a reverse proxy in front speaks TLS: mark cookies Secure")
     private boolean behindTls;
 
+    @Option(
+            names = "--behind-proxy",
+            description = "one reverse proxy in front appends to X-Forwarded-For where requests come from: believe it")
+    private boolean behindProxy;
+
     /** Begins to load the server, on another thread, while the command line is read and the store opened. */
     public static void prepare() {
         WarmUp.begin();
@@ -60,7 +65,7 @@ public final class ServeCommand implements Callable<Integer> {
             if (demo) {
                 Demo.addTo(new JobDesk(store.jobs()));
             }
-            Server server = Server.start(new Settings(bind, port, hosts, behindTls), store);
+            Server server = Server.start(new Settings(bind, port, hosts, behindTls, behindProxy), store);
             announce(server.port(), store.people().inviteOwner());
             CountDownLatch stopped = new CountDownLatch(1);
             Runtime.getRuntime().addShutdownHook(new Thread(() -> {

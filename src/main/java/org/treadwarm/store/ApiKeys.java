@@ -12,7 +12,7 @@ import org.jdbi.v3.core.statement.StatementContext;
 
 /** The keys other programs use. Uses are noted to the minute. */
 public final class ApiKeys {
-    private static final String COLUMNS = "id, name, scope, created_at, last_used_at";
+    private static final String COLUMNS = "id, name, scope, created_at, last_used_at, expires_at, revoked_at";
     private static final Duration NOTED_EVERY = Duration.ofMinutes(1);
 
     private final Database database;
@@ -25,15 +25,27 @@ public final class ApiKeys {
         this.clock = clock;
     }
 
+    /** Makes a key that works until it is revoked, see {@link #create(String, Scope, Optional, String)}. */
+    public NewApiKey create(String name, Scope scope, String who) {
+        return create(name, scope, Optional.empty(), who);
+    }
+
     /**
      * Makes a key.
      *
+     * @param expiresAt from when on it no longer works, if it shall end by itself
      * @param who the person who makes it, for the audit list
      * @throws IllegalArgumentException if the name has a NUL or half a character
      */
-    public NewApiKey create(String name, Scope scope, String who) {
+    public NewApiKey create(String name, Scope scope, Optional<Instant> expiresAt, String who) {
         ApiKey key = new ApiKey(
-                Secrets.id(), Texts.storable("name of the key", name), scope, Times.now(clock), Optional.empty());
+                Secrets.id(),
+                Texts.storable("name of the key", name),
+                scope,
+                Times.now(clock),
+                Optional.empty(),
+                expiresAt,
+                Optional.empty());
         String token = "tw_" + Secrets.token();
         return database.change(handle -> {
             insert(handle, key, Secrets.sha256(token));
@@ -42,18 +54,21 @@ public final class ApiKeys {
         });
     }
 
-    /** The key with this token, which counts as a use of it; empty if there is none or it was revoked. */
+    /** The key with this token, which counts as a use of it; empty if there is none, it was revoked or has expired. */
     public Optional<ApiKey> find(String token) {
-        Optional<ApiKey> found =
-                database.read(handle -> handle.createQuery("select " + COLUMNS + " from api_key where sha256 = :sha256")
-                        .bind("sha256", Secrets.sha256(token))
-                        .map(ApiKeys::key)
-                        .findOne());
-        return found.map(this::used);
+        Instant now = Times.now(clock);
+        return known(token).filter(key -> key.works(now)).map(key -> used(key, now));
     }
 
-    private ApiKey used(ApiKey key) {
-        Instant now = Times.now(clock);
+    /** The key with this token, whether it works or no longer does. */
+    public Optional<ApiKey> known(String token) {
+        return database.read(handle -> handle.createQuery("select " + COLUMNS + " from api_key where sha256 = :sha256")
+                .bind("sha256", Secrets.sha256(token))
+                .map(ApiKeys::key)
+                .findOne());
+    }
+
+    private ApiKey used(ApiKey key, Instant now) {
         if (key.lastUsed().isPresent() && now.isBefore(key.lastUsed().get().plus(NOTED_EVERY))) {
             return key;
         }
@@ -61,39 +76,44 @@ public final class ApiKeys {
                 .bind("now", Times.text(now))
                 .bind("id", key.id())
                 .execute());
-        return new ApiKey(key.id(), key.name(), key.scope(), key.createdAt(), Optional.of(now));
+        return key.usedAt(now);
     }
 
-    /** All keys, the newest first. */
+    /** All keys that were not revoked, the newest first. */
     public List<ApiKey> list() {
-        return database.read(
-                handle -> handle.createQuery("select " + COLUMNS + " from api_key order by created_at desc, id")
-                        .map(ApiKeys::key)
-                        .list());
+        return database.read(handle -> handle.createQuery(
+                        "select " + COLUMNS + " from api_key where revoked_at is null order by created_at desc, id")
+                .map(ApiKeys::key)
+                .list());
     }
 
     /** Ends a key at once. Returns whether there was one with this id. */
     public boolean revoke(String id, String who) {
         return database.change(handle -> {
-            boolean existed = handle.createUpdate("delete from api_key where id = :id")
-                            .bind("id", id)
-                            .execute()
-                    == 1;
-            if (existed) {
-                audit.append(handle, who, "revoked key", id);
-            }
-            return existed;
+            Optional<String> name = handle.createQuery("select name from api_key where id = :id and revoked_at is null")
+                    .bind("id", id)
+                    .mapTo(String.class)
+                    .findOne();
+            name.ifPresent(known -> {
+                handle.createUpdate("update api_key set revoked_at = :now where id = :id")
+                        .bind("now", Times.text(Times.now(clock)))
+                        .bind("id", id)
+                        .execute();
+                audit.append(handle, who, "revoked key", id + " " + known);
+            });
+            return name.isPresent();
         });
     }
 
     private static void insert(Handle handle, ApiKey key, String sha256) {
-        handle.createUpdate("insert into api_key (id, name, scope, sha256, created_at)"
-                        + " values (:id, :name, :scope, :sha256, :createdAt)")
+        handle.createUpdate("insert into api_key (id, name, scope, sha256, created_at, expires_at)"
+                        + " values (:id, :name, :scope, :sha256, :createdAt, :expiresAt)")
                 .bind("id", key.id())
                 .bind("name", key.name())
                 .bind("scope", key.scope().text())
                 .bind("sha256", sha256)
                 .bind("createdAt", Times.text(key.createdAt()))
+                .bind("expiresAt", key.expiresAt().map(Times::text).orElse(null))
                 .execute();
     }
 
@@ -103,6 +123,12 @@ public final class ApiKeys {
                 row.getString("name"),
                 Scope.of(row.getString("scope")),
                 Times.instant(row.getString("created_at")),
-                Optional.ofNullable(row.getString("last_used_at")).map(Times::instant));
+                time(row, "last_used_at"),
+                time(row, "expires_at"),
+                time(row, "revoked_at"));
+    }
+
+    private static Optional<Instant> time(ResultSet row, String column) throws SQLException {
+        return Optional.ofNullable(row.getString(column)).map(Times::instant);
     }
 }

@@ -1,7 +1,5 @@
 package org.treadwarm.store;
 
-import java.sql.ResultSet;
-import java.sql.SQLException;
 import java.time.Clock;
 import java.time.Duration;
 import java.time.Instant;
@@ -13,11 +11,12 @@ public final class People {
     private final Database database;
     private final Audit audit;
     private final Clock clock;
-    private final Passwords passwords = new Passwords();
+    private final Passwords passwords;
 
-    People(Database database, Audit audit, Clock clock) {
+    People(Database database, Audit audit, Passwords passwords, Clock clock) {
         this.database = database;
         this.audit = audit;
+        this.passwords = passwords;
         this.clock = clock;
     }
 
@@ -62,43 +61,76 @@ public final class People {
             if (!OwnerInvitation.spend(handle, token, owner.createdAt())) {
                 return new OwnerCreation.LinkRefused();
             }
-            insert(handle, owner, hash);
+            PersonRows.insert(handle, owner, hash);
             audit.append(handle, owner.name(), "created the owner's account", owner.name());
             return new OwnerCreation.Created(owner);
         });
     }
 
     /**
-     * Tries a name and password. An unknown name takes as long as a wrong password. After several failures under a name
-     * the answer is to wait, for at most a minute.
+     * Tries a name and password. An unknown name, and one whose account is closed, takes as long as a wrong password. After
+     * several failures under a name from one address the answer to that address is to wait, for at most a minute.
+     *
+     * @param from the address that the try comes from, in a form that whoever tries cannot choose freely
      */
-    public SignIn signIn(String name, String password) {
+    public SignIn signIn(String name, String password, String from) {
         String key = PersonName.key(name);
-        Instant now = Times.now(clock);
-        Optional<Duration> wait = database.change(handle -> SignInThrottle.begin(handle, key, now));
+        Optional<Duration> wait = begin(key, from);
         if (wait.isPresent()) {
             return new SignIn.Wait(wait.get());
         }
-        Optional<Account> account =
-                PersonName.accepts(name) ? database.read(handle -> find(handle, key)) : Optional.empty();
-        String hash = account.map(Account::passwordHash).orElseGet(passwords::hashOfNothing);
-        // A password outside the rule matches no account; hashing a short text instead bounds the work.
-        boolean matches = passwords.matches(PasswordRule.accepts(password) ? password : "", hash);
-        if (account.isEmpty() || !matches) {
+        Optional<Person> person = tried(key, password);
+        if (person.isEmpty()) {
             return new SignIn.Refused();
         }
-        return signedIn(account.get().person(), key);
-    }
-
-    private SignIn signedIn(Person person, String key) {
         return database.change(handle -> {
-            SignInThrottle.clear(handle, key);
-            audit.append(handle, person.name(), "signed in", person.name());
-            return new SignIn.SignedIn(person);
+            SignInThrottle.clear(handle, key, from);
+            audit.append(handle, person.get().name(), "signed in", person.get().name());
+            return new SignIn.SignedIn(person.get());
         });
     }
 
-    private record Account(Person person, String passwordHash) {}
+    /**
+     * Changes somebody's own password and ends all sessions but the one it is done in. Wrong tries slow down as those of a
+     * sign-in do, and count with them.
+     */
+    public PasswordChange changePassword(Session session, String present, String fresh, String from) {
+        if (!PasswordRule.accepts(fresh)) {
+            return new PasswordChange.PasswordRefused();
+        }
+        String key = PersonName.key(session.person().name());
+        Optional<Duration> wait = begin(key, from);
+        if (wait.isPresent()) {
+            return new PasswordChange.Wait(wait.get());
+        }
+        if (tried(key, present).isEmpty()) {
+            return new PasswordChange.WrongPassword();
+        }
+        String hash = passwords.hash(fresh);
+        Person person = session.person();
+        return database.change(handle -> {
+            SignInThrottle.clear(handle, key, from);
+            PersonRows.setPassword(handle, person.id(), hash);
+            Sessions.endAllBut(handle, person.id(), session.token());
+            audit.append(handle, person.name(), "changed password", person.name());
+            return new PasswordChange.Changed();
+        });
+    }
+
+    private Optional<Duration> begin(String key, String from) {
+        Instant now = Times.now(clock);
+        return database.change(handle -> SignInThrottle.begin(handle, key, from, now));
+    }
+
+    /** The person of this name, if the password is right. */
+    private Optional<Person> tried(String key, String password) {
+        Optional<PersonRows.Account> account =
+                PersonName.canBeKept(key) ? database.read(handle -> PersonRows.byName(handle, key)) : Optional.empty();
+        String hash = account.map(PersonRows.Account::passwordHash).orElseGet(passwords::hashOfNothing);
+        // A password outside the rule matches no account; hashing a short text instead bounds the work.
+        boolean matches = passwords.matches(PasswordRule.accepts(password) ? password : "", hash);
+        return account.filter(found -> matches).map(PersonRows.Account::person);
+    }
 
     private static boolean hasOwner(Handle handle) {
         return handle.createQuery("select count(*) from person where role = :role")
@@ -106,33 +138,5 @@ public final class People {
                         .mapTo(Integer.class)
                         .one()
                 > 0;
-    }
-
-    private static Optional<Account> find(Handle handle, String key) {
-        return handle.createQuery(
-                        "select id, name, role, created_at, password_hash from person where name_key = :nameKey")
-                .bind("nameKey", key)
-                .map((row, context) -> new Account(person(row), row.getString("password_hash")))
-                .findOne();
-    }
-
-    static Person person(ResultSet row) throws SQLException {
-        return new Person(
-                row.getString("id"),
-                row.getString("name"),
-                Role.of(row.getString("role")),
-                Times.instant(row.getString("created_at")));
-    }
-
-    private static void insert(Handle handle, Person person, String hash) {
-        handle.createUpdate("insert into person (id, name, name_key, role, password_hash, created_at)"
-                        + " values (:id, :name, :nameKey, :role, :hash, :createdAt)")
-                .bind("id", person.id())
-                .bind("name", person.name())
-                .bind("nameKey", PersonName.key(person.name()))
-                .bind("role", person.role().text())
-                .bind("hash", hash)
-                .bind("createdAt", Times.text(person.createdAt()))
-                .execute();
     }
 }

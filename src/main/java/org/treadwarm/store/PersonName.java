@@ -20,6 +20,11 @@ public final class PersonName {
                 && !CONTROL.matcher(stripped).find();
     }
 
+    /** Whether a name without rule may be asked for: some databases refuse U+0000 even in a question. */
+    static boolean canBeKept(String name) {
+        return name.indexOf('\0') < 0;
+    }
+
     static String key(String name) {
         return Normalizer.normalize(name.strip(), Normalizer.Form.NFC).toLowerCase(Locale.ROOT);
     }

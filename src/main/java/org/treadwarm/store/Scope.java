@@ -16,7 +16,8 @@ public enum Scope {
         return compareTo(needed) >= 0;
     }
 
-    String text() {
+    /** The scope as it is written, in lower case. */
+    public String text() {
         return name().toLowerCase(Locale.ROOT);
     }
 

@@ -18,6 +18,11 @@ public record Session(Person person, String token, String csrfToken, Instant cre
                 csrfToken.getBytes(StandardCharsets.UTF_8), submittedCsrfToken.getBytes(StandardCharsets.UTF_8));
     }
 
+    /** The {@link OpenSession#id} of this session. */
+    public String id() {
+        return Secrets.sha256(token).substring(0, OpenSession.ID_LENGTH);
+    }
+
     /** Without the secrets, so that a log cannot give them away. */
     @Override
     public String toString() {

@@ -3,6 +3,7 @@ package org.treadwarm.store;
 import java.time.Clock;
 import java.time.Duration;
 import java.time.Instant;
+import java.util.List;
 import java.util.Optional;
 import org.jdbi.v3.core.Handle;
 
@@ -12,10 +13,12 @@ public final class Sessions {
     private static final Duration NOTED_EVERY = Duration.ofMinutes(1);
 
     private final Database database;
+    private final Audit audit;
     private final Clock clock;
 
-    Sessions(Database database, Clock clock) {
+    Sessions(Database database, Audit audit, Clock clock) {
         this.database = database;
+        this.audit = audit;
         this.clock = clock;
     }
 
@@ -31,6 +34,7 @@ public final class Sessions {
                     .bind("personId", person.id())
                     .bind("now", Times.text(now))
                     .execute();
+            PersonRows.seen(handle, person.id(), now);
             return session(person, token, now, now);
         });
     }
@@ -45,7 +49,11 @@ public final class Sessions {
         }
         Instant lastSeenAt = found.get().lastSeenAt();
         if (!now.isBefore(lastSeenAt.plus(NOTED_EVERY))) {
-            database.changeIfPossible(handle -> note(handle, token, now));
+            Person person = found.get().person();
+            database.changeIfPossible(handle -> {
+                note(handle, token, now);
+                PersonRows.seen(handle, person.id(), now);
+            });
             lastSeenAt = now;
         }
         return Optional.of(session(found.get().person(), token, found.get().createdAt(), lastSeenAt));
@@ -58,6 +66,48 @@ public final class Sessions {
                 .execute());
     }
 
+    /** The sessions of somebody that have not ended, the last used first. */
+    public List<OpenSession> list(Person person) {
+        return database.read(handle -> handle.createQuery("select substr(sha256, 1, 16) as id, created_at, last_seen_at"
+                        + " from session where person_id = :person and last_seen_at > :oldest"
+                        + " order by last_seen_at desc, sha256")
+                .bind("person", person.id())
+                .bind("oldest", Times.text(Times.now(clock).minus(ENDS_AFTER)))
+                .map((row, context) -> new OpenSession(
+                        row.getString("id"),
+                        Times.instant(row.getString("created_at")),
+                        Times.instant(row.getString("last_seen_at"))))
+                .list());
+    }
+
+    /** Ends one of somebody's own sessions. Returns whether there was one with this id. */
+    public boolean end(Person person, String id) {
+        return database.change(handle -> {
+            boolean existed =
+                    handle.createUpdate("delete from session where person_id = :person and substr(sha256, 1, 16) = :id")
+                                    .bind("person", person.id())
+                                    .bind("id", id)
+                                    .execute()
+                            > 0;
+            if (existed) {
+                audit.append(handle, person.name(), "ended a session", person.name());
+            }
+            return existed;
+        });
+    }
+
+    /** Ends all sessions of somebody. */
+    public void endAll(Person person) {
+        database.change(handle -> {
+            handle.execute("delete from session where person_id = ?", person.id());
+            return audit.append(handle, person.name(), "signed out everywhere", person.name());
+        });
+    }
+
+    static void endAllBut(Handle handle, String personId, String token) {
+        handle.execute("delete from session where person_id = ? and sha256 <> ?", personId, Secrets.sha256(token));
+    }
+
     private record Found(Person person, Instant createdAt, Instant lastSeenAt) {}
 
     private static Session session(Person person, String token, Instant createdAt, Instant lastSeenAt) {
@@ -67,10 +117,11 @@ public final class Sessions {
     private static Optional<Found> find(Handle handle, String token) {
         return handle.createQuery("select person.id, person.name, person.role, person.created_at,"
                         + " session.created_at as started_at, session.last_seen_at"
-                        + " from session join person on person.id = session.person_id where session.sha256 = :sha256")
+                        + " from session join person on person.id = session.person_id"
+                        + " where session.sha256 = :sha256 and person.closed_at is null")
                 .bind("sha256", Secrets.sha256(token))
                 .map((row, context) -> new Found(
-                        People.person(row),
+                        PersonRows.person(row),
                         Times.instant(row.getString("started_at")),
                         Times.instant(row.getString("last_seen_at"))))
                 .findOne();

@@ -22,14 +22,19 @@ public final class Store implements AutoCloseable {
     private final People people;
     private final Sessions sessions;
     private final ApiKeys keys;
+    private final Team team;
+    private final Links links;
 
     Store(Database database, Clock clock, Optional<FolderLock> lock) {
         this.database = database;
         this.lock = lock;
         this.audit = new Audit(database, clock);
         this.jobs = new Jobs(database, audit, clock);
-        this.people = new People(database, audit, clock);
-        this.sessions = new Sessions(database, clock);
+        Passwords passwords = new Passwords();
+        this.people = new People(database, audit, passwords, clock);
+        this.sessions = new Sessions(database, audit, clock);
+        this.team = new Team(database, audit, clock);
+        this.links = new Links(database, audit, passwords, clock);
         this.keys = new ApiKeys(database, audit, clock);
     }
 
@@ -75,6 +80,14 @@ public final class Store implements AutoCloseable {
 
     public People people() {
         return people;
+    }
+
+    public Team team() {
+        return team;
+    }
+
+    public Links links() {
+        return links;
     }
 
     public Sessions sessions() {

@@ -11,6 +11,7 @@ import java.util.Objects;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.regex.Pattern;
 import java.util.zip.CRC32C;
+import org.treadwarm.web.security.Access;
 
 /**
  * The style sheet, the script and the pictures of the pages, out of the program itself.
@@ -31,8 +32,8 @@ final class Assets {
     private record Asset(byte[] bytes, String type, String tag) {}
 
     void routes(RoutesConfig routes) {
-        routes.get("/static/<name>", this::give);
-        routes.head("/static/<name>", this::give);
+        routes.get("/static/<name>", this::give, Access.ANYBODY);
+        routes.head("/static/<name>", this::give, Access.ANYBODY);
     }
 
     private void give(Context ctx) {

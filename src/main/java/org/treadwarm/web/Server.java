@@ -6,6 +6,7 @@ import io.javalin.http.Context;
 import io.javalin.http.HttpResponseException;
 import io.javalin.http.MethodNotAllowedResponse;
 import java.time.Duration;
+import java.util.List;
 import java.util.Locale;
 import java.util.UUID;
 import org.eclipse.jetty.server.AbstractConnector;
@@ -18,6 +19,7 @@ import org.treadwarm.store.Store;
 import org.treadwarm.store.StoreUnavailable;
 import org.treadwarm.web.api.Api;
 import org.treadwarm.web.pages.Pages;
+import org.treadwarm.web.security.Gate;
 import org.treadwarm.web.security.HostGuard;
 import org.treadwarm.web.security.KeyGuard;
 import org.treadwarm.web.security.SecureHeaders;
@@ -47,10 +49,11 @@ public final class Server implements AutoCloseable {
     /** Starts one that gives a connection up when nothing comes or goes on it for so long. */
     static Server start(Settings settings, Store store, Duration idle) {
         HostGuard hosts = new HostGuard(settings.allowedHosts());
-        Visitors visitors = new Visitors(store.sessions(), settings.behindTls());
+        Visitors visitors = new Visitors(store.sessions(), settings.behindTls(), settings.behindProxy());
         JobDesk desk = new JobDesk(store.jobs());
-        Api api = new Api(new KeyGuard(store.keys()), desk);
+        Api api = new Api(desk);
         Pages pages = new Pages(store, desk, visitors);
+        Gate gate = new Gate(visitors, new KeyGuard(store.keys()), pages::refuseRole);
         Javalin javalin = Javalin.create(config -> {
             basics(config);
             config.jetty.modifyHttpConfiguration(http -> http.setIdleTimeout(idle.toMillis()));
@@ -61,12 +64,14 @@ public final class Server implements AutoCloseable {
                     ctx.skipRemainingHandlers();
                 }
             });
+            config.routes.beforeMatched(gate::check);
             new Assets().routes(config.routes);
             api.routes(config.routes);
             pages.routes(config.routes);
             faults(config, pages);
         });
         javalin.start(settings.bind(), settings.port());
+        ServedRoute.of(javalin);
         for (Connector connector : javalin.jettyServer().server().getConnectors()) {
             ((AbstractConnector) connector).setIdleTimeout(idle.toMillis());
         }
@@ -76,6 +81,11 @@ public final class Server implements AutoCloseable {
     /** The port it listens on. */
     public int port() {
         return javalin.port();
+    }
+
+    /** Every route it serves. */
+    List<ServedRoute> routes() {
+        return ServedRoute.of(javalin);
     }
 
     /** Stops after answering what has begun. */

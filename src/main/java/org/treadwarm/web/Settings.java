@@ -12,8 +12,9 @@ import java.util.Set;
  * @param port port to listen on; 0 for any free one
  * @param hosts further names it may be called by, beside this machine's own
  * @param behindTls whether a reverse proxy in front speaks TLS, so that cookies are marked Secure
+ * @param behindProxy whether a reverse proxy in front says in X-Forwarded-For where requests come from
  */
-public record Settings(String bind, int port, List<String> hosts, boolean behindTls) {
+public record Settings(String bind, int port, List<String> hosts, boolean behindTls, boolean behindProxy) {
     private static final Set<String> LOCAL = Set.of("localhost", "127.0.0.1", "[::1]");
 
     public Settings {

@@ -7,15 +7,22 @@ import com.deque.html.axecore.results.Rule;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import com.microsoft.playwright.Browser;
 import com.microsoft.playwright.Page;
+import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.extension.ExtendWith;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.treadwarm.jobs.Demo;
+import org.treadwarm.store.Links;
+import org.treadwarm.store.Person;
+import org.treadwarm.store.Role;
+import org.treadwarm.store.Scope;
 import org.treadwarm.store.Session;
 import org.treadwarm.web.RunningServer;
 
@@ -73,7 +80,41 @@ class EveryPageTest {
                 broken + "/assemblies/shed%20wall",
                 broken + "/assemblies/new%20sash");
         return Stream.concat(
-                jobs, Stream.of("/one-room", "/materials", "/reading-help", "/method", "/nothing-here", "/sign-in"));
+                Stream.concat(jobs, service()),
+                Stream.of("/one-room", "/materials", "/reading-help", "/method", "/nothing-here", "/sign-in"));
+    }
+
+    /** People, keys and the audit list, with a row of every sort, and what links lead to. */
+    private static Stream<String> service() {
+        String join = "/link/"
+                + server.store().links().invite("Benno", Role.SURVEYOR, "tests").token();
+        Person member = server.member("Emmet " + join.length(), Role.ESTIMATOR);
+        String reset = server.store()
+                .links()
+                .resetPassword(member.id(), "tests", Links.VALID_FOR)
+                .orElseThrow()
+                .token();
+        server.store().keys().create("ended", Scope.READ, Optional.of(Instant.EPOCH), "tests");
+        server.store().team().close(server.member("Carla", Role.OWNER).id(), "tests");
+        return Stream.of(
+                "/people", "/keys", "/audit", "/account", join, "/link/" + reset, "/link/spent", "/people?done=role");
+    }
+
+    /** The pages that a form with faults, and a good one, come back with. */
+    @ParameterizedTest
+    @ValueSource(strings = {"/people", "/keys", "/account"})
+    void isForEverybodyAfterAFormWasSent(String path, Browser browser) {
+        try (Tab tab = Tab.desk(server, browser).as(session).open(path)) {
+            tab.press(tab.page().locator("form.card button"));
+            assertThat(tab.page().locator("#summary").isVisible()).isTrue();
+            assertForEverybody(tab);
+            if (!path.equals("/account")) {
+                tab.page().locator("#name").fill("Dorit");
+                tab.press(tab.page().locator("form.card button"));
+                assertThat(tab.page().locator(".secret").isVisible()).isTrue();
+                assertForEverybody(tab);
+            }
+        }
     }
 
     static Stream<String> pagesBeforeTheOwner() {

@@ -27,7 +27,7 @@ class FullDiskServerTest {
     void saysSoLosesNothingAndGoesOnWhenThereIsRoom() throws Exception {
         ExecutorService threads = Executors.newFixedThreadPool(WRITERS);
         try (CrampedStore cramped = new CrampedStore(folder, 60);
-                Server server = Server.start(new Settings("127.0.0.1", 0, List.of(), false), cramped.store())) {
+                Server server = Server.start(new Settings("127.0.0.1", 0, List.of(), false, false), cramped.store())) {
             String key =
                     cramped.store().keys().create("tests", Scope.WRITE, "tests").token();
             JobClient client = new JobClient("http://127.0.0.1:" + server.port(), key);

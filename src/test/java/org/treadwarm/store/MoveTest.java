@@ -53,7 +53,8 @@ class MoveTest {
             assertThat(after.audit().latest(100)).isEqualTo(before.audit().latest(100));
             assertThat(after.keys().find(key)).isPresent();
             assertThat(after.sessions().find(session)).isPresent();
-            assertThat(after.people().signIn("Anna Quill", PeopleTest.PASSWORD)).isInstanceOf(SignIn.SignedIn.class);
+            assertThat(after.people().signIn("Anna Quill", PeopleTest.PASSWORD, "192.0.2.7"))
+                    .isInstanceOf(SignIn.SignedIn.class);
             assertThat(after.jobs().save(id, 2, job("Mill Lane"), BY_ANNA)).isEqualTo(new SaveResult.Saved(3));
         }
     }

@@ -121,12 +121,14 @@ class StoreTest {
     void refusesTablesOfANewerProgram() {
         open(place).close();
         DataFile file = new DataFile(DataHome.folder(place));
-        file.execute("insert into flyway_schema_history select 2, '7', 'from the future', type, 'V7__future.sql', 1,"
-                + " installed_by, installed_on, execution_time, success from flyway_schema_history");
+        file.execute(
+                "insert into flyway_schema_history select 99, '99', 'from the future', type, 'V99__future.sql', 1,"
+                        + " installed_by, installed_on, execution_time, success from flyway_schema_history where installed_rank = 1");
 
         assertThatThrownBy(() -> open(place))
                 .isInstanceOf(StoreUnavailable.class)
-                .hasMessageContaining("newer Treadwarm (tables of version 7; this program knows up to 1)")
+                .hasMessageContaining(
+                        "newer Treadwarm (tables of version 99; this program knows up to " + Schema.VERSION + ")")
                 .hasMessageContaining(place.toString());
     }
 

@@ -60,7 +60,7 @@ class FormSecretTest {
         assertRefused(visitor.send(
                 visitor.open("/jobs").form("name").type("name", "more").type("csrf", secret)));
         assertRefused(visitor.send(
-                visitor.open("/one-room").form("document").type("csrf", secret).press("keep")));
+                visitor.open("/one-room").form("document").type("csrf", secret).to("/one-room/keep")));
     }
 
     @Test

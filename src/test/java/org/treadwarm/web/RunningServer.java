@@ -19,8 +19,10 @@ import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.DataHome;
 import org.treadwarm.store.Kind;
+import org.treadwarm.store.LinkUse;
 import org.treadwarm.store.OwnerCreation;
 import org.treadwarm.store.Person;
+import org.treadwarm.store.Role;
 import org.treadwarm.store.Scope;
 import org.treadwarm.store.Session;
 import org.treadwarm.store.Store;
@@ -38,10 +40,10 @@ public final class RunningServer implements AutoCloseable {
     private final Server server;
     private final Map<Scope, String> keys = new EnumMap<>(Scope.class);
 
-    private RunningServer(Path folder, DataHome home) {
+    private RunningServer(Path folder, DataHome home, boolean behindProxy) {
         this.folder = folder;
         this.store = Store.open(home, Clock.systemUTC());
-        this.server = Server.start(new Settings("127.0.0.1", 0, List.of(), false), store);
+        this.server = Server.start(new Settings("127.0.0.1", 0, List.of(), false, behindProxy), store);
         for (Scope scope : Scope.values()) {
             keys.put(scope, store.keys().create("tests", scope, "tests").token());
         }
@@ -54,9 +56,18 @@ public final class RunningServer implements AutoCloseable {
 
     /** Starts one on any free port, over a database of this kind. */
     public static RunningServer start(Kind kind) {
+        return start(kind, false);
+    }
+
+    /** Starts one that believes a proxy in front of it. */
+    static RunningServer behindProxy() {
+        return start(Kind.SQLITE, true);
+    }
+
+    private static RunningServer start(Kind kind, boolean behindProxy) {
         try {
             Path folder = Files.createTempDirectory("treadwarm-test");
-            return new RunningServer(folder, kind.emptyHome(folder));
+            return new RunningServer(folder, kind.emptyHome(folder), behindProxy);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
@@ -91,6 +102,17 @@ public final class RunningServer implements AutoCloseable {
     public Person owner() {
         String token = store.people().inviteOwner().orElseThrow();
         return ((OwnerCreation.Created) store.people().createOwner(token, OWNER, PASSWORD)).owner();
+    }
+
+    /** Makes the account of somebody invited, with the owner's password. */
+    public Person member(String name, Role role) {
+        String token = store.links().invite(name, role, OWNER).token();
+        return ((LinkUse.Done) store.links().join(token, name, PASSWORD)).person();
+    }
+
+    /** Every route it serves. */
+    List<ServedRoute> routes() {
+        return server.routes();
     }
 
     /** A new session of somebody. */

@@ -29,8 +29,8 @@ class SlowClientsTest {
     void halfARequestIsGivenUpWhileOthersAreAnswered() throws IOException {
         List<Socket> sockets = new ArrayList<>();
         try (Store store = Store.open(folder, Clock.systemUTC());
-                Server server =
-                        Server.start(new Settings("127.0.0.1", 0, List.of(), false), store, Duration.ofSeconds(2))) {
+                Server server = Server.start(
+                        new Settings("127.0.0.1", 0, List.of(), false, false), store, Duration.ofSeconds(2))) {
             String key = store.keys().create("tests", Scope.WRITE, "tests").token();
             String head = "POST /api/v1/jobs HTTP/1.1\r\nHost: 127.0.0.1\r\nAuthorization: Bearer " + key
                     + "\r\nContent-Type: application/json\r\nContent-Length: 1000\r\n";

@@ -5,10 +5,10 @@ import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sizing.Sizing;
-import org.treadwarm.web.security.KeyGuard;
+import org.treadwarm.web.security.Access;
 import org.treadwarm.wire.Json;
 
-/** The routes of the API. */
+/** The routes of the API, each with the scope that a key needs for it. */
 public final class Api {
     /** Where it stands. */
     public static final String ROOT = "/api/v1";
@@ -17,10 +17,10 @@ public final class Api {
     private final WarmUpApi warmUps;
     private final JobsApi jobs;
 
-    public Api(KeyGuard keys, JobDesk desk) {
-        this.sizing = new SizingApi(keys);
-        this.warmUps = new WarmUpApi(keys);
-        this.jobs = new JobsApi(keys, desk);
+    public Api(JobDesk desk) {
+        this.sizing = new SizingApi();
+        this.warmUps = new WarmUpApi();
+        this.jobs = new JobsApi(desk);
     }
 
     /** The description of the API, made when it is first asked for. */
@@ -40,26 +40,26 @@ public final class Api {
 
     /** Adds the routes. */
     public void routes(RoutesConfig routes) {
-        get(routes, ROOT + "/health", Api::health);
-        get(routes, ROOT + "/openapi.json", this::description);
-        routes.post(ROOT + "/sizings", sizing::size);
-        routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate);
-        routes.post(ROOT + "/sections", sizing::section);
-        routes.post(ROOT + "/warmups", warmUps::answer);
-        get(routes, ROOT + "/materials", sizing::materials);
-        get(routes, ROOT + "/jobs", jobs::list);
-        routes.post(ROOT + "/jobs", jobs::create);
-        get(routes, ROOT + "/jobs/{id}", jobs::get);
-        routes.put(ROOT + "/jobs/{id}", jobs::put);
-        get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing);
-        get(routes, ROOT + "/jobs/{id}/revisions", jobs::revisions);
-        get(routes, ROOT + "/jobs/{id}/revisions/{n}", jobs::revision);
+        get(routes, ROOT + "/health", Api::health, Access.ANYBODY);
+        get(routes, ROOT + "/openapi.json", this::description, Access.ANYBODY);
+        routes.post(ROOT + "/sizings", sizing::size, Access.SIZE);
+        routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate, Access.SIZE);
+        routes.post(ROOT + "/sections", sizing::section, Access.SIZE);
+        routes.post(ROOT + "/warmups", warmUps::answer, Access.SIZE);
+        get(routes, ROOT + "/materials", sizing::materials, Access.SIZE);
+        get(routes, ROOT + "/jobs", jobs::list, Access.READ);
+        routes.post(ROOT + "/jobs", jobs::create, Access.WRITE);
+        get(routes, ROOT + "/jobs/{id}", jobs::get, Access.READ);
+        routes.put(ROOT + "/jobs/{id}", jobs::put, Access.WRITE);
+        get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing, Access.READ);
+        get(routes, ROOT + "/jobs/{id}/revisions", jobs::revisions, Access.READ);
+        get(routes, ROOT + "/jobs/{id}/revisions/{n}", jobs::revision, Access.READ);
     }
 
     /** HEAD answers as GET does, without the body. */
-    private static void get(RoutesConfig routes, String path, Handler handler) {
-        routes.get(path, handler);
-        routes.head(path, handler);
+    private static void get(RoutesConfig routes, String path, Handler handler, Access access) {
+        routes.get(path, handler, access);
+        routes.head(path, handler, access);
     }
 
     private static void health(Context ctx) {

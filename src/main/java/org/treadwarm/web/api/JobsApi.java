@@ -12,10 +12,8 @@ import org.treadwarm.intake.Intake;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.jobs.JobDesk.Saving;
-import org.treadwarm.store.ApiKey;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.RevisionHeader;
-import org.treadwarm.store.Scope;
 import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.web.Problems;
@@ -25,11 +23,9 @@ import org.treadwarm.web.security.KeyGuard;
 final class JobsApi {
     private static final int LONGEST_NAME = 200;
 
-    private final KeyGuard keys;
     private final JobDesk desk;
 
-    JobsApi(KeyGuard keys, JobDesk desk) {
-        this.keys = keys;
+    JobsApi(JobDesk desk) {
         this.desk = desk;
     }
 
@@ -81,23 +77,17 @@ final class JobsApi {
 
     /** {@code GET /api/v1/jobs}. */
     void list(Context ctx) {
-        if (keys.admit(ctx, Scope.READ).isPresent()) {
-            SizingApi.json(
-                    ctx,
-                    200,
-                    new JobsAnswer(desk.list().stream().map(RevisionAnswer::of).toList()));
-        }
+        SizingApi.json(
+                ctx,
+                200,
+                new JobsAnswer(desk.list().stream().map(RevisionAnswer::of).toList()));
     }
 
     /** {@code POST /api/v1/jobs}. */
     void create(Context ctx) {
-        Optional<ApiKey> key = keys.admit(ctx, Scope.WRITE);
-        if (key.isEmpty()) {
-            return;
-        }
         Optional<JobBody> body = body(ctx);
         if (body.isPresent()) {
-            Job job = desk.create(body.get().name(), body.get().survey(), change(key.get()));
+            Job job = desk.create(body.get().name(), body.get().survey(), change(ctx));
             ctx.header("Location", "/api/v1/jobs/" + job.id());
             answer(ctx, 201, job);
         }
@@ -105,16 +95,11 @@ final class JobsApi {
 
     /** {@code GET /api/v1/jobs/{id}}. */
     void get(Context ctx) {
-        if (keys.admit(ctx, Scope.READ).isPresent()) {
-            answerOrMissing(ctx, desk.current(ctx.pathParam("id")));
-        }
+        answerOrMissing(ctx, desk.current(ctx.pathParam("id")));
     }
 
     /** {@code GET /api/v1/jobs/{id}/revisions}. */
     void revisions(Context ctx) {
-        if (keys.admit(ctx, Scope.READ).isEmpty()) {
-            return;
-        }
         List<RevisionAnswer> revisions = desk.revisions(ctx.pathParam("id")).stream()
                 .map(RevisionAnswer::of)
                 .toList();
@@ -127,9 +112,6 @@ final class JobsApi {
 
     /** {@code GET /api/v1/jobs/{id}/revisions/{n}}. */
     void revision(Context ctx) {
-        if (keys.admit(ctx, Scope.READ).isEmpty()) {
-            return;
-        }
         OptionalLong number = number(ctx.pathParam("n"));
         answerOrMissing(
                 ctx, number.isEmpty() ? Optional.empty() : desk.revision(ctx.pathParam("id"), number.getAsLong()));
@@ -137,9 +119,6 @@ final class JobsApi {
 
     /** {@code GET /api/v1/jobs/{id}/sizing}: of the newest revision. */
     void sizing(Context ctx) {
-        if (keys.admit(ctx, Scope.READ).isEmpty()) {
-            return;
-        }
         Optional<Job> job = desk.current(ctx.pathParam("id"));
         if (job.isEmpty()) {
             missing(ctx);
@@ -153,10 +132,6 @@ final class JobsApi {
 
     /** {@code PUT /api/v1/jobs/{id}} with If-Match. */
     void put(Context ctx) {
-        Optional<ApiKey> key = keys.admit(ctx, Scope.WRITE);
-        if (key.isEmpty()) {
-            return;
-        }
         String id = ctx.pathParam("id");
         if (desk.revisions(id).isEmpty()) {
             missing(ctx);
@@ -182,7 +157,7 @@ final class JobsApi {
             return;
         }
         Saving saving = desk.save(
-                id, expected.getAsLong(), body.get().name(), body.get().survey(), change(key.get()));
+                id, expected.getAsLong(), body.get().name(), body.get().survey(), change(ctx));
         if (saving instanceof Saving.Saved saved) {
             answer(ctx, 200, saved.job());
         } else if (saving instanceof Saving.Stale stale) {
@@ -202,8 +177,8 @@ final class JobsApi {
                 "It is at revision " + current + " now. Fetch it, take its changes in, and send yours again.");
     }
 
-    private static Change change(ApiKey key) {
-        return Change.by("key " + key.name());
+    private static Change change(Context ctx) {
+        return Change.by("key " + KeyGuard.key(ctx).name());
     }
 
     private static String tag(long revision) {

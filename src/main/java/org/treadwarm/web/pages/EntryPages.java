@@ -2,6 +2,7 @@ package org.treadwarm.web.pages;
 
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -49,18 +50,23 @@ final class EntryPages {
 
     void signIn(Context ctx) {
         String name = text(ctx, "name");
-        SignIn result = store.people().signIn(name, text(ctx, "password"));
+        SignIn result = store.people().signIn(name, text(ctx, "password"), visitors.address(ctx));
         if (result instanceof SignIn.SignedIn signedIn) {
             visitors.begin(ctx, store.sessions().start(signedIn.person()));
             String back = text(ctx, "back");
             ctx.redirect(isLocal(back) ? back : "/jobs", HttpStatus.SEE_OTHER);
         } else if (result instanceof SignIn.Wait wait) {
-            long seconds = Math.max(1, wait.remaining().toSeconds());
-            ctx.header("Retry-After", Long.toString(seconds));
-            signInForm(ctx, 429, name, "Too many tries. Wait " + seconds + " seconds, then try again.");
+            signInForm(ctx, 429, name, wait(ctx, wait.remaining()));
         } else {
             signInForm(ctx, 422, name, "The name or the password is not right.");
         }
+    }
+
+    /** Tells the browser, and in words, how long to wait. */
+    static String wait(Context ctx, Duration remaining) {
+        long seconds = Math.max(1, remaining.plusMillis(999).toSeconds());
+        ctx.header("Retry-After", Long.toString(seconds));
+        return "Too many tries. Wait " + (seconds == 1 ? "a second" : seconds + " seconds") + ", then try again.";
     }
 
     void signOut(Context ctx) {

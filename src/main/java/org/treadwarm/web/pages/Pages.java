@@ -4,16 +4,22 @@ import io.javalin.config.RoutesConfig;
 import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import io.javalin.http.HttpStatus;
-import java.net.URLEncoder;
-import java.nio.charset.StandardCharsets;
+import java.time.Clock;
 import java.util.Map;
 import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.store.Role;
 import org.treadwarm.store.Store;
+import org.treadwarm.web.security.Access;
 import org.treadwarm.web.security.Visitors;
 
-/** The routes of the pages. All but the way in need a session; every form carries its secret. */
+/** The routes of the pages, each with who may use it; every form carries its secret. */
 public final class Pages {
     private final Visitors visitors;
+    private final LinkPages links;
+    private final AccountPages account;
+    private final PeoplePages people;
+    private final KeyPages keys;
+    private final AuditPages audit;
     private final View view;
     private final EntryPages entry;
     private final JobPages jobs;
@@ -27,32 +33,59 @@ public final class Pages {
         this.entry = new EntryPages(store, visitors, view);
         this.jobs = new JobPages(desk, visitors, view);
         this.parts = new PartPages(desk, visitors, view);
+        this.links = new LinkPages(store, visitors, view);
+        this.account = new AccountPages(store, visitors, view);
+        this.people = new PeoplePages(store, visitors, view);
+        this.keys = new KeyPages(store, visitors, view, Clock.systemUTC());
+        this.audit = new AuditPages(store, view);
         this.quick = new QuickPages(desk, visitors, view);
     }
 
     /** Adds the routes. */
     public void routes(RoutesConfig routes) {
-        routes.get("/sign-in", entry::signInForm);
-        routes.post("/sign-in", form(entry::signIn));
-        routes.post("/sign-out", form(entry::signOut));
-        routes.get("/owner/{token}", entry::ownerForm);
-        routes.post("/owner/{token}", form(entry::becomeOwner));
-        routes.get("/", ctx -> ctx.redirect("/jobs", HttpStatus.SEE_OTHER));
-        routes.get("/jobs", member(jobs::list));
-        routes.post("/jobs", member(form(jobs::create)));
-        routes.get("/jobs/{job}", member(jobs::show));
-        routes.post("/jobs/{job}", member(form(jobs::change)));
-        routes.get("/jobs/{job}/{part}/{name}", member(parts::show));
-        routes.post("/jobs/{job}/{part}/{name}", member(form(parts::save)));
-        routes.post("/jobs/{job}/{part}/{name}/preview", member(form(parts::preview)));
-        routes.get("/one-room", member(quick::show));
-        routes.post("/one-room", member(form(quick::change)));
-        routes.post("/one-room/preview", member(form(quick::preview)));
+        routes.get("/sign-in", entry::signInForm, Access.ANYBODY);
+        routes.post("/sign-in", form(entry::signIn), Access.ANYBODY);
+        routes.post("/sign-out", form(entry::signOut), Access.ANYBODY);
+        routes.get("/owner/{token}", entry::ownerForm, Access.ANYBODY);
+        routes.post("/owner/{token}", form(entry::becomeOwner), Access.ANYBODY);
+        routes.get("/link/{token}", links::show, Access.ANYBODY);
+        routes.post("/link/{token}", form(links::use), Access.ANYBODY);
+        routes.get("/", ctx -> ctx.redirect("/jobs", HttpStatus.SEE_OTHER), Access.ANYBODY);
+        routes.get("/jobs", jobs::list, Access.SURVEYOR);
+        routes.post("/jobs", form(jobs::create), Access.ESTIMATOR);
+        routes.get("/jobs/{job}", jobs::show, Access.SURVEYOR);
+        routes.post("/jobs/{job}", form(jobs::change), Access.SURVEYOR);
+        routes.get("/jobs/{job}/{part}/{name}", parts::show, Access.SURVEYOR);
+        routes.post("/jobs/{job}/{part}/{name}", form(parts::save), Access.SURVEYOR);
+        routes.post("/jobs/{job}/{part}/{name}/preview", form(parts::preview), Access.SURVEYOR);
+        routes.get("/one-room", quick::show, Access.SURVEYOR);
+        routes.post("/one-room", form(quick::change), Access.SURVEYOR);
+        routes.post("/one-room/preview", form(quick::preview), Access.SURVEYOR);
+        routes.post("/one-room/keep", form(quick::keep), Access.ESTIMATOR);
         routes.get(
                 "/materials",
-                member(ctx -> view.show(ctx, 200, "materials", tables.materials(ctx.queryParam("find")))));
-        routes.get("/reading-help", member(ctx -> view.show(ctx, 200, "reading-help", tables.readingHelp())));
-        routes.get("/method", member(ctx -> view.show(ctx, 200, "method", tables.method())));
+                ctx -> view.show(ctx, 200, "materials", tables.materials(ctx.queryParam("find"))),
+                Access.SURVEYOR);
+        routes.get("/reading-help", ctx -> view.show(ctx, 200, "reading-help", tables.readingHelp()), Access.SURVEYOR);
+        routes.get("/method", ctx -> view.show(ctx, 200, "method", tables.method()), Access.SURVEYOR);
+        service(routes);
+    }
+
+    private void service(RoutesConfig routes) {
+        routes.get("/account", account::show, Access.SURVEYOR);
+        routes.post("/account/password", form(account::changePassword), Access.SURVEYOR);
+        routes.post("/account/sessions/{session}/end", form(account::endSession), Access.SURVEYOR);
+        routes.post("/account/sessions/end", form(account::endAllSessions), Access.SURVEYOR);
+        routes.get("/people", people::list, Access.OWNER);
+        routes.post("/people/invitations", form(people::invite), Access.OWNER);
+        routes.post("/people/links/{link}/revoke", form(people::revoke), Access.OWNER);
+        routes.post("/people/{person}/role", form(people::changeRole), Access.OWNER);
+        routes.post("/people/{person}/password", form(people::resetPassword), Access.OWNER);
+        routes.post("/people/{person}/close", form(people::close), Access.OWNER);
+        routes.get("/keys", keys::list, Access.OWNER);
+        routes.post("/keys", form(keys::create), Access.OWNER);
+        routes.post("/keys/{key}/revoke", form(keys::revoke), Access.OWNER);
+        routes.get("/audit", audit::list, Access.OWNER);
     }
 
     /** Shows a fault as a page. */
@@ -60,15 +93,10 @@ public final class Pages {
         view.show(ctx, status, "fault", Map.of("title", title, "status", status));
     }
 
-    private Handler member(Handler handler) {
-        return ctx -> {
-            if (visitors.session(ctx).isEmpty()) {
-                String back = ctx.method().toString().equals("GET") ? ctx.path() : "/jobs";
-                ctx.redirect("/sign-in?back=" + URLEncoder.encode(back, StandardCharsets.UTF_8), HttpStatus.SEE_OTHER);
-            } else {
-                handler.handle(ctx);
-            }
-        };
+    /** Tells somebody that this needs another role. */
+    public void refuseRole(Context ctx, Role least) {
+        String title = "This needs the role " + least.text();
+        view.show(ctx, 403, "fault", Map.of("title", title, "status", 403, "role", true));
     }
 
     private Handler form(Handler handler) {

@@ -115,21 +115,31 @@ final class QuickPages {
         view.show(ctx, 200, "answer", model);
     }
 
+    /** Makes the room a job. */
+    void keep(Context ctx) {
+        Optional<ObjectNode> read = document(ctx);
+        if (read.isEmpty()) {
+            incomplete(ctx);
+            return;
+        }
+        String name = read.get().at("/rooms/0/name").asText().strip();
+        String who = visitors.session(ctx).orElseThrow().person().name();
+        Job job = desk.create(name.isEmpty() ? "One room" : name, read.get(), Change.by(who));
+        ctx.redirect("/jobs/" + job.id(), HttpStatus.SEE_OTHER);
+    }
+
+    private void incomplete(Context ctx) {
+        show(ctx, 422, start(), "The form came back incomplete, so the example stands here again.");
+    }
+
     void change(Context ctx) {
         Optional<ObjectNode> read = document(ctx);
         if (read.isEmpty()) {
-            show(ctx, 422, start(), "The form came back incomplete, so the example stands here again.");
+            incomplete(ctx);
             return;
         }
         ObjectNode document = read.get();
         String action = EntryPages.text(ctx, "do");
-        if (action.equals("keep")) {
-            String name = document.at("/rooms/0/name").asText().strip();
-            String who = visitors.session(ctx).orElseThrow().person().name();
-            Job job = desk.create(name.isEmpty() ? "One room" : name, document, Change.by(who));
-            ctx.redirect("/jobs/" + job.id(), HttpStatus.SEE_OTHER);
-            return;
-        }
         part(document).act(document, action, "");
         if (action.startsWith("assume:" + SITE + "/")) {
             new FormData()

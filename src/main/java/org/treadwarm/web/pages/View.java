@@ -7,6 +7,7 @@ import java.util.Map;
 import org.thymeleaf.TemplateEngine;
 import org.thymeleaf.templatemode.TemplateMode;
 import org.thymeleaf.templateresolver.ClassLoaderTemplateResolver;
+import org.treadwarm.store.Role;
 import org.treadwarm.store.Session;
 import org.treadwarm.web.security.Visitors;
 
@@ -31,9 +32,17 @@ final class View {
         Map<String, Object> all = new HashMap<>(model);
         all.put("csrf", visitors.formSecret(ctx));
         all.put("person", visitors.session(ctx).map(Session::person).orElse(null));
+        all.put("isOwner", may(ctx, Role.OWNER));
+        all.put("mayStartJobs", may(ctx, Role.ESTIMATOR));
         all.put("path", ctx.path());
         ctx.status(status);
         ctx.contentType("text/html; charset=utf-8");
         ctx.result(engine.process(template, new org.thymeleaf.context.Context(Locale.ENGLISH, all)));
+    }
+
+    private boolean may(Context ctx, Role least) {
+        return visitors.session(ctx)
+                .filter(session -> session.person().role().allows(least))
+                .isPresent();
     }
 }

@@ -2,6 +2,8 @@ package org.treadwarm.web.security;
 
 import io.javalin.http.Context;
 import java.time.Duration;
+import java.time.Instant;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.ConcurrentMap;
@@ -14,6 +16,8 @@ import org.treadwarm.web.Problems;
 public final class KeyGuard {
     private static final long REMEMBERED = Duration.ofSeconds(3).toNanos();
     private static final int MOST_REMEMBERED = 1000;
+    private static final int LONGEST_TOKEN = 200;
+    private static final String KEY = "key";
 
     private final ApiKeys keys;
     private final ConcurrentMap<String, Known> known = new ConcurrentHashMap<>();
@@ -24,36 +28,57 @@ public final class KeyGuard {
         this.keys = keys;
     }
 
-    /**
-     * The key of a request that may do what needs a scope.
-     *
-     * @return empty when the refusal has been written already
-     */
-    public Optional<ApiKey> admit(Context ctx, Scope needed) {
+    /** Whether the request has a key that may do what needs a scope; if not, the refusal is written. */
+    boolean admit(Context ctx, Scope needed) {
         String header = ctx.header("Authorization");
         if (header == null || !header.regionMatches(true, 0, "Bearer ", 0, 7)) {
-            refuse(ctx, "An API key is needed: send it as \"Authorization: Bearer tw_...\".");
-            return Optional.empty();
+            refuse(ctx, "key", "An API key is needed", "Send it as \"Authorization: Bearer tw_...\".");
+            return false;
         }
-        Optional<ApiKey> key = find(header.substring(7).strip());
+        String token = header.substring(7).strip();
+        Optional<ApiKey> key = find(token);
         if (key.isEmpty()) {
-            refuse(ctx, "This API key is not known here, or was revoked.");
-        } else if (!key.get().scope().allows(needed)) {
+            refuse(ctx, token);
+            return false;
+        }
+        if (!key.get().scope().allows(needed)) {
             Problems.plain(
                     ctx,
                     403,
                     "scope",
                     "The key's scope does not reach so far",
-                    "This needs the scope " + needed.name().toLowerCase(java.util.Locale.ROOT) + "; the key has "
-                            + key.get().scope().name().toLowerCase(java.util.Locale.ROOT) + ".");
-            return Optional.empty();
+                    "This needs the scope " + needed.text() + "; the key has "
+                            + key.get().scope().text() + ".");
+            return false;
         }
-        return key;
+        ctx.attribute(KEY, key.get());
+        return true;
     }
 
-    private static void refuse(Context ctx, String detail) {
+    /** The key with which a request was let in to a route that needs one. */
+    public static ApiKey key(Context ctx) {
+        return Objects.requireNonNull(ctx.attribute(KEY), "the route is open to requests without a key");
+    }
+
+    private void refuse(Context ctx, String token) {
+        Optional<ApiKey> dead = token.length() > LONGEST_TOKEN ? Optional.empty() : keys.known(token);
+        if (dead.isEmpty()) {
+            refuse(ctx, "key", "An API key is needed", "This API key is not known here.");
+        } else if (dead.get().revokedAt().isPresent()) {
+            refuse(
+                    ctx,
+                    "key-revoked",
+                    "The API key was revoked",
+                    "It was revoked at " + dead.get().revokedAt().get() + ".");
+        } else {
+            String end = dead.get().expiresAt().map(Instant::toString).orElse("an unknown time");
+            refuse(ctx, "key-expired", "The API key has expired", "It worked until " + end + ".");
+        }
+    }
+
+    private static void refuse(Context ctx, String kind, String title, String detail) {
         ctx.header("WWW-Authenticate", "Bearer realm=\"treadwarm\"");
-        Problems.plain(ctx, 401, "key", "An API key is needed", detail);
+        Problems.plain(ctx, 401, kind, title, detail);
     }
 
     private Optional<ApiKey> find(String token) {
@@ -62,7 +87,7 @@ public final class KeyGuard {
         if (remembered != null && now - remembered.since() < REMEMBERED) {
             return Optional.of(remembered.key());
         }
-        Optional<ApiKey> found = token.length() > 200 ? Optional.empty() : keys.find(token);
+        Optional<ApiKey> found = token.length() > LONGEST_TOKEN ? Optional.empty() : keys.find(token);
         if (found.isPresent()) {
             if (known.size() >= MOST_REMEMBERED) {
                 known.clear();

@@ -27,10 +27,26 @@ public final class Visitors {
 
     private final Sessions sessions;
     private final boolean secure;
+    private final boolean behindProxy;
 
-    public Visitors(Sessions sessions, boolean secure) {
+    /**
+     * @param secure whether browsers speak TLS to us, by way of a proxy
+     * @param behindProxy whether a proxy of ours says where requests come from
+     */
+    public Visitors(Sessions sessions, boolean secure, boolean behindProxy) {
         this.sessions = sessions;
         this.secure = secure;
+        this.behindProxy = behindProxy;
+    }
+
+    /** The address a visitor comes from, in a form that visitors cannot choose freely. */
+    public String address(Context ctx) {
+        return ClientAddress.of(ctx, behindProxy);
+    }
+
+    /** Our own address as the visitor's browser writes it, without a path. */
+    public String origin(Context ctx) {
+        return (secure ? "https://" : "http://") + ctx.header("Host");
     }
 
     /** The visitor's session, if signed in. */
