@@ -27,8 +27,11 @@ public final class Server implements AutoCloseable {
 
     private final Javalin javalin;
 
-    private Server(Javalin javalin) {
+    private final Computations computations;
+
+    private Server(Javalin javalin, Computations computations) {
         this.javalin = javalin;
+        this.computations = computations;
     }
 
     /**
@@ -41,7 +44,8 @@ public final class Server implements AutoCloseable {
         Visitors visitors = new Visitors(store.sessions(), settings.behindTls());
         JobDesk desk = new JobDesk(store.jobs());
         Api api = new Api(new KeyGuard(store.keys()), desk);
-        Pages pages = new Pages(store, desk, visitors);
+        Computations computations = new Computations();
+        Pages pages = new Pages(store, desk, visitors, computations);
         Javalin javalin = Javalin.create(config -> {
             basics(config);
             config.routes.before(ctx -> {
@@ -56,7 +60,7 @@ public final class Server implements AutoCloseable {
             pages.routes(config.routes);
             faults(config, pages);
         });
-        return new Server(javalin.start(settings.bind(), settings.port()));
+        return new Server(javalin.start(settings.bind(), settings.port()), computations);
     }
 
     /** The port it listens on. */
@@ -67,6 +71,7 @@ public final class Server implements AutoCloseable {
     /** Stops after answering what has begun. */
     @Override
     public void close() {
+        computations.close();
         javalin.stop();
     }
 

@@ -15,11 +15,13 @@ public final class Api {
 
     private final SizingApi sizing;
     private final WarmUpApi warmUps;
+    private final WallFootApi wallFeet;
     private final JobsApi jobs;
 
     public Api(KeyGuard keys, JobDesk desk) {
         this.sizing = new SizingApi(keys);
         this.warmUps = new WarmUpApi(keys);
+        this.wallFeet = new WallFootApi(keys);
         this.jobs = new JobsApi(keys, desk);
     }
 
@@ -45,6 +47,7 @@ public final class Api {
         routes.post(ROOT + "/sizings", sizing::size);
         routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate);
         routes.post(ROOT + "/sections", sizing::section);
+        routes.post(ROOT + "/wall-feet", wallFeet::answer);
         routes.post(ROOT + "/warmups", warmUps::answer);
         get(routes, ROOT + "/materials", sizing::materials);
         get(routes, ROOT + "/jobs", jobs::list);

@@ -9,6 +9,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.Map;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.store.Store;
+import org.treadwarm.web.Computations;
 import org.treadwarm.web.security.Visitors;
 
 /** The routes of the pages. All but the way in need a session; every form carries its secret. */
@@ -19,15 +20,19 @@ public final class Pages {
     private final JobPages jobs;
     private final PartPages parts;
     private final QuickPages quick;
+    private final ComputationPages computing;
+    private final WallFootPages wallFeet;
     private final TablePages tables = new TablePages();
 
-    public Pages(Store store, JobDesk desk, Visitors visitors) {
+    public Pages(Store store, JobDesk desk, Visitors visitors, Computations computations) {
         this.visitors = visitors;
         this.view = new View(visitors);
         this.entry = new EntryPages(store, visitors, view);
         this.jobs = new JobPages(desk, visitors, view);
         this.parts = new PartPages(desk, visitors, view);
         this.quick = new QuickPages(desk, visitors, view);
+        this.computing = new ComputationPages(computations, view);
+        this.wallFeet = new WallFootPages(desk, visitors, view, computations, computing);
     }
 
     /** Adds the routes. */
@@ -45,6 +50,12 @@ public final class Pages {
         routes.get("/jobs/{job}/{part}/{name}", member(parts::show));
         routes.post("/jobs/{job}/{part}/{name}", member(form(parts::save)));
         routes.post("/jobs/{job}/{part}/{name}/preview", member(form(parts::preview)));
+        routes.get("/jobs/{job}/rooms/{name}/wall-foot/{junction}", member(wallFeet::show));
+        routes.post("/jobs/{job}/rooms/{name}/wall-foot/{junction}", member(form(wallFeet::change)));
+        routes.get("/jobs/{job}/rooms/{name}/wall-foot/{junction}/{id}", member(wallFeet::result));
+        routes.post("/jobs/{job}/rooms/{name}/wall-foot/{junction}/{id}", member(form(wallFeet::store)));
+        routes.get("/computations/{id}", member(computing::show));
+        routes.post("/computations/{id}", member(form(computing::cancel)));
         routes.get("/one-room", member(quick::show));
         routes.post("/one-room", member(form(quick::change)));
         routes.post("/one-room/preview", member(form(quick::preview)));
