@@ -22,6 +22,8 @@ public final class Pages {
     private final QuickPages quick;
     private final ComputationPages computing;
     private final WallFootPages wallFeet;
+    private final MethodPage method;
+    private final SolvingAhead ahead;
     private final TablePages tables = new TablePages();
 
     public Pages(Store store, JobDesk desk, Visitors visitors, Computations computations) {
@@ -32,6 +34,8 @@ public final class Pages {
         this.parts = new PartPages(desk, visitors, view);
         this.quick = new QuickPages(desk, visitors, view);
         this.computing = new ComputationPages(computations, view);
+        this.method = new MethodPage(computations, view);
+        this.ahead = new SolvingAhead(desk, computations);
         this.wallFeet = new WallFootPages(desk, visitors, view, computations, computing);
     }
 
@@ -45,9 +49,9 @@ public final class Pages {
         routes.get("/", ctx -> ctx.redirect("/jobs", HttpStatus.SEE_OTHER));
         routes.get("/jobs", member(jobs::list));
         routes.post("/jobs", member(form(jobs::create)));
-        routes.get("/jobs/{job}", member(jobs::show));
+        routes.get("/jobs/{job}", member(ahead.before(jobs::show)));
         routes.post("/jobs/{job}", member(form(jobs::change)));
-        routes.get("/jobs/{job}/{part}/{name}", member(parts::show));
+        routes.get("/jobs/{job}/{part}/{name}", member(ahead.before(parts::show)));
         routes.post("/jobs/{job}/{part}/{name}", member(form(parts::save)));
         routes.post("/jobs/{job}/{part}/{name}/preview", member(form(parts::preview)));
         routes.get("/jobs/{job}/rooms/{name}/wall-foot/{junction}", member(wallFeet::show));
@@ -63,7 +67,8 @@ public final class Pages {
                 "/materials",
                 member(ctx -> view.show(ctx, 200, "materials", tables.materials(ctx.queryParam("find")))));
         routes.get("/reading-help", member(ctx -> view.show(ctx, 200, "reading-help", tables.readingHelp())));
-        routes.get("/method", member(ctx -> view.show(ctx, 200, "method", tables.method())));
+        routes.get("/method", member(method::show));
+        routes.post("/method", member(form(method::change)));
     }
 
     /** Shows a fault as a page. */
