@@ -1,9 +1,13 @@
 package org.treadwarm.checks;
 
+import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.concurrent.CancellationException;
+import java.util.function.BooleanSupplier;
+import java.util.function.DoubleConsumer;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.treadwarm.checks.CheckCase.Expected;
@@ -20,9 +24,28 @@ public final class PublishedChecks {
      * @throws IllegalStateException when a case has no computation, or a computation no case
      */
     public static List<CheckedValue> all() {
+        return all(() -> false, share -> {});
+    }
+
+    /**
+     * The same, with a way to stop between two cases.
+     *
+     * @param stopped asked before every case whether to give up
+     * @param progress told after every case what share is done
+     * @throws CancellationException when asked to give up
+     */
+    public static List<CheckedValue> all(BooleanSupplier stopped, DoubleConsumer progress) {
         List<CheckCase> cases = CASES.values().stream().flatMap(List::stream).toList();
         Bindings.check(cases);
-        return cases.stream().flatMap(PublishedChecks::values).toList();
+        List<CheckedValue> values = new ArrayList<>();
+        for (int i = 0; i < cases.size(); i++) {
+            if (stopped.getAsBoolean()) {
+                throw new CancellationException("stopped while checking published values");
+            }
+            values(cases.get(i)).forEach(values::add);
+            progress.accept((i + 1.0) / cases.size());
+        }
+        return List.copyOf(values);
     }
 
     /** The cases of a set. */

@@ -324,7 +324,7 @@ final class Binder {
                 pointer + "/basis",
                 Document.shown(basis),
                 "this is no basis of a reading",
-                "taped, drawing, told or assumed");
+                "taped, drawing, told, assumed or solved");
         return value;
     }
 

@@ -8,6 +8,7 @@ import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Rules;
 import org.treadwarm.survey.SectionQuestion;
 import org.treadwarm.survey.Survey;
+import org.treadwarm.survey.WallFootQuestion;
 
 /** The door for documents: a tree in, a survey out, or every problem it has. */
 public final class Intake {
@@ -57,6 +58,16 @@ public final class Intake {
     public static Outcome<SectionQuestion> section(JsonNode tree) {
         Findings findings = new Findings();
         SectionQuestion question = (SectionQuestion) new Binder(findings).bind(tree, SectionQuestion.class, "");
+        if (question != null) {
+            question.check(findings);
+        }
+        return findings.isEmpty() ? new Outcome.Accepted<>(question) : new Outcome.Refused<>(findings.all());
+    }
+
+    /** Reads one wall foot. */
+    public static Outcome<WallFootQuestion> wallFoot(JsonNode tree) {
+        Findings findings = new Findings();
+        WallFootQuestion question = (WallFootQuestion) new Binder(findings).bind(tree, WallFootQuestion.class, "");
         if (question != null) {
             question.check(findings);
         }

@@ -60,6 +60,11 @@ public final class JobDesk {
                 : new Saving.Missing();
     }
 
+    /** The document of a job's newest revision, read but not judged. */
+    public Optional<JsonNode> document(String id) {
+        return jobs.current(id).map(revision -> Pieces.survey(revision.content().pieces()));
+    }
+
     /** The newest revision of a job. */
     public Optional<Job> current(String id) {
         return jobs.current(id).map(JobDesk::job);

@@ -50,7 +50,7 @@ final class Evaluation {
     final double[] reheat;
     final FloorEvaluation[] floors;
     final Network network;
-    final Sections sections = new Sections();
+    final Sections sections;
     double[] in;
     double outdoor;
     double residual;
@@ -60,6 +60,11 @@ final class Evaluation {
     private final double[] solved;
 
     Evaluation(Plan plan) {
+        this(plan, new Sections());
+    }
+
+    Evaluation(Plan plan, Sections sections) {
+        this.sections = sections;
         this.plan = plan;
         layerResistance = new double[plan.layers];
         bridgeResistance = new double[plan.layers];

@@ -3,6 +3,7 @@ package org.treadwarm.sizing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.BooleanSupplier;
 import org.treadwarm.physics.section.Condition;
 import org.treadwarm.physics.section.FloorHeater;
 import org.treadwarm.physics.section.FloorHeater.HeatingCable;
@@ -40,10 +41,11 @@ record SectionGeometry(double spacing, List<FloorLayer> layers, FloorHeater heat
      *
      * @throws IllegalArgumentException if it cannot be built
      * @throws IllegalStateException if its error does not fall within the cells allowed
+     * @throws java.util.concurrent.CancellationException when asked to give up
      */
-    FloorResponse solve() {
+    FloorResponse solve(BooleanSupplier stopped) {
         Condition.Film film = new Condition.Film(0, coefficientBelow);
-        return FloorResponse.of(new FloorSection(spacing, layers, heater, film, film), () -> false);
+        return FloorResponse.of(new FloorSection(spacing, layers, heater, film, film), stopped);
     }
 
     /** What was made of a floor: its geometry, or why there is none. */

@@ -1,8 +1,13 @@
 package org.treadwarm.sizing;
 
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.concurrent.CancellationException;
+import java.util.function.BooleanSupplier;
 import org.treadwarm.physics.section.FloorResponse;
 
 /**
@@ -16,45 +21,97 @@ final class Sections {
     /** The most floors that one sizing solves anew, so that its time is bounded. */
     static final int MOST_NEW = 100;
 
-    private static final Map<SectionGeometry, FloorResponse> KEPT = new LinkedHashMap<>(2 * MOST_KEPT, 0.75f, true) {
+    private static final Map<SectionGeometry, Tried> KEPT = new LinkedHashMap<>(2 * MOST_KEPT, 0.75f, true) {
         @Override
-        protected boolean removeEldestEntry(Map.Entry<SectionGeometry, FloorResponse> eldest) {
+        protected boolean removeEldestEntry(Map.Entry<SectionGeometry, Tried> eldest) {
             return size() > MOST_KEPT;
         }
     };
 
+    /** What solving a geometry came to: its response, or why there is none. */
+    private record Tried(Optional<FloorResponse> response, String whyNot) {}
+
+    private final boolean looking;
+    private final Set<SectionGeometry> met = new LinkedHashSet<>();
     private int solved;
     private int followed;
     private String whyNot = "";
 
+    Sections() {
+        this(false);
+    }
+
+    private Sections(boolean looking) {
+        this.looking = looking;
+    }
+
+    /** Solves nothing and follows nothing, but remembers what it was asked for. */
+    static Sections looking() {
+        return new Sections(true);
+    }
+
+    /** The geometries met that would have to be solved anew; none when there are more than can be remembered. */
+    List<SectionGeometry> unknown() {
+        synchronized (KEPT) {
+            return met.size() > MOST_KEPT
+                    ? List.of()
+                    : met.stream()
+                            .filter(geometry -> !KEPT.containsKey(geometry))
+                            .toList();
+        }
+    }
+
+    /**
+     * Solves a geometry and remembers what came of it.
+     *
+     * @throws java.util.concurrent.CancellationException when asked to give up; then nothing is remembered
+     */
+    static void solve(SectionGeometry geometry, BooleanSupplier stopped) {
+        remember(geometry, tried(geometry, stopped));
+    }
+
+    private static Tried tried(SectionGeometry geometry, BooleanSupplier stopped) {
+        try {
+            return new Tried(Optional.of(geometry.solve(stopped)), "");
+        } catch (CancellationException stop) {
+            throw stop;
+        } catch (IllegalArgumentException | IllegalStateException problem) {
+            return new Tried(Optional.empty(), problem.getMessage());
+        }
+    }
+
+    private static void remember(SectionGeometry geometry, Tried tried) {
+        synchronized (KEPT) {
+            KEPT.put(geometry, tried);
+        }
+    }
+
     /** The response of a geometry; empty when it cannot be had, and {@link #whyNot()} then says why. */
     Optional<FloorResponse> of(SectionGeometry geometry) {
+        if (looking) {
+            met.add(geometry);
+            return Optional.empty();
+        }
+        Tried tried;
         synchronized (KEPT) {
-            FloorResponse known = KEPT.get(geometry);
-            if (known != null) {
-                return Optional.of(known);
+            tried = KEPT.get(geometry);
+        }
+        if (tried == null) {
+            if (solved == MOST_NEW) {
+                whyNot = "one sizing solves at most " + MOST_NEW + " different floors";
+                return Optional.empty();
             }
+            solved++;
+            tried = tried(geometry, () -> false);
+            remember(geometry, tried);
         }
-        if (solved == MOST_NEW) {
-            whyNot = "one sizing solves at most " + MOST_NEW + " different floors";
-            return Optional.empty();
-        }
-        solved++;
-        try {
-            FloorResponse response = geometry.solve();
-            synchronized (KEPT) {
-                KEPT.put(geometry, response);
-            }
-            return Optional.of(response);
-        } catch (IllegalArgumentException | IllegalStateException problem) {
-            whyNot = problem.getMessage();
-            return Optional.empty();
-        }
+        whyNot = tried.whyNot();
+        return tried.response();
     }
 
     /** Whether this sizing may follow one more floor through time. */
     boolean mayFollow() {
-        return followed++ < MOST_NEW;
+        return !looking && followed++ < MOST_NEW;
     }
 
     String whyNot() {

@@ -7,7 +7,9 @@ public enum Basis {
     TAPED,
     DRAWING,
     TOLD,
-    ASSUMED;
+    ASSUMED,
+    /** Computed by this program from other readings. */
+    SOLVED;
 
     /** The word in the survey document. */
     public String word() {

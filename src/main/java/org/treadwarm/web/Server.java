@@ -33,8 +33,11 @@ public final class Server implements AutoCloseable {
 
     private final Javalin javalin;
 
-    private Server(Javalin javalin) {
+    private final Computations computations;
+
+    private Server(Javalin javalin, Computations computations) {
         this.javalin = javalin;
+        this.computations = computations;
     }
 
     /**
@@ -52,7 +55,8 @@ public final class Server implements AutoCloseable {
         Visitors visitors = new Visitors(store.sessions(), settings.behindTls(), settings.behindProxy());
         JobDesk desk = new JobDesk(store.jobs());
         Api api = new Api(desk);
-        Pages pages = new Pages(store, desk, visitors);
+        Computations computations = new Computations();
+        Pages pages = new Pages(store, desk, visitors, computations);
         Gate gate = new Gate(visitors, new KeyGuard(store.keys()), pages::refuseRole);
         Javalin javalin = Javalin.create(config -> {
             basics(config);
@@ -75,7 +79,7 @@ public final class Server implements AutoCloseable {
         for (Connector connector : javalin.jettyServer().server().getConnectors()) {
             ((AbstractConnector) connector).setIdleTimeout(idle.toMillis());
         }
-        return new Server(javalin);
+        return new Server(javalin, computations);
     }
 
     /** The port it listens on. */
@@ -91,6 +95,7 @@ public final class Server implements AutoCloseable {
     /** Stops after answering what has begun. */
     @Override
     public void close() {
+        computations.close();
         javalin.stop();
     }
 

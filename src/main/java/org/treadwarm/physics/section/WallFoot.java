@@ -61,13 +61,21 @@ public record WallFoot(
      * @param conductivity thickness over the resistance of the build-up without films, W/(m·K)
      * @param height from the heated plane to the cut, m; at least 1 m, and three thicknesses (ISO 10211:2017, 5.2.3, from memory)
      * @param foundation depth of its foot below the ground outside, m
+     * @param footConductivity of what stands under the wall, from the heated plane down, W/(m·K)
      */
-    public record Wall(double thickness, double conductivity, double height, double foundation) {
+    public record Wall(
+            double thickness, double conductivity, double height, double foundation, double footConductivity) {
+        /** The least height inside of a wall of this thickness, m. */
+        public static double leastHeight(double thickness) {
+            return Math.max(1, 3 * thickness);
+        }
+
         public Wall {
             Require.positive("thickness of the wall, m", thickness);
             Require.positive("conductivity of the wall, W/(m·K)", conductivity);
+            Require.positive("conductivity of the wall's foot, W/(m·K)", footConductivity);
             Require.that(
-                    height >= Math.max(1, 3 * thickness),
+                    height >= leastHeight(thickness),
                     "the wall must reach 1 m and three thicknesses above the heated plane, not " + height + " m");
             Require.notNegative("depth of the foundation, m", foundation);
         }
@@ -94,10 +102,19 @@ public record WallFoot(
      * @param stopped asked at every step of the solver whether to give up
      */
     public WallFootCoupling solve(BooleanSupplier stopped) {
+        return solve(slabCoefficient(stopped), stopped);
+    }
+
+    /** Transmittance of the slab with its ground, computed in section without the wall and its edge insulation, W/(m²·K). */
+    public double slabCoefficient(BooleanSupplier stopped) {
+        return GroundStrip.transmittance(
+                halfWidth, wall.thickness(), soilConductivity, slabResistance(), outsideFilm, stopped);
+    }
+
+    /** The coupling with a slab coefficient that is known already, as it does not depend on the edge insulation. */
+    public WallFootCoupling solve(double slabCoefficient, BooleanSupplier stopped) {
         Refinement.Answer coupling =
                 Refinement.of(section(), grid(), field -> field.heatToAir(0), CORNER_ORDER, stopped);
-        double slabCoefficient = GroundStrip.transmittance(
-                halfWidth, wall.thickness(), soilConductivity, slabResistance(), outsideFilm, stopped);
         return new WallFootCoupling(
                 coupling.value(),
                 slabCoefficient,
@@ -142,7 +159,10 @@ public record WallFoot(
         }
         edge.ifPresent(strip -> blocks.add(new Block(
                 halfWidth - strip.thickness(), halfWidth, plane() - strip.depth(), plane(), strip.conductivity())));
-        blocks.add(new Block(halfWidth, outer, ground() - wall.foundation(), top(), wall.conductivity()));
+        blocks.add(new Block(halfWidth, outer, plane(), top(), wall.conductivity()));
+        if (heatedPlane + wall.foundation() > 0) {
+            blocks.add(new Block(halfWidth, outer, ground() - wall.foundation(), plane(), wall.footConductivity()));
+        }
         List<Air> airs = new ArrayList<>();
         airs.add(new Air(outer, width(), ground(), top(), 0, outsideFilm, outsideFilm));
         airs.add(new Air(0, halfWidth, plane(), top(), 1, 0, insideFilm));

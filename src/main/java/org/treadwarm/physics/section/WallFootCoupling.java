@@ -28,6 +28,16 @@ public record WallFootCoupling(
      * @param slab the slab coefficient that the loss of the floor is computed with, W/(m²·K)
      */
     public double psi(double slab) {
-        return coupling - slab * halfWidth - wallCoefficient * wallHeight;
+        return psi(slab, wallHeight);
+    }
+
+    /**
+     * The same where the loss of the wall is computed with less of it than the section holds.
+     *
+     * @param slab the slab coefficient that the loss of the floor is computed with, W/(m²·K)
+     * @param height of wall whose loss is computed with its own coefficient, m
+     */
+    public double psi(double slab, double height) {
+        return coupling - slab * halfWidth - wallCoefficient * height;
     }
 }

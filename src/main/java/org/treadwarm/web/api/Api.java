@@ -15,11 +15,13 @@ public final class Api {
 
     private final SizingApi sizing;
     private final WarmUpApi warmUps;
+    private final WallFootApi wallFeet;
     private final JobsApi jobs;
 
     public Api(JobDesk desk) {
         this.sizing = new SizingApi();
         this.warmUps = new WarmUpApi();
+        this.wallFeet = new WallFootApi();
         this.jobs = new JobsApi(desk);
     }
 
@@ -45,6 +47,7 @@ public final class Api {
         routes.post(ROOT + "/sizings", sizing::size, Access.SIZE);
         routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate, Access.SIZE);
         routes.post(ROOT + "/sections", sizing::section, Access.SIZE);
+        routes.post(ROOT + "/wall-feet", wallFeet::answer, Access.SIZE);
         routes.post(ROOT + "/warmups", warmUps::answer, Access.SIZE);
         get(routes, ROOT + "/materials", sizing::materials, Access.SIZE);
         get(routes, ROOT + "/jobs", jobs::list, Access.READ);

@@ -11,9 +11,11 @@ import org.treadwarm.intake.WarmUpQuestion;
 import org.treadwarm.sizing.AssemblyEvaluation;
 import org.treadwarm.sizing.SectionEvaluation;
 import org.treadwarm.sizing.Sizing;
+import org.treadwarm.sizing.WallFootEvaluation;
 import org.treadwarm.sizing.WarmUpEvaluation;
 import org.treadwarm.survey.SectionQuestion;
 import org.treadwarm.survey.Survey;
+import org.treadwarm.survey.WallFootQuestion;
 import org.treadwarm.tables.Material;
 import org.treadwarm.wire.ProblemDocument;
 import org.treadwarm.wire.WorkingAnswer;
@@ -35,6 +37,7 @@ final class OpenApi {
             new SurveySchemas(schemas).add(AssemblyQuestion.class);
             new SurveySchemas(schemas).add(SectionQuestion.class);
             new SurveySchemas(schemas).add(WarmUpQuestion.class);
+            new SurveySchemas(schemas).add(WallFootQuestion.class);
             AnswerSchemas answers = new AnswerSchemas(schemas);
             answers.add(Sizing.class);
             answers.add(WorkingAnswer.class);
@@ -42,6 +45,7 @@ final class OpenApi {
             answers.add(AssemblyEvaluation.class);
             answers.add(SectionEvaluation.class);
             answers.add(WarmUpEvaluation.class);
+            answers.add(WallFootEvaluation.class);
             answers.add(ProblemDocument.class);
             answers.add(Material.class);
             answers.add(JobsApi.JobAnswer.class);

@@ -101,6 +101,17 @@ final class Forms {
         return view;
     }
 
+    /** Some fields of the whole document, in the order of its shape; the other problems in it are left to the caller. */
+    List<FieldView> fields(Class<? extends Record> type, Set<String> names, String owner) {
+        problems.forEach(problem -> unplaced.put(problem.pointer(), problem));
+        List<FieldView> fields = Shape.of(type).keys().values().stream()
+                .filter(key -> names.contains(key.name()))
+                .map(key -> field(document.path(key.name()), key, Pointer.to("", key.name()), owner))
+                .toList();
+        unplaced.clear();
+        return fields;
+    }
+
     /** The summary of what is wrong in the forms made so far. */
     List<ErrorView> errors() {
         return List.copyOf(errors);
@@ -267,7 +278,7 @@ final class Forms {
                     Ranges.words(declared),
                     declared.fallback(),
                     takeError(pointer, owner + ": " + label),
-                    node.path("basis").asText(""),
+                    basis(node),
                     declared.assume(),
                     declared.assumeWhy(),
                     List.of(),
@@ -291,6 +302,13 @@ final class Forms {
                 "",
                 choices,
                 key.name().equals("material") ? "materials" : "");
+    }
+
+    /** How a reading was come by, with its own remark. */
+    private static String basis(JsonNode node) {
+        String basis = node.path("basis").asText("");
+        String remark = node.path("remark").asText("");
+        return basis.isEmpty() || remark.isEmpty() ? basis : basis + ": " + remark;
     }
 
     /** The unit shown beside a field of a quantity. */

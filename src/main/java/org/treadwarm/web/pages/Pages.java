@@ -9,6 +9,7 @@ import java.util.Map;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.store.Role;
 import org.treadwarm.store.Store;
+import org.treadwarm.web.Computations;
 import org.treadwarm.web.security.Access;
 import org.treadwarm.web.security.Visitors;
 
@@ -25,9 +26,13 @@ public final class Pages {
     private final JobPages jobs;
     private final PartPages parts;
     private final QuickPages quick;
+    private final ComputationPages computing;
+    private final WallFootPages wallFeet;
+    private final MethodPage method;
+    private final SolvingAhead ahead;
     private final TablePages tables = new TablePages();
 
-    public Pages(Store store, JobDesk desk, Visitors visitors) {
+    public Pages(Store store, JobDesk desk, Visitors visitors, Computations computations) {
         this.visitors = visitors;
         this.view = new View(visitors);
         this.entry = new EntryPages(store, visitors, view);
@@ -39,6 +44,10 @@ public final class Pages {
         this.keys = new KeyPages(store, visitors, view, Clock.systemUTC());
         this.audit = new AuditPages(store, view);
         this.quick = new QuickPages(desk, visitors, view);
+        this.computing = new ComputationPages(computations, view);
+        this.method = new MethodPage(computations, view);
+        this.ahead = new SolvingAhead(desk, computations);
+        this.wallFeet = new WallFootPages(desk, visitors, view, computations, computing);
     }
 
     /** Adds the routes. */
@@ -53,11 +62,17 @@ public final class Pages {
         routes.get("/", ctx -> ctx.redirect("/jobs", HttpStatus.SEE_OTHER), Access.ANYBODY);
         routes.get("/jobs", jobs::list, Access.SURVEYOR);
         routes.post("/jobs", form(jobs::create), Access.ESTIMATOR);
-        routes.get("/jobs/{job}", jobs::show, Access.SURVEYOR);
+        routes.get("/jobs/{job}", ahead.before(jobs::show), Access.SURVEYOR);
         routes.post("/jobs/{job}", form(jobs::change), Access.SURVEYOR);
-        routes.get("/jobs/{job}/{part}/{name}", parts::show, Access.SURVEYOR);
+        routes.get("/jobs/{job}/{part}/{name}", ahead.before(parts::show), Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}", form(parts::save), Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}/preview", form(parts::preview), Access.SURVEYOR);
+        routes.get("/jobs/{job}/rooms/{name}/wall-foot/{junction}", wallFeet::show, Access.SURVEYOR);
+        routes.post("/jobs/{job}/rooms/{name}/wall-foot/{junction}", form(wallFeet::change), Access.SURVEYOR);
+        routes.get("/jobs/{job}/rooms/{name}/wall-foot/{junction}/{id}", wallFeet::result, Access.SURVEYOR);
+        routes.post("/jobs/{job}/rooms/{name}/wall-foot/{junction}/{id}", form(wallFeet::store), Access.SURVEYOR);
+        routes.get("/computations/{id}", computing::show, Access.SURVEYOR);
+        routes.post("/computations/{id}", form(computing::cancel), Access.SURVEYOR);
         routes.get("/one-room", quick::show, Access.SURVEYOR);
         routes.post("/one-room", form(quick::change), Access.SURVEYOR);
         routes.post("/one-room/preview", form(quick::preview), Access.SURVEYOR);
@@ -67,7 +82,8 @@ public final class Pages {
                 ctx -> view.show(ctx, 200, "materials", tables.materials(ctx.queryParam("find"))),
                 Access.SURVEYOR);
         routes.get("/reading-help", ctx -> view.show(ctx, 200, "reading-help", tables.readingHelp()), Access.SURVEYOR);
-        routes.get("/method", ctx -> view.show(ctx, 200, "method", tables.method()), Access.SURVEYOR);
+        routes.get("/method", method::show, Access.SURVEYOR);
+        routes.post("/method", form(method::change), Access.SURVEYOR);
         service(routes);
     }
 

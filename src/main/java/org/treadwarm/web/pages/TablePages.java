@@ -3,6 +3,8 @@ package org.treadwarm.web.pages;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.BooleanSupplier;
+import java.util.function.DoubleConsumer;
 import org.treadwarm.checks.CheckedValue;
 import org.treadwarm.checks.PublishedChecks;
 import org.treadwarm.tables.AirGaps;
@@ -71,9 +73,17 @@ final class TablePages {
         return Map.of("units", rows);
     }
 
-    Map<String, Object> method() {
-        List<CheckRow> checks = PublishedChecks.all().stream().map(CheckRow::of).toList();
-        long failed = checks.stream().filter(row -> !row.passes()).count();
-        return Map.of("checks", checks, "failed", failed, "formulas", WorkingView.formulas());
+    /** The rows of the published values, as the computation of them gives them. */
+    static CheckRows checks(BooleanSupplier stopped, DoubleConsumer progress) {
+        return new CheckRows(PublishedChecks.all(stopped, progress).stream()
+                .map(CheckRow::of)
+                .toList());
+    }
+
+    /** Every published value as a row of text. */
+    record CheckRows(List<CheckRow> rows) {
+        long failed() {
+            return rows.stream().filter(row -> !row.passes()).count();
+        }
     }
 }

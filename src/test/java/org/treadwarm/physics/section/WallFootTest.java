@@ -21,7 +21,7 @@ class WallFootTest {
                         new Solid("insulation", 0.1, 0.036),
                         new Solid("slab", 0.15, 2)),
                 0.3,
-                new Wall(0.3, wallConductivity, 1, 0.8),
+                new Wall(0.3, wallConductivity, 1, 0.8, wallConductivity),
                 edge,
                 2,
                 0.13,
@@ -54,7 +54,7 @@ class WallFootTest {
 
     @Test
     void aShortWallIsRefused() {
-        assertThatThrownBy(() -> new Wall(0.4, 1, 1.1, 0.5))
+        assertThatThrownBy(() -> new Wall(0.4, 1, 1.1, 0.5, 1))
                 .isInstanceOf(IllegalArgumentException.class)
                 .hasMessageContaining("three thicknesses");
     }
