@@ -192,7 +192,7 @@ class FloorPlanDrawingTest {
         assertThat(ScaleBar.length(70)).isEqualTo(2);
         assertThat(ScaleBar.length(4)).isEqualTo(20);
         assertThat(ScaleBar.length(1700)).isEqualTo(0.05);
-        assertThat(words(new Sheet("bar", 560), PlanSamples.bathroom())).contains("500\u00a0mm");
+        assertThat(words(new Sheet("bar", 560), PlanSamples.bathroom())).contains("500 mm");
     }
 
     @Test
