@@ -54,7 +54,8 @@ public final class FloorPlanDrawing {
         Box room = areas.room();
         Dimension.across(canvas, room.x(), room.right(), room.bottom() + 14, Figures.metres(plan.width()));
         Dimension.down(canvas, room.x() - 14, room.y(), room.bottom(), Figures.metres(plan.length()));
-        return canvas.write(notes(room.bottom() + 52), "Floor plan of " + plan.name(), description());
+        ScaleBar.draw(canvas, new Point(room.x(), room.bottom() + 48), areas.scale());
+        return canvas.write(notes(room.bottom() + 48 + ScaleBar.HEIGHT), "Floor plan of " + plan.name(), description());
     }
 
     /** Pale, with a margin as wide as the clearance round walls and units. */
@@ -131,9 +132,15 @@ public final class FloorPlanDrawing {
         for (String note : allNotes()) {
             label = label.and(note, width, TextStyle.PLAIN);
         }
-        label = label.and("To scale. The runs show spacing and extent, not how to lay them.", width, TextStyle.QUIET);
+        label = label.and("To scale, also in print: the bar measures it. " + meaning(), width, TextStyle.QUIET);
         canvas.label(new Point(MARGIN, top + label.height() / 2), label, TextStyle.Anchor.START);
         return top + label.height() + 10;
+    }
+
+    private String meaning() {
+        return plan.runs().spacing().isPresent()
+                ? "The runs show spacing and extent, not how to lay them."
+                : "The pale area shows where heat may lie, not how to lay it.";
     }
 
     private List<String> allNotes() {
@@ -151,6 +158,13 @@ public final class FloorPlanDrawing {
         return all;
     }
 
+    private String runsInWords() {
+        return plan.runs().spacing().isPresent()
+                ? " Runs at " + Figures.thickness(plan.runs().spacing().getAsDouble()) + ", indicative, in "
+                        + plan.loops() + (plan.loops() == 1 ? " loop." : " loops.")
+                : "";
+    }
+
     private String description() {
         String units = plan.units().stream().map(FixedUnit::name).collect(Collectors.joining(", "));
         String zone = plan.zone()
@@ -159,9 +173,7 @@ public final class FloorPlanDrawing {
                         + Figures.thickness(strip.spacing()) + ".")
                 .orElse("");
         return "A floor " + Figures.metres(plan.width()) + " by " + Figures.metres(plan.length()) + ". Not heated: "
-                + (units.isEmpty() ? "nothing" : units) + ". Runs at "
-                + Figures.thickness(plan.runs().spacing())
-                + ", indicative, in " + plan.loops() + (plan.loops() == 1 ? " loop." : " loops.") + zone + " "
+                + (units.isEmpty() ? "nothing" : units) + "." + runsInWords() + zone + " "
                 + String.join(" ", allNotes());
     }
 }

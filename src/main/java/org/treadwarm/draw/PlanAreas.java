@@ -64,7 +64,9 @@ record PlanAreas(Box room, Box inner, List<Box> strips, List<Box> loops, double 
     List<Meander> meanders(FloorPlanStrip plan, int each) {
         double clearance = plan.runs().clearance();
         List<Meander> all = new ArrayList<>();
-        loops.forEach(part -> all.add(meander(part, plan.runs().spacing(), clearance, each)));
+        plan.runs()
+                .spacing()
+                .ifPresent(spacing -> loops.forEach(part -> all.add(meander(part, spacing, clearance, each))));
         plan.zone().ifPresent(zone -> strips.forEach(part -> all.add(meander(part, zone.spacing(), clearance, each))));
         return all;
     }

@@ -137,7 +137,10 @@ final class PlanLettering {
     }
 
     private void runs() {
-        String words = "uns at " + Figures.thickness(plan.runs().spacing()) + ", indicative";
+        if (plan.runs().spacing().isEmpty()) {
+            return;
+        }
+        String words = "uns at " + Figures.thickness(plan.runs().spacing().getAsDouble()) + ", indicative";
         Box inner = areas.inner();
         Point middle = new Point(inner.middleX(), inner.middleY());
         if (!written("r" + words, middle, List.of(inner), inner.width())) {

@@ -20,6 +20,7 @@ import org.treadwarm.sizing.Sizing.Caution;
 import org.treadwarm.sizing.Sizing.Edge;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FloorState;
+import org.treadwarm.sizing.Sizing.FreeFloor;
 import org.treadwarm.sizing.Sizing.GroundPath;
 import org.treadwarm.sizing.Sizing.HeatLoss;
 import org.treadwarm.sizing.Sizing.LayerSizing;
@@ -245,6 +246,8 @@ final class Answers {
                 Optional.empty(),
                 Optional.empty(),
                 Optional.empty(),
+                Optional.empty(),
+                Optional.empty(),
                 Optional.empty());
     }
 
@@ -257,6 +260,15 @@ final class Answers {
         boolean holds = Double.isFinite(floor.holdsDownTo);
         HeatedFloor given =
                 plan.survey.rooms().get(floor.plan.room()).heatedFloor().orElseThrow();
+        Optional<FreeFloor> free = given.plan().map(rectangle -> FreeFloors.of(rectangle, floor.area));
+        MatLayouts.Made mats = given.heater()
+                .map(heater -> MatLayouts.of(
+                        heater,
+                        "/rooms/" + floor.plan.room() + "/heatedFloor/heater",
+                        floor.area,
+                        free,
+                        state.heaterPower()))
+                .orElse(MatLayouts.Made.NOT_ASKED);
         return new FloorSizing(
                 margin >= 0 ? Verdict.CARRIES : Verdict.CARRIES_WITH_SUPPLEMENT,
                 of(floor.area),
@@ -290,10 +302,12 @@ final class Answers {
                 limits(floor, given),
                 floor.section == null ? Optional.empty() : Optional.of(new SectionAnswers(floor, given).all()),
                 floor.sectionReason.isEmpty() ? Optional.empty() : Optional.of(floor.sectionReason),
-                ElectricLayouts.of(floor, given),
+                ElectricLayouts.of(floor, given, mats.layout()),
                 waters.of(floor.plan.room()),
                 floor.warmUp.map(WarmUpFloor::answer),
-                floor.warmUpReason.isEmpty() ? Optional.empty() : Optional.of(floor.warmUpReason));
+                floor.warmUpReason.isEmpty() ? Optional.empty() : Optional.of(floor.warmUpReason),
+                free,
+                mats.reason());
     }
 
     private FloorState state(FloorEvaluation floor, double flux) {

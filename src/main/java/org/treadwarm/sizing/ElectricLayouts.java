@@ -16,12 +16,14 @@ import org.treadwarm.physics.electric.ElectricCircuits.Load;
 import org.treadwarm.physics.electric.HeatingElement;
 import org.treadwarm.sizing.Sizing.ElectricLayout;
 import org.treadwarm.sizing.Sizing.HeatingElementLayout;
+import org.treadwarm.sizing.Sizing.MatCircuit;
+import org.treadwarm.sizing.Sizing.MatLayout;
+import org.treadwarm.sizing.Sizing.MatPieces;
 import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.survey.CircuitRule;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Heater;
 import org.treadwarm.survey.Layer;
-import org.treadwarm.units.Reading;
 
 /** Feeds the electric heater of a floor. */
 final class ElectricLayouts {
@@ -41,21 +43,57 @@ final class ElectricLayouts {
 
     private ElectricLayouts() {}
 
-    /** The layout of a heater whose voltage and density are known; empty for others. */
-    static Optional<ElectricLayout> of(FloorEvaluation floor, HeatedFloor given) {
+    /** The layout of a heater whose voltage is known, and whose density is or whose mats are chosen; empty for others. */
+    static Optional<ElectricLayout> of(FloorEvaluation floor, HeatedFloor given, Optional<MatLayout> mats) {
         Optional<Heater> heater = given.heater().filter(each -> each.voltage().isPresent());
-        if (heater.isEmpty() || !floor.plan.heater().hasDensity() || floor.density() <= 0) {
+        boolean dense = floor.plan.heater().hasDensity() && floor.density() > 0;
+        if (heater.isEmpty() || mats.isEmpty() && !dense) {
             return Optional.empty();
         }
         double voltage = heater.get().voltage().get().value();
+        if (mats.isPresent()) {
+            List<PracticeJudgement> limits = limits(mats.get(), given);
+            return Optional.of(layout(
+                    voltage, OptionalDouble.empty(), List.of(), mats, mats.get().power(), limits));
+        }
         double power = floor.density() * floor.area;
-        boolean us = heater.get().circuitRule() == CircuitRule.US;
-        BreakerPractice practice = us ? Practice.usBreakers() : Practice.europeanBreakers();
-        double largest = us ? US_BREAKER : EUROPEAN_BREAKER;
+        List<HeatingElementLayout> elements = elements(heater.get(), voltage, power);
+        OptionalDouble length = heater.get().spacing().isPresent()
+                ? OptionalDouble.of(CableLaying.length(
+                        floor.area, heater.get().spacing().get().value()))
+                : OptionalDouble.empty();
+        return elements.isEmpty()
+                ? Optional.empty()
+                : Optional.of(
+                        layout(voltage, length, elements, mats, power, limits(floor.density(), given, heater.get())));
+    }
+
+    private static ElectricLayout layout(
+            double voltage,
+            OptionalDouble cableLength,
+            List<HeatingElementLayout> elements,
+            Optional<MatLayout> mats,
+            double power,
+            List<PracticeJudgement> limits) {
+        HeatingElement whole = new HeatingElement(power, voltage);
+        return new ElectricLayout(
+                voltage,
+                cableLength,
+                elements,
+                mats,
+                whole.powerAt(LOW_VOLTAGE * voltage),
+                whole.powerAt(HIGH_VOLTAGE * voltage),
+                limits);
+    }
+
+    /** Equal parts, each on a circuit of its own; empty when they are beyond any floor. */
+    private static List<HeatingElementLayout> elements(Heater heater, double voltage, double power) {
+        BreakerPractice practice = practice(heater);
+        double largest = largestBreaker(heater);
         int count = (int) Math.min(
                 MOST_ELEMENTS + 1.0, Math.ceil(power / voltage / (largest * practice.continuousShare()) - 1e-9));
         if (count > MOST_ELEMENTS) {
-            return Optional.empty();
+            return List.of();
         }
         List<Load> loads = Collections.nCopies(Math.max(1, count), new Load("element", power / Math.max(1, count)));
         List<HeatingElementLayout> elements = new ArrayList<>();
@@ -69,30 +107,51 @@ final class ElectricLayouts {
                     element.lowestResistance(),
                     element.highestResistance()));
         }
-        HeatingElement whole = new HeatingElement(power, voltage);
-        Optional<Reading> spacing = heater.get().spacing();
-        return Optional.of(new ElectricLayout(
-                voltage,
-                spacing.isPresent()
-                        ? OptionalDouble.of(
-                                CableLaying.length(floor.area, spacing.get().value()))
-                        : OptionalDouble.empty(),
-                List.copyOf(elements),
-                whole.powerAt(LOW_VOLTAGE * voltage),
-                whole.powerAt(HIGH_VOLTAGE * voltage),
-                limits(floor, given, heater.get())));
+        return List.copyOf(elements);
     }
 
-    private static List<PracticeJudgement> limits(FloorEvaluation floor, HeatedFloor given, Heater heater) {
-        if (heater.spacing().isEmpty()) {
+    /** Circuits of mats; empty when one of them is too large for the largest usual breaker, or there are too many. */
+    static List<MatCircuit> circuits(Heater heater, List<MatPieces> mats) {
+        double voltage = heater.voltage().orElseThrow().value();
+        BreakerPractice practice = practice(heater);
+        double largest = largestBreaker(heater);
+        double most = largest * practice.continuousShare();
+        long count = mats.stream().mapToLong(MatPieces::count).sum();
+        if (count > MOST_ELEMENTS || mats.stream().anyMatch(mat -> mat.current() > most)) {
             return List.of();
         }
-        double linear = floor.density() * heater.spacing().get().value();
-        boolean timber = given.below().stream()
-                .findFirst()
-                .map(ElectricLayouts::isTimber)
-                .orElse(false);
-        return judgements(CableLimits.judge(linear, floor.density(), timber, Practice.electric()));
+        List<Load> loads = mats.stream()
+                .flatMap(mat -> Collections.nCopies(mat.count(), new Load(mat.name(), mat.power())).stream())
+                .toList();
+        return ElectricCircuits.of(loads, voltage, practice, largest).stream()
+                .map(circuit -> new MatCircuit(circuit.loads(), circuit.current(), circuit.breaker()))
+                .toList();
+    }
+
+    private static BreakerPractice practice(Heater heater) {
+        return heater.circuitRule() == CircuitRule.US ? Practice.usBreakers() : Practice.europeanBreakers();
+    }
+
+    private static double largestBreaker(Heater heater) {
+        return heater.circuitRule() == CircuitRule.US ? US_BREAKER : EUROPEAN_BREAKER;
+    }
+
+    private static List<PracticeJudgement> limits(double density, HeatedFloor given, Heater heater) {
+        return judgements(
+                heater.spacing().isPresent()
+                        ? CableLimits.judge(
+                                density * heater.spacing().get().value(), density, onTimber(given), Practice.electric())
+                        : CableLimits.judgeDensity(density, onTimber(given), Practice.electric()));
+    }
+
+    private static List<PracticeJudgement> limits(MatLayout mats, HeatedFloor given) {
+        double densest =
+                mats.pieces().stream().mapToDouble(MatPieces::density).max().orElseThrow();
+        return judgements(CableLimits.judgeDensity(densest, onTimber(given), Practice.electric()));
+    }
+
+    private static boolean onTimber(HeatedFloor given) {
+        return given.below().stream().findFirst().map(ElectricLayouts::isTimber).orElse(false);
     }
 
     private static boolean isTimber(Layer layer) {

@@ -69,6 +69,7 @@ final class FloorWarnings {
         flux(pointer, floor, answer.floor());
         heater(pointer, floor, answer.floor());
         warmUp("/rooms/" + i + "/warmUp", answer.floor());
+        new LayoutWarnings(warnings).check(pointer, room, floor, answer.floor());
         sameTwo(i, room, floor);
     }
 

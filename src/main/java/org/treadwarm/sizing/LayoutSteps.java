@@ -22,11 +22,11 @@ final class LayoutSteps {
         this.steps = steps;
     }
 
-    void electric(FloorPlan floor, ElectricLayout layout) {
+    void electric(FloorPlan floor, ElectricLayout layout, boolean planned) {
         String floorAt = addresses.pointer(floor.room()) + "/floor";
         String at = floorAt + "/electric";
         Symbol voltage = symbol("U", at + "/voltage");
-        Symbol power = symbol("P", floorAt + "/installedPower");
+        Symbol power = symbol("P", layout.mats().isPresent() ? at + "/mats/power" : floorAt + "/installedPower");
         steps.add(
                 at + "/voltage",
                 "voltage-given",
@@ -56,6 +56,7 @@ final class LayoutSteps {
             steps.add(element + "/lowestResistance", "lowest-element-resistance", "R_low", resistance);
             steps.add(element + "/highestResistance", "highest-element-resistance", "R_high", resistance);
         }
+        layout.mats().ifPresent(mats -> new MatSteps(steps, floorAt).all(mats, planned));
         judged(at, layout.limits());
     }
 

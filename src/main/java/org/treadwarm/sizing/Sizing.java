@@ -101,7 +101,21 @@ public record Sizing(
             Optional<ElectricLayout> electric,
             Optional<WaterLayout> water,
             Optional<WarmUpSizing> warmup,
-            Optional<String> warmupReason) {}
+            Optional<String> warmupReason,
+            Optional<FreeFloor> plan,
+            Optional<String> matsReason) {}
+
+    /**
+     * The plan of the room's floor.
+     *
+     * @param area of its rectangle, m²
+     * @param fixedArea of its fixed parts, m²; what they cover twice counts once
+     * @param freeArea the rest, m²
+     * @param freeShare free area over area
+     * @param heatedShare heated area over free area; left out when nothing is free
+     */
+    public record FreeFloor(
+            double area, double fixedArea, double freeArea, double freeShare, OptionalDouble heatedShare) {}
 
     /**
      * How the floor warms its room after a setback on the design day. What the room holds is assumed: the capacities and the coupling
@@ -141,7 +155,8 @@ public record Sizing(
      *
      * @param voltage V
      * @param cableLength of the runs at their spacing, m
-     * @param elements equal parts, each fed whole, as few as the largest usual breaker allows
+     * @param elements equal parts, each fed whole, as few as the largest usual breaker allows; none where mats are chosen
+     * @param mats chosen from those that can be had
      * @param powerAtLowVoltage of the whole heater at 10 % less voltage, W
      * @param powerAtHighVoltage of the whole heater at 10 % more voltage, W
      */
@@ -149,9 +164,57 @@ public record Sizing(
             double voltage,
             OptionalDouble cableLength,
             List<HeatingElementLayout> elements,
+            Optional<MatLayout> mats,
             double powerAtLowVoltage,
             double powerAtHighVoltage,
             List<PracticeJudgement> limits) {}
+
+    /**
+     * Mats chosen for a floor: of all combinations that fit and make the heat needed on the design day the one that leaves the least
+     * floor bare; where none makes it, the strongest.
+     *
+     * @param area to be covered, m²: the heated area, or the free area of the plan when that is less
+     * @param coveredArea m²
+     * @param bareArea m²
+     * @param power of all mats, W
+     * @param neededPower what the heater must make for the required flux, W
+     * @param margin power less needed power, W; negative when the mats are too weak
+     * @param pieces the mats to order
+     * @param circuits that feed them; none when a mat is too large for the largest usual breaker
+     */
+    public record MatLayout(
+            double area,
+            double coveredArea,
+            double bareArea,
+            double power,
+            double neededPower,
+            double margin,
+            List<MatPieces> pieces,
+            List<MatCircuit> circuits) {}
+
+    /**
+     * So many of one mat; area, power and what follows are those of a single one.
+     *
+     * @param pointer where it stands in the survey
+     * @param count how many
+     * @param density W/m²
+     * @param current A
+     * @param resistance ohm, and from the lowest to the highest to find when it is put into service
+     */
+    public record MatPieces(
+            String name,
+            String pointer,
+            int count,
+            double area,
+            double power,
+            double density,
+            double current,
+            double resistance,
+            double lowestResistance,
+            double highestResistance) {}
+
+    /** A circuit of mats: their names, the largest first, its current and the rating of its breaker, A. */
+    public record MatCircuit(List<String> mats, double current, double breaker) {}
 
     /** One element: W, A, the rating of its breaker in A, and the resistances in ohm to find when it is put into service. */
     public record HeatingElementLayout(

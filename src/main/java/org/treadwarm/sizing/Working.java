@@ -60,7 +60,10 @@ public final class Working {
         new BelowSteps(plan, addresses, steps, floor).all(answer);
         new LimitSteps(addresses, steps, floor, given.zone()).all(answer);
         LayoutSteps layouts = new LayoutSteps(addresses, steps);
-        answer.electric().ifPresent(layout -> layouts.electric(floor, layout));
+        answer.electric()
+                .ifPresent(
+                        layout -> layouts.electric(floor, layout, answer.plan().isPresent()));
+        answer.plan().ifPresent(found -> new PlanSteps(addresses, steps).all(floor, found));
         answer.water().ifPresent(layout -> layouts.water(floor, layout));
         answer.warmup().ifPresent(found -> layouts.warmUp(floor, plan.roomIndexes[floor.room()], found));
     }

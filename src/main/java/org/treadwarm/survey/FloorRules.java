@@ -1,5 +1,6 @@
 package org.treadwarm.survey;
 
+import java.util.List;
 import java.util.Optional;
 import org.treadwarm.units.Numbers;
 import org.treadwarm.units.Reading;
@@ -39,6 +40,7 @@ final class FloorRules {
         });
         layers(pointer, floor);
         heater(pointer, floor);
+        floor.plan().ifPresent(plan -> new PlanRules(findings).check(pointer + "/plan", plan));
     }
 
     private void layers(String pointer, HeatedFloor floor) {
@@ -67,6 +69,10 @@ final class FloorRules {
             notHis(pointer + "/density", heater.density(), "only an electric heater has an installed density");
             notHis(pointer + "/linearPower", heater.linearPower(), "only an electric heater has a power per metre");
             notHis(pointer + "/voltage", heater.voltage(), "only an electric heater has a voltage");
+            if (!heater.mats().isEmpty()) {
+                findings.add(
+                        pointer + "/mats", words(heater.mats()), "only an electric heater has mats", "leave them out");
+            }
         } else {
             notHis(pointer + "/wallThickness", heater.wallThickness(), "only a pipe has a wall");
             notHis(pointer + "/wallConductivity", heater.wallConductivity(), "only a pipe has a wall");
@@ -76,8 +82,27 @@ final class FloorRules {
                     "only warm water has a supply temperature");
             notHis(pointer + "/spread", heater.spread(), "only warm water has a spread");
             notHis(pointer + "/feederLength", heater.feederLength(), "only warm water has feeders");
+            mats(pointer, heater);
         }
         sizes(pointer, heater);
+    }
+
+    private void mats(String pointer, Heater heater) {
+        if (heater.mats().size() > Heater.MOST_MATS) {
+            findings.add(
+                    pointer + "/mats",
+                    words(heater.mats()),
+                    "a list of so many kinds of mats has too many combinations",
+                    "at most " + Heater.MOST_MATS);
+        }
+        if (!heater.mats().isEmpty() && heater.voltage().isEmpty()) {
+            findings.missing(
+                    pointer + "/voltage", "the power of mats is told at a voltage", "the voltage they are made for");
+        }
+    }
+
+    private static String words(List<HeatingMat> mats) {
+        return mats.size() == 1 ? "1 mat" : mats.size() + " mats";
     }
 
     private void notHis(String pointer, Optional<Reading> reading, String message) {

@@ -48,4 +48,7 @@ public record HeatedFloor(
                 help = "The maker's figure; 27 °C under timber is common practice, no source.",
                 assume = "27 °C",
                 assumeWhy = "Common practice under timber, no source; the maker's figure decides.")
-        Optional<Reading> maximumSurfaceTemperature) {}
+        Optional<Reading> maximumSurfaceTemperature,
+
+        @Wording(label = "plan of the room's floor", help = "A rectangle, for the free area and a drawing.")
+        Optional<RoomPlan> plan) {}

@@ -1,5 +1,6 @@
 package org.treadwarm.survey;
 
+import java.util.List;
 import java.util.Optional;
 import org.treadwarm.units.Quantity;
 import org.treadwarm.units.QuantityKind;
@@ -118,7 +119,16 @@ public record Heater(
                 plausibleFrom = 0.1,
                 plausibleTo = 60,
                 label = "length of both feeders of a loop, from the manifold and back")
-        Optional<Reading> feederLength) {
+        Optional<Reading> feederLength,
+
+        @Wording(
+                label = "mats to choose from",
+                help =
+                        "What can be had; the sizing chooses those that leave the least floor bare and give the heat needed.")
+        List<HeatingMat> mats) {
+    /** As many kinds of mats as one list may have. */
+    public static final int MOST_MATS = 12;
+
     /** Outside diameter of a cable when none is given, m; common practice, no source. */
     public static final double CABLE_DIAMETER = 0.006;
 

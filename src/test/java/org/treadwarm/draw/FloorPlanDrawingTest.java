@@ -157,10 +157,42 @@ class FloorPlanDrawingTest {
                         length,
                         random.nextBoolean() ? OptionalDouble.of(12.3) : OptionalDouble.empty(),
                         units,
-                        new HeaterRuns(DrawingsTest.name(random), 0.05 + random.nextDouble() * 0.3, 0.1),
+                        new HeaterRuns(
+                                DrawingsTest.name(random),
+                                random.nextInt(4) == 0
+                                        ? OptionalDouble.empty()
+                                        : OptionalDouble.of(0.05 + random.nextDouble() * 0.3),
+                                0.1),
                         random.nextBoolean() ? Optional.of(zone) : Optional.empty(),
                         1 + random.nextInt(8),
                         random.nextBoolean() ? Optional.of(mark) : Optional.empty()));
+    }
+
+    @Test
+    void drawsNoRunsWhereTheirSpacingIsNotKnown() {
+        FloorPlanStrip cable = PlanSamples.bathroom();
+        FloorPlanStrip mats = new FloorPlanStrip(
+                cable.name(),
+                cable.width(),
+                cable.length(),
+                cable.heatedArea(),
+                cable.units(),
+                new HeaterRuns("Heating mats", OptionalDouble.empty(), 0.05),
+                Optional.empty(),
+                1,
+                Optional.empty());
+        String words = words(new Sheet("mats", 560), mats);
+        assertThat(words).contains("Heating mats").contains("pale area").doesNotContain("uns at");
+    }
+
+    @Test
+    void theScaleBarHasARoundLength() {
+        assertThat(ScaleBar.length(100)).isEqualTo(1);
+        assertThat(ScaleBar.length(71)).isEqualTo(1);
+        assertThat(ScaleBar.length(70)).isEqualTo(2);
+        assertThat(ScaleBar.length(4)).isEqualTo(20);
+        assertThat(ScaleBar.length(1700)).isEqualTo(0.05);
+        assertThat(words(new Sheet("bar", 560), PlanSamples.bathroom())).contains("500 mm");
     }
 
     @Test
@@ -170,7 +202,7 @@ class FloorPlanDrawingTest {
                 .withMessageContaining("Right side of Bath");
         assertThatIllegalArgumentException().isThrownBy(() -> new FixedUnit("Bath", -0.1, 0, 1, 1));
         assertThatIllegalArgumentException().isThrownBy(() -> new FixedUnit("Bath", 0, 0, 0, 1));
-        assertThatIllegalArgumentException().isThrownBy(() -> new HeaterRuns("pipe", 0, 0.1));
+        assertThatIllegalArgumentException().isThrownBy(() -> new HeaterRuns("pipe", OptionalDouble.of(0), 0.1));
         assertThatIllegalArgumentException().isThrownBy(() -> new PeripheralZone(Set.of(), 1, 0.1));
         PeripheralZone deep = new PeripheralZone(Set.of(PeripheralZone.Side.TOP, PeripheralZone.Side.BOTTOM), 1.5, 0.1);
         assertThatIllegalArgumentException()
@@ -185,7 +217,7 @@ class FloorPlanDrawingTest {
                 3,
                 OptionalDouble.empty(),
                 units,
-                new HeaterRuns("pipe", 0.1, 0.1),
+                new HeaterRuns("pipe", OptionalDouble.of(0.1), 0.1),
                 zone,
                 1,
                 Optional.empty());

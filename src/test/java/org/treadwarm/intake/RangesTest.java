@@ -2,6 +2,7 @@ package org.treadwarm.intake;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.DoubleNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
@@ -22,8 +23,24 @@ import org.treadwarm.units.Declared;
 class RangesTest {
     private static final String WALL = "/rooms/2/heatedFloor/heater/wallThickness";
 
-    /** Readings whose range depends on others: the pipe's wall; a reheat beside a setback, and the setback beside its room. */
-    private static final Set<String> JUDGED_WITH_OTHERS = Set.of(WALL, "/rooms/2/reheat", "/rooms/2/warmUp/from");
+    private static final String FIXED = "/rooms/0/heatedFloor/plan/fixed/";
+
+    /**
+     * Readings whose range depends on others: the pipe's wall; a reheat beside a setback, and the setback beside its room; fixed parts
+     * within their plan.
+     */
+    private static final Set<String> JUDGED_WITH_OTHERS = Set.of(
+            WALL,
+            "/rooms/2/reheat",
+            "/rooms/2/warmUp/from",
+            FIXED + "0/width",
+            FIXED + "0/length",
+            FIXED + "0/x",
+            FIXED + "0/y",
+            FIXED + "1/width",
+            FIXED + "1/length",
+            FIXED + "1/x",
+            FIXED + "1/y");
 
     private static List<Problem> at(String pointer, double value) {
         ObjectNode survey = Surveys.everything();
@@ -100,6 +117,35 @@ class RangesTest {
         assertRefused(WALL, 0.0085);
         assertRefused(WALL, 0.05);
         assertRefused(WALL, 0.00009);
+    }
+
+    /** Not of its declared range alone: the plan is 6.1 m wide and 5.2 m long, the part 2.4 m by 0.6 m. */
+    @Test
+    void aFixedPartLiesWithinThePlan() {
+        assertThat(at(FIXED + "0/x", 0)).isEmpty();
+        assertThat(at(FIXED + "0/x", 3.7)).isEmpty();
+        assertRefused(FIXED + "0/x", 3.71);
+        assertRefused(FIXED + "0/x", -0.01);
+        assertThat(at(FIXED + "0/y", 4.6)).isEmpty();
+        assertRefused(FIXED + "0/y", 4.61);
+        assertRefused(FIXED + "0/width", 6.11);
+        assertRefused(FIXED + "0/width", 0);
+        assertRefused(FIXED + "0/length", 5.21);
+        assertRefused(FIXED + "0/length", 0);
+    }
+
+    @Test
+    void aPlanHasAtMostTwelveFixedParts() {
+        ObjectNode survey = Surveys.everything();
+        ArrayNode parts = (ArrayNode) survey.at("/rooms/0/heatedFloor/plan/fixed");
+        while (parts.size() < 12) {
+            parts.add(parts.get(0).deepCopy());
+        }
+        assertThat(Surveys.problems(survey)).isEmpty();
+        parts.add(parts.get(0).deepCopy());
+        assertThat(Surveys.problems(survey))
+                .extracting(Problem::pointer)
+                .containsExactly("/rooms/0/heatedFloor/plan/fixed");
     }
 
     @ParameterizedTest(name = "{0}")

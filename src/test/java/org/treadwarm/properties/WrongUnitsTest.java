@@ -20,15 +20,21 @@ class WrongUnitsTest {
     private static final String NEAR_NOTHING = "a junction may lose next to nothing";
     private static final String NEAR_FREEZING = "a thousandth is near 0 °C, which is as good a temperature as another";
 
-    private static final Map<String, String> SMALL_AND_POSSIBLE = Map.of(
-            "/rooms/0/junctions/0/psi", NEAR_NOTHING,
-            "/rooms/0/junctions/1/psi", NEAR_NOTHING,
-            "/rooms/0/junctions/2/psi", NEAR_NOTHING,
-            "/spaces/loft/junctions/0/psi", NEAR_NOTHING,
-            "/site/altitude", "many places lie at the sea",
-            "/site/annualMeanTemperature", NEAR_FREEZING,
-            "/site/outdoorTemperature", NEAR_FREEZING,
-            "/spaces/neighbour/temperature", NEAR_FREEZING);
+    private static final String AT_THE_WALL = "a fixed part may stand at the wall";
+
+    private static final Map<String, String> SMALL_AND_POSSIBLE = Map.ofEntries(
+            Map.entry("/rooms/0/junctions/0/psi", NEAR_NOTHING),
+            Map.entry("/rooms/0/junctions/1/psi", NEAR_NOTHING),
+            Map.entry("/rooms/0/junctions/2/psi", NEAR_NOTHING),
+            Map.entry("/spaces/loft/junctions/0/psi", NEAR_NOTHING),
+            Map.entry("/rooms/0/heatedFloor/plan/fixed/0/x", AT_THE_WALL),
+            Map.entry("/rooms/0/heatedFloor/plan/fixed/0/y", AT_THE_WALL),
+            Map.entry("/rooms/0/heatedFloor/plan/fixed/1/x", AT_THE_WALL),
+            Map.entry("/rooms/0/heatedFloor/plan/fixed/1/y", AT_THE_WALL),
+            Map.entry("/site/altitude", "many places lie at the sea"),
+            Map.entry("/site/annualMeanTemperature", NEAR_FREEZING),
+            Map.entry("/site/outdoorTemperature", NEAR_FREEZING),
+            Map.entry("/spaces/neighbour/temperature", NEAR_FREEZING));
 
     private static final Map<String, String> COLD_AND_POSSIBLE =
             Map.of("/site/outdoorTemperature", "-11 °F is a design day of many places");

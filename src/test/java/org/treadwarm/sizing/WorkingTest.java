@@ -30,6 +30,7 @@ class WorkingTest {
     @BeforeAll
     static void replay() {
         REPLAYS.add(new WorkingReplay(WorkingJob.survey()));
+        REPLAYS.add(new WorkingReplay(Surveys.everything()));
         REPLAYS.addAll(SolvedJob.all().stream().map(WorkingReplay::new).toList());
         for (long seed = 1; seed <= RANDOM_SURVEYS; seed++) {
             REPLAYS.add(new WorkingReplay(SurveyGenerator.random(new SplittableRandom(seed))));

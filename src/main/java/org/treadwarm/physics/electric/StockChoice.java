@@ -40,6 +40,17 @@ public record StockChoice(
         return new StockSearch(demand, stock).best();
     }
 
+    /**
+     * The strongest of all combinations, for a demand that none reaches: the most power (to 1 mW), then the least bare area, then the
+     * fewest pieces, then more of what stands earlier in the stock. It counts as for {@link #best}, but for the required density.
+     *
+     * @return empty when no combination counts
+     * @throws IllegalArgumentException when there are too many combinations to look at
+     */
+    public static Optional<StockChoice> strongest(CoverDemand demand, List<StockItem> stock) {
+        return new StockSearch(demand, stock).strongest();
+    }
+
     /** How many pieces in all. */
     public int count() {
         return pieces.stream().mapToInt(Pieces::count).sum();

@@ -3,15 +3,25 @@ package org.treadwarm.physics.electric;
 import org.treadwarm.physics.Require;
 
 /**
- * A cable or mat that can be had, as many of it as wanted, never cut.
+ * A cable or mat that can be had, never cut.
  *
  * @param name its name
  * @param extent what it covers
  * @param power W
+ * @param most how many can be had, at least 1; {@link #UNLIMITED} for as many as wanted
  */
-public record StockItem(String name, Extent extent, double power) {
+public record StockItem(String name, Extent extent, double power, int most) {
+    /** As many as wanted. */
+    public static final int UNLIMITED = Integer.MAX_VALUE;
+
     public StockItem {
         Require.positive("power of " + name, power);
+        Require.within("number of " + name, most, 1, UNLIMITED);
+    }
+
+    /** An item of which as many can be had as wanted. */
+    public StockItem(String name, Extent extent, double power) {
+        this(name, extent, power, UNLIMITED);
     }
 
     /** What an item covers. */

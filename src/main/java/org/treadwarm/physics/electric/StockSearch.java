@@ -16,7 +16,7 @@ import org.treadwarm.physics.electric.StockChoice.Pieces;
  * So the search is exact, and its work grows with the number of different sums instead of the number of combinations.
  */
 final class StockSearch {
-    private static final int MOST_LOOKS = 500_000;
+    private static final int MOST_LOOKS = 100_000;
 
     /** Room for the rounding of floating-point numbers, as a share. */
     private static final double ROUNDING = 1e-9;
@@ -62,16 +62,31 @@ final class StockSearch {
     }
 
     Optional<StockChoice> best() {
+        Comparator<Combination> order = Comparator.comparingLong(this::bareSquareMillimetres)
+                .thenComparingInt(Combination::pieces)
+                .thenComparingLong(combination -> combination.sums().milliwatts())
+                .thenComparing(PREFERRED);
+        return all().stream()
+                .filter(this::isStrongEnough)
+                .filter(this::keepsSpacing)
+                .min(order)
+                .map(this::choice);
+    }
+
+    Optional<StockChoice> strongest() {
+        Comparator<Combination> order = Comparator.comparingLong(
+                        (Combination combination) -> -combination.sums().milliwatts())
+                .thenComparingLong(this::bareSquareMillimetres)
+                .thenComparing(PREFERRED);
+        return all().stream().filter(this::keepsSpacing).min(order).map(this::choice);
+    }
+
+    private Collection<Combination> all() {
         Collection<Combination> combinations = List.of(Combination.NOTHING);
         for (StockItem item : stock) {
             combinations = extended(combinations, item);
         }
-        Comparator<Combination> order = Comparator.comparingLong(
-                        (Combination combination) -> Math.round(bareArea(combination) * 1e6))
-                .thenComparingInt(Combination::pieces)
-                .thenComparingLong(combination -> combination.sums().milliwatts())
-                .thenComparing(PREFERRED);
-        return combinations.stream().filter(this::answers).min(order).map(this::choice);
+        return combinations;
     }
 
     private Collection<Combination> extended(Collection<Combination> combinations, StockItem item) {
@@ -79,7 +94,7 @@ final class StockSearch {
         for (Combination combination : combinations) {
             int count = 0;
             Combination with = combination.with(item, 0);
-            while (fits(with)) {
+            while (count <= item.most() && fits(with)) {
                 look();
                 extended.merge(with.sums(), with, (one, other) -> PREFERRED.compare(one, other) <= 0 ? one : other);
                 count++;
@@ -111,10 +126,11 @@ final class StockSearch {
         return item.matArea() > 0 && item.power() / item.matArea() > demand.largestDensity() * (1 + ROUNDING);
     }
 
-    private boolean answers(Combination combination) {
-        if (combination.power() < demand.area() * demand.requiredDensity() * (1 - ROUNDING)) {
-            return false;
-        }
+    private boolean isStrongEnough(Combination combination) {
+        return combination.power() >= demand.area() * demand.requiredDensity() * (1 - ROUNDING);
+    }
+
+    private boolean keepsSpacing(Combination combination) {
         if (combination.cableLength() == 0) {
             return true;
         }
@@ -126,6 +142,10 @@ final class StockSearch {
     /** Area that the mats leave, m². */
     private double left(Combination combination) {
         return Math.max(0, demand.area() - combination.matArea());
+    }
+
+    private long bareSquareMillimetres(Combination combination) {
+        return Math.round(bareArea(combination) * 1e6);
     }
 
     private double bareArea(Combination combination) {

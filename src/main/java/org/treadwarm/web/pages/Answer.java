@@ -15,6 +15,7 @@ import org.treadwarm.sizing.SectionView;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FloorState;
+import org.treadwarm.sizing.Sizing.FreeFloor;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.SectionSizing;
 import org.treadwarm.sizing.Sizing.SectionState;
@@ -92,6 +93,7 @@ final class Answer {
         add(pictures, "Heat out, and heat from the floor", "balance", sheet -> Pictures.balance(answer, sheet));
         add(pictures, "What the floor must give and may give", "limits", sheet -> Pictures.limits(answer, sheet));
         add(pictures, "The heated floor in section", "floor", sheet -> Pictures.floor(room, answer, sheet));
+        add(pictures, "The floor in plan", "plan", sheet -> PlanPicture.of(room, answer, sheet));
         if (floor.section().isPresent()) {
             Optional<SectionView> view = SectionView.of(survey, index);
             add(
@@ -212,6 +214,7 @@ final class Answer {
                     "from the heater, with a surface of "
                             + Numbers.fixed(floor.surfaceTemperature().orElseThrow(), 1) + " °C"));
         }
+        floor.plan().ifPresent(plan -> lines.add(new Line("Free floor", area(plan.freeArea()), ofThePlan(plan))));
         floor.installedPower().ifPresent(power -> lines.add(new Line("Installed power", watts(power), "")));
         floor.buildUpHeight()
                 .ifPresent(height ->
@@ -220,6 +223,17 @@ final class Answer {
         answer.fromFloorAbove()
                 .ifPresent(heat -> lines.add(new Line("From the floor above", watts(heat), "not counted")));
         return lines;
+    }
+
+    private static String ofThePlan(FreeFloor plan) {
+        return "of " + area(plan.area()) + " in plan"
+                + (plan.heatedShare().isPresent()
+                        ? "; " + Numbers.fixed(100 * plan.heatedShare().getAsDouble(), 0) + " % of it is heated"
+                        : "");
+    }
+
+    private static String area(double area) {
+        return Numbers.fixed(area, 2) + "\u00a0m²";
     }
 
     private static void flux(List<Line> lines, String name, OptionalDouble flux, String note) {

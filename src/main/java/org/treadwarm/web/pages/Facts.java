@@ -3,6 +3,8 @@ package org.treadwarm.web.pages;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.List;
+import org.treadwarm.survey.FixedPart;
+import org.treadwarm.survey.HeatingMat;
 import org.treadwarm.survey.Junction;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Opening;
@@ -36,6 +38,12 @@ final class Facts {
             add(facts, "lambda ", node.path("conductivity"), "");
             add(facts, "R ", node.path("resistance"), "");
             add(facts, "framing ", node.path("bridging").path("share"), "");
+        } else if (type == FixedPart.class) {
+            add(facts, "", node.path("width"), " wide");
+            add(facts, "", node.path("length"), " long");
+        } else if (type == HeatingMat.class) {
+            add(facts, "", node.path("area"), "");
+            add(facts, "", node.path("power"), "");
         }
         return String.join(" · ", facts);
     }

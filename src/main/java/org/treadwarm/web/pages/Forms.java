@@ -12,8 +12,10 @@ import org.treadwarm.intake.Ranges;
 import org.treadwarm.survey.AirGap;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Bridging;
+import org.treadwarm.survey.FixedPart;
 import org.treadwarm.survey.Ground;
 import org.treadwarm.survey.HeatedFloor;
+import org.treadwarm.survey.HeatingMat;
 import org.treadwarm.survey.Junction;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Opening;
@@ -44,6 +46,7 @@ final class Forms {
             org.treadwarm.survey.Heater.class,
             org.treadwarm.survey.Air.class,
             org.treadwarm.survey.Site.class,
+            org.treadwarm.survey.RoomPlan.class,
             Assembly.class,
             Space.class);
     private static final Set<String> SELDOM = Set.of(
@@ -73,7 +76,16 @@ final class Forms {
             Map.entry("airGap", "Make it an air gap"),
             Map.entry("bridging", "Add framing"),
             Map.entry("heater", "Add the heater"),
+            Map.entry("mats", "Add a mat"),
+            Map.entry("plan", "Add a plan of the floor"),
+            Map.entry("fixed", "Add a fixed part"),
             Map.entry("air", "Add air"));
+    private static final Map<Class<?>, String> ITEMS = Map.of(
+            Surface.class, "Surface",
+            Opening.class, "Opening",
+            Junction.class, "Junction",
+            FixedPart.class, "Fixed part",
+            HeatingMat.class, "Mat");
     private static final Set<String> ALWAYS_OPEN = Set.of("air", "heater");
 
     private final JsonNode document;
@@ -200,6 +212,9 @@ final class Forms {
         if (name.equals("ground") && type == HeatedFloor.class) {
             return node.has(name);
         }
+        if (name.equals("mats")) {
+            return node.path("kind").asText().equals("electric") || node.has(name);
+        }
         if (type == Space.class) {
             return isShownOfSpace(name, node);
         }
@@ -249,9 +264,7 @@ final class Forms {
     }
 
     private static String itemTitle(JsonNode node, Class<?> type, int i) {
-        String what = type == Surface.class
-                ? "Surface"
-                : type == Opening.class ? "Opening" : type == Junction.class ? "Junction" : "Layer";
+        String what = ITEMS.getOrDefault(type, "Layer");
         for (String key : List.of("name", "assembly", "material")) {
             if (node.path(key).isTextual() && !node.path(key).textValue().isBlank()) {
                 return what + " " + (i + 1) + ": " + node.path(key).textValue();

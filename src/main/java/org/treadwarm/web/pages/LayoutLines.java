@@ -6,9 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.stream.Collectors;
-import org.treadwarm.sizing.Sizing.ElectricLayout;
 import org.treadwarm.sizing.Sizing.FloorSizing;
-import org.treadwarm.sizing.Sizing.HeatingElementLayout;
 import org.treadwarm.sizing.Sizing.LoopValve;
 import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.sizing.Sizing.Total;
@@ -29,41 +27,10 @@ final class LayoutLines {
 
     static List<Layout> of(String room, FloorSizing floor, Total total) {
         LayoutLines lines = new LayoutLines();
-        floor.electric().ifPresent(lines::electric);
+        floor.electric().ifPresent(layout -> lines.layouts.add(ElectricLines.of(layout, floor)));
         floor.water().ifPresent(layout -> lines.water(room, layout, total));
         floor.warmup().ifPresent(lines::warmUp);
         return List.copyOf(lines.layouts);
-    }
-
-    private void electric(ElectricLayout layout) {
-        List<Line> lines = new ArrayList<>();
-        lines.add(line("Supply", layout.voltage(), 0, "V", ""));
-        layout.cableLength()
-                .ifPresent(length -> lines.add(line("Cable in the floor", length, 1, "m", "area / spacing")));
-        int number = 1;
-        for (HeatingElementLayout element : layout.elements()) {
-            String name = layout.elements().size() == 1 ? "Element" : "Element " + number++;
-            lines.add(line(name, element.power(), 0, "W", "on a circuit of its own"));
-            lines.add(line(name + ", current", element.current(), 2, "A", ""));
-            lines.add(line(
-                    name + ", breaker", element.breaker(), 0, "A", "smallest usual rating; the local code decides"));
-            lines.add(line(
-                    name + ", resistance",
-                    element.resistance(),
-                    1,
-                    "Ω",
-                    "measure before and after covering: " + Numbers.fixed(element.lowestResistance(), 1) + " to "
-                            + Numbers.fixed(element.highestResistance(), 1) + " Ω; the maker's figure decides"));
-        }
-        lines.add(line("Power at 10 % less voltage", layout.powerAtLowVoltage(), 0, "W", "81 %"));
-        lines.add(line("Power at 10 % more voltage", layout.powerAtHighVoltage(), 0, "W", "121 %"));
-        limits(lines, layout.limits());
-        layouts.add(new Layout(
-                "Electric layout",
-                lines,
-                "Record the insulation resistance between conductors and earth before and after covering. Put the floor sensor"
-                        + " midway between two runs, in a conduit; a residual-current device of 30 mA and a limit of the floor's"
-                        + " temperature are usual. A licensed electrician connects it, by the local code."));
     }
 
     private void water(String room, WaterLayout layout, Total total) {
@@ -164,7 +131,7 @@ final class LayoutLines {
     }
 
     /** One line for each quantity, with every limit of practice beside it. */
-    private static void limits(List<Line> lines, List<PracticeJudgement> limits) {
+    static void limits(List<Line> lines, List<PracticeJudgement> limits) {
         Map<String, List<PracticeJudgement>> byName = new LinkedHashMap<>();
         limits.forEach(limit ->
                 byName.computeIfAbsent(limit.name(), name -> new ArrayList<>()).add(limit));
@@ -200,7 +167,7 @@ final class LayoutLines {
         };
     }
 
-    private static Line line(String name, double value, int decimals, String unit, String note) {
+    static Line line(String name, double value, int decimals, String unit, String note) {
         return new Line(name, Numbers.fixed(value, decimals) + (unit.isEmpty() ? "" : " " + unit), note);
     }
 }

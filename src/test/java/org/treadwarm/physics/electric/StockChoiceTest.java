@@ -69,6 +69,24 @@ class StockChoiceTest {
     }
 
     @Test
+    void takesNoMoreThanCanBeHad() {
+        StockItem scarce = new StockItem("scarce", new Mat(2), 300, 1);
+        StockChoice choice = StockChoice.best(new CoverDemand(6, 50, 200, 0.08), List.of(scarce, mat(1, 150)))
+                .orElseThrow();
+        assertThat(names(choice)).containsExactly("1 scarce", "4 mat 1.0");
+    }
+
+    @Test
+    void givesTheStrongestWhereNoneIsStrongEnough() {
+        List<StockItem> stock = List.of(mat(2, 200), mat(1.5, 240), mat(0.5, 90));
+        CoverDemand demand = new CoverDemand(3.4, 500, 1000, 0.08);
+        assertThat(StockChoice.best(demand, stock)).isEmpty();
+        StockChoice strongest = StockChoice.strongest(demand, stock).orElseThrow();
+        assertThat(names(strongest)).containsExactly("6 mat 0.5");
+        assertThat(strongest.power()).isEqualTo(540);
+    }
+
+    @Test
     void answersNothingWhereNothingFits() {
         assertThat(StockChoice.best(new CoverDemand(0.5, 100, 200, 0.08), List.of(mat(1, 150))))
                 .isEmpty();
