@@ -274,7 +274,7 @@ final class FloorWarnings {
                         "loops-not-laid",
                         pointer + "/heater",
                         "No loops are laid for this floor.",
-                        "It gives no heat, needs water above 95 °C, or no number of loops keeps 100 m and 25 kPa.",
+                        "It gives no heat, needs water above 95 °C (60 °C with glycol), or no number of loops keeps 100 m and 25 kPa.",
                         "Look at the flux, the feeders and the pipe; another manifold may be nearer.");
             }
             density(pointer + "/heater", heater);

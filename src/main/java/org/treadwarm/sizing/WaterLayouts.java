@@ -18,6 +18,7 @@ import org.treadwarm.physics.water.HeatingWater;
 import org.treadwarm.physics.water.JobSupply;
 import org.treadwarm.physics.water.JobSupply.RoomNeed;
 import org.treadwarm.physics.water.Manifold;
+import org.treadwarm.physics.water.PropyleneGlycol;
 import org.treadwarm.physics.water.RoomCircuits;
 import org.treadwarm.physics.water.RoomCircuits.Loops;
 import org.treadwarm.physics.water.Tube;
@@ -40,7 +41,7 @@ final class WaterLayouts {
 
     private static final double HOTTEST = 95;
 
-    private static final HeatCarrier WATER = Water.atAtmosphere();
+    private static final Water WATER = Water.atAtmosphere();
 
     /** A room's water before and after its loops are laid. */
     private record Room(
@@ -54,6 +55,17 @@ final class WaterLayouts {
             double supply,
             double spread,
             Optional<Loops> loops) {
+        /** What flows through its pipes. */
+        HeatCarrier carrier() {
+            double glycol = heater(floor).glycol().map(Reading::value).orElse(0.0);
+            return glycol > 0 ? new PropyleneGlycol(glycol) : WATER;
+        }
+
+        /** The hottest that its water may be, degrees Celsius. */
+        double hottest() {
+            return carrier() instanceof PropyleneGlycol ? PropyleneGlycol.HOTTEST : HOTTEST;
+        }
+
         double ownSupply() {
             return floor.room + HeatingWater.supplyOvertemperature(over, floor.section.spread());
         }
@@ -132,6 +144,7 @@ final class WaterLayouts {
                 JobSupply.of(needs, governing.floor().section.spread(), WATER).supply();
         List<Room> laid = rooms.stream()
                 .map(room -> room.at(Math.max(room.given().orElse(supply), room.ownSupply())))
+                .filter(room -> room.supply() <= room.hottest())
                 .flatMap(room -> circuits(room).stream())
                 .toList();
         if (laid.isEmpty()) {
@@ -141,7 +154,7 @@ final class WaterLayouts {
         int onManifold = loops.stream().mapToInt(Loops::count).sum();
         laid.forEach(room -> layouts.put(room.floor().plan.room(), layout(room, onManifold)));
         double hottest = laid.stream().mapToDouble(Room::supply).max().orElseThrow();
-        Manifold manifold = Manifold.balance(loops, 0, WATER.density(hottest));
+        Manifold manifold = Manifold.balance(loops, 0, laid.get(0).carrier().density(hottest));
         total = Optional.of(new WaterTotal(
                 hottest,
                 governing.name(),
@@ -185,7 +198,7 @@ final class WaterLayouts {
     /** The room with its loops; empty when no number of loops keeps the longest length and the largest drop. */
     private static Optional<Room> circuits(Room room) {
         try {
-            return Optional.of(room.laid(asked(room).lay(tube(room), WATER, LONGEST, LARGEST_DROP)));
+            return Optional.of(room.laid(asked(room).lay(tube(room), room.carrier(), LONGEST, LARGEST_DROP)));
         } catch (IllegalArgumentException tooMuch) {
             return Optional.empty();
         }
@@ -202,7 +215,7 @@ final class WaterLayouts {
                 room.over(),
                 room.heat(),
                 massFlow,
-                massFlow / WATER.density(room.supply() - room.spread() / 2),
+                massFlow / room.carrier().density(room.supply() - room.spread() / 2),
                 loops.count(),
                 loops.length(),
                 loops.flow().velocity(),

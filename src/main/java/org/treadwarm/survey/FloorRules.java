@@ -1,6 +1,7 @@
 package org.treadwarm.survey;
 
 import java.util.Optional;
+import org.treadwarm.physics.water.PropyleneGlycol;
 import org.treadwarm.units.Numbers;
 import org.treadwarm.units.Reading;
 
@@ -67,6 +68,7 @@ final class FloorRules {
             notHis(pointer + "/density", heater.density(), "only an electric heater has an installed density");
             notHis(pointer + "/linearPower", heater.linearPower(), "only an electric heater has a power per metre");
             notHis(pointer + "/voltage", heater.voltage(), "only an electric heater has a voltage");
+            heater.glycol().ifPresent(share -> mixture(pointer + "/glycol", share));
         } else {
             notHis(pointer + "/wallThickness", heater.wallThickness(), "only a pipe has a wall");
             notHis(pointer + "/wallConductivity", heater.wallConductivity(), "only a pipe has a wall");
@@ -76,8 +78,16 @@ final class FloorRules {
                     "only warm water has a supply temperature");
             notHis(pointer + "/spread", heater.spread(), "only warm water has a spread");
             notHis(pointer + "/feederLength", heater.feederLength(), "only warm water has feeders");
+            notHis(pointer + "/glycol", heater.glycol(), "only warm water may hold glycol");
         }
         sizes(pointer, heater);
+    }
+
+    private void mixture(String pointer, Reading share) {
+        if (share.value() > 0 && share.value() < PropyleneGlycol.WEAKEST) {
+            findings.add(
+                    pointer, share.typed(), "so weak a mixture is not described", "0 for water alone, or 15 to 57 %");
+        }
     }
 
     private void notHis(String pointer, Optional<Reading> reading, String message) {

@@ -118,7 +118,19 @@ public record Heater(
                 plausibleFrom = 0.1,
                 plausibleTo = 60,
                 label = "length of both feeders of a loop, from the manifold and back")
-        Optional<Reading> feederLength) {
+        Optional<Reading> feederLength,
+
+        @Quantity(
+                kind = QuantityKind.RATIO,
+                min = 0,
+                max = 0.57,
+                plausibleFrom = 0,
+                plausibleTo = 0.5,
+                formUnit = "%",
+                label = "propylene glycol in the water, share of the mass",
+                help =
+                        "Water alone when left out; a mixture has 15 to 57 %. The maker of boiler and pipes decides on it.")
+        Optional<Reading> glycol) {
     /** Outside diameter of a cable when none is given, m; common practice, no source. */
     public static final double CABLE_DIAMETER = 0.006;
 
