@@ -21,7 +21,6 @@ import org.treadwarm.survey.CircuitRule;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Heater;
 import org.treadwarm.survey.Layer;
-import org.treadwarm.units.Reading;
 
 /** Feeds the electric heater of a floor. */
 final class ElectricLayouts {
@@ -70,13 +69,9 @@ final class ElectricLayouts {
                     element.highestResistance()));
         }
         HeatingElement whole = new HeatingElement(power, voltage);
-        Optional<Reading> spacing = heater.get().spacing();
         return Optional.of(new ElectricLayout(
                 voltage,
-                spacing.isPresent()
-                        ? OptionalDouble.of(
-                                CableLaying.length(floor.area, spacing.get().value()))
-                        : OptionalDouble.empty(),
+                cable(floor),
                 List.copyOf(elements),
                 whole.powerAt(LOW_VOLTAGE * voltage),
                 whole.powerAt(HIGH_VOLTAGE * voltage),
@@ -84,15 +79,34 @@ final class ElectricLayouts {
     }
 
     private static List<PracticeJudgement> limits(FloorEvaluation floor, HeatedFloor given, Heater heater) {
-        if (heater.spacing().isEmpty()) {
+        if (heater.spacing().isEmpty() && given.parts().isEmpty()) {
             return List.of();
         }
-        double linear = floor.density() * heater.spacing().get().value();
         boolean timber = given.below().stream()
                 .findFirst()
                 .map(ElectricLayouts::isTimber)
                 .orElse(false);
-        return judgements(CableLimits.judge(linear, floor.density(), timber, Practice.electric()));
+        if (given.parts().isEmpty()) {
+            double linear = floor.density() * heater.spacing().get().value();
+            return judgements(CableLimits.judge(linear, floor.density(), timber, Practice.electric()));
+        }
+        double linear = heater.linearPower().orElseThrow().value();
+        double densest = floor.plan.parts().stream()
+                .mapToDouble(part -> linear / floor.whole().in[part.spacing()])
+                .max()
+                .orElseThrow();
+        return judgements(CableLimits.judge(linear, densest, timber, Practice.electric()));
+    }
+
+    /** Cable of the runs at their spacing, m; empty where no spacing is known. */
+    private static OptionalDouble cable(FloorEvaluation floor) {
+        if (!floor.plan.parts().isEmpty()) {
+            return OptionalDouble.of(floor.cable());
+        }
+        int spacing = floor.plan.heater().spacing();
+        return spacing == Stack.NONE
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(CableLaying.length(floor.area, floor.whole().in[spacing]));
     }
 
     private static boolean isTimber(Layer layer) {

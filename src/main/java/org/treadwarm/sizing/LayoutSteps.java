@@ -33,12 +33,7 @@ final class LayoutSteps {
                 "x",
                 Symbol.of("x_given", Addresses.survey("/rooms/" + floor.room() + "/heatedFloor/heater/voltage")));
         if (layout.cableLength().isPresent()) {
-            steps.add(
-                    at + "/cableLength",
-                    "cable-length",
-                    "l",
-                    symbol("A_F", floorAt + "/area"),
-                    Symbol.of("T", addresses.input(floor.heater().spacing())));
+            cable(floor, at + "/cableLength", floorAt);
         }
         steps.add(at + "/powerAtLowVoltage", "power-at-low-voltage", "P_low", power);
         steps.add(at + "/powerAtHighVoltage", "power-at-high-voltage", "P_high", power);
@@ -57,6 +52,32 @@ final class LayoutSteps {
             steps.add(element + "/highestResistance", "highest-element-resistance", "R_high", resistance);
         }
         judged(at, layout.limits());
+    }
+
+    private void cable(FloorPlan floor, String here, String floorAt) {
+        if (floor.parts().isEmpty()) {
+            steps.add(
+                    here,
+                    "cable-length",
+                    "l",
+                    symbol("A_F", floorAt + "/area"),
+                    Symbol.of("T", addresses.input(floor.heater().spacing())));
+            return;
+        }
+        steps.add(
+                here,
+                "cable-length-of-parts",
+                "l",
+                Symbol.all(
+                        "A_p",
+                        floor.parts().stream()
+                                .map(part -> addresses.input(part.area()))
+                                .toList()),
+                Symbol.all(
+                        "T_p",
+                        floor.parts().stream()
+                                .map(part -> addresses.input(part.spacing()))
+                                .toList()));
     }
 
     void water(FloorPlan floor, WaterLayout layout) {
@@ -84,6 +105,12 @@ final class LayoutSteps {
                     symbol("K_H", at + "/tableCoefficient"));
         }
         judged(at, layout.limits());
+        for (int i = 0; i < layout.parts().size(); i++) {
+            String part = at + "/parts/" + i;
+            chosen(part, "heat", "massFlow", "loops", "loopLength", "velocity");
+            chosen(part, "reynolds", "frictionFactor", "pressureDrop", "waterContent");
+            judged(part, layout.parts().get(i).limits());
+        }
     }
 
     /** Warming up after a setback. */

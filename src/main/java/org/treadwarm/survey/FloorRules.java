@@ -40,6 +40,7 @@ final class FloorRules {
         });
         layers(pointer, floor);
         heater(pointer, floor);
+        new PartRules(findings, pointer, floor).check();
     }
 
     private void layers(String pointer, HeatedFloor floor) {
@@ -96,7 +97,7 @@ final class FloorRules {
 
     private void sizes(String pointer, Heater heater) {
         boolean water = heater.kind() == HeaterKind.WATER;
-        double diameter = value(heater.diameter(), water ? Heater.PIPE_DIAMETER : Heater.CABLE_DIAMETER);
+        double diameter = heater.outsideDiameter();
         if (water && 2 * value(heater.wallThickness(), Heater.WALL_THICKNESS) >= diameter) {
             findings.add(
                     pointer + (heater.wallThickness().isPresent() ? "/wallThickness" : "/diameter"),

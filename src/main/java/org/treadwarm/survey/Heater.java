@@ -131,6 +131,11 @@ public record Heater(
                 help =
                         "Water alone when left out; a mixture has 15 to 57 %. The maker of boiler and pipes decides on it.")
         Optional<Reading> glycol) {
+    /** Outside diameter of its cable or pipe, as given or as is usual, m. */
+    double outsideDiameter() {
+        return diameter.map(Reading::value).orElse(kind == HeaterKind.WATER ? PIPE_DIAMETER : CABLE_DIAMETER);
+    }
+
     /** Outside diameter of a cable when none is given, m; common practice, no source. */
     public static final double CABLE_DIAMETER = 0.006;
 
