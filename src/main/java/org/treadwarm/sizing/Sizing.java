@@ -217,9 +217,10 @@ public record Sizing(
 
     /**
      * The warm water of the whole job: one supply temperature, which the room that needs the hottest water governs, and the balance of
-     * its loops.
+     * its loops, each within its manifold.
      *
-     * @param pressure drop of the worst loop, Pa: what the pump gives beside manifold and boiler
+     * @param pressure drop of the worst loop, Pa: what one pump for all manifolds gives beside manifold and boiler
+     * @param manifolds in the order in which the rooms name them
      */
     public record WaterTotal(
             double supplyTemperature,
@@ -228,9 +229,27 @@ public record Sizing(
             double volumeFlow,
             double pressure,
             double waterContent,
+            List<ManifoldSizing> manifolds,
             List<LoopValve> valves) {}
 
-    /** A loop's valve: kg/s through it, the drop of its pipe and what the valve takes away, Pa. */
+    /**
+     * One manifold.
+     *
+     * @param name as the rooms give it; left out for the manifold of the rooms that name none
+     * @param loops how many hang on it
+     * @param pressure drop of its worst loop, Pa
+     * @param throttled what a valve before it takes away when one pump feeds all manifolds, Pa
+     */
+    public record ManifoldSizing(
+            Optional<String> name,
+            int loops,
+            double massFlow,
+            double volumeFlow,
+            double pressure,
+            double throttled,
+            double waterContent) {}
+
+    /** A loop's valve, on the manifold of its room: kg/s through it, the drop of its pipe and what the valve takes away, Pa. */
     public record LoopValve(
             String room, Optional<String> part, int loop, double massFlow, double drop, double throttled) {}
 

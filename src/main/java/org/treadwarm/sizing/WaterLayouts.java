@@ -2,11 +2,13 @@ package org.treadwarm.sizing;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
+import java.util.stream.Collectors;
 import org.treadwarm.physics.floor.Pipe;
 import org.treadwarm.physics.floor.ScreedFloor;
 import org.treadwarm.physics.section.FloorHeater.WaterPipe;
@@ -26,6 +28,7 @@ import org.treadwarm.physics.water.Tube;
 import org.treadwarm.physics.water.Water;
 import org.treadwarm.sizing.PartedFloor.Part;
 import org.treadwarm.sizing.Sizing.LoopValve;
+import org.treadwarm.sizing.Sizing.ManifoldSizing;
 import org.treadwarm.sizing.Sizing.PartLoops;
 import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.sizing.Sizing.WaterLayout;
@@ -68,6 +71,10 @@ final class WaterLayouts {
             return loops.stream()
                     .max(Comparator.comparingDouble(Loops::pressureDrop))
                     .orElseThrow();
+        }
+
+        Optional<String> manifold() {
+            return heater(floor).manifold();
         }
 
         /** What flows through its pipes. */
@@ -185,28 +192,65 @@ final class WaterLayouts {
         if (laid.isEmpty()) {
             return;
         }
-        int onManifold = laid.stream().mapToInt(WaterLayouts::count).sum();
-        laid.forEach(room -> layouts.put(room.floor().plan.room(), layout(room, onManifold)));
-        total = Optional.of(total(governing.name(), laid));
+        Map<Optional<String>, List<Room>> byManifold =
+                laid.stream().collect(Collectors.groupingBy(Room::manifold, LinkedHashMap::new, Collectors.toList()));
+        byManifold.values().forEach(on -> {
+            int loops = on.stream().mapToInt(WaterLayouts::count).sum();
+            on.forEach(room -> layouts.put(room.floor().plan.room(), layout(room, loops)));
+        });
+        total = Optional.of(total(governing.name(), byManifold));
     }
 
     private static int count(Room room) {
         return room.loops().stream().mapToInt(Loops::count).sum();
     }
 
-    private static WaterTotal total(String governing, List<Room> rooms) {
-        double hottest = rooms.stream().mapToDouble(Room::supply).max().orElseThrow();
-        List<Loops> loops =
-                rooms.stream().flatMap(room -> room.loops().stream()).toList();
-        Manifold manifold = Manifold.balance(loops, 0, rooms.get(0).carrier().density(hottest));
+    private static WaterTotal total(String governing, Map<Optional<String>, List<Room>> byManifold) {
+        Map<Optional<String>, Manifold> balanced = new LinkedHashMap<>();
+        byManifold.forEach((name, on) -> balanced.put(name, balance(on)));
+        double pressure = balanced.values().stream()
+                .mapToDouble(manifold -> manifold.duty().pressure())
+                .max()
+                .orElseThrow();
+        List<ManifoldSizing> manifolds = new ArrayList<>();
+        List<LoopValve> valves = new ArrayList<>();
+        balanced.forEach((name, manifold) -> {
+            manifolds.add(answer(name, manifold, pressure));
+            valves.addAll(valves(byManifold.get(name), manifold));
+        });
         return new WaterTotal(
-                hottest,
+                byManifold.values().stream()
+                        .mapToDouble(WaterLayouts::hottest)
+                        .max()
+                        .orElseThrow(),
                 governing,
+                manifolds.stream().mapToDouble(ManifoldSizing::massFlow).sum(),
+                manifolds.stream().mapToDouble(ManifoldSizing::volumeFlow).sum(),
+                pressure,
+                manifolds.stream().mapToDouble(ManifoldSizing::waterContent).sum(),
+                List.copyOf(manifolds),
+                List.copyOf(valves));
+    }
+
+    private static ManifoldSizing answer(Optional<String> name, Manifold manifold, double pressure) {
+        return new ManifoldSizing(
+                name,
+                manifold.valves().size(),
                 manifold.duty().massFlow(),
                 manifold.duty().volumeFlow(),
                 manifold.duty().pressure(),
-                manifold.content(),
-                valves(rooms, manifold));
+                pressure - manifold.duty().pressure(),
+                manifold.content());
+    }
+
+    private static double hottest(List<Room> rooms) {
+        return rooms.stream().mapToDouble(Room::supply).max().orElseThrow();
+    }
+
+    private static Manifold balance(List<Room> rooms) {
+        List<Loops> loops =
+                rooms.stream().flatMap(room -> room.loops().stream()).toList();
+        return Manifold.balance(loops, 0, rooms.get(0).carrier().density(hottest(rooms)));
     }
 
     /** The valves of a manifold; its loops stand in the order of rooms and parts. */

@@ -80,6 +80,9 @@ final class FloorRules {
             notHis(pointer + "/spread", heater.spread(), "only warm water has a spread");
             notHis(pointer + "/feederLength", heater.feederLength(), "only warm water has feeders");
             notHis(pointer + "/glycol", heater.glycol(), "only warm water may hold glycol");
+            heater.manifold()
+                    .ifPresent(name -> findings.add(
+                            pointer + "/manifold", name, "only warm water comes from a manifold", "leave it out"));
         }
         sizes(pointer, heater);
     }

@@ -120,6 +120,11 @@ public record Heater(
                 label = "length of both feeders of a loop, from the manifold and back")
         Optional<Reading> feederLength,
 
+        @Wording(
+                label = "manifold that feeds the loops",
+                help = "Rooms that name the same one are balanced together; without names there is one manifold.")
+        Optional<String> manifold,
+
         @Quantity(
                 kind = QuantityKind.RATIO,
                 min = 0,

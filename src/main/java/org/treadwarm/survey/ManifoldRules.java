@@ -1,9 +1,11 @@
 package org.treadwarm.survey;
 
+import java.util.HashMap;
+import java.util.Map;
 import java.util.Optional;
 import org.treadwarm.units.Reading;
 
-/** What must hold between the warm-water floors of a job: the same liquid flows through all of them. */
+/** What must hold between the warm-water floors of one manifold: the same liquid flows through all of them. */
 final class ManifoldRules {
     private final Survey survey;
     private final Findings findings;
@@ -21,19 +23,19 @@ final class ManifoldRules {
     }
 
     void check() {
-        Optional<Fed> first = Optional.empty();
+        Map<Optional<String>, Fed> first = new HashMap<>();
         for (int i = 0; i < survey.rooms().size(); i++) {
             Room room = survey.rooms().get(i);
             Optional<Fed> fed = room.heatedFloor()
                     .flatMap(HeatedFloor::heater)
                     .filter(heater -> heater.kind() == HeaterKind.WATER)
                     .map(heater -> new Fed(room.name(), heater));
-            if (first.isPresent()
-                    && fed.isPresent()
-                    && first.get().glycol() != fed.get().glycol()) {
-                differs("/rooms/" + i + "/heatedFloor/heater/glycol", fed.get(), first.get());
+            if (fed.isPresent()) {
+                Fed known = first.computeIfAbsent(fed.get().heater().manifold(), name -> fed.get());
+                if (known.glycol() != fed.get().glycol()) {
+                    differs("/rooms/" + i + "/heatedFloor/heater/glycol", fed.get(), known);
+                }
             }
-            first = first.or(() -> fed);
         }
     }
 
@@ -43,7 +45,7 @@ final class ManifoldRules {
                 pointer,
                 given,
                 "the same liquid flows through \"" + first.room() + "\", which has " + words(first.heater()),
-                "one share of glycol for all warm water of the job");
+                "one share of glycol for all floors of a manifold");
     }
 
     private static String words(Heater heater) {

@@ -135,22 +135,37 @@ class PartedFloorTest {
                 .isCloseTo(water.heat(), within(1e-9))
                 .isCloseTo(
                         Math.min(
-                                                1,
-                                                floor(SIZING, 0).carryingFlux().orElseThrow()
-                                                        / floor(SIZING, 0)
-                                                                .requiredFlux()
-                                                                .orElseThrow())
-                                        < 1
-                                ? floor(SIZING, 0)
-                                        .atCarryingFlux()
-                                        .orElseThrow()
-                                        .heaterPower()
-                                : floor(SIZING, 0).heaterPower().orElseThrow(),
+                                floor(SIZING, 0).heaterPower().orElseThrow(),
+                                floor(SIZING, 0).atCarryingFlux().orElseThrow().heaterPower()),
                         within(1e-6));
         var valves = SIZING.total().water().orElseThrow().valves();
         assertThat(valves).hasSize(water.loops());
         assertThat(valves.get(0).part()).contains("strip");
         assertThat(valves.get(valves.size() - 1).part()).contains("part 2");
+    }
+
+    @Test
+    void eachManifoldIsBalancedByItself() {
+        var both = Surveys.sized(PartedJob.twoManifolds()).total().water().orElseThrow();
+        var alone = SIZING.total().water().orElseThrow();
+        assertThat(alone.manifolds()).singleElement().satisfies(only -> {
+            assertThat(only.name()).isEmpty();
+            assertThat(only.pressure()).isEqualTo(alone.pressure());
+            assertThat(only.throttled()).isZero();
+        });
+        assertThat(both.manifolds().get(0).massFlow()).isEqualTo(alone.massFlow());
+        assertThat(both.manifolds().get(1).name()).contains("annex");
+        for (var manifold : both.manifolds()) {
+            var valves = both.valves().stream()
+                    .filter(valve ->
+                            valve.room().equals("other hall") == manifold.name().isPresent())
+                    .toList();
+            assertThat(valves)
+                    .hasSize(manifold.loops())
+                    .allSatisfy(valve ->
+                            assertThat(valve.drop() + valve.throttled()).isCloseTo(manifold.pressure(), within(1e-6)));
+            assertThat(manifold.pressure() + manifold.throttled()).isCloseTo(both.pressure(), within(1e-6));
+        }
     }
 
     @Test

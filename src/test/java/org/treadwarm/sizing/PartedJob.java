@@ -39,7 +39,20 @@ final class PartedJob {
         ObjectNode cold = survey();
         cold.withObject("/site").put("outdoorTemperature", -50);
         room(cold, 1).withObject("/heatedFloor/heater").put("linearPower", 3);
-        return List.of(survey(), hot, unneeded, cold);
+        return List.of(survey(), hot, unneeded, cold, twoManifolds());
+    }
+
+    /** One hall more, on a manifold of its own with glycol in it. */
+    static ObjectNode twoManifolds() {
+        ObjectNode survey = survey();
+        ObjectNode other = room(survey, 0).deepCopy();
+        other.put("name", "other hall");
+        other.withObject("/heatedFloor/heater")
+                .put("manifold", "annex")
+                .put("glycol", 0.3)
+                .put("feederLength", 20);
+        survey.withArray("rooms").add(other);
+        return survey;
     }
 
     static ArrayNode parts(ObjectNode survey, int room) {

@@ -12,6 +12,7 @@ import org.treadwarm.intake.Ranges;
 import org.treadwarm.survey.AirGap;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Bridging;
+import org.treadwarm.survey.FloorPart;
 import org.treadwarm.survey.Ground;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Junction;
@@ -61,6 +62,8 @@ final class Forms {
             "insideCoefficient",
             "outsideCoefficient",
             "maximumTemperature",
+            "glycol",
+            "manifold",
             "spacing");
     private static final Map<String, String> ADD = Map.ofEntries(
             Map.entry("surfaces", "Add a surface"),
@@ -69,6 +72,7 @@ final class Forms {
             Map.entry("layers", "Add a layer"),
             Map.entry("above", "Add a layer above"),
             Map.entry("below", "Add a layer below"),
+            Map.entry("parts", "Add a part"),
             Map.entry("heatedFloor", "Add a heated floor"),
             Map.entry("airGap", "Make it an air gap"),
             Map.entry("bridging", "Add framing"),
@@ -141,7 +145,9 @@ final class Forms {
                     fields.add(field(node.path(each.name()).path(i), each, Pointer.to(at, i), title));
                 }
             } else {
-                (SELDOM.contains(each.name()) ? more : fields).add(field(node.path(each.name()), each, at, title));
+                boolean seldom = SELDOM.contains(each.name())
+                        && (type != FloorPart.class || each.name().equals("remark"));
+                (seldom ? more : fields).add(field(node.path(each.name()), each, at, title));
             }
         }
         boolean wrong = errors.size() > before;
@@ -240,7 +246,9 @@ final class Forms {
     private static String itemTitle(JsonNode node, Class<?> type, int i) {
         String what = type == Surface.class
                 ? "Surface"
-                : type == Opening.class ? "Opening" : type == Junction.class ? "Junction" : "Layer";
+                : type == Opening.class
+                        ? "Opening"
+                        : type == Junction.class ? "Junction" : type == FloorPart.class ? "Part" : "Layer";
         for (String key : List.of("name", "assembly", "material")) {
             if (node.path(key).isTextual() && !node.path(key).textValue().isBlank()) {
                 return what + " " + (i + 1) + ": " + node.path(key).textValue();
