@@ -13,11 +13,11 @@ import org.treadwarm.physics.water.HeatedZone;
 import org.treadwarm.physics.water.HeatingWater;
 import org.treadwarm.physics.water.LiquidWater;
 import org.treadwarm.physics.water.PipeFriction;
+import org.treadwarm.physics.water.PropyleneGlycol;
 import org.treadwarm.physics.water.Tube;
 import org.treadwarm.physics.water.Water;
 import org.treadwarm.physics.water.WaterViscosity;
 import org.treadwarm.sizing.FloorMethods;
-import org.treadwarm.sizing.HeatCarriers;
 import org.treadwarm.sizing.Practice;
 
 /** Water, glycol, pipes and circuits. */
@@ -66,11 +66,11 @@ final class CircuitChecks {
                 "cp_kJ_kgK",
                 given.numbers("percent")
                         .flatMap(percent -> given.numbers("t_C")
-                                .map(HeatCarriers.propyleneGlycol(percent)::specificHeat)
+                                .map(new PropyleneGlycol(percent / 100)::specificHeat)
                                 .map(heat -> heat / 1000)),
                 "rho",
                 given.numbers("percent")
-                        .flatMap(percent -> given.numbers("t_C").map(HeatCarriers.propyleneGlycol(percent)::density)));
+                        .flatMap(percent -> given.numbers("t_C").map(new PropyleneGlycol(percent / 100)::density)));
     }
 
     private static Map<String, DoubleStream> friction(Inputs given) {

@@ -84,10 +84,6 @@ final class Binder {
                 continue;
             }
             String at = Pointer.to(pointer, name);
-            if (shape.type() == org.treadwarm.survey.HeatedFloor.class && name.equals("parts")) {
-                findings.add(at, name, "\"parts\" is reserved for a later method", "leave it out");
-                continue;
-            }
             String shown = shown(name);
             String nearest = Nearest.to(name, shape.keys().keySet()).orElse("");
             findings.add(

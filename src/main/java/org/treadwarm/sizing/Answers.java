@@ -12,6 +12,7 @@ import org.treadwarm.sizing.Plan.EdgePlan;
 import org.treadwarm.sizing.Plan.FloorPlan;
 import org.treadwarm.sizing.Plan.Link;
 import org.treadwarm.sizing.Plan.LinkKind;
+import org.treadwarm.sizing.Plan.PartPlan;
 import org.treadwarm.sizing.Plan.PathRef;
 import org.treadwarm.sizing.Plan.Side;
 import org.treadwarm.sizing.Sizing.AssemblySizing;
@@ -35,7 +36,6 @@ import org.treadwarm.sizing.Sizing.Total;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Layer;
-import org.treadwarm.survey.Zone;
 import org.treadwarm.units.Reading;
 
 /** Turns the numbers of an evaluation into the records of the answer. */
@@ -242,6 +242,7 @@ final class Answers {
                 List.of(),
                 List.of(),
                 Optional.empty(),
+                List.of(),
                 Optional.empty(),
                 Optional.empty(),
                 Optional.empty(),
@@ -282,7 +283,7 @@ final class Answers {
                 holds ? of(floor.holdsDownTo) : empty(),
                 holds ? Optional.empty() : Optional.of(floor.holdsDownTo < 0 ? "beyond -60" : "never"),
                 of(state.surfaceTemperature()),
-                Optional.of(floor.section == null ? "mean (plane)" : "warmest point (section)"),
+                Optional.of(floor.section == null && floor.parted == null ? "mean (plane)" : "warmest point (section)"),
                 of(state.heaterTemperature()),
                 of(state.downwardFlux()),
                 of(state.edgeFlux()),
@@ -300,7 +301,8 @@ final class Answers {
                 Optional.of(below(floor)),
                 edges(floor),
                 limits(floor, given),
-                floor.section == null ? Optional.empty() : Optional.of(new SectionAnswers(floor, given).all()),
+                floor.section == null ? Optional.empty() : Optional.of(new SectionAnswers(floor.section, given).all()),
+                floor.parted == null ? List.of() : new PartAnswers(floor, given).all(),
                 floor.sectionReason.isEmpty() ? Optional.empty() : Optional.of(floor.sectionReason),
                 ElectricLayouts.of(floor, given, mats.layout()),
                 waters.of(floor.plan.room()),
@@ -311,6 +313,9 @@ final class Answers {
     }
 
     private FloorState state(FloorEvaluation floor, double flux) {
+        if (floor.parted != null) {
+            return PartAnswers.whole(floor.parted, flux, numbers.outdoor);
+        }
         if (floor.section != null) {
             SectionFloor.State state = floor.section.at(flux, numbers.outdoor);
             return new FloorState(
@@ -358,16 +363,14 @@ final class Answers {
 
     private List<Limit> limits(FloorEvaluation floor, HeatedFloor given) {
         List<Limit> limits = new ArrayList<>();
-        Zone zone = given.zone();
-        addLimit(limits, floor, 0, Limits.SURFACE + zone.label(), Limits.SURFACE_SOURCE);
-        addLimit(limits, floor, 1, Limits.COVERING, Limits.COVERING_SOURCE);
-        for (int i = 0; i < floor.plan.layerLimits().size(); i++) {
-            addLimit(
-                    limits,
-                    floor,
-                    2 + i,
-                    Limits.LAYER + floor.plan.layerLimits().get(i).name(),
-                    Limits.LAYER_SOURCE);
+        int slots = floor.slotsOfAPart();
+        for (int i = 0; i < slots && floor.parted == null; i++) {
+            addLimit(limits, floor, i, Limits.name(floor.plan, given.zone(), i), Limits.source(i));
+        }
+        for (int i = 0; i < slots * floor.plan.parts().size() && floor.parted != null; i++) {
+            PartPlan part = floor.plan.parts().get(i / slots);
+            String name = Limits.name(floor.plan, part.zone(), i % slots) + ", " + part.name();
+            addLimit(limits, floor, i, name, Limits.source(i % slots));
         }
         addLimit(limits, floor, floor.limits.length - 2, Limits.HEATER, Limits.HEATER_SOURCE);
         addLimit(limits, floor, floor.limits.length - 1, Limits.WATER, Limits.WATER_SOURCE);

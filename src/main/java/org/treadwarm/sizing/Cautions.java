@@ -29,6 +29,11 @@ final class Cautions {
             "water-limit",
             "Scalding and damaged covering: the supply has a mixing valve and a safety limit; pressure-test before covering.",
             PRACTICE);
+    private static final Caution GLYCOL = new Caution(
+            "glycol-maker",
+            "Corrosion, leaks and frost: kind and share of glycol and its inhibitors are decided by the makers of boiler, pipes and"
+                    + " seals; too weak a mixture corrodes, and the frost it stands is measured, not computed.",
+            PRACTICE);
     private static final Caution FURNITURE = new Caution(
             "no-covered-heater",
             "Fire and overheating: no heater under fixed furniture, baths or cupboards, none across expansion joints; rugs and"
@@ -72,6 +77,13 @@ final class Cautions {
             }
             if (kind.isEmpty() || kind.get() == HeaterKind.WATER) {
                 cautions.add(WATER);
+            }
+            if (floor.get()
+                    .heater()
+                    .flatMap(Heater::glycol)
+                    .filter(share -> share.value() > 0)
+                    .isPresent()) {
+                cautions.add(GLYCOL);
             }
             if (floor.get().zone() == Zone.BATHROOM) {
                 cautions.add(WET_ROOM);

@@ -58,14 +58,9 @@ final class ElectricLayouts {
         }
         double power = floor.density() * floor.area;
         List<HeatingElementLayout> elements = elements(heater.get(), voltage, power);
-        OptionalDouble length = heater.get().spacing().isPresent()
-                ? OptionalDouble.of(CableLaying.length(
-                        floor.area, heater.get().spacing().get().value()))
-                : OptionalDouble.empty();
         return elements.isEmpty()
                 ? Optional.empty()
-                : Optional.of(
-                        layout(voltage, length, elements, mats, power, limits(floor.density(), given, heater.get())));
+                : Optional.of(layout(voltage, cable(floor), elements, mats, power, limits(floor, given, heater.get())));
     }
 
     private static ElectricLayout layout(
@@ -136,12 +131,22 @@ final class ElectricLayouts {
         return heater.circuitRule() == CircuitRule.US ? US_BREAKER : EUROPEAN_BREAKER;
     }
 
-    private static List<PracticeJudgement> limits(double density, HeatedFloor given, Heater heater) {
+    private static List<PracticeJudgement> limits(FloorEvaluation floor, HeatedFloor given, Heater heater) {
+        boolean timber = onTimber(given);
+        if (!given.parts().isEmpty()) {
+            double linear = heater.linearPower().orElseThrow().value();
+            double densest = floor.plan.parts().stream()
+                    .mapToDouble(part -> linear / floor.whole().in[part.spacing()])
+                    .max()
+                    .orElseThrow();
+            return judgements(CableLimits.judge(linear, densest, timber, Practice.electric()));
+        }
+        double density = floor.density();
         return judgements(
                 heater.spacing().isPresent()
                         ? CableLimits.judge(
-                                density * heater.spacing().get().value(), density, onTimber(given), Practice.electric())
-                        : CableLimits.judgeDensity(density, onTimber(given), Practice.electric()));
+                                density * heater.spacing().get().value(), density, timber, Practice.electric())
+                        : CableLimits.judgeDensity(density, timber, Practice.electric()));
     }
 
     private static List<PracticeJudgement> limits(MatLayout mats, HeatedFloor given) {
@@ -152,6 +157,17 @@ final class ElectricLayouts {
 
     private static boolean onTimber(HeatedFloor given) {
         return given.below().stream().findFirst().map(ElectricLayouts::isTimber).orElse(false);
+    }
+
+    /** Cable of the runs at their spacing, m; empty where no spacing is known. */
+    private static OptionalDouble cable(FloorEvaluation floor) {
+        if (!floor.plan.parts().isEmpty()) {
+            return OptionalDouble.of(floor.cable());
+        }
+        int spacing = floor.plan.heater().spacing();
+        return spacing == Stack.NONE
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(CableLaying.length(floor.area, floor.whole().in[spacing]));
     }
 
     private static boolean isTimber(Layer layer) {

@@ -1,11 +1,16 @@
 package org.treadwarm.sizing;
 
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
 import java.util.Optional;
 import org.treadwarm.physics.floor.HeatedFloor;
 import org.treadwarm.physics.section.FloorResponse;
 import org.treadwarm.sizing.Plan.EdgePlan;
 import org.treadwarm.sizing.Plan.FloorPlan;
 import org.treadwarm.sizing.Plan.LayerLimit;
+import org.treadwarm.sizing.Plan.PartPlan;
+import org.treadwarm.survey.Heater;
 import org.treadwarm.survey.Zone;
 import org.treadwarm.tables.Films;
 
@@ -21,8 +26,11 @@ final class FloorEvaluation {
     private static final double OUTDOOR_FILM = Films.outside("down");
     private static final double GROUND_FILM = Films.outside("down");
 
-    /** Limits beside those of the layers: zone, covering, density of the heater, supply of the water. */
-    private static final int OTHER_LIMITS = 4;
+    /** Limits of every part beside those of the layers: zone, covering. */
+    private static final int SURFACE_LIMITS = 2;
+
+    /** Limits of the whole floor: density of the heater, supply of the water. */
+    private static final int HEATER_LIMITS = 2;
 
     final FloorPlan plan;
     final double[] limits;
@@ -51,6 +59,9 @@ final class FloorEvaluation {
     /** The floor solved between its cables or pipes; null when the heater has no spacing or cannot be solved. */
     SectionFloor section;
 
+    /** The floor laid in parts, each solved between its cables or pipes; null without parts, or when they cannot be solved. */
+    PartedFloor parted;
+
     /** How the floor warms its room after the setback that the survey gives; empty without one, or when it cannot be followed. */
     Optional<WarmUpFloor> warmUp = Optional.empty();
 
@@ -73,7 +84,7 @@ final class FloorEvaluation {
                 .heatedFloor()
                 .orElseThrow()
                 .zone();
-        this.limits = new double[plan.layerLimits().size() + OTHER_LIMITS];
+        this.limits = new double[Math.max(1, plan.parts().size()) * slotsOfAPart() + HEATER_LIMITS];
         this.toLayer = new double[plan.layerLimits().size()];
     }
 
@@ -88,7 +99,8 @@ final class FloorEvaluation {
         requiredFlux = requiredHeat / area;
         limits();
         section();
-        holdsDownTo = section == null ? lowestOutdoor() : section.lowestOutdoor();
+        holdsDownTo =
+                parted != null ? parted.lowestOutdoor() : section == null ? lowestOutdoor() : section.lowestOutdoor();
     }
 
     /** Whether every number of the floor is finite; a limit or a lowest outdoor temperature that is infinite means that there is none. */
@@ -180,21 +192,37 @@ final class FloorEvaluation {
 
     /** Heat that the heater makes, W/m²: as given, or the cable's power over its spacing. For a heater that {@link Plan.HeaterPlan#hasDensity()}. */
     double density() {
-        return plan.heater().density() == Stack.NONE
+        if (plan.heater().density() != Stack.NONE) {
+            return whole.in[plan.heater().density()];
+        }
+        return plan.parts().isEmpty()
                 ? whole.in[plan.heater().linearPower()] / whole.in[plan.heater().spacing()]
-                : whole.in[plan.heater().density()];
+                : whole.in[plan.heater().linearPower()] * cable() / partsArea();
+    }
+
+    private double partsArea() {
+        return plan.parts().stream().mapToDouble(part -> whole.in[part.area()]).sum();
+    }
+
+    /** Cable or pipe in all parts: each one's area over its spacing, m. */
+    double cable() {
+        return plan.parts().stream()
+                .mapToDouble(part -> whole.in[part.area()] / whole.in[part.spacing()])
+                .sum();
+    }
+
+    /** How many limits each part of the floor has, and a floor without parts beside those of its heater. */
+    int slotsOfAPart() {
+        return SURFACE_LIMITS + plan.layerLimits().size();
     }
 
     double zoneMaximum() {
-        return switch (zone) {
-            case OCCUPIED -> Limits.OCCUPIED;
-            case PERIPHERAL -> Limits.PERIPHERAL;
-            case BATHROOM -> room + Limits.BATHROOM_RISE;
-        };
+        return Limits.zoneMaximum(zone, room);
     }
 
     private void limits() {
-        int last = limits.length - 2;
+        int last = limits.length - HEATER_LIMITS;
+        Arrays.fill(limits, Double.POSITIVE_INFINITY);
         limits[0] = HeatedFloor.flux(zoneMaximum() - room);
         limits[1] = plan.maximumSurface() == Stack.NONE
                 ? Double.POSITIVE_INFINITY
@@ -211,7 +239,6 @@ final class FloorEvaluation {
             limits[2 + i] = HeatedFloor.fluxAtTemperature(whole.in[limit.maximum()], room, down);
         }
         limits[last] = heaterLimit(whole.outdoor);
-        limits[last + 1] = Double.POSITIVE_INFINITY;
         govern();
     }
 
@@ -239,27 +266,65 @@ final class FloorEvaluation {
 
     private void section() {
         section = null;
+        parted = null;
         sectionReason = "";
-        if (plan.heater().spacing() == Stack.NONE) {
+        if (plan.heater().spacing() == Stack.NONE && plan.parts().isEmpty()) {
             return;
         }
         if (!(requiredFlux <= SectionFloor.HIGHEST_FLUX)) {
             sectionReason = "the required flux is far beyond what any floor gives";
             return;
         }
-        SectionGeometry.Made made = SectionGeometry.of(this, whole);
+        if (plan.parts().isEmpty()) {
+            Optional<SectionFloor> found = solved(whole.in[plan.heater().spacing()]);
+            found.ifPresent(floor -> floor.limits(limits));
+            section = found.orElse(null);
+        } else {
+            parted = parts().orElse(null);
+        }
+        govern();
+    }
+
+    /** The floor with one spacing; empty, with the reason told, when it cannot be solved. */
+    private Optional<SectionFloor> solved(double spacing) {
+        SectionGeometry.Made made = SectionGeometry.of(this, whole, spacing);
         if (made.geometry().isEmpty()) {
             sectionReason = made.whyNot();
-            return;
+            return Optional.empty();
         }
         Optional<FloorResponse> response = whole.sections.of(made.geometry().get());
         if (response.isEmpty()) {
             sectionReason = whole.sections.whyNot();
-            return;
         }
-        section = new SectionFloor(this, made.geometry().get(), response.get());
-        section.limits(limits);
-        govern();
+        return response.map(found -> new SectionFloor(this, made.geometry().get(), found));
+    }
+
+    private Optional<PartedFloor> parts() {
+        List<PartedFloor.Part> parts = new ArrayList<>();
+        for (PartPlan part : plan.parts()) {
+            Optional<SectionFloor> found = solved(whole.in[part.spacing()]);
+            if (found.isEmpty()) {
+                return Optional.empty();
+            }
+            parts.add(new PartedFloor.Part(part.name(), part.zone(), whole.in[part.area()], found.get()));
+        }
+        PartedFloor floor = new PartedFloor(this, parts);
+        if (!floor.gives(requiredFlux, whole.outdoor)) {
+            sectionReason = "the parts would have to give far more than any floor does";
+            return Optional.empty();
+        }
+        floor.limits(limits);
+        return Optional.of(floor);
+    }
+
+    Zone zone() {
+        return zone;
+    }
+
+    /** Between supply and return of the water, K. */
+    double waterSpread() {
+        int given = plan.heater().spread();
+        return given == Stack.NONE ? Heater.SPREAD : whole.in[given];
     }
 
     Evaluation whole() {
@@ -277,7 +342,7 @@ final class FloorEvaluation {
     /** The lowest of the limits that do not depend on the outdoor temperature. */
     private double fixedLimit() {
         double lowest = plan.heater().hasDensity() ? density() : Double.POSITIVE_INFINITY;
-        for (int i = 0; i < limits.length - 2; i++) {
+        for (int i = 0; i < limits.length - HEATER_LIMITS; i++) {
             lowest = Math.min(lowest, limits[i]);
         }
         return lowest;

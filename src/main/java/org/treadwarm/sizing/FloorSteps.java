@@ -2,6 +2,7 @@ package org.treadwarm.sizing;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.treadwarm.sizing.Plan.FloorPlan;
 import org.treadwarm.sizing.Plan.RoomIndexes;
 import org.treadwarm.sizing.Sizing.FloorSizing;
@@ -27,12 +28,25 @@ final class FloorSteps {
     void all(FloorSizing answer) {
         demand();
         margin(answer);
-        boolean section = answer.section().isPresent();
-        state(at, "/requiredFlux", section ? at + "/section/atRequiredFlux" : "");
-        state(at + "/atCarryingFlux", "/carryingFlux", section ? at + "/section/atCarryingFlux" : "");
-        answer.section().ifPresent(solved -> new SectionSteps(addresses, steps, floor).all(solved));
+        if (answer.parts().isEmpty()) {
+            boolean section = answer.section().isPresent();
+            state(at, "/requiredFlux", section ? at + "/section/atRequiredFlux" : "");
+            state(at + "/atCarryingFlux", "/carryingFlux", section ? at + "/section/atCarryingFlux" : "");
+            answer.section().ifPresent(solved -> new SectionSteps(addresses, steps, floor, "/section").all(solved));
+        } else {
+            new PartSteps(plan, addresses, steps, floor).all(answer);
+            power(at, answered("q", "/requiredFlux"));
+            power(at + "/atCarryingFlux", answered("q", "/carryingFlux"));
+        }
         if (answer.installedPower().isPresent()) {
-            if (floor.heater().density() == Stack.NONE) {
+            if (!answer.parts().isEmpty()) {
+                steps.add(
+                        at + "/installedDensity",
+                        "mean-over-parts",
+                        "X",
+                        Symbol.all("A_p", parts(answer, "/area")),
+                        Symbol.all("x_p", parts(answer, "/density")));
+            } else if (floor.heater().density() == Stack.NONE) {
                 steps.add(
                         at + "/installedDensity",
                         "density-of-cable",
@@ -101,12 +115,29 @@ final class FloorSteps {
         }
     }
 
+    private List<String> parts(FloorSizing answer, String key) {
+        return IntStream.range(0, answer.parts().size())
+                .mapToObj(i -> Addresses.sizing(at + "/parts/" + i + key))
+                .toList();
+    }
+
     /** Temperatures and fluxes with the floor giving a flux; solved ones come from the state of the section, when it has an address. */
     private void state(String here, String fluxKey, String section) {
         Symbol flux = answered("q", fluxKey);
         Symbol heater = section.isEmpty()
                 ? plane(here, flux)
                 : Symbol.of("theta_h", Addresses.sizing(section + "/heaterPlane"));
+        losses(here, heater);
+        power(here, flux);
+    }
+
+    /** What the floor, or a part of it, makes at a flux, with its heater plane at an address. */
+    void made(String here, Symbol flux, String heaterPlane) {
+        losses(here, Symbol.of("theta_h", Addresses.sizing(heaterPlane)));
+        heaterFlux(here, flux);
+    }
+
+    private void losses(String here, Symbol heater) {
         steps.add(
                 here + "/downwardFlux",
                 "downward-flux",
@@ -115,6 +146,9 @@ final class FloorSteps {
                 heater,
                 answered("theta_u", "/below/temperature"));
         edge(here + "/edgeFlux", heater);
+    }
+
+    private void heaterFlux(String here, Symbol flux) {
         steps.add(
                 here + "/heaterFlux",
                 "heater-flux",
@@ -122,6 +156,10 @@ final class FloorSteps {
                 flux,
                 Symbol.of("q_u", Addresses.sizing(here + "/downwardFlux")),
                 Symbol.of("q_e", Addresses.sizing(here + "/edgeFlux")));
+    }
+
+    private void power(String here, Symbol flux) {
+        heaterFlux(here, flux);
         steps.add(
                 here + "/heaterPower",
                 "heater-power",

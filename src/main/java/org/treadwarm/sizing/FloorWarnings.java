@@ -9,6 +9,7 @@ import java.util.stream.Stream;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.Warning;
+import org.treadwarm.survey.FloorPart;
 import org.treadwarm.survey.Ground;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Heater;
@@ -92,16 +93,27 @@ final class FloorWarnings {
                     "The unheated rest of the floor loses heat too.",
                     "List it as a surface, with what lies below it.");
         }
-        if (floor.zone() == Zone.PERIPHERAL) {
-            double perimeter = perimeter(room, floor);
-            if (heated > perimeter) {
-                add(
-                        "peripheral-area-too-wide",
-                        pointer + "/zone",
-                        "The peripheral area is wider than 1 m along the outer walls.",
-                        "35 °C is meant for a strip of at most 1 m along outer walls, where nobody stays (EN 1264-3).",
-                        "Make it an occupied area, or heat only the strip.");
+        double strips = 0;
+        for (int k = 0; k < floor.parts().size(); k++) {
+            FloorPart part = floor.parts().get(k);
+            strips += part.zone() == Zone.PERIPHERAL ? part.area().value() : 0;
+            if (part.zone() == Zone.PERIPHERAL) {
+                strip(pointer + "/parts/" + k + "/zone", strips, room, floor);
             }
+        }
+        if (floor.zone() == Zone.PERIPHERAL && floor.parts().isEmpty()) {
+            strip(pointer + "/zone", heated, room, floor);
+        }
+    }
+
+    private void strip(String pointer, double area, Room room, HeatedFloor floor) {
+        if (area > perimeter(room, floor)) {
+            add(
+                    "peripheral-area-too-wide",
+                    pointer,
+                    "The peripheral area is wider than 1 m along the outer walls.",
+                    "35 °C is meant for a strip of at most 1 m along outer walls, where nobody stays (EN 1264-3).",
+                    "Make it an occupied area, or heat only the strip.");
         }
     }
 
@@ -252,7 +264,9 @@ final class FloorWarnings {
 
     private void heater(String pointer, HeatedFloor floor, FloorSizing answer) {
         floor.heater().ifPresent(heater -> {
-            if (heater.kind() == HeaterKind.WATER && heater.spacing().isEmpty()) {
+            if (heater.kind() == HeaterKind.WATER
+                    && heater.spacing().isEmpty()
+                    && floor.parts().isEmpty()) {
                 add(
                         "water-not-checked",
                         pointer + "/heater",
@@ -269,13 +283,13 @@ final class FloorWarnings {
                                     "The heater is taken as a plane: between cables or pipes the surface is cooler, above them warmer.",
                                     "Give thickness and conductivity of the layer that holds the heater; keep a reserve to the surface limit."));
             if (heater.kind() == HeaterKind.WATER
-                    && answer.section().isPresent()
+                    && (answer.section().isPresent() || !answer.parts().isEmpty())
                     && answer.water().isEmpty()) {
                 add(
                         "loops-not-laid",
                         pointer + "/heater",
                         "No loops are laid for this floor.",
-                        "It gives no heat, needs water above 95 °C, or no number of loops keeps 100 m and 25 kPa.",
+                        "It gives no heat, needs water above 95 °C (60 °C with glycol), or no number of loops keeps 100 m and 25 kPa.",
                         "Look at the flux, the feeders and the pipe; another manifold may be nearer.");
             }
             density(pointer + "/heater", heater);

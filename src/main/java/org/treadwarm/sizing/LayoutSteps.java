@@ -1,7 +1,9 @@
 package org.treadwarm.sizing;
 
-import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.treadwarm.sizing.Plan.FloorPlan;
 import org.treadwarm.sizing.Plan.RoomIndexes;
@@ -11,6 +13,9 @@ import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.WarmUpSizing;
 import org.treadwarm.sizing.Sizing.WaterLayout;
 import org.treadwarm.sizing.Sizing.WaterTotal;
+import org.treadwarm.survey.HeatedFloor;
+import org.treadwarm.survey.Heater;
+import org.treadwarm.survey.Survey;
 
 /** Steps of how a floor is fed: electric elements, or loops of warm water. */
 final class LayoutSteps {
@@ -33,12 +38,7 @@ final class LayoutSteps {
                 "x",
                 Symbol.of("x_given", Addresses.survey("/rooms/" + floor.room() + "/heatedFloor/heater/voltage")));
         if (layout.cableLength().isPresent()) {
-            steps.add(
-                    at + "/cableLength",
-                    "cable-length",
-                    "l",
-                    symbol("A_F", floorAt + "/area"),
-                    Symbol.of("T", addresses.input(floor.heater().spacing())));
+            cable(floor, at + "/cableLength", floorAt);
         }
         steps.add(at + "/powerAtLowVoltage", "power-at-low-voltage", "P_low", power);
         steps.add(at + "/powerAtHighVoltage", "power-at-high-voltage", "P_high", power);
@@ -58,6 +58,32 @@ final class LayoutSteps {
         }
         layout.mats().ifPresent(mats -> new MatSteps(steps, floorAt).all(mats, planned));
         judged(at, layout.limits());
+    }
+
+    private void cable(FloorPlan floor, String here, String floorAt) {
+        if (floor.parts().isEmpty()) {
+            steps.add(
+                    here,
+                    "cable-length",
+                    "l",
+                    symbol("A_F", floorAt + "/area"),
+                    Symbol.of("T", addresses.input(floor.heater().spacing())));
+            return;
+        }
+        steps.add(
+                here,
+                "cable-length-of-parts",
+                "l",
+                Symbol.all(
+                        "A_p",
+                        floor.parts().stream()
+                                .map(part -> addresses.input(part.area()))
+                                .toList()),
+                Symbol.all(
+                        "T_p",
+                        floor.parts().stream()
+                                .map(part -> addresses.input(part.spacing()))
+                                .toList()));
     }
 
     void water(FloorPlan floor, WaterLayout layout) {
@@ -85,6 +111,12 @@ final class LayoutSteps {
                     symbol("K_H", at + "/tableCoefficient"));
         }
         judged(at, layout.limits());
+        for (int i = 0; i < layout.parts().size(); i++) {
+            String part = at + "/parts/" + i;
+            chosen(part, "heat", "massFlow", "loops", "loopLength", "velocity");
+            chosen(part, "reynolds", "frictionFactor", "pressureDrop", "waterContent");
+            judged(part, layout.parts().get(i).limits());
+        }
     }
 
     /** Warming up after a setback. */
@@ -111,37 +143,60 @@ final class LayoutSteps {
         }
     }
 
-    /** The water of the whole job. */
-    void total(List<RoomSizing> rooms, WaterTotal water) {
+    /** The water of the whole job, and of each manifold. */
+    void total(List<RoomSizing> rooms, Survey survey, WaterTotal water) {
         String at = "/total/water";
-        List<String> flows = new ArrayList<>();
-        List<String> contents = new ArrayList<>();
-        List<String> supplies = new ArrayList<>();
-        List<String> drops = new ArrayList<>();
-        for (int i = 0; i < rooms.size(); i++) {
-            if (rooms.get(i).floor().water().isPresent()) {
-                String floor = "/rooms/" + i + "/floor/water";
-                flows.add(Addresses.sizing(floor + "/massFlow"));
-                contents.add(Addresses.sizing(floor + "/waterContent"));
-                supplies.add(Addresses.sizing(floor + "/supplyTemperature"));
-                drops.add(Addresses.sizing(floor + "/pressureDrop"));
-            }
-        }
-        steps.add(at + "/supplyTemperature", "hottest-supply", "theta_V", Symbol.all("theta_room", supplies));
-        steps.add(at + "/massFlow", "sum-of-flows", "m", Symbol.all("m_room", flows));
-        steps.add(at + "/waterContent", "sum-of-contents", "V", Symbol.all("V_room", contents));
-        steps.add(at + "/pressure", "worst-loop", "p", Symbol.all("p_loop", drops));
+        List<Integer> all = IntStream.range(0, rooms.size())
+                .filter(room -> rooms.get(room).floor().water().isPresent())
+                .boxed()
+                .toList();
+        steps.add(
+                at + "/supplyTemperature", "hottest-supply", "theta_V", each("theta_room", all, "/supplyTemperature"));
+        sums(at, all);
         chosen(at, "volumeFlow");
+        Map<String, String> manifolds = new HashMap<>();
+        for (int i = 0; i < water.manifolds().size(); i++) {
+            Optional<String> name = water.manifolds().get(i).name();
+            String manifold = at + "/manifolds/" + i;
+            List<Integer> on = all.stream()
+                    .filter(room -> manifold(survey, room).equals(name))
+                    .toList();
+            on.forEach(room -> manifolds.put(rooms.get(room).name(), manifold));
+            sums(manifold, on);
+            chosen(manifold, "loops", "volumeFlow");
+            throttled(manifold, at + "/pressure", manifold + "/pressure");
+        }
         for (int i = 0; i < water.valves().size(); i++) {
             String valve = at + "/valves/" + i;
             chosen(valve, "loop", "massFlow", "drop");
-            steps.add(
-                    valve + "/throttled",
-                    "throttled",
-                    "p_valve",
-                    symbol("p", at + "/pressure"),
-                    symbol("p_loop", valve + "/drop"));
+            throttled(valve, manifolds.get(water.valves().get(i).room()) + "/pressure", valve + "/drop");
         }
+    }
+
+    private static Optional<String> manifold(Survey survey, int room) {
+        return survey.rooms()
+                .get(room)
+                .heatedFloor()
+                .flatMap(HeatedFloor::heater)
+                .flatMap(Heater::manifold);
+    }
+
+    private void sums(String at, List<Integer> rooms) {
+        steps.add(at + "/massFlow", "sum-of-flows", "m", each("m_room", rooms, "/massFlow"));
+        steps.add(at + "/waterContent", "sum-of-contents", "V", each("V_room", rooms, "/waterContent"));
+        steps.add(at + "/pressure", "worst-loop", "p", each("p_loop", rooms, "/pressureDrop"));
+    }
+
+    private void throttled(String at, String whole, String own) {
+        steps.add(at + "/throttled", "throttled", "p_valve", symbol("p", whole), symbol("p_loop", own));
+    }
+
+    private static Symbol each(String name, List<Integer> rooms, String key) {
+        return Symbol.all(
+                name,
+                rooms.stream()
+                        .map(room -> Addresses.sizing("/rooms/" + room + "/floor/water" + key))
+                        .toList());
     }
 
     private void judged(String at, List<PracticeJudgement> limits) {

@@ -28,7 +28,9 @@ final class LimitSteps {
     }
 
     void all(FloorSizing answer) {
-        if (answer.section().isPresent()) {
+        if (!answer.parts().isEmpty()) {
+            parts(answer);
+        } else if (answer.section().isPresent()) {
             solved(answer);
         } else {
             plane(answer);
@@ -40,6 +42,13 @@ final class LimitSteps {
                     "m",
                     answered("q_max", "/limits/" + i + "/maximumFlux"),
                     answered("q", "/requiredFlux"));
+        }
+    }
+
+    /** Each limit as the mean over the parts when one of them is at it. */
+    private void parts(FloorSizing answer) {
+        while (next < answer.limits().size()) {
+            steps.add(claim(), "part-limit", "q_max");
         }
     }
 

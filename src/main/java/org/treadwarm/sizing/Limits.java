@@ -1,5 +1,8 @@
 package org.treadwarm.sizing;
 
+import org.treadwarm.sizing.Plan.FloorPlan;
+import org.treadwarm.survey.Zone;
+
 /** Names, sources and numbers of what limits a heated floor. */
 final class Limits {
     /** Highest surface temperature of the occupied area, degrees Celsius (EN 1264-2:2008+A1:2012, 4; read in trade manuals). */
@@ -26,4 +29,31 @@ final class Limits {
     static final String HEATER_SOURCE = "energy balance of the heater";
 
     private Limits() {}
+
+    /** The name of the limit in a slot of a floor, or of a part of it, in a zone; the slots of the heater are not among them. */
+    static String name(FloorPlan floor, Zone zone, int slot) {
+        return switch (slot) {
+            case 0 -> SURFACE + zone.label();
+            case 1 -> COVERING;
+            default -> LAYER + floor.layerLimits().get(slot - 2).name();
+        };
+    }
+
+    /** The source of the limit in such a slot. */
+    static String source(int slot) {
+        return switch (slot) {
+            case 0 -> SURFACE_SOURCE;
+            case 1 -> COVERING_SOURCE;
+            default -> LAYER_SOURCE;
+        };
+    }
+
+    /** The highest surface temperature of a zone in a room of a temperature, degrees Celsius. */
+    static double zoneMaximum(Zone zone, double room) {
+        return switch (zone) {
+            case OCCUPIED -> OCCUPIED;
+            case PERIPHERAL -> PERIPHERAL;
+            case BATHROOM -> room + BATHROOM_RISE;
+        };
+    }
 }

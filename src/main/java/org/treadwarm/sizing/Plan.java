@@ -3,6 +3,7 @@ package org.treadwarm.sizing;
 import java.util.List;
 import org.treadwarm.survey.Shielding;
 import org.treadwarm.survey.Survey;
+import org.treadwarm.survey.Zone;
 
 /**
  * A survey as plain numbers: which input each formula takes, and which node each conductance joins. Nodes are the rooms, then
@@ -110,7 +111,11 @@ final class Plan {
             List<EdgePlan> edges,
             int maximumSurface,
             List<LayerLimit> layerLimits,
-            HeaterPlan heater) {}
+            HeaterPlan heater,
+            List<PartPlan> parts) {}
+
+    /** A part of a heated floor with its own spacing: inputs of its area and of the spacing that holds for it. */
+    record PartPlan(String name, Zone zone, int area, int spacing) {}
 
     /** What makes the heat; indexes are -1 for what is not given, all of them when there is no heater. */
     record HeaterPlan(
@@ -122,10 +127,11 @@ final class Plan {
             int wallConductivity,
             int linearPower,
             int supplyTemperature,
-            int spread) {
-        /** Whether the heat it makes per m² is known: given, or by the cable's power and spacing. */
+            int spread,
+            boolean parted) {
+        /** Whether the heat it makes per m² is known: given, or by the cable's power and its spacing or those of its parts. */
         boolean hasDensity() {
-            return density != Stack.NONE || linearPower != Stack.NONE && spacing != Stack.NONE;
+            return density != Stack.NONE || linearPower != Stack.NONE && (spacing != Stack.NONE || parted);
         }
     }
 

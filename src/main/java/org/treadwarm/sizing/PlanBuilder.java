@@ -17,12 +17,14 @@ import org.treadwarm.sizing.Plan.HeaterPlan;
 import org.treadwarm.sizing.Plan.LayerLimit;
 import org.treadwarm.sizing.Plan.Link;
 import org.treadwarm.sizing.Plan.LinkKind;
+import org.treadwarm.sizing.Plan.PartPlan;
 import org.treadwarm.sizing.Plan.PathRef;
 import org.treadwarm.sizing.Plan.RoomIndexes;
 import org.treadwarm.sizing.Plan.Side;
 import org.treadwarm.sizing.Plan.SiteIndexes;
 import org.treadwarm.survey.Air;
 import org.treadwarm.survey.Assembly;
+import org.treadwarm.survey.FloorPart;
 import org.treadwarm.survey.Ground;
 import org.treadwarm.survey.GroundKind;
 import org.treadwarm.survey.HeatedFloor;
@@ -348,6 +350,8 @@ final class PlanBuilder {
                 limits.add(new LayerLimit(layer.title(i + 1), i, maximum));
             }
         }
+        HeaterPlan heater =
+                heater(pointer + "/heater", floor.heater(), !floor.parts().isEmpty());
         return new FloorPlan(
                 node,
                 inputs.add(pointer + "/area", floor.area()),
@@ -360,10 +364,26 @@ final class PlanBuilder {
                 edges("/rooms/" + node + "/junctions", room.junctions()),
                 inputs.optional(pointer + "/maximumSurfaceTemperature", floor.maximumSurfaceTemperature()),
                 List.copyOf(limits),
-                heater(pointer + "/heater", floor.heater()));
+                heater,
+                parts(pointer + "/parts", floor.parts(), heater.spacing()));
     }
 
-    private HeaterPlan heater(String pointer, Optional<Heater> heater) {
+    private List<PartPlan> parts(String pointer, List<FloorPart> parts, int spacing) {
+        List<PartPlan> plans = new ArrayList<>();
+        for (int i = 0; i < parts.size(); i++) {
+            FloorPart part = parts.get(i);
+            String at = Pointer.to(pointer, i);
+            int own = inputs.optional(at + "/spacing", part.spacing());
+            plans.add(new PartPlan(
+                    part.title(i + 1),
+                    part.zone(),
+                    inputs.add(at + "/area", part.area()),
+                    own == NONE ? spacing : own));
+        }
+        return List.copyOf(plans);
+    }
+
+    private HeaterPlan heater(String pointer, Optional<Heater> heater, boolean parted) {
         return new HeaterPlan(
                 heater.map(given -> given.kind() == HeaterKind.WATER).orElse(false),
                 inputs.optional(pointer + "/density", heater.flatMap(Heater::density)),
@@ -373,7 +393,8 @@ final class PlanBuilder {
                 inputs.optional(pointer + "/wallConductivity", heater.flatMap(Heater::wallConductivity)),
                 inputs.optional(pointer + "/linearPower", heater.flatMap(Heater::linearPower)),
                 inputs.optional(pointer + "/supplyTemperature", heater.flatMap(Heater::supplyTemperature)),
-                inputs.optional(pointer + "/spread", heater.flatMap(Heater::spread)));
+                inputs.optional(pointer + "/spread", heater.flatMap(Heater::spread)),
+                parted);
     }
 
     private List<EdgePlan> edges(String pointer, List<Junction> junctions) {

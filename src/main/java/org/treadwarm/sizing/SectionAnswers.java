@@ -21,9 +21,9 @@ final class SectionAnswers {
     private final List<Layer> above;
     private final double outdoor;
 
-    SectionAnswers(FloorEvaluation floor, HeatedFloor given) {
-        this.floor = floor;
-        this.section = floor.section;
+    SectionAnswers(SectionFloor section, HeatedFloor given) {
+        this.floor = section.plane;
+        this.section = section;
         this.above = given.above();
         this.outdoor = floor.whole().outdoor;
     }
@@ -40,7 +40,7 @@ final class SectionAnswers {
                 SectionAccuracy.of(section.response.accuracy()));
     }
 
-    private SectionState state(double flux) {
+    SectionState state(double flux) {
         State state = section.at(flux, outdoor);
         boolean water = floor.plan.heater().water();
         List<WarmFace> layers = new ArrayList<>();

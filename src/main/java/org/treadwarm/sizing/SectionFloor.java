@@ -3,11 +3,11 @@ package org.treadwarm.sizing;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.function.DoublePredicate;
 import org.treadwarm.physics.section.FloorResponse;
 import org.treadwarm.physics.section.FloorState;
 import org.treadwarm.sizing.Plan.LayerLimit;
 import org.treadwarm.sizing.Sizing.FluxSplit;
-import org.treadwarm.survey.Heater;
 
 /**
  * A heated floor that is solved between its cables or pipes. Its mean surface temperature follows from the flux as everywhere
@@ -111,24 +111,38 @@ final class SectionFloor {
     /** The bounds of the survey, each with the slot of its limit. */
     List<Bound> bounds() {
         double[] in = plane.whole().in;
-        List<Bound> bounds = new ArrayList<>();
-        bounds.add(new Bound(0, State::warmest, plane.zoneMaximum()));
-        if (plane.plan.maximumSurface() != Stack.NONE) {
-            bounds.add(new Bound(1, State::warmest, in[plane.plan.maximumSurface()]));
-        }
-        List<LayerLimit> layers = plane.plan.layerLimits();
-        for (int i = 0; i < layers.size(); i++) {
-            int layer = layers.get(i).layer();
-            bounds.add(new Bound(
-                    2 + i, state -> state.faces()[layer], in[layers.get(i).maximum()]));
-        }
-        int last = 2 + layers.size();
+        List<Bound> bounds = new ArrayList<>(temperatures(0, plane.zoneMaximum()));
+        int last = 2 + plane.plan.layerLimits().size();
         if (plane.plan.heater().hasDensity()) {
             bounds.add(new Bound(last, State::made, plane.density()));
         }
         if (plane.plan.heater().supplyTemperature() != Stack.NONE) {
             bounds.add(new Bound(
                     last + 1, State::water, meanWater(in[plane.plan.heater().supplyTemperature()])));
+        }
+        return bounds;
+    }
+
+    /**
+     * The bounds that are temperatures of surface and layers.
+     *
+     * @param first slot of the first
+     * @param zoneMaximum what the surface may be by its zone, degrees Celsius
+     */
+    List<Bound> temperatures(int first, double zoneMaximum) {
+        double[] in = plane.whole().in;
+        List<Bound> bounds = new ArrayList<>();
+        bounds.add(new Bound(first, State::warmest, zoneMaximum));
+        if (plane.plan.maximumSurface() != Stack.NONE) {
+            bounds.add(new Bound(first + 1, State::warmest, in[plane.plan.maximumSurface()]));
+        }
+        List<LayerLimit> layers = plane.plan.layerLimits();
+        for (int i = 0; i < layers.size(); i++) {
+            int layer = layers.get(i).layer();
+            bounds.add(new Bound(
+                    first + 2 + i,
+                    state -> state.faces()[layer],
+                    in[layers.get(i).maximum()]));
         }
         return bounds;
     }
@@ -148,8 +162,7 @@ final class SectionFloor {
 
     /** Between supply and return, K. */
     double spread() {
-        int given = plane.plan.heater().spread();
-        return given == Stack.NONE ? Heater.SPREAD : plane.whole().in[given];
+        return plane.waterSpread();
     }
 
     /** Puts the largest flux that each bound allows into its slot. */
@@ -168,17 +181,21 @@ final class SectionFloor {
     /** As {@link FloorEvaluation#holdsDownTo}. */
     double lowestOutdoor() {
         List<Bound> bounds = bounds();
-        if (carriesAt(FloorEvaluation.COLDEST, bounds)) {
+        return lowestOutdoor(plane, outdoor -> carriesAt(outdoor, bounds));
+    }
+
+    static double lowestOutdoor(FloorEvaluation plane, DoublePredicate carriesAt) {
+        if (carriesAt.test(FloorEvaluation.COLDEST)) {
             return Double.NEGATIVE_INFINITY;
         }
-        if (!carriesAt(plane.room, bounds)) {
+        if (!carriesAt.test(plane.room)) {
             return Double.POSITIVE_INFINITY;
         }
         double low = FloorEvaluation.COLDEST;
         double high = plane.room;
         while (high - low > 1e-11 * (1 + Math.abs(low))) {
             double middle = (low + high) / 2;
-            if (carriesAt(middle, bounds)) {
+            if (carriesAt.test(middle)) {
                 high = middle;
             } else {
                 low = middle;
@@ -200,7 +217,7 @@ final class SectionFloor {
     }
 
     /** The largest flux at which a rising number stays at or below a maximum; 0 when it is above already without any flux. */
-    private double largestFlux(Rising number, double maximum, double outdoor) {
+    double largestFlux(Rising number, double maximum, double outdoor) {
         if (number.of(at(0, outdoor)) >= maximum) {
             return 0;
         }
@@ -213,37 +230,6 @@ final class SectionFloor {
             low = high;
             high = Math.min(HIGHEST_FLUX, 2 * high);
         }
-        return root(number, maximum, outdoor, low, high);
-    }
-
-    /** The secant through both ends of a bracket; an end that stays is given half its weight, so that it does not stay for ever. */
-    private double root(Rising number, double maximum, double outdoor, double from, double to) {
-        double low = from;
-        double high = to;
-        double atLow = number.of(at(low, outdoor)) - maximum;
-        double atHigh = number.of(at(high, outdoor)) - maximum;
-        int kept = 0;
-        for (int step = 0; step < 200 && high - low > 1e-12 * high; step++) {
-            double next = high - atHigh * (high - low) / (atHigh - atLow);
-            if (!(next > low && next < high)) {
-                next = (low + high) / 2;
-            }
-            double atNext = number.of(at(next, outdoor)) - maximum;
-            if (atNext == 0) {
-                return next;
-            }
-            if (atNext < 0) {
-                low = next;
-                atLow = atNext;
-                atHigh = kept > 0 ? atHigh / 2 : atHigh;
-                kept = 1;
-            } else {
-                high = next;
-                atHigh = atNext;
-                atLow = kept < 0 ? atLow / 2 : atLow;
-                kept = -1;
-            }
-        }
-        return low;
+        return Bracket.root(flux -> number.of(at(flux, outdoor)) - maximum, low, high);
     }
 }

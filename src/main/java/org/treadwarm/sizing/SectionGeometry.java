@@ -36,6 +36,11 @@ record SectionGeometry(double spacing, List<FloorLayer> layers, FloorHeater heat
         layers = List.copyOf(layers);
     }
 
+    /** Whether pipes lie in it, and not cables. */
+    boolean isWater() {
+        return heater instanceof WaterPipe;
+    }
+
     /**
      * Solves it.
      *
@@ -51,8 +56,8 @@ record SectionGeometry(double spacing, List<FloorLayer> layers, FloorHeater heat
     /** What was made of a floor: its geometry, or why there is none. */
     record Made(Optional<SectionGeometry> geometry, String whyNot) {}
 
-    /** The geometry of a floor whose heater has a spacing. */
-    static Made of(FloorEvaluation floor, Evaluation whole) {
+    /** The geometry of a floor whose cables or pipes lie so far apart, m. */
+    static Made of(FloorEvaluation floor, Evaluation whole, double spacing) {
         Stack above = whole.plan.stacks.get(floor.plan.above());
         HeaterPlan heater = floor.plan.heater();
         double[] in = whole.in;
@@ -85,7 +90,7 @@ record SectionGeometry(double spacing, List<FloorLayer> layers, FloorHeater heat
                 : new HeatingCable(holding, depth, diameter, 0);
         below(floor, whole, layers);
         double rest = Math.max(LEAST_BELOW, floor.resistanceDown - floor.resistanceBelow);
-        return new Made(Optional.of(new SectionGeometry(in[heater.spacing()], layers, embedded, 1 / rest)), "");
+        return new Made(Optional.of(new SectionGeometry(spacing, layers, embedded, 1 / rest)), "");
     }
 
     private static void below(FloorEvaluation floor, Evaluation whole, List<FloorLayer> layers) {

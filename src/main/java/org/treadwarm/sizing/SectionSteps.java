@@ -12,28 +12,21 @@ final class SectionSteps {
     private final String floorAt;
     private final String at;
 
-    SectionSteps(Addresses addresses, Steps steps, FloorPlan floor) {
+    /**
+     * Steps of a floor or of a part of it.
+     *
+     * @param at where what was solved stands, in the answer's floor
+     */
+    SectionSteps(Addresses addresses, Steps steps, FloorPlan floor, String at) {
         this.addresses = addresses;
         this.steps = steps;
         this.floor = floor;
         this.floorAt = addresses.pointer(floor.room()) + "/floor";
-        this.at = floorAt + "/section";
+        this.at = floorAt + at;
     }
 
     void all(SectionSizing section) {
-        given("/spacing", "spacing-given", floor.heater().spacing());
-        if (floor.heater().diameter() == Stack.NONE) {
-            steps.add(at + "/diameter", floor.heater().water() ? "pipe-usual" : "cable-usual", "D");
-        } else {
-            given("/diameter", "diameter-given", floor.heater().diameter());
-        }
-        if (section.spread().isPresent()) {
-            if (floor.heater().spread() == Stack.NONE) {
-                steps.add(at + "/spread", "spread-usual", "sigma");
-            } else {
-                given("/spread", "spread-given", floor.heater().spread());
-            }
-        }
+        heater(floor.heater().spacing());
         state(at + "/atRequiredFlux", section.atRequiredFlux(), floorAt + "/requiredFlux", floorAt);
         state(at + "/atCarryingFlux", section.atCarryingFlux(), floorAt + "/carryingFlux", floorAt + "/atCarryingFlux");
         for (int i = 0; i < section.limits().size(); i++) {
@@ -43,6 +36,27 @@ final class SectionSteps {
                 split(limit + "/temperature");
             }
         }
+        accuracy();
+    }
+
+    /** How the heater lies, and the spread of its water. */
+    void heater(int spacing) {
+        given("/spacing", "spacing-given", spacing);
+        if (floor.heater().diameter() == Stack.NONE) {
+            steps.add(at + "/diameter", floor.heater().water() ? "pipe-usual" : "cable-usual", "D");
+        } else {
+            given("/diameter", "diameter-given", floor.heater().diameter());
+        }
+        if (floor.heater().water()) {
+            if (floor.heater().spread() == Stack.NONE) {
+                steps.add(at + "/spread", "spread-usual", "sigma");
+            } else {
+                given("/spread", "spread-given", floor.heater().spread());
+            }
+        }
+    }
+
+    void accuracy() {
         String accuracy = at + "/accuracy";
         solved(accuracy + "/relativeError", accuracy + "/residual", accuracy + "/iterations", accuracy + "/cells");
     }
@@ -51,7 +65,13 @@ final class SectionSteps {
         steps.add(at + key, formula, "x", Symbol.of("x_given", addresses.input(input)));
     }
 
-    private void state(String here, SectionState state, String flux, String fluxes) {
+    /**
+     * Steps of one state.
+     *
+     * @param flux pointer of the flux that it is at
+     * @param fluxes pointer of what has the downward flux, and the temperatures told of surface and heater
+     */
+    void state(String here, SectionState state, String flux, String fluxes) {
         Symbol upward = Symbol.of("q", Addresses.sizing(flux));
         Symbol downward = Symbol.of("q_u", Addresses.sizing(fluxes + "/downwardFlux"));
         Symbol room = Symbol.of("theta_i", addresses.temperature(floor.room()));
@@ -95,11 +115,11 @@ final class SectionSteps {
                 downward);
     }
 
-    private void split(String pointer) {
+    void split(String pointer) {
         solved(pointer + "/perUpwardFlux", pointer + "/perDownwardFlux");
     }
 
-    private void solved(String... pointers) {
+    void solved(String... pointers) {
         for (String pointer : pointers) {
             steps.add(pointer, "section-solved", "x");
         }

@@ -1,13 +1,14 @@
 package org.treadwarm.sizing;
 
-import java.util.Optional;
+import java.util.ArrayList;
+import java.util.List;
 import org.treadwarm.physics.section.Condition.Film;
-import org.treadwarm.physics.section.FloorHeater.WaterPipe;
 import org.treadwarm.physics.section.FloorLayer;
 import org.treadwarm.physics.section.FloorLayer.Resisting;
 import org.treadwarm.physics.section.FloorLayer.Solid;
 import org.treadwarm.physics.section.FloorSection;
 import org.treadwarm.physics.section.TemperatureMap;
+import org.treadwarm.sizing.PartedFloor.Part;
 import org.treadwarm.survey.Survey;
 
 /**
@@ -42,40 +43,52 @@ public record SectionView(
     private static final int MOST_ROWS = 200;
 
     /**
-     * The temperatures of a room's floor; empty when it has no solved section or gives no heat.
+     * The temperatures of a room's floor, of each of its parts when it is laid in parts; empty when it has no solved section or gives no
+     * heat.
      *
      * @param survey one that was sized
      * @param room its number
      */
-    public static Optional<SectionView> of(Survey survey, int room) {
+    public static List<SectionView> all(Survey survey, int room) {
         Plan plan = Plan.of(survey);
         Evaluation evaluation = new Evaluation(plan);
-        if (!evaluation.evaluate(plan.values)) {
-            return Optional.empty();
-        }
-        FloorEvaluation floor = evaluation.floors[room];
+        FloorEvaluation floor = evaluation.evaluate(plan.values) ? evaluation.floors[room] : null;
         double flux = floor == null ? 0 : Math.min(floor.requiredFlux, floor.carryingFlux);
-        if (floor == null || floor.section == null || !(flux > 0)) {
-            return Optional.empty();
+        if (!(flux > 0)) {
+            return List.of();
         }
-        return Optional.of(view(floor, flux, floor.section.at(flux, evaluation.outdoor)));
+        if (floor.section != null) {
+            return List.of(view(floor.section, floor.zoneMaximum(), floor.section.at(flux, evaluation.outdoor)));
+        }
+        List<SectionView> views = new ArrayList<>();
+        for (int i = 0; floor.parted != null && i < floor.parted.parts.size(); i++) {
+            Part part = floor.parted.parts.get(i);
+            SectionFloor.State state = floor.parted.at(flux, evaluation.outdoor).get(i);
+            if (!(state.flux() > 0)) {
+                return List.of();
+            }
+            views.add(view(part.section(), Limits.zoneMaximum(part.zone(), floor.room), state));
+        }
+        return List.copyOf(views);
     }
 
-    private static SectionView view(FloorEvaluation floor, double flux, SectionFloor.State state) {
-        SectionGeometry geometry = floor.section.geometry;
-        double coefficient = flux / (state.mean() - floor.room);
-        boolean water = geometry.heater() instanceof WaterPipe;
-        double drive = water ? state.water() : (flux + state.downward()) * geometry.spacing();
-        FloorSection section = new FloorSection(
+    private static SectionView view(SectionFloor section, double zoneMaximum, SectionFloor.State solved) {
+        FloorEvaluation floor = section.plane;
+        SectionGeometry geometry = section.geometry;
+        double flux = solved.flux();
+        double coefficient = flux / (solved.mean() - floor.room);
+        boolean water = geometry.isWater();
+        double drive = water ? solved.water() : (flux + solved.downward()) * geometry.spacing();
+        FloorSection cut = new FloorSection(
                 geometry.spacing(),
                 geometry.layers(),
                 geometry.heater().driven(drive),
                 new Film(floor.room, coefficient),
-                new Film(state.below(), geometry.coefficientBelow()));
+                new Film(solved.below(), geometry.coefficientBelow()));
         double height =
                 geometry.layers().stream().mapToDouble(SectionView::thickness).sum();
         int rows = (int) Math.max(20, Math.min(MOST_ROWS, Math.ceil(height / ROW)));
-        TemperatureMap map = section.solve().map(COLUMNS, rows);
+        TemperatureMap map = cut.solve().map(COLUMNS, rows);
         double axis = axis(geometry);
         double radius = geometry.heater().diameter() / 2;
         double[] depth = new double[rows];
@@ -95,9 +108,7 @@ public record SectionView(
             surface[column] = floor.room + (temperature[0][column] - floor.room) * share;
         }
         int covering = floor.plan.maximumSurface();
-        double limit = covering == Stack.NONE
-                ? floor.zoneMaximum()
-                : Math.min(floor.zoneMaximum(), floor.whole().in[covering]);
+        double limit = covering == Stack.NONE ? zoneMaximum : Math.min(zoneMaximum, floor.whole().in[covering]);
         return new SectionView(
                 geometry.spacing(), axis, geometry.heater().diameter(), map.x(), depth, temperature, surface, limit);
     }

@@ -97,6 +97,7 @@ public record Sizing(
             List<Edge> edges,
             List<Limit> limits,
             Optional<SectionSizing> section,
+            List<PartSizing> parts,
             Optional<String> sectionReason,
             Optional<ElectricLayout> electric,
             Optional<WaterLayout> water,
@@ -226,8 +227,9 @@ public record Sizing(
             double highestResistance) {}
 
     /**
-     * The loops of a warm-water floor, all alike, at the flux that the floor gives: the required one, or the carrying one when that is
-     * less.
+     * The loops of a warm-water floor, at the flux that the floor gives: the required one, or the carrying one when that is
+     * less. They are all alike; where the floor is laid in parts, each part has loops of its own, and the numbers of one loop here are
+     * those of the loop with the largest drop and of the longest.
      *
      * @param meanOvertemperature of the water over the room, K
      * @param heat that the water leaves, W
@@ -256,6 +258,21 @@ public record Sizing(
             double waterContent,
             OptionalDouble tableCoefficient,
             OptionalDouble tableMeanOvertemperature,
+            List<PracticeJudgement> limits,
+            List<PartLoops> parts) {}
+
+    /** The loops of one part of a floor, all alike and only in this part; the numbers are those of {@link WaterLayout}. */
+    public record PartLoops(
+            String name,
+            double heat,
+            double massFlow,
+            int loops,
+            double loopLength,
+            double velocity,
+            double reynolds,
+            double frictionFactor,
+            double pressureDrop,
+            double waterContent,
             List<PracticeJudgement> limits) {}
 
     /** A value beside a limit of practice, in SI units and degrees Celsius; what is left is negative when it is beyond. */
@@ -263,9 +280,10 @@ public record Sizing(
 
     /**
      * The warm water of the whole job: one supply temperature, which the room that needs the hottest water governs, and the balance of
-     * its loops.
+     * its loops, each within its manifold.
      *
-     * @param pressure drop of the worst loop, Pa: what the pump gives beside manifold and boiler
+     * @param pressure drop of the worst loop, Pa: what one pump for all manifolds gives beside manifold and boiler
+     * @param manifolds in the order in which the rooms name them
      */
     public record WaterTotal(
             double supplyTemperature,
@@ -274,10 +292,29 @@ public record Sizing(
             double volumeFlow,
             double pressure,
             double waterContent,
+            List<ManifoldSizing> manifolds,
             List<LoopValve> valves) {}
 
-    /** A loop's valve: kg/s through it, the drop of its pipe and what the valve takes away, Pa. */
-    public record LoopValve(String room, int loop, double massFlow, double drop, double throttled) {}
+    /**
+     * One manifold.
+     *
+     * @param name as the rooms give it; left out for the manifold of the rooms that name none
+     * @param loops how many hang on it
+     * @param pressure drop of its worst loop, Pa
+     * @param throttled what a valve before it takes away when one pump feeds all manifolds, Pa
+     */
+    public record ManifoldSizing(
+            Optional<String> name,
+            int loops,
+            double massFlow,
+            double volumeFlow,
+            double pressure,
+            double throttled,
+            double waterContent) {}
+
+    /** A loop's valve, on the manifold of its room: kg/s through it, the drop of its pipe and what the valve takes away, Pa. */
+    public record LoopValve(
+            String room, Optional<String> part, int loop, double massFlow, double drop, double throttled) {}
 
     /**
      * The floor solved between its cables or pipes.
@@ -297,6 +334,51 @@ public record Sizing(
             SectionState atCarryingFlux,
             List<SectionLimit> limits,
             SectionAccuracy accuracy) {}
+
+    /**
+     * A part of a floor that is laid in parts. All parts are fed alike: the floor's required and carrying flux are means over its area,
+     * and each part gives of them what its own section gives with the same water or the same power of the cable.
+     *
+     * @param zone its zone of use in words
+     * @param area m²
+     * @param spacing axis to axis, m
+     * @param diameter of the cable or pipe, outside, m
+     * @param spread between supply and return of the water, K
+     * @param density of the electric heater in this part, W/m²
+     * @param limits what this part may give by its own limits
+     */
+    public record PartSizing(
+            String name,
+            String zone,
+            double area,
+            double spacing,
+            double diameter,
+            OptionalDouble spread,
+            OptionalDouble density,
+            PartState atRequiredFlux,
+            PartState atCarryingFlux,
+            List<PartLimit> limits,
+            SectionAccuracy accuracy) {}
+
+    /**
+     * A part at one flux of the whole floor.
+     *
+     * @param flux what the part itself gives, W/m²
+     * @param surfaceTemperature of its warmest point, degrees Celsius
+     * @param water how the water's temperature rises over the room's with the part's fluxes
+     */
+    public record PartState(
+            double flux,
+            double surfaceTemperature,
+            double heaterTemperature,
+            double downwardFlux,
+            double edgeFlux,
+            double heaterFlux,
+            Optional<FluxSplit> water,
+            SectionState section) {}
+
+    /** A limit of a part: the flux of the part at which it is reached, what goes down there, and how the limited temperature rises. */
+    public record PartLimit(String name, double maximumFlux, double downwardFlux, FluxSplit temperature) {}
 
     /**
      * A solved floor at one flux, degrees Celsius.

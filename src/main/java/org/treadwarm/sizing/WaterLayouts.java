@@ -2,11 +2,13 @@ package org.treadwarm.sizing;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
+import java.util.stream.Collectors;
 import org.treadwarm.physics.floor.Pipe;
 import org.treadwarm.physics.floor.ScreedFloor;
 import org.treadwarm.physics.section.FloorHeater.WaterPipe;
@@ -18,11 +20,17 @@ import org.treadwarm.physics.water.HeatingWater;
 import org.treadwarm.physics.water.JobSupply;
 import org.treadwarm.physics.water.JobSupply.RoomNeed;
 import org.treadwarm.physics.water.Manifold;
+import org.treadwarm.physics.water.Manifold.Valve;
+import org.treadwarm.physics.water.PropyleneGlycol;
 import org.treadwarm.physics.water.RoomCircuits;
 import org.treadwarm.physics.water.RoomCircuits.Loops;
 import org.treadwarm.physics.water.Tube;
 import org.treadwarm.physics.water.Water;
+import org.treadwarm.sizing.PartedFloor.Part;
 import org.treadwarm.sizing.Sizing.LoopValve;
+import org.treadwarm.sizing.Sizing.ManifoldSizing;
+import org.treadwarm.sizing.Sizing.PartLoops;
+import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.sizing.Sizing.WaterLayout;
 import org.treadwarm.sizing.Sizing.WaterTotal;
 import org.treadwarm.survey.Heater;
@@ -40,31 +48,57 @@ final class WaterLayouts {
 
     private static final double HOTTEST = 95;
 
-    private static final HeatCarrier WATER = Water.atAtmosphere();
+    private static final Water WATER = Water.atAtmosphere();
 
-    /** A room's water before and after its loops are laid. */
+    /** A part of a room's floor, or the whole, whose loops are its own. */
+    private record Run(Optional<String> part, SectionGeometry geometry, HeatedZone zone) {}
+
+    /** A room's water before and after its loops are laid, those of each run alike. */
     private record Room(
             FloorEvaluation floor,
             String name,
-            double flux,
-            double downward,
-            double heat,
+            List<Run> runs,
             double over,
             OptionalDouble given,
             double supply,
             double spread,
-            Optional<Loops> loops) {
+            List<Loops> loops) {
+        double heat() {
+            return runs.stream().mapToDouble(run -> run.zone().heat()).sum();
+        }
+
+        Loops worst() {
+            return loops.stream()
+                    .max(Comparator.comparingDouble(Loops::pressureDrop))
+                    .orElseThrow();
+        }
+
+        Optional<String> manifold() {
+            return heater(floor).manifold();
+        }
+
+        /** What flows through its pipes. */
+        HeatCarrier carrier() {
+            double glycol = heater(floor).glycol().map(Reading::value).orElse(0.0);
+            return glycol > 0 ? new PropyleneGlycol(glycol) : WATER;
+        }
+
+        /** The hottest that its water may be, degrees Celsius. */
+        double hottest() {
+            return carrier() instanceof PropyleneGlycol ? PropyleneGlycol.HOTTEST : HOTTEST;
+        }
+
         double ownSupply() {
-            return floor.room + HeatingWater.supplyOvertemperature(over, floor.section.spread());
+            return floor.room + HeatingWater.supplyOvertemperature(over, floor.waterSpread());
         }
 
         Room at(double temperature) {
             double found = HeatingWater.spread(over, temperature - floor.room);
-            return new Room(floor, name, flux, downward, heat, over, given, temperature, found, loops);
+            return new Room(floor, name, runs, over, given, temperature, found, loops);
         }
 
-        Room laid(Loops found) {
-            return new Room(floor, name, flux, downward, heat, over, given, supply, spread, Optional.of(found));
+        Room laid(List<Loops> found) {
+            return new Room(floor, name, runs, over, given, supply, spread, found);
         }
     }
 
@@ -78,7 +112,7 @@ final class WaterLayouts {
         WaterLayouts layouts = new WaterLayouts();
         List<Room> rooms = new ArrayList<>();
         for (FloorEvaluation floor : numbers.floors) {
-            if (floor != null && floor.section != null && floor.plan.heater().water()) {
+            if (floor != null && floor.plan.heater().water()) {
                 room(numbers, floor).ifPresent(rooms::add);
             }
         }
@@ -98,28 +132,48 @@ final class WaterLayouts {
 
     private static Optional<Room> room(Evaluation numbers, FloorEvaluation floor) {
         double flux = Math.min(floor.requiredFlux, floor.carryingFlux);
-        SectionFloor.State state = floor.section.at(flux, numbers.outdoor);
-        double over = state.water() - floor.room;
-        double heat = state.made() * floor.area;
-        if (flux <= 0 || over <= 0 || heat <= 0 || state.downward() < 0) {
+        if (flux <= 0 || floor.room < COLDEST || floor.section == null && floor.parted == null) {
             return Optional.empty();
         }
-        double hot = floor.room + HeatingWater.supplyOvertemperature(over, floor.section.spread());
-        if (hot > HOTTEST || floor.room < COLDEST) {
+        List<Part> parts = floor.parted == null
+                ? List.of(new Part("", floor.zone(), floor.area, floor.section))
+                : floor.parted.parts;
+        List<SectionFloor.State> states = floor.parted == null
+                ? List.of(floor.section.at(flux, numbers.outdoor))
+                : floor.parted.at(flux, numbers.outdoor);
+        List<Run> runs = new ArrayList<>();
+        for (int i = 0; i < parts.size(); i++) {
+            SectionFloor.State state = states.get(i);
+            if (state.downward() < 0) {
+                return Optional.empty();
+            }
+            if (state.flux() > 0) {
+                runs.add(run(floor, parts.get(i), state));
+            }
+        }
+        double over = states.get(0).water() - floor.room;
+        if (over <= 0) {
             return Optional.empty();
         }
         int supply = floor.plan.heater().supplyTemperature();
-        return Optional.of(new Room(
+        Room room = new Room(
                 floor,
                 numbers.plan.nodeNames[floor.plan.room()],
-                flux,
-                heat / floor.area - flux,
-                heat,
+                List.copyOf(runs),
                 over,
                 supply == Stack.NONE ? OptionalDouble.empty() : OptionalDouble.of(numbers.in[supply]),
                 0,
                 0,
-                Optional.empty()));
+                List.of());
+        return room.ownSupply() > room.hottest() ? Optional.empty() : Optional.of(room);
+    }
+
+    private static Run run(FloorEvaluation floor, Part part, SectionFloor.State state) {
+        SectionGeometry geometry = part.section().geometry;
+        return new Run(
+                floor.parted == null ? Optional.empty() : Optional.of(part.name()),
+                geometry,
+                new HeatedZone(part.area(), geometry.spacing(), state.flux(), state.made() - state.flux()));
     }
 
     private void lay(List<Room> rooms) {
@@ -129,37 +183,99 @@ final class WaterLayouts {
                 .map(room -> new RoomNeed(room.name(), room.floor().room, room.over(), room.heat()))
                 .toList();
         double supply =
-                JobSupply.of(needs, governing.floor().section.spread(), WATER).supply();
+                JobSupply.of(needs, governing.floor().waterSpread(), WATER).supply();
         List<Room> laid = rooms.stream()
                 .map(room -> room.at(Math.max(room.given().orElse(supply), room.ownSupply())))
+                .filter(room -> room.supply() <= room.hottest())
                 .flatMap(room -> circuits(room).stream())
                 .toList();
         if (laid.isEmpty()) {
             return;
         }
-        List<Loops> loops = laid.stream().flatMap(room -> room.loops().stream()).toList();
-        int onManifold = loops.stream().mapToInt(Loops::count).sum();
-        laid.forEach(room -> layouts.put(room.floor().plan.room(), layout(room, onManifold)));
-        double hottest = laid.stream().mapToDouble(Room::supply).max().orElseThrow();
-        Manifold manifold = Manifold.balance(loops, 0, WATER.density(hottest));
-        total = Optional.of(new WaterTotal(
-                hottest,
-                governing.name(),
+        Map<Optional<String>, List<Room>> byManifold =
+                laid.stream().collect(Collectors.groupingBy(Room::manifold, LinkedHashMap::new, Collectors.toList()));
+        byManifold.values().forEach(on -> {
+            int loops = on.stream().mapToInt(WaterLayouts::count).sum();
+            on.forEach(room -> layouts.put(room.floor().plan.room(), layout(room, loops)));
+        });
+        total = Optional.of(total(governing.name(), byManifold));
+    }
+
+    private static int count(Room room) {
+        return room.loops().stream().mapToInt(Loops::count).sum();
+    }
+
+    private static WaterTotal total(String governing, Map<Optional<String>, List<Room>> byManifold) {
+        Map<Optional<String>, Manifold> balanced = new LinkedHashMap<>();
+        byManifold.forEach((name, on) -> balanced.put(name, balance(on)));
+        double pressure = balanced.values().stream()
+                .mapToDouble(manifold -> manifold.duty().pressure())
+                .max()
+                .orElseThrow();
+        List<ManifoldSizing> manifolds = new ArrayList<>();
+        List<LoopValve> valves = new ArrayList<>();
+        balanced.forEach((name, manifold) -> {
+            manifolds.add(answer(name, manifold, pressure));
+            valves.addAll(valves(byManifold.get(name), manifold));
+        });
+        return new WaterTotal(
+                byManifold.values().stream()
+                        .mapToDouble(WaterLayouts::hottest)
+                        .max()
+                        .orElseThrow(),
+                governing,
+                manifolds.stream().mapToDouble(ManifoldSizing::massFlow).sum(),
+                manifolds.stream().mapToDouble(ManifoldSizing::volumeFlow).sum(),
+                pressure,
+                manifolds.stream().mapToDouble(ManifoldSizing::waterContent).sum(),
+                List.copyOf(manifolds),
+                List.copyOf(valves));
+    }
+
+    private static ManifoldSizing answer(Optional<String> name, Manifold manifold, double pressure) {
+        return new ManifoldSizing(
+                name,
+                manifold.valves().size(),
                 manifold.duty().massFlow(),
                 manifold.duty().volumeFlow(),
                 manifold.duty().pressure(),
-                manifold.content(),
-                manifold.valves().stream()
-                        .map(valve -> new LoopValve(
-                                valve.room(), valve.loop(), valve.massFlow(), valve.drop(), valve.throttled()))
-                        .toList()));
+                pressure - manifold.duty().pressure(),
+                manifold.content());
     }
 
-    private static RoomCircuits asked(Room room) {
-        FloorEvaluation floor = room.floor();
-        double feeders = heater(floor).feederLength().map(Reading::value).orElse(0.0);
-        HeatedZone zone = new HeatedZone(floor.area, floor.section.geometry.spacing(), room.flux(), room.downward());
-        return new RoomCircuits(room.name(), List.of(zone), feeders, room.supply(), room.spread());
+    private static double hottest(List<Room> rooms) {
+        return rooms.stream().mapToDouble(Room::supply).max().orElseThrow();
+    }
+
+    private static Manifold balance(List<Room> rooms) {
+        List<Loops> loops =
+                rooms.stream().flatMap(room -> room.loops().stream()).toList();
+        return Manifold.balance(loops, 0, rooms.get(0).carrier().density(hottest(rooms)));
+    }
+
+    /** The valves of a manifold; its loops stand in the order of rooms and parts. */
+    private static List<LoopValve> valves(List<Room> rooms, Manifold manifold) {
+        List<LoopValve> valves = new ArrayList<>();
+        for (Room room : rooms) {
+            for (int i = 0; i < room.loops().size(); i++) {
+                for (int loop = 1; loop <= room.loops().get(i).count(); loop++) {
+                    Valve valve = manifold.valves().get(valves.size());
+                    valves.add(new LoopValve(
+                            room.name(),
+                            room.runs().get(i).part(),
+                            loop,
+                            valve.massFlow(),
+                            valve.drop(),
+                            valve.throttled()));
+                }
+            }
+        }
+        return List.copyOf(valves);
+    }
+
+    private static RoomCircuits asked(Room room, Run run) {
+        double feeders = heater(room.floor()).feederLength().map(Reading::value).orElse(0.0);
+        return new RoomCircuits(room.name(), List.of(run.zone()), feeders, room.supply(), room.spread());
     }
 
     private static Heater heater(FloorEvaluation floor) {
@@ -174,27 +290,31 @@ final class WaterLayouts {
                 .orElseThrow();
     }
 
-    private static WaterPipe pipe(Room room) {
-        return (WaterPipe) room.floor().section.geometry.heater();
+    private static WaterPipe pipe(Run run) {
+        return (WaterPipe) run.geometry().heater();
     }
 
-    private static Tube tube(Room room) {
-        return Tube.smooth(pipe(room).diameter() - 2 * pipe(room).wallThickness());
+    private static Tube tube(Run run) {
+        return Tube.smooth(pipe(run).diameter() - 2 * pipe(run).wallThickness());
     }
 
     /** The room with its loops; empty when no number of loops keeps the longest length and the largest drop. */
     private static Optional<Room> circuits(Room room) {
         try {
-            return Optional.of(room.laid(asked(room).lay(tube(room), WATER, LONGEST, LARGEST_DROP)));
+            return Optional.of(room.laid(room.runs().stream()
+                    .map(run -> asked(room, run).lay(tube(run), room.carrier(), LONGEST, LARGEST_DROP))
+                    .toList()));
         } catch (IllegalArgumentException tooMuch) {
             return Optional.empty();
         }
     }
 
     private static WaterLayout layout(Room room, int onManifold) {
-        Loops loops = room.loops().orElseThrow();
-        double massFlow = loops.count() * loops.massFlow();
-        OptionalDouble table = tableCoefficient(room);
+        Loops worst = room.worst();
+        double massFlow = massFlow(room.loops());
+        boolean whole = room.floor().parted == null;
+        Run run = room.runs().get(0);
+        OptionalDouble table = whole ? tableCoefficient(room.floor(), run) : OptionalDouble.empty();
         return new WaterLayout(
                 room.supply(),
                 room.supply() - room.spread(),
@@ -202,25 +322,59 @@ final class WaterLayouts {
                 room.over(),
                 room.heat(),
                 massFlow,
-                massFlow / WATER.density(room.supply() - room.spread() / 2),
-                loops.count(),
-                loops.length(),
-                loops.flow().velocity(),
-                loops.flow().reynolds(),
-                loops.flow().friction(),
-                loops.pressureDrop(),
-                loops.content(),
+                massFlow / room.carrier().density(room.supply() - room.spread() / 2),
+                count(room),
+                room.loops().stream().mapToDouble(Loops::length).max().orElseThrow(),
+                worst.flow().velocity(),
+                worst.flow().reynolds(),
+                worst.flow().friction(),
+                worst.pressureDrop(),
+                room.loops().stream().mapToDouble(Loops::content).sum(),
                 table,
-                table.isPresent() ? OptionalDouble.of(room.flux() / table.getAsDouble()) : OptionalDouble.empty(),
-                ElectricLayouts.judgements(CircuitLimits.judge(asked(room), loops, onManifold, Practice.water())));
+                table.isPresent()
+                        ? OptionalDouble.of(run.zone().upwardFlux() / table.getAsDouble())
+                        : OptionalDouble.empty(),
+                whole ? limits(room, 0, onManifold) : List.of(),
+                whole ? List.of() : parts(room, onManifold));
+    }
+
+    private static double massFlow(List<Loops> loops) {
+        return loops.stream()
+                .mapToDouble(each -> each.count() * each.massFlow())
+                .sum();
+    }
+
+    private static List<PracticeJudgement> limits(Room room, int run, int onManifold) {
+        return ElectricLayouts.judgements(CircuitLimits.judge(
+                asked(room, room.runs().get(run)), room.loops().get(run), onManifold, Practice.water()));
+    }
+
+    private static List<PartLoops> parts(Room room, int onManifold) {
+        List<PartLoops> parts = new ArrayList<>();
+        for (int i = 0; i < room.runs().size(); i++) {
+            Loops loops = room.loops().get(i);
+            parts.add(new PartLoops(
+                    room.runs().get(i).part().orElseThrow(),
+                    room.runs().get(i).zone().heat(),
+                    massFlow(List.of(loops)),
+                    loops.count(),
+                    loops.length(),
+                    loops.flow().velocity(),
+                    loops.flow().reynolds(),
+                    loops.flow().friction(),
+                    loops.pressureDrop(),
+                    loops.content(),
+                    limits(room, i, onManifold)));
+        }
+        return List.copyOf(parts);
     }
 
     /** K_H of the table method for pipes in the screed; empty when the floor lies outside its tables. */
-    private static OptionalDouble tableCoefficient(Room room) {
-        SectionGeometry geometry = room.floor().section.geometry;
+    private static OptionalDouble tableCoefficient(FloorEvaluation floor, Run run) {
+        SectionGeometry geometry = run.geometry();
         Solid screed = (Solid) geometry.layers().get(geometry.heater().layer());
-        double covering = room.floor().resistanceAbove - screed.resistance();
-        WaterPipe pipe = pipe(room);
+        double covering = floor.resistanceAbove - screed.resistance();
+        WaterPipe pipe = pipe(run);
         try {
             return OptionalDouble.of(FloorMethods.pipesInScreed()
                     .coefficient(new ScreedFloor(

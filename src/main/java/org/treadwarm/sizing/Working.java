@@ -48,7 +48,9 @@ public final class Working {
             paths.all(plan.floatingNodes[i], space.paths());
         }
         new TotalSteps(plan, addresses, steps).all(sizing);
-        sizing.total().water().ifPresent(water -> new LayoutSteps(addresses, steps).total(sizing.rooms(), water));
+        sizing.total()
+                .water()
+                .ifPresent(water -> new LayoutSteps(addresses, steps).total(sizing.rooms(), plan.survey, water));
         new AssemblySteps(plan, addresses, steps).all(sizing.assemblies());
         return steps.all();
     }

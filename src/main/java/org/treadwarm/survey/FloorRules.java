@@ -2,6 +2,7 @@ package org.treadwarm.survey;
 
 import java.util.List;
 import java.util.Optional;
+import org.treadwarm.physics.water.PropyleneGlycol;
 import org.treadwarm.units.Numbers;
 import org.treadwarm.units.Reading;
 
@@ -41,6 +42,7 @@ final class FloorRules {
         layers(pointer, floor);
         heater(pointer, floor);
         floor.plan().ifPresent(plan -> new PlanRules(findings).check(pointer + "/plan", plan));
+        new PartRules(findings, pointer, floor).check();
     }
 
     private void layers(String pointer, HeatedFloor floor) {
@@ -73,6 +75,7 @@ final class FloorRules {
                 findings.add(
                         pointer + "/mats", words(heater.mats()), "only an electric heater has mats", "leave them out");
             }
+            heater.glycol().ifPresent(share -> mixture(pointer + "/glycol", share));
         } else {
             notHis(pointer + "/wallThickness", heater.wallThickness(), "only a pipe has a wall");
             notHis(pointer + "/wallConductivity", heater.wallConductivity(), "only a pipe has a wall");
@@ -83,6 +86,10 @@ final class FloorRules {
             notHis(pointer + "/spread", heater.spread(), "only warm water has a spread");
             notHis(pointer + "/feederLength", heater.feederLength(), "only warm water has feeders");
             mats(pointer, heater);
+            notHis(pointer + "/glycol", heater.glycol(), "only warm water may hold glycol");
+            heater.manifold()
+                    .ifPresent(name -> findings.add(
+                            pointer + "/manifold", name, "only warm water comes from a manifold", "leave it out"));
         }
         sizes(pointer, heater);
     }
@@ -105,13 +112,20 @@ final class FloorRules {
         return mats.size() == 1 ? "1 mat" : mats.size() + " mats";
     }
 
+    private void mixture(String pointer, Reading share) {
+        if (share.value() > 0 && share.value() < PropyleneGlycol.WEAKEST) {
+            findings.add(
+                    pointer, share.typed(), "so weak a mixture is not described", "0 for water alone, or 15 to 57 %");
+        }
+    }
+
     private void notHis(String pointer, Optional<Reading> reading, String message) {
         reading.ifPresent(given -> findings.add(pointer, given.typed(), message, "leave it out"));
     }
 
     private void sizes(String pointer, Heater heater) {
         boolean water = heater.kind() == HeaterKind.WATER;
-        double diameter = value(heater.diameter(), water ? Heater.PIPE_DIAMETER : Heater.CABLE_DIAMETER);
+        double diameter = heater.outsideDiameter();
         if (water && 2 * value(heater.wallThickness(), Heater.WALL_THICKNESS) >= diameter) {
             findings.add(
                     pointer + (heater.wallThickness().isPresent() ? "/wallThickness" : "/diameter"),

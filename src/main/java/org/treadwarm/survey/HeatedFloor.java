@@ -25,6 +25,12 @@ public record HeatedFloor(
 
         @Wording(label = "zone of use") Zone zone,
 
+        @Wording(
+                label = "parts",
+                help =
+                        "A peripheral strip and the occupied area, say: each with its own spacing, and all fed alike. Together they are the heated area.")
+        List<FloorPart> parts,
+
         @Wording(label = "layers above the heater", help = "From the finished surface down to the heater.")
         List<Layer> above,
 

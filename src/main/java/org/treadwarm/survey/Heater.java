@@ -125,9 +125,31 @@ public record Heater(
                 label = "mats to choose from",
                 help =
                         "What can be had; the sizing chooses those that leave the least floor bare and give the heat needed.")
-        List<HeatingMat> mats) {
+        List<HeatingMat> mats,
+
+        @Wording(
+                label = "manifold that feeds the loops",
+                help = "Rooms that name the same one are balanced together; without names there is one manifold.")
+        Optional<String> manifold,
+
+        @Quantity(
+                kind = QuantityKind.RATIO,
+                min = 0,
+                max = 0.57,
+                plausibleFrom = 0,
+                plausibleTo = 0.5,
+                formUnit = "%",
+                label = "propylene glycol in the water, share of the mass",
+                help =
+                        "Water alone when left out; a mixture has 15 to 57 %. The maker of boiler and pipes decides on it.")
+        Optional<Reading> glycol) {
     /** As many kinds of mats as one list may have. */
     public static final int MOST_MATS = 12;
+
+    /** Outside diameter of its cable or pipe, as given or as is usual, m. */
+    double outsideDiameter() {
+        return diameter.map(Reading::value).orElse(kind == HeaterKind.WATER ? PIPE_DIAMETER : CABLE_DIAMETER);
+    }
 
     /** Outside diameter of a cable when none is given, m; common practice, no source. */
     public static final double CABLE_DIAMETER = 0.006;

@@ -55,6 +55,7 @@ public final class Rules {
             room(Pointer.to("/rooms", i), survey.rooms().get(i));
         }
         new Listings(survey, findings).check();
+        new ManifoldRules(survey, findings).check();
         if (ground.anyOnGround() && survey.site().annualMeanTemperature().isEmpty()) {
             findings.missing(
                     "/site/annualMeanTemperature",

@@ -96,7 +96,7 @@ public final class PlainSheet {
             line("  At the carrying flux:");
             Sizing.FloorState state = floor.atCarryingFlux().orElseThrow();
             state(
-                    floor.section().isPresent(),
+                    floor.section().isPresent() || !floor.parts().isEmpty(),
                     state.surfaceTemperature(),
                     state.heaterTemperature(),
                     state.downwardFlux(),
@@ -105,7 +105,7 @@ public final class PlainSheet {
             line("  What it would take at the required flux:");
         }
         state(
-                floor.section().isPresent(),
+                floor.section().isPresent() || !floor.parts().isEmpty(),
                 floor.surfaceTemperature().orElseThrow(),
                 floor.heaterTemperature().orElseThrow(),
                 floor.downwardFlux().orElseThrow(),

@@ -42,10 +42,14 @@ class EachInputMattersTest {
     /** A reheat that is left at 0 W/m², for beside a setback any other is refused. */
     private static final String BESIDE_A_SETBACK = "/rooms/2/reheat";
 
+    /** Areas that must stay the sum of one another; they are moved together. */
+    private static final List<String> PARTS_AND_WHOLE = List.of(
+            "/rooms/2/heatedFloor/area", "/rooms/2/heatedFloor/parts/0/area", "/rooms/2/heatedFloor/parts/1/area");
+
     static List<Arguments> readings() {
         List<Arguments> readings = new ArrayList<>();
         Readings.visit(Surveys.accepted(SURVEY), "", (pointer, declared, reading) -> {
-            if (!pointer.equals(BESIDE_A_SETBACK)) {
+            if (!pointer.equals(BESIDE_A_SETBACK) && !PARTS_AND_WHOLE.contains(pointer)) {
                 readings.add(Arguments.of(pointer, declared, reading.value()));
             }
         });
@@ -59,6 +63,16 @@ class EachInputMattersTest {
         Trees.set(changed, pointer, DoubleNode.valueOf(moved(declared, value)));
         boolean moved = !Trees.numbers(Surveys.answer(changed)).equals(Trees.numbers(ANSWER));
         assertThat(moved).isEqualTo(!WITHOUT_EFFECT.containsKey(pointer));
+    }
+
+    @Test
+    void theAreasOfPartsAndWholeMoveNumbersTogether() {
+        for (int part = 1; part <= 2; part++) {
+            ObjectNode changed = SURVEY.deepCopy();
+            Trees.set(changed, PARTS_AND_WHOLE.get(0), DoubleNode.valueOf(11.6));
+            Trees.set(changed, PARTS_AND_WHOLE.get(part), DoubleNode.valueOf(part == 1 ? 2.6 : 9.1));
+            assertThat(Trees.numbers(Surveys.answer(changed))).isNotEqualTo(Trees.numbers(ANSWER));
+        }
     }
 
     private static double moved(Declared declared, double value) {

@@ -145,6 +145,25 @@ class SectionSizingTest {
     }
 
     @Test
+    void glycolChangesFlowAndDropAndNoTemperatureOfTheFloor() {
+        ObjectNode mixed = Surveys.solved();
+        mixed.withObject("/rooms/0/heatedFloor/heater").put("glycol", 0.3);
+        mixed.withObject("/rooms/3/heatedFloor/heater").put("glycol", 0.3);
+        Sizing answer = Surveys.sized(mixed);
+        var plain = floor(0).water().orElseThrow();
+        var hall = answer.rooms().get(0).floor().water().orElseThrow();
+        assertThat(hall.supplyTemperature()).isEqualTo(plain.supplyTemperature());
+        assertThat(hall.heat()).isEqualTo(plain.heat());
+        assertThat(hall.massFlow()).isGreaterThan(1.05 * plain.massFlow());
+        assertThat(hall.reynolds()).isLessThan(0.6 * plain.reynolds());
+        assertThat(hall.waterContent()).isEqualTo(plain.waterContent());
+        assertThat(answer.rooms().get(0).cautions())
+                .anyMatch(caution -> caution.code().equals("glycol-maker"));
+        assertThat(SIZING.rooms().get(0).cautions())
+                .noneMatch(caution -> caution.code().equals("glycol-maker"));
+    }
+
+    @Test
     void feedsElectricElements() {
         var bath = floor(1).electric().orElseThrow();
         assertThat(bath.elements()).singleElement().satisfies(element -> {

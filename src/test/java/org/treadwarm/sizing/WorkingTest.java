@@ -32,6 +32,7 @@ class WorkingTest {
         REPLAYS.add(new WorkingReplay(WorkingJob.survey()));
         REPLAYS.add(new WorkingReplay(Surveys.everything()));
         REPLAYS.addAll(SolvedJob.all().stream().map(WorkingReplay::new).toList());
+        REPLAYS.addAll(PartedJob.all().stream().map(WorkingReplay::new).toList());
         for (long seed = 1; seed <= RANDOM_SURVEYS; seed++) {
             REPLAYS.add(new WorkingReplay(SurveyGenerator.random(new SplittableRandom(seed))));
         }

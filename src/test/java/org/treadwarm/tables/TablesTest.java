@@ -130,8 +130,5 @@ class TablesTest {
             assertThat(row.source()).isNotBlank();
             assertThat(row.continuousShare()).isGreaterThan(0).isLessThanOrEqualTo(1);
         });
-        assertThat(Glycols.propylene())
-                .hasSize(9)
-                .allSatisfy(row -> assertThat(row.source()).isNotBlank());
     }
 }

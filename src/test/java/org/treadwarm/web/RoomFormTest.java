@@ -251,7 +251,8 @@ class RoomFormTest {
                 "/rooms/0/surfaces/1/openings",
                 "/rooms/0/junctions",
                 "/rooms/0/heatedFloor/above",
-                "/rooms/0/heatedFloor/below"
+                "/rooms/0/heatedFloor/below",
+                "/rooms/0/heatedFloor/parts"
             })
     void addsAPartAndTakesItOutAgain(String list) {
         int before = kept(list).size();

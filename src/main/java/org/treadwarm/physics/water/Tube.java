@@ -47,7 +47,6 @@ public record Tube(double innerDiameter, double roughness) {
      *
      * @param massFlow kg/s, above 0
      * @param temperature of the carrier, degrees Celsius
-     * @throws NoPublishedValueException when the carrier's viscosity is not known
      */
     public Flow flow(double massFlow, HeatCarrier carrier, double temperature) {
         double density = carrier.density(temperature);

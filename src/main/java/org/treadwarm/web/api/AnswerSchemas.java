@@ -145,6 +145,7 @@ final class AnswerSchemas {
             Map.entry("within", "h"),
             Map.entry("reheatFlux", "W/m2 of heated floor"),
             Map.entry("WarmUpSizing.density", "W/m2"),
+            Map.entry("PartSizing.density", "W/m2"),
             Map.entry("lossCoefficient", "W/(m2.K) of heated floor"),
             Map.entry("airCapacity", "J/(m2.K) of heated floor"),
             Map.entry("massCapacity", "J/(m2.K) of heated floor"),

@@ -16,6 +16,8 @@ import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FloorState;
 import org.treadwarm.sizing.Sizing.FreeFloor;
+import org.treadwarm.sizing.Sizing.PartSizing;
+import org.treadwarm.sizing.Sizing.PartState;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.SectionSizing;
 import org.treadwarm.sizing.Sizing.SectionState;
@@ -94,13 +96,19 @@ final class Answer {
         add(pictures, "What the floor must give and may give", "limits", sheet -> Pictures.limits(answer, sheet));
         add(pictures, "The heated floor in section", "floor", sheet -> Pictures.floor(room, answer, sheet));
         add(pictures, "The floor in plan", "plan", sheet -> PlanPicture.of(room, answer, sheet));
-        if (floor.section().isPresent()) {
-            Optional<SectionView> view = SectionView.of(survey, index);
-            add(
-                    pictures,
-                    "The floor between its cables or pipes",
-                    "isotherms",
-                    sheet -> Pictures.isotherms(room, answer, view, sheet));
+        if (floor.section().isPresent() || !floor.parts().isEmpty()) {
+            List<SectionView> views = SectionView.all(survey, index);
+            for (int i = 0; i < views.size(); i++) {
+                int number = i;
+                add(
+                        pictures,
+                        "The floor between its cables or pipes"
+                                + (floor.parts().isEmpty()
+                                        ? ""
+                                        : ", " + floor.parts().get(i).name()),
+                        views.size() == 1 ? "isotherms" : "isotherms-" + (i + 1),
+                        sheet -> Pictures.isotherms(room, answer, views.get(number), number, sheet));
+            }
         }
         if (floor.warmup().isPresent()) {
             WarmUpView.of(survey, index)
@@ -201,13 +209,15 @@ final class Answer {
                             floor.edgeFlux().orElseThrow(),
                             floor.heaterFlux().orElseThrow(),
                             floor.heaterPower().orElseThrow()),
-                    floor.section().map(SectionSizing::atRequiredFlux));
+                    floor.section().map(SectionSizing::atRequiredFlux),
+                    floor.parts().stream().findFirst().map(PartSizing::atRequiredFlux));
         } else {
             state(
                     lines,
                     "at the carrying flux",
                     floor.atCarryingFlux().orElseThrow(),
-                    floor.section().map(SectionSizing::atCarryingFlux));
+                    floor.section().map(SectionSizing::atCarryingFlux),
+                    floor.parts().stream().findFirst().map(PartSizing::atCarryingFlux));
             lines.add(new Line(
                     "What it would take",
                     watts(floor.heaterPower().orElseThrow()),
@@ -240,9 +250,18 @@ final class Answer {
         flux.ifPresent(value -> lines.add(new Line(name, Numbers.fixed(value, 1) + " W/m²", note)));
     }
 
-    private static void state(List<Line> lines, String note, FloorState state, Optional<SectionState> section) {
+    private static void state(
+            List<Line> lines,
+            String note,
+            FloorState state,
+            Optional<SectionState> section,
+            Optional<PartState> firstPart) {
         if (section.isPresent()) {
             solved(lines, note, section.get());
+        } else if (firstPart.isPresent()) {
+            degrees(lines, "Warmest point of the surface", state.surfaceTemperature(), "of all parts");
+            degrees(lines, "Warmest cable or pipe, outside", state.heaterTemperature(), note);
+            water(lines, note, firstPart.get().section());
         } else {
             degrees(lines, "Mean surface temperature", state.surfaceTemperature(), note);
             degrees(lines, "Heater plane", state.heaterTemperature(), note);
@@ -259,6 +278,10 @@ final class Answer {
         degrees(lines, "Mean surface temperature", section.surfaceMean(), note);
         degrees(lines, "Coolest point of the surface", section.surfaceMinimum(), "midway between two");
         degrees(lines, "Cable or pipe, outside", section.heaterTemperature(), note);
+        water(lines, note, section);
+    }
+
+    private static void water(List<Line> lines, String note, SectionState section) {
         section.waterTemperature().ifPresent(water -> degrees(lines, "Water, mean", water, note));
         section.supplyTemperature().ifPresent(supply -> degrees(lines, "Water, supply", supply, note));
     }

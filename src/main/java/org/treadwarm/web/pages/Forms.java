@@ -13,6 +13,7 @@ import org.treadwarm.survey.AirGap;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Bridging;
 import org.treadwarm.survey.FixedPart;
+import org.treadwarm.survey.FloorPart;
 import org.treadwarm.survey.Ground;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.HeatingMat;
@@ -64,6 +65,8 @@ final class Forms {
             "insideCoefficient",
             "outsideCoefficient",
             "maximumTemperature",
+            "glycol",
+            "manifold",
             "spacing");
     private static final Map<String, String> ADD = Map.ofEntries(
             Map.entry("surfaces", "Add a surface"),
@@ -72,6 +75,7 @@ final class Forms {
             Map.entry("layers", "Add a layer"),
             Map.entry("above", "Add a layer above"),
             Map.entry("below", "Add a layer below"),
+            Map.entry("parts", "Add a part"),
             Map.entry("heatedFloor", "Add a heated floor"),
             Map.entry("airGap", "Make it an air gap"),
             Map.entry("bridging", "Add framing"),
@@ -85,6 +89,7 @@ final class Forms {
             Opening.class, "Opening",
             Junction.class, "Junction",
             FixedPart.class, "Fixed part",
+            FloorPart.class, "Part",
             HeatingMat.class, "Mat");
     private static final Set<String> ALWAYS_OPEN = Set.of("air", "heater");
 
@@ -164,7 +169,9 @@ final class Forms {
                     fields.add(field(node.path(each.name()).path(i), each, Pointer.to(at, i), title));
                 }
             } else {
-                (SELDOM.contains(each.name()) ? more : fields).add(field(node.path(each.name()), each, at, title));
+                boolean seldom = SELDOM.contains(each.name())
+                        && (type != FloorPart.class || each.name().equals("remark"));
+                (seldom ? more : fields).add(field(node.path(each.name()), each, at, title));
             }
         }
         boolean wrong = errors.size() > before;

@@ -12,6 +12,7 @@ import org.treadwarm.jobs.Judgement;
 import org.treadwarm.jobs.Partial;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.FloorSizing;
+import org.treadwarm.sizing.Sizing.ManifoldSizing;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.SpaceSizing;
 import org.treadwarm.sizing.Sizing.WaterTotal;
@@ -134,7 +135,19 @@ final class JobView {
         rows.add(new TotalRow("Flow of the pump", Numbers.fixed(60_000 * water.volumeFlow(), 2) + " l/min"));
         rows.add(new TotalRow(
                 "Drop of the worst loop", Numbers.fixed(water.pressure() / 1000, 1) + " kPa, straight pipe"));
+        if (water.manifolds().size() > 1) {
+            water.manifolds().forEach(manifold -> rows.add(manifold(manifold)));
+        }
         rows.add(new TotalRow("Water in the loops", Numbers.fixed(1000 * water.waterContent(), 1) + " l"));
+    }
+
+    private static TotalRow manifold(ManifoldSizing manifold) {
+        return new TotalRow(
+                manifold.name().map(name -> "Manifold " + name).orElse("Manifold without a name"),
+                manifold.loops() + (manifold.loops() == 1 ? " loop, " : " loops, ")
+                        + Numbers.fixed(60_000 * manifold.volumeFlow(), 2) + " l/min, "
+                        + Numbers.fixed(manifold.pressure() / 1000, 1) + " kPa; "
+                        + Numbers.fixed(manifold.throttled() / 1000, 1) + " kPa to be throttled before it");
     }
 
     private List<RoomRow> rooms() {

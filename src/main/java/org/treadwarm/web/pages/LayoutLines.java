@@ -8,11 +8,15 @@ import java.util.Map;
 import java.util.stream.Collectors;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.LoopValve;
+import org.treadwarm.sizing.Sizing.PartLoops;
+import org.treadwarm.sizing.Sizing.PartSizing;
+import org.treadwarm.sizing.Sizing.PartState;
 import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.sizing.Sizing.Total;
 import org.treadwarm.sizing.Sizing.WarmUpSizing;
 import org.treadwarm.sizing.Sizing.WaterLayout;
 import org.treadwarm.sizing.Sizing.WaterTotal;
+import org.treadwarm.sizing.Verdict;
 import org.treadwarm.units.Numbers;
 import org.treadwarm.web.pages.Answer.Line;
 
@@ -27,6 +31,7 @@ final class LayoutLines {
 
     static List<Layout> of(String room, FloorSizing floor, Total total) {
         LayoutLines lines = new LayoutLines();
+        lines.parts(floor);
         floor.electric().ifPresent(layout -> lines.layouts.add(ElectricLines.of(layout, floor)));
         floor.water().ifPresent(layout -> lines.water(room, layout, total));
         floor.warmup().ifPresent(lines::warmUp);
@@ -38,27 +43,19 @@ final class LayoutLines {
         lines.add(line("Supply", layout.supplyTemperature(), 1, "°C", governed(room, total)));
         lines.add(line(
                 "Return", layout.returnTemperature(), 1, "°C", "spread " + Numbers.fixed(layout.spread(), 1) + " K"));
-        lines.add(line(
-                "Loops",
-                layout.loops(),
-                0,
-                "",
-                "of " + Numbers.fixed(layout.loopLength(), 1) + " m each, feeders included"));
-        lines.add(line(
-                "Flow of one loop",
-                60_000 * layout.volumeFlow() / layout.loops(),
-                2,
-                "l/min",
-                Numbers.fixed(3600 * layout.massFlow() / layout.loops(), 1) + " kg/h"));
+        if (layout.parts().isEmpty()) {
+            loops(lines, "", layout.loops(), layout.loopLength(), layout.massFlow(), layout.volumeFlow());
+            drop(lines, "", layout.pressureDrop(), layout.velocity(), layout.reynolds());
+            total.water().ifPresent(water -> valve(lines, room, "", water));
+        }
+        for (PartLoops part : layout.parts()) {
+            String of = ", " + part.name();
+            double volumeFlow = part.massFlow() * layout.volumeFlow() / layout.massFlow();
+            loops(lines, of, part.loops(), part.loopLength(), part.massFlow(), volumeFlow);
+            drop(lines, of, part.pressureDrop(), part.velocity(), part.reynolds());
+            total.water().ifPresent(water -> valve(lines, room, part.name(), water));
+        }
         lines.add(line("Flow of the room", 60_000 * layout.volumeFlow(), 2, "l/min", ""));
-        lines.add(line(
-                "Drop of one loop",
-                layout.pressureDrop() / 1000,
-                2,
-                "kPa",
-                "straight pipe; " + Numbers.fixed(layout.velocity(), 2) + " m/s, Re "
-                        + Numbers.fixed(layout.reynolds(), 0)));
-        total.water().ifPresent(water -> valve(lines, room, water));
         lines.add(line("Water in the loops", 1000 * layout.waterContent(), 1, "l", ""));
         layout.tableMeanOvertemperature()
                 .ifPresent(table -> lines.add(line(
@@ -69,12 +66,78 @@ final class LayoutLines {
                         "mean over-temperature of the water by EN 1264-2 (from memory); the section says "
                                 + Numbers.fixed(layout.meanOvertemperature(), 1) + " K, and is what is used")));
         limits(lines, layout.limits());
+        for (PartLoops part : layout.parts()) {
+            limits(
+                    lines,
+                    part.limits().stream()
+                            .map(limit -> named(limit, part.name()))
+                            .toList());
+        }
         layouts.add(
                 new Layout(
                         "Warm-water layout",
                         lines,
                         "Drops are of straight pipe without bends, fittings and manifold. Flush, vent and test the pressure before the floor"
                                 + " is covered; heat a screed up by its maker's rules; protect against frost when switched off."));
+    }
+
+    private static void loops(
+            List<Line> lines, String of, int count, double length, double massFlow, double volumeFlow) {
+        lines.add(line("Loops" + of, count, 0, "", "of " + Numbers.fixed(length, 1) + " m each, feeders included"));
+        lines.add(line(
+                "Flow of one loop" + of,
+                60_000 * volumeFlow / count,
+                2,
+                "l/min",
+                Numbers.fixed(3600 * massFlow / count, 1) + " kg/h"));
+    }
+
+    private static void drop(List<Line> lines, String of, double drop, double velocity, double reynolds) {
+        lines.add(line(
+                "Drop of one loop" + of,
+                drop / 1000,
+                2,
+                "kPa",
+                "straight pipe; " + Numbers.fixed(velocity, 2) + " m/s, Re " + Numbers.fixed(reynolds, 0)));
+    }
+
+    private static PracticeJudgement named(PracticeJudgement limit, String part) {
+        return new PracticeJudgement(
+                limit.name() + ", " + part, limit.value(), limit.limit(), limit.margin(), limit.source());
+    }
+
+    /** What each part of the floor gives: at the required flux, or at the carrying flux when that is less. */
+    private void parts(FloorSizing floor) {
+        if (floor.parts().isEmpty()) {
+            return;
+        }
+        boolean carries = floor.verdict() == Verdict.CARRIES;
+        List<Line> lines = new ArrayList<>();
+        for (PartSizing part : floor.parts()) {
+            PartState state = carries ? part.atRequiredFlux() : part.atCarryingFlux();
+            lines.add(new Line(
+                    capital(part.name()),
+                    Numbers.fixed(state.flux(), 1) + " W/m²",
+                    part.zone() + " of " + Numbers.fixed(part.area(), 1) + " m², spacing "
+                            + Numbers.fixed(1000 * part.spacing(), 0) + " mm; warmest point "
+                            + Numbers.fixed(state.surfaceTemperature(), 1) + " °C, "
+                            + Numbers.fixed(state.downwardFlux(), 1) + " W/m² down"));
+            part.limits()
+                    .forEach(limit -> lines.add(new Line(
+                            capital(part.name()) + " may give",
+                            Numbers.fixed(limit.maximumFlux(), 1) + " W/m²",
+                            limit.name())));
+        }
+        layouts.add(new Layout(
+                "Parts of the floor",
+                lines,
+                "All parts are fed alike, and the floor gives their mean over its area: here "
+                        + (carries ? "the required flux" : "the carrying flux, which is too little")
+                        + ". A peripheral strip is at most 1 m wide, along outer walls (EN 1264-3)."));
+    }
+
+    private static String capital(String text) {
+        return text.substring(0, 1).toUpperCase(Locale.ROOT) + text.substring(1);
     }
 
     private void warmUp(WarmUpSizing found) {
@@ -117,17 +180,20 @@ final class LayoutLines {
                 .orElse("");
     }
 
-    private static void valve(List<Line> lines, String room, WaterTotal water) {
+    private static void valve(List<Line> lines, String room, String part, WaterTotal water) {
         water.valves().stream()
-                .filter(valve -> valve.room().equals(room))
+                .filter(valve ->
+                        valve.room().equals(room) && valve.part().orElse("").equals(part))
                 .findFirst()
                 .map(LoopValve::throttled)
                 .ifPresent(throttled -> lines.add(line(
-                        "To be throttled at each valve",
+                        "To be throttled at each valve" + (part.isEmpty() ? "" : ", " + part),
                         throttled / 1000,
                         2,
                         "kPa",
-                        "against the worst loop of the job")));
+                        water.manifolds().size() > 1
+                                ? "against the worst loop of its manifold"
+                                : "against the worst loop of the job")));
     }
 
     /** One line for each quantity, with every limit of practice beside it. */
@@ -142,10 +208,8 @@ final class LayoutLines {
                             + limit.source()
                             + (limit.margin() < 0 ? ": beyond it" : ""))
                     .collect(Collectors.joining("; "));
-            lines.add(new Line(
-                    name.substring(0, 1).toUpperCase(Locale.ROOT) + name.substring(1),
-                    shown(name, of.get(0).value()),
-                    (kept ? "kept: " : "look again: ") + all));
+            lines.add(
+                    new Line(capital(name), shown(name, of.get(0).value()), (kept ? "kept: " : "look again: ") + all));
         });
     }
 
@@ -154,7 +218,7 @@ final class LayoutLines {
     }
 
     private static String shown(String name, double value) {
-        return switch (name) {
+        return switch (name.split(", ", 2)[0]) {
             case "loop length" -> Numbers.fixed(value, 0) + " m";
             case "pressure drop" -> Numbers.fixed(value / 1000, 1) + " kPa";
             case "velocity" -> Numbers.fixed(value, 2) + " m/s";

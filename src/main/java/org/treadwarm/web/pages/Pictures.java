@@ -36,7 +36,10 @@ import org.treadwarm.sizing.SectionView;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FloorState;
 import org.treadwarm.sizing.Sizing.LayerSizing;
+import org.treadwarm.sizing.Sizing.PartSizing;
+import org.treadwarm.sizing.Sizing.PartState;
 import org.treadwarm.sizing.Sizing.RoomSizing;
+import org.treadwarm.sizing.Sizing.SectionSizing;
 import org.treadwarm.sizing.Sizing.SectionState;
 import org.treadwarm.sizing.Verdict;
 import org.treadwarm.sizing.WarmUpEvaluation;
@@ -150,21 +153,25 @@ final class Pictures {
         return Optional.of(FloorBuildUpDrawing.draw(sheet, section));
     }
 
-    /** The floor solved between its cables or pipes, with its isotherms; empty when it is not solved or cannot be drawn. */
-    static Optional<String> isotherms(Room room, RoomSizing answer, Optional<SectionView> view, Sheet sheet) {
+    /** The floor, or the part of it with this number, solved between its cables or pipes, with its isotherms; empty when it cannot be drawn. */
+    static Optional<String> isotherms(Room room, RoomSizing answer, SectionView solved, int number, Sheet sheet) {
         FloorSizing floor = answer.floor();
-        if (view.isEmpty() || floor.section().isEmpty()) {
-            return Optional.empty();
-        }
         HeatedFloor given = room.heatedFloor().orElseThrow();
         boolean carries = floor.verdict() == Verdict.CARRIES;
-        SectionState state = carries
-                ? floor.section().get().atRequiredFlux()
-                : floor.section().get().atCarryingFlux();
-        double down = carries
-                ? floor.downwardFlux().orElseThrow()
-                : floor.atCarryingFlux().orElseThrow().downwardFlux();
-        SectionView solved = view.get();
+        SectionState state;
+        double down;
+        if (floor.parts().isEmpty()) {
+            SectionSizing section = floor.section().orElseThrow();
+            state = carries ? section.atRequiredFlux() : section.atCarryingFlux();
+            down = carries
+                    ? floor.downwardFlux().orElseThrow()
+                    : floor.atCarryingFlux().orElseThrow().downwardFlux();
+        } else {
+            PartSizing part = floor.parts().get(number);
+            PartState there = carries ? part.atRequiredFlux() : part.atCarryingFlux();
+            state = there.section();
+            down = there.downwardFlux();
+        }
         List<org.treadwarm.draw.Layer> layers = new ArrayList<>(solved(given.above(), floor.layersAbove()));
         layers.addAll(solved(given.below(), floor.layersBelow()));
         boolean water = given.heater().orElseThrow().kind() == HeaterKind.WATER;

@@ -54,7 +54,7 @@ final class PlanPicture {
                 plan.length().value(),
                 OptionalDouble.of(floor.area().value()),
                 units,
-                runs(floor.heater(), answer.floor()),
+                floor.parts().isEmpty() ? runs(floor.heater(), answer.floor()) : inParts(floor),
                 Optional.empty(),
                 loops(answer.floor()),
                 Optional.empty());
@@ -85,6 +85,16 @@ final class PlanPicture {
         return mats
                 ? new HeaterRuns("Heating mats", OptionalDouble.empty(), CABLE_CLEARANCE)
                 : new HeaterRuns(heater.isPresent() ? "Heating cable" : "Heater", spacing(heater), CABLE_CLEARANCE);
+    }
+
+    /** Where each part lies in the room is not told, so its runs are not drawn. */
+    private static HeaterRuns inParts(HeatedFloor floor) {
+        boolean water =
+                floor.heater().map(given -> given.kind() == HeaterKind.WATER).orElse(false);
+        return new HeaterRuns(
+                (water ? "Pipe" : "Heating cable") + ", " + floor.parts().size() + " parts with spacings of their own",
+                OptionalDouble.empty(),
+                water ? PIPE_CLEARANCE : CABLE_CLEARANCE);
     }
 
     private static OptionalDouble spacing(Optional<Heater> heater) {

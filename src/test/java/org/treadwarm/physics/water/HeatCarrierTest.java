@@ -1,12 +1,10 @@
 package org.treadwarm.physics.water;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatExceptionOfType;
 import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException;
 import static org.assertj.core.api.Assertions.within;
 
 import org.junit.jupiter.api.Test;
-import org.treadwarm.sizing.HeatCarriers;
 
 /** Properties of heat carriers beyond the verification values. */
 class HeatCarrierTest {
@@ -53,20 +51,5 @@ class HeatCarrierTest {
         assertThatIllegalArgumentException().isThrownBy(() -> water.density(96));
         assertThatIllegalArgumentException().isThrownBy(() -> new Water(0.05e6));
         assertThatIllegalArgumentException().isThrownBy(() -> LiquidWater.at(272, 1e6));
-    }
-
-    @Test
-    void glycolHasOnlyWhatItsTableHolds() {
-        PropyleneGlycol glycol = HeatCarriers.propyleneGlycol(25);
-        assertThat(glycol.density(25)).isBetween(1014.8, 1028.4);
-        assertThat(glycol.specificHeat(25)).isBetween(3850.0, 3990.0);
-        assertThatExceptionOfType(NoPublishedValueException.class)
-                .isThrownBy(() -> glycol.dynamicViscosity(25))
-                .withMessageContaining("no published viscosity");
-        assertThatIllegalArgumentException().isThrownBy(() -> glycol.density(45));
-        assertThatIllegalArgumentException()
-                .isThrownBy(() -> HeatCarriers.propyleneGlycol(45).density(25));
-        assertThatExceptionOfType(NoPublishedValueException.class)
-                .isThrownBy(() -> Tube.smooth(0.012).flow(0.03, glycol, 30));
     }
 }
