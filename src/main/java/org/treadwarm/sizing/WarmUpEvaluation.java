@@ -44,6 +44,9 @@ public record WarmUpEvaluation(
     private static final double HOUR = 3600;
     private static final int PARTS = 48;
 
+    /** So that the last mark of a cooling curve stands within it. */
+    private static final double BEYOND = 1.1;
+
     public WarmUpEvaluation {
         curve = List.copyOf(curve);
     }
@@ -51,8 +54,18 @@ public record WarmUpEvaluation(
     /** Temperatures at one hour, degrees Celsius. */
     public record CurvePoint(double hour, double floor, double air, double heater) {}
 
-    /** Hours until the air is at 5 °C and the heater plane at 0 °C; left out when not within the time looked at. */
-    public record PowerCutHours(OptionalDouble hoursToFive, OptionalDouble hoursToFreezing) {}
+    /**
+     * Cooling when the heater fails in steady state.
+     *
+     * @param hoursToFive until the air is at 5 °C; left out when not within the time looked at
+     * @param hoursToFreezing until the heater plane is at 0 °C; left out when not within that time
+     * @param curve temperatures at equal times, a little beyond the later of the two, or over all the time looked at
+     */
+    public record PowerCutHours(OptionalDouble hoursToFive, OptionalDouble hoursToFreezing, List<CurvePoint> curve) {
+        public PowerCutHours {
+            curve = List.copyOf(curve);
+        }
+    }
 
     /**
      * A floor under its room.
@@ -153,7 +166,18 @@ public record WarmUpEvaluation(
                 needed,
                 reheat,
                 shown > 0 ? curve(warmUp, start, task.density(), shown, stopped) : List.of(),
-                new PowerCutHours(hours(cut.secondsToFive()), hours(cut.secondsToFreezing())));
+                powerCut(warmUp, cut, task, stopped));
+    }
+
+    private static PowerCutHours powerCut(WarmUp warmUp, PowerCut cut, Task task, BooleanSupplier stopped) {
+        OptionalDouble five = hours(cut.secondsToFive());
+        OptionalDouble freezing = hours(cut.secondsToFreezing());
+        double last = Math.max(five.orElse(task.lookedAt()), freezing.orElse(task.lookedAt()));
+        double shown = Math.min(task.lookedAt(), BEYOND * last);
+        return new PowerCutHours(
+                five,
+                freezing,
+                shown > 0 ? curve(warmUp, warmUp.heldByHeating(task.to()), 0, shown, stopped) : List.of());
     }
 
     private static List<CurvePoint> curve(

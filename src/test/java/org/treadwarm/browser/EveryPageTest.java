@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import com.deque.html.axecore.playwright.AxeBuilder;
 import com.deque.html.axecore.results.Rule;
+import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import com.microsoft.playwright.Browser;
 import com.microsoft.playwright.Page;
@@ -72,6 +73,7 @@ class EveryPageTest {
                 "/jobs",
                 demo,
                 demo + "/rooms/" + room,
+                demo + wallFoot(),
                 broken,
                 broken + "/rooms/studio-1",
                 broken + "/spaces/loft",
@@ -82,6 +84,24 @@ class EveryPageTest {
         return Stream.concat(
                 Stream.concat(jobs, service()),
                 Stream.of("/one-room", "/materials", "/reading-help", "/method", "/nothing-here", "/sign-in"));
+    }
+
+    /** The first wall foot of the demo job that can be solved. */
+    private static String wallFoot() {
+        for (JsonNode room : server.desk()
+                .current(demo.substring("/jobs/".length()))
+                .orElseThrow()
+                .document()
+                .path("rooms")) {
+            for (JsonNode junction : room.path("junctions")) {
+                if (junction.path("at").asText().equals("heated floor")
+                        && room.at("/heatedFloor/ground/kind").asText().equals("slab")) {
+                    return "/rooms/" + room.path("id").textValue() + "/wall-foot/"
+                            + junction.path("id").textValue();
+                }
+            }
+        }
+        throw new IllegalStateException("The demo job has no wall foot to solve");
     }
 
     /** People, keys and the audit list, with a row of every sort, and what links lead to. */
@@ -139,6 +159,8 @@ class EveryPageTest {
 
     private static void assertForEverybody(Tab tab) {
         Page page = tab.page();
+        // A page that tells of a computation comes again until that is done, under the hands of whoever looks at it.
+        page.waitForCondition(() -> page.locator("progress").count() == 0);
         List<String> faults = new ArrayList<>();
         for (int width : new int[] {390, 820, 1280}) {
             page.setViewportSize(width, 1180);

@@ -69,6 +69,10 @@ class WarmUpsApiTest {
         assertThat(answer.getDouble("densityNeeded")).isBetween(150.0, 300.0);
         assertThat(answer.getDouble("reheat")).isPositive();
         assertThat(answer.getDouble("powerCut.hoursToFive")).isBetween(10.0, 72.0);
+        assertThat(answer.getList("powerCut.curve")).hasSize(49);
+        assertThat(answer.getDouble("powerCut.curve[0].air")).isCloseTo(20, within(1e-9));
+        assertThat(answer.getDouble("powerCut.curve[48].hour")).isGreaterThan(answer.getDouble("powerCut.hoursToFive"));
+        assertThat(answer.getDouble("powerCut.curve[48].air")).isLessThan(5);
         assertThat(answer.getList("curve")).hasSize(49);
         assertThat(answer.getDouble("curve[0].air")).isCloseTo(16, within(1e-9));
         assertThat(answer.getDouble("curve[48].hour")).isCloseTo(answer.getDouble("hours"), within(1e-9));

@@ -111,12 +111,18 @@ final class Answer {
             }
         }
         if (floor.warmup().isPresent()) {
-            WarmUpView.of(survey, index)
-                    .ifPresent(morning -> add(
-                            pictures,
-                            "The morning after a setback",
-                            "warmup",
-                            sheet -> Pictures.warmUp(answer, morning, sheet)));
+            WarmUpView.of(survey, index).ifPresent(morning -> {
+                add(
+                        pictures,
+                        "The morning after a setback",
+                        "warmup",
+                        sheet -> Pictures.warmUp(answer, morning, sheet));
+                add(
+                        pictures,
+                        "The heater fails on the coldest day",
+                        "powercut",
+                        sheet -> Pictures.powerCut(answer, morning.powerCut(), sheet));
+            });
         }
         model.put("pictures", pictures);
         model.put("lines", lines(answer));

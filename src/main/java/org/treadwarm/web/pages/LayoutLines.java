@@ -1,6 +1,7 @@
 package org.treadwarm.web.pages;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
@@ -8,6 +9,7 @@ import java.util.Map;
 import java.util.stream.Collectors;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.LoopValve;
+import org.treadwarm.sizing.Sizing.PartLimit;
 import org.treadwarm.sizing.Sizing.PartLoops;
 import org.treadwarm.sizing.Sizing.PartSizing;
 import org.treadwarm.sizing.Sizing.PartState;
@@ -122,11 +124,12 @@ final class LayoutLines {
                             + Numbers.fixed(1000 * part.spacing(), 0) + " mm; warmest point "
                             + Numbers.fixed(state.surfaceTemperature(), 1) + " °C, "
                             + Numbers.fixed(state.downwardFlux(), 1) + " W/m² down"));
-            part.limits()
-                    .forEach(limit -> lines.add(new Line(
+            part.limits().stream()
+                    .min(Comparator.comparingDouble(PartLimit::maximumFlux))
+                    .ifPresent(lowest -> lines.add(new Line(
                             capital(part.name()) + " may give",
-                            Numbers.fixed(limit.maximumFlux(), 1) + " W/m²",
-                            limit.name())));
+                            Numbers.fixed(lowest.maximumFlux(), 1) + " W/m²",
+                            "by its lowest limit, " + lowest.name())));
         }
         layouts.add(new Layout(
                 "Parts of the floor",

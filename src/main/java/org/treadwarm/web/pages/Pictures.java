@@ -202,22 +202,39 @@ final class Pictures {
 
     /** The room's morning after a setback; empty when it is warm at once or cannot be drawn. */
     static Optional<String> warmUp(RoomSizing room, WarmUpEvaluation morning, Sheet sheet) {
-        List<CurvePoint> curve = morning.curve();
+        Threshold setpoint = new Threshold("setpoint", room.indoorTemperature(), Trace.Place.AIR, morning.hours());
+        return curve(WarmUpCurve.Event.WARM_UP, room, morning.curve(), List.of(setpoint), sheet);
+    }
+
+    /** The room cooling down when the heater fails; empty when it is cold at once or cannot be drawn. */
+    static Optional<String> powerCut(RoomSizing room, WarmUpEvaluation.PowerCutHours cut, Sheet sheet) {
+        return curve(
+                WarmUpCurve.Event.POWER_CUT,
+                room,
+                cut.curve(),
+                List.of(
+                        new Threshold("cold room", 5, Trace.Place.AIR, cut.hoursToFive()),
+                        new Threshold("freezing", 0, Trace.Place.HEATER, cut.hoursToFreezing())),
+                sheet);
+    }
+
+    private static Optional<String> curve(
+            WarmUpCurve.Event event, RoomSizing room, List<CurvePoint> curve, List<Threshold> marks, Sheet sheet) {
+        if (curve.size() < 2) {
+            return Optional.empty();
+        }
         try {
-            return curve.size() < 2
-                    ? Optional.empty()
-                    : Optional.of(WarmUpDrawing.draw(
-                            sheet,
-                            new WarmUpCurve(
-                                    WarmUpCurve.Event.WARM_UP,
-                                    room.name(),
-                                    curve.stream().map(CurvePoint::hour).toList(),
-                                    List.of(
-                                            trace(Trace.Place.HEATER, curve, CurvePoint::heater),
-                                            trace(Trace.Place.SURFACE, curve, CurvePoint::floor),
-                                            trace(Trace.Place.AIR, curve, CurvePoint::air)),
-                                    List.of(new Threshold(
-                                            "setpoint", room.indoorTemperature(), Trace.Place.AIR, morning.hours())))));
+            return Optional.of(WarmUpDrawing.draw(
+                    sheet,
+                    new WarmUpCurve(
+                            event,
+                            room.name(),
+                            curve.stream().map(CurvePoint::hour).toList(),
+                            List.of(
+                                    trace(Trace.Place.HEATER, curve, CurvePoint::heater),
+                                    trace(Trace.Place.SURFACE, curve, CurvePoint::floor),
+                                    trace(Trace.Place.AIR, curve, CurvePoint::air)),
+                            marks)));
         } catch (IllegalArgumentException beyondAnyDrawing) {
             return Optional.empty();
         }

@@ -56,7 +56,7 @@ final class PlanPicture {
                 units,
                 floor.parts().isEmpty() ? runs(floor.heater(), answer.floor()) : inParts(floor),
                 Optional.empty(),
-                loops(answer.floor()),
+                floor.parts().isEmpty() ? loops(answer.floor()) : 1,
                 Optional.empty());
     }
 
