@@ -4,6 +4,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Room;
@@ -21,16 +22,22 @@ final class TypedInputs {
         this.forms = new Forms(document, List.of());
     }
 
-    /** A table of inputs. */
-    public record Group(String title, List<Row> rows) {}
+    /** A table of inputs: the thing itself, then what lies within it. */
+    public record Group(String title, List<Section> sections) {}
+
+    /**
+     * What was typed about one thing.
+     *
+     * @param title the part of the group; empty for the group itself
+     */
+    public record Section(String title, List<Row> rows) {}
 
     /**
      * One input.
      *
-     * @param within the part of the group that it belongs to; empty for the group itself
      * @param basis how it was come by; empty when not said
      */
-    public record Row(String within, String name, String value, String basis) {}
+    public record Row(String name, String value, String basis) {}
 
     /** All groups: site, assemblies, spaces, then the rooms. */
     static List<Group> of(JsonNode document) {
@@ -53,21 +60,25 @@ final class TypedInputs {
     }
 
     private Group group(String pointer, String title, Class<? extends Record> type) {
-        List<Row> rows = new ArrayList<>();
-        add(rows, forms.form(pointer, title, type), "");
-        return new Group(title, rows);
+        List<Section> sections = new ArrayList<>();
+        add(sections, forms.form(pointer, title, type), "");
+        return new Group(title, sections);
     }
 
-    private void add(List<Row> rows, ObjectView view, String within) {
-        view.fields().forEach(field -> row(field, within).ifPresent(rows::add));
-        view.more().forEach(field -> row(field, within).ifPresent(rows::add));
+    private void add(List<Section> sections, ObjectView view, String title) {
+        List<Row> rows = Stream.concat(view.fields().stream(), view.more().stream())
+                .flatMap(field -> row(field).stream())
+                .toList();
+        if (!rows.isEmpty()) {
+            sections.add(new Section(title, rows));
+        }
         view.parts()
                 .forEach(part -> part.items()
                         .forEach(item ->
-                                add(rows, item, within.isEmpty() ? item.title() : within + ", " + item.title())));
+                                add(sections, item, title.isEmpty() ? item.title() : title + ", " + item.title())));
     }
 
-    private Optional<Row> row(FieldView field, String within) {
+    private Optional<Row> row(FieldView field) {
         JsonNode node = document.at(field.pointer());
         String typed = Forms.shown(node);
         if (typed.isBlank()) {
@@ -79,6 +90,6 @@ final class TypedInputs {
                 .map(Choice::label)
                 .findFirst()
                 .orElse(bare ? typed + "\u00a0" + field.printedUnit() : typed);
-        return Optional.of(new Row(within, field.label(), value, field.basis()));
+        return Optional.of(new Row(field.label(), value, field.basis()));
     }
 }
