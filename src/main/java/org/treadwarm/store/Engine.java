@@ -27,6 +27,9 @@ sealed interface Engine permits SqliteFile, Postgres {
     /** Makes the place as needed, then runs what brings its tables up to date. */
     void prepare(Runnable preparation);
 
+    /** Statements, each with its semicolon, after which the rows of a table can be neither changed nor removed. */
+    String keepRows(String table);
+
     /** Must run before each transaction begins. */
     void beforeBegin(Connection connection) throws SQLException;
 

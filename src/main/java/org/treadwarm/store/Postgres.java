@@ -90,6 +90,14 @@ record Postgres(DataHome.Postgresql home) implements Engine {
     }
 
     @Override
+    public String keepRows(String table) {
+        return "create function " + table + "_kept() returns trigger language plpgsql as $kept$"
+                + " begin raise exception 'rows of " + table + " are kept as they are'; end $kept$;"
+                + "\n\ncreate trigger " + table + "_kept before update or delete on " + table
+                + " for each row execute function " + table + "_kept();";
+    }
+
+    @Override
     public void beforeBegin(Connection connection) {}
 
     @Override

@@ -65,6 +65,14 @@ record SqliteFile(Path folder) implements Engine {
         DataFolder.prepare(folder, preparation);
     }
 
+    @Override
+    public String keepRows(String table) {
+        String refusal =
+                " on " + table + " begin select raise(abort, 'rows of " + table + " are kept as they are'); end;";
+        return "create trigger " + table + "_unchanged before update" + refusal + "\n\ncreate trigger " + table
+                + "_kept before delete" + refusal;
+    }
+
     /** It will take the write lock at once. */
     @Override
     public void beforeBegin(Connection connection) throws SQLException {

@@ -24,6 +24,8 @@ public final class Store implements AutoCloseable {
     private final ApiKeys keys;
     private final Team team;
     private final Links links;
+    private final Sheets sheets;
+    private final SheetLinks sheetLinks;
 
     Store(Database database, Clock clock, Optional<FolderLock> lock) {
         this.database = database;
@@ -36,6 +38,8 @@ public final class Store implements AutoCloseable {
         this.team = new Team(database, audit, clock);
         this.links = new Links(database, audit, passwords, clock);
         this.keys = new ApiKeys(database, audit, clock);
+        this.sheets = new Sheets(database, audit, clock);
+        this.sheetLinks = new SheetLinks(database, audit, clock);
     }
 
     /**
@@ -88,6 +92,14 @@ public final class Store implements AutoCloseable {
 
     public Links links() {
         return links;
+    }
+
+    public Sheets sheets() {
+        return sheets;
+    }
+
+    public SheetLinks sheetLinks() {
+        return sheetLinks;
     }
 
     public Sessions sessions() {

@@ -15,6 +15,7 @@ import org.eclipse.jetty.server.HttpConfiguration;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.store.Store;
 import org.treadwarm.store.StoreUnavailable;
 import org.treadwarm.web.api.Api;
@@ -54,9 +55,10 @@ public final class Server implements AutoCloseable {
         HostGuard hosts = new HostGuard(settings.allowedHosts());
         Visitors visitors = new Visitors(store.sessions(), settings.behindTls(), settings.behindProxy());
         JobDesk desk = new JobDesk(store.jobs());
-        Api api = new Api(desk);
+        SheetDesk sheets = new SheetDesk(desk, store.sheets());
+        Api api = new Api(desk, sheets);
         Computations computations = new Computations();
-        Pages pages = new Pages(store, desk, visitors, computations);
+        Pages pages = new Pages(store, desk, sheets, visitors, computations);
         Gate gate = new Gate(visitors, new KeyGuard(store.keys()), pages::refuseRole);
         Javalin javalin = Javalin.create(config -> {
             basics(config);

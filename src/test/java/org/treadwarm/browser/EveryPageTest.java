@@ -20,11 +20,16 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.treadwarm.jobs.Demo;
+import org.treadwarm.sheets.Issuing;
+import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.store.Links;
 import org.treadwarm.store.Person;
 import org.treadwarm.store.Role;
 import org.treadwarm.store.Scope;
 import org.treadwarm.store.Session;
+import org.treadwarm.store.SheetContent;
+import org.treadwarm.store.SheetIssue;
+import org.treadwarm.store.SheetOrder;
 import org.treadwarm.web.RunningServer;
 
 /** What holds on every page: no barrier, no complaint of the browser, nothing wider than the page, nothing too small. */
@@ -82,7 +87,7 @@ class EveryPageTest {
                 broken + "/assemblies/shed%20wall",
                 broken + "/assemblies/new%20sash");
         return Stream.concat(
-                Stream.concat(jobs, service()),
+                Stream.concat(jobs, Stream.concat(service(), sheets())),
                 Stream.of("/one-room", "/materials", "/reading-help", "/method", "/nothing-here", "/sign-in"));
     }
 
@@ -118,6 +123,43 @@ class EveryPageTest {
         server.store().team().close(server.member("Carla", Role.OWNER).id(), "tests");
         return Stream.of(
                 "/people", "/keys", "/audit", "/account", join, "/link/" + reset, "/link/spent", "/people?done=role");
+    }
+
+    /** Sheets: one withdrawn and replaced, one that holds and has a link, and one that today's method computes otherwise. */
+    private static Stream<String> sheets() {
+        String job = demo.substring("/jobs/".length());
+        SheetDesk desk = new SheetDesk(server.desk(), server.store().sheets());
+        String first = number(desk.issue(job, 1, Optional.empty(), "tests"));
+        SheetContent kept = desk.find(first).orElseThrow().content();
+        desk.withdraw(first, "the wrong house", "tests");
+        SheetContent otherwise =
+                new SheetContent("0", kept.survey(), kept.sizing().replace("\"heatLoss\":", "\"heatFlow\":"));
+        String odd = ((SheetIssue.Issued)
+                        server.store().sheets().issue(new SheetOrder(job, 1, otherwise, Optional.of(first)), "tests"))
+                .header()
+                .number();
+        String second = number(desk.issue(job, 1, Optional.empty(), "tests"));
+        server.store().sheetLinks().create(second, "tests");
+        String token =
+                server.store().sheetLinks().create(first, "tests").orElseThrow().token();
+        return Stream.of(
+                demo + "/issue",
+                broken + "/issue",
+                "/sheets",
+                "/sheets/" + first,
+                "/sheets/" + second,
+                "/sheets/" + odd,
+                "/sheets/" + odd + "/verification",
+                "/sheets/" + second + "/verification",
+                "/sheets/" + second + "/links",
+                "/sheets/" + second + "/withdrawal",
+                "/sheets/2026-9999",
+                "/shared/" + token,
+                "/shared/revoked");
+    }
+
+    private static String number(Issuing issuing) {
+        return ((Issuing.Issued) issuing).sheet().number();
     }
 
     /** The pages that a form with faults, and a good one, come back with. */

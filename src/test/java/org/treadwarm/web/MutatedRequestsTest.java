@@ -95,6 +95,11 @@ class MutatedRequestsTest {
                         key,
                         WarmUpsApiTest.question().toString()),
                 RawRequest.with("POST", jobs, key, body),
+                RawRequest.with("POST", jobs + "/" + job + "/sheets", key, "{\"revision\": 1}"),
+                RawRequest.get("/api/v1/sheets", key),
+                RawRequest.get("/api/v1/sheets/2026-0001", key),
+                RawRequest.get("/api/v1/sheets/2026-0001/verification", key),
+                RawRequest.with("POST", "/api/v1/sheets/2026-0001/withdrawal", key, "{\"reason\": \"wrong\"}"),
                 RawRequest.with("PUT", jobs + "/" + job, key, body).header("If-Match", "\"1\""));
     }
 

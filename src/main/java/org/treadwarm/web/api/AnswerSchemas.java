@@ -222,7 +222,8 @@ final class AnswerSchemas {
         } else if (type == boolean.class) {
             property.put("type", "boolean");
         } else if (type == JsonNode.class) {
-            property.put("type", "object").put("description", "the survey as it was typed");
+            String words = component.getName().equals("sizing") ? "the sizing as issued" : "the survey as it was typed";
+            property.put("type", "object").put("description", words);
         } else if (type.isEnum()) {
             ArrayNode words = property.put("type", "string").putArray("enum");
             for (Object constant : type.getEnumConstants()) {

@@ -4,6 +4,7 @@ import io.javalin.config.RoutesConfig;
 import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.web.security.Access;
 import org.treadwarm.wire.Json;
@@ -17,12 +18,14 @@ public final class Api {
     private final WarmUpApi warmUps;
     private final WallFootApi wallFeet;
     private final JobsApi jobs;
+    private final SheetsApi sheets;
 
-    public Api(JobDesk desk) {
+    public Api(JobDesk desk, SheetDesk sheetDesk) {
         this.sizing = new SizingApi();
         this.warmUps = new WarmUpApi();
         this.wallFeet = new WallFootApi();
         this.jobs = new JobsApi(desk);
+        this.sheets = new SheetsApi(sheetDesk);
     }
 
     /** The description of the API, made when it is first asked for. */
@@ -57,6 +60,11 @@ public final class Api {
         get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing, Access.READ);
         get(routes, ROOT + "/jobs/{id}/revisions", jobs::revisions, Access.READ);
         get(routes, ROOT + "/jobs/{id}/revisions/{n}", jobs::revision, Access.READ);
+        routes.post(ROOT + "/jobs/{id}/sheets", sheets::issue, Access.WRITE);
+        get(routes, ROOT + "/sheets", sheets::list, Access.READ);
+        get(routes, ROOT + "/sheets/{number}", sheets::get, Access.READ);
+        get(routes, ROOT + "/sheets/{number}/verification", sheets::verification, Access.READ);
+        routes.post(ROOT + "/sheets/{number}/withdrawal", sheets::withdraw, Access.WRITE);
     }
 
     /** HEAD answers as GET does, without the body. */

@@ -50,12 +50,12 @@ final class Bodies {
     }
 
     static void tooLarge(Context ctx, int most) {
-        Problems.plain(
-                ctx,
-                413,
-                "too-large",
-                "The body is too large",
-                "At most " + most / (1024 * 1024) + " MiB are read here.");
+        Problems.plain(ctx, 413, "too-large", "The body is too large", "At most " + size(most) + " are read here.");
+    }
+
+    private static String size(int bytes) {
+        int mebibyte = 1024 * 1024;
+        return bytes % mebibyte == 0 ? bytes / mebibyte + " MiB" : bytes / 1024 + " KiB";
     }
 
     private static boolean isJson(String contentType) {

@@ -8,6 +8,7 @@ import java.io.UncheckedIOException;
 import org.treadwarm.intake.AssemblyQuestion;
 import org.treadwarm.intake.Document;
 import org.treadwarm.intake.WarmUpQuestion;
+import org.treadwarm.sheets.Verification;
 import org.treadwarm.sizing.AssemblyEvaluation;
 import org.treadwarm.sizing.SectionEvaluation;
 import org.treadwarm.sizing.Sizing;
@@ -51,6 +52,9 @@ final class OpenApi {
             answers.add(JobsApi.JobAnswer.class);
             answers.add(JobsApi.JobsAnswer.class);
             answers.add(JobsApi.RevisionsAnswer.class);
+            answers.add(SheetAnswers.SheetAnswer.class);
+            answers.add(SheetAnswers.SheetsAnswer.class);
+            answers.add(Verification.class);
             answers.add(Api.Health.class);
             return mapper.writeValueAsBytes(description);
         } catch (IOException e) {

@@ -37,14 +37,19 @@ final class Answer {
 
     private final Map<String, Object> model = new HashMap<>();
 
-    private Answer() {}
+    private final String prefix;
+
+    /** @param prefix begins the ids of the drawings, so that several answers can stand on one page */
+    private Answer(String prefix) {
+        this.prefix = prefix;
+    }
 
     /** A line of numbers. */
     public record Line(String name, String value, String note) {}
 
     static Map<String, Object> of(JsonNode document, Part part) {
         Partial partial = Partial.of(document);
-        Answer answer = new Answer();
+        Answer answer = new Answer("");
         answer.model.put("waiting", partial.judgement().problems().size());
         answer.model.put(
                 "own",
@@ -73,16 +78,28 @@ final class Answer {
         return answer.model;
     }
 
+    /**
+     * What an issued sheet says of a room.
+     *
+     * @param solvedAnew whether to draw what must be solved anew for a drawing; not by another method than the sheet's
+     */
+    static Map<String, Object> issued(Survey survey, Sizing sizing, int index, boolean solvedAnew) {
+        Answer answer = new Answer("r" + index + "-");
+        answer.room(survey, survey.rooms().get(index), sizing, index, solvedAnew);
+        return answer.model;
+    }
+
     private void room(Survey survey, Sizing sizing, Part part) {
         for (int i = 0; i < sizing.rooms().size(); i++) {
             RoomSizing answer = sizing.rooms().get(i);
             if (answer.name().equals(part.title().strip())) {
-                room(survey, survey.rooms().get(i), sizing, i);
+                room(survey, survey.rooms().get(i), sizing, i, true);
+                model.put("working", WorkingView.of(survey, sizing, "/rooms/" + i));
             }
         }
     }
 
-    private void room(Survey survey, Room room, Sizing sizing, int index) {
+    private void room(Survey survey, Room room, Sizing sizing, int index, boolean solvedAnew) {
         RoomSizing answer = sizing.rooms().get(index);
         FloorSizing floor = answer.floor();
         model.put("verdict", verdict(floor));
@@ -96,7 +113,7 @@ final class Answer {
         add(pictures, "What the floor must give and may give", "limits", sheet -> Pictures.limits(answer, sheet));
         add(pictures, "The heated floor in section", "floor", sheet -> Pictures.floor(room, answer, sheet));
         add(pictures, "The floor in plan", "plan", sheet -> PlanPicture.of(room, answer, sheet));
-        if (floor.section().isPresent() || !floor.parts().isEmpty()) {
+        if (solvedAnew && (floor.section().isPresent() || !floor.parts().isEmpty())) {
             List<SectionView> views = SectionView.all(survey, index);
             for (int i = 0; i < views.size(); i++) {
                 int number = i;
@@ -110,7 +127,7 @@ final class Answer {
                         sheet -> Pictures.isotherms(room, answer, views.get(number), number, sheet));
             }
         }
-        if (floor.warmup().isPresent()) {
+        if (solvedAnew && floor.warmup().isPresent()) {
             WarmUpView.of(survey, index).ifPresent(morning -> {
                 add(
                         pictures,
@@ -143,7 +160,6 @@ final class Answer {
                                 || warning.pointer().startsWith(pointer + "/"))
                         .toList());
         model.put("cautions", answer.cautions());
-        model.put("working", WorkingView.of(survey, sizing, pointer));
     }
 
     private static String pathNote(Sizing.PathLoss path) {
@@ -376,13 +392,13 @@ final class Answer {
     /** A drawing in two widths: one for a desk or a tablet, one for a narrow column. */
     public record Picture(String title, String wide, String narrow) {}
 
-    private static void add(
+    private void add(
             List<Picture> pictures,
             String title,
             String id,
             java.util.function.Function<Sheet, Optional<String>> draw) {
-        Optional<String> wide = draw.apply(new Sheet("w-" + id, 560));
-        Optional<String> narrow = draw.apply(Sheet.narrow("n-" + id));
+        Optional<String> wide = draw.apply(new Sheet("w-" + prefix + id, 560));
+        Optional<String> narrow = draw.apply(Sheet.narrow("n-" + prefix + id));
         if (wide.isPresent() && narrow.isPresent()) {
             pictures.add(new Picture(title, wide.get(), narrow.get()));
         }

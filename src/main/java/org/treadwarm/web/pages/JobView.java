@@ -106,7 +106,7 @@ final class JobView {
                 .toList();
     }
 
-    private static List<TotalRow> totals(Sizing all) {
+    static List<TotalRow> totals(Sizing all) {
         List<TotalRow> rows = new ArrayList<>();
         rows.add(new TotalRow(
                 "Heat loss of the rooms", Numbers.grouped(all.total().heatLoss()) + " W"));

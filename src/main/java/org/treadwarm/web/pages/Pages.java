@@ -7,6 +7,7 @@ import io.javalin.http.HttpStatus;
 import java.time.Clock;
 import java.util.Map;
 import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.store.Role;
 import org.treadwarm.store.Store;
 import org.treadwarm.web.Computations;
@@ -21,6 +22,9 @@ public final class Pages {
     private final PeoplePages people;
     private final KeyPages keys;
     private final AuditPages audit;
+    private final IssuePages issuing;
+    private final SheetPages sheets;
+    private final SheetLinkPages sheetLinks;
     private final View view;
     private final EntryPages entry;
     private final JobPages jobs;
@@ -32,7 +36,7 @@ public final class Pages {
     private final SolvingAhead ahead;
     private final TablePages tables = new TablePages();
 
-    public Pages(Store store, JobDesk desk, Visitors visitors, Computations computations) {
+    public Pages(Store store, JobDesk desk, SheetDesk sheetDesk, Visitors visitors, Computations computations) {
         this.visitors = visitors;
         this.view = new View(visitors);
         this.entry = new EntryPages(store, visitors, view);
@@ -43,6 +47,9 @@ public final class Pages {
         this.people = new PeoplePages(store, visitors, view);
         this.keys = new KeyPages(store, visitors, view, Clock.systemUTC());
         this.audit = new AuditPages(store, view);
+        this.issuing = new IssuePages(desk, sheetDesk, visitors, view);
+        this.sheets = new SheetPages(sheetDesk, visitors, view);
+        this.sheetLinks = new SheetLinkPages(store, visitors, view);
         this.quick = new QuickPages(desk, visitors, view);
         this.computing = new ComputationPages(computations, view);
         this.method = new MethodPage(computations, view);
@@ -84,7 +91,22 @@ public final class Pages {
         routes.get("/reading-help", ctx -> view.show(ctx, 200, "reading-help", tables.readingHelp()), Access.SURVEYOR);
         routes.get("/method", method::show, Access.SURVEYOR);
         routes.post("/method", form(method::change), Access.SURVEYOR);
+        sheets(routes);
         service(routes);
+    }
+
+    private void sheets(RoutesConfig routes) {
+        routes.get("/jobs/{job}/issue", issuing::ask, Access.ESTIMATOR);
+        routes.post("/jobs/{job}/issue", form(issuing::issue), Access.ESTIMATOR);
+        routes.get("/sheets", sheets::list, Access.SURVEYOR);
+        routes.get("/sheets/{number}", sheets::show, Access.SURVEYOR);
+        routes.get("/sheets/{number}/verification", sheets::verify, Access.SURVEYOR);
+        routes.get("/sheets/{number}/withdrawal", sheets::askWithdrawal, Access.ESTIMATOR);
+        routes.post("/sheets/{number}/withdrawal", form(sheets::withdraw), Access.ESTIMATOR);
+        routes.get("/sheets/{number}/links", sheetLinks::list, Access.ESTIMATOR);
+        routes.post("/sheets/{number}/links", form(sheetLinks::create), Access.ESTIMATOR);
+        routes.post("/sheets/{number}/links/{link}/revoke", form(sheetLinks::revoke), Access.ESTIMATOR);
+        routes.get("/shared/{token}", sheetLinks::shared, Access.ANYBODY);
     }
 
     private void service(RoutesConfig routes) {

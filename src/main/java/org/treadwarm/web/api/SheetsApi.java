@@ -1,0 +1,105 @@
+package org.treadwarm.web.api;
+
+import io.javalin.http.Context;
+import java.util.Optional;
+import org.treadwarm.sheets.Issuing;
+import org.treadwarm.sheets.SheetDesk;
+import org.treadwarm.sheets.Verification;
+import org.treadwarm.store.Sheet;
+import org.treadwarm.store.SheetWithdrawal;
+import org.treadwarm.web.Problems;
+import org.treadwarm.web.api.SheetAnswers.IssuedSheet;
+import org.treadwarm.web.api.SheetAnswers.SheetAnswer;
+import org.treadwarm.web.api.SheetAnswers.SheetsAnswer;
+import org.treadwarm.web.security.KeyGuard;
+
+/** Issued sheets over the API. */
+final class SheetsApi {
+    private final SheetDesk desk;
+
+    SheetsApi(SheetDesk desk) {
+        this.desk = desk;
+    }
+
+    /** {@code POST /api/v1/jobs/{id}/sheets}. */
+    void issue(Context ctx) {
+        Optional<SheetBodies.Order> order = SheetBodies.order(ctx);
+        if (order.isPresent()) {
+            String job = ctx.pathParam("id");
+            answer(ctx, desk.issue(job, order.get().revision(), order.get().replaces(), who(ctx)));
+        }
+    }
+
+    private static void answer(Context ctx, Issuing result) {
+        if (result instanceof Issuing.Issued issued) {
+            ctx.header("Location", "/api/v1/sheets/" + issued.sheet().number());
+            SizingApi.json(ctx, 201, IssuedSheet.of(issued.sheet()));
+        } else if (result instanceof Issuing.Draft draft) {
+            Problems.invalid(ctx, draft.problems());
+        } else if (result instanceof Issuing.SameHolds same) {
+            String detail = "Sheet " + same.number() + " of this job has the same content and holds.";
+            Problems.plain(ctx, 409, "same-sheet", "This is issued already", detail);
+        } else if (result instanceof Issuing.CannotReplace cannot) {
+            Problems.plain(ctx, 409, "replaces", "That sheet cannot be replaced", cannot.why());
+        } else {
+            missing(ctx, "There is no such job or revision");
+        }
+    }
+
+    /** {@code GET /api/v1/sheets}. */
+    void list(Context ctx) {
+        SizingApi.json(ctx, 200, SheetsAnswer.of(desk.list()));
+    }
+
+    /** {@code GET /api/v1/sheets/{number}}. */
+    void get(Context ctx) {
+        Optional<Sheet> sheet = number(ctx).flatMap(desk::find);
+        if (sheet.isPresent()) {
+            SizingApi.json(ctx, 200, SheetAnswer.of(sheet.get()));
+        } else {
+            missing(ctx, "There is no such sheet");
+        }
+    }
+
+    /** {@code GET /api/v1/sheets/{number}/verification}. */
+    void verification(Context ctx) {
+        Optional<Verification> verification = number(ctx).flatMap(desk::verify);
+        if (verification.isPresent()) {
+            SizingApi.json(ctx, 200, verification.get());
+        } else {
+            missing(ctx, "There is no such sheet");
+        }
+    }
+
+    /** {@code POST /api/v1/sheets/{number}/withdrawal}. */
+    void withdraw(Context ctx) {
+        Optional<String> reason = SheetBodies.reason(ctx);
+        if (reason.isEmpty()) {
+            return;
+        }
+        SheetWithdrawal result = number(ctx)
+                .map(number -> desk.withdraw(number, reason.get(), who(ctx)))
+                .orElseGet(SheetWithdrawal.Missing::new);
+        if (result instanceof SheetWithdrawal.Done done) {
+            SizingApi.json(ctx, 200, IssuedSheet.of(done.header()));
+        } else if (result instanceof SheetWithdrawal.DoneBefore before) {
+            String detail = "It was withdrawn at "
+                    + before.header().withdrawal().orElseThrow().at() + "; that stands as it was.";
+            Problems.plain(ctx, 409, "withdrawn", "The sheet is withdrawn already", detail);
+        } else {
+            missing(ctx, "There is no such sheet");
+        }
+    }
+
+    private static Optional<String> number(Context ctx) {
+        return Optional.of(ctx.pathParam("number")).filter(SheetBodies::isNumber);
+    }
+
+    private static String who(Context ctx) {
+        return "key " + KeyGuard.key(ctx).name();
+    }
+
+    private static void missing(Context ctx, String title) {
+        Problems.plain(ctx, 404, "missing", title, "Nothing is kept at " + ctx.path() + ".");
+    }
+}
