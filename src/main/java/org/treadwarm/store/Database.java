@@ -30,6 +30,9 @@ final class Database implements AutoCloseable {
     // Queueing them here is fair and keeps the connections for readers.
     private final ReentrantLock writing = new ReentrantLock(true);
 
+    // The transaction that this thread is in, so that changes made within a change belong to it.
+    private final ThreadLocal<Optional<Handle>> begun = ThreadLocal.withInitial(Optional::empty);
+
     Database(Engine engine, HikariDataSource pool) {
         this.engine = engine;
         this.pool = pool;
@@ -55,11 +58,20 @@ final class Database implements AutoCloseable {
 
     /** Each statement of a read sees the newest committed state; there is no transaction around them. */
     <T> T read(Function<Handle, T> question) {
+        if (begun.get().isPresent()) {
+            return question.apply(begun.get().get());
+        }
         return guarded(new AtomicBoolean(), () -> jdbi.withHandle(question::apply));
     }
 
-    /** One transaction, alone against all other changes of this and of other processes. */
+    /**
+     * One transaction, alone against all other changes of this and of other processes. A change made within another is part
+     * of that one's transaction, and stands or falls with it.
+     */
     <T> T change(Function<Handle, T> change) {
+        if (begun.get().isPresent()) {
+            return change.apply(begun.get().get());
+        }
         AtomicBoolean committing = new AtomicBoolean();
         writing.lock();
         try {
@@ -67,15 +79,24 @@ final class Database implements AutoCloseable {
                     committing,
                     () -> jdbi.withHandle(handle -> {
                         engine.beforeBegin(handle.getConnection());
-                        return handle.inTransaction(begun -> {
-                            engine.afterBegin(begun.getConnection());
-                            T result = change.apply(begun);
+                        return handle.inTransaction(alone -> {
+                            engine.afterBegin(alone.getConnection());
+                            T result = within(alone, change);
                             committing.set(true);
                             return result;
                         });
                     }));
         } finally {
             writing.unlock();
+        }
+    }
+
+    private <T> T within(Handle handle, Function<Handle, T> change) {
+        begun.set(Optional.of(handle));
+        try {
+            return change.apply(handle);
+        } finally {
+            begun.remove();
         }
     }
 

@@ -24,6 +24,7 @@ public final class Store implements AutoCloseable {
     private final ApiKeys keys;
     private final Team team;
     private final Links links;
+    private final KeptAnswers keptAnswers;
 
     Store(Database database, Clock clock, Optional<FolderLock> lock) {
         this.database = database;
@@ -36,6 +37,7 @@ public final class Store implements AutoCloseable {
         this.team = new Team(database, audit, clock);
         this.links = new Links(database, audit, passwords, clock);
         this.keys = new ApiKeys(database, audit, clock);
+        this.keptAnswers = new KeptAnswers(database, clock);
     }
 
     /**
@@ -96,6 +98,10 @@ public final class Store implements AutoCloseable {
 
     public ApiKeys keys() {
         return keys;
+    }
+
+    public KeptAnswers keptAnswers() {
+        return keptAnswers;
     }
 
     public Audit audit() {

@@ -51,7 +51,7 @@ public final class Server implements AutoCloseable {
         HostGuard hosts = new HostGuard(settings.allowedHosts());
         Visitors visitors = new Visitors(store.sessions(), settings.behindTls(), settings.behindProxy());
         JobDesk desk = new JobDesk(store.jobs());
-        Api api = new Api(desk);
+        Api api = new Api(desk, store.keptAnswers());
         Pages pages = new Pages(store, desk, visitors);
         Gate gate = new Gate(visitors, new KeyGuard(store.keys()), pages::refuseRole);
         Javalin javalin = Javalin.create(config -> {

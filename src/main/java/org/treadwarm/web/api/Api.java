@@ -5,6 +5,7 @@ import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sizing.Sizing;
+import org.treadwarm.store.KeptAnswers;
 import org.treadwarm.web.security.Access;
 import org.treadwarm.wire.Json;
 
@@ -14,13 +15,15 @@ public final class Api {
     public static final String ROOT = "/api/v1";
 
     private final SizingApi sizing;
+    private final BatchApi batch;
     private final WarmUpApi warmUps;
     private final JobsApi jobs;
 
-    public Api(JobDesk desk) {
+    public Api(JobDesk desk, KeptAnswers keptAnswers) {
         this.sizing = new SizingApi();
+        this.batch = new BatchApi();
         this.warmUps = new WarmUpApi();
-        this.jobs = new JobsApi(desk);
+        this.jobs = new JobsApi(desk, new Repeats(keptAnswers));
     }
 
     /** The description of the API, made when it is first asked for. */
@@ -43,6 +46,7 @@ public final class Api {
         get(routes, ROOT + "/health", Api::health, Access.ANYBODY);
         get(routes, ROOT + "/openapi.json", this::description, Access.ANYBODY);
         routes.post(ROOT + "/sizings", sizing::size, Access.SIZE);
+        routes.post(ROOT + "/sizings/batch", batch::size, Access.SIZE);
         routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate, Access.SIZE);
         routes.post(ROOT + "/sections", sizing::section, Access.SIZE);
         routes.post(ROOT + "/warmups", warmUps::answer, Access.SIZE);

@@ -47,6 +47,7 @@ final class OpenApi {
             answers.add(JobsApi.JobAnswer.class);
             answers.add(JobsApi.JobsAnswer.class);
             answers.add(JobsApi.RevisionsAnswer.class);
+            answers.add(SizingApi.MaterialsAnswer.class);
             answers.add(Api.Health.class);
             return mapper.writeValueAsBytes(description);
         } catch (IOException e) {
