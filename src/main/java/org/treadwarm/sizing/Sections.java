@@ -3,6 +3,7 @@ package org.treadwarm.sizing;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.atomic.LongAdder;
 import org.treadwarm.physics.section.FloorResponse;
 
 /**
@@ -23,6 +24,9 @@ final class Sections {
         }
     };
 
+    private static final LongAdder REMEMBERED = new LongAdder();
+    private static final LongAdder SOLVED = new LongAdder();
+
     private int solved;
     private int followed;
     private String whyNot = "";
@@ -32,6 +36,7 @@ final class Sections {
         synchronized (KEPT) {
             FloorResponse known = KEPT.get(geometry);
             if (known != null) {
+                REMEMBERED.increment();
                 return Optional.of(known);
             }
         }
@@ -40,6 +45,7 @@ final class Sections {
             return Optional.empty();
         }
         solved++;
+        SOLVED.increment();
         try {
             FloorResponse response = geometry.solve();
             synchronized (KEPT) {
@@ -49,6 +55,12 @@ final class Sections {
         } catch (IllegalArgumentException | IllegalStateException problem) {
             whyNot = problem.getMessage();
             return Optional.empty();
+        }
+    }
+
+    static SectionCache.Reading reading() {
+        synchronized (KEPT) {
+            return new SectionCache.Reading(KEPT.size(), REMEMBERED.sum(), SOLVED.sum());
         }
     }
 

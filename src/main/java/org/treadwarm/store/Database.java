@@ -13,6 +13,7 @@ import org.jdbi.v3.core.Handle;
 import org.jdbi.v3.core.Jdbi;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
+import org.treadwarm.meter.Durations;
 
 /** Runs reads and changes against the database and turns its failures into {@link StoreUnavailable}. */
 final class Database implements AutoCloseable {
@@ -32,6 +33,9 @@ final class Database implements AutoCloseable {
 
     // The transaction that this thread is in, so that changes made within a change belong to it.
     private final ThreadLocal<Optional<Handle>> begun = ThreadLocal.withInitial(Optional::empty);
+
+    private final Durations reads = new Durations();
+    private final Durations changes = new Durations();
 
     Database(Engine engine, HikariDataSource pool) {
         this.engine = engine;
@@ -61,7 +65,12 @@ final class Database implements AutoCloseable {
         if (begun.get().isPresent()) {
             return question.apply(begun.get().get());
         }
-        return guarded(new AtomicBoolean(), () -> jdbi.withHandle(question::apply));
+        long begin = System.nanoTime();
+        try {
+            return guarded(new AtomicBoolean(), () -> jdbi.withHandle(question::apply));
+        } finally {
+            reads.add(System.nanoTime() - begin);
+        }
     }
 
     /**
@@ -73,6 +82,7 @@ final class Database implements AutoCloseable {
             return change.apply(begun.get().get());
         }
         AtomicBoolean committing = new AtomicBoolean();
+        long begin = System.nanoTime();
         writing.lock();
         try {
             return guarded(
@@ -88,7 +98,16 @@ final class Database implements AutoCloseable {
                     }));
         } finally {
             writing.unlock();
+            changes.add(System.nanoTime() - begin);
         }
+    }
+
+    Durations.Reading readsLasted() {
+        return reads.read();
+    }
+
+    Durations.Reading changesLasted() {
+        return changes.read();
     }
 
     private <T> T within(Handle handle, Function<Handle, T> change) {

@@ -8,7 +8,7 @@ import io.javalin.http.MethodNotAllowedResponse;
 import java.time.Duration;
 import java.util.List;
 import java.util.Locale;
-import java.util.UUID;
+import java.util.Optional;
 import org.eclipse.jetty.server.AbstractConnector;
 import org.eclipse.jetty.server.Connector;
 import org.eclipse.jetty.server.HttpConfiguration;
@@ -22,6 +22,7 @@ import org.treadwarm.web.pages.Pages;
 import org.treadwarm.web.security.Gate;
 import org.treadwarm.web.security.HostGuard;
 import org.treadwarm.web.security.KeyGuard;
+import org.treadwarm.web.security.RateLimit;
 import org.treadwarm.web.security.SecureHeaders;
 import org.treadwarm.web.security.Visitors;
 
@@ -51,13 +52,19 @@ public final class Server implements AutoCloseable {
         HostGuard hosts = new HostGuard(settings.allowedHosts());
         Visitors visitors = new Visitors(store.sessions(), settings.behindTls(), settings.behindProxy());
         JobDesk desk = new JobDesk(store.jobs());
-        Api api = new Api(desk, store.keptAnswers());
+        Api api = new Api(desk, store);
         Pages pages = new Pages(store, desk, visitors);
         Gate gate = new Gate(visitors, new KeyGuard(store.keys()), pages::refuseRole);
+        RequestWatch watch = new RequestWatch();
+        Optional<RateLimit> limit = settings.rateLimit().stream()
+                .mapToObj(perMinute -> new RateLimit(perMinute, System::nanoTime))
+                .findFirst();
         Javalin javalin = Javalin.create(config -> {
             basics(config);
             config.jetty.modifyHttpConfiguration(http -> http.setIdleTimeout(idle.toMillis()));
+            config.requestLogger.http((ctx, milliseconds) -> watch.end(ctx));
             config.routes.before(ctx -> {
+                watch.begin(ctx);
                 SecureHeaders.set(ctx);
                 if (!hosts.admits(ctx)) {
                     answerPlainly(ctx, 421, "host", "This server does not answer to that name");
@@ -65,7 +72,9 @@ public final class Server implements AutoCloseable {
                 }
             });
             config.routes.beforeMatched(gate::check);
+            limit.ifPresent(each -> config.routes.beforeMatched(each::check));
             new Assets().routes(config.routes);
+            new Metrics(store, watch).routes(config.routes);
             api.routes(config.routes);
             pages.routes(config.routes);
             faults(config, pages);
@@ -128,13 +137,11 @@ public final class Server implements AutoCloseable {
             answer(ctx, pages, 503);
         });
         config.routes.exception(IllegalArgumentException.class, (e, ctx) -> {
-            LOG.warn("a request was refused deep inside: {}", e.getMessage());
+            LOG.warn("a request was refused deep inside: {}", Traces.of(e));
             answer(ctx, pages, 422);
         });
         config.routes.exception(Exception.class, (e, ctx) -> {
-            String reference = UUID.randomUUID().toString().substring(0, 8);
-            LOG.error("fault {}", reference, e);
-            ctx.attribute("reference", reference);
+            LOG.error("fault: {}", Traces.of(e));
             answer(ctx, pages, 500);
         });
         for (int status : new int[] {404, 405, 413}) {
@@ -164,7 +171,9 @@ public final class Server implements AutoCloseable {
     }
 
     private static boolean isApi(Context ctx) {
-        return ctx.path().startsWith("/api/") || ctx.path().equals("/api");
+        return ctx.path().startsWith("/api/")
+                || ctx.path().equals("/api")
+                || ctx.path().equals("/metrics");
     }
 
     private static void answerPlainly(Context ctx, int status, String kind, String title) {
@@ -178,7 +187,8 @@ public final class Server implements AutoCloseable {
             case 413 -> "The body is too large";
             case 422 -> "This cannot be kept as it is: it holds characters that are no text";
             case 503 -> unavailable(ctx.attribute("reason"));
-            case 500 -> "A fault of the program, noted under " + ctx.attribute("reference");
+            case 500 ->
+                "A fault of the program, noted under " + RequestIds.id(ctx).orElse("no id");
             default -> String.format(Locale.ROOT, "The request could not be answered (%d)", status);
         };
     }

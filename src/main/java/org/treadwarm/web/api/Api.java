@@ -5,7 +5,7 @@ import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sizing.Sizing;
-import org.treadwarm.store.KeptAnswers;
+import org.treadwarm.store.Store;
 import org.treadwarm.web.security.Access;
 import org.treadwarm.wire.Json;
 
@@ -14,16 +14,18 @@ public final class Api {
     /** Where it stands. */
     public static final String ROOT = "/api/v1";
 
+    private final Store store;
     private final SizingApi sizing;
     private final BatchApi batch;
     private final WarmUpApi warmUps;
     private final JobsApi jobs;
 
-    public Api(JobDesk desk, KeptAnswers keptAnswers) {
+    public Api(JobDesk desk, Store store) {
+        this.store = store;
         this.sizing = new SizingApi();
         this.batch = new BatchApi();
         this.warmUps = new WarmUpApi();
-        this.jobs = new JobsApi(desk, new Repeats(keptAnswers));
+        this.jobs = new JobsApi(desk, new Repeats(store.keptAnswers()));
     }
 
     /** The description of the API, made when it is first asked for. */
@@ -43,7 +45,7 @@ public final class Api {
 
     /** Adds the routes. */
     public void routes(RoutesConfig routes) {
-        get(routes, ROOT + "/health", Api::health, Access.ANYBODY);
+        get(routes, ROOT + "/health", this::health, Access.ANYBODY);
         get(routes, ROOT + "/openapi.json", this::description, Access.ANYBODY);
         routes.post(ROOT + "/sizings", sizing::size, Access.SIZE);
         routes.post(ROOT + "/sizings/batch", batch::size, Access.SIZE);
@@ -66,7 +68,8 @@ public final class Api {
         routes.head(path, handler, access);
     }
 
-    private static void health(Context ctx) {
+    private void health(Context ctx) {
+        store.check();
         SizingApi.json(ctx, 200, HEALTH);
     }
 

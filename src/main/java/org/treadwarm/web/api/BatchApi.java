@@ -17,6 +17,7 @@ import org.treadwarm.jobs.Judgement;
 import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.web.Problems;
+import org.treadwarm.web.Traces;
 import org.treadwarm.wire.Json;
 import org.treadwarm.wire.ProblemDocument;
 
@@ -92,7 +93,7 @@ final class BatchApi {
                     ? Json.bytes(new Sized(200, judged.sizing().get()))
                     : Refused.of(ProblemDocument.invalid(judged.problems()));
         } catch (RuntimeException fault) {
-            LOG.error("a survey of a batch met a fault", fault);
+            LOG.error("a survey of a batch met a fault: {}", Traces.of(fault));
             return Refused.of(ProblemDocument.plain(
                     500, "http", "A fault of the program", "This survey could not be sized; the others were."));
         }

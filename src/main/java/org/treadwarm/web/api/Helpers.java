@@ -2,6 +2,8 @@ package org.treadwarm.web.api;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.Future;
 import java.util.concurrent.RejectedExecutionException;
@@ -10,6 +12,7 @@ import java.util.concurrent.ThreadPoolExecutor;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.Function;
+import org.slf4j.MDC;
 
 /**
  * Threads that help a request with many equal pieces of work. There is one less than the machine has cores, and none waits
@@ -36,12 +39,26 @@ final class Helpers {
                 made[i] = work.apply(items.get(i));
             }
         };
-        List<Future<?>> helping = helpers(items.size() - 1, share);
+        List<Future<?>> helping = helpers(items.size() - 1, inSameLog(share));
         share.run();
         helping.forEach(Helpers::await);
         @SuppressWarnings("unchecked")
         List<B> inOrder = (List<B>) List.of(made);
         return inOrder;
+    }
+
+    /** What helpers log belongs to the request that they help. */
+    private static Runnable inSameLog(Runnable share) {
+        Map<String, String> context =
+                Optional.ofNullable(MDC.getCopyOfContextMap()).orElseGet(Map::of);
+        return () -> {
+            MDC.setContextMap(context);
+            try {
+                share.run();
+            } finally {
+                MDC.clear();
+            }
+        };
     }
 
     private List<Future<?>> helpers(int useful, Runnable share) {
