@@ -4,6 +4,7 @@ import io.javalin.util.JavalinBindException;
 import java.time.Clock;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.concurrent.Callable;
 import java.util.concurrent.CountDownLatch;
 import org.treadwarm.jobs.Demo;
@@ -22,6 +23,8 @@ import picocli.CommandLine.Option;
         description = "Start the server. This is what the program does when no command is named.",
         mixinStandardHelpOptions = true)
 public final class ServeCommand implements Callable<Integer> {
+    private static final int MOST_PER_MINUTE = 1_000_000;
+
     @Option(
             names = "--port",
             defaultValue = "8080",
@@ -50,6 +53,21 @@ public final class ServeCommand implements Callable<Integer> {
             description = "one reverse proxy in front appends to X-Forwarded-For where requests come from: believe it")
     private boolean behindProxy;
 
+    @Option(
+            names = "--rate-limit",
+            description =
+                    "at most so many requests a minute with one API key, 1 to 1000000; each server counts for itself"
+                            + " (no limit unless named)")
+    private Optional<Integer> rateLimit = Optional.empty();
+
+    @Option(
+            names = "--log",
+            defaultValue = "plain",
+            description =
+                    "plain: warnings and faults, a line each; json: the same and a line for each request, as JSON;"
+                            + " on the error stream (${DEFAULT-VALUE})")
+    private String log;
+
     /** Begins to load the server, on another thread, while the command line is read and the store opened. */
     public static void prepare() {
         WarmUp.begin();
@@ -61,11 +79,23 @@ public final class ServeCommand implements Callable<Integer> {
             System.err.println("The port is 0 to 65535, not " + port + ".");
             return 2;
         }
+        if (rateLimit.isPresent() && (rateLimit.get() < 1 || rateLimit.get() > MOST_PER_MINUTE)) {
+            System.err.println(
+                    "The rate limit is 1 to " + MOST_PER_MINUTE + " requests a minute, not " + rateLimit.get() + ".");
+            return 2;
+        }
+        if (!log.equals("plain") && !log.equals("json")) {
+            System.err.println("The log is plain or json, not " + log + ".");
+            return 2;
+        }
+        if (log.equals("json")) {
+            LogSetup.writeJson();
+        }
         try (Store store = Store.openToServe(data.home(), Clock.systemUTC())) {
             if (demo) {
                 Demo.addTo(new JobDesk(store.jobs()));
             }
-            Server server = Server.start(new Settings(bind, port, hosts, behindTls, behindProxy), store);
+            Server server = Server.start(settings(), store);
             announce(server.port(), store.people().inviteOwner());
             CountDownLatch stopped = new CountDownLatch(1);
             Runtime.getRuntime().addShutdownHook(new Thread(() -> {
@@ -80,6 +110,11 @@ public final class ServeCommand implements Callable<Integer> {
                     + ": it is in use already, or not allowed. Choose another with --port or --bind.");
             return 1;
         }
+    }
+
+    private Settings settings() {
+        OptionalInt limit = rateLimit.map(OptionalInt::of).orElseGet(OptionalInt::empty);
+        return new Settings(bind, port, hosts, behindTls, behindProxy, limit);
     }
 
     /** Told on the console only: the link makes its visitor the owner, so it stands in no log. */

@@ -6,8 +6,10 @@ import java.util.Optional;
 import org.treadwarm.intake.Document;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.JobContent;
+import org.treadwarm.store.JobCursor;
 import org.treadwarm.store.JobRevision;
 import org.treadwarm.store.Jobs;
+import org.treadwarm.store.JobsPage;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.store.SaveResult;
 
@@ -33,11 +35,23 @@ public final class JobDesk {
 
     /** Starts a job. */
     public Job create(String name, JsonNode survey, Change change) {
+        return create(prepared(name, survey), change);
+    }
+
+    /** A job read and judged, but not kept yet. */
+    public record Prepared(String name, JsonNode document, Judgement judged) {}
+
+    /** Reads and judges a job that shall be started, which may take long. */
+    public Prepared prepared(String name, JsonNode survey) {
         JsonNode document = survey.deepCopy();
         Ids.give(document, Document.mapper().createObjectNode());
-        Judgement judged = Judgement.of(document);
-        RevisionHeader header = jobs.create(content(name, document, judged), change);
-        return job(header, document, judged);
+        return new Prepared(name, document, Judgement.of(document));
+    }
+
+    /** Starts a job, which only has to be kept. */
+    public Job create(Prepared prepared, Change change) {
+        RevisionHeader header = jobs.create(content(prepared.name(), prepared.document(), prepared.judged()), change);
+        return job(header, prepared.document(), prepared.judged());
     }
 
     /** Saves a whole job as its next revision, if it still is at the expected one. */
@@ -78,6 +92,16 @@ public final class JobDesk {
     /** The revisions of a job, newest first. */
     public List<RevisionHeader> revisions(String id) {
         return jobs.revisions(id);
+    }
+
+    /** A part of the revisions of a job, newest first, see {@link Jobs#revisions(String, int, long)}. */
+    public List<RevisionHeader> revisions(String id, int limit, long before) {
+        return jobs.revisions(id, limit, before);
+    }
+
+    /** A part of the list of jobs, see {@link Jobs#page}. */
+    public JobsPage page(int limit, Optional<JobCursor> after) {
+        return jobs.page(limit, after);
     }
 
     /** The newest revision of every job, the one changed last first. */

@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.CancellationException;
+import java.util.concurrent.atomic.LongAdder;
 import java.util.function.BooleanSupplier;
 import org.treadwarm.physics.section.FloorResponse;
 
@@ -33,6 +34,10 @@ final class Sections {
 
     private final boolean looking;
     private final Set<SectionGeometry> met = new LinkedHashSet<>();
+
+    private static final LongAdder REMEMBERED = new LongAdder();
+    private static final LongAdder SOLVED = new LongAdder();
+
     private int solved;
     private int followed;
     private String whyNot = "";
@@ -96,6 +101,7 @@ final class Sections {
         synchronized (KEPT) {
             tried = KEPT.get(geometry);
         }
+        (tried == null ? SOLVED : REMEMBERED).increment();
         if (tried == null) {
             if (solved == MOST_NEW) {
                 whyNot = "one sizing solves at most " + MOST_NEW + " different floors";
@@ -107,6 +113,12 @@ final class Sections {
         }
         whyNot = tried.whyNot();
         return tried.response();
+    }
+
+    static SectionCache.Reading reading() {
+        synchronized (KEPT) {
+            return new SectionCache.Reading(KEPT.size(), REMEMBERED.sum(), SOLVED.sum());
+        }
     }
 
     /** Whether this sizing may follow one more floor through time. */

@@ -1,12 +1,20 @@
 package org.treadwarm.sizing;
 
 import java.util.Optional;
+import java.util.concurrent.atomic.LongAdder;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Survey;
 
 /** The main job: a survey in, a sizing out. */
 public final class Sizer {
+    private static final LongAdder SIZED = new LongAdder();
+
     private Sizer() {}
+
+    /** How many surveys were sized since the program started. */
+    public static long sized() {
+        return SIZED.sum();
+    }
 
     /**
      * Sizes every room of a survey.
@@ -33,6 +41,7 @@ public final class Sizer {
                     "an area or length here is so small that what is divided by it is beyond all bounds",
                     "areas and lengths of things that can be built"));
         }
+        SIZED.increment();
         return new Answers(evaluation).sizing();
     }
 }

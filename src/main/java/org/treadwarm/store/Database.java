@@ -13,6 +13,7 @@ import org.jdbi.v3.core.Handle;
 import org.jdbi.v3.core.Jdbi;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
+import org.treadwarm.meter.Durations;
 
 /** Runs reads and changes against the database and turns its failures into {@link StoreUnavailable}. */
 final class Database implements AutoCloseable {
@@ -29,6 +30,12 @@ final class Database implements AutoCloseable {
     // connection.
     // Queueing them here is fair and keeps the connections for readers.
     private final ReentrantLock writing = new ReentrantLock(true);
+
+    // The transaction that this thread is in, so that changes made within a change belong to it.
+    private final ThreadLocal<Optional<Handle>> begun = ThreadLocal.withInitial(Optional::empty);
+
+    private final Durations reads = new Durations();
+    private final Durations changes = new Durations();
 
     Database(Engine engine, HikariDataSource pool) {
         this.engine = engine;
@@ -55,27 +62,60 @@ final class Database implements AutoCloseable {
 
     /** Each statement of a read sees the newest committed state; there is no transaction around them. */
     <T> T read(Function<Handle, T> question) {
-        return guarded(new AtomicBoolean(), () -> jdbi.withHandle(question::apply));
+        if (begun.get().isPresent()) {
+            return question.apply(begun.get().get());
+        }
+        long begin = System.nanoTime();
+        try {
+            return guarded(new AtomicBoolean(), () -> jdbi.withHandle(question::apply));
+        } finally {
+            reads.add(System.nanoTime() - begin);
+        }
     }
 
-    /** One transaction, alone against all other changes of this and of other processes. */
+    /**
+     * One transaction, alone against all other changes of this and of other processes. A change made within another is part
+     * of that one's transaction, and stands or falls with it.
+     */
     <T> T change(Function<Handle, T> change) {
+        if (begun.get().isPresent()) {
+            return change.apply(begun.get().get());
+        }
         AtomicBoolean committing = new AtomicBoolean();
+        long begin = System.nanoTime();
         writing.lock();
         try {
             return guarded(
                     committing,
                     () -> jdbi.withHandle(handle -> {
                         engine.beforeBegin(handle.getConnection());
-                        return handle.inTransaction(begun -> {
-                            engine.afterBegin(begun.getConnection());
-                            T result = change.apply(begun);
+                        return handle.inTransaction(alone -> {
+                            engine.afterBegin(alone.getConnection());
+                            T result = within(alone, change);
                             committing.set(true);
                             return result;
                         });
                     }));
         } finally {
             writing.unlock();
+            changes.add(System.nanoTime() - begin);
+        }
+    }
+
+    Durations.Reading readsLasted() {
+        return reads.read();
+    }
+
+    Durations.Reading changesLasted() {
+        return changes.read();
+    }
+
+    private <T> T within(Handle handle, Function<Handle, T> change) {
+        begun.set(Optional.of(handle));
+        try {
+            return change.apply(handle);
+        } finally {
+            begun.remove();
         }
     }
 

@@ -3,9 +3,11 @@ package org.treadwarm.store;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.time.Clock;
+import java.time.Instant;
 import java.util.List;
 import java.util.Optional;
 import org.jdbi.v3.core.Handle;
+import org.jdbi.v3.core.statement.Query;
 import org.jdbi.v3.core.statement.StatementContext;
 
 /** The jobs with all their revisions. Nothing saved is ever changed or removed. */
@@ -99,6 +101,65 @@ public final class Jobs {
         return database.read(handle -> handle.createQuery("select " + HEADER_COLUMNS
                         + " from job join revision on revision.job_id = job.id where " + NEWEST
                         + " order by saved_at desc, job_id")
+                .map((row, context) -> Row.of(row, context).header())
+                .list());
+    }
+
+    /**
+     * A part of {@link #list}. The list holds still while it is read part by part: it is of the jobs as they were when its
+     * first part was read, to the millisecond.
+     *
+     * @param limit at most so many jobs, at least 1
+     * @param after where to go on; empty for the first part
+     */
+    public JobsPage page(int limit, Optional<JobCursor> after) {
+        return database.read(handle -> {
+            Optional<Instant> asOf = after.map(JobCursor::asOf).or(() -> lastSave(handle));
+            return asOf.map(then -> page(handle, limit, then, after))
+                    .orElseGet(() -> new JobsPage(List.of(), Optional.empty()));
+        });
+    }
+
+    private static Optional<Instant> lastSave(Handle handle) {
+        return handle.createQuery("select saved_at from revision order by saved_at desc limit 1")
+                .mapTo(String.class)
+                .findOne()
+                .map(Times::instant);
+    }
+
+    private static JobsPage page(Handle handle, int limit, Instant asOf, Optional<JobCursor> after) {
+        String goOn = after.isPresent() ? " and (saved_at < :savedAt or saved_at = :savedAt and job_id > :jobId)" : "";
+        Query query = handle.createQuery("select " + HEADER_COLUMNS + " from revision where saved_at <= :asOf"
+                        + " and not exists (select 1 from revision later where later.job_id = revision.job_id"
+                        + " and later.revision > revision.revision and later.saved_at <= :asOf)" + goOn
+                        + " order by saved_at desc, job_id limit :limit")
+                .bind("asOf", Times.text(asOf))
+                .bind("limit", limit + 1);
+        after.ifPresent(
+                last -> query.bind("savedAt", Times.text(last.savedAt())).bind("jobId", last.jobId()));
+        List<RevisionHeader> found =
+                query.map((row, context) -> Row.of(row, context).header()).list();
+        if (found.size() <= limit) {
+            return new JobsPage(found, Optional.empty());
+        }
+        RevisionHeader last = found.get(limit - 1);
+        return new JobsPage(
+                List.copyOf(found.subList(0, limit)), Optional.of(new JobCursor(asOf, last.savedAt(), last.jobId())));
+    }
+
+    /**
+     * A part of the job's history, newest first; empty if there is no such job or nothing before.
+     *
+     * @param limit at most so many revisions
+     * @param before only revisions of lower numbers
+     */
+    public List<RevisionHeader> revisions(String id, int limit, long before) {
+        return database.read(handle -> handle.createQuery(
+                        "select " + HEADER_COLUMNS
+                                + " from revision where job_id = :id and revision < :before order by revision desc limit :limit")
+                .bind("id", id)
+                .bind("before", before)
+                .bind("limit", limit)
                 .map((row, context) -> Row.of(row, context).header())
                 .list());
     }

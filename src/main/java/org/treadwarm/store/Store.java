@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Duration;
 import java.util.Optional;
+import org.treadwarm.meter.Durations;
 
 /**
  * Everything the program keeps, in one folder or database: jobs with all their revisions, people, sessions, keys and the audit list.
@@ -26,6 +27,7 @@ public final class Store implements AutoCloseable {
     private final Links links;
     private final Sheets sheets;
     private final SheetLinks sheetLinks;
+    private final KeptAnswers keptAnswers;
 
     Store(Database database, Clock clock, Optional<FolderLock> lock) {
         this.database = database;
@@ -40,6 +42,7 @@ public final class Store implements AutoCloseable {
         this.keys = new ApiKeys(database, audit, clock);
         this.sheets = new Sheets(database, audit, clock);
         this.sheetLinks = new SheetLinks(database, audit, clock);
+        this.keptAnswers = new KeptAnswers(database, clock);
     }
 
     /**
@@ -110,8 +113,37 @@ public final class Store implements AutoCloseable {
         return keys;
     }
 
+    public KeptAnswers keptAnswers() {
+        return keptAnswers;
+    }
+
     public Audit audit() {
         return audit;
+    }
+
+    /**
+     * Reads a little, to see whether it can be read.
+     *
+     * @throws StoreUnavailable if not
+     */
+    public void check() {
+        try {
+            database.read(handle -> handle.createQuery("select count(*) from job where id = ''")
+                    .mapTo(Long.class)
+                    .one());
+        } catch (IllegalStateException problem) {
+            throw new StoreUnavailable("The store cannot be read.", problem);
+        }
+    }
+
+    /** How long reads lasted since it was opened. */
+    public Durations.Reading readsLasted() {
+        return database.readsLasted();
+    }
+
+    /** How long changes lasted since it was opened, with the wait for their turn. */
+    public Durations.Reading changesLasted() {
+        return database.changesLasted();
     }
 
     @Override

@@ -14,7 +14,7 @@ public final class Problems {
     public static void write(Context ctx, ProblemDocument problem) {
         ctx.status(problem.status());
         ctx.contentType(ProblemDocument.MEDIA_TYPE);
-        ctx.result(Json.bytes(problem));
+        ctx.result(Json.bytes(problem.metBy(RequestIds.id(ctx))));
     }
 
     /** Writes that a document has problems. */

@@ -8,7 +8,7 @@ import io.javalin.http.MethodNotAllowedResponse;
 import java.time.Duration;
 import java.util.List;
 import java.util.Locale;
-import java.util.UUID;
+import java.util.Optional;
 import org.eclipse.jetty.server.AbstractConnector;
 import org.eclipse.jetty.server.Connector;
 import org.eclipse.jetty.server.HttpConfiguration;
@@ -23,6 +23,7 @@ import org.treadwarm.web.pages.Pages;
 import org.treadwarm.web.security.Gate;
 import org.treadwarm.web.security.HostGuard;
 import org.treadwarm.web.security.KeyGuard;
+import org.treadwarm.web.security.RateLimit;
 import org.treadwarm.web.security.SecureHeaders;
 import org.treadwarm.web.security.Visitors;
 
@@ -56,14 +57,20 @@ public final class Server implements AutoCloseable {
         Visitors visitors = new Visitors(store.sessions(), settings.behindTls(), settings.behindProxy());
         JobDesk desk = new JobDesk(store.jobs());
         SheetDesk sheets = new SheetDesk(desk, store.sheets());
-        Api api = new Api(desk, sheets);
+        Api api = new Api(desk, sheets, store);
         Computations computations = new Computations();
         Pages pages = new Pages(store, desk, sheets, visitors, computations);
         Gate gate = new Gate(visitors, new KeyGuard(store.keys()), pages::refuseRole);
+        RequestWatch watch = new RequestWatch();
+        Optional<RateLimit> limit = settings.rateLimit().stream()
+                .mapToObj(perMinute -> new RateLimit(perMinute, System::nanoTime))
+                .findFirst();
         Javalin javalin = Javalin.create(config -> {
             basics(config);
             config.jetty.modifyHttpConfiguration(http -> http.setIdleTimeout(idle.toMillis()));
+            config.requestLogger.http((ctx, milliseconds) -> watch.end(ctx));
             config.routes.before(ctx -> {
+                watch.begin(ctx);
                 SecureHeaders.set(ctx);
                 if (!hosts.admits(ctx)) {
                     answerPlainly(ctx, 421, "host", "This server does not answer to that name");
@@ -71,7 +78,9 @@ public final class Server implements AutoCloseable {
                 }
             });
             config.routes.beforeMatched(gate::check);
+            limit.ifPresent(each -> config.routes.beforeMatched(each::check));
             new Assets().routes(config.routes);
+            new Metrics(store, watch).routes(config.routes);
             api.routes(config.routes);
             pages.routes(config.routes);
             faults(config, pages);
@@ -135,13 +144,11 @@ public final class Server implements AutoCloseable {
             answer(ctx, pages, 503);
         });
         config.routes.exception(IllegalArgumentException.class, (e, ctx) -> {
-            LOG.warn("a request was refused deep inside: {}", e.getMessage());
+            LOG.warn("a request was refused deep inside: {}", Traces.of(e));
             answer(ctx, pages, 422);
         });
         config.routes.exception(Exception.class, (e, ctx) -> {
-            String reference = UUID.randomUUID().toString().substring(0, 8);
-            LOG.error("fault {}", reference, e);
-            ctx.attribute("reference", reference);
+            LOG.error("fault: {}", Traces.of(e));
             answer(ctx, pages, 500);
         });
         for (int status : new int[] {404, 405, 413}) {
@@ -171,7 +178,9 @@ public final class Server implements AutoCloseable {
     }
 
     private static boolean isApi(Context ctx) {
-        return ctx.path().startsWith("/api/") || ctx.path().equals("/api");
+        return ctx.path().startsWith("/api/")
+                || ctx.path().equals("/api")
+                || ctx.path().equals("/metrics");
     }
 
     private static void answerPlainly(Context ctx, int status, String kind, String title) {
@@ -185,7 +194,8 @@ public final class Server implements AutoCloseable {
             case 413 -> "The body is too large";
             case 422 -> "This cannot be kept as it is: it holds characters that are no text";
             case 503 -> unavailable(ctx.attribute("reason"));
-            case 500 -> "A fault of the program, noted under " + ctx.attribute("reference");
+            case 500 ->
+                "A fault of the program, noted under " + RequestIds.id(ctx).orElse("no id");
             default -> String.format(Locale.ROOT, "The request could not be answered (%d)", status);
         };
     }

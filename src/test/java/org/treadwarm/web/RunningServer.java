@@ -12,6 +12,7 @@ import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalInt;
 import java.util.stream.Stream;
 import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Job;
@@ -40,10 +41,10 @@ public final class RunningServer implements AutoCloseable {
     private final Server server;
     private final Map<Scope, String> keys = new EnumMap<>(Scope.class);
 
-    private RunningServer(Path folder, DataHome home, boolean behindProxy) {
+    private RunningServer(Path folder, DataHome home, Settings settings) {
         this.folder = folder;
         this.store = Store.open(home, Clock.systemUTC());
-        this.server = Server.start(new Settings("127.0.0.1", 0, List.of(), false, behindProxy), store);
+        this.server = Server.start(settings, store);
         for (Scope scope : Scope.values()) {
             keys.put(scope, store.keys().create("tests", scope, "tests").token());
         }
@@ -56,18 +57,27 @@ public final class RunningServer implements AutoCloseable {
 
     /** Starts one on any free port, over a database of this kind. */
     public static RunningServer start(Kind kind) {
-        return start(kind, false);
+        return start(kind, settings(false, OptionalInt.empty()));
     }
 
     /** Starts one that believes a proxy in front of it. */
     static RunningServer behindProxy() {
-        return start(Kind.SQLITE, true);
+        return start(Kind.SQLITE, settings(true, OptionalInt.empty()));
     }
 
-    private static RunningServer start(Kind kind, boolean behindProxy) {
+    /** Starts one that lets a key send so many requests a minute. */
+    static RunningServer limited(int perMinute) {
+        return start(Kind.SQLITE, settings(false, OptionalInt.of(perMinute)));
+    }
+
+    private static Settings settings(boolean behindProxy, OptionalInt rateLimit) {
+        return new Settings("127.0.0.1", 0, List.of(), false, behindProxy, rateLimit);
+    }
+
+    private static RunningServer start(Kind kind, Settings settings) {
         try {
             Path folder = Files.createTempDirectory("treadwarm-test");
-            return new RunningServer(folder, kind.emptyHome(folder), behindProxy);
+            return new RunningServer(folder, kind.emptyHome(folder), settings);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }

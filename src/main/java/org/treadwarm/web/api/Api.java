@@ -6,6 +6,7 @@ import io.javalin.http.Handler;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.sizing.Sizing;
+import org.treadwarm.store.Store;
 import org.treadwarm.web.security.Access;
 import org.treadwarm.wire.Json;
 
@@ -14,17 +15,21 @@ public final class Api {
     /** Where it stands. */
     public static final String ROOT = "/api/v1";
 
+    private final Store store;
     private final SizingApi sizing;
+    private final BatchApi batch;
     private final WarmUpApi warmUps;
     private final WallFootApi wallFeet;
     private final JobsApi jobs;
     private final SheetsApi sheets;
 
-    public Api(JobDesk desk, SheetDesk sheetDesk) {
+    public Api(JobDesk desk, SheetDesk sheetDesk, Store store) {
+        this.store = store;
         this.sizing = new SizingApi();
+        this.batch = new BatchApi();
         this.warmUps = new WarmUpApi();
         this.wallFeet = new WallFootApi();
-        this.jobs = new JobsApi(desk);
+        this.jobs = new JobsApi(desk, new Repeats(store.keptAnswers()));
         this.sheets = new SheetsApi(sheetDesk);
     }
 
@@ -45,9 +50,10 @@ public final class Api {
 
     /** Adds the routes. */
     public void routes(RoutesConfig routes) {
-        get(routes, ROOT + "/health", Api::health, Access.ANYBODY);
+        get(routes, ROOT + "/health", this::health, Access.ANYBODY);
         get(routes, ROOT + "/openapi.json", this::description, Access.ANYBODY);
         routes.post(ROOT + "/sizings", sizing::size, Access.SIZE);
+        routes.post(ROOT + "/sizings/batch", batch::size, Access.SIZE);
         routes.post(ROOT + "/assemblies/evaluations", sizing::evaluate, Access.SIZE);
         routes.post(ROOT + "/sections", sizing::section, Access.SIZE);
         routes.post(ROOT + "/wall-feet", wallFeet::answer, Access.SIZE);
@@ -73,7 +79,8 @@ public final class Api {
         routes.head(path, handler, access);
     }
 
-    private static void health(Context ctx) {
+    private void health(Context ctx) {
+        store.check();
         SizingApi.json(ctx, 200, HEALTH);
     }
 

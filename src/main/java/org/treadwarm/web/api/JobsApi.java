@@ -2,31 +2,42 @@ package org.treadwarm.web.api;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
+import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.util.ArrayList;
 import java.util.Iterator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.regex.Pattern;
 import org.treadwarm.intake.Intake;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.jobs.JobDesk.Prepared;
 import org.treadwarm.jobs.JobDesk.Saving;
 import org.treadwarm.store.Change;
+import org.treadwarm.store.JobCursor;
+import org.treadwarm.store.JobsPage;
+import org.treadwarm.store.KeptAnswer;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.web.Problems;
 import org.treadwarm.web.security.KeyGuard;
+import org.treadwarm.wire.Json;
 
 /** Jobs over the API: whole documents, every save a revision, no save over somebody else's. */
 final class JobsApi {
     private static final int LONGEST_NAME = 200;
+    private static final Pattern JOBS = Pattern.compile("jobs ([0-9]{1,14}) ([0-9]{1,14}) ([a-z2-9]{12})");
+    private static final Pattern REVISIONS = Pattern.compile("revisions ([0-9]{1,15})");
 
     private final JobDesk desk;
+    private final Repeats repeats;
 
-    JobsApi(JobDesk desk) {
+    JobsApi(JobDesk desk, Repeats repeats) {
         this.desk = desk;
+        this.repeats = repeats;
     }
 
     /** A job with its survey as typed. Problems stand there when it is a draft. */
@@ -67,29 +78,42 @@ final class JobsApi {
         }
     }
 
-    /** A list of jobs. */
-    record JobsAnswer(List<RevisionAnswer> jobs) {}
+    /** A part of the list of jobs. */
+    record JobsAnswer(List<RevisionAnswer> jobs, Optional<String> next) {}
 
-    /** A list of revisions. */
-    record RevisionsAnswer(List<RevisionAnswer> revisions) {}
+    /** A part of the list of revisions. */
+    record RevisionsAnswer(List<RevisionAnswer> revisions, Optional<String> next) {}
 
     private record JobBody(String name, JsonNode survey) {}
 
     /** {@code GET /api/v1/jobs}. */
     void list(Context ctx) {
+        Optional<Paging> paging = Paging.of(ctx, JOBS);
+        if (paging.isEmpty()) {
+            return;
+        }
+        Optional<JobCursor> after =
+                paging.get().after().map(last -> new JobCursor(last.instant(1), last.instant(2), last.text(3)));
+        JobsPage page = desk.page(paging.get().limit(), after);
+        Optional<String> next = page.next()
+                .map(last -> paging.get()
+                        .next(ctx, last.asOf().toEpochMilli(), last.savedAt().toEpochMilli(), last.jobId()));
         SizingApi.json(
                 ctx,
                 200,
-                new JobsAnswer(desk.list().stream().map(RevisionAnswer::of).toList()));
+                new JobsAnswer(page.jobs().stream().map(RevisionAnswer::of).toList(), next));
     }
 
     /** {@code POST /api/v1/jobs}. */
     void create(Context ctx) {
         Optional<JobBody> body = body(ctx);
         if (body.isPresent()) {
-            Job job = desk.create(body.get().name(), body.get().survey(), change(ctx));
-            ctx.header("Location", "/api/v1/jobs/" + job.id());
-            answer(ctx, 201, job);
+            Prepared prepared = desk.prepared(body.get().name(), body.get().survey());
+            repeats.create(ctx, () -> {
+                Job job = desk.create(prepared, change(ctx));
+                String text = new String(Json.bytes(JobAnswer.of(job)), StandardCharsets.UTF_8);
+                return new KeptAnswer(201, "/api/v1/jobs/" + job.id(), tag(job.revision()), text);
+            });
         }
     }
 
@@ -100,14 +124,23 @@ final class JobsApi {
 
     /** {@code GET /api/v1/jobs/{id}/revisions}. */
     void revisions(Context ctx) {
-        List<RevisionAnswer> revisions = desk.revisions(ctx.pathParam("id")).stream()
-                .map(RevisionAnswer::of)
-                .toList();
-        if (revisions.isEmpty()) {
-            missing(ctx);
-        } else {
-            SizingApi.json(ctx, 200, new RevisionsAnswer(revisions));
+        Optional<Paging> paging = Paging.of(ctx, REVISIONS);
+        if (paging.isEmpty()) {
+            return;
         }
+        int limit = paging.get().limit();
+        long before = paging.get().after().map(last -> last.number(1)).orElse(Long.MAX_VALUE);
+        List<RevisionHeader> found = desk.revisions(ctx.pathParam("id"), limit + 1, before);
+        if (found.isEmpty()) {
+            missing(ctx);
+            return;
+        }
+        List<RevisionAnswer> page =
+                found.stream().limit(limit).map(RevisionAnswer::of).toList();
+        Optional<String> next = found.size() > limit
+                ? Optional.of(paging.get().next(ctx, page.get(limit - 1).revision()))
+                : Optional.empty();
+        SizingApi.json(ctx, 200, new RevisionsAnswer(page, next));
     }
 
     /** {@code GET /api/v1/jobs/{id}/revisions/{n}}. */

@@ -55,6 +55,7 @@ final class OpenApi {
             answers.add(SheetAnswers.SheetAnswer.class);
             answers.add(SheetAnswers.SheetsAnswer.class);
             answers.add(Verification.class);
+            answers.add(SizingApi.MaterialsAnswer.class);
             answers.add(Api.Health.class);
             return mapper.writeValueAsBytes(description);
         } catch (IOException e) {

@@ -3,9 +3,10 @@ package org.treadwarm.web.api;
 import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
 import java.time.Duration;
-import java.util.Map;
+import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.CancellationException;
+import java.util.regex.Pattern;
 import org.treadwarm.intake.AssemblyQuestion;
 import org.treadwarm.intake.Intake;
 import org.treadwarm.intake.Intake.Outcome;
@@ -15,12 +16,14 @@ import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
 import org.treadwarm.sizing.SectionEvaluation;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.survey.SectionQuestion;
+import org.treadwarm.tables.Material;
 import org.treadwarm.tables.Materials;
 import org.treadwarm.web.Problems;
 import org.treadwarm.wire.Json;
 
 /** Answers that keep nothing: sizings, evaluations of assemblies, the materials table. */
 final class SizingApi {
+    private static final Pattern MATERIALS = Pattern.compile("materials ([0-9]{1,6})");
     private static final Duration LONGEST = Duration.ofSeconds(10);
 
     /** {@code POST /api/v1/sizings}: a survey in, a sizing out. */
@@ -89,17 +92,29 @@ final class SizingApi {
         }
     }
 
+    /** A part of the materials table. */
+    record MaterialsAnswer(List<Material> materials, Optional<String> next) {}
+
     /** {@code GET /api/v1/materials?find=}: rows of the materials table. */
     void materials(Context ctx) {
         String find = Optional.ofNullable(ctx.queryParam("find")).orElse("");
-        json(ctx, 200, Map.of("materials", find.isBlank() ? Materials.all() : Materials.search(find)));
+        Optional<Paging> paging = Paging.of(ctx, MATERIALS);
+        if (paging.isEmpty()) {
+            return;
+        }
+        List<Material> rows = find.isBlank() ? Materials.all() : Materials.search(find);
+        int from = (int) Math.min(
+                rows.size(), paging.get().after().map(last -> last.number(1)).orElse(0L));
+        int to = Math.min(rows.size(), from + paging.get().limit());
+        Optional<String> next = to < rows.size() ? Optional.of(paging.get().next(ctx, to)) : Optional.empty();
+        json(ctx, 200, new MaterialsAnswer(rows.subList(from, to), next));
     }
 
     static void json(Context ctx, int status, Object answer) {
         json(ctx, status, Json.bytes(answer));
     }
 
-    private static void json(Context ctx, int status, byte[] text) {
+    static void json(Context ctx, int status, byte[] text) {
         ctx.status(status);
         ctx.contentType("application/json; charset=utf-8");
         ctx.result(text);

@@ -27,11 +27,17 @@ public sealed interface Access extends RouteRole {
     /** Programs whose key writes jobs. */
     Access WRITE = new Key(Scope.WRITE);
 
+    /** Programs on this machine, and programs elsewhere whose key reads jobs. */
+    Access WATCH = new Watcher(Scope.READ);
+
     /** Whoever comes. */
     record Anybody() implements Access {}
 
     /** Somebody signed in, with this role or one that may do more. */
     record Member(Role least) implements Access {}
+
+    /** A program on this machine, or one with a key of this scope or one that reaches further. */
+    record Watcher(Scope least) implements Access {}
 
     /** A program with a key of this scope or one that reaches further. */
     record Key(Scope least) implements Access {}

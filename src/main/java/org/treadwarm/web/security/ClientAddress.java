@@ -32,6 +32,12 @@ final class ClientAddress {
         return network(last.isEmpty() ? ctx.req().getRemoteAddr() : last);
     }
 
+    /** Whether an address, as the connection itself has it, is this machine's own. */
+    static boolean isLoopback(String address) {
+        String plain = address.replaceAll("[\\[\\]]", "");
+        return plain.startsWith("127.") || plain.equals("::1") || plain.equals("0:0:0:0:0:0:0:1");
+    }
+
     /** An address of version 6 counts as its first half, since whoever has one has all of that network. */
     static String network(String text) {
         Matcher withPort = WITH_PORT.matcher(text);

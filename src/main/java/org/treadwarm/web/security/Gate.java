@@ -41,6 +41,9 @@ public final class Gate {
         if (access instanceof Access.Key key) {
             return keys.admit(ctx, key.least());
         }
+        if (access instanceof Access.Watcher watcher) {
+            return visitors.isOnThisMachine(ctx) || keys.admit(ctx, watcher.least());
+        }
         return !(access instanceof Access.Member member) || admits(ctx, member);
     }
 

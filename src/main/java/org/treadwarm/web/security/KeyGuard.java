@@ -55,6 +55,11 @@ public final class KeyGuard {
         return true;
     }
 
+    /** The key with which a request was let in; empty on routes that need none. */
+    static Optional<ApiKey> keyIfAny(Context ctx) {
+        return Optional.ofNullable(ctx.attribute(KEY));
+    }
+
     /** The key with which a request was let in to a route that needs one. */
     public static ApiKey key(Context ctx) {
         return Objects.requireNonNull(ctx.attribute(KEY), "the route is open to requests without a key");

@@ -44,6 +44,16 @@ public final class Visitors {
         return ClientAddress.of(ctx, behindProxy);
     }
 
+    /** Whether the request was sent on this machine, and not by a proxy on it. */
+    public boolean isOnThisMachine(Context ctx) {
+        boolean passedOn = secure
+                || behindProxy
+                || ctx.header("X-Forwarded-For") != null
+                || ctx.header("Forwarded") != null
+                || ctx.header("Via") != null;
+        return !passedOn && ClientAddress.isLoopback(ctx.req().getRemoteAddr());
+    }
+
     /** Our own address as the visitor's browser writes it, without a path. */
     public String origin(Context ctx) {
         return (secure ? "https://" : "http://") + ctx.header("Host");
