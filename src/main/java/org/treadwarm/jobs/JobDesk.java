@@ -1,8 +1,10 @@
 package org.treadwarm.jobs;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.MissingNode;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import org.treadwarm.intake.Document;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.JobContent;
@@ -14,9 +16,16 @@ import org.treadwarm.store.SaveResult;
 /** The jobs of the firm, read and judged. A survey with problems is kept as a draft. */
 public final class JobDesk {
     private final Jobs jobs;
+    private final Rooms rooms;
 
     public JobDesk(Jobs jobs) {
         this.jobs = jobs;
+        this.rooms = new Rooms(jobs, this);
+    }
+
+    /** The rooms of the jobs, each saved for itself. */
+    public Rooms rooms() {
+        return rooms;
     }
 
     /** What became of a save. */
@@ -68,6 +77,35 @@ public final class JobDesk {
     /** One revision of a job. */
     public Optional<Job> revision(String id, long revision) {
         return jobs.revision(id, revision).map(JobDesk::job);
+    }
+
+    /** The document of one revision of a job as it was typed, without judging it. */
+    public Optional<JsonNode> document(String id, long revision) {
+        return jobs.revision(id, revision)
+                .map(found -> Pieces.survey(found.content().pieces()));
+    }
+
+    /**
+     * The revision that made a part of the newest revision what it is.
+     *
+     * @param since looked for after this revision
+     * @param part takes the part out of a document
+     */
+    public Optional<RevisionHeader> lastChange(String id, long since, UnaryOperator<JsonNode> part) {
+        List<RevisionHeader> later = jobs.revisions(id).stream()
+                .filter(header -> header.revision() > since)
+                .toList();
+        Optional<RevisionHeader> last = Optional.empty();
+        JsonNode now = MissingNode.getInstance();
+        for (RevisionHeader header : later) {
+            JsonNode then = part.apply(document(id, header.revision()).orElseThrow());
+            if (last.isPresent() && !then.equals(now)) {
+                return last;
+            }
+            now = then;
+            last = Optional.of(header);
+        }
+        return last;
     }
 
     /** The revisions of a job, newest first. */

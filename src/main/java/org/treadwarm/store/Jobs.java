@@ -10,9 +10,8 @@ import org.jdbi.v3.core.statement.StatementContext;
 
 /** The jobs with all their revisions. Nothing saved is ever changed or removed. */
 public final class Jobs {
-    private static final String HEADER_COLUMNS =
-            "job_id, revision, name, draft, manifest_sha256, saved_at, saved_by, note";
-    private static final String NEWEST =
+    static final String HEADER_COLUMNS = "job_id, revision, name, draft, manifest_sha256, saved_at, saved_by, note";
+    static final String NEWEST =
             "revision = (select max(newest.revision) from revision newest where" + " newest.job_id = revision.job_id)";
 
     private final Database database;
@@ -25,8 +24,17 @@ public final class Jobs {
         this.clock = clock;
     }
 
-    /** Starts a job: revision 1, under a new id of 12 characters a-z and 2-9. */
+    /** Starts a job that is found by its name. */
     public RevisionHeader create(JobContent content, Change change) {
+        return create(content, content.name(), change);
+    }
+
+    /**
+     * Starts a job: revision 1, under a new id of 12 characters a-z and 2-9.
+     *
+     * @param words what it is found by
+     */
+    public RevisionHeader create(JobContent content, String words, Change change) {
         Manifest manifest = Manifest.of(content.pieces());
         return database.change(handle -> {
             RevisionHeader header = header(Secrets.id(), 1, content, change);
@@ -35,9 +43,15 @@ public final class Jobs {
                     .bind("createdAt", Times.text(header.savedAt()))
                     .execute();
             insert(handle, header, manifest);
+            JobList.note(handle, header.jobId(), words);
             audit.append(handle, change.who(), "created job", header.jobId());
             return header;
         });
+    }
+
+    /** Adds a revision of a job that is found by its name. */
+    public SaveResult save(String id, long expectedRevision, JobContent content, Change change) {
+        return save(id, expectedRevision, content, content.name(), change);
     }
 
     /**
@@ -45,21 +59,29 @@ public final class Jobs {
      * before: its number rises by exactly one each time, and what did not change takes no new room.
      *
      * @param expectedRevision the revision the change was made from
+     * @param words what the job is found by
      */
-    public SaveResult save(String id, long expectedRevision, JobContent content, Change change) {
+    public SaveResult save(String id, long expectedRevision, JobContent content, String words, Change change) {
         Manifest manifest = Manifest.of(content.pieces());
         return database.change(handle -> newest(handle, id)
                 .map(current -> save(
-                        handle, current, expectedRevision, header(id, expectedRevision + 1, content, change), manifest))
+                        handle,
+                        current,
+                        expectedRevision,
+                        header(id, expectedRevision + 1, content, change),
+                        manifest,
+                        words))
                 .orElseGet(SaveResult.Missing::new));
     }
 
-    private SaveResult save(Handle handle, Row current, long expectedRevision, RevisionHeader next, Manifest manifest) {
+    private SaveResult save(
+            Handle handle, Row current, long expectedRevision, RevisionHeader next, Manifest manifest, String words) {
         long revision = current.header().revision();
         if (expectedRevision != revision) {
             return new SaveResult.Stale(revision);
         }
         insert(handle, next, manifest);
+        JobList.note(handle, next.jobId(), words);
         audit.append(handle, next.savedBy(), "saved job", next.jobId() + " revision " + next.revision());
         return new SaveResult.Saved(next.revision());
     }
@@ -126,17 +148,20 @@ public final class Jobs {
                 .execute();
     }
 
+    static RevisionHeader header(ResultSet row) throws SQLException {
+        return new RevisionHeader(
+                row.getString("job_id"),
+                row.getLong("revision"),
+                row.getString("name"),
+                row.getInt("draft") == 1,
+                Times.instant(row.getString("saved_at")),
+                row.getString("saved_by"),
+                row.getString("note"));
+    }
+
     private record Row(RevisionHeader header, String manifest) {
         static Row of(ResultSet row, StatementContext context) throws SQLException {
-            RevisionHeader header = new RevisionHeader(
-                    row.getString("job_id"),
-                    row.getLong("revision"),
-                    row.getString("name"),
-                    row.getInt("draft") == 1,
-                    Times.instant(row.getString("saved_at")),
-                    row.getString("saved_by"),
-                    row.getString("note"));
-            return new Row(header, row.getString("manifest_sha256"));
+            return new Row(Jobs.header(row), row.getString("manifest_sha256"));
         }
 
         JobRevision read(Handle handle) {

@@ -204,8 +204,10 @@ final class AnswerSchemas {
             property.put("type", "integer");
         } else if (type == boolean.class) {
             property.put("type", "boolean");
+        } else if (type == JsonNode.class && component.getDeclaringRecord() == DifferenceAnswer.class) {
+            property.put("description", "any value of JSON: a text, a number, a list or an object");
         } else if (type == JsonNode.class) {
-            property.put("type", "object").put("description", "the survey as it was typed");
+            property.put("type", "object").put("description", "as it was typed");
         } else if (type.isEnum()) {
             ArrayNode words = property.put("type", "string").putArray("enum");
             for (Object constant : type.getEnumConstants()) {

@@ -16,11 +16,13 @@ public final class Api {
     private final SizingApi sizing;
     private final WarmUpApi warmUps;
     private final JobsApi jobs;
+    private final RoomsApi rooms;
 
     public Api(JobDesk desk) {
         this.sizing = new SizingApi();
         this.warmUps = new WarmUpApi();
         this.jobs = new JobsApi(desk);
+        this.rooms = new RoomsApi(desk);
     }
 
     /** The description of the API, made when it is first asked for. */
@@ -51,6 +53,10 @@ public final class Api {
         routes.post(ROOT + "/jobs", jobs::create, Access.WRITE);
         get(routes, ROOT + "/jobs/{id}", jobs::get, Access.READ);
         routes.put(ROOT + "/jobs/{id}", jobs::put, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/rooms", rooms::add, Access.WRITE);
+        get(routes, ROOT + "/jobs/{id}/rooms/{room}", rooms::get, Access.READ);
+        routes.put(ROOT + "/jobs/{id}/rooms/{room}", rooms::put, Access.WRITE);
+        routes.delete(ROOT + "/jobs/{id}/rooms/{room}", rooms::remove, Access.WRITE);
         get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing, Access.READ);
         get(routes, ROOT + "/jobs/{id}/revisions", jobs::revisions, Access.READ);
         get(routes, ROOT + "/jobs/{id}/revisions/{n}", jobs::revision, Access.READ);

@@ -177,7 +177,7 @@ final class JobsApi {
                 "It is at revision " + current + " now. Fetch it, take its changes in, and send yours again.");
     }
 
-    private static Change change(Context ctx) {
+    static Change change(Context ctx) {
         return Change.by("key " + KeyGuard.key(ctx).name());
     }
 
@@ -250,7 +250,7 @@ final class JobsApi {
         return problems;
     }
 
-    private static String shortened(String text) {
+    static String shortened(String text) {
         return text.length() <= 100 ? text : text.substring(0, 99) + "…";
     }
 
@@ -267,7 +267,7 @@ final class JobsApi {
         SizingApi.json(ctx, status, JobAnswer.of(job));
     }
 
-    private static void missing(Context ctx) {
+    static void missing(Context ctx) {
         Problems.plain(
                 ctx, 404, "missing", "There is no such job or revision", "Nothing is kept at " + ctx.path() + ".");
     }

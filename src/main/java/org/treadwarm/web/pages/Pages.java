@@ -24,6 +24,7 @@ public final class Pages {
     private final EntryPages entry;
     private final JobPages jobs;
     private final PartPages parts;
+    private final VersionPages versions;
     private final QuickPages quick;
     private final TablePages tables = new TablePages();
 
@@ -32,7 +33,8 @@ public final class Pages {
         this.view = new View(visitors);
         this.entry = new EntryPages(store, visitors, view);
         this.jobs = new JobPages(desk, visitors, view);
-        this.parts = new PartPages(desk, visitors, view);
+        this.versions = new VersionPages(desk, visitors, view);
+        this.parts = new PartPages(desk, visitors, view, versions);
         this.links = new LinkPages(store, visitors, view);
         this.account = new AccountPages(store, visitors, view);
         this.people = new PeoplePages(store, visitors, view);
@@ -57,6 +59,7 @@ public final class Pages {
         routes.post("/jobs/{job}", form(jobs::change), Access.SURVEYOR);
         routes.get("/jobs/{job}/{part}/{name}", parts::show, Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}", form(parts::save), Access.SURVEYOR);
+        routes.post("/jobs/{job}/{part}/{name}/versions", form(versions::settle), Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}/preview", form(parts::preview), Access.SURVEYOR);
         routes.get("/one-room", quick::show, Access.SURVEYOR);
         routes.post("/one-room", form(quick::change), Access.SURVEYOR);
