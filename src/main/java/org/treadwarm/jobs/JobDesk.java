@@ -8,7 +8,9 @@ import java.util.function.UnaryOperator;
 import org.treadwarm.intake.Document;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.JobContent;
+import org.treadwarm.store.JobListings;
 import org.treadwarm.store.JobRevision;
+import org.treadwarm.store.JobSearch;
 import org.treadwarm.store.Jobs;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.store.SaveResult;
@@ -45,7 +47,7 @@ public final class JobDesk {
         JsonNode document = survey.deepCopy();
         Ids.give(document, Document.mapper().createObjectNode());
         Judgement judged = Judgement.of(document);
-        RevisionHeader header = jobs.create(content(name, document, judged), change);
+        RevisionHeader header = jobs.create(content(name, document, judged), words(name, document), change);
         return job(header, document, judged);
     }
 
@@ -58,7 +60,8 @@ public final class JobDesk {
         }
         Ids.give(document, Pieces.survey(current.get().content().pieces()));
         Judgement judged = Judgement.of(document);
-        SaveResult result = jobs.save(id, expectedRevision, content(name, document, judged), change);
+        SaveResult result =
+                jobs.save(id, expectedRevision, content(name, document, judged), words(name, document), change);
         if (result instanceof SaveResult.Saved saved) {
             RevisionHeader header =
                     jobs.revision(id, saved.revision()).orElseThrow().header();
@@ -116,6 +119,43 @@ public final class JobDesk {
     /** The newest revision of every job, the one changed last first. */
     public List<RevisionHeader> list() {
         return jobs.list();
+    }
+
+    /** The jobs that match, the one changed last first: by name, names of rooms, and who surveyed. */
+    public JobListings find(JobSearch search) {
+        for (String id : jobs.shelf().withoutWords()) {
+            jobs.current(id)
+                    .ifPresent(job -> jobs.shelf()
+                            .note(
+                                    id,
+                                    words(
+                                            job.header().name(),
+                                            Pieces.survey(job.content().pieces()))));
+        }
+        return jobs.shelf().find(search);
+    }
+
+    private static String words(String name, JsonNode document) {
+        StringBuilder words = new StringBuilder(name);
+        document.path("rooms")
+                .forEach(room -> words.append('\n').append(room.path("name").asText("")));
+        words.append('\n').append(document.path("site").path("surveyedBy").asText(""));
+        return words.toString();
+    }
+
+    /** Whether a job is archived; empty if there is no such job. */
+    public Optional<Boolean> isArchived(String id) {
+        return jobs.shelf().isArchived(id);
+    }
+
+    /** Archives a job or brings it back; says whether there is such a job. */
+    public boolean archive(String id, boolean archived, String who) {
+        return jobs.shelf().archive(id, archived, who);
+    }
+
+    /** Old revisions brought back, and jobs made from jobs. */
+    public JobCopies copies() {
+        return new JobCopies(this);
     }
 
     private static JobContent content(String name, JsonNode document, Judgement judged) {

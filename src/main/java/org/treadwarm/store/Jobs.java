@@ -17,11 +17,18 @@ public final class Jobs {
     private final Database database;
     private final Audit audit;
     private final Clock clock;
+    private final JobShelf shelf;
 
     Jobs(Database database, Audit audit, Clock clock) {
         this.database = database;
         this.audit = audit;
         this.clock = clock;
+        this.shelf = new JobShelf(database, audit, clock);
+    }
+
+    /** Finding jobs, and putting them away. */
+    public JobShelf shelf() {
+        return shelf;
     }
 
     /** Starts a job that is found by its name. */
@@ -43,7 +50,7 @@ public final class Jobs {
                     .bind("createdAt", Times.text(header.savedAt()))
                     .execute();
             insert(handle, header, manifest);
-            JobList.note(handle, header.jobId(), words);
+            JobShelf.note(handle, header.jobId(), words);
             audit.append(handle, change.who(), "created job", header.jobId());
             return header;
         });
@@ -81,7 +88,7 @@ public final class Jobs {
             return new SaveResult.Stale(revision);
         }
         insert(handle, next, manifest);
-        JobList.note(handle, next.jobId(), words);
+        JobShelf.note(handle, next.jobId(), words);
         audit.append(handle, next.savedBy(), "saved job", next.jobId() + " revision " + next.revision());
         return new SaveResult.Saved(next.revision());
     }

@@ -19,7 +19,6 @@ public final class Store implements AutoCloseable {
     private final Optional<FolderLock> lock;
     private final Audit audit;
     private final Jobs jobs;
-    private final JobList jobList;
     private final People people;
     private final Sessions sessions;
     private final ApiKeys keys;
@@ -31,7 +30,6 @@ public final class Store implements AutoCloseable {
         this.lock = lock;
         this.audit = new Audit(database, clock);
         this.jobs = new Jobs(database, audit, clock);
-        this.jobList = new JobList(database, audit, clock);
         Passwords passwords = new Passwords();
         this.people = new People(database, audit, passwords, clock);
         this.sessions = new Sessions(database, audit, clock);
@@ -78,10 +76,6 @@ public final class Store implements AutoCloseable {
 
     public Jobs jobs() {
         return jobs;
-    }
-
-    public JobList jobList() {
-        return jobList;
     }
 
     public People people() {

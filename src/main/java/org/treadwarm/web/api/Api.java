@@ -60,6 +60,11 @@ public final class Api {
         get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing, Access.READ);
         get(routes, ROOT + "/jobs/{id}/revisions", jobs::revisions, Access.READ);
         get(routes, ROOT + "/jobs/{id}/revisions/{n}", jobs::revision, Access.READ);
+        get(routes, ROOT + "/jobs/{id}/revisions/{n}/changes", jobs::changes, Access.READ);
+        routes.post(ROOT + "/jobs/{id}/revisions/{n}/restore", jobs::restore, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/copy", jobs::copy, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/archive", jobs::archive, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/unarchive", jobs::bringBack, Access.WRITE);
     }
 
     /** HEAD answers as GET does, without the body. */

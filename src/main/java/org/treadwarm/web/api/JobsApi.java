@@ -13,9 +13,13 @@ import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.jobs.JobDesk.Saving;
 import org.treadwarm.store.Change;
+import org.treadwarm.store.JobListing;
+import org.treadwarm.store.JobListings;
+import org.treadwarm.store.JobSearch;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Problem;
+import org.treadwarm.survey.Survey;
 import org.treadwarm.web.Problems;
 import org.treadwarm.web.security.KeyGuard;
 
@@ -67,20 +71,137 @@ final class JobsApi {
         }
     }
 
-    /** A list of jobs. */
-    record JobsAnswer(List<RevisionAnswer> jobs) {}
+    /** A job in a list: its newest revision without the survey. */
+    record ListedJob(
+            String id,
+            long revision,
+            String name,
+            boolean draft,
+            Instant savedAt,
+            String savedBy,
+            String note,
+            boolean archived) {
+        static ListedJob of(JobListing job) {
+            RevisionHeader header = job.newest();
+            return new ListedJob(
+                    header.jobId(),
+                    header.revision(),
+                    header.name(),
+                    header.draft(),
+                    header.savedAt(),
+                    header.savedBy(),
+                    header.note(),
+                    job.archived());
+        }
+    }
+
+    /** A page of jobs, and where the next page begins, if there is one. */
+    record JobsAnswer(List<ListedJob> jobs, Optional<String> next) {}
+
+    /** What a revision changed of the one before it. */
+    record ChangesAnswer(long revision, List<DifferenceAnswer> changes) {}
+
+    /** Whether a job is archived. */
+    record ArchiveAnswer(String id, boolean archived) {}
 
     /** A list of revisions. */
     record RevisionsAnswer(List<RevisionAnswer> revisions) {}
 
     private record JobBody(String name, JsonNode survey) {}
 
-    /** {@code GET /api/v1/jobs}. */
+    /** {@code GET /api/v1/jobs?find=&archived=&limit=&after=}. */
     void list(Context ctx) {
-        SizingApi.json(
+        Optional<JobSearch> search = JobQuery.read(ctx);
+        if (search.isPresent()) {
+            JobListings found = desk.find(search.get());
+            SizingApi.json(
+                    ctx,
+                    200,
+                    new JobsAnswer(found.jobs().stream().map(ListedJob::of).toList(), found.next()));
+        }
+    }
+
+    /** {@code GET /api/v1/jobs/{id}/revisions/{n}/changes}. */
+    void changes(Context ctx) {
+        String id = ctx.pathParam("id");
+        OptionalLong number = number(ctx.pathParam("n"));
+        Optional<JsonNode> after = number.isEmpty() ? Optional.empty() : desk.document(id, number.getAsLong());
+        if (after.isEmpty()) {
+            missing(ctx);
+            return;
+        }
+        List<DifferenceAnswer> changes = desk.document(id, number.getAsLong() - 1)
+                .map(before -> DifferenceAnswer.between(before, after.get(), Survey.class))
+                .orElse(List.of());
+        SizingApi.json(ctx, 200, new ChangesAnswer(number.getAsLong(), changes));
+    }
+
+    /** {@code POST /api/v1/jobs/{id}/revisions/{n}/restore} with If-Match: an old revision as a new one. */
+    void restore(Context ctx) {
+        String id = ctx.pathParam("id");
+        OptionalLong number = number(ctx.pathParam("n"));
+        Optional<JsonNode> there = number.isEmpty() ? Optional.empty() : desk.document(id, number.getAsLong());
+        if (there.isEmpty()) {
+            missing(ctx);
+            return;
+        }
+        if (Tags.expected(ctx, "job").isEmpty()) {
+            return;
+        }
+        long current = desk.revisions(id).get(0).revision();
+        OptionalLong expected = expected(ctx.header("If-Match"), current);
+        if (expected.isEmpty()) {
+            stale(ctx, current);
+            return;
+        }
+        answer(
                 ctx,
-                200,
-                new JobsAnswer(desk.list().stream().map(RevisionAnswer::of).toList()));
+                desk.copies()
+                        .restore(
+                                id,
+                                number.getAsLong(),
+                                expected.getAsLong(),
+                                change(ctx).who()));
+    }
+
+    private static void answer(Context ctx, Saving saving) {
+        if (saving instanceof Saving.Saved saved) {
+            answer(ctx, 200, saved.job());
+        } else if (saving instanceof Saving.Stale stale) {
+            stale(ctx, stale.revision());
+        } else {
+            missing(ctx);
+        }
+    }
+
+    /** {@code POST /api/v1/jobs/{id}/copy}. */
+    void copy(Context ctx) {
+        Optional<Job> copy = desk.copies().copy(ctx.pathParam("id"), change(ctx).who());
+        if (copy.isPresent()) {
+            ctx.header("Location", "/api/v1/jobs/" + copy.get().id());
+            answer(ctx, 201, copy.get());
+        } else {
+            missing(ctx);
+        }
+    }
+
+    /** {@code POST /api/v1/jobs/{id}/archive}. */
+    void archive(Context ctx) {
+        archive(ctx, true);
+    }
+
+    /** {@code POST /api/v1/jobs/{id}/unarchive}. */
+    void bringBack(Context ctx) {
+        archive(ctx, false);
+    }
+
+    private void archive(Context ctx, boolean archived) {
+        String id = ctx.pathParam("id");
+        if (desk.archive(id, archived, change(ctx).who())) {
+            SizingApi.json(ctx, 200, new ArchiveAnswer(id, archived));
+        } else {
+            missing(ctx);
+        }
     }
 
     /** {@code POST /api/v1/jobs}. */
@@ -158,13 +279,7 @@ final class JobsApi {
         }
         Saving saving = desk.save(
                 id, expected.getAsLong(), body.get().name(), body.get().survey(), change(ctx));
-        if (saving instanceof Saving.Saved saved) {
-            answer(ctx, 200, saved.job());
-        } else if (saving instanceof Saving.Stale stale) {
-            stale(ctx, stale.revision());
-        } else {
-            missing(ctx);
-        }
+        answer(ctx, saving);
     }
 
     private static void stale(Context ctx, long current) {

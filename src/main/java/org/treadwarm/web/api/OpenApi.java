@@ -47,6 +47,8 @@ final class OpenApi {
             answers.add(JobsApi.JobAnswer.class);
             answers.add(JobsApi.JobsAnswer.class);
             answers.add(JobsApi.RevisionsAnswer.class);
+            answers.add(JobsApi.ChangesAnswer.class);
+            answers.add(JobsApi.ArchiveAnswer.class);
             answers.add(RoomsApi.RoomAnswer.class);
             answers.add(RoomsApi.RoomConflict.class);
             answers.add(Api.Health.class);

@@ -25,6 +25,8 @@ public final class Pages {
     private final JobPages jobs;
     private final PartPages parts;
     private final VersionPages versions;
+    private final HistoryPages history;
+    private final TransferPages files;
     private final QuickPages quick;
     private final TablePages tables = new TablePages();
 
@@ -34,6 +36,8 @@ public final class Pages {
         this.entry = new EntryPages(store, visitors, view);
         this.jobs = new JobPages(desk, visitors, view);
         this.versions = new VersionPages(desk, visitors, view);
+        this.files = new TransferPages(desk, visitors, view);
+        this.history = new HistoryPages(desk, visitors, view);
         this.parts = new PartPages(desk, visitors, view, versions);
         this.links = new LinkPages(store, visitors, view);
         this.account = new AccountPages(store, visitors, view);
@@ -57,6 +61,15 @@ public final class Pages {
         routes.post("/jobs", form(jobs::create), Access.ESTIMATOR);
         routes.get("/jobs/{job}", jobs::show, Access.SURVEYOR);
         routes.post("/jobs/{job}", form(jobs::change), Access.SURVEYOR);
+        routes.get("/jobs/{job}/history", history::list, Access.SURVEYOR);
+        routes.get("/jobs/{job}/history/{n}", history::show, Access.SURVEYOR);
+        routes.post("/jobs/{job}/history/{n}/restore", form(history::restore), Access.SURVEYOR);
+        routes.get("/jobs/{job}/files", files::show, Access.SURVEYOR);
+        routes.get("/jobs/{job}/files/{file}", files::download, Access.SURVEYOR);
+        routes.post("/jobs/{job}/files/{file}", form(files::read), Access.SURVEYOR);
+        routes.post("/jobs/{job}/copy", form(jobs::copy), Access.ESTIMATOR);
+        routes.post("/jobs/{job}/archive", form(jobs::archive), Access.ESTIMATOR);
+        routes.post("/jobs/{job}/unarchive", form(jobs::bringBack), Access.ESTIMATOR);
         routes.get("/jobs/{job}/{part}/{name}", parts::show, Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}", form(parts::save), Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}/versions", form(versions::settle), Access.SURVEYOR);

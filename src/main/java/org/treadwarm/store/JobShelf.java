@@ -8,12 +8,12 @@ import org.jdbi.v3.core.Handle;
 import org.jdbi.v3.core.statement.Query;
 
 /** Finding jobs by the words noted for them, and putting them away without losing them. */
-public final class JobList {
+public final class JobShelf {
     private final Database database;
     private final Audit audit;
     private final Clock clock;
 
-    JobList(Database database, Audit audit, Clock clock) {
+    JobShelf(Database database, Audit audit, Clock clock) {
         this.database = database;
         this.audit = audit;
         this.clock = clock;

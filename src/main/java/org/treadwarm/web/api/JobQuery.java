@@ -1,0 +1,54 @@
+package org.treadwarm.web.api;
+
+import io.javalin.http.Context;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.treadwarm.store.JobSearch;
+import org.treadwarm.survey.Problem;
+import org.treadwarm.web.Problems;
+
+/** What the address of the list of jobs asks for. */
+final class JobQuery {
+    private static final int LONGEST = 200;
+
+    private JobQuery() {}
+
+    /** The search; empty when the refusal has been written already. Without a limit, 200 jobs at most are listed. */
+    static Optional<JobSearch> read(Context ctx) {
+        String find = query(ctx, "find");
+        String archived = query(ctx, "archived");
+        String after = query(ctx, "after");
+        String limit = query(ctx, "limit");
+        List<Problem> problems = new ArrayList<>();
+        if (find.length() > LONGEST || find.indexOf(0) >= 0) {
+            problems.add(problem("find", find, "at most " + LONGEST + " characters"));
+        }
+        if (!archived.matches("|true|false")) {
+            problems.add(problem("archived", archived, "true or false, or nothing for both"));
+        }
+        if (!after.isEmpty() && !JobSearch.isPlace(after)) {
+            problems.add(problem("after", after, "what the page before gave as next"));
+        }
+        if (!limit.isEmpty() && !(limit.matches("[1-9][0-9]{0,2}") && Integer.parseInt(limit) <= JobSearch.MOST)) {
+            problems.add(problem("limit", limit, "a whole number from 1 to " + JobSearch.MOST));
+        }
+        if (!problems.isEmpty()) {
+            Problems.invalid(ctx, problems);
+            return Optional.empty();
+        }
+        return Optional.of(new JobSearch(
+                find,
+                archived.isEmpty() ? Optional.empty() : Optional.of(archived.equals("true")),
+                after.isEmpty() ? Optional.empty() : Optional.of(after),
+                limit.isEmpty() ? JobSearch.MOST : Integer.parseInt(limit)));
+    }
+
+    private static Problem problem(String name, String given, String allowed) {
+        return new Problem("/" + name, JobsApi.shortened(given), "this cannot be asked for", allowed);
+    }
+
+    private static String query(Context ctx, String name) {
+        return Optional.ofNullable(ctx.queryParam(name)).orElse("");
+    }
+}
