@@ -153,6 +153,13 @@ public final class JobDesk {
         return jobs.shelf().archive(id, archived, who);
     }
 
+    /** A copy of a document in which every part has the id that a save would give it. */
+    public static JsonNode withIds(JsonNode document, JsonNode before) {
+        JsonNode copy = document.deepCopy();
+        Ids.give(copy, before);
+        return copy;
+    }
+
     /** Old revisions brought back, and jobs made from jobs. */
     public JobCopies copies() {
         return new JobCopies(this);

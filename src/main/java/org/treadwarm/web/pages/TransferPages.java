@@ -1,5 +1,6 @@
 package org.treadwarm.web.pages;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
 import java.util.Arrays;
@@ -127,10 +128,11 @@ final class TransferPages {
     private void preview(Context ctx, Job job, TableKind kind, String text, String notice) {
         Result result = TableImport.read(kind, text, job.document());
         List<CellProblem> problems = result.problems();
-        Labels labels = new Labels(Survey.class, result.document(), job.document());
+        JsonNode after = JobDesk.withIds(result.document(), job.document());
+        Labels labels = new Labels(Survey.class, after, job.document());
         List<HistoryPages.Line> changes = !problems.isEmpty()
                 ? List.of()
-                : Differences.between(job.document(), result.document()).stream()
+                : Differences.between(job.document(), after).stream()
                         .map(each -> new HistoryPages.Line(
                                 labels.where(each),
                                 labels.value(each, each.before()),

@@ -81,7 +81,7 @@ final class VersionPages {
         JsonNode named = draft.mine().isMissingNode() ? versions.theirs() : draft.mine();
         Map<String, Object> model = new HashMap<>();
         model.put(
-                "title",
+                "partTitle",
                 ctx.pathParam("part").equals("rooms") ? named.path("name").asText("a room") : ctx.pathParam("name"));
         model.put("jobName", job.name());
         model.put("back", "/jobs/" + job.id());
