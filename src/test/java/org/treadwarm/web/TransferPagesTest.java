@@ -42,7 +42,8 @@ class TransferPagesTest {
         Page seen = look("room,height [m]\nstudio,3.3\nattic,2.1\n");
 
         assertThat(seen.status()).isEqualTo(200);
-        assertThat(seen.text()).contains("What the table would change", "rooms › studio › room height", "3.3", "rooms › attic");
+        assertThat(seen.text())
+                .contains("What the table would change", "rooms › studio › room height", "3.3", "rooms › attic");
         assertThat(server.now(job).revision()).isEqualTo(1);
 
         assertThat(visitor.send(seen.form("table").press("keep")).status()).isEqualTo(303);

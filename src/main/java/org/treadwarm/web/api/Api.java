@@ -17,12 +17,14 @@ public final class Api {
     private final WarmUpApi warmUps;
     private final JobsApi jobs;
     private final RoomsApi rooms;
+    private final HistoryApi history;
 
     public Api(JobDesk desk) {
         this.sizing = new SizingApi();
         this.warmUps = new WarmUpApi();
         this.jobs = new JobsApi(desk);
         this.rooms = new RoomsApi(desk);
+        this.history = new HistoryApi(desk);
     }
 
     /** The description of the API, made when it is first asked for. */
@@ -58,13 +60,13 @@ public final class Api {
         routes.put(ROOT + "/jobs/{id}/rooms/{room}", rooms::put, Access.WRITE);
         routes.delete(ROOT + "/jobs/{id}/rooms/{room}", rooms::remove, Access.WRITE);
         get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing, Access.READ);
-        get(routes, ROOT + "/jobs/{id}/revisions", jobs::revisions, Access.READ);
-        get(routes, ROOT + "/jobs/{id}/revisions/{n}", jobs::revision, Access.READ);
-        get(routes, ROOT + "/jobs/{id}/revisions/{n}/changes", jobs::changes, Access.READ);
-        routes.post(ROOT + "/jobs/{id}/revisions/{n}/restore", jobs::restore, Access.WRITE);
-        routes.post(ROOT + "/jobs/{id}/copy", jobs::copy, Access.WRITE);
-        routes.post(ROOT + "/jobs/{id}/archive", jobs::archive, Access.WRITE);
-        routes.post(ROOT + "/jobs/{id}/unarchive", jobs::bringBack, Access.WRITE);
+        get(routes, ROOT + "/jobs/{id}/revisions", history::revisions, Access.READ);
+        get(routes, ROOT + "/jobs/{id}/revisions/{n}", history::revision, Access.READ);
+        get(routes, ROOT + "/jobs/{id}/revisions/{n}/changes", history::changes, Access.READ);
+        routes.post(ROOT + "/jobs/{id}/revisions/{n}/restore", history::restore, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/copy", history::copy, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/archive", history::archive, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/unarchive", history::bringBack, Access.WRITE);
     }
 
     /** HEAD answers as GET does, without the body. */

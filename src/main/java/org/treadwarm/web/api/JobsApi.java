@@ -19,7 +19,6 @@ import org.treadwarm.store.JobSearch;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Problem;
-import org.treadwarm.survey.Survey;
 import org.treadwarm.web.Problems;
 import org.treadwarm.web.security.KeyGuard;
 
@@ -56,21 +55,6 @@ final class JobsApi {
         }
     }
 
-    /** One revision without its survey. */
-    record RevisionAnswer(
-            String id, long revision, String name, boolean draft, Instant savedAt, String savedBy, String note) {
-        static RevisionAnswer of(RevisionHeader header) {
-            return new RevisionAnswer(
-                    header.jobId(),
-                    header.revision(),
-                    header.name(),
-                    header.draft(),
-                    header.savedAt(),
-                    header.savedBy(),
-                    header.note());
-        }
-    }
-
     /** A job in a list: its newest revision without the survey. */
     record ListedJob(
             String id,
@@ -98,15 +82,6 @@ final class JobsApi {
     /** A page of jobs, and where the next page begins, if there is one. */
     record JobsAnswer(List<ListedJob> jobs, Optional<String> next) {}
 
-    /** What a revision changed of the one before it. */
-    record ChangesAnswer(long revision, List<DifferenceAnswer> changes) {}
-
-    /** Whether a job is archived. */
-    record ArchiveAnswer(String id, boolean archived) {}
-
-    /** A list of revisions. */
-    record RevisionsAnswer(List<RevisionAnswer> revisions) {}
-
     private record JobBody(String name, JsonNode survey) {}
 
     /** {@code GET /api/v1/jobs?find=&archived=&limit=&after=}. */
@@ -121,84 +96,11 @@ final class JobsApi {
         }
     }
 
-    /** {@code GET /api/v1/jobs/{id}/revisions/{n}/changes}. */
-    void changes(Context ctx) {
-        String id = ctx.pathParam("id");
-        OptionalLong number = number(ctx.pathParam("n"));
-        Optional<JsonNode> after = number.isEmpty() ? Optional.empty() : desk.document(id, number.getAsLong());
-        if (after.isEmpty()) {
-            missing(ctx);
-            return;
-        }
-        List<DifferenceAnswer> changes = desk.document(id, number.getAsLong() - 1)
-                .map(before -> DifferenceAnswer.between(before, after.get(), Survey.class))
-                .orElse(List.of());
-        SizingApi.json(ctx, 200, new ChangesAnswer(number.getAsLong(), changes));
-    }
-
-    /** {@code POST /api/v1/jobs/{id}/revisions/{n}/restore} with If-Match: an old revision as a new one. */
-    void restore(Context ctx) {
-        String id = ctx.pathParam("id");
-        OptionalLong number = number(ctx.pathParam("n"));
-        Optional<JsonNode> there = number.isEmpty() ? Optional.empty() : desk.document(id, number.getAsLong());
-        if (there.isEmpty()) {
-            missing(ctx);
-            return;
-        }
-        if (Tags.expected(ctx, "job").isEmpty()) {
-            return;
-        }
-        long current = desk.revisions(id).get(0).revision();
-        OptionalLong expected = expected(ctx.header("If-Match"), current);
-        if (expected.isEmpty()) {
-            stale(ctx, current);
-            return;
-        }
-        answer(
-                ctx,
-                desk.copies()
-                        .restore(
-                                id,
-                                number.getAsLong(),
-                                expected.getAsLong(),
-                                change(ctx).who()));
-    }
-
-    private static void answer(Context ctx, Saving saving) {
+    static void answer(Context ctx, Saving saving) {
         if (saving instanceof Saving.Saved saved) {
             answer(ctx, 200, saved.job());
         } else if (saving instanceof Saving.Stale stale) {
             stale(ctx, stale.revision());
-        } else {
-            missing(ctx);
-        }
-    }
-
-    /** {@code POST /api/v1/jobs/{id}/copy}. */
-    void copy(Context ctx) {
-        Optional<Job> copy = desk.copies().copy(ctx.pathParam("id"), change(ctx).who());
-        if (copy.isPresent()) {
-            ctx.header("Location", "/api/v1/jobs/" + copy.get().id());
-            answer(ctx, 201, copy.get());
-        } else {
-            missing(ctx);
-        }
-    }
-
-    /** {@code POST /api/v1/jobs/{id}/archive}. */
-    void archive(Context ctx) {
-        archive(ctx, true);
-    }
-
-    /** {@code POST /api/v1/jobs/{id}/unarchive}. */
-    void bringBack(Context ctx) {
-        archive(ctx, false);
-    }
-
-    private void archive(Context ctx, boolean archived) {
-        String id = ctx.pathParam("id");
-        if (desk.archive(id, archived, change(ctx).who())) {
-            SizingApi.json(ctx, 200, new ArchiveAnswer(id, archived));
         } else {
             missing(ctx);
         }
@@ -217,25 +119,6 @@ final class JobsApi {
     /** {@code GET /api/v1/jobs/{id}}. */
     void get(Context ctx) {
         answerOrMissing(ctx, desk.current(ctx.pathParam("id")));
-    }
-
-    /** {@code GET /api/v1/jobs/{id}/revisions}. */
-    void revisions(Context ctx) {
-        List<RevisionAnswer> revisions = desk.revisions(ctx.pathParam("id")).stream()
-                .map(RevisionAnswer::of)
-                .toList();
-        if (revisions.isEmpty()) {
-            missing(ctx);
-        } else {
-            SizingApi.json(ctx, 200, new RevisionsAnswer(revisions));
-        }
-    }
-
-    /** {@code GET /api/v1/jobs/{id}/revisions/{n}}. */
-    void revision(Context ctx) {
-        OptionalLong number = number(ctx.pathParam("n"));
-        answerOrMissing(
-                ctx, number.isEmpty() ? Optional.empty() : desk.revision(ctx.pathParam("id"), number.getAsLong()));
     }
 
     /** {@code GET /api/v1/jobs/{id}/sizing}: of the newest revision. */
@@ -282,7 +165,7 @@ final class JobsApi {
         answer(ctx, saving);
     }
 
-    private static void stale(Context ctx, long current) {
+    static void stale(Context ctx, long current) {
         ctx.header("ETag", tag(current));
         Problems.plain(
                 ctx,
@@ -304,7 +187,7 @@ final class JobsApi {
      * The revision that a change was made from (RFC 9110, 13.1.1): any for *, the current one where the list names it, else
      * one that was named. Weak tags never match.
      */
-    private static OptionalLong expected(String match, long current) {
+    static OptionalLong expected(String match, long current) {
         OptionalLong named = OptionalLong.empty();
         for (String each : match.split(",", -1)) {
             String tag = each.strip();
@@ -318,7 +201,7 @@ final class JobsApi {
         return named;
     }
 
-    private static OptionalLong number(String text) {
+    static OptionalLong number(String text) {
         return text.matches("[0-9]{1,15}") ? OptionalLong.of(Long.parseLong(text)) : OptionalLong.empty();
     }
 
@@ -369,7 +252,7 @@ final class JobsApi {
         return text.length() <= 100 ? text : text.substring(0, 99) + "…";
     }
 
-    private static void answerOrMissing(Context ctx, Optional<Job> job) {
+    static void answerOrMissing(Context ctx, Optional<Job> job) {
         if (job.isPresent()) {
             answer(ctx, 200, job.get());
         } else {
@@ -377,7 +260,7 @@ final class JobsApi {
         }
     }
 
-    private static void answer(Context ctx, int status, Job job) {
+    static void answer(Context ctx, int status, Job job) {
         ctx.header("ETag", tag(job.revision()));
         SizingApi.json(ctx, status, JobAnswer.of(job));
     }

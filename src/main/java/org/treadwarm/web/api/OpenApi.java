@@ -46,9 +46,9 @@ final class OpenApi {
             answers.add(Material.class);
             answers.add(JobsApi.JobAnswer.class);
             answers.add(JobsApi.JobsAnswer.class);
-            answers.add(JobsApi.RevisionsAnswer.class);
-            answers.add(JobsApi.ChangesAnswer.class);
-            answers.add(JobsApi.ArchiveAnswer.class);
+            answers.add(HistoryApi.RevisionsAnswer.class);
+            answers.add(HistoryApi.ChangesAnswer.class);
+            answers.add(HistoryApi.ArchiveAnswer.class);
             answers.add(RoomsApi.RoomAnswer.class);
             answers.add(RoomsApi.RoomConflict.class);
             answers.add(Api.Health.class);
