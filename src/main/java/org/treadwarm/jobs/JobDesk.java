@@ -1,24 +1,33 @@
 package org.treadwarm.jobs;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.MissingNode;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import org.treadwarm.intake.Document;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.JobContent;
-import org.treadwarm.store.JobCursor;
+import org.treadwarm.store.JobListings;
 import org.treadwarm.store.JobRevision;
+import org.treadwarm.store.JobSearch;
 import org.treadwarm.store.Jobs;
-import org.treadwarm.store.JobsPage;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.store.SaveResult;
 
 /** The jobs of the firm, read and judged. A survey with problems is kept as a draft. */
 public final class JobDesk {
     private final Jobs jobs;
+    private final Rooms rooms;
 
     public JobDesk(Jobs jobs) {
         this.jobs = jobs;
+        this.rooms = new Rooms(jobs, this);
+    }
+
+    /** The rooms of the jobs, each saved for itself. */
+    public Rooms rooms() {
+        return rooms;
     }
 
     /** What became of a save. */
@@ -50,7 +59,10 @@ public final class JobDesk {
 
     /** Starts a job, which only has to be kept. */
     public Job create(Prepared prepared, Change change) {
-        RevisionHeader header = jobs.create(content(prepared.name(), prepared.document(), prepared.judged()), change);
+        RevisionHeader header = jobs.create(
+                content(prepared.name(), prepared.document(), prepared.judged()),
+                words(prepared.name(), prepared.document()),
+                change);
         return job(header, prepared.document(), prepared.judged());
     }
 
@@ -63,7 +75,8 @@ public final class JobDesk {
         }
         Ids.give(document, Pieces.survey(current.get().content().pieces()));
         Judgement judged = Judgement.of(document);
-        SaveResult result = jobs.save(id, expectedRevision, content(name, document, judged), change);
+        SaveResult result =
+                jobs.save(id, expectedRevision, content(name, document, judged), words(name, document), change);
         if (result instanceof SaveResult.Saved saved) {
             RevisionHeader header =
                     jobs.revision(id, saved.revision()).orElseThrow().header();
@@ -89,6 +102,35 @@ public final class JobDesk {
         return jobs.revision(id, revision).map(JobDesk::job);
     }
 
+    /** The document of one revision of a job as it was typed, without judging it. */
+    public Optional<JsonNode> document(String id, long revision) {
+        return jobs.revision(id, revision)
+                .map(found -> Pieces.survey(found.content().pieces()));
+    }
+
+    /**
+     * The revision that made a part of the newest revision what it is.
+     *
+     * @param since looked for after this revision
+     * @param part takes the part out of a document
+     */
+    public Optional<RevisionHeader> lastChange(String id, long since, UnaryOperator<JsonNode> part) {
+        List<RevisionHeader> later = jobs.revisions(id).stream()
+                .filter(header -> header.revision() > since)
+                .toList();
+        Optional<RevisionHeader> last = Optional.empty();
+        JsonNode now = MissingNode.getInstance();
+        for (RevisionHeader header : later) {
+            JsonNode then = part.apply(document(id, header.revision()).orElseThrow());
+            if (last.isPresent() && !then.equals(now)) {
+                return last;
+            }
+            now = then;
+            last = Optional.of(header);
+        }
+        return last;
+    }
+
     /** The revisions of a job, newest first. */
     public List<RevisionHeader> revisions(String id) {
         return jobs.revisions(id);
@@ -99,14 +141,53 @@ public final class JobDesk {
         return jobs.revisions(id, limit, before);
     }
 
-    /** A part of the list of jobs, see {@link Jobs#page}. */
-    public JobsPage page(int limit, Optional<JobCursor> after) {
-        return jobs.page(limit, after);
-    }
-
     /** The newest revision of every job, the one changed last first. */
     public List<RevisionHeader> list() {
         return jobs.list();
+    }
+
+    /** The jobs that match, the one changed last first: by name, names of rooms, and who surveyed. */
+    public JobListings find(JobSearch search) {
+        for (String id : jobs.shelf().withoutWords()) {
+            jobs.current(id)
+                    .ifPresent(job -> jobs.shelf()
+                            .note(
+                                    id,
+                                    words(
+                                            job.header().name(),
+                                            Pieces.survey(job.content().pieces()))));
+        }
+        return jobs.shelf().find(search);
+    }
+
+    private static String words(String name, JsonNode document) {
+        StringBuilder words = new StringBuilder(name);
+        document.path("rooms")
+                .forEach(room -> words.append('\n').append(room.path("name").asText("")));
+        words.append('\n').append(document.path("site").path("surveyedBy").asText(""));
+        return words.toString();
+    }
+
+    /** Whether a job is archived; empty if there is no such job. */
+    public Optional<Boolean> isArchived(String id) {
+        return jobs.shelf().isArchived(id);
+    }
+
+    /** Archives a job or brings it back; says whether there is such a job. */
+    public boolean archive(String id, boolean archived, String who) {
+        return jobs.shelf().archive(id, archived, who);
+    }
+
+    /** A copy of a document in which every part has the id that a save would give it. */
+    public static JsonNode withIds(JsonNode document, JsonNode before) {
+        JsonNode copy = document.deepCopy();
+        Ids.give(copy, before);
+        return copy;
+    }
+
+    /** Old revisions brought back, and jobs made from jobs. */
+    public JobCopies copies() {
+        return new JobCopies(this);
     }
 
     private static JobContent content(String name, JsonNode document, Judgement judged) {

@@ -3,32 +3,45 @@ package org.treadwarm.store;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.time.Clock;
-import java.time.Instant;
 import java.util.List;
 import java.util.Optional;
 import org.jdbi.v3.core.Handle;
-import org.jdbi.v3.core.statement.Query;
 import org.jdbi.v3.core.statement.StatementContext;
 
 /** The jobs with all their revisions. Nothing saved is ever changed or removed. */
 public final class Jobs {
-    private static final String HEADER_COLUMNS =
-            "job_id, revision, name, draft, manifest_sha256, saved_at, saved_by, note";
-    private static final String NEWEST =
+    static final String HEADER_COLUMNS = "job_id, revision, name, draft, manifest_sha256, saved_at, saved_by, note";
+    static final String NEWEST =
             "revision = (select max(newest.revision) from revision newest where" + " newest.job_id = revision.job_id)";
 
     private final Database database;
     private final Audit audit;
     private final Clock clock;
+    private final JobShelf shelf;
 
     Jobs(Database database, Audit audit, Clock clock) {
         this.database = database;
         this.audit = audit;
         this.clock = clock;
+        this.shelf = new JobShelf(database, audit, clock);
     }
 
-    /** Starts a job: revision 1, under a new id of 12 characters a-z and 2-9. */
+    /** Finding jobs, and putting them away. */
+    public JobShelf shelf() {
+        return shelf;
+    }
+
+    /** Starts a job that is found by its name. */
     public RevisionHeader create(JobContent content, Change change) {
+        return create(content, content.name(), change);
+    }
+
+    /**
+     * Starts a job: revision 1, under a new id of 12 characters a-z and 2-9.
+     *
+     * @param words what it is found by
+     */
+    public RevisionHeader create(JobContent content, String words, Change change) {
         Manifest manifest = Manifest.of(content.pieces());
         return database.change(handle -> {
             RevisionHeader header = header(Secrets.id(), 1, content, change);
@@ -37,9 +50,15 @@ public final class Jobs {
                     .bind("createdAt", Times.text(header.savedAt()))
                     .execute();
             insert(handle, header, manifest);
+            JobShelf.note(handle, header.jobId(), words);
             audit.append(handle, change.who(), "created job", header.jobId());
             return header;
         });
+    }
+
+    /** Adds a revision of a job that is found by its name. */
+    public SaveResult save(String id, long expectedRevision, JobContent content, Change change) {
+        return save(id, expectedRevision, content, content.name(), change);
     }
 
     /**
@@ -47,21 +66,29 @@ public final class Jobs {
      * before: its number rises by exactly one each time, and what did not change takes no new room.
      *
      * @param expectedRevision the revision the change was made from
+     * @param words what the job is found by
      */
-    public SaveResult save(String id, long expectedRevision, JobContent content, Change change) {
+    public SaveResult save(String id, long expectedRevision, JobContent content, String words, Change change) {
         Manifest manifest = Manifest.of(content.pieces());
         return database.change(handle -> newest(handle, id)
                 .map(current -> save(
-                        handle, current, expectedRevision, header(id, expectedRevision + 1, content, change), manifest))
+                        handle,
+                        current,
+                        expectedRevision,
+                        header(id, expectedRevision + 1, content, change),
+                        manifest,
+                        words))
                 .orElseGet(SaveResult.Missing::new));
     }
 
-    private SaveResult save(Handle handle, Row current, long expectedRevision, RevisionHeader next, Manifest manifest) {
+    private SaveResult save(
+            Handle handle, Row current, long expectedRevision, RevisionHeader next, Manifest manifest, String words) {
         long revision = current.header().revision();
         if (expectedRevision != revision) {
             return new SaveResult.Stale(revision);
         }
         insert(handle, next, manifest);
+        JobShelf.note(handle, next.jobId(), words);
         audit.append(handle, next.savedBy(), "saved job", next.jobId() + " revision " + next.revision());
         return new SaveResult.Saved(next.revision());
     }
@@ -106,48 +133,6 @@ public final class Jobs {
     }
 
     /**
-     * A part of {@link #list}. The list holds still while it is read part by part: it is of the jobs as they were when its
-     * first part was read, to the millisecond.
-     *
-     * @param limit at most so many jobs, at least 1
-     * @param after where to go on; empty for the first part
-     */
-    public JobsPage page(int limit, Optional<JobCursor> after) {
-        return database.read(handle -> {
-            Optional<Instant> asOf = after.map(JobCursor::asOf).or(() -> lastSave(handle));
-            return asOf.map(then -> page(handle, limit, then, after))
-                    .orElseGet(() -> new JobsPage(List.of(), Optional.empty()));
-        });
-    }
-
-    private static Optional<Instant> lastSave(Handle handle) {
-        return handle.createQuery("select saved_at from revision order by saved_at desc limit 1")
-                .mapTo(String.class)
-                .findOne()
-                .map(Times::instant);
-    }
-
-    private static JobsPage page(Handle handle, int limit, Instant asOf, Optional<JobCursor> after) {
-        String goOn = after.isPresent() ? " and (saved_at < :savedAt or saved_at = :savedAt and job_id > :jobId)" : "";
-        Query query = handle.createQuery("select " + HEADER_COLUMNS + " from revision where saved_at <= :asOf"
-                        + " and not exists (select 1 from revision later where later.job_id = revision.job_id"
-                        + " and later.revision > revision.revision and later.saved_at <= :asOf)" + goOn
-                        + " order by saved_at desc, job_id limit :limit")
-                .bind("asOf", Times.text(asOf))
-                .bind("limit", limit + 1);
-        after.ifPresent(
-                last -> query.bind("savedAt", Times.text(last.savedAt())).bind("jobId", last.jobId()));
-        List<RevisionHeader> found =
-                query.map((row, context) -> Row.of(row, context).header()).list();
-        if (found.size() <= limit) {
-            return new JobsPage(found, Optional.empty());
-        }
-        RevisionHeader last = found.get(limit - 1);
-        return new JobsPage(
-                List.copyOf(found.subList(0, limit)), Optional.of(new JobCursor(asOf, last.savedAt(), last.jobId())));
-    }
-
-    /**
      * A part of the job's history, newest first; empty if there is no such job or nothing before.
      *
      * @param limit at most so many revisions
@@ -187,17 +172,20 @@ public final class Jobs {
                 .execute();
     }
 
+    static RevisionHeader header(ResultSet row) throws SQLException {
+        return new RevisionHeader(
+                row.getString("job_id"),
+                row.getLong("revision"),
+                row.getString("name"),
+                row.getInt("draft") == 1,
+                Times.instant(row.getString("saved_at")),
+                row.getString("saved_by"),
+                row.getString("note"));
+    }
+
     private record Row(RevisionHeader header, String manifest) {
         static Row of(ResultSet row, StatementContext context) throws SQLException {
-            RevisionHeader header = new RevisionHeader(
-                    row.getString("job_id"),
-                    row.getLong("revision"),
-                    row.getString("name"),
-                    row.getInt("draft") == 1,
-                    Times.instant(row.getString("saved_at")),
-                    row.getString("saved_by"),
-                    row.getString("note"));
-            return new Row(header, row.getString("manifest_sha256"));
+            return new Row(Jobs.header(row), row.getString("manifest_sha256"));
         }
 
         JobRevision read(Handle handle) {

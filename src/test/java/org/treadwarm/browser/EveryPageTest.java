@@ -15,13 +15,16 @@ import java.util.Optional;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.extension.ExtendWith;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.treadwarm.jobs.Demo;
+import org.treadwarm.jobs.Job;
 import org.treadwarm.sheets.Issuing;
 import org.treadwarm.sheets.SheetDesk;
+import org.treadwarm.store.Change;
 import org.treadwarm.store.Links;
 import org.treadwarm.store.Person;
 import org.treadwarm.store.Role;
@@ -79,6 +82,11 @@ class EveryPageTest {
                 demo,
                 demo + "/rooms/" + room,
                 demo + wallFoot(),
+                demo + "/history",
+                demo + "/history/1",
+                demo + "/files",
+                "/jobs?find=nothing-like-it&show=all",
+                broken + "/history/1",
                 broken,
                 broken + "/rooms/studio-1",
                 broken + "/spaces/loft",
@@ -176,6 +184,35 @@ class EveryPageTest {
                 assertThat(tab.page().locator(".secret").isVisible()).isTrue();
                 assertForEverybody(tab);
             }
+        }
+    }
+
+    @Test
+    void isForEverybodyWhenTwoChangedOneRoom(Browser browser) {
+        Job job = server.job("Two at once", RunningServer.studio());
+        ObjectNode survey = job.document().deepCopy();
+        ((ObjectNode) survey.at("/rooms/0")).put("height", "3.3 m");
+        try (Tab tab = Tab.desk(server, browser).as(session).open("/jobs/" + job.id() + "/rooms/studio-1")) {
+            server.desk().save(job.id(), 1, "Two at once", survey, Change.by("Ben"));
+            tab.page().locator("[name='/rooms/0/height']").fill("2.2");
+            tab.press(tab.page().locator("button.main"));
+            assertThat(tab.page().locator("fieldset.choice").count()).isEqualTo(1);
+            assertForEverybody(tab);
+            tab.press(tab.page().locator("button.main"));
+            assertThat(tab.page().locator("#summary").isVisible()).isTrue();
+            assertForEverybody(tab);
+        }
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"room,height [m]\nstudio,3.3", "room,height [m]\nstudio,so high"})
+    void isForEverybodyWithATableToLookAt(String table, Browser browser) {
+        Job job = server.job("Tables", RunningServer.studio());
+        try (Tab tab = Tab.desk(server, browser).as(session).open("/jobs/" + job.id() + "/files")) {
+            tab.page().locator("#table-rooms").fill(table);
+            tab.press(tab.page().locator("form.card button").first());
+            assertThat(tab.page().locator("table.changes").isVisible()).isTrue();
+            assertForEverybody(tab);
         }
     }
 

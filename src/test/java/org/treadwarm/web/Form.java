@@ -26,7 +26,11 @@ final class Form {
     private void collect(Node node) {
         if (node instanceof Element element && !element.getAttribute("name").isEmpty()) {
             switch (element.getTagName()) {
-                case "input" -> fields.put(element.getAttribute("name"), element.getAttribute("value"));
+                case "input" -> {
+                    if (!element.getAttribute("type").equals("radio") || element.hasAttribute("checked")) {
+                        fields.put(element.getAttribute("name"), element.getAttribute("value"));
+                    }
+                }
                 case "textarea" -> fields.put(element.getAttribute("name"), element.getTextContent());
                 case "select" -> fields.put(element.getAttribute("name"), chosen(element));
                 default -> {}

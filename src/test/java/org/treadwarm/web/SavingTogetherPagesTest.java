@@ -4,10 +4,13 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.function.UnaryOperator;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.treadwarm.jobs.Job;
 
 /** Two people in one job: in two rooms they do not notice each other, in one room nothing is lost. */
@@ -62,28 +65,39 @@ class SavingTogetherPagesTest {
         assertThat(kept("/rooms/1/height").textValue()).isEqualTo("2.2 m");
     }
 
+    /** Both began from one form of a room; the first has saved. */
+    private Page held(UnaryOperator<Form> first, UnaryOperator<Form> second) {
+        Form one = form(SavingTogetherPagesTest.first, "rooms/studio-1");
+        Form other = form(SavingTogetherPagesTest.second, "rooms/studio-1");
+        assertThat(SavingTogetherPagesTest.first.send(first.apply(one)).status())
+                .isEqualTo(303);
+        return SavingTogetherPagesTest.second.send(second.apply(other));
+    }
+
+    private static UnaryOperator<Form> height(String height) {
+        return form -> form.type("/rooms/0/height", height).press("save");
+    }
+
     @Test
-    void theSecondFormOfOneRoomIsHeldBackWithWhatWasTyped() {
-        Form one = form(first, "rooms/studio-1");
-        Form other = form(second, "rooms/studio-1");
-        first.send(one.type("/rooms/0/height", "3.3 m").press("save"));
+    void theSecondFormOfOneRoomComesBackWithBothVersionsAndNothingIsLost() {
+        Page held = held(height("3.3 m"), height("2.2 m"));
 
-        Page answer = second.send(other.type("/rooms/0/height", "2.2 m").press("save"));
-
-        assertThat(answer.status()).isEqualTo(409);
-        assertThat(answer.value("/rooms/0/height")).isEqualTo("2.2 m");
+        assertThat(held.status()).isEqualTo(409);
+        assertThat(held.text()).contains("3.3 m", "2.2 m", "both changed this", "Room height");
+        assertThat(held.form("mine").value("choice/height")).isNull();
         assertThat(kept("/rooms/0/height").textValue()).isEqualTo("3.3 m");
         assertThat(server.now(job).revision()).isEqualTo(2);
     }
 
     @Test
-    void theSecondFormStandsWhenItIsSavedAgainAndTheFirstStaysInTheHistory() {
-        Form one = form(first, "rooms/studio-1");
-        Form other = form(second, "rooms/studio-1");
-        first.send(one.type("/rooms/0/height", "3.3 m").press("save"));
-        Page held = second.send(other.type("/rooms/0/height", "2.2 m").press("save"));
+    void whatBothChangedMustBeChosenAndTheFirstStaysInTheHistory() {
+        Page held = held(height("3.3 m"), height("2.2 m"));
 
-        assertThat(second.send(held.form("revision").press("save")).status()).isEqualTo(303);
+        Page again = second.send(held.form("mine").press("settle"));
+        assertThat(again.status()).isEqualTo(422);
+        assertThat(again.text()).contains("One choice is missing", "3.3 m", "2.2 m");
+        Form chosen = again.form("mine").forge("choice/height", "mine").press("settle");
+        assertThat(second.send(chosen).status()).isEqualTo(303);
 
         assertThat(kept("/rooms/0/height").textValue()).isEqualTo("2.2 m");
         assertThat(server.desk()
@@ -93,6 +107,110 @@ class SavingTogetherPagesTest {
                         .at("/rooms/0/height")
                         .textValue())
                 .isEqualTo("3.3 m");
+    }
+
+    @Test
+    void whatOnlyOneChangedIsMarkedAndBothComeTogether() {
+        Page held = held(
+                height("3.3 m"),
+                form -> form.type("/rooms/0/name", "yard studio").press("save"));
+        Form form = held.form("mine");
+
+        assertThat(form.value("choice/height")).isEqualTo("theirs");
+        assertThat(form.value("choice/name")).isEqualTo("mine");
+        assertThat(second.send(form.press("settle")).status()).isEqualTo(303);
+        assertThat(kept("/rooms/0/height").textValue()).isEqualTo("3.3 m");
+        assertThat(kept("/rooms/0/name").textValue()).isEqualTo("yard studio");
+    }
+
+    @ParameterizedTest
+    @CsvSource({"all-mine,2.2 m", "all-theirs,3.3 m"})
+    void allOfOneSideCanBeTakenAtOnce(String button, String height) {
+        Page held = held(height("3.3 m"), height("2.2 m"));
+
+        assertThat(second.send(held.form("mine").press(button)).status()).isEqualTo(303);
+        assertThat(kept("/rooms/0/height").textValue()).isEqualTo(height);
+        assertThat(server.now(job).revision()).isEqualTo(button.equals("all-mine") ? 3 : 2);
+    }
+
+    @Test
+    void whoSavesAgainMeanwhileIsNotOverwrittenUnseen() {
+        Page held = held(height("3.3 m"), height("2.2 m"));
+        Form chosen = held.form("mine").forge("choice/height", "mine").press("settle");
+        first.send(height("3.4 m").apply(form(first, "rooms/studio-1")));
+
+        Page again = second.send(chosen);
+        assertThat(again.status()).isEqualTo(409);
+        assertThat(again.text()).contains("3.4 m", "2.2 m", "saved once more");
+        assertThat(kept("/rooms/0/height").textValue()).isEqualTo("3.4 m");
+        assertThat(second.send(again.form("mine").press("all-mine")).status()).isEqualTo(303);
+        assertThat(kept("/rooms/0/height").textValue()).isEqualTo("2.2 m");
+    }
+
+    @Test
+    void aSaveOfTheOtherRoomMeanwhileDoesNotMatterToAChoice() {
+        Page held = held(height("3.3 m"), height("2.2 m"));
+        first.send(
+                form(first, "rooms/shower-1").type("/rooms/1/height", "2.4 m").press("save"));
+
+        second.send(held.form("mine").press("all-mine"));
+
+        assertThat(kept("/rooms/0/height").textValue()).isEqualTo("2.2 m");
+        assertThat(kept("/rooms/1/height").textValue()).isEqualTo("2.4 m");
+    }
+
+    @Test
+    void whatWasTypedInARoomThatIsGoneCanStillBeKept() {
+        Page held = held(form -> form.press("remove-part"), height("2.2 m"));
+
+        assertThat(held.status()).isEqualTo(409);
+        assertThat(second.send(held.form("mine").forge("choice", "mine").press("settle"))
+                        .status())
+                .isEqualTo(303);
+        assertThat(kept("/rooms/1/height").textValue()).isEqualTo("2.2 m");
+    }
+
+    @Test
+    void aRoomThatSomebodyChangedIsNotTakenOutUnseen() {
+        Page held = held(height("3.3 m"), form -> form.press("remove-part"));
+
+        assertThat(held.status()).isEqualTo(409);
+        second.send(held.form("mine").forge("choice", "mine").press("settle"));
+        assertThat(kept("/rooms").size()).isEqualTo(1);
+    }
+
+    @Test
+    void whoTypedNothingSeesWhatTheOtherSaved() {
+        Page answer = held(height("3.3 m"), form -> form.press("save"));
+
+        assertThat(answer.status()).isEqualTo(303);
+        assertThat(kept("/rooms/0/height").textValue()).isEqualTo("3.3 m");
+    }
+
+    @Test
+    void aNewNameOfAnAssemblyComesThroughTheChoice() {
+        Form one = form(first, "assemblies/door");
+        Form other = form(second, "assemblies/door");
+        first.send(one.type("/assemblies/door/uValue", "1.9").press("save"));
+
+        Page held = second.send(other.type("/assemblies/door/uValue", "1.1")
+                .type("part-name", "oak door")
+                .press("save"));
+        second.send(held.form("mine").press("all-mine"));
+
+        assertThat(kept("/assemblies/oak door/uValue").textValue()).startsWith("1.1");
+        assertThat(kept("/assemblies/door").isMissingNode()).isTrue();
+    }
+
+    @ParameterizedTest
+    @CsvSource({"mine,nonsense", "mine,[1]", "mine,{}", "base,x", "seen,-1"})
+    void aForgedFormChangesNothing(String field, String value) {
+        Page held = held(height("3.3 m"), height("2.2 m"));
+
+        Page answer = second.send(held.form("mine").forge(field, value).press("all-mine"));
+
+        assertThat(answer.status()).isEqualTo(404);
+        assertThat(server.now(job).revision()).isEqualTo(2);
     }
 
     @Test

@@ -221,6 +221,8 @@ final class AnswerSchemas {
             property.put("type", "integer");
         } else if (type == boolean.class) {
             property.put("type", "boolean");
+        } else if (type == JsonNode.class && component.getDeclaringRecord() == DifferenceAnswer.class) {
+            property.put("description", "any value of JSON: a text, a number, a list or an object");
         } else if (type == JsonNode.class) {
             String words = component.getName().equals("sizing") ? "the sizing as issued" : "the survey as it was typed";
             property.put("type", "object").put("description", words);

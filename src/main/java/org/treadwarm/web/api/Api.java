@@ -22,6 +22,8 @@ public final class Api {
     private final WallFootApi wallFeet;
     private final JobsApi jobs;
     private final SheetsApi sheets;
+    private final RoomsApi rooms;
+    private final HistoryApi history;
 
     public Api(JobDesk desk, SheetDesk sheetDesk, Store store) {
         this.store = store;
@@ -31,6 +33,8 @@ public final class Api {
         this.wallFeet = new WallFootApi();
         this.jobs = new JobsApi(desk, new Repeats(store.keptAnswers()));
         this.sheets = new SheetsApi(sheetDesk);
+        this.rooms = new RoomsApi(desk);
+        this.history = new HistoryApi(desk);
     }
 
     /** The description of the API, made when it is first asked for. */
@@ -63,14 +67,23 @@ public final class Api {
         routes.post(ROOT + "/jobs", jobs::create, Access.WRITE);
         get(routes, ROOT + "/jobs/{id}", jobs::get, Access.READ);
         routes.put(ROOT + "/jobs/{id}", jobs::put, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/rooms", rooms::add, Access.WRITE);
+        get(routes, ROOT + "/jobs/{id}/rooms/{room}", rooms::get, Access.READ);
+        routes.put(ROOT + "/jobs/{id}/rooms/{room}", rooms::put, Access.WRITE);
+        routes.delete(ROOT + "/jobs/{id}/rooms/{room}", rooms::remove, Access.WRITE);
         get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing, Access.READ);
-        get(routes, ROOT + "/jobs/{id}/revisions", jobs::revisions, Access.READ);
-        get(routes, ROOT + "/jobs/{id}/revisions/{n}", jobs::revision, Access.READ);
         routes.post(ROOT + "/jobs/{id}/sheets", sheets::issue, Access.WRITE);
         get(routes, ROOT + "/sheets", sheets::list, Access.READ);
         get(routes, ROOT + "/sheets/{number}", sheets::get, Access.READ);
         get(routes, ROOT + "/sheets/{number}/verification", sheets::verification, Access.READ);
         routes.post(ROOT + "/sheets/{number}/withdrawal", sheets::withdraw, Access.WRITE);
+        get(routes, ROOT + "/jobs/{id}/revisions", history::revisions, Access.READ);
+        get(routes, ROOT + "/jobs/{id}/revisions/{n}", history::revision, Access.READ);
+        get(routes, ROOT + "/jobs/{id}/revisions/{n}/changes", history::changes, Access.READ);
+        routes.post(ROOT + "/jobs/{id}/revisions/{n}/restore", history::restore, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/copy", history::copy, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/archive", history::archive, Access.WRITE);
+        routes.post(ROOT + "/jobs/{id}/unarchive", history::bringBack, Access.WRITE);
     }
 
     /** HEAD answers as GET does, without the body. */

@@ -16,8 +16,9 @@ import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.jobs.JobDesk.Prepared;
 import org.treadwarm.jobs.JobDesk.Saving;
 import org.treadwarm.store.Change;
-import org.treadwarm.store.JobCursor;
-import org.treadwarm.store.JobsPage;
+import org.treadwarm.store.JobListing;
+import org.treadwarm.store.JobListings;
+import org.treadwarm.store.JobSearch;
 import org.treadwarm.store.KeptAnswer;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.survey.Pointer;
@@ -29,8 +30,7 @@ import org.treadwarm.wire.Json;
 /** Jobs over the API: whole documents, every save a revision, no save over somebody else's. */
 final class JobsApi {
     private static final int LONGEST_NAME = 200;
-    private static final Pattern JOBS = Pattern.compile("jobs ([0-9]{1,14}) ([0-9]{1,14}) ([a-z2-9]{12})");
-    private static final Pattern REVISIONS = Pattern.compile("revisions ([0-9]{1,15})");
+    private static final Pattern JOBS = Pattern.compile("jobs ([0-9TZ:.-]{20,24}_[a-z2-9]{12})");
 
     private final JobDesk desk;
     private final Repeats repeats;
@@ -63,45 +63,57 @@ final class JobsApi {
         }
     }
 
-    /** One revision without its survey. */
-    record RevisionAnswer(
-            String id, long revision, String name, boolean draft, Instant savedAt, String savedBy, String note) {
-        static RevisionAnswer of(RevisionHeader header) {
-            return new RevisionAnswer(
+    /** A job in a list: its newest revision without the survey. */
+    record ListedJob(
+            String id,
+            long revision,
+            String name,
+            boolean draft,
+            Instant savedAt,
+            String savedBy,
+            String note,
+            boolean archived) {
+        static ListedJob of(JobListing job) {
+            RevisionHeader header = job.newest();
+            return new ListedJob(
                     header.jobId(),
                     header.revision(),
                     header.name(),
                     header.draft(),
                     header.savedAt(),
                     header.savedBy(),
-                    header.note());
+                    header.note(),
+                    job.archived());
         }
     }
 
-    /** A part of the list of jobs. */
-    record JobsAnswer(List<RevisionAnswer> jobs, Optional<String> next) {}
-
-    /** A part of the list of revisions. */
-    record RevisionsAnswer(List<RevisionAnswer> revisions, Optional<String> next) {}
+    /** A page of jobs, and where the next page begins, if there is one. */
+    record JobsAnswer(List<ListedJob> jobs, Optional<String> next) {}
 
     private record JobBody(String name, JsonNode survey) {}
 
-    /** {@code GET /api/v1/jobs}. */
+    /** {@code GET /api/v1/jobs?find=&archived=&limit=&cursor=}. */
     void list(Context ctx) {
         Optional<Paging> paging = Paging.of(ctx, JOBS);
-        if (paging.isEmpty()) {
-            return;
+        Optional<JobSearch> search = paging.flatMap(part -> JobQuery.read(ctx, part));
+        if (search.isPresent()) {
+            JobListings found = desk.find(search.get());
+            Optional<String> next = found.next().map(place -> paging.get().next(ctx, place));
+            SizingApi.json(
+                    ctx,
+                    200,
+                    new JobsAnswer(found.jobs().stream().map(ListedJob::of).toList(), next));
         }
-        Optional<JobCursor> after =
-                paging.get().after().map(last -> new JobCursor(last.instant(1), last.instant(2), last.text(3)));
-        JobsPage page = desk.page(paging.get().limit(), after);
-        Optional<String> next = page.next()
-                .map(last -> paging.get()
-                        .next(ctx, last.asOf().toEpochMilli(), last.savedAt().toEpochMilli(), last.jobId()));
-        SizingApi.json(
-                ctx,
-                200,
-                new JobsAnswer(page.jobs().stream().map(RevisionAnswer::of).toList(), next));
+    }
+
+    static void answer(Context ctx, Saving saving) {
+        if (saving instanceof Saving.Saved saved) {
+            answer(ctx, 200, saved.job());
+        } else if (saving instanceof Saving.Stale stale) {
+            stale(ctx, stale.revision());
+        } else {
+            missing(ctx);
+        }
     }
 
     /** {@code POST /api/v1/jobs}. */
@@ -120,34 +132,6 @@ final class JobsApi {
     /** {@code GET /api/v1/jobs/{id}}. */
     void get(Context ctx) {
         answerOrMissing(ctx, desk.current(ctx.pathParam("id")));
-    }
-
-    /** {@code GET /api/v1/jobs/{id}/revisions}. */
-    void revisions(Context ctx) {
-        Optional<Paging> paging = Paging.of(ctx, REVISIONS);
-        if (paging.isEmpty()) {
-            return;
-        }
-        int limit = paging.get().limit();
-        long before = paging.get().after().map(last -> last.number(1)).orElse(Long.MAX_VALUE);
-        List<RevisionHeader> found = desk.revisions(ctx.pathParam("id"), limit + 1, before);
-        if (found.isEmpty()) {
-            missing(ctx);
-            return;
-        }
-        List<RevisionAnswer> page =
-                found.stream().limit(limit).map(RevisionAnswer::of).toList();
-        Optional<String> next = found.size() > limit
-                ? Optional.of(paging.get().next(ctx, page.get(limit - 1).revision()))
-                : Optional.empty();
-        SizingApi.json(ctx, 200, new RevisionsAnswer(page, next));
-    }
-
-    /** {@code GET /api/v1/jobs/{id}/revisions/{n}}. */
-    void revision(Context ctx) {
-        OptionalLong number = number(ctx.pathParam("n"));
-        answerOrMissing(
-                ctx, number.isEmpty() ? Optional.empty() : desk.revision(ctx.pathParam("id"), number.getAsLong()));
     }
 
     /** {@code GET /api/v1/jobs/{id}/sizing}: of the newest revision. */
@@ -191,16 +175,10 @@ final class JobsApi {
         }
         Saving saving = desk.save(
                 id, expected.getAsLong(), body.get().name(), body.get().survey(), change(ctx));
-        if (saving instanceof Saving.Saved saved) {
-            answer(ctx, 200, saved.job());
-        } else if (saving instanceof Saving.Stale stale) {
-            stale(ctx, stale.revision());
-        } else {
-            missing(ctx);
-        }
+        answer(ctx, saving);
     }
 
-    private static void stale(Context ctx, long current) {
+    static void stale(Context ctx, long current) {
         ctx.header("ETag", tag(current));
         Problems.plain(
                 ctx,
@@ -210,7 +188,7 @@ final class JobsApi {
                 "It is at revision " + current + " now. Fetch it, take its changes in, and send yours again.");
     }
 
-    private static Change change(Context ctx) {
+    static Change change(Context ctx) {
         return Change.by("key " + KeyGuard.key(ctx).name());
     }
 
@@ -222,7 +200,7 @@ final class JobsApi {
      * The revision that a change was made from (RFC 9110, 13.1.1): any for *, the current one where the list names it, else
      * one that was named. Weak tags never match.
      */
-    private static OptionalLong expected(String match, long current) {
+    static OptionalLong expected(String match, long current) {
         OptionalLong named = OptionalLong.empty();
         for (String each : match.split(",", -1)) {
             String tag = each.strip();
@@ -236,7 +214,7 @@ final class JobsApi {
         return named;
     }
 
-    private static OptionalLong number(String text) {
+    static OptionalLong number(String text) {
         return text.matches("[0-9]{1,15}") ? OptionalLong.of(Long.parseLong(text)) : OptionalLong.empty();
     }
 
@@ -283,11 +261,11 @@ final class JobsApi {
         return problems;
     }
 
-    private static String shortened(String text) {
+    static String shortened(String text) {
         return text.length() <= 100 ? text : text.substring(0, 99) + "…";
     }
 
-    private static void answerOrMissing(Context ctx, Optional<Job> job) {
+    static void answerOrMissing(Context ctx, Optional<Job> job) {
         if (job.isPresent()) {
             answer(ctx, 200, job.get());
         } else {
@@ -295,12 +273,12 @@ final class JobsApi {
         }
     }
 
-    private static void answer(Context ctx, int status, Job job) {
+    static void answer(Context ctx, int status, Job job) {
         ctx.header("ETag", tag(job.revision()));
         SizingApi.json(ctx, status, JobAnswer.of(job));
     }
 
-    private static void missing(Context ctx) {
+    static void missing(Context ctx) {
         Problems.plain(
                 ctx, 404, "missing", "There is no such job or revision", "Nothing is kept at " + ctx.path() + ".");
     }

@@ -51,11 +51,15 @@ final class OpenApi {
             answers.add(Material.class);
             answers.add(JobsApi.JobAnswer.class);
             answers.add(JobsApi.JobsAnswer.class);
-            answers.add(JobsApi.RevisionsAnswer.class);
             answers.add(SheetAnswers.SheetAnswer.class);
             answers.add(SheetAnswers.SheetsAnswer.class);
             answers.add(Verification.class);
             answers.add(SizingApi.MaterialsAnswer.class);
+            answers.add(HistoryApi.RevisionsAnswer.class);
+            answers.add(HistoryApi.ChangesAnswer.class);
+            answers.add(HistoryApi.ArchiveAnswer.class);
+            answers.add(RoomsApi.RoomAnswer.class);
+            answers.add(RoomsApi.RoomConflict.class);
             answers.add(Api.Health.class);
             return mapper.writeValueAsBytes(description);
         } catch (IOException e) {

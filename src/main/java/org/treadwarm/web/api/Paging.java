@@ -6,6 +6,7 @@ import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.util.Base64;
 import java.util.Optional;
+import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
@@ -20,6 +21,7 @@ import org.treadwarm.web.Problems;
  * @param after where to go on; empty for the first part
  */
 record Paging(String list, int limit, Optional<Cursor> after) {
+    private static final Set<String> FILTERS = Set.of("find", "archived");
     private static final int USUAL = 100;
     private static final int MOST = 200;
     private static final int LONGEST_CURSOR = 200;
@@ -90,9 +92,9 @@ record Paging(String list, int limit, Optional<Cursor> after) {
         String cursor =
                 Base64.getUrlEncoder().withoutPadding().encodeToString(plain.getBytes(StandardCharsets.US_ASCII));
         String others = ctx.queryParamMap().entrySet().stream()
-                .filter(parameter -> parameter.getKey().equals("find"))
-                .map(parameter ->
-                        "find=" + URLEncoder.encode(parameter.getValue().get(0), StandardCharsets.UTF_8) + "&")
+                .filter(parameter -> FILTERS.contains(parameter.getKey()))
+                .map(parameter -> parameter.getKey() + "="
+                        + URLEncoder.encode(parameter.getValue().get(0), StandardCharsets.UTF_8) + "&")
                 .collect(Collectors.joining());
         String address = ctx.path() + "?" + others + "limit=" + limit + "&cursor=" + cursor;
         ctx.header("Link", "<" + address + ">; rel=\"next\"");

@@ -5,6 +5,7 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -13,12 +14,15 @@ import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.jobs.JobDesk.Saving;
 import org.treadwarm.store.Change;
+import org.treadwarm.store.JobListings;
+import org.treadwarm.store.JobSearch;
 import org.treadwarm.survey.Site;
 import org.treadwarm.web.security.Visitors;
 
 /** The list of jobs, and a job: its site, spaces, assemblies, rooms with their verdicts, and totals. */
 final class JobPages {
     static final int LONGEST_NAME = 200;
+    private static final int A_PAGE = 50;
 
     private final JobDesk desk;
     private final Visitors visitors;
@@ -35,11 +39,57 @@ final class JobPages {
     }
 
     private void list(Context ctx, int status, String error) {
-        view.show(
-                ctx,
-                status,
-                "jobs",
-                Map.of("jobs", desk.list().stream().map(JobView.JobRow::of).toList(), "error", error));
+        String find = query(ctx, "find").strip();
+        String show = query(ctx, "show");
+        String after = query(ctx, "after");
+        boolean known = List.of("", "archived", "all").contains(show);
+        if (!known || !after.isEmpty() && !JobSearch.isPlace(after) || find.length() > LONGEST_NAME) {
+            missing(ctx, view);
+            return;
+        }
+        JobListings found = desk.find(new JobSearch(
+                find,
+                show.equals("all") ? Optional.empty() : Optional.of(show.equals("archived")),
+                Optional.of(after).filter(place -> !place.isEmpty()),
+                A_PAGE));
+        Map<String, Object> model = new HashMap<>();
+        model.put("jobs", found.jobs().stream().map(JobView.JobRow::of).toList());
+        model.put("next", found.next().orElse(""));
+        model.put("find", find);
+        model.put("show", show);
+        model.put("filtered", !find.isEmpty() || !show.isEmpty() || !after.isEmpty());
+        model.put("error", error);
+        view.show(ctx, status, "jobs", model);
+    }
+
+    private static String query(Context ctx, String name) {
+        return Optional.ofNullable(ctx.queryParam(name)).orElse("");
+    }
+
+    /** Starts a job with the newest revision of this one. */
+    void copy(Context ctx) {
+        Optional<Job> copy = desk.copies().copy(ctx.pathParam("job"), who(ctx));
+        if (copy.isPresent()) {
+            ctx.redirect("/jobs/" + copy.get().id(), HttpStatus.SEE_OTHER);
+        } else {
+            missing(ctx, view);
+        }
+    }
+
+    void archive(Context ctx) {
+        archive(ctx, true);
+    }
+
+    void bringBack(Context ctx) {
+        archive(ctx, false);
+    }
+
+    private void archive(Context ctx, boolean archived) {
+        if (desk.archive(ctx.pathParam("job"), archived, who(ctx))) {
+            ctx.redirect("/jobs/" + ctx.pathParam("job"), HttpStatus.SEE_OTHER);
+        } else {
+            missing(ctx, view);
+        }
     }
 
     void create(Context ctx) {
@@ -79,7 +129,9 @@ final class JobPages {
     }
 
     private void show(Context ctx, int status, Job job, JsonNode document, List<ErrorView> more, String notice) {
-        view.show(ctx, status, "job", new JobView(job, document).model(typedName(ctx, job), more, notice));
+        Map<String, Object> model = new HashMap<>(new JobView(job, document).model(typedName(ctx, job), more, notice));
+        model.put("archived", desk.isArchived(job.id()).orElse(false));
+        view.show(ctx, status, "job", model);
     }
 
     void change(Context ctx) {

@@ -17,6 +17,7 @@ import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.SpaceSizing;
 import org.treadwarm.sizing.Sizing.WaterTotal;
 import org.treadwarm.sizing.Verdict;
+import org.treadwarm.store.JobListing;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.survey.Site;
 import org.treadwarm.units.Numbers;
@@ -24,11 +25,18 @@ import org.treadwarm.units.Numbers;
 /** What the list of jobs and the page of a job show: rows of rooms, spaces and assemblies, totals, and what to look at. */
 final class JobView {
     /** A row of the list of jobs. */
-    public record JobRow(String id, String name, long revision, boolean draft, String savedAt, String savedBy) {
-        static JobRow of(RevisionHeader header) {
-            String saved = header.savedAt().toString().substring(0, 16).replace('T', ' ') + " UTC";
+    public record JobRow(
+            String id, String name, long revision, boolean draft, String savedAt, String savedBy, boolean archived) {
+        static JobRow of(JobListing job) {
+            RevisionHeader header = job.newest();
             return new JobRow(
-                    header.jobId(), header.name(), header.revision(), header.draft(), saved, header.savedBy());
+                    header.jobId(),
+                    header.name(),
+                    header.revision(),
+                    header.draft(),
+                    Moments.minute(header.savedAt()),
+                    header.savedBy(),
+                    job.archived());
         }
     }
 

@@ -1,6 +1,7 @@
 package org.treadwarm.web.pages;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.MissingNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
@@ -25,13 +26,17 @@ import org.treadwarm.web.security.Visitors;
 final class PartPages {
     private static final String WANTED_NAME = "wanted-name";
     private static final String NAME_ERROR = "name-error";
+    private static final String TRIES = "tries";
+    private static final int MOST_TRIES = 20;
 
     private final JobDesk desk;
     private final Visitors visitors;
     private final View view;
+    private final VersionPages versions;
 
-    PartPages(JobDesk desk, Visitors visitors, View view) {
+    PartPages(JobDesk desk, Visitors visitors, View view, VersionPages versions) {
         this.desk = desk;
+        this.versions = versions;
         this.visitors = visitors;
         this.view = view;
     }
@@ -119,50 +124,67 @@ final class PartPages {
 
     void save(Context ctx) {
         Optional<Job> current = desk.current(ctx.pathParam("job"));
-        Optional<Part> part = current.flatMap(found -> part(ctx, found.document()));
-        if (part.isEmpty()) {
+        if (current.isEmpty()) {
             JobPages.missing(ctx, view);
             return;
         }
         Job job = current.get();
-        ObjectNode document = (ObjectNode) job.document().deepCopy();
-        part.get().write(document, ctx.formParamMap());
+        Optional<JsonNode> shown = overtaken(ctx, job);
+        boolean typed = true;
+        if (shown.isPresent()) {
+            Part then = part(ctx, shown.get()).orElseThrow();
+            JsonNode mine = typed(ctx, shown.get(), then);
+            typed = !mine.equals(shown.get().at(then.pointer()))
+                    && !mine.equals(part(ctx, job.document())
+                            .map(part -> job.document().at(part.pointer()))
+                            .orElse(MissingNode.getInstance()));
+            if (typed) {
+                versions.begin(ctx, job, shownRevision(ctx), mine, wantedName(ctx, then));
+                return;
+            }
+        }
+        Optional<Part> part = part(ctx, job.document());
+        if (part.isEmpty()) {
+            JobPages.missing(ctx, view);
+        } else {
+            save(ctx, job, part.get(), typed);
+        }
+    }
+
+    /** What was typed into the form of another revision; a missing node if the part was to be taken out. */
+    private static JsonNode typed(Context ctx, JsonNode shown, Part part) {
+        ObjectNode document = shown.deepCopy();
+        part.write(document, ctx.formParamMap());
         String action = EntryPages.text(ctx, "do");
-        String wanted = Optional.ofNullable(ctx.formParam("part-name"))
-                .orElse(part.get().key())
+        part.act(document, action, "");
+        return action.equals("remove-part") ? MissingNode.getInstance() : document.at(part.pointer());
+    }
+
+    private static String wantedName(Context ctx, Part part) {
+        return Optional.ofNullable(ctx.formParam("part-name"))
+                .orElse(part.key())
                 .strip();
-        String refusal = part.get().refusal(document, wanted);
-        String renamed = part.get().act(document, action, refusal.isEmpty() ? wanted : "");
+    }
+
+    private void save(Context ctx, Job job, Part part, boolean typed) {
+        ObjectNode document = (ObjectNode) job.document().deepCopy();
+        String action = typed ? EntryPages.text(ctx, "do") : "";
+        if (typed) {
+            part.write(document, ctx.formParamMap());
+        }
+        String wanted = wantedName(ctx, part);
+        String refusal = part.refusal(document, wanted);
+        String renamed = part.act(document, action, refusal.isEmpty() ? wanted : "");
         if (!refusal.isEmpty()) {
             ctx.attribute(WANTED_NAME, wanted);
             ctx.attribute(NAME_ERROR, refusal);
-            show(
-                    ctx,
-                    422,
-                    job,
-                    document,
-                    part.get(),
-                    "Not kept yet: the name must be put right first.",
-                    job.revision());
-            return;
-        }
-        if (isOvertaken(ctx, job, part.get())) {
-            String who = job.savedBy();
-            show(
-                    ctx,
-                    409,
-                    job,
-                    document,
-                    part.get(),
-                    "While you typed, " + who + " saved this too. Below is yours, not kept"
-                            + " yet: save again to let it stand, or open the page anew to see theirs.",
-                    job.revision());
+            show(ctx, 422, job, document, part, "Not kept yet: the name must be put right first.", job.revision());
             return;
         }
         if (action.equals("remove-part")) {
-            part.get().remove(document);
+            part.remove(document);
         }
-        keep(ctx, job, document, part.get(), action, renamed);
+        keep(ctx, job, document, part, action, renamed);
     }
 
     private void keep(Context ctx, Job job, ObjectNode document, Part part, String action, String key) {
@@ -171,14 +193,7 @@ final class PartPages {
             String who = visitors.session(ctx).orElseThrow().person().name();
             Saving saving = desk.save(job.id(), job.revision(), job.name(), document, Change.by(who));
             if (!(saving instanceof Saving.Saved done)) {
-                show(
-                        ctx,
-                        409,
-                        job,
-                        document,
-                        part,
-                        "Somebody saved this job in the same moment. Below is yours, not kept" + " yet: save again.",
-                        desk.current(job.id()).orElseThrow().revision());
+                saveAgain(ctx, job, document, part);
                 return;
             }
             saved = done.job();
@@ -205,15 +220,40 @@ final class PartPages {
         }
     }
 
-    /** Whether this very part was saved by somebody else since the form was shown. */
-    private boolean isOvertaken(Context ctx, Job job, Part part) {
-        String shown = EntryPages.text(ctx, "revision");
-        if (!shown.matches("[0-9]{1,15}") || Long.parseLong(shown) >= job.revision()) {
-            return false;
+    /** Somebody saved the job in the same moment, most likely another part of it. */
+    private void saveAgain(Context ctx, Job job, JsonNode document, Part part) {
+        int tries = Optional.<Integer>ofNullable(ctx.attribute(TRIES)).orElse(0);
+        ctx.attribute(TRIES, tries + 1);
+        if (tries < MOST_TRIES) {
+            save(ctx);
+        } else {
+            show(
+                    ctx,
+                    409,
+                    job,
+                    document,
+                    part,
+                    "Others are saving this job at the same time. Below is yours, not kept yet: save again.",
+                    job.revision());
         }
-        Optional<Job> then = desk.revision(job.id(), Long.parseLong(shown));
-        Optional<JsonNode> before = then.flatMap(old -> Part.find(old.document(), part.kind(), part.key())
-                .map(found -> old.document().at(found.pointer())));
-        return before.isEmpty() || !before.get().equals(job.document().at(part.pointer()));
+    }
+
+    /** The document that the form was made from, if somebody saved this very part since; empty if nobody did. */
+    private Optional<JsonNode> overtaken(Context ctx, Job job) {
+        long shown = shownRevision(ctx);
+        if (shown >= job.revision()) {
+            return Optional.empty();
+        }
+        Optional<JsonNode> then = desk.document(job.id(), shown);
+        Optional<JsonNode> before = then.flatMap(old -> part(ctx, old).map(found -> old.at(found.pointer())));
+        Optional<JsonNode> now =
+                part(ctx, job.document()).map(found -> job.document().at(found.pointer()));
+        return before.isPresent() && !before.equals(now) ? then : Optional.empty();
+    }
+
+    /** The revision that the form was made from; the newest thinkable where it does not say. */
+    private static long shownRevision(Context ctx) {
+        String shown = EntryPages.text(ctx, "revision");
+        return shown.matches("[0-9]{1,15}") ? Long.parseLong(shown) : Long.MAX_VALUE;
     }
 }
