@@ -163,8 +163,8 @@ public final class Server implements AutoCloseable {
     private static boolean isAnswered(Context ctx) {
         String type = ctx.res().getContentType();
         return type != null
-                && (type.startsWith("application/problem+json") || type.startsWith("text/html"))
-                && ctx.attribute("answered") != null;
+                && (type.startsWith("application/problem+json")
+                        || type.startsWith("text/html") && ctx.attribute("answered") != null);
     }
 
     private static void answer(Context ctx, Pages pages, int status) {

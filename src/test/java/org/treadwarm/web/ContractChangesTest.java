@@ -80,7 +80,7 @@ class ContractChangesTest {
                         "post /api/v1/jobs was removed",
                         d -> object(d, "/paths/~1api~1v1~1jobs").remove("post")),
                 change(
-                        "get /api/v1/jobs parameter limit was removed",
+                        "get /api/v1/jobs parameter find was removed",
                         d -> ((ArrayNode) d.at("/paths/~1api~1v1~1jobs/get/parameters")).remove(0)),
                 change(
                         "get /api/v1/jobs -> 200 was removed",
@@ -150,7 +150,7 @@ class ContractChangesTest {
     @Test
     void letsAdditionsPass() {
         ObjectNode changed = served.deepCopy();
-        object(changed, "/paths").set("/api/v1/sheets", object(changed, "/paths/~1api~1v1~1jobs"));
+        object(changed, "/paths").set("/api/v1/colours", object(changed, "/paths/~1api~1v1~1jobs"));
         object(changed, "/components/schemas/JobAnswer/properties")
                 .putObject("colour")
                 .put("type", "string");

@@ -58,6 +58,7 @@ class MutatedRequestsTest {
         try (RunningServer server = RunningServer.start()) {
             Job job = server.job("yard", RunningServer.studio());
             List<RawRequest> seeds = new ArrayList<>(seeds(server, job.id()));
+            seeds.addAll(partsOfJobs(server, job.id()));
             seeds.addAll(pages(server, job.id()));
             assertThat(server.routes()).allMatch(route -> seeds.stream().anyMatch(seed -> reaches(seed, route)));
             List<String> faults = new ArrayList<>();
@@ -119,6 +120,27 @@ class MutatedRequestsTest {
                 RawRequest.get("/api/v1/sheets/2026-0001/verification", key),
                 RawRequest.with("POST", "/api/v1/sheets/2026-0001/withdrawal", key, "{\"reason\": \"wrong\"}"),
                 RawRequest.with("PUT", jobs + "/" + job, key, body).header("If-Match", "\"1\""));
+    }
+
+    private static List<RawRequest> partsOfJobs(RunningServer server, String job) {
+        String key = server.key(Scope.WRITE);
+        String at = "/api/v1/jobs/" + job;
+        String room = RunningServer.studio().at("/rooms/0").toString();
+        return List.of(
+                RawRequest.get(at + "/rooms/studio-1", key),
+                RawRequest.with("POST", at + "/rooms", key, room),
+                RawRequest.with("PUT", at + "/rooms/studio-1", key, room).header("If-Match", "\"none\""),
+                RawRequest.get(at + "/rooms/studio-1", key).method("DELETE").header("If-Match", "\"none\""),
+                RawRequest.get(at + "/revisions/1/changes", key),
+                RawRequest.with("POST", at + "/revisions/1/restore", key, "").header("If-Match", "\"1\""),
+                RawRequest.with("POST", at + "/copy", key, ""),
+                RawRequest.with("POST", at + "/archive", key, ""),
+                RawRequest.with("POST", at + "/unarchive", key, ""),
+                RawRequest.with(
+                        "POST",
+                        "/api/v1/wall-feet",
+                        key,
+                        WallFeetApiTest.question().toString()));
     }
 
     /** Whoever is signed out or loses the account by one of them has a session of its own for that. */
