@@ -21,6 +21,9 @@ final class SectionFloor {
     /** The largest flux looked at, W/m²; no floor comes near it. */
     static final double HIGHEST_FLUX = 4000;
 
+    /** Change of the downward flux per tenth of a kelvin below the floor that tells anything, W/m²; built floors have 1e-4 and more. */
+    private static final double LEAST_REACTION = 1e-9;
+
     final FloorEvaluation plane;
     final SectionGeometry geometry;
     final FloorResponse response;
@@ -95,7 +98,10 @@ final class SectionFloor {
         State here = at(flux, outdoor);
         // Away from the room's temperature, so that the warmest point stays where it is.
         State near = solved(flux, here.below() + Math.copySign(0.1, here.below() - plane.room), outdoor);
-        double perDownward = (temperature.of(near) - temperature.of(here)) / (near.downward() - here.downward());
+        double reaction = near.downward() - here.downward();
+        // Where next to nothing can go down, nothing follows from it, and the quotient would be one of roundings.
+        double perDownward =
+                Math.abs(reaction) < LEAST_REACTION ? 0 : (temperature.of(near) - temperature.of(here)) / reaction;
         double left = temperature.of(here) - plane.room - perDownward * here.downward();
         return new FluxSplit(flux > 0 ? left / flux : 0, perDownward);
     }
