@@ -7,11 +7,11 @@ import com.networknt.schema.InputFormat;
 import com.networknt.schema.Schema;
 import com.networknt.schema.SchemaRegistry;
 import com.networknt.schema.dialect.Dialects;
-import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.stream.Collectors;
 import java.util.stream.StreamSupport;
 import org.treadwarm.intake.NotJsonException;
@@ -22,7 +22,7 @@ final class Contract {
 
     private final JsonNode description;
     private final SchemaRegistry registry = SchemaRegistry.withDialect(Dialects.getOpenApi31());
-    private final Map<String, Schema> schemas = new HashMap<>();
+    private final Map<String, Schema> schemas = new ConcurrentHashMap<>();
 
     /** Reads a description. */
     Contract(byte[] description) {
