@@ -16,7 +16,7 @@ final class LayoutWarnings {
     /** Areas come from sums and products of readings. */
     private static final double ROUNDING = 1e-9;
 
-    /** A plan may miss the floor's area by so much, as both are taped. */
+    /** A plan may miss the floor's area by so much, as both are taped; a threshold of our own, no source. */
     private static final double TAPED = 0.05;
 
     /** More than this share bare deserves a look; common practice, no source. */
