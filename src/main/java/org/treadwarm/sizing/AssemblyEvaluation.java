@@ -100,7 +100,10 @@ public record AssemblyEvaluation(
             Assembly assembly, double inside, double outside, Conditions conditions) {
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add("/layers", assembly.layers(), assembly.heatFlow().heatFlow());
+        builder.add(
+                Place.SURVEY.at("/layers"),
+                assembly.layers(),
+                assembly.heatFlow().heatFlow());
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] layer = new double[stack.layers];

@@ -139,7 +139,7 @@ final class Evaluation {
         for (int ground = 0; ground < groundDimension.length; ground++) {
             double numbers = groundDimension[ground] + groundToSoil[ground] + groundToOutdoors[ground];
             if (!Double.isFinite(numbers)) {
-                return Optional.of(plan.addresses.get(plan.grounds.get(ground).perimeter()));
+                return Optional.of(plan.address(plan.grounds.get(ground).perimeter()));
             }
         }
         for (int space = 0; space < plan.floatingNodes.length; space++) {

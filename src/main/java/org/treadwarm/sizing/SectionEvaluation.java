@@ -73,7 +73,7 @@ public record SectionEvaluation(
     private static FloorSection section(SectionQuestion question) {
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add("/layers", question.layers(), HeatFlow.UP);
+        builder.add(Place.SURVEY.at("/layers"), question.layers(), HeatFlow.UP);
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] resistances = new double[stack.layers];

@@ -41,7 +41,7 @@ final class ThermalLayers {
     private static double[] resistances(List<Layer> layers, HeatFlow direction) {
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add("", layers, direction);
+        builder.add(Place.SURVEY, layers, direction);
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] layer = new double[stack.layers];

@@ -143,7 +143,7 @@ public record WallFootEvaluation(
         double thickness = question.thicknessOfWall();
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add("/wall", question.wall(), HeatFlow.HORIZONTAL);
+        builder.add(Place.SURVEY.at("/wall"), question.wall(), HeatFlow.HORIZONTAL);
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] layer = new double[stack.layers];
