@@ -2,6 +2,7 @@ package org.treadwarm.sizing;
 
 import java.util.Arrays;
 import java.util.Optional;
+import org.treadwarm.survey.Place;
 import org.treadwarm.units.Reading;
 
 /** The readings of a survey as one array of SI numbers, each with its address. */

@@ -34,6 +34,7 @@ import org.treadwarm.survey.Junction;
 import org.treadwarm.survey.JunctionPlace;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Opening;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Site;
 import org.treadwarm.survey.Space;
@@ -97,7 +98,7 @@ final class PlanBuilder {
         survey.assemblies().forEach(this::assembly);
         int space = rooms;
         for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
-            Place at = Place.SURVEY.named("/spaces", entry.getKey());
+            Place at = Place.ROOT.at("/spaces").key(entry.getKey());
             Space given = entry.getValue();
             exchanges(at, space++, given.surfaces(), given.junctions(), given.air(), NONE, NONE);
         }
@@ -110,7 +111,7 @@ final class PlanBuilder {
 
     private void site() {
         Site given = survey.site();
-        Place at = Place.SURVEY.at("/site");
+        Place at = Place.ROOT.at("/site");
         site = new SiteIndexes(
                 inputs.add(at, "/outdoorTemperature", given.outdoorTemperature()),
                 inputs.optional(at, "/annualMeanTemperature", given.annualMeanTemperature()),
@@ -124,13 +125,13 @@ final class PlanBuilder {
             Room room = survey.rooms().get(i);
             name(i, room.name());
             nodeTemperature[i] =
-                    inputs.add(Place.SURVEY.item("/rooms", i), "/indoorTemperature", room.indoorTemperature());
+                    inputs.add(Place.ROOT.item("/rooms", i), "/indoorTemperature", room.indoorTemperature());
         }
         int node = rooms;
         List<Integer> floats = new ArrayList<>();
         for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
             Space space = entry.getValue();
-            Place at = Place.SURVEY.named("/spaces", entry.getKey());
+            Place at = Place.ROOT.at("/spaces").key(entry.getKey());
             name(node, entry.getKey());
             if (space.kind() == SpaceKind.HELD) {
                 nodeTemperature[node] =
@@ -157,7 +158,7 @@ final class PlanBuilder {
     }
 
     private void assembly(String name, Assembly assembly) {
-        Place at = Place.SURVEY.named("/assemblies", name);
+        Place at = Place.ROOT.at("/assemblies").key(name);
         HeatFlow direction = assembly.heatFlow().heatFlow();
         int stack = assembly.uValue().isPresent() ? NONE : stacks.add(at.at("/layers"), assembly.layers(), direction);
         assemblyNumbers.put(name, assemblies.size());
@@ -172,7 +173,7 @@ final class PlanBuilder {
     }
 
     private void room(int i, Room room) {
-        Place at = Place.SURVEY.item("/rooms", i);
+        Place at = Place.ROOT.item("/rooms", i);
         int floorArea = inputs.add(at, "/floorArea", room.floorArea());
         int height = inputs.add(at, "/height", room.height());
         roomIndexes[i] = new RoomIndexes(
@@ -358,7 +359,7 @@ final class PlanBuilder {
                         ? ground(at.at("/ground"), floor.ground().get(), floorArea)
                         : NONE,
                 floor.to().map(nodes::get).orElse(NONE),
-                edges(Place.SURVEY.item("/rooms", node).at("/junctions"), room.junctions()),
+                edges(Place.ROOT.item("/rooms", node).at("/junctions"), room.junctions()),
                 inputs.optional(at, "/maximumSurfaceTemperature", floor.maximumSurfaceTemperature()),
                 List.copyOf(limits),
                 heater,

@@ -9,6 +9,7 @@ import org.treadwarm.physics.envelope.HeatFlow;
 import org.treadwarm.survey.AirGap;
 import org.treadwarm.survey.Bridging;
 import org.treadwarm.survey.Layer;
+import org.treadwarm.survey.Place;
 import org.treadwarm.tables.Materials;
 
 /** Compiles piles of layers. */

@@ -14,6 +14,7 @@ import org.treadwarm.physics.section.WallFoot.Wall;
 import org.treadwarm.physics.section.WallFootCoupling;
 import org.treadwarm.sizing.SectionEvaluation.SectionAccuracy;
 import org.treadwarm.survey.LayerMatter;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.WallFootQuestion;
 import org.treadwarm.tables.Films;
 import org.treadwarm.units.Reading;
@@ -143,7 +144,7 @@ public record WallFootEvaluation(
         double thickness = question.thicknessOfWall();
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add(Place.SURVEY.at("/wall"), question.wall(), HeatFlow.HORIZONTAL);
+        builder.add(Place.ROOT.at("/wall"), question.wall(), HeatFlow.HORIZONTAL);
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] layer = new double[stack.layers];

@@ -64,6 +64,11 @@ public final class UnitTable {
         return Optional.ofNullable(asWritten != null ? asWritten : ofKind.get(normal(text)));
     }
 
+    /** The unit of a kind that is written to the letter as the table has it. */
+    static Optional<Unit> asWritten(QuantityKind kind, String text) {
+        return Optional.ofNullable(BY_KIND.get(kind).get(text));
+    }
+
     /** The kinds that know this unit text, for telling somebody that metres do not measure heat. */
     static Set<QuantityKind> kindsOf(String text) {
         String normal = normal(text);
