@@ -48,7 +48,7 @@ class SectionBalanceTest {
     /** A screed on insulation, or a board on a void of a timber floor, invented. */
     private ObjectNode question(boolean water, boolean film, boolean timber) {
         ObjectNode tree = (ObjectNode) Trees.json("{}");
-        double spacing = random.nextDouble(0.08, 0.3);
+        double spacing = random.nextDouble(0.08, 0.25);
         double diameter = water ? random.nextDouble(0.012, 0.02) : random.nextDouble(0.004, 0.008);
         double thickness = diameter + random.nextDouble(0.01, 0.05);
         tree.put("spacing", spacing);
@@ -58,7 +58,7 @@ class SectionBalanceTest {
         } else {
             above.put("characteristic", "EN 1264-2");
         }
-        tree.putObject("below").put("temperature", random.nextDouble(0, 20)).put("coefficient", 5.9);
+        tree.putObject("below").put("temperature", random.nextDouble(12, 20)).put("coefficient", 5.9);
         ArrayNode layers = tree.putArray("layers");
         layers.addObject().put("name", "covering").put("resistance", random.nextDouble(0, 0.12));
         layers.addObject()

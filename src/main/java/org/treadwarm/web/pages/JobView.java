@@ -134,19 +134,42 @@ final class JobView {
         return rows;
     }
 
-    /** The warm water of the job: what the boiler and the pump must give, apart from manifold and pipes to it. */
+    /** The warm water of the job: what the boiler and the pump must give; manifolds and heat source as far as the survey states them. */
     private static void water(List<TotalRow> rows, WaterTotal water) {
         rows.add(new TotalRow(
                 "Supply of the warm water",
                 Numbers.fixed(water.supplyTemperature(), 1) + " °C, governed by " + water.governingRoom()));
         rows.add(new TotalRow("Loops", Integer.toString(water.valves().size())));
         rows.add(new TotalRow("Flow of the pump", Numbers.fixed(60_000 * water.volumeFlow(), 2) + " l/min"));
-        rows.add(new TotalRow(
-                "Drop of the worst loop", Numbers.fixed(water.pressure() / 1000, 1) + " kPa, straight pipe"));
+        rows.add(new TotalRow("Pressure of the pump", pressure(water)));
         if (water.manifolds().size() > 1) {
             water.manifolds().forEach(manifold -> rows.add(manifold(manifold)));
         }
         rows.add(new TotalRow("Water in the loops", Numbers.fixed(1000 * water.waterContent(), 1) + " l"));
+    }
+
+    /** What the pump's pressure is made of, and what nobody has stated. */
+    private static String pressure(WaterTotal water) {
+        boolean manifolds =
+                water.manifolds().stream().allMatch(each -> each.ownDrop().isPresent());
+        List<String> without = new ArrayList<>();
+        if (!manifolds) {
+            without.add(water.manifolds().size() > 1 ? "a manifold that states none" : "the manifold");
+        }
+        if (water.sourceDrop().isEmpty()) {
+            without.add("the heat source");
+        }
+        return kilopascals(water.pressure()) + ": the worst loop as straight pipe"
+                + (manifolds ? ", its manifold" : "")
+                + water.sourceDrop().stream()
+                        .mapToObj(drop -> ", the heat source with " + kilopascals(drop))
+                        .findFirst()
+                        .orElse("")
+                + (without.isEmpty() ? "" : "; without " + String.join(" and ", without));
+    }
+
+    private static String kilopascals(double pascals) {
+        return Numbers.fixed(pascals / 1000, 1) + " kPa";
     }
 
     private static TotalRow manifold(ManifoldSizing manifold) {
