@@ -59,7 +59,9 @@ public final class CosineFloor {
         double skin = plane - heat / (2 * Math.PI * conductivity) * Math.log(2 * Math.PI * radius / spacing);
         for (int n = 1; n <= WAVES; n++) {
             double wave = 2 * Math.PI * n / spacing;
-            double amplitude = 2 * heat / spacing
+            double amplitude = 2
+                    * heat
+                    / spacing
                     / (1 / resistance(above, filmAbove, wave) + 1 / resistance(below, filmBelow, wave));
             double surface = amplitude * passed(above, filmAbove, wave);
             over += surface;

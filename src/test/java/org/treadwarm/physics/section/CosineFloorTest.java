@@ -39,9 +39,7 @@ class CosineFloorTest {
                         floor.below().temperature());
         FloorTemperatures got = floor.solve();
         double room = above.temperature();
-        assertThat(got.upwardFlux())
-                .as("%s", floor)
-                .isCloseTo(expected.upward(), within(ERROR * expected.upward()));
+        assertThat(got.upwardFlux()).as("%s", floor).isCloseTo(expected.upward(), within(ERROR * expected.upward()));
         assertThat(got.surfaceMaximum() - room)
                 .as("over the cable, %s", floor)
                 .isCloseTo(expected.over() - room, within(ERROR * (expected.over() - room)));
