@@ -141,31 +141,30 @@ final class JobView {
                 Numbers.fixed(water.supplyTemperature(), 1) + " °C, governed by " + water.governingRoom()));
         rows.add(new TotalRow("Loops", Integer.toString(water.valves().size())));
         rows.add(new TotalRow("Flow of the pump", Numbers.fixed(60_000 * water.volumeFlow(), 2) + " l/min"));
-        rows.add(new TotalRow("Pressure of the pump", pressure(water)));
+        drops(rows, water);
         if (water.manifolds().size() > 1) {
             water.manifolds().forEach(manifold -> rows.add(manifold(manifold)));
         }
         rows.add(new TotalRow("Water in the loops", Numbers.fixed(1000 * water.waterContent(), 1) + " l"));
     }
 
-    /** What the pump's pressure is made of, and what nobody has stated. */
-    private static String pressure(WaterTotal water) {
-        boolean manifolds =
-                water.manifolds().stream().allMatch(each -> each.ownDrop().isPresent());
-        List<String> without = new ArrayList<>();
-        if (!manifolds) {
-            without.add(water.manifolds().size() > 1 ? "a manifold that states none" : "the manifold");
+    /** What the pump has to overcome: loops as straight pipe, and what the survey states of manifolds and heat source. */
+    private static void drops(List<TotalRow> rows, WaterTotal water) {
+        double worst = water.manifolds().stream()
+                .mapToDouble(manifold -> manifold.loopDrop().orElse(manifold.pressure()))
+                .max()
+                .orElseThrow();
+        rows.add(new TotalRow("Drop of the worst loop", kilopascals(worst) + ", straight pipe"));
+        if (water.manifolds().size() == 1) {
+            water.manifolds()
+                    .get(0)
+                    .ownDrop()
+                    .ifPresent(drop -> rows.add(new TotalRow("Drop of the manifold", kilopascals(drop))));
         }
-        if (water.sourceDrop().isEmpty()) {
-            without.add("the heat source");
+        water.sourceDrop().ifPresent(drop -> rows.add(new TotalRow("Drop of the heat source", kilopascals(drop))));
+        if (water.pressure() != worst) {
+            rows.add(new TotalRow("Pressure of the pump", kilopascals(water.pressure())));
         }
-        return kilopascals(water.pressure()) + ": the worst loop as straight pipe"
-                + (manifolds ? ", its manifold" : "")
-                + water.sourceDrop().stream()
-                        .mapToObj(drop -> ", the heat source with " + kilopascals(drop))
-                        .findFirst()
-                        .orElse("")
-                + (without.isEmpty() ? "" : "; without " + String.join(" and ", without));
     }
 
     private static String kilopascals(double pascals) {
