@@ -86,6 +86,7 @@ final class FloorRules {
             notHis(pointer + "/spread", heater.spread(), "only warm water has a spread");
             notHis(pointer + "/feederLength", heater.feederLength(), "only warm water has feeders");
             mats(pointer, heater);
+            notHis(pointer + "/manifoldDrop", heater.manifoldDrop(), "only warm water comes from a manifold");
             notHis(pointer + "/glycol", heater.glycol(), "only warm water may hold glycol");
             heater.manifold()
                     .ifPresent(name -> findings.add(

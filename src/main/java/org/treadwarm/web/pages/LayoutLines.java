@@ -79,7 +79,7 @@ final class LayoutLines {
                 new Layout(
                         "Warm-water layout",
                         lines,
-                        "Drops are of straight pipe without bends, fittings and manifold. Flush, vent and test the pressure before the floor"
+                        "Drops are of straight pipe without bends, fittings and manifold; state the drops of manifold and heat source to have the pump's pressure with them. Flush, vent and test the pressure before the floor"
                                 + " is covered; heat a screed up by its maker's rules; protect against frost when switched off."));
     }
 
@@ -105,7 +105,12 @@ final class LayoutLines {
 
     private static PracticeJudgement named(PracticeJudgement limit, String part) {
         return new PracticeJudgement(
-                limit.name() + ", " + part, limit.value(), limit.limit(), limit.margin(), limit.source());
+                limit.name() + ", " + part,
+                limit.sense(),
+                limit.value(),
+                limit.limit(),
+                limit.margin(),
+                limit.source());
     }
 
     /** What each part of the floor gives: at the required flux, or at the carrying flux when that is less. */
@@ -207,17 +212,13 @@ final class LayoutLines {
         byName.forEach((name, of) -> {
             boolean kept = of.stream().allMatch(limit -> limit.margin() >= 0);
             String all = of.stream()
-                    .map(limit -> (isMost(limit) ? "at most " : "at least ") + shown(name, limit.limit()) + ", "
+                    .map(limit -> limit.sense().orElse("limit") + " " + shown(name, limit.limit()) + ", "
                             + limit.source()
                             + (limit.margin() < 0 ? ": beyond it" : ""))
                     .collect(Collectors.joining("; "));
             lines.add(
                     new Line(capital(name), shown(name, of.get(0).value()), (kept ? "kept: " : "look again: ") + all));
         });
-    }
-
-    private static boolean isMost(PracticeJudgement limit) {
-        return Math.abs(limit.limit() - limit.value() - limit.margin()) <= 1e-9 * Math.abs(limit.limit());
     }
 
     private static String shown(String name, double value) {
