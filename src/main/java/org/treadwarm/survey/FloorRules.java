@@ -36,7 +36,7 @@ final class FloorRules {
                         "a heated floor on the ground is described by \"ground\"",
                         "outdoors, or the name of a space or of another room");
             } else {
-                otherSides.check(pointer + "/to", to, room.name(), true);
+                otherSides.check(pointer, to, room.name(), true);
             }
         });
         layers(pointer, floor);

@@ -20,6 +20,11 @@ final class ShortestDecimal {
     private static final long FRACTION_MASK = HIDDEN_BIT - 1;
     private static final long MASK_63 = Long.MAX_VALUE;
 
+    private static final long BILLION = 1_000_000_000;
+
+    /** The least number of 1, 2, 3 digits and so on. */
+    private static final long[] POWERS_OF_TEN = new long[18];
+
     /** Powers of ten that are needed: the least and the largest decimal exponent of a double's rounding interval. */
     private static final int LEAST_POWER = -324;
 
@@ -31,6 +36,10 @@ final class ShortestDecimal {
     private static final long[] LOW = new long[HIGH.length];
 
     static {
+        POWERS_OF_TEN[0] = 1;
+        for (int i = 1; i < POWERS_OF_TEN.length; i++) {
+            POWERS_OF_TEN[i] = 10 * POWERS_OF_TEN[i - 1];
+        }
         for (int k = LEAST_POWER; k <= LARGEST_POWER; k++) {
             BigInteger power = BigInteger.TEN.pow(Math.abs(k));
             int shift = 125 - floorLog2PowerOf10(-k);
@@ -153,13 +162,25 @@ final class ShortestDecimal {
     }
 
     private static int digits(long digits, int count, char[] to, int at) {
-        long rest = digits;
-        for (int i = at + count - 1; i >= at; i--) {
-            long tenth = rest / 10;
+        int end = at + count;
+        long top = digits;
+        int i = end - 1;
+        while (top >= BILLION) {
+            long above = top / BILLION;
+            int nine = (int) (top - above * BILLION);
+            for (int stop = i - 9; i > stop; i--) {
+                int tenth = nine / 10;
+                to[i] = (char) ('0' + (nine - 10 * tenth));
+                nine = tenth;
+            }
+            top = above;
+        }
+        for (int rest = (int) top; i >= at; i--) {
+            int tenth = rest / 10;
             to[i] = (char) ('0' + (rest - 10 * tenth));
             rest = tenth;
         }
-        return at + count;
+        return end;
     }
 
     private static int whole(int number, char[] to, int start) {
@@ -173,9 +194,9 @@ final class ShortestDecimal {
     }
 
     private static int count(long number) {
-        int count = 1;
-        for (long bound = 10; count < 18 && number >= bound; bound *= 10) {
-            count++;
+        int count = POWERS_OF_TEN.length;
+        while (count > 1 && number < POWERS_OF_TEN[count - 1]) {
+            count--;
         }
         return count;
     }
