@@ -63,7 +63,8 @@ final class WallFootPages {
             String wall,
             Map<String, List<String>> typed,
             JsonNode question,
-            WallFootEvaluation answer) {}
+            WallFootEvaluation answer,
+            List<Answer.Picture> pictures) {}
 
     private Optional<Place> place(Context ctx) {
         Optional<Job> job = desk.current(ctx.pathParam("job"));
@@ -185,8 +186,12 @@ final class WallFootPages {
                 "Psi of " + place.get().title() + ", " + place.get().part().title(),
                 id -> place.get().address() + "/" + id,
                 place.get().address(),
-                (stopped, progress) -> new Solved(
-                        place.get().id(), wall, typed, question, WallFootEvaluation.of(accepted, stopped, progress)));
+                (stopped, progress) -> {
+                    WallFootEvaluation answer =
+                            WallFootEvaluation.of(accepted, stopped, share -> progress.accept(0.9 * share));
+                    List<Answer.Picture> pictures = WallFootPicture.all(accepted, wall, stopped);
+                    return new Solved(place.get().id(), wall, typed, question, answer, pictures);
+                });
     }
 
     private static Map<String, List<String>> typed(Context ctx) {
@@ -229,6 +234,7 @@ final class WallFootPages {
         model.put("now", Forms.shown(place.junction().path("psi")));
         model.put("without", WallFootWords.line(solved.answer().withoutEdge()));
         model.put("with", solved.answer().withEdge().map(WallFootWords::line));
+        model.put("pictures", solved.pictures());
         model.put("takenOff", WallFootWords.takenOff(solved.answer()));
         view.show(ctx, status, "wall-foot-result", model);
     }
