@@ -26,8 +26,8 @@ public final class FootDrawing {
         this.sheet = sheet;
         this.section = section;
         double left = MARGIN + NUMBERS;
-        double width = sheet.width() - left - (sheet.roomy() ? 180 : 132);
-        this.scale = FootScale.fitting(section, left, HEAD, width, sheet.roomy() ? 480 : 360);
+        double width = sheet.width() - left - (sheet.roomy() ? 150 : 124);
+        this.scale = FootScale.fitting(section, left, HEAD, width, sheet.roomy() ? 540 : 380);
         this.levels = IsothermLevels.between(0, 100);
     }
 
@@ -168,7 +168,9 @@ public final class FootDrawing {
         Label label = Label.empty().and(isothermWords(), width, TextStyle.PLAIN);
         if (!unlabelled.isEmpty()) {
             label = label.and(
-                    "No room for a number at: " + String.join(", ", unlabelled) + " %.", width, TextStyle.PLAIN);
+                    "Close together, without a number: " + String.join(", ", unlabelled) + " %.",
+                    width,
+                    TextStyle.PLAIN);
         }
         label = label.and(cutWords(), width, TextStyle.QUIET);
         canvas.label(new Point(MARGIN, from + label.height() / 2), label, TextStyle.Anchor.START);
@@ -177,9 +179,10 @@ public final class FootDrawing {
 
     private String isothermWords() {
         List<Double> values = levels.values();
-        return "Lines of equal temperature from " + levels.text(values.get(0)) + " to "
+        return "Lines of equal temperature every " + levels.text(levels.step()) + " %, from "
+                + levels.text(values.get(0)) + " to "
                 + levels.text(values.get(values.size() - 1))
-                + " %: the share of the difference between inside (100 %) and outdoors (0 %).";
+                + " % of the difference between inside, 100 %, and outdoors, 0 %.";
     }
 
     private String cutWords() {

@@ -33,11 +33,11 @@ public record WallFootView(
     /** Ground shown below whatever reaches deepest, m. */
     private static final double BELOW = 0.25;
 
-    private static final double LEAST_BESIDE = 0.6;
-    private static final double LEAST_ABOVE = 0.4;
+    private static final double LEAST_BESIDE = 0.45;
+    private static final double LEAST_ABOVE = 0.35;
 
     /** Least width of the window over its height. */
-    private static final double SHAPE = 0.9;
+    private static final double SHAPE = 0.8;
 
     /**
      * Solves the junction once more, on one grid.

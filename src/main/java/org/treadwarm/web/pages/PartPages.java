@@ -7,7 +7,6 @@ import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -86,25 +85,10 @@ final class PartPages {
         model.put("back", "/jobs/" + job.id());
         model.put("backWords", "Back to the job");
         model.put("quick", false);
-        model.put("feet", feet(job.id(), document, part));
+        model.put("feet", WallFootOffers.of(job, document, part));
         model.put("materials", Materials.all());
         model.putAll(Answer.of(document, part));
         view.show(ctx, status, "part", model);
-    }
-
-    /** The ways to what can be solved in section: titles and addresses. */
-    private static Map<String, String> feet(String job, JsonNode document, Part part) {
-        Map<String, String> feet = new LinkedHashMap<>();
-        JsonNode room = document.at(part.pointer());
-        for (JsonNode junction : part.isRoom() ? room.path("junctions") : room.path("none")) {
-            String id = junction.path("id").asText();
-            if (WallFootDraft.isFoot(room, junction) && !id.isEmpty()) {
-                feet.put(
-                        Links.part(job, part.kind(), part.key()) + "/wall-foot/" + id,
-                        junction.path("name").asText("junction"));
-            }
-        }
-        return feet;
     }
 
     /** The answer alone, for the form as it stands; nothing is kept. */

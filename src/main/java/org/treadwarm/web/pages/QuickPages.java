@@ -63,7 +63,7 @@ final class QuickPages {
         model.put("back", "/jobs");
         model.put("backWords", "Jobs");
         model.put("quick", true);
-        model.put("feet", Map.of());
+        model.put("feet", WallFootOffers.NONE);
         model.put("document", text(document));
         model.put("materials", Materials.all());
         model.put("revision", 0);

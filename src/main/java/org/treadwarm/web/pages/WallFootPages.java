@@ -101,11 +101,7 @@ final class WallFootPages {
 
     private void blocked(Context ctx, Place place, WallFootDraft.Made made) {
         Map<String, Object> model = model(place);
-        model.put(
-                "blocked",
-                made.draft().isEmpty()
-                        ? made.whyNot()
-                        : "This room has no upright surface to outdoors, so no wall stands at its floor.");
+        model.put("blocked", made.draft().isEmpty() ? made.whyNot() : WallFootDraft.NO_WALL);
         view.show(ctx, 200, "wall-foot", model);
     }
 
@@ -148,7 +144,8 @@ final class WallFootPages {
             if (!WallFootDraft.ASKED.contains(key)) {
                 boolean ofWall = key.equals("wall");
                 String words = ofWall && problem.pointer().equals("/wall")
-                        ? "of the wall \"" + wall + "\" no layers with thicknesses are known"
+                        ? "the wall \"" + wall
+                                + "\" is known neither by layers nor by a U-value that is more than its films"
                         : problem.message() + (ofWall ? " (wall \"" + wall + "\")" : "");
                 lacks.put(words, ofWall ? Links.part(place.job().id(), "assemblies", wall) : place.room());
             }
