@@ -24,7 +24,7 @@ class FootDrawingTest {
         assertThat(words)
                 .contains("inside", "outdoors", "ground", "wall 300 mm", "foundation\n600 mm")
                 .contains("heated plane\nabove ground\n150 mm", "50 mm · R 1.43 m²K/W · 400 mm deep")
-                .contains("EPS", "concrete", "Dotted: the finished surface.")
+                .contains("EPS", "concrete", "Dotted: the finished\nsurface.")
                 .contains("Lines of equal temperature every 10 %, from 10 to 90 %");
     }
 
