@@ -21,6 +21,17 @@ public final class SectionsAhead {
         return new SectionsAhead(evaluation.evaluate(plan.values) ? evaluation.sections.unknown() : List.of());
     }
 
+    /** Whether others are the same floors. */
+    @Override
+    public boolean equals(Object other) {
+        return other instanceof SectionsAhead ahead && ahead.unknown.equals(unknown);
+    }
+
+    @Override
+    public int hashCode() {
+        return unknown.hashCode();
+    }
+
     /** Number of different floors. */
     public int count() {
         return unknown.size();

@@ -32,10 +32,12 @@ final class PartPages {
     private final Visitors visitors;
     private final View view;
     private final VersionPages versions;
+    private final SolvingAhead ahead;
 
-    PartPages(JobDesk desk, Visitors visitors, View view, VersionPages versions) {
+    PartPages(JobDesk desk, Visitors visitors, View view, VersionPages versions, SolvingAhead ahead) {
         this.desk = desk;
         this.versions = versions;
+        this.ahead = ahead;
         this.visitors = visitors;
         this.view = view;
     }
@@ -62,7 +64,7 @@ final class PartPages {
     }
 
     private void show(Context ctx, int status, Job job, JsonNode document, Part part, String notice, long revision) {
-        Forms forms = new Forms(document, Judgement.of(document).problems());
+        Forms forms = new Forms(document, Judgement.unsized(document).problems());
         Map<String, Object> model = new HashMap<>();
         String nameError =
                 Optional.<String>ofNullable(ctx.attribute(NAME_ERROR)).orElse("");
@@ -87,7 +89,10 @@ final class PartPages {
         model.put("quick", false);
         model.put("feet", WallFootOffers.of(job, document, part));
         model.put("materials", Materials.all());
-        model.putAll(Answer.of(document, part));
+        model.putAll(
+                SolvingAhead.isUnsized(ctx)
+                        ? Answer.unsized(document, part, SolvingAhead.STOPPED)
+                        : Answer.of(document, part));
         view.show(ctx, status, "part", model);
     }
 
@@ -101,9 +106,7 @@ final class PartPages {
         }
         ObjectNode document = (ObjectNode) job.get().document().deepCopy();
         part.get().write(document, ctx.formParamMap());
-        Map<String, Object> model = new HashMap<>(Answer.of(document, part.get()));
-        model.put("part", part.get());
-        view.show(ctx, 200, "answer", model);
+        ahead.preview(ctx, view, document, part.get());
     }
 
     void save(Context ctx) {
@@ -190,6 +193,10 @@ final class PartPages {
         boolean problems = now.isPresent()
                 && saved.problems().stream().anyMatch(problem -> now.get().holds(problem.pointer()));
         if (action.equals("save") && problems) {
+            String address = Links.part(job.id(), part.kind(), key);
+            if (ahead.waits(ctx, saved.document(), address, address + "?" + SolvingAhead.UNSIZED)) {
+                return;
+            }
             show(
                     ctx,
                     422,

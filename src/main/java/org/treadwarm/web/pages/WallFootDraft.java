@@ -66,7 +66,7 @@ record WallFootDraft(Room room, HeatedFloor floor, JsonNode document, String roo
         if (!document.at(part.pointer() + "/heatedFloor/ground/kind").asText().equals("slab")) {
             return Made.not("Only a heated floor on a slab on the ground has a wall foot that is solved here.");
         }
-        Optional<Survey> survey = Partial.of(document).judgement().survey();
+        Optional<Survey> survey = Partial.unsized(document).judgement().survey();
         Optional<Room> room = survey.stream()
                 .flatMap(all -> all.rooms().stream())
                 .filter(each -> each.id().equals(Optional.of(part.key())))
