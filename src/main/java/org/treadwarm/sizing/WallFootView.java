@@ -1,5 +1,6 @@
 package org.treadwarm.sizing;
 
+import java.util.Arrays;
 import java.util.Optional;
 import java.util.function.BooleanSupplier;
 import org.treadwarm.physics.section.FootWindow;
@@ -11,22 +12,33 @@ import org.treadwarm.units.Reading;
 
 /**
  * The junction of a solved wall foot, for drawing: as much of the section as shows the floor's layers, the foundation down to 1.5 m and
- * the edge insulation. The map belongs to whoever asked.
+ * the edge insulation. The arrays belong to whoever asked.
  *
- * @param window the part of the section
+ * @param inward floor that is shown, m
+ * @param outward ground outside that is shown, m
+ * @param upward wall that is shown above the heated plane, m
+ * @param downward what is shown below it, m
  * @param slabDepth of all layers below the heated plane, m
  * @param wallThickness m
  * @param wallResistance of the wall without films, m²·K/W
  * @param edge whether the edge insulation is in it
- * @param map temperatures as shares of the difference between inside, 1, and outside, 0
+ * @param x places of the columns from the left end of what is shown, m
+ * @param depth places of the rows from its upper end, m
+ * @param share temperature by row, then by column, as share of the difference between inside, 1, and outdoors, 0; NaN in air
  */
+@SuppressWarnings("ArrayRecordComponent")
 public record WallFootView(
-        FootWindow window,
+        double inward,
+        double outward,
+        double upward,
+        double downward,
         double slabDepth,
         double wallThickness,
         double wallResistance,
         boolean edge,
-        TemperatureMap map) {
+        double[] x,
+        double[] depth,
+        double[][] share) {
     /** Of the foundation no more is shown, m. */
     public static final double DEEPEST_SHOWN = 1.5;
 
@@ -53,13 +65,28 @@ public record WallFootView(
         Optional<EdgeInsulation> strip = edge ? WallFootEvaluation.strip(question) : Optional.empty();
         WallFoot foot = WallFootEvaluation.foot(question, strip);
         FootWindow window = window(question, foot);
+        TemperatureMap map = foot.map(window, stopped);
+        int rows = map.y().length;
+        double[] depth = new double[rows];
+        double[][] share = new double[rows][];
+        for (int row = 0; row < rows; row++) {
+            depth[row] = Math.max(0, window.upward() - map.y()[rows - 1 - row]);
+            share[row] = map.temperature()[rows - 1 - row];
+        }
         return new WallFootView(
-                window,
+                window.inward(),
+                window.outward(),
+                window.upward(),
+                window.downward(),
                 slabDepth(foot),
                 foot.wall().thickness(),
                 foot.wall().thickness() / foot.wall().conductivity(),
                 edge,
-                foot.map(window, stopped));
+                Arrays.stream(map.x())
+                        .map(place -> Math.max(0, place + window.inward()))
+                        .toArray(),
+                depth,
+                share);
     }
 
     /** The same window with and without the edge insulation, so that both can be compared. */

@@ -9,7 +9,6 @@ import org.junit.jupiter.api.Test;
 import org.treadwarm.intake.Document;
 import org.treadwarm.intake.Intake;
 import org.treadwarm.intake.Intake.Outcome;
-import org.treadwarm.physics.section.TemperatureMap;
 import org.treadwarm.survey.WallFootQuestion;
 
 class WallFootViewTest {
@@ -34,25 +33,21 @@ class WallFootViewTest {
     @Test
     void showsTheJunctionFromInsideToOutdoors() {
         WallFootView view = WallFootView.of(question(QUESTION), true, () -> false);
-        TemperatureMap map = view.map();
-
         assertThat(view.slabDepth()).isEqualTo(0.1, within(1e-12));
         assertThat(view.wallResistance()).isEqualTo(0.6, within(1e-12));
-        assertThat(at(map, -0.3, 0.2)).isNaN();
-        assertThat(at(map, 0.5, 0.0)).isNaN();
-        assertThat(at(map, -0.4, 0)).isEqualTo(1, within(1e-3));
+        assertThat(at(view, -0.3, 0.2)).isNaN();
+        assertThat(at(view, 0.5, 0.0)).isNaN();
+        assertThat(at(view, -0.4, 0)).isEqualTo(1, within(1e-3));
         double films = 0.13 + 0.6 + 0.04;
-        assertThat(at(map, 0, view.window().upward())).isEqualTo(1 - 0.13 / films, within(0.02));
-        assertThat(Arrays.stream(map.temperature()).flatMapToDouble(Arrays::stream))
+        assertThat(at(view, 0, view.upward())).isEqualTo(1 - 0.13 / films, within(0.02));
+        assertThat(Arrays.stream(view.share()).flatMapToDouble(Arrays::stream))
                 .allMatch(share -> Double.isNaN(share) || share >= 0 && share <= 1 + 1e-9);
     }
 
     @Test
     void theInsulatedEdgeLeavesTheFoundationColder() {
-        TemperatureMap with =
-                WallFootView.of(question(QUESTION), true, () -> false).map();
-        TemperatureMap without =
-                WallFootView.of(question(QUESTION), false, () -> false).map();
+        WallFootView with = WallFootView.of(question(QUESTION), true, () -> false);
+        WallFootView without = WallFootView.of(question(QUESTION), false, () -> false);
 
         assertThat(at(with, 0.1, -0.05)).isLessThan(at(without, 0.1, -0.05) - 0.01);
     }
@@ -64,13 +59,13 @@ class WallFootViewTest {
                 false,
                 () -> false);
 
-        assertThat(view.window().inward()).isEqualTo(0.3, within(1e-12));
-        assertThat(view.map().x()[0]).isEqualTo(-0.3, within(1e-12));
+        assertThat(view.inward()).isEqualTo(0.3, within(1e-12));
+        assertThat(view.x()[0]).isZero();
     }
 
-    /** The lattice point nearest to a place. */
-    private static double at(TemperatureMap map, double x, double y) {
-        return map.temperature()[nearest(map.y(), y)][nearest(map.x(), x)];
+    /** The lattice point nearest to a place outward of the wall's inner face and above the heated plane. */
+    private static double at(WallFootView view, double outward, double upward) {
+        return view.share()[nearest(view.depth(), view.upward() - upward)][nearest(view.x(), outward + view.inward())];
     }
 
     private static int nearest(double[] places, double wanted) {

@@ -9,7 +9,6 @@ import java.util.Optional;
 import java.util.Set;
 import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Partial;
-import org.treadwarm.physics.envelope.HeatFlow;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Dimensions;
 import org.treadwarm.survey.Direction;
@@ -165,10 +164,10 @@ record WallFootDraft(Room room, HeatedFloor floor, JsonNode document, String roo
         Assembly assembly = survey.assemblies().get(wall);
         double inside = assembly.insideCoefficient()
                 .map(film -> 1 / film.value())
-                .orElse(Films.inside(HeatFlow.HORIZONTAL.word()));
+                .orElse(Films.inside(Direction.HORIZONTAL.word()));
         double outside = assembly.outsideCoefficient()
                 .map(film -> 1 / film.value())
-                .orElse(Films.outside(HeatFlow.HORIZONTAL.word()));
+                .orElse(Films.outside(Direction.HORIZONTAL.word()));
         return assembly.uValue()
                 .map(u -> 1 / u.value() - inside - outside)
                 .filter(resistance -> resistance > LEAST_RESISTANCE)

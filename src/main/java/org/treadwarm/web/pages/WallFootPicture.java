@@ -12,7 +12,6 @@ import org.treadwarm.draw.FootSection.EdgeStrip;
 import org.treadwarm.draw.MaterialFamily;
 import org.treadwarm.draw.Sheet;
 import org.treadwarm.draw.TemperatureField;
-import org.treadwarm.physics.section.TemperatureMap;
 import org.treadwarm.sizing.WallFootView;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.LayerMatter;
@@ -69,10 +68,10 @@ final class WallFootPicture {
                 conductivity(question.footConductivity()),
                 conductivity(question.soilConductivity()),
                 strip(question, view),
-                view.window().inward(),
-                view.window().outward(),
-                view.window().upward(),
-                view.window().downward(),
+                view.inward(),
+                view.outward(),
+                view.upward(),
+                view.downward(),
                 field(view));
     }
 
@@ -126,21 +125,11 @@ final class WallFootPicture {
                 name, OptionalDouble.of(thickness), resistance, family, Optional.empty(), List.of());
     }
 
-    /** From the upper left corner down, in percent. */
+    /** In percent. */
     private static TemperatureField field(WallFootView view) {
-        TemperatureMap map = view.map();
-        int rows = map.y().length;
-        double[] x = Arrays.stream(map.x())
-                .map(place -> Math.max(0, place + view.window().inward()))
-                .toArray();
-        double[] depth = new double[rows];
-        double[][] percent = new double[rows][];
-        for (int row = 0; row < rows; row++) {
-            depth[row] = Math.max(0, view.window().upward() - map.y()[rows - 1 - row]);
-            percent[row] = Arrays.stream(map.temperature()[rows - 1 - row])
-                    .map(share -> 100 * share)
-                    .toArray();
-        }
-        return new TemperatureField(x, depth, percent);
+        double[][] percent = Arrays.stream(view.share())
+                .map(row -> Arrays.stream(row).map(share -> 100 * share).toArray())
+                .toArray(double[][]::new);
+        return new TemperatureField(view.x(), view.depth(), percent);
     }
 }
