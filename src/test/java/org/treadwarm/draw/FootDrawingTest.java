@@ -33,7 +33,7 @@ class FootDrawingTest {
         String svg = FootDrawing.draw(Sheet.wide("f"), section(0.3, 0.15, 0.6, true, 1.0));
         assertThat(svg.replace('\u00a0', ' '))
                 .contains("Wall foot in section: brick")
-                .contains("Inside at the left, outdoors at the right of the wall brick, 300 mm.")
+                .contains("Inside at the left, outdoors at the right of the brick, 300 mm.")
                 .contains("Upright at the floor&#39;s edge: edge insulation 50 mm, 400 mm deep.");
         assertThat(FootDrawing.draw(Sheet.wide("f"), section(0.3, 0.15, 0.6, false, 1.0)))
                 .contains("No edge insulation.");

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Function;
 import java.util.stream.Collectors;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.PartLimit;
@@ -79,43 +80,35 @@ final class LayoutLines {
             return;
         }
         boolean carries = floor.verdict() == Verdict.CARRIES;
-        List<Row> rows = floor.parts().stream()
-                .map(part -> row(part, carries ? part.atRequiredFlux() : part.atCarryingFlux()))
-                .toList();
+        Function<PartSizing, PartState> state = carries ? PartSizing::atRequiredFlux : PartSizing::atCarryingFlux;
+        List<String> heads = new ArrayList<>(List.of("Part"));
+        floor.parts().forEach(part -> heads.add(part.name()));
+        List<Row> rows = List.of(
+                row(floor, "Zone", PartSizing::zone),
+                row(floor, "Area, m²", part -> Numbers.fixed(part.area(), 1)),
+                row(floor, "Spacing, mm", part -> Numbers.fixed(1000 * part.spacing(), 0)),
+                row(
+                        floor,
+                        "Gives, W/m²",
+                        part -> Numbers.fixed(state.apply(part).flux(), 1)),
+                row(
+                        floor,
+                        "Warmest point, °C",
+                        part -> Numbers.fixed(state.apply(part).surfaceTemperature(), 1)),
+                row(floor, "Down, W/m²", part -> Numbers.fixed(state.apply(part).downwardFlux(), 1)));
         layouts.add(new Layout(
                 "Parts of the floor",
                 "",
                 List.of(),
-                new Grid(
-                        "Parts of the floor",
-                        List.of(
-                                "Part",
-                                "Area, m²",
-                                "Spacing, mm",
-                                "Gives, W/m²",
-                                "Warmest point, °C",
-                                "Down, W/m²",
-                                "May give, W/m²"),
-                        rows),
+                new Grid("Parts of the floor", heads, rows),
                 floor.parts().stream().flatMap(part -> lowest(part).stream()).toList(),
                 "All parts are fed alike, and the floor gives their mean over its area: here "
                         + (carries ? "the required flux" : "the carrying flux, which is too little")
                         + ". A peripheral strip is at most 1 m wide, along outer walls (EN 1264-3)."));
     }
 
-    private static Row row(PartSizing part, PartState state) {
-        return new Row(
-                part.name() + ", " + part.zone(),
-                List.of(
-                        Numbers.fixed(part.area(), 1),
-                        Numbers.fixed(1000 * part.spacing(), 0),
-                        Numbers.fixed(state.flux(), 1),
-                        Numbers.fixed(state.surfaceTemperature(), 1),
-                        Numbers.fixed(state.downwardFlux(), 1),
-                        part.limits().stream().mapToDouble(PartLimit::maximumFlux).min().stream()
-                                .mapToObj(flux -> Numbers.fixed(flux, 1))
-                                .findFirst()
-                                .orElse("no limit")));
+    private static Row row(FloorSizing floor, String name, Function<PartSizing, String> cell) {
+        return new Row(name, floor.parts().stream().map(cell).toList());
     }
 
     private static Optional<Line> lowest(PartSizing part) {
@@ -173,21 +166,28 @@ final class LayoutLines {
     }
 
     /** What limits say of a quantity: each once, and whether a value is beyond it. */
-    static String judged(String name, List<PracticeJudgement> limits) {
+    private static String judged(String name, List<PracticeJudgement> limits) {
         boolean kept = limits.stream().allMatch(limit -> limit.margin() >= 0);
-        String all = limits.stream()
-                .map(limit -> (isMost(limit) ? "at most " : "at least ") + shown(name, limit.limit()) + ", "
-                        + limit.source()
-                        + (limit.margin() < 0 ? ": beyond it" : ""))
-                .distinct()
-                .collect(Collectors.joining("; "));
-        return (kept ? KEPT : LOOK_AGAIN) + all;
+        return opening(kept)
+                + limits.stream()
+                        .map(limit -> words(name, limit) + (limit.margin() < 0 ? ": beyond it" : ""))
+                        .collect(Collectors.joining("; "));
+    }
+
+    static String opening(boolean kept) {
+        return kept ? KEPT : LOOK_AGAIN;
+    }
+
+    /** A limit and where it comes from. */
+    static String words(String name, PracticeJudgement limit) {
+        return (isMost(limit) ? "at most " : "at least ") + shown(name, limit.limit()) + ", " + limit.source();
     }
 
     private static boolean isMost(PracticeJudgement limit) {
         return Math.abs(limit.limit() - limit.value() - limit.margin()) <= 1e-9 * Math.abs(limit.limit());
     }
 
+    /** A value of a quantity that practice limits, with its unit. */
     static String shown(String name, double value) {
         return switch (name) {
             case "loop length" -> Numbers.fixed(value, 0) + " m";

@@ -63,7 +63,7 @@ final class WallFootPicture {
                 slab,
                 question.above().value(),
                 question.heatedPlane().value(),
-                solid("wall " + wall, view.wallThickness(), view.wallResistance(), family(question)),
+                solid("wall: " + wall, view.wallThickness(), view.wallResistance(), family(question)),
                 question.foundation().value(),
                 conductivity(question.footConductivity()),
                 conductivity(question.soilConductivity()),

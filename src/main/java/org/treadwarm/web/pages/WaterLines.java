@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Function;
 import java.util.stream.Collectors;
 import org.treadwarm.sizing.Sizing.LoopValve;
 import org.treadwarm.sizing.Sizing.PartLoops;
@@ -110,28 +111,25 @@ final class WaterLines {
     }
 
     private Grid grid() {
-        List<Row> rows = new ArrayList<>();
-        for (Loops each : loops) {
-            List<String> cells = new ArrayList<>(List.of(
-                    Integer.toString(each.count()),
-                    Numbers.fixed(each.length(), 1),
-                    Numbers.fixed(60_000 * each.volumeFlow() / each.count(), 2),
-                    Numbers.fixed(each.drop() / 1000, 2)));
-            cells.add(throttled(each.part())
-                    .map(valve -> Numbers.fixed(valve.throttled() / 1000, 2))
-                    .orElse("not known"));
-            rows.add(new Row(each.part().isEmpty() ? "whole floor" : each.part(), cells));
-        }
+        List<String> heads = new ArrayList<>(List.of("Laid in"));
+        loops.forEach(each -> heads.add(each.part().isEmpty() ? "whole floor" : each.part()));
         return new Grid(
                 "Loops to lay, and their valves",
+                heads,
                 List.of(
-                        "Laid in",
-                        "Loops",
-                        "Each, feeders included, m",
-                        "Flow of each, l/min",
-                        "Drop of each, kPa",
-                        "Throttle at each valve, kPa"),
-                rows);
+                        row("Loops", each -> Integer.toString(each.count())),
+                        row("Length of each, feeders included, m", each -> Numbers.fixed(each.length(), 1)),
+                        row("Flow of each, l/min", each -> Numbers.fixed(60_000 * each.volumeFlow() / each.count(), 2)),
+                        row("Drop of each, kPa", each -> Numbers.fixed(each.drop() / 1000, 2)),
+                        row(
+                                "To be throttled at each valve, kPa",
+                                each -> throttled(each.part())
+                                        .map(valve -> Numbers.fixed(valve.throttled() / 1000, 2))
+                                        .orElse("not known"))));
+    }
+
+    private Row row(String name, Function<Loops, String> cell) {
+        return new Row(name, loops.stream().map(cell).toList());
     }
 
     private Optional<LoopValve> throttled(String part) {
@@ -172,32 +170,52 @@ final class WaterLines {
                         : "the worst loop of the job");
     }
 
-    /** The limits of practice, those of the parts side by side; what must be looked at again stands first. */
+    /** A limit of practice and the part it is of; the whole floor where that has no name. */
+    private record Of(String part, PracticeJudgement limit) {}
+
+    /** The limits of practice, those of the parts in one line; what must be looked at again stands first. */
     private List<Line> limits() {
-        Map<String, List<PracticeJudgement>> byName = new LinkedHashMap<>();
-        Map<String, List<String>> values = new LinkedHashMap<>();
-        collect("", layout.limits(), byName, values);
-        layout.parts().forEach(part -> collect(part.name(), part.limits(), byName, values));
+        Map<String, List<Of>> byName = new LinkedHashMap<>();
+        layout.limits().forEach(limit -> add(byName, new Of("", limit)));
+        layout.parts().forEach(part -> part.limits().forEach(limit -> add(byName, new Of(part.name(), limit))));
         List<Line> beyond = new ArrayList<>();
         List<Line> kept = new ArrayList<>();
-        byName.forEach((name, limits) -> {
-            boolean good = limits.stream().allMatch(limit -> limit.margin() >= 0);
-            String shown = values.get(name).stream().distinct().collect(Collectors.joining(", "));
-            (good ? kept : beyond).add(new Line(LayoutLines.capital(name), shown, LayoutLines.judged(name, limits)));
+        byName.forEach((name, all) -> {
+            boolean good = all.stream().allMatch(each -> each.limit().margin() >= 0);
+            (good ? kept : beyond).add(limit(name, all, good));
         });
         beyond.addAll(kept);
         return beyond;
     }
 
-    private static void collect(
-            String part,
-            List<PracticeJudgement> limits,
-            Map<String, List<PracticeJudgement>> byName,
-            Map<String, List<String>> values) {
-        for (PracticeJudgement limit : limits) {
-            byName.computeIfAbsent(limit.name(), name -> new ArrayList<>()).add(limit);
-            values.computeIfAbsent(limit.name(), name -> new ArrayList<>())
-                    .add((part.isEmpty() ? "" : part + "\u00a0") + LayoutLines.shown(limit.name(), limit.value()));
-        }
+    private static void add(Map<String, List<Of>> byName, Of of) {
+        byName.computeIfAbsent(of.limit().name(), name -> new ArrayList<>()).add(of);
+    }
+
+    /** Values in the order of the parts, once where they are all the same. */
+    private static Line limit(String name, List<Of> all, boolean good) {
+        Map<String, String> values = new LinkedHashMap<>();
+        all.forEach(each ->
+                values.put(each.part(), LayoutLines.shown(name, each.limit().value())));
+        Map<String, List<Of>> byLimit = new LinkedHashMap<>();
+        all.forEach(each -> byLimit.computeIfAbsent(LayoutLines.words(name, each.limit()), words -> new ArrayList<>())
+                .add(each));
+        String judged = byLimit.entrySet().stream()
+                .map(each -> each.getKey() + beyond(each.getValue()))
+                .collect(Collectors.joining("; "));
+        return new Line(
+                LayoutLines.capital(name),
+                values.values().stream().distinct().count() == 1
+                        ? values.values().iterator().next()
+                        : String.join(" / ", values.values()),
+                LayoutLines.opening(good) + judged);
+    }
+
+    private static String beyond(List<Of> limits) {
+        List<Of> beyond =
+                limits.stream().filter(each -> each.limit().margin() < 0).toList();
+        String parts =
+                beyond.stream().map(Of::part).filter(part -> !part.isEmpty()).collect(Collectors.joining(", "));
+        return beyond.isEmpty() ? "" : ": beyond it" + (parts.isEmpty() ? "" : " in " + parts);
     }
 }
