@@ -82,11 +82,11 @@ final class WaterLines {
     private String summary() {
         String laid = loops.stream()
                 .map(each -> (each.part().isEmpty() ? "" : each.part() + ": ") + each.count()
-                        + (each.count() == 1 ? " loop of " : " loops of ") + Numbers.fixed(each.length(), 1) + " m"
+                        + (each.count() == 1 ? " loop of " : " loops of ") + Numbers.fixed(each.length(), 1) + "\u00a0m"
                         + (each.count() == 1 ? "" : " each"))
                 .collect(Collectors.joining("; "));
-        return LayoutLines.capital(laid) + ". Water " + Numbers.fixed(layout.supplyTemperature(), 1) + " °C in, "
-                + Numbers.fixed(layout.returnTemperature(), 1) + " °C out.";
+        return LayoutLines.capital(laid) + ". Water " + Numbers.fixed(layout.supplyTemperature(), 1) + "\u00a0°C in, "
+                + Numbers.fixed(layout.returnTemperature(), 1) + "\u00a0°C out.";
     }
 
     private List<Line> top() {
