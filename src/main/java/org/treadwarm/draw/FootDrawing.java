@@ -229,7 +229,7 @@ public final class FootDrawing {
                         + Figures.thickness(strip.layer().thickness().orElseThrow()) + ", "
                         + Figures.thickness(strip.depth()) + " deep. ")
                 .orElse("No edge insulation. ");
-        return "Inside at the left, outdoors at the right of the wall "
+        return "Inside at the left, outdoors at the right of the "
                 + section.wall().name() + ", "
                 + Figures.thickness(section.wallThickness()) + ". Below the heated plane: " + slab
                 + ", then ground. The heated plane lies " + Figures.thickness(section.heatedPlane())

@@ -9,6 +9,7 @@ import java.util.Set;
 import java.util.concurrent.CancellationException;
 import java.util.concurrent.atomic.LongAdder;
 import java.util.function.BooleanSupplier;
+import java.util.function.DoubleConsumer;
 import org.treadwarm.physics.section.FloorResponse;
 
 /**
@@ -74,13 +75,13 @@ final class Sections {
      *
      * @throws java.util.concurrent.CancellationException when asked to give up; then nothing is remembered
      */
-    static void solve(SectionGeometry geometry, BooleanSupplier stopped) {
-        remember(geometry, tried(geometry, stopped));
+    static void solve(SectionGeometry geometry, BooleanSupplier stopped, DoubleConsumer progress) {
+        remember(geometry, tried(geometry, stopped, progress));
     }
 
-    private static Tried tried(SectionGeometry geometry, BooleanSupplier stopped) {
+    private static Tried tried(SectionGeometry geometry, BooleanSupplier stopped, DoubleConsumer progress) {
         try {
-            return new Tried(Optional.of(geometry.solve(stopped)), "");
+            return new Tried(Optional.of(geometry.solve(stopped, progress)), "");
         } catch (CancellationException stop) {
             throw stop;
         } catch (IllegalArgumentException | IllegalStateException problem) {
@@ -111,7 +112,7 @@ final class Sections {
                 return Optional.empty();
             }
             solved++;
-            tried = tried(geometry, stopped);
+            tried = tried(geometry, stopped, share -> {});
             remember(geometry, tried);
         }
         whyNot = tried.whyNot();
