@@ -5,9 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.net.URI;
 import java.util.concurrent.atomic.AtomicInteger;
-import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.AfterEach;
-import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.treadwarm.jobs.Job;
@@ -26,19 +24,11 @@ class SolvingAheadPagesTest {
     private Job job;
     private Runnable free;
 
-    @BeforeAll
-    static void start() {
-        server = RunningServer.start();
-        visitor = new Visitor(server, server.session(server.owner()));
-    }
-
-    @AfterAll
-    static void stop() {
-        server.close();
-    }
-
+    /** A server of its own for each test, as what one leaves waiting would keep the next one out. */
     @BeforeEach
     void busy() {
+        server = RunningServer.start();
+        visitor = new Visitor(server, server.session(server.owner()));
         ObjectNode survey = RunningServer.studio();
         ((ObjectNode) survey.at(HEATER)).put("spacing", newSpacing() + " mm");
         job = server.job("new floor", survey);
@@ -46,8 +36,9 @@ class SolvingAheadPagesTest {
     }
 
     @AfterEach
-    void free() {
+    void stop() {
         free.run();
+        server.close();
     }
 
     private static String newSpacing() {
