@@ -50,11 +50,11 @@ public final class JobDesk {
     /** A job read and judged, but not kept yet. */
     public record Prepared(String name, JsonNode document, Judgement judged) {}
 
-    /** Reads and judges a job that shall be started, which may take long. */
+    /** Reads and judges a job that shall be started, which takes its time when it is large. */
     public Prepared prepared(String name, JsonNode survey) {
         JsonNode document = survey.deepCopy();
         Ids.give(document, Document.mapper().createObjectNode());
-        return new Prepared(name, document, Judgement.of(document));
+        return new Prepared(name, document, Judgement.unsized(document));
     }
 
     /** Starts a job, which only has to be kept. */
@@ -74,7 +74,7 @@ public final class JobDesk {
             return new Saving.Missing();
         }
         Ids.give(document, Pieces.survey(current.get().content().pieces()));
-        Judgement judged = Judgement.of(document);
+        Judgement judged = Judgement.unsized(document);
         SaveResult result =
                 jobs.save(id, expectedRevision, content(name, document, judged), words(name, document), change);
         if (result instanceof SaveResult.Saved saved) {
@@ -196,7 +196,7 @@ public final class JobDesk {
 
     private static Job job(JobRevision revision) {
         JsonNode document = Pieces.survey(revision.content().pieces());
-        return job(revision.header(), document, Judgement.of(document));
+        return job(revision.header(), document, Judgement.unsized(document));
     }
 
     private static Job job(RevisionHeader header, JsonNode document, Judgement judged) {
@@ -209,7 +209,6 @@ public final class JobDesk {
                 header.note(),
                 document,
                 judged.survey(),
-                judged.sizing(),
                 judged.problems());
     }
 }

@@ -60,7 +60,7 @@ final class Evaluation {
     private final double[] solved;
 
     Evaluation(Plan plan) {
-        this(plan, new Sections());
+        this(plan, new Sections(() -> false));
     }
 
     Evaluation(Plan plan, Sections sections) {

@@ -32,7 +32,7 @@ public final class Api {
         this.warmUps = new WarmUpApi();
         this.wallFeet = new WallFootApi();
         this.jobs = new JobsApi(desk, new Repeats(store.keptAnswers()));
-        this.sheets = new SheetsApi(sheetDesk);
+        this.sheets = new SheetsApi(sheetDesk, desk);
         this.rooms = new RoomsApi(desk);
         this.history = new HistoryApi(desk);
     }

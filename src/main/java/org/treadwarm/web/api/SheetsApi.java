@@ -1,7 +1,10 @@
 package org.treadwarm.web.api;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
 import java.util.Optional;
+import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.sheets.FrozenText;
 import org.treadwarm.sheets.Issuing;
 import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.sheets.Verification;
@@ -16,9 +19,11 @@ import org.treadwarm.web.security.KeyGuard;
 /** Issued sheets over the API. */
 final class SheetsApi {
     private final SheetDesk desk;
+    private final JobDesk jobs;
 
-    SheetsApi(SheetDesk desk) {
+    SheetsApi(SheetDesk desk, JobDesk jobs) {
         this.desk = desk;
+        this.jobs = jobs;
     }
 
     /** {@code POST /api/v1/jobs/{id}/sheets}. */
@@ -26,6 +31,11 @@ final class SheetsApi {
         Optional<SheetBodies.Order> order = SheetBodies.order(ctx);
         if (order.isPresent()) {
             String job = ctx.pathParam("id");
+            // Sized once before, within the time that one request may take; issuing has its floors at hand then.
+            Optional<JsonNode> document = jobs.document(job, order.get().revision());
+            if (document.isPresent() && SizingApi.judged(ctx, document.get()).isEmpty()) {
+                return;
+            }
             answer(ctx, desk.issue(job, order.get().revision(), order.get().replaces(), who(ctx)));
         }
     }
@@ -63,6 +73,12 @@ final class SheetsApi {
 
     /** {@code GET /api/v1/sheets/{number}/verification}. */
     void verification(Context ctx) {
+        Optional<Sheet> sheet = number(ctx).flatMap(desk::find);
+        if (sheet.isPresent()
+                && SizingApi.judged(ctx, FrozenText.tree(sheet.get().content().survey()))
+                        .isEmpty()) {
+            return;
+        }
         Optional<Verification> verification = number(ctx).flatMap(desk::verify);
         if (verification.isPresent()) {
             SizingApi.json(ctx, 200, verification.get());

@@ -77,7 +77,7 @@ final class JobView {
 
     /** What the page is made from. */
     Map<String, Object> model(String jobName, List<ErrorView> more, String notice) {
-        Forms forms = new Forms(document, Judgement.of(document).problems());
+        Forms forms = new Forms(document, Judgement.unsized(document).problems());
         ObjectView site = forms.form("/site", "Site", Site.class);
         List<ErrorView> errors = new ArrayList<>(more);
         errors.addAll(forms.errors());
