@@ -12,6 +12,8 @@ import com.fasterxml.jackson.databind.module.SimpleModule;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import com.fasterxml.jackson.databind.ser.std.ToStringSerializer;
 import com.fasterxml.jackson.datatype.jdk8.Jdk8Module;
+import java.io.IOException;
+import java.io.OutputStream;
 import java.time.Instant;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.survey.Survey;
@@ -47,6 +49,11 @@ public final class Json {
         } catch (JsonProcessingException e) {
             throw new IllegalStateException("an answer cannot be written", e);
         }
+    }
+
+    /** Writes an answer as UTF-8 text. */
+    public static void write(Object answer, OutputStream to) throws IOException {
+        MAPPER.writeValue(to, answer);
     }
 
     /** A sizing as UTF-8 text, with its working. */

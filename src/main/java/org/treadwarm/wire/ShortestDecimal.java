@@ -20,7 +20,10 @@ final class ShortestDecimal {
     private static final long FRACTION_MASK = HIDDEN_BIT - 1;
     private static final long MASK_63 = Long.MAX_VALUE;
 
-    private static final long BILLION = 1_000_000_000;
+    private static final long HUNDRED_MILLION = 100_000_000;
+
+    /** The digits of 00 to 99. */
+    private static final char[] PAIRS = new char[200];
 
     /** The least number of 1, 2, 3 digits and so on. */
     private static final long[] POWERS_OF_TEN = new long[18];
@@ -36,6 +39,10 @@ final class ShortestDecimal {
     private static final long[] LOW = new long[HIGH.length];
 
     static {
+        for (int i = 0; i < 100; i++) {
+            PAIRS[2 * i] = (char) ('0' + i / 10);
+            PAIRS[2 * i + 1] = (char) ('0' + i % 10);
+        }
         POWERS_OF_TEN[0] = 1;
         for (int i = 1; i < POWERS_OF_TEN.length; i++) {
             POWERS_OF_TEN[i] = 10 * POWERS_OF_TEN[i - 1];
@@ -120,6 +127,10 @@ final class ShortestDecimal {
     private static int layOut(long digits, int exponent, char[] to, int at) {
         long significant = digits;
         int power = exponent;
+        while (significant >= HUNDRED_MILLION && significant % HUNDRED_MILLION == 0) {
+            significant /= HUNDRED_MILLION;
+            power += 8;
+        }
         while (significant != 0 && significant % 10 == 0) {
             significant /= 10;
             power++;
@@ -163,24 +174,35 @@ final class ShortestDecimal {
 
     private static int digits(long digits, int count, char[] to, int at) {
         int end = at + count;
-        long top = digits;
-        int i = end - 1;
-        while (top >= BILLION) {
-            long above = top / BILLION;
-            int nine = (int) (top - above * BILLION);
-            for (int stop = i - 9; i > stop; i--) {
-                int tenth = nine / 10;
-                to[i] = (char) ('0' + (nine - 10 * tenth));
-                nine = tenth;
+        int i = end;
+        long above = digits;
+        while (above >= HUNDRED_MILLION) {
+            long rest = above / HUNDRED_MILLION;
+            int eight = (int) (above - rest * HUNDRED_MILLION);
+            for (int pair = 0; pair < 4; pair++) {
+                int hundredth = eight / 100;
+                i = pair(eight - 100 * hundredth, to, i);
+                eight = hundredth;
             }
-            top = above;
+            above = rest;
         }
-        for (int rest = (int) top; i >= at; i--) {
-            int tenth = rest / 10;
-            to[i] = (char) ('0' + (rest - 10 * tenth));
-            rest = tenth;
+        int rest = (int) above;
+        while (i - at >= 2) {
+            int hundredth = rest / 100;
+            i = pair(rest - 100 * hundredth, to, i);
+            rest = hundredth;
+        }
+        if (i > at) {
+            to[at] = (char) ('0' + rest);
         }
         return end;
+    }
+
+    /** Writes two digits in front of a place. */
+    private static int pair(int number, char[] to, int end) {
+        to[end - 2] = PAIRS[2 * number];
+        to[end - 1] = PAIRS[2 * number + 1];
+        return end - 2;
     }
 
     private static int whole(int number, char[] to, int start) {

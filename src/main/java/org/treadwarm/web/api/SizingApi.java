@@ -2,6 +2,8 @@ package org.treadwarm.web.api;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
+import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.time.Duration;
 import java.util.List;
 import java.util.Optional;
@@ -59,7 +61,11 @@ final class SizingApi {
         }
         Sizing sizing = judged.sizing().get();
         boolean working = "true".equals(ctx.queryParam("working"));
-        json(ctx, 200, working ? Json.withWorking(judged.survey().orElseThrow(), sizing) : Json.bytes(sizing));
+        if (working) {
+            json(ctx, 200, Json.withWorking(judged.survey().orElseThrow(), sizing));
+        } else {
+            stream(ctx, sizing);
+        }
     }
 
     /** {@code POST /api/v1/assemblies/evaluations}: one assembly under given temperatures. */
@@ -132,6 +138,17 @@ final class SizingApi {
 
     static void json(Context ctx, int status, Object answer) {
         json(ctx, status, Json.bytes(answer));
+    }
+
+    /** Writes an answer as it is made, without a copy of its text in between. */
+    private static void stream(Context ctx, Object answer) {
+        ctx.status(200);
+        ctx.contentType("application/json; charset=utf-8");
+        try {
+            Json.write(answer, ctx.outputStream());
+        } catch (IOException e) {
+            throw new UncheckedIOException("the answer could not be sent", e);
+        }
     }
 
     static void json(Context ctx, int status, byte[] text) {
