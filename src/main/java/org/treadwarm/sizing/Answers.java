@@ -4,6 +4,7 @@ import static java.util.OptionalDouble.empty;
 import static java.util.OptionalDouble.of;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -181,6 +182,14 @@ final class Answers {
             case JUNCTION -> "junction";
             case AIR -> "air";
         };
+    }
+
+    /** What the floating spaces settle at. */
+    List<SpaceBalance> spaceBalances() {
+        return Arrays.stream(plan.floatingNodes)
+                .mapToObj(node ->
+                        new SpaceBalance(plan.nodeNames[node], numbers.temperature[node], List.copyOf(paths(node, 0))))
+                .toList();
     }
 
     private SpaceSizing space(int node) {

@@ -253,10 +253,10 @@ class EveryPageTest {
                 headers.remove("refresh");
                 route.fulfill(new Route.FulfillOptions().setResponse(response).setHeaders(headers));
             });
-            tab.open(what.equals("/method") ? what : job);
+            tab.ask(what.equals("/method") ? what : job);
             assertThat(tab.page().locator("progress").count()).isEqualTo(1);
             assertNoFaults(tab);
-            tab.press(tab.page().locator("main form button.quiet"));
+            tab.pressOnce(tab.page().locator("main form button.quiet"));
             assertThat(tab.page().locator("main [role=status]").innerText()).startsWith("Cancelled");
             assertNoFaults(tab);
         } finally {

@@ -65,9 +65,20 @@ final class Tab implements AutoCloseable {
         return page;
     }
 
+    /** Opens a page, and waits for it where it must be computed first. */
     Tab open(String path) {
-        page.navigate(path);
+        ask(path);
+        awaitComputed();
         return this;
+    }
+
+    /** Opens a page, be it one that tells how far a computation is. */
+    void ask(String path) {
+        page.navigate(path);
+    }
+
+    private void awaitComputed() {
+        page.waitForURL(url -> !url.contains("/computations/"));
     }
 
     /** The control at an address of the document. */
@@ -88,8 +99,8 @@ final class Tab implements AutoCloseable {
         field(pointer).selectOption(option);
     }
 
-    /** Taps or clicks, and waits for the page that it leads to. */
-    void press(Locator button) {
+    /** Taps or clicks, and waits for the page that it leads to, be it one that tells how far a computation is. */
+    void pressOnce(Locator button) {
         page.waitForNavigation(() -> {
             if (touch) {
                 button.tap();
@@ -97,6 +108,12 @@ final class Tab implements AutoCloseable {
                 button.click();
             }
         });
+    }
+
+    /** Presses, and waits for the page where it must be computed first. */
+    void press(Locator button) {
+        pressOnce(button);
+        awaitComputed();
     }
 
     /** What went wrong in the tab: messages of errors and warnings, faults of scripts, requests without an answer. */

@@ -1,6 +1,7 @@
 package org.treadwarm.web;
 
 import java.io.StringReader;
+import java.net.URI;
 import java.net.http.HttpResponse;
 import java.util.ArrayList;
 import java.util.List;
@@ -45,6 +46,25 @@ record Page(HttpResponse<String> response, Document document) {
     /** Where it leads, or empty. */
     String location() {
         return response.headers().firstValue("Location").orElse("");
+    }
+
+    /** The path and query that it leads to, or empty. */
+    String leadsTo() {
+        return location().isEmpty() ? "" : pathAndQuery(URI.create(location()));
+    }
+
+    /** Its own path and query. */
+    String address() {
+        return pathAndQuery(response.uri());
+    }
+
+    private static String pathAndQuery(URI uri) {
+        return uri.getRawPath() + (uri.getRawQuery() == null ? "" : "?" + uri.getRawQuery());
+    }
+
+    /** Whether a browser goes on from it by itself, at once or after a while. */
+    boolean looksAgain() {
+        return !location().isEmpty() || response.headers().firstValue("Refresh").isPresent();
     }
 
     /** All elements of a name, in order. */

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.net.URI;
+import java.util.List;
 import java.util.concurrent.atomic.AtomicInteger;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
@@ -50,25 +51,10 @@ class SolvingAheadPagesTest {
                 + job.document().at("/rooms/0/id").textValue();
     }
 
-    private static String path(Page page) {
-        return URI.create(page.location()).getRawPath();
-    }
-
-    /** Follows where a page leads, as a browser does that looks again. */
-    private static Page result(Page first) {
-        Page page = first;
-        while (page.status() == 303
-                || page.response().headers().firstValue("Refresh").isPresent()) {
-            page = visitor.open(
-                    page.status() == 303 ? path(page) : page.response().uri().getRawPath());
-        }
-        return page;
-    }
-
     private static Page progress(Page first) {
         assertThat(first.status()).isEqualTo(303);
-        assertThat(path(first)).startsWith("/computations/");
-        Page page = visitor.open(path(first));
+        assertThat(first.leadsTo()).startsWith("/computations/");
+        Page page = visitor.ask(first.leadsTo());
         assertThat(page.status()).isEqualTo(200);
         assertThat(page.text()).contains("Solving a floor between its heaters", "% is done");
         assertThat(page.response().headers().firstValue("Refresh")).contains("1");
@@ -76,7 +62,7 @@ class SolvingAheadPagesTest {
     }
 
     private static Page cancelled(Page progress) {
-        return visitor.submit(progress.form("csrf").to(progress.response().uri().getRawPath()));
+        return visitor.submit(progress.form("csrf").to(progress.address()));
     }
 
     private static String back(Page cancelled) {
@@ -90,24 +76,41 @@ class SolvingAheadPagesTest {
 
     @Test
     void aRoomTellsHowFarItIsAndGoesOnByItself() {
-        Page waiting = progress(visitor.open(room()));
+        Page waiting = progress(visitor.ask(room()));
 
         free.run();
 
-        Page room = result(visitor.open(waiting.response().uri().getRawPath()));
+        Page room = visitor.open(waiting.address());
         assertThat(room.status()).isEqualTo(200);
-        assertThat(room.response().uri().getRawPath()).isEqualTo(room());
+        assertThat(room.address()).isEqualTo(room());
         assertThat(room.id("answer").orElseThrow().getTextContent()).contains("The numbers");
     }
 
     @Test
     void theSamePageDoesNotBeginTwice() {
-        assertThat(path(visitor.open(room()))).isEqualTo(path(visitor.open(room())));
+        assertThat(visitor.ask(room()).leadsTo()).isEqualTo(visitor.ask(room()).leadsTo());
+    }
+
+    @Test
+    void whatNeedsNoFloorWaitsForNone() {
+        String at = "/jobs/" + job.id();
+
+        Page space = visitor.ask(at + "/spaces/loft");
+        Page preview = visitor.send(space.form("revision").to(at + "/spaces/loft/preview"));
+
+        assertThat(space.id("answer").orElseThrow().getTextContent()).contains("Settles at", "Every path of heat");
+        assertThat(preview.id("answer").orElseThrow().getTextContent())
+                .isEqualTo(space.id("answer").orElseThrow().getTextContent());
+        assertThat(visitor.ask(at + "/assemblies/shed%20wall").text()).contains("U-value");
+        for (String address : List.of("/files/survey.json", "/files/rooms.csv", "/files", "/history/1")) {
+            assertThat(visitor.ask(at + address).status()).as(address).isEqualTo(200);
+        }
+        progress(visitor.ask(at + "/files/results.csv"));
     }
 
     @Test
     void aCancelledRoomCanBeLookedAtAsTyped() {
-        Page cancelled = cancelled(progress(visitor.open(room())));
+        Page cancelled = cancelled(progress(visitor.ask(room())));
 
         assertThat(cancelled.text()).contains("Cancelled; nothing was changed.");
         Page typed = visitor.open(back(cancelled));
@@ -118,7 +121,7 @@ class SolvingAheadPagesTest {
 
     @Test
     void aSaveIsKeptBeforeItsFloorIsSolved() {
-        Page cancelled = cancelled(progress(visitor.open(room())));
+        Page cancelled = cancelled(progress(visitor.ask(room())));
         String spacing = newSpacing();
 
         Page saved = visitor.send(visitor.open(back(cancelled))
@@ -130,7 +133,7 @@ class SolvingAheadPagesTest {
         assertThat(server.now(job).revision()).isEqualTo(2);
         assertThat(server.now(job).document().at(HEATER + "/spacing").textValue())
                 .startsWith(spacing);
-        progress(visitor.open(path(saved)));
+        progress(visitor.ask(saved.leadsTo()));
     }
 
     @Test
@@ -139,13 +142,13 @@ class SolvingAheadPagesTest {
         survey.withArray("/rooms").addObject().put("name", "annex");
         job = server.job("half a draft", survey);
 
-        progress(visitor.open("/jobs/" + job.id()));
+        progress(visitor.ask("/jobs/" + job.id()));
     }
 
     @Test
     void oneRoomKeepsWhatWasTypedThroughTheWait() {
         free.run();
-        Page start = result(visitor.open("/one-room"));
+        Page start = visitor.open("/one-room");
         free = server.busy();
         String spacing = newSpacing();
         Page waiting = progress(visitor.send(start.form("document")
@@ -160,16 +163,16 @@ class SolvingAheadPagesTest {
         assertThat(typed.value(HEATER + "/spacing")).startsWith(spacing);
         assertThat(typed.value("/rooms/0/name")).isEqualTo("a den of its own");
         free.run();
-        Page sized = result(visitor.open(address));
+        Page sized = visitor.open(address);
         assertThat(sized.value("/rooms/0/name")).isEqualTo("a den of its own");
         assertThat(sized.id("answer").orElseThrow().getTextContent()).contains("The numbers");
         Visitor other = new Visitor(server, server.session(server.member("Silvie " + spacing, Role.SURVEYOR)));
-        assertThat(path(other.open(address))).isEqualTo("/one-room");
+        assertThat(other.ask(address).leadsTo()).isEqualTo("/one-room");
     }
 
     @Test
     void whatFollowsTheTypingSaysThatItIsStillSolved() {
-        Page cancelled = cancelled(progress(visitor.open(room())));
+        Page cancelled = cancelled(progress(visitor.ask(room())));
         Page typed = visitor.open(back(cancelled));
 
         Page preview = visitor.send(
@@ -184,10 +187,10 @@ class SolvingAheadPagesTest {
     void tooManyAreRefusedInWords() {
         for (int i = 0; i < Computations.MOST_WAITING; i++) {
             ((ObjectNode) job.document().at(HEATER)).put("spacing", newSpacing() + " mm");
-            visitor.open("/jobs/" + server.job("waits", job.document()).id());
+            visitor.ask("/jobs/" + server.job("waits", job.document()).id());
         }
 
-        Page refused = visitor.open(room());
+        Page refused = visitor.ask(room());
 
         assertThat(refused.status()).isEqualTo(503);
         assertThat(refused.text()).contains("Too much is being computed just now");

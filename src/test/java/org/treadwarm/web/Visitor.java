@@ -14,6 +14,8 @@ import org.treadwarm.store.Session;
 
 /** Somebody at a browser without script. */
 final class Visitor {
+    private static final String PROGRESS = "/computations/";
+
     private final RunningServer server;
     private final CookieManager cookies = new CookieManager();
     private final HttpClient client = HttpClient.newBuilder()
@@ -36,9 +38,25 @@ final class Visitor {
         cookies.getCookieStore().add(URI.create(server.origin()), cookie);
     }
 
-    /** Opens a page, without following where it leads. */
+    /** Opens a page, and waits for it where it must be computed first; follows no other way that it leads. */
     Page open(String path) {
+        return awaited(ask(path));
+    }
+
+    /** Asks for a page once, without following where it leads. */
+    Page ask(String path) {
         return send(request(path).GET());
+    }
+
+    /** Looks again, as a browser does, for as long as a page tells or leads to how far a computation is. */
+    Page awaited(Page first) {
+        Page page = first;
+        while (page.address().startsWith(PROGRESS)
+                ? page.looksAgain()
+                : page.leadsTo().startsWith(PROGRESS)) {
+            page = ask(page.leadsTo().isEmpty() ? page.address() : page.leadsTo());
+        }
+        return page;
     }
 
     /** Sends a form, without following where it leads. */
@@ -48,10 +66,10 @@ final class Visitor {
                 .POST(BodyPublishers.ofString(form.encoded())));
     }
 
-    /** Sends a form and opens the page that it leads to. */
+    /** Sends a form and opens the page that it leads to, waiting for it as {@link #open} does. */
     Page submit(Form form) {
         Page answer = send(form);
-        return answer.status() == 303 ? open(URI.create(answer.location()).getRawPath()) : answer;
+        return answer.status() == 303 ? open(answer.leadsTo()) : answer;
     }
 
     private HttpRequest.Builder request(String path) {

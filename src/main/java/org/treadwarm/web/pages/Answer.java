@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.treadwarm.draw.Sheet;
+import org.treadwarm.jobs.Judgement;
 import org.treadwarm.jobs.Partial;
 import org.treadwarm.sizing.AssemblyEvaluation;
 import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
@@ -21,8 +22,8 @@ import org.treadwarm.sizing.Sizing.PartState;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.SectionSizing;
 import org.treadwarm.sizing.Sizing.SectionState;
-import org.treadwarm.sizing.Sizing.SpaceSizing;
 import org.treadwarm.sizing.Sizing.Warning;
+import org.treadwarm.sizing.SpaceBalance;
 import org.treadwarm.sizing.Verdict;
 import org.treadwarm.sizing.WarmUpView;
 import org.treadwarm.survey.Assembly;
@@ -48,22 +49,26 @@ final class Answer {
     public record Line(String name, String value, String note) {}
 
     static Map<String, Object> of(JsonNode document, Part part) {
-        Partial partial = Partial.of(document);
+        Partial partial = needsFloors(part) ? Partial.of(document) : Partial.unsized(document);
         Answer answer = new Answer("");
         answer.start(partial, part);
         answer.model.put("unsized", "");
+        Judgement judgement = partial.judgement();
         if (part.isAssembly()) {
             answer.assembly(document, part);
-        } else if (partial.judgement().sizing().isPresent()) {
-            Survey survey = partial.judgement().survey().orElseThrow();
-            Sizing sizing = partial.judgement().sizing().get();
-            if (part.isRoom()) {
-                answer.room(survey, sizing, part);
-            } else {
-                answer.space(sizing, part);
-            }
+        } else if (part.isRoom()) {
+            judgement
+                    .sizing()
+                    .ifPresent(sizing -> answer.room(judgement.survey().orElseThrow(), sizing, part));
+        } else if (judgement.problems().isEmpty()) {
+            answer.space(judgement.survey().orElseThrow(), part);
         }
         return answer.model;
+    }
+
+    /** Whether the floors of the job enter the answer; of a space or an assembly they do not, so nobody waits for them. */
+    static boolean needsFloors(Part part) {
+        return part.isRoom();
     }
 
     /** What stands there when the document is not sized, for a reason in words. */
@@ -325,8 +330,8 @@ final class Answer {
         lines.add(new Line(name, Numbers.fixed(temperature, 1) + " °C", note));
     }
 
-    private void space(Sizing sizing, Part part) {
-        Optional<SpaceSizing> found = sizing.spaces().stream()
+    private void space(Survey survey, Part part) {
+        Optional<SpaceBalance> found = SpaceBalance.all(survey).stream()
                 .filter(space -> space.name().equals(part.key().strip()))
                 .findFirst();
         found.ifPresent(space -> {

@@ -82,7 +82,7 @@ public final class Pages {
         routes.get("/jobs/{job}/history/{n}", history::show, Access.SURVEYOR);
         routes.post("/jobs/{job}/history/{n}/restore", form(history::restore), Access.SURVEYOR);
         routes.get("/jobs/{job}/files", files::show, Access.SURVEYOR);
-        routes.get("/jobs/{job}/files/{file}", ahead.before(files::download), Access.SURVEYOR);
+        routes.get("/jobs/{job}/files/{file}", ahead.before(files::sized, files::download, "/jobs"), Access.SURVEYOR);
         routes.post("/jobs/{job}/files/{file}", form(files::read), Access.SURVEYOR);
         routes.post("/jobs/{job}/copy", form(jobs::copy), Access.ESTIMATOR);
         routes.post("/jobs/{job}/archive", form(jobs::archive), Access.ESTIMATOR);

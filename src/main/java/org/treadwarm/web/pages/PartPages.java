@@ -194,7 +194,8 @@ final class PartPages {
                 && saved.problems().stream().anyMatch(problem -> now.get().holds(problem.pointer()));
         if (action.equals("save") && problems) {
             String address = Links.part(job.id(), part.kind(), key);
-            if (ahead.waits(ctx, saved.document(), address, address + "?" + SolvingAhead.UNSIZED)) {
+            if (Answer.needsFloors(now.get())
+                    && ahead.waits(ctx, saved.document(), address, address + "?" + SolvingAhead.UNSIZED)) {
                 return;
             }
             show(

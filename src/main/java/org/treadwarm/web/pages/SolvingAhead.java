@@ -49,9 +49,16 @@ final class SolvingAhead {
         return before(ctx -> desk.document(ctx.pathParam("job")), page, "/jobs");
     }
 
-    /** The page of a part of a job; the part can be gone back to as typed. */
+    /** The page of a part of a job, whose floors are solved first where the part needs them; it can be gone back to as typed. */
     Handler beforePart(Handler page) {
-        return beforeTyped(ctx -> desk.document(ctx.pathParam("job")), page);
+        return beforeTyped(
+                ctx -> desk.document(ctx.pathParam("job")).filter(document -> needsFloors(ctx, document)), page);
+    }
+
+    private static boolean needsFloors(Context ctx, JsonNode document) {
+        return Part.find(document, ctx.pathParam("part"), ctx.pathParam("name"))
+                .filter(Answer::needsFloors)
+                .isPresent();
     }
 
     /** The page, once the floors of a document are solved; it can be gone back to as typed. */
@@ -106,7 +113,7 @@ final class SolvingAhead {
 
     /** The answer for a form as it stands; where floors are still being solved, it says so and is to be asked for again. */
     void preview(Context ctx, View view, JsonNode document, Part part) {
-        boolean solving = isSolving(document, ctx.path());
+        boolean solving = Answer.needsFloors(part) && isSolving(document, ctx.path());
         Map<String, Object> model =
                 new HashMap<>(solving ? Answer.unsized(document, part, SOLVING) : Answer.of(document, part));
         model.put("part", part);

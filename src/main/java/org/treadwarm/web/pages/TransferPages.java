@@ -24,6 +24,7 @@ import org.treadwarm.web.security.Visitors;
 
 /** Files out of a job and into it: a table is shown with what it would change before anything is kept. */
 final class TransferPages {
+    private static final String RESULTS = "results.csv";
     private static final String CSV = "text/csv; charset=utf-8";
 
     private final JobDesk desk;
@@ -70,6 +71,11 @@ final class TransferPages {
         view.show(ctx, status, "files", model);
     }
 
+    /** What must be sized for a file out of the job; nothing where the file is the job as typed. */
+    Optional<JsonNode> sized(Context ctx) {
+        return ctx.pathParam("file").equals(RESULTS) ? desk.document(ctx.pathParam("job")) : Optional.empty();
+    }
+
     /** A file out of the job. */
     void download(Context ctx) {
         Optional<Job> job = desk.current(ctx.pathParam("job"));
@@ -82,7 +88,7 @@ final class TransferPages {
                     file,
                     "application/json; charset=utf-8",
                     job.get().document().toPrettyString());
-        } else if (file.equals("results.csv") && !job.get().draft()) {
+        } else if (file.equals(RESULTS) && !job.get().draft()) {
             job.get()
                     .sizing()
                     .ifPresentOrElse(
