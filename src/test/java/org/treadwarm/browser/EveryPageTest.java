@@ -236,6 +236,18 @@ class EveryPageTest {
         }
     }
 
+    /** They stand folded by standard, and what is folded is not looked at. */
+    @Test
+    void thePublishedValuesOfAStandardAreForEverybody(Browser browser) {
+        try (Tab tab = Tab.desk(server, browser).as(session).open("/method")) {
+            Page page = tab.page();
+            page.waitForCondition(() -> page.locator("progress").count() == 0);
+            page.locator("details.values summary").first().click();
+            assertThat(page.locator("details.values[open] table").isVisible()).isTrue();
+            assertForEverybody(tab);
+        }
+    }
+
     /** The page would come again every second, under the hands of what looks at it; here it does not. */
     @ParameterizedTest
     @ValueSource(strings = {"a floor", "/method"})
