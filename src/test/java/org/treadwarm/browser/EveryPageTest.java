@@ -240,8 +240,8 @@ class EveryPageTest {
     @Test
     void thePublishedValuesOfAStandardAreForEverybody(Browser browser) {
         try (Tab tab = Tab.desk(server, browser).as(session).open("/method")) {
+            tab.awaitDone();
             Page page = tab.page();
-            page.waitForCondition(() -> page.locator("progress").count() == 0);
             page.locator("details.values summary").first().click();
             assertThat(page.locator("details.values[open] table").isVisible()).isTrue();
             assertForEverybody(tab);
@@ -298,9 +298,8 @@ class EveryPageTest {
     }
 
     private static void assertForEverybody(Tab tab) {
-        Page page = tab.page();
         // A page that tells of a computation comes again until that is done, under the hands of whoever looks at it.
-        page.waitForCondition(() -> page.locator("progress").count() == 0);
+        tab.awaitDone();
         assertNoFaults(tab);
     }
 
