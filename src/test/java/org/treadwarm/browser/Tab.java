@@ -13,6 +13,9 @@ import org.treadwarm.web.RunningServer;
 
 /** One tab of a browser, and whatever it complained about. */
 final class Tab implements AutoCloseable {
+    /** The server gives a computation up after two minutes; milliseconds. */
+    private static final double LONGEST_COMPUTATION = 130_000;
+
     private final RunningServer server;
     private final BrowserContext context;
     private final Page page;
@@ -78,7 +81,15 @@ final class Tab implements AutoCloseable {
     }
 
     private void awaitComputed() {
-        page.waitForURL(url -> !url.contains("/computations/"));
+        page.waitForURL(
+                url -> !url.contains("/computations/"), new Page.WaitForURLOptions().setTimeout(LONGEST_COMPUTATION));
+    }
+
+    /** Waits until the page tells of no computation any more. */
+    void awaitDone() {
+        page.waitForCondition(
+                () -> page.locator("progress").count() == 0,
+                new Page.WaitForConditionOptions().setTimeout(LONGEST_COMPUTATION));
     }
 
     /** The control at an address of the document. */

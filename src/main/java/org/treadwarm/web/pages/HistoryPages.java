@@ -108,6 +108,11 @@ final class HistoryPages {
         return lines;
     }
 
+    /** The document of the revision in the address. */
+    Optional<JsonNode> document(Context ctx) {
+        return number(ctx).flatMap(number -> desk.document(ctx.pathParam("job"), number));
+    }
+
     /** One revision, to read. */
     void show(Context ctx) {
         Optional<Job> found = number(ctx).flatMap(number -> desk.revision(ctx.pathParam("job"), number));

@@ -47,7 +47,8 @@ final class MethodPage {
         model.put("formulas", WorkingView.formulas());
         model.put("done", false);
         model.put("running", false);
-        model.put("checks", List.of());
+        model.put("groups", List.of());
+        model.put("count", 0);
         model.put("failed", 0);
         model.put("words", "Too much is being computed just now; try again in a minute.");
         computation.ifPresent(found -> put(ctx, model, found.await(Computations.PATIENCE)));
@@ -58,7 +59,8 @@ final class MethodPage {
         if (state instanceof State.Done done) {
             CheckRows checks = (CheckRows) done.result();
             model.put("done", true);
-            model.put("checks", checks.rows());
+            model.put("groups", checks.groups());
+            model.put("count", checks.rows().size());
             model.put("failed", checks.failed());
         } else if (state instanceof State.Running running) {
             model.put("running", true);

@@ -79,7 +79,7 @@ public final class Pages {
         routes.get("/jobs/{job}", ahead.before(jobs::show), Access.SURVEYOR);
         routes.post("/jobs/{job}", form(jobs::change), Access.SURVEYOR);
         routes.get("/jobs/{job}/history", history::list, Access.SURVEYOR);
-        routes.get("/jobs/{job}/history/{n}", history::show, Access.SURVEYOR);
+        routes.get("/jobs/{job}/history/{n}", ahead.before(history::document, history::show, "/jobs"), Access.SURVEYOR);
         routes.post("/jobs/{job}/history/{n}/restore", form(history::restore), Access.SURVEYOR);
         routes.get("/jobs/{job}/files", files::show, Access.SURVEYOR);
         routes.get("/jobs/{job}/files/{file}", ahead.before(files::sized, files::download, "/jobs"), Access.SURVEYOR);

@@ -1,5 +1,6 @@
 package org.treadwarm.web.pages;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -21,7 +22,8 @@ import org.treadwarm.units.UnitTable;
 final class TablePages {
     /** One published value as a row of text. */
     public record CheckRow(
-            String subject,
+            String standard,
+            String clause,
             String what,
             String expected,
             String got,
@@ -32,7 +34,8 @@ final class TablePages {
             String source) {
         static CheckRow of(CheckedValue value) {
             return new CheckRow(
-                    value.standard() + (value.clause().isEmpty() ? "" : ", " + value.clause()),
+                    value.standard(),
+                    value.clause(),
                     value.caseId() + " " + value.what(),
                     Numbers.significant(value.expected(), 6),
                     Numbers.significant(value.got(), 6),
@@ -41,6 +44,20 @@ final class TablePages {
                     value.passes(),
                     value.confidence().word(),
                     value.source());
+        }
+    }
+
+    /** The published values of one standard or subject. */
+    public record CheckGroup(String standard, List<CheckRow> rows) {
+        /** How many of them fail. */
+        public long failed() {
+            return rows.stream().filter(row -> !row.passes()).count();
+        }
+
+        /** How many there are, and whether they pass, in words. */
+        public String words() {
+            String count = rows.size() == 1 ? "1 value, " : rows.size() + " values, ";
+            return count + (failed() > 0 ? failed() + " FAIL" : rows.size() == 1 ? "passes" : "all pass");
         }
     }
 
@@ -82,6 +99,16 @@ final class TablePages {
 
     /** Every published value as a row of text. */
     record CheckRows(List<CheckRow> rows) {
+        /** By the standard or subject they belong to, in the order in which these first come. */
+        List<CheckGroup> groups() {
+            Map<String, List<CheckRow>> groups = new LinkedHashMap<>();
+            rows.forEach(row -> groups.computeIfAbsent(row.standard(), standard -> new ArrayList<>())
+                    .add(row));
+            return groups.entrySet().stream()
+                    .map(group -> new CheckGroup(group.getKey(), List.copyOf(group.getValue())))
+                    .toList();
+        }
+
         long failed() {
             return rows.stream().filter(row -> !row.passes()).count();
         }
