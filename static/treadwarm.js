@@ -48,6 +48,10 @@
           }
         });
         spoken(answer);
+        if (response.headers.has("Refresh")) {
+          window.clearTimeout(timer);
+          timer = window.setTimeout(follow, 1000);
+        }
       }
     } catch (error) {
       if (error.name !== "AbortError") {

@@ -7,10 +7,6 @@ import java.util.Map;
 
 /** Draws isotherms and heaters over a section whose layers are drawn. */
 final class IsothermPainter {
-    private static final Stroke ISOTHERM = new Stroke(Palette.INK, 1.25, "");
-    /** Under each isotherm, so that the hatching does not run into it. */
-    private static final Stroke HALO = new Stroke(Palette.PAPER, 4, "");
-
     private final Canvas canvas;
     private final SectionScale scale;
     private final MirroredField field;
@@ -50,43 +46,13 @@ final class IsothermPainter {
                 scale.left(), top, scale.width(), spans.get(spans.size() - 1).end() - top);
         // Right of the heater in the middle, where the lines are neither level nor upright.
         double wanted = scale.middle() + Math.max(0.25 * scale.pitch(), radius() + 12);
-        IsothermLabels places = new IsothermLabels(frame.grown(-3), wanted, taken());
-        List<String> unlabelled = new ArrayList<>();
-        List<List<Point>> pieces = new ArrayList<>();
-        lines.forEach((level, line) -> {
-            String text = levels.text(level);
-            List<Box> gap = places.place(level, text, lines);
-            line.forEach(whole -> pieces.addAll(LineBreak.outside(whole, gap)));
-            if (gap.isEmpty() && !line.isEmpty() && !beside(line, text + "\u00a0°C", labels)) {
-                unlabelled.add(text);
-            }
-            gap.forEach(box -> label(box, text));
-        });
-        pieces.forEach(piece -> canvas.polyline(piece, HALO));
         // Again, where a halo has covered them.
-        spans.forEach(span -> canvas.rectangle(
-                new Box(scale.left(), span.start(), scale.width(), span.end() - span.start()),
-                Palette.NONE,
-                Stroke.OUTLINE));
-        pieces.forEach(piece -> canvas.polyline(piece, ISOTHERM));
-        return unlabelled;
-    }
-
-    private boolean beside(List<List<Point>> lines, String text, SideLabels labels) {
-        return lines.stream()
-                .flatMap(List::stream)
-                .filter(point -> point.x() > scale.right() - 0.01)
-                .findFirst()
-                .map(point -> {
-                    labels.add(point.y(), text);
-                    return true;
-                })
-                .orElse(false);
-    }
-
-    private void label(Box box, String text) {
-        canvas.rectangle(box.grown(-1), Palette.PAPER, Stroke.NONE);
-        canvas.text(new Point(box.middleX(), box.middleY()), text, TextStyle.PLAIN.at(TextStyle.Anchor.MIDDLE));
+        List<Box> outlines = spans.stream()
+                .map(span -> new Box(scale.left(), span.start(), scale.width(), span.end() - span.start()))
+                .toList();
+        return new IsothermLines(canvas, frame, lines, levels::text, "\u00a0°C")
+                .draw(wanted, taken(), outlines, labels)
+                .unlabelled();
     }
 
     /** Faces of layers, bands, heaters and the leader to the heater's words. */

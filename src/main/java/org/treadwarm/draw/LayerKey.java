@@ -34,7 +34,8 @@ final class LayerKey {
         return y;
     }
 
-    private double row(double top, MaterialFamily family, String name, List<String> details) {
+    /** Draws a row without a number and returns where it ends. */
+    double row(double top, MaterialFamily family, String name, List<String> details) {
         Box swatch = new Box(room.x() + 34, top, SWATCH, TextStyle.LINE_HEIGHT - 1);
         canvas.rectangle(swatch, canvas.hatch(family), Stroke.THIN);
         double width = room.width() - TEXT;

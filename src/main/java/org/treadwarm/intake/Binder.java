@@ -12,7 +12,7 @@ import java.util.Optional;
 import java.util.stream.Collectors;
 import org.treadwarm.survey.Findings;
 import org.treadwarm.survey.Nearest;
-import org.treadwarm.survey.Pointer;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Shape;
 import org.treadwarm.survey.Word;
@@ -37,25 +37,30 @@ final class Binder {
     }
 
     /** The record of a tree; null when the tree is no object at all. */
-    Record bind(JsonNode tree, Class<? extends Record> type, String pointer) {
+    Record bind(JsonNode tree, Class<? extends Record> type, Place at) {
         if (!tree.isObject()) {
-            findings.addUnread(pointer, Document.shown(tree), "an object is expected here", "a JSON object");
+            addUnread(at, Document.shown(tree), "an object is expected here", "a JSON object");
             return null;
         }
         Shape shape = Shape.of(type);
-        refuseUnknownKeys(tree, shape, pointer);
-        Object[] values = new Object[shape.keys().size()];
-        int i = 0;
+        JsonNode[] nodes = nodes(tree, shape, at);
         boolean goalAsReheat = type == Room.class && isGoal(tree.get(REHEAT));
-        for (Shape.Key key : shape.keys().values()) {
-            String name = goalAsReheat && key.name().equals(WARM_UP) ? REHEAT : key.name();
-            JsonNode node = goalAsReheat && key.name().equals(REHEAT) ? null : tree.get(name);
-            boolean silent = node == null && !key.required();
-            values[i++] = value(node, key, silent ? pointer : Pointer.to(pointer, name));
+        Object[] values = new Object[nodes.length];
+        for (int i = 0; i < nodes.length; i++) {
+            Shape.Key key = shape.key(i);
+            String name = key.name();
+            JsonNode node = nodes[i];
+            if (goalAsReheat && name.equals(REHEAT)) {
+                node = null;
+            } else if (goalAsReheat && name.equals(WARM_UP)) {
+                name = REHEAT;
+                node = tree.get(REHEAT);
+            }
+            values[i] = node == null ? absent(key, at) : value(node, key, at.key(name));
         }
         if (goalAsReheat && tree.has(WARM_UP)) {
-            findings.add(
-                    Pointer.to(pointer, WARM_UP),
+            add(
+                    at.key(WARM_UP),
                     "reheat and warmUp",
                     "a setback is described once",
                     "reheat with from and within, or warmUp");
@@ -77,21 +82,36 @@ final class Binder {
         }
     }
 
-    private void refuseUnknownKeys(JsonNode tree, Shape shape, String pointer) {
-        for (Iterator<String> names = tree.fieldNames(); names.hasNext(); ) {
-            String name = names.next();
-            if (shape.keys().containsKey(name)) {
-                continue;
+    /** What stands under each key of a shape, absent where the tree has nothing; keys that are none are found. */
+    private JsonNode[] nodes(JsonNode tree, Shape shape, Place at) {
+        JsonNode[] nodes = new JsonNode[shape.keys().size()];
+        for (Map.Entry<String, JsonNode> field : tree.properties()) {
+            int index = shape.indexOf(field.getKey());
+            if (index >= 0) {
+                nodes[index] = field.getValue();
+            } else {
+                refuseUnknownKey(field.getKey(), shape, at);
             }
-            String at = Pointer.to(pointer, name);
-            String shown = shown(name);
-            String nearest = Nearest.to(name, shape.keys().keySet()).orElse("");
-            findings.add(
-                    at,
-                    shown,
-                    "\"" + shown + "\" is no key here; the nearest is \"" + nearest + "\"",
-                    String.join(", ", shape.keys().keySet()));
         }
+        return nodes;
+    }
+
+    private void refuseUnknownKey(String name, Shape shape, Place at) {
+        String shown = shown(name);
+        String nearest = Nearest.to(name, shape.keys().keySet()).orElse("");
+        add(
+                at.key(name),
+                shown,
+                "\"" + shown + "\" is no key here; the nearest is \"" + nearest + "\"",
+                String.join(", ", shape.keys().keySet()));
+    }
+
+    private void add(Place at, String given, String message, String allowed) {
+        findings.add(at.pointer(), given, message, allowed);
+    }
+
+    private void addUnread(Place at, String given, String message, String allowed) {
+        findings.addUnread(at.pointer(), given, message, allowed);
     }
 
     private static String shown(String name) {
@@ -101,16 +121,16 @@ final class Binder {
         return name.length() <= 60 ? name : name.substring(0, 59) + "…";
     }
 
-    private Object value(JsonNode node, Shape.Key key, String pointer) {
-        if (node != null && node.isNull()) {
-            findings.addUnread(pointer, "null", "null is no value", "leave the key out");
+    private Object value(JsonNode node, Shape.Key key, Place at) {
+        if (node.isNull()) {
+            addUnread(at, "null", "null is no value", "leave the key out");
             return blank(key);
         }
         return switch (key.many()) {
-            case ONE -> node == null ? absent(key, pointer) : one(node, key, pointer);
-            case OPTIONAL -> node == null ? Optional.empty() : Optional.ofNullable(known(one(node, key, pointer)));
-            case LIST -> node == null ? List.of() : list(node, key, pointer);
-            case MAP -> node == null ? Map.of() : map(node, key, pointer);
+            case ONE -> one(node, key, at);
+            case OPTIONAL -> Optional.ofNullable(known(one(node, key, at)));
+            case LIST -> list(node, key, at);
+            case MAP -> map(node, key, at);
         };
     }
 
@@ -119,11 +139,11 @@ final class Binder {
         return value instanceof Reading reading && Double.isNaN(reading.value()) ? null : value;
     }
 
-    private Object absent(Shape.Key key, String pointer) {
-        if (key.fallbackValue().isPresent()) {
-            return key.fallbackValue().get();
+    private Object absent(Shape.Key key, Place at) {
+        if (key.whenAbsent().isPresent()) {
+            return key.whenAbsent().get();
         }
-        findings.addUnread(pointer, "nothing", "the " + key.label() + " is missing", allowed(key));
+        addUnread(at.key(key.name()), "nothing", "the " + key.label() + " is missing", allowed(key));
         return blank(key);
     }
 
@@ -141,21 +161,22 @@ final class Binder {
             case QUANTITY -> Reading.of(Double.NaN);
             case TEXT -> "";
             case WORD -> key.type().getEnumConstants()[0];
-            case OBJECT -> new Binder(new Findings()).bind(Document.mapper().createObjectNode(), record(key), "");
+            case OBJECT ->
+                new Binder(new Findings()).bind(Document.mapper().createObjectNode(), record(key), Place.ROOT);
         };
     }
 
-    private Object one(JsonNode node, Shape.Key key, String pointer) {
+    private Object one(JsonNode node, Shape.Key key, Place at) {
         return switch (key.holds()) {
-            case QUANTITY -> quantity(node, key.quantity().orElseThrow(), pointer);
-            case TEXT -> text(node, key, pointer);
-            case WORD -> word(node, key, pointer);
-            case OBJECT -> object(node, key, pointer);
+            case QUANTITY -> quantity(node, key.quantity().orElseThrow(), at);
+            case TEXT -> text(node, key, at);
+            case WORD -> word(node, key, at);
+            case OBJECT -> object(node, key, at);
         };
     }
 
-    private Object object(JsonNode node, Shape.Key key, String pointer) {
-        Record bound = bind(node, record(key), pointer);
+    private Object object(JsonNode node, Shape.Key key, Place at) {
+        Record bound = bind(node, record(key), at);
         return bound == null && key.many() == Shape.Many.ONE ? blankOne(key) : bound;
     }
 
@@ -164,52 +185,51 @@ final class Binder {
         return (Class<? extends Record>) key.type();
     }
 
-    private List<Object> list(JsonNode node, Shape.Key key, String pointer) {
+    private List<Object> list(JsonNode node, Shape.Key key, Place at) {
         if (!node.isArray()) {
-            findings.addUnread(pointer, Document.shown(node), "a list is expected here", "a JSON list");
+            addUnread(at, Document.shown(node), "a list is expected here", "a JSON list");
             return List.of();
         }
         List<Object> items = new ArrayList<>(node.size());
         for (int i = 0; i < node.size(); i++) {
-            Object item = one(node.get(i), key, Pointer.to(pointer, i));
+            Object item = one(node.get(i), key, at.item(i));
             items.add(item == null ? blankOne(key) : item);
         }
         return Collections.unmodifiableList(items);
     }
 
-    private Map<String, Object> map(JsonNode node, Shape.Key key, String pointer) {
+    private Map<String, Object> map(JsonNode node, Shape.Key key, Place at) {
         if (!node.isObject()) {
-            findings.addUnread(pointer, Document.shown(node), "an object of names is expected here", "a JSON object");
+            addUnread(at, Document.shown(node), "an object of names is expected here", "a JSON object");
             return Map.of();
         }
         Map<String, Object> items = new LinkedHashMap<>();
         node.properties().forEach(entry -> {
-            String at = Pointer.to(pointer, entry.getKey());
+            Place own = at.key(entry.getKey());
             String name = entry.getKey().strip();
             if (name.isEmpty() || name.length() > 200) {
-                findings.add(
-                        at, Document.shown(entry.getValue()), "this name is empty or too long", "1 to 200 characters");
+                add(own, Document.shown(entry.getValue()), "this name is empty or too long", "1 to 200 characters");
                 return;
             }
-            Object item = one(entry.getValue(), key, at);
+            Object item = one(entry.getValue(), key, own);
             if (items.put(name, item == null ? blankOne(key) : item) != null) {
-                findings.add(at, name, "this name stands twice", "each name once");
+                add(own, name, "this name stands twice", "each name once");
             }
         });
         return Collections.unmodifiableMap(items);
     }
 
-    private Object text(JsonNode node, Shape.Key key, String pointer) {
+    private Object text(JsonNode node, Shape.Key key, Place at) {
         if (!node.isTextual()) {
-            findings.add(pointer, Document.shown(node), "a text is expected for the " + key.label(), allowed(key));
+            add(at, Document.shown(node), "a text is expected for the " + key.label(), allowed(key));
             return "";
         }
         String text = node.textValue().strip();
         int longest = key.longest();
         boolean control = hasControl(text);
         if (text.length() > longest || control) {
-            findings.add(
-                    pointer,
+            add(
+                    at,
                     Document.shown(node),
                     control ? "there are control characters in this text" : "this text is too long",
                     "at most " + longest + " characters");
@@ -219,7 +239,7 @@ final class Binder {
             if (key.many() == Shape.Many.OPTIONAL && !key.name().equals("id")) {
                 return null;
             }
-            findings.add(pointer, "an empty text", "the " + key.label() + " is empty", allowed(key));
+            add(at, "an empty text", "the " + key.label() + " is empty", allowed(key));
         }
         return text;
     }
@@ -234,23 +254,19 @@ final class Binder {
         return false;
     }
 
-    private Object word(JsonNode node, Shape.Key key, String pointer) {
+    private Object word(JsonNode node, Shape.Key key, Place at) {
         Optional<Word> word = node.isTextual() ? word(key, node.textValue().strip()) : Optional.empty();
         if (word.isEmpty()) {
-            findings.add(
-                    pointer,
-                    Document.shown(node),
-                    "this is no " + key.label() + " that is known here",
-                    "one of " + words(key));
+            add(at, Document.shown(node), "this is no " + key.label() + " that is known here", "one of " + words(key));
             return key.many() == Shape.Many.OPTIONAL ? null : key.type().getEnumConstants()[0];
         }
         return word.get();
     }
 
     private static Optional<Word> word(Shape.Key key, String text) {
-        for (Object constant : key.type().getEnumConstants()) {
-            if (((Word) constant).word().equals(text)) {
-                return Optional.of((Word) constant);
+        for (Word word : key.words()) {
+            if (word.word().equals(text)) {
+                return Optional.of(word);
             }
         }
         return Optional.empty();
@@ -260,53 +276,53 @@ final class Binder {
         return key.words().stream().map(Word::word).collect(Collectors.joining(", "));
     }
 
-    private Reading quantity(JsonNode node, Declared declared, String pointer) {
+    private Reading quantity(JsonNode node, Declared declared, Place at) {
         if (node.isObject()) {
-            return readingObject(node, declared, pointer);
+            return readingObject(node, declared, at);
         }
         if (node.isNumber()) {
             Reading reading = new Reading(node.doubleValue(), 0, node.asText(), Optional.empty());
-            return inRange(reading, node, declared, pointer);
+            return inRange(reading, node, declared, at);
         }
         if (!node.isTextual()) {
-            findings.add(
-                    pointer,
+            add(
+                    at,
                     Document.shown(node),
                     "the " + declared.label() + " is a number or a text with a unit",
                     Ranges.words(declared));
             return Reading.of(Double.NaN);
         }
         try {
-            return inRange(ReadingParser.parse(node.textValue(), declared.kind()), node, declared, pointer);
+            return inRange(ReadingParser.parse(node.textValue(), declared.kind()), node, declared, at);
         } catch (ReadingException e) {
-            findings.add(pointer, Document.shown(node), e.getMessage(), Ranges.words(declared));
+            add(at, Document.shown(node), e.getMessage(), Ranges.words(declared));
             return Reading.of(Double.NaN);
         }
     }
 
-    private Reading readingObject(JsonNode node, Declared declared, String pointer) {
+    private Reading readingObject(JsonNode node, Declared declared, Place at) {
         JsonNode reading = node.get("reading");
         for (Iterator<String> names = node.fieldNames(); names.hasNext(); ) {
             String name = names.next();
             if (!List.of("reading", "basis", "name", "remark").contains(name)) {
                 String nearest =
                         Nearest.to(name, List.of("reading", "basis", "remark")).orElseThrow();
-                findings.add(
-                        Pointer.to(pointer, name),
+                add(
+                        at.key(name),
                         shown(name),
                         "this is no key of a reading; the nearest is \"" + nearest + "\"",
                         "reading, basis, remark");
             }
         }
         if (reading == null || reading.isContainerNode()) {
-            findings.add(
-                    pointer + "/reading",
+            add(
+                    at.key("reading"),
                     reading == null ? "nothing" : Document.shown(reading),
                     "the " + declared.label() + " itself is missing",
                     Ranges.words(declared));
             return Reading.of(Double.NaN);
         }
-        Reading value = quantity(reading, declared, pointer + "/reading");
+        Reading value = quantity(reading, declared, at.key("reading"));
         JsonNode basis = node.get("basis");
         if (basis == null) {
             return value;
@@ -316,29 +332,25 @@ final class Binder {
                 return value.on(known);
             }
         }
-        findings.add(
-                pointer + "/basis",
+        add(
+                at.key("basis"),
                 Document.shown(basis),
                 "this is no basis of a reading",
                 "taped, drawing, told, assumed or solved");
         return value;
     }
 
-    private Reading inRange(Reading reading, JsonNode node, Declared declared, String pointer) {
+    private Reading inRange(Reading reading, JsonNode node, Declared declared, Place at) {
         if (!Ranges.possible(reading.value(), declared)) {
-            findings.add(
-                    pointer,
+            add(
+                    at,
                     Document.shown(node),
                     "the " + declared.label() + " is outside what is possible" + help(declared),
                     Ranges.words(declared));
             return Reading.of(Double.NaN);
         }
         if (declared.whole() && reading.value() != Math.rint(reading.value())) {
-            findings.add(
-                    pointer,
-                    Document.shown(node),
-                    "the " + declared.label() + " is a whole number",
-                    Ranges.words(declared));
+            add(at, Document.shown(node), "the " + declared.label() + " is a whole number", Ranges.words(declared));
             return Reading.of(Double.NaN);
         }
         return reading;

@@ -6,6 +6,7 @@ import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.core.StreamReadConstraints;
 import com.fasterxml.jackson.core.StreamReadFeature;
+import com.fasterxml.jackson.databind.DeserializationFeature;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.json.JsonMapper;
@@ -31,9 +32,9 @@ public final class Document {
                             .maxNameLength(LONGEST_TEXT)
                             .maxNumberLength(200)
                             .build())
-                    .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
                     .enable(StreamReadFeature.USE_FAST_DOUBLE_PARSER)
                     .build())
+            .enable(DeserializationFeature.FAIL_ON_READING_DUP_TREE_KEY)
             .build();
 
     private Document() {}

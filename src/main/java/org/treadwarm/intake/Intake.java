@@ -4,6 +4,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.util.List;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Findings;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Rules;
 import org.treadwarm.survey.SectionQuestion;
@@ -35,7 +36,7 @@ public final class Intake {
     /** Reads a survey. */
     public static Outcome<Survey> survey(JsonNode tree) {
         Findings findings = new Findings();
-        Survey survey = (Survey) new Binder(findings).bind(tree, Survey.class, "");
+        Survey survey = (Survey) new Binder(findings).bind(tree, Survey.class, Place.ROOT);
         if (survey != null) {
             Rules.check(survey, findings);
         }
@@ -45,7 +46,8 @@ public final class Intake {
     /** Reads one assembly together with the conditions to evaluate it at. */
     public static Outcome<AssemblyQuestion> assembly(JsonNode tree) {
         Findings findings = new Findings();
-        AssemblyQuestion question = (AssemblyQuestion) new Binder(findings).bind(tree, AssemblyQuestion.class, "");
+        AssemblyQuestion question =
+                (AssemblyQuestion) new Binder(findings).bind(tree, AssemblyQuestion.class, Place.ROOT);
         if (question != null) {
             Assembly assembly = question.assembly();
             Rules.checkAssembly(assembly, findings);
@@ -57,7 +59,7 @@ public final class Intake {
     /** Reads one floor section. */
     public static Outcome<SectionQuestion> section(JsonNode tree) {
         Findings findings = new Findings();
-        SectionQuestion question = (SectionQuestion) new Binder(findings).bind(tree, SectionQuestion.class, "");
+        SectionQuestion question = (SectionQuestion) new Binder(findings).bind(tree, SectionQuestion.class, Place.ROOT);
         if (question != null) {
             question.check(findings);
         }
@@ -67,7 +69,8 @@ public final class Intake {
     /** Reads one wall foot. */
     public static Outcome<WallFootQuestion> wallFoot(JsonNode tree) {
         Findings findings = new Findings();
-        WallFootQuestion question = (WallFootQuestion) new Binder(findings).bind(tree, WallFootQuestion.class, "");
+        WallFootQuestion question =
+                (WallFootQuestion) new Binder(findings).bind(tree, WallFootQuestion.class, Place.ROOT);
         if (question != null) {
             question.check(findings);
         }
@@ -77,7 +80,7 @@ public final class Intake {
     /** Reads one heated floor together with the setback to warm up from. */
     public static Outcome<WarmUpQuestion> warmUp(JsonNode tree) {
         Findings findings = new Findings();
-        WarmUpQuestion question = (WarmUpQuestion) new Binder(findings).bind(tree, WarmUpQuestion.class, "");
+        WarmUpQuestion question = (WarmUpQuestion) new Binder(findings).bind(tree, WarmUpQuestion.class, Place.ROOT);
         if (question != null) {
             question.check(findings);
         }

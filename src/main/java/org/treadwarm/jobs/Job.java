@@ -19,7 +19,6 @@ import org.treadwarm.survey.Survey;
  * @param note a few words, or empty
  * @param document the survey as it was typed; a copy, free to change
  * @param survey the survey, when it has no problems
- * @param sizing its sizing, when it has no problems
  * @param problems what stands in the way of a sizing; empty for none
  */
 public record Job(
@@ -31,8 +30,12 @@ public record Job(
         String note,
         JsonNode document,
         Optional<Survey> survey,
-        Optional<Sizing> sizing,
         List<Problem> problems) {
+    /** Its sizing, when it has no problems; made anew at every call, which may take long where floors must be solved. */
+    public Optional<Sizing> sizing() {
+        return Judgement.of(document).sizing();
+    }
+
     /** Whether problems stand in the way of a sizing. */
     public boolean draft() {
         return !problems.isEmpty();

@@ -25,7 +25,7 @@ public final class JobCopies {
         return preparedRestore(id, revision, expectedRevision, who).get();
     }
 
-    /** Reads and judges what {@link #restore} saves, which may take long; what is given back only keeps it. */
+    /** Reads and judges what {@link #restore} saves; what is given back only keeps it. */
     public Supplier<JobDesk.Saving> preparedRestore(String id, long revision, long expectedRevision, String who) {
         Optional<JsonNode> document = desk.document(id, revision);
         if (document.isEmpty()) {
@@ -45,7 +45,7 @@ public final class JobCopies {
         return preparedCopy(id, who).map(Supplier::get);
     }
 
-    /** Reads and judges what {@link #copy} starts, which may take long; what is given back only keeps it. */
+    /** Reads and judges what {@link #copy} starts; what is given back only keeps it. */
     public Optional<Supplier<Job>> preparedCopy(String id, String who) {
         return desk.current(id).map(job -> {
             JobDesk.Prepared prepared = desk.prepared(copied(job.name()), job.document());

@@ -51,11 +51,11 @@ public final class JobDesk {
     /** A job read and judged, but not kept yet. */
     public record Prepared(String name, JsonNode document, Judgement judged) {}
 
-    /** Reads and judges a job that shall be started, which may take long. */
+    /** Reads and judges a job that shall be started, which takes its time when it is large. */
     public Prepared prepared(String name, JsonNode survey) {
         JsonNode document = survey.deepCopy();
         Ids.give(document, Document.mapper().createObjectNode());
-        return new Prepared(name, document, Judgement.of(document));
+        return new Prepared(name, document, Judgement.unsized(document));
     }
 
     /** Starts a job, which only has to be kept. */
@@ -72,7 +72,7 @@ public final class JobDesk {
         return preparedSave(id, expectedRevision, name, survey, change).get();
     }
 
-    /** Reads and judges a job as its next revision, which may take long; what is given back only keeps it. */
+    /** Reads and judges a job as its next revision; what is given back only keeps it. */
     public Supplier<Saving> preparedSave(
             String id, long expectedRevision, String name, JsonNode survey, Change change) {
         JsonNode document = survey.deepCopy();
@@ -81,7 +81,7 @@ public final class JobDesk {
             return Saving.Missing::new;
         }
         Ids.give(document, Pieces.survey(current.get().content().pieces()));
-        Prepared prepared = new Prepared(name, document, Judgement.of(document));
+        Prepared prepared = new Prepared(name, document, Judgement.unsized(document));
         return () -> keep(id, expectedRevision, prepared, change);
     }
 
@@ -210,7 +210,7 @@ public final class JobDesk {
 
     private static Job job(JobRevision revision) {
         JsonNode document = Pieces.survey(revision.content().pieces());
-        return job(revision.header(), document, Judgement.of(document));
+        return job(revision.header(), document, Judgement.unsized(document));
     }
 
     private static Job job(RevisionHeader header, JsonNode document, Judgement judged) {
@@ -223,7 +223,6 @@ public final class JobDesk {
                 header.note(),
                 document,
                 judged.survey(),
-                judged.sizing(),
                 judged.problems());
     }
 }

@@ -3,6 +3,7 @@ package org.treadwarm.jobs;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.BooleanSupplier;
 import org.treadwarm.intake.Intake;
 import org.treadwarm.intake.Intake.Outcome;
 import org.treadwarm.sizing.NoBalanceException;
@@ -13,15 +14,42 @@ import org.treadwarm.survey.Survey;
 
 /** What a document comes to: a survey with its sizing, or its problems. */
 public record Judgement(Optional<Survey> survey, Optional<Sizing> sizing, List<Problem> problems) {
-    /** Reads and sizes a document. */
+    /** Reads and sizes a document, which may take long where floors must be solved between their heaters. */
     public static Judgement of(JsonNode document) {
+        return of(document, () -> false);
+    }
+
+    /**
+     * The same, given up when asked to.
+     *
+     * @param stopped see {@link Sizer#size(Survey, BooleanSupplier)}
+     * @throws java.util.concurrent.CancellationException when asked to give up
+     */
+    public static Judgement of(JsonNode document, BooleanSupplier stopped) {
+        return judged(document, survey -> Optional.of(Sizer.size(survey, stopped)));
+    }
+
+    /** Reads a document and finds its problems without sizing it, which never takes long. */
+    public static Judgement unsized(JsonNode document) {
+        return judged(document, survey -> {
+            Sizer.check(survey);
+            return Optional.empty();
+        });
+    }
+
+    /** What makes a sizing of a survey, or none. */
+    private interface Sized {
+        Optional<Sizing> of(Survey survey) throws NoBalanceException;
+    }
+
+    private static Judgement judged(JsonNode document, Sized sized) {
         Outcome<Survey> outcome = Intake.survey(document);
         if (outcome instanceof Outcome.Refused<Survey> refused) {
             return new Judgement(Optional.empty(), Optional.empty(), refused.problems());
         }
         Survey survey = ((Outcome.Accepted<Survey>) outcome).value();
         try {
-            return new Judgement(Optional.of(survey), Optional.of(Sizer.size(survey)), List.of());
+            return new Judgement(Optional.of(survey), sized.of(survey), List.of());
         } catch (NoBalanceException e) {
             return new Judgement(Optional.of(survey), Optional.empty(), List.of(e.problem()));
         }

@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Function;
 import org.treadwarm.intake.Document;
 import org.treadwarm.survey.Problem;
 
@@ -20,7 +21,16 @@ import org.treadwarm.survey.Problem;
 public record Partial(Judgement judgement, List<String> unfinished) {
     /** Judges a document; where only some rooms have problems, the others are sized nevertheless. */
     public static Partial of(JsonNode document) {
-        Judgement whole = Judgement.of(document);
+        return of(document, Judgement::of);
+    }
+
+    /** The survey that {@link #of} would size, found without sizing it. */
+    public static Partial unsized(JsonNode document) {
+        return of(document, Judgement::unsized);
+    }
+
+    private static Partial of(JsonNode document, Function<JsonNode, Judgement> judge) {
+        Judgement whole = judge.apply(document);
         Set<Integer> broken = new LinkedHashSet<>();
         for (Problem problem : whole.problems()) {
             String[] steps = problem.pointer().split("/");
@@ -28,7 +38,7 @@ public record Partial(Judgement judgement, List<String> unfinished) {
                 broken.add(Integer.parseInt(steps[2]));
             }
         }
-        if (whole.sizing().isPresent()
+        if (whole.problems().isEmpty()
                 || broken.isEmpty()
                 || broken.size() == document.path("rooms").size()) {
             return new Partial(whole, List.of());
@@ -50,9 +60,9 @@ public record Partial(Judgement judgement, List<String> unfinished) {
             }
         }
         reduced.set("rooms", rooms);
-        Judgement judged = Judgement.of(reduced);
+        Judgement judged = judge.apply(reduced);
         return new Partial(
-                judged.sizing().isPresent() ? judged : whole,
-                judged.sizing().isPresent() ? List.copyOf(unfinished) : List.of());
+                judged.problems().isEmpty() ? judged : whole,
+                judged.problems().isEmpty() ? List.copyOf(unfinished) : List.of());
     }
 }

@@ -21,12 +21,13 @@ public record PracticeLimit(String name, Sense sense, double limit, String sourc
      * A value beside its limit.
      *
      * @param name the quantity
+     * @param sense from which side the limit limits
      * @param limit the limit
      * @param value the value
      * @param margin what is left up to the limit; negative when the value is beyond it
      * @param source where the limit was read
      */
-    public record Judged(String name, double limit, double value, double margin, String source) {
+    public record Judged(String name, Sense sense, double limit, double value, double margin, String source) {
         /** Whether the value keeps the limit. */
         public boolean keeps() {
             return margin >= 0;
@@ -36,6 +37,6 @@ public record PracticeLimit(String name, Sense sense, double limit, String sourc
     /** The value beside this limit. */
     public Judged judge(double value) {
         double margin = sense == Sense.AT_MOST ? limit - value : value - limit;
-        return new Judged(name, limit, value, margin, source);
+        return new Judged(name, sense, limit, value, margin, source);
     }
 }

@@ -46,10 +46,11 @@ public final class SheetDesk {
         if (job.isEmpty()) {
             return Issuing.Missing::new;
         }
-        if (job.get().sizing().isEmpty()) {
-            return () -> new Issuing.Draft(job.get().problems());
+        Judgement judged = Judgement.of(job.get().document());
+        if (judged.sizing().isEmpty()) {
+            return () -> new Issuing.Draft(judged.problems());
         }
-        SheetContent content = frozen(job.get().document(), job.get().sizing().get());
+        SheetContent content = frozen(job.get().document(), judged.sizing().get());
         return () -> Issuing.of(sheets.issue(new SheetOrder(jobId, revision, content, replaces), who));
     }
 

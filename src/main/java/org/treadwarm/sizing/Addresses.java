@@ -36,7 +36,7 @@ final class Addresses {
 
     /** Address of a reading that the plan takes in. */
     String input(int index) {
-        return survey(plan.addresses.get(index));
+        return survey(plan.address(index));
     }
 
     boolean isRoom(int node) {

@@ -262,14 +262,6 @@ final class Answers {
         HeatedFloor given =
                 plan.survey.rooms().get(floor.plan.room()).heatedFloor().orElseThrow();
         Optional<FreeFloor> free = given.plan().map(rectangle -> FreeFloors.of(rectangle, floor.area));
-        MatLayouts.Made mats = given.heater()
-                .map(heater -> MatLayouts.of(
-                        heater,
-                        "/rooms/" + floor.plan.room() + "/heatedFloor/heater",
-                        floor.area,
-                        free,
-                        state.heaterPower()))
-                .orElse(MatLayouts.Made.NOT_ASKED);
         return new FloorSizing(
                 margin >= 0 ? Verdict.CARRIES : Verdict.CARRIES_WITH_SUPPLEMENT,
                 of(floor.area),
@@ -304,12 +296,12 @@ final class Answers {
                 floor.section == null ? Optional.empty() : Optional.of(new SectionAnswers(floor.section, given).all()),
                 floor.parted == null ? List.of() : new PartAnswers(floor, given).all(),
                 floor.sectionReason.isEmpty() ? Optional.empty() : Optional.of(floor.sectionReason),
-                ElectricLayouts.of(floor, given, mats.layout()),
+                ElectricLayouts.of(floor, given, floor.mats.layout()),
                 waters.of(floor.plan.room()),
                 floor.warmUp.map(WarmUpFloor::answer),
                 floor.warmUpReason.isEmpty() ? Optional.empty() : Optional.of(floor.warmUpReason),
                 free,
-                mats.reason());
+                floor.mats.reason());
     }
 
     private FloorState state(FloorEvaluation floor, double flux) {
@@ -372,8 +364,9 @@ final class Answers {
             String name = Limits.name(floor.plan, part.zone(), i % slots) + ", " + part.name();
             addLimit(limits, floor, i, name, Limits.source(i % slots));
         }
-        addLimit(limits, floor, floor.limits.length - 2, Limits.HEATER, Limits.HEATER_SOURCE);
-        addLimit(limits, floor, floor.limits.length - 1, Limits.WATER, Limits.WATER_SOURCE);
+        addLimit(limits, floor, floor.limits.length - 3, Limits.HEATER, Limits.HEATER_SOURCE);
+        addLimit(limits, floor, floor.limits.length - 2, Limits.WATER, Limits.WATER_SOURCE);
+        addLimit(limits, floor, floor.limits.length - 1, Limits.MATS, Limits.MATS_SOURCE);
         return List.copyOf(limits);
     }
 

@@ -10,6 +10,7 @@ import org.treadwarm.physics.moisture.SurfaceTemperature;
 import org.treadwarm.physics.moisture.WaterVapour;
 import org.treadwarm.sizing.Sizing.LayerSizing;
 import org.treadwarm.survey.Assembly;
+import org.treadwarm.survey.Place;
 import org.treadwarm.tables.Films;
 import org.treadwarm.units.Reading;
 
@@ -100,7 +101,8 @@ public record AssemblyEvaluation(
             Assembly assembly, double inside, double outside, Conditions conditions) {
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add("/layers", assembly.layers(), assembly.heatFlow().heatFlow());
+        builder.add(
+                Place.ROOT.at("/layers"), assembly.layers(), assembly.heatFlow().heatFlow());
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] layer = new double[stack.layers];

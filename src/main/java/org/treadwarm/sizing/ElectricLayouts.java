@@ -7,6 +7,7 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.treadwarm.physics.PracticeLimit.Judged;
+import org.treadwarm.physics.PracticeLimit.Sense;
 import org.treadwarm.physics.electric.BreakerPractice;
 import org.treadwarm.physics.electric.CableLaying;
 import org.treadwarm.physics.electric.CableLimits;
@@ -178,8 +179,13 @@ final class ElectricLayouts {
 
     static List<PracticeJudgement> judgements(List<Judged> judged) {
         return judged.stream()
-                .map(each ->
-                        new PracticeJudgement(each.name(), each.value(), each.limit(), each.margin(), each.source()))
+                .map(each -> new PracticeJudgement(
+                        each.name(),
+                        Optional.of(each.sense() == Sense.AT_MOST ? "at most" : "at least"),
+                        each.value(),
+                        each.limit(),
+                        each.margin(),
+                        each.source()))
                 .toList();
     }
 }

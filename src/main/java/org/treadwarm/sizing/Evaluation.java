@@ -60,7 +60,7 @@ final class Evaluation {
     private final double[] solved;
 
     Evaluation(Plan plan) {
-        this(plan, new Sections());
+        this(plan, new Sections(() -> false));
     }
 
     Evaluation(Plan plan, Sections sections) {
@@ -139,7 +139,7 @@ final class Evaluation {
         for (int ground = 0; ground < groundDimension.length; ground++) {
             double numbers = groundDimension[ground] + groundToSoil[ground] + groundToOutdoors[ground];
             if (!Double.isFinite(numbers)) {
-                return Optional.of(plan.addresses.get(plan.grounds.get(ground).perimeter()));
+                return Optional.of(plan.address(plan.grounds.get(ground).perimeter()));
             }
         }
         for (int space = 0; space < plan.floatingNodes.length; space++) {

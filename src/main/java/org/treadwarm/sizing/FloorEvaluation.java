@@ -29,8 +29,8 @@ final class FloorEvaluation {
     /** Limits of every part beside those of the layers: zone, covering. */
     private static final int SURFACE_LIMITS = 2;
 
-    /** Limits of the whole floor: density of the heater, supply of the water. */
-    private static final int HEATER_LIMITS = 2;
+    /** Limits of the whole floor: density of the heater, supply of the water, power of the chosen mats. */
+    private static final int HEATER_LIMITS = 3;
 
     final FloorPlan plan;
     final double[] limits;
@@ -68,22 +68,22 @@ final class FloorEvaluation {
     /** Why a setback is not followed; empty when it is, or there is none. */
     String warmUpReason = "";
 
+    /** The mats chosen for the required flux, if there are any to choose from. */
+    MatLayouts.Made mats = MatLayouts.Made.NOT_ASKED;
+
+    /** Power of the chosen mats over the heated area, W/m²; infinite when none are chosen. */
+    double matsDensity;
+
     /** Why a floor with a spacing is not solved; empty when it is, or has none. */
     String sectionReason = "";
 
     private final Evaluation whole;
-    private final Zone zone;
+    private final org.treadwarm.survey.HeatedFloor given;
 
     FloorEvaluation(Evaluation whole, FloorPlan plan) {
         this.whole = whole;
         this.plan = plan;
-        this.zone = whole.plan
-                .survey
-                .rooms()
-                .get(plan.room())
-                .heatedFloor()
-                .orElseThrow()
-                .zone();
+        this.given = whole.plan.survey.rooms().get(plan.room()).heatedFloor().orElseThrow();
         this.limits = new double[Math.max(1, plan.parts().size()) * slotsOfAPart() + HEATER_LIMITS];
         this.toLayer = new double[plan.layerLimits().size()];
     }
@@ -99,6 +99,7 @@ final class FloorEvaluation {
         requiredFlux = requiredHeat / area;
         limits();
         section();
+        mats();
         holdsDownTo =
                 parted != null ? parted.lowestOutdoor() : section == null ? lowestOutdoor() : section.lowestOutdoor();
     }
@@ -217,11 +218,13 @@ final class FloorEvaluation {
     }
 
     double zoneMaximum() {
-        return Limits.zoneMaximum(zone, room);
+        return Limits.zoneMaximum(zone(), room);
     }
 
     private void limits() {
         int last = limits.length - HEATER_LIMITS;
+        mats = MatLayouts.Made.NOT_ASKED;
+        matsDensity = Double.POSITIVE_INFINITY;
         Arrays.fill(limits, Double.POSITIVE_INFINITY);
         limits[0] = HeatedFloor.flux(zoneMaximum() - room);
         limits[1] = plan.maximumSurface() == Stack.NONE
@@ -317,8 +320,52 @@ final class FloorEvaluation {
         return Optional.of(floor);
     }
 
+    /** Chooses the mats: by the heat needed, so that what they give can then be a limit of the floor. */
+    private void mats() {
+        double needed = made(requiredFlux) * area;
+        if (given.heater().isEmpty() || !Double.isFinite(needed)) {
+            return;
+        }
+        mats = MatLayouts.of(
+                given.heater().get(),
+                "/rooms/" + plan.room() + "/heatedFloor/heater",
+                area,
+                given.plan().map(rectangle -> FreeFloors.of(rectangle, area)),
+                needed);
+        mats.layout().ifPresent(chosen -> {
+            matsDensity = chosen.meanDensity().orElseThrow();
+            limits[limits.length - 1] = matsLimit();
+            govern();
+        });
+    }
+
+    /** What the heater makes at a flux on the design day, W/m². */
+    private double made(double flux) {
+        if (parted != null) {
+            return PartAnswers.whole(parted, flux, whole.outdoor).heaterFlux();
+        }
+        return section == null
+                ? heaterFlux(flux, whole.outdoor)
+                : section.at(flux, whole.outdoor).made();
+    }
+
+    /** The largest flux for which the chosen mats make the heat; more than they make is not counted on. */
+    private double matsLimit() {
+        if (made(0) >= matsDensity) {
+            return 0;
+        }
+        double most =
+                section == null && parted == null ? matsDensity : Math.min(matsDensity, SectionFloor.HIGHEST_FLUX);
+        return made(most) <= matsDensity ? matsDensity : Bracket.root(flux -> made(flux) - matsDensity, 0, most);
+    }
+
+    /** The most that the heater makes by its density and by the chosen mats, W/m²; infinite when neither is known. */
+    double mostMade() {
+        return Math.min(plan.heater().hasDensity() ? density() : Double.POSITIVE_INFINITY, matsDensity);
+    }
+
     Zone zone() {
-        return zone;
+        return given.zone();
     }
 
     /** Between supply and return of the water, K. */
@@ -341,7 +388,7 @@ final class FloorEvaluation {
 
     /** The lowest of the limits that do not depend on the outdoor temperature. */
     private double fixedLimit() {
-        double lowest = plan.heater().hasDensity() ? density() : Double.POSITIVE_INFINITY;
+        double lowest = mostMade();
         for (int i = 0; i < limits.length - HEATER_LIMITS; i++) {
             lowest = Math.min(lowest, limits[i]);
         }
@@ -350,8 +397,7 @@ final class FloorEvaluation {
 
     private boolean carriesAt(double outdoor) {
         double required = requiredHeat(outdoor) / area;
-        return required == 0
-                || required <= fixedLimit() && (!plan.heater().hasDensity() || excessDensity(outdoor) <= 0);
+        return required == 0 || required <= fixedLimit() && excessDensity(outdoor) <= 0;
     }
 
     /**
@@ -372,7 +418,7 @@ final class FloorEvaluation {
         double allowance = whole.in[whole.plan.roomIndexes[plan.room()].allowance()];
         double heat = fixedLimit() * area / (1 + allowance);
         double byFixed = Math.max(COLDEST, (heat - whole.roomConstant[plan.room()]) / slope);
-        if (!plan.heater().hasDensity() || excessDensity(byFixed) <= 0) {
+        if (excessDensity(byFixed) <= 0) {
             return byFixed;
         }
         double unneeded = Math.min(room, -whole.roomConstant[plan.room()] / slope);
@@ -381,9 +427,9 @@ final class FloorEvaluation {
                 : rootOfDensity(byFixed, unneeded, slope * (1 + allowance) / area);
     }
 
-    /** What the heater would have to make above its density to give the required flux, W/m². */
+    /** What the heater would have to make above what it can to give the required flux, W/m². */
     private double excessDensity(double outdoor) {
-        return heaterFlux(requiredHeat(outdoor) / area, outdoor) - density();
+        return heaterFlux(requiredHeat(outdoor) / area, outdoor) - mostMade();
     }
 
     private double rootOfDensity(double from, double to, double fluxSlope) {

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.stream.IntStream;
 import org.treadwarm.sizing.Plan.FloorPlan;
 import org.treadwarm.sizing.Plan.RoomIndexes;
+import org.treadwarm.sizing.Sizing.ElectricLayout;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 
 /** Steps of a heated floor: what it must give, its margin, its temperatures and fluxes. */
@@ -106,6 +107,9 @@ final class FloorSteps {
         steps.add(at + "/shortfall", "shortfall", "phi_short", answered("m", "/margin"), answered("A_F", "/area"));
         if (answer.holdsDownTo().isPresent() && plan.roomIndexes[floor.room()].setback() != Stack.NONE) {
             steps.add(at + "/holdsDownTo", "holds-down-to-with-setback", "x");
+        } else if (answer.holdsDownTo().isPresent()
+                && answer.electric().flatMap(ElectricLayout::mats).isPresent()) {
+            steps.add(at + "/holdsDownTo", "holds-down-to-with-mats", "x");
         } else if (answer.holdsDownTo().isPresent()) {
             steps.addAgain(
                     at + "/holdsDownTo",

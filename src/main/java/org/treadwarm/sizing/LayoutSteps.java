@@ -13,8 +13,6 @@ import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.WarmUpSizing;
 import org.treadwarm.sizing.Sizing.WaterLayout;
 import org.treadwarm.sizing.Sizing.WaterTotal;
-import org.treadwarm.survey.HeatedFloor;
-import org.treadwarm.survey.Heater;
 import org.treadwarm.survey.Survey;
 
 /** Steps of how a floor is fed: electric elements, or loops of warm water. */
@@ -154,37 +152,88 @@ final class LayoutSteps {
                 at + "/supplyTemperature", "hottest-supply", "theta_V", each("theta_room", all, "/supplyTemperature"));
         sums(at, all);
         chosen(at, "volumeFlow");
-        Map<String, String> manifolds = new HashMap<>();
+        Map<String, String> worstLoops = new HashMap<>();
+        ManifoldDrops drops = new ManifoldDrops(survey);
+        pump(at, all, water);
         for (int i = 0; i < water.manifolds().size(); i++) {
             Optional<String> name = water.manifolds().get(i).name();
             String manifold = at + "/manifolds/" + i;
             List<Integer> on = all.stream()
-                    .filter(room -> manifold(survey, room).equals(name))
+                    .filter(room -> drops.feeding(room).equals(name))
                     .toList();
-            on.forEach(room -> manifolds.put(rooms.get(room).name(), manifold));
+            boolean ownDrop = water.manifolds().get(i).ownDrop().isPresent();
+            String worst = manifold + (ownDrop ? "/loopDrop" : "/pressure");
+            on.forEach(room -> worstLoops.put(rooms.get(room).name(), worst));
             sums(manifold, on);
+            steps.add(worst, "worst-loop", "p", each("p_loop", on, "/pressureDrop"));
             chosen(manifold, "loops", "volumeFlow");
-            throttled(manifold, at + "/pressure", manifold + "/pressure");
+            if (ownDrop) {
+                ownDrop(manifold, drops.statedIn(name).orElseThrow());
+            }
+            beforeManifold(at, manifold, water);
         }
         for (int i = 0; i < water.valves().size(); i++) {
             String valve = at + "/valves/" + i;
             chosen(valve, "loop", "massFlow", "drop");
-            throttled(valve, manifolds.get(water.valves().get(i).room()) + "/pressure", valve + "/drop");
+            throttled(valve, worstLoops.get(water.valves().get(i).room()), valve + "/drop");
         }
     }
 
-    private static Optional<String> manifold(Survey survey, int room) {
-        return survey.rooms()
-                .get(room)
-                .heatedFloor()
-                .flatMap(HeatedFloor::heater)
-                .flatMap(Heater::manifold);
+    /** What the pump has to give: the drop of the worst loop, and what the survey states of manifolds and heat source. */
+    private void pump(String at, List<Integer> rooms, WaterTotal water) {
+        boolean source = water.sourceDrop().isPresent();
+        if (!source
+                && water.manifolds().stream()
+                        .noneMatch(manifold -> manifold.ownDrop().isPresent())) {
+            steps.add(at + "/pressure", "worst-loop", "p", each("p_loop", rooms, "/pressureDrop"));
+            return;
+        }
+        Symbol manifolds = Symbol.all(
+                "p_manifold",
+                IntStream.range(0, water.manifolds().size())
+                        .mapToObj(i -> Addresses.sizing(at + "/manifolds/" + i + "/pressure"))
+                        .toList());
+        if (!source) {
+            steps.add(at + "/pressure", "worst-manifold", "p", manifolds);
+            return;
+        }
+        steps.add(
+                at + "/sourceDrop", "drop-stated", "x", Symbol.of("x_given", Addresses.survey("/site/heatSourceDrop")));
+        steps.add(
+                at + "/pressure", "worst-manifold-and-source", "p", manifolds, symbol("p_source", at + "/sourceDrop"));
+    }
+
+    private void ownDrop(String manifold, int room) {
+        steps.add(
+                manifold + "/ownDrop",
+                "drop-stated",
+                "x",
+                Symbol.of("x_given", Addresses.survey("/rooms/" + room + "/heatedFloor/heater/manifoldDrop")));
+        steps.add(
+                manifold + "/pressure",
+                "loop-and-manifold",
+                "p",
+                symbol("p_loop", manifold + "/loopDrop"),
+                symbol("p_own", manifold + "/ownDrop"));
+    }
+
+    private void beforeManifold(String at, String manifold, WaterTotal water) {
+        if (water.sourceDrop().isEmpty()) {
+            throttled(manifold, at + "/pressure", manifold + "/pressure");
+            return;
+        }
+        steps.add(
+                manifold + "/throttled",
+                "throttled-behind-source",
+                "p_valve",
+                symbol("p", at + "/pressure"),
+                symbol("p_source", at + "/sourceDrop"),
+                symbol("p_manifold", manifold + "/pressure"));
     }
 
     private void sums(String at, List<Integer> rooms) {
         steps.add(at + "/massFlow", "sum-of-flows", "m", each("m_room", rooms, "/massFlow"));
         steps.add(at + "/waterContent", "sum-of-contents", "V", each("V_room", rooms, "/waterContent"));
-        steps.add(at + "/pressure", "worst-loop", "p", each("p_loop", rooms, "/pressureDrop"));
     }
 
     private void throttled(String at, String whole, String own) {

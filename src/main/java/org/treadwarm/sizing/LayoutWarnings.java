@@ -75,7 +75,7 @@ final class LayoutWarnings {
                     "The chosen mats make " + Numbers.fixed(mats.power(), 0)
                             + " W; the density over the heated area makes " + Numbers.fixed(installed.getAsDouble(), 0)
                             + " W.",
-                    "The verdict goes by the density.",
+                    "The verdict goes by the weaker of the two.",
                     "Give the density that the mats make over the heated area: " + Numbers.fixed(mats.power(), 0)
                             + " W over it.");
         }

@@ -2,14 +2,19 @@ package org.treadwarm.sizing;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import org.treadwarm.sizing.Plan.FloorPlan;
 import org.treadwarm.sizing.Plan.LayerLimit;
+import org.treadwarm.sizing.Sizing.ElectricLayout;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.Limit;
+import org.treadwarm.sizing.Sizing.MatLayout;
 import org.treadwarm.survey.Zone;
 
 /** Steps of the largest fluxes that a heated floor's limits allow, in the order of the answer: zone, covering, layers, heater. */
 final class LimitSteps {
+    private static final String MATS_DENSITY = "/electric/mats/meanDensity";
+
     private final Addresses addresses;
     private final Steps steps;
     private final FloorPlan floor;
@@ -61,7 +66,10 @@ final class LimitSteps {
             layer(limit, answer.limits().get(next));
         }
         if (floor.heater().hasDensity()) {
-            heater(answer.limits().get(next), answer.installedDensity().orElseThrow());
+            heater(answer.limits().get(next), "/installedDensity", answer.installedDensity());
+        }
+        if (isNext(answer, Limits.MATS)) {
+            heater(answer.limits().get(next), MATS_DENSITY, matsDensity(answer));
         }
     }
 
@@ -82,11 +90,21 @@ final class LimitSteps {
             }
         }
         if (floor.heater().hasDensity()) {
-            density(answer.limits().get(next), answer.installedDensity().orElseThrow());
+            density(answer.limits().get(next), "/installedDensity", answer.installedDensity());
         }
         if (isNext(answer, Limits.WATER)) {
             supply(answer);
         }
+        if (isNext(answer, Limits.MATS)) {
+            density(answer.limits().get(next), MATS_DENSITY, matsDensity(answer));
+        }
+    }
+
+    private static OptionalDouble matsDensity(FloorSizing answer) {
+        return answer.electric()
+                .flatMap(ElectricLayout::mats)
+                .map(MatLayout::meanDensity)
+                .orElse(OptionalDouble.empty());
     }
 
     private boolean isNext(FloorSizing answer, String name) {
@@ -106,10 +124,10 @@ final class LimitSteps {
         steps.add(claim(), formula + (already ? "-already-reached" : ""), "q_max", symbols.toArray(new Symbol[0]));
     }
 
-    private void density(Limit answer, double made) {
+    private void density(Limit answer, String key, OptionalDouble made) {
         String found = at + "/section/limits/" + next;
-        Symbol density = answered("p", "/installedDensity");
-        if (answer.maximumFlux() == made) {
+        Symbol density = answered("p", key);
+        if (answer.maximumFlux() == made.orElseThrow()) {
             steps.add(claim(), "heater-limit-nothing-lost", "q_max", density);
             return;
         }
@@ -164,10 +182,10 @@ final class LimitSteps {
         steps.add(here, "layer-limit", "q_max", Symbol.of("theta_max", maximum), room, Symbol.all("R", above));
     }
 
-    private void heater(Limit answer, double made) {
+    private void heater(Limit answer, String key, OptionalDouble made) {
         String here = claim();
-        Symbol density = answered("p", "/installedDensity");
-        if (answer.maximumFlux() == made) {
+        Symbol density = answered("p", key);
+        if (answer.maximumFlux() == made.orElseThrow()) {
             steps.add(here, "heater-limit-nothing-lost", "q_max", density);
             return;
         }

@@ -21,11 +21,14 @@ final class Limits {
     static final String LAYER = "layer temperature: ";
     static final String HEATER = "heater density";
     static final String WATER = "water supply";
+    static final String MATS = "installed power";
 
     static final String SURFACE_SOURCE = "EN 1264-2";
     static final String COVERING_SOURCE = "the maker of the covering; 27 °C under timber is common practice, no source";
     static final String LAYER_SOURCE = "the maker of the layer";
     static final String WATER_SOURCE = "EN 1264-2, mean over-temperature of the water; the solved section";
+    static final String MATS_SOURCE =
+            "energy balance of the heater, with the power of the chosen mats over the heated area";
     static final String HEATER_SOURCE = "energy balance of the heater";
 
     private Limits() {}

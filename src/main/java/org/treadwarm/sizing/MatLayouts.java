@@ -3,6 +3,7 @@ package org.treadwarm.sizing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.treadwarm.physics.electric.CoverDemand;
 import org.treadwarm.physics.electric.HeatingElement;
 import org.treadwarm.physics.electric.StockChoice;
@@ -24,12 +25,14 @@ final class MatLayouts {
 
     private final Heater heater;
     private final String pointer;
+    private final double heated;
     private final double area;
     private final double neededPower;
 
-    private MatLayouts(Heater heater, String pointer, double area, double neededPower) {
+    private MatLayouts(Heater heater, String pointer, double heated, double area, double neededPower) {
         this.heater = heater;
         this.pointer = pointer;
+        this.heated = heated;
         this.area = area;
         this.neededPower = neededPower;
     }
@@ -57,7 +60,7 @@ final class MatLayouts {
         }
         double area = plan.map(found -> Math.min(heated, found.freeArea())).orElse(heated);
         return area > 0
-                ? new MatLayouts(heater, pointer + "/mats", area, neededPower).made()
+                ? new MatLayouts(heater, pointer + "/mats", heated, area, neededPower).made()
                 : Made.not("the plan leaves no floor free");
     }
 
@@ -94,6 +97,7 @@ final class MatLayouts {
                 choice.power(),
                 neededPower,
                 choice.power() - neededPower,
+                OptionalDouble.of(choice.power() / heated),
                 pieces,
                 ElectricLayouts.circuits(heater, pieces));
     }

@@ -37,6 +37,12 @@ final class MatSteps {
                 Symbol.of("P_H", Addresses.sizing(floorAt + "/heaterPower")));
         steps.add(
                 at + "/margin", "margin-of-mats", "P_margin", symbol("P", "/power"), symbol("P_need", "/neededPower"));
+        steps.add(
+                at + "/meanDensity",
+                "mean-density-of-mats",
+                "p",
+                symbol("P", "/power"),
+                Symbol.of("A_F", Addresses.sizing(floorAt + "/area")));
         for (int i = 0; i < mats.pieces().size(); i++) {
             pieces(mats.pieces().get(i), "/pieces/" + i);
         }

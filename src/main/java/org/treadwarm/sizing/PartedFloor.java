@@ -118,7 +118,7 @@ final class PartedFloor {
 
     /** The slot of the limit of the heater: its density, or its water. */
     private int slot() {
-        return plane.limits.length - (plane.plan.heater().water() ? 1 : 2);
+        return plane.limits.length - (plane.plan.heater().water() ? 2 : 3);
     }
 
     /** The most that the supply is; empty when that is not known. */
@@ -143,13 +143,12 @@ final class PartedFloor {
         if (required == 0) {
             return true;
         }
-        if (required > SectionFloor.HIGHEST_FLUX
-                || plane.plan.heater().hasDensity() && required > plane.density()
-                || !gives(required, outdoor)) {
+        if (required > SectionFloor.HIGHEST_FLUX || required > plane.mostMade() || !gives(required, outdoor)) {
             return false;
         }
         List<State> states = at(required, outdoor);
-        boolean carries = most().isEmpty() || supply(required, outdoor) <= most().getAsDouble();
+        boolean carries = PartAnswers.whole(this, required, outdoor).heaterFlux() <= plane.matsDensity
+                && (most().isEmpty() || supply(required, outdoor) <= most().getAsDouble());
         for (int i = 0; carries && i < parts.size(); i++) {
             State state = states.get(i);
             carries = bounds(i).stream().allMatch(bound -> bound.number().of(state) <= bound.maximum());

@@ -140,7 +140,7 @@ final class Plan {
 
     final Survey survey;
     final double[] values;
-    final List<String> addresses;
+    private final Inputs inputs;
     final int rooms;
     final int spaces;
     final int outdoors;
@@ -174,7 +174,7 @@ final class Plan {
     Plan(PlanBuilder built) {
         survey = built.survey;
         values = built.inputs.values();
-        addresses = List.copyOf(built.inputs.addresses());
+        inputs = built.inputs;
         rooms = built.rooms;
         spaces = built.spaces;
         outdoors = rooms + spaces;
@@ -197,6 +197,11 @@ final class Plan {
         linkPair = built.linkPair;
         site = built.site;
         roomIndexes = built.roomIndexes;
+    }
+
+    /** The address of an input as a JSON Pointer into the survey. */
+    String address(int input) {
+        return inputs.address(input);
     }
 
     /** The plan of a survey in which everything holds that must hold. */

@@ -34,7 +34,7 @@ import org.treadwarm.survey.Junction;
 import org.treadwarm.survey.JunctionPlace;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Opening;
-import org.treadwarm.survey.Pointer;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Site;
 import org.treadwarm.survey.Space;
@@ -98,9 +98,9 @@ final class PlanBuilder {
         survey.assemblies().forEach(this::assembly);
         int space = rooms;
         for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
-            String pointer = Pointer.to("/spaces", entry.getKey());
+            Place at = Place.ROOT.at("/spaces").key(entry.getKey());
             Space given = entry.getValue();
-            exchanges(pointer, space++, given.surfaces(), given.junctions(), given.air(), NONE, NONE);
+            exchanges(at, space++, given.surfaces(), given.junctions(), given.air(), NONE, NONE);
         }
         for (int i = 0; i < rooms; i++) {
             room(i, survey.rooms().get(i));
@@ -111,33 +111,34 @@ final class PlanBuilder {
 
     private void site() {
         Site given = survey.site();
+        Place at = Place.ROOT.at("/site");
         site = new SiteIndexes(
-                inputs.add("/site/outdoorTemperature", given.outdoorTemperature()),
-                inputs.optional("/site/annualMeanTemperature", given.annualMeanTemperature()),
-                inputs.add("/site/altitude", given.altitude()),
-                inputs.add("/site/groundSeasonFactor", given.groundSeasonFactor()),
-                inputs.add("/site/groundwaterFactor", given.groundwaterFactor()));
+                inputs.add(at, "/outdoorTemperature", given.outdoorTemperature()),
+                inputs.optional(at, "/annualMeanTemperature", given.annualMeanTemperature()),
+                inputs.add(at, "/altitude", given.altitude()),
+                inputs.add(at, "/groundSeasonFactor", given.groundSeasonFactor()),
+                inputs.add(at, "/groundwaterFactor", given.groundwaterFactor()));
     }
 
     private void nodes() {
         for (int i = 0; i < rooms; i++) {
             Room room = survey.rooms().get(i);
             name(i, room.name());
-            nodeTemperature[i] = inputs.add("/rooms/" + i + "/indoorTemperature", room.indoorTemperature());
+            nodeTemperature[i] =
+                    inputs.add(Place.ROOT.item("/rooms", i), "/indoorTemperature", room.indoorTemperature());
         }
         int node = rooms;
         List<Integer> floats = new ArrayList<>();
         for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
             Space space = entry.getValue();
-            String pointer = Pointer.to("/spaces", entry.getKey());
+            Place at = Place.ROOT.at("/spaces").key(entry.getKey());
             name(node, entry.getKey());
             if (space.kind() == SpaceKind.HELD) {
                 nodeTemperature[node] =
-                        inputs.add(pointer + "/temperature", space.temperature().orElseThrow());
+                        inputs.add(at, "/temperature", space.temperature().orElseThrow());
             } else if (space.temperatureFactor().isPresent()) {
                 factor[node] = inputs.add(
-                        pointer + "/temperatureFactor",
-                        space.temperatureFactor().get());
+                        at, "/temperatureFactor", space.temperatureFactor().get());
             } else {
                 floating[node] = floats.size();
                 floats.add(node);
@@ -157,42 +158,40 @@ final class PlanBuilder {
     }
 
     private void assembly(String name, Assembly assembly) {
-        String pointer = Pointer.to("/assemblies", name);
+        Place at = Place.ROOT.at("/assemblies").key(name);
         HeatFlow direction = assembly.heatFlow().heatFlow();
-        int stack =
-                assembly.uValue().isPresent() ? NONE : stacks.add(pointer + "/layers", assembly.layers(), direction);
+        int stack = assembly.uValue().isPresent() ? NONE : stacks.add(at.at("/layers"), assembly.layers(), direction);
         assemblyNumbers.put(name, assemblies.size());
         assemblies.add(new AssemblyPlan(
                 name,
                 stack,
-                inputs.optional(pointer + "/uValue", assembly.uValue()),
+                inputs.optional(at, "/uValue", assembly.uValue()),
                 Films.inside(direction.word()),
                 Films.outside(direction.word()),
-                inputs.optional(pointer + "/insideCoefficient", assembly.insideCoefficient()),
-                inputs.optional(pointer + "/outsideCoefficient", assembly.outsideCoefficient())));
+                inputs.optional(at, "/insideCoefficient", assembly.insideCoefficient()),
+                inputs.optional(at, "/outsideCoefficient", assembly.outsideCoefficient())));
     }
 
     private void room(int i, Room room) {
-        String pointer = "/rooms/" + i;
-        int floorArea = inputs.add(pointer + "/floorArea", room.floorArea());
-        int height = inputs.add(pointer + "/height", room.height());
+        Place at = Place.ROOT.item("/rooms", i);
+        int floorArea = inputs.add(at, "/floorArea", room.floorArea());
+        int height = inputs.add(at, "/height", room.height());
         roomIndexes[i] = new RoomIndexes(
                 floorArea,
                 height,
-                inputs.add(pointer + "/reheat", room.reheat()),
-                inputs.optional(pointer + "/warmUp/from", room.warmUp().map(WarmUpGoal::from)),
-                inputs.optional(pointer + "/warmUp/within", room.warmUp().map(WarmUpGoal::within)),
-                inputs.add(pointer + "/allowance", room.allowance()),
-                inputs.add(pointer + "/otherHeat", room.otherHeat()));
-        exchanges(pointer, i, room.surfaces(), room.junctions(), room.air(), floorArea, height);
+                inputs.add(at, "/reheat", room.reheat()),
+                inputs.optional(at, "/warmUp/from", room.warmUp().map(WarmUpGoal::from)),
+                inputs.optional(at, "/warmUp/within", room.warmUp().map(WarmUpGoal::within)),
+                inputs.add(at, "/allowance", room.allowance()),
+                inputs.add(at, "/otherHeat", room.otherHeat()));
+        exchanges(at, i, room.surfaces(), room.junctions(), room.air(), floorArea, height);
         if (room.heatedFloor().isPresent()) {
-            floors[i] =
-                    floor(pointer + "/heatedFloor", i, room, room.heatedFloor().get(), floorArea);
+            floors[i] = floor(at.at("/heatedFloor"), i, room, room.heatedFloor().get(), floorArea);
         }
     }
 
     private void exchanges(
-            String pointer,
+            Place at,
             int owner,
             List<Surface> surfaces,
             List<Junction> junctions,
@@ -200,14 +199,14 @@ final class PlanBuilder {
             int floorArea,
             int height) {
         for (int i = 0; i < surfaces.size(); i++) {
-            surface(Pointer.to(pointer + "/surfaces", i), owner, surfaces.get(i), floorArea);
+            surface(at.item("/surfaces", i), owner, surfaces.get(i), floorArea);
         }
         for (int i = 0; i < junctions.size(); i++) {
             Junction junction = junctions.get(i);
             if (junction.at() == JunctionPlace.ROOM) {
-                String at = Pointer.to(pointer + "/junctions", i);
-                int psi = inputs.add(at + "/psi", junction.psi());
-                int length = inputs.add(at + "/length", junction.length());
+                Place own = at.item("/junctions", i);
+                int psi = inputs.add(own, "/psi", junction.psi());
+                int length = inputs.add(own, "/length", junction.length());
                 plain(
                         LinkKind.JUNCTION,
                         junction.title(),
@@ -219,42 +218,42 @@ final class PlanBuilder {
                         AirWay.NONE);
             }
         }
-        air.ifPresent(given -> air(pointer + "/air", owner, given, floorArea, height));
+        air.ifPresent(given -> air(at.at("/air"), owner, given, floorArea, height));
     }
 
     private void plain(LinkKind kind, String name, int owner, int other, int first, int second, int third, AirWay way) {
         links.add(new Link(kind, name, owner, other, NONE, NONE, NONE, NONE, NONE, 0, 0, first, second, third, way));
     }
 
-    private void air(String pointer, int owner, Air air, int floorArea, int height) {
+    private void air(Place at, int owner, Air air, int floorArea, int height) {
         int outdoors = rooms + spaces;
         if (air.changeRate().isPresent()) {
-            int rate = inputs.add(pointer + "/changeRate", air.changeRate().get());
+            int rate = inputs.add(at, "/changeRate", air.changeRate().get());
             if (air.volume().isPresent()) {
-                int volume = inputs.add(pointer + "/volume", air.volume().get());
+                int volume = inputs.add(at, "/volume", air.volume().get());
                 plain(LinkKind.AIR, "air", owner, outdoors, rate, volume, NONE, AirWay.RATE);
             } else {
                 plain(LinkKind.AIR, "air", owner, outdoors, rate, floorArea, height, AirWay.RATE);
             }
         } else if (air.flow().isPresent()) {
-            int flow = inputs.add(pointer + "/flow", air.flow().get());
+            int flow = inputs.add(at, "/flow", air.flow().get());
             plain(LinkKind.AIR, "air", owner, outdoors, flow, NONE, NONE, AirWay.FLOW);
         } else {
-            int supply = inputs.add(pointer + "/supply", air.supply().orElseThrow());
-            int recovery = inputs.add(pointer + "/recovery", air.recovery().orElseThrow());
+            int supply = inputs.add(at, "/supply", air.supply().orElseThrow());
+            int recovery = inputs.add(at, "/recovery", air.recovery().orElseThrow());
             plain(LinkKind.AIR, "air", owner, outdoors, supply, recovery, NONE, AirWay.SUPPLY);
         }
     }
 
-    private void surface(String pointer, int owner, Surface surface, int floorArea) {
+    private void surface(Place at, int owner, Surface surface, int floorArea) {
         int other = nodes.get(surface.to());
-        int area = extent(pointer, surface.area(), surface.width());
-        int second = inputs.optional(pointer + "/height", surface.height());
+        int area = extent(at, surface.area(), surface.width());
+        int second = inputs.optional(at, "/height", surface.height());
         // A given U-value already holds the slab, so what the survey says of it has no effect.
         boolean groundCounts =
                 survey.assemblies().get(surface.assembly()).uValue().isEmpty();
         int ground = surface.ground().isPresent() && groundCounts
-                ? ground(pointer + "/ground", surface.ground().get(), floorArea)
+                ? ground(at.at("/ground"), surface.ground().get(), floorArea)
                 : NONE;
         int face = face(surface.assembly(), side(other));
         int first = links.size() + 1;
@@ -277,7 +276,7 @@ final class PlanBuilder {
                 AirWay.NONE));
         for (int i = 0; i < count; i++) {
             Opening opening = surface.openings().get(i);
-            String at = Pointer.to(pointer + "/openings", i);
+            Place own = at.item("/openings", i);
             links.add(new Link(
                     LinkKind.OPENING,
                     opening.title(),
@@ -285,9 +284,9 @@ final class PlanBuilder {
                     other,
                     face(opening.assembly(), side(other)),
                     NONE,
-                    extent(at, opening.area(), opening.width()),
-                    inputs.optional(at + "/height", opening.height()),
-                    inputs.add(at + "/count", opening.count()),
+                    extent(own, opening.area(), opening.width()),
+                    inputs.optional(own, "/height", opening.height()),
+                    inputs.add(own, "/count", opening.count()),
                     0,
                     0,
                     NONE,
@@ -298,10 +297,8 @@ final class PlanBuilder {
     }
 
     /** The input of an area, or of the width that is given with a height instead. */
-    private int extent(String pointer, Optional<Reading> area, Optional<Reading> width) {
-        return area.isPresent()
-                ? inputs.add(pointer + "/area", area.get())
-                : inputs.add(pointer + "/width", width.orElseThrow());
+    private int extent(Place at, Optional<Reading> area, Optional<Reading> width) {
+        return area.isPresent() ? inputs.add(at, "/area", area.get()) : inputs.add(at, "/width", width.orElseThrow());
     }
 
     private Side side(int other) {
@@ -319,94 +316,92 @@ final class PlanBuilder {
         return known;
     }
 
-    private int ground(String pointer, Ground ground, int floorArea) {
+    private int ground(Place at, Ground ground, int floorArea) {
         boolean suspended = ground.kind() == GroundKind.SUSPENDED;
         grounds.add(new GroundPlan(
                 suspended,
                 ground.area().isPresent()
-                        ? inputs.add(pointer + "/area", ground.area().get())
+                        ? inputs.add(at, "/area", ground.area().get())
                         : floorArea,
-                inputs.add(pointer + "/exposedPerimeter", ground.exposedPerimeter()),
-                inputs.add(pointer + "/wallThickness", ground.wallThickness()),
-                inputs.add(pointer + "/soilConductivity", ground.soilConductivity()),
-                inputs.optional(pointer + "/floorHeight", ground.floorHeight()),
-                inputs.optional(pointer + "/wallUValue", ground.wallUValue()),
-                inputs.optional(pointer + "/ventArea", ground.ventArea()),
-                inputs.optional(pointer + "/windSpeed", ground.windSpeed()),
+                inputs.add(at, "/exposedPerimeter", ground.exposedPerimeter()),
+                inputs.add(at, "/wallThickness", ground.wallThickness()),
+                inputs.add(at, "/soilConductivity", ground.soilConductivity()),
+                inputs.optional(at, "/floorHeight", ground.floorHeight()),
+                inputs.optional(at, "/wallUValue", ground.wallUValue()),
+                inputs.optional(at, "/ventArea", ground.ventArea()),
+                inputs.optional(at, "/windSpeed", ground.windSpeed()),
                 ground.shielding()));
         return grounds.size() - 1;
     }
 
-    private FloorPlan floor(String pointer, int node, Room room, HeatedFloor floor, int floorArea) {
-        int above = stacks.add(pointer + "/above", floor.above(), HeatFlow.UP);
-        int below = stacks.add(pointer + "/below", floor.below(), HeatFlow.DOWN);
+    private FloorPlan floor(Place at, int node, Room room, HeatedFloor floor, int floorArea) {
+        int above = stacks.add(at.at("/above"), floor.above(), HeatFlow.UP);
+        int below = stacks.add(at.at("/below"), floor.below(), HeatFlow.DOWN);
         List<LayerLimit> limits = new ArrayList<>();
         for (int i = 0; i < floor.above().size(); i++) {
             Layer layer = floor.above().get(i);
             if (layer.maximumTemperature().isPresent()) {
                 int maximum = inputs.add(
-                        Pointer.to(pointer + "/above", i) + "/maximumTemperature",
+                        at.item("/above", i),
+                        "/maximumTemperature",
                         layer.maximumTemperature().get());
                 limits.add(new LayerLimit(layer.title(i + 1), i, maximum));
             }
         }
         HeaterPlan heater =
-                heater(pointer + "/heater", floor.heater(), !floor.parts().isEmpty());
+                heater(at.at("/heater"), floor.heater(), !floor.parts().isEmpty());
         return new FloorPlan(
                 node,
-                inputs.add(pointer + "/area", floor.area()),
+                inputs.add(at, "/area", floor.area()),
                 above,
                 below,
                 floor.ground().isPresent()
-                        ? ground(pointer + "/ground", floor.ground().get(), floorArea)
+                        ? ground(at.at("/ground"), floor.ground().get(), floorArea)
                         : NONE,
                 floor.to().map(nodes::get).orElse(NONE),
-                edges("/rooms/" + node + "/junctions", room.junctions()),
-                inputs.optional(pointer + "/maximumSurfaceTemperature", floor.maximumSurfaceTemperature()),
+                edges(Place.ROOT.item("/rooms", node).at("/junctions"), room.junctions()),
+                inputs.optional(at, "/maximumSurfaceTemperature", floor.maximumSurfaceTemperature()),
                 List.copyOf(limits),
                 heater,
-                parts(pointer + "/parts", floor.parts(), heater.spacing()));
+                parts(at.at("/parts"), floor.parts(), heater.spacing()));
     }
 
-    private List<PartPlan> parts(String pointer, List<FloorPart> parts, int spacing) {
+    private List<PartPlan> parts(Place list, List<FloorPart> parts, int spacing) {
         List<PartPlan> plans = new ArrayList<>();
         for (int i = 0; i < parts.size(); i++) {
             FloorPart part = parts.get(i);
-            String at = Pointer.to(pointer, i);
-            int own = inputs.optional(at + "/spacing", part.spacing());
+            Place at = list.item(i);
+            int own = inputs.optional(at, "/spacing", part.spacing());
             plans.add(new PartPlan(
-                    part.title(i + 1),
-                    part.zone(),
-                    inputs.add(at + "/area", part.area()),
-                    own == NONE ? spacing : own));
+                    part.title(i + 1), part.zone(), inputs.add(at, "/area", part.area()), own == NONE ? spacing : own));
         }
         return List.copyOf(plans);
     }
 
-    private HeaterPlan heater(String pointer, Optional<Heater> heater, boolean parted) {
+    private HeaterPlan heater(Place at, Optional<Heater> heater, boolean parted) {
         return new HeaterPlan(
                 heater.map(given -> given.kind() == HeaterKind.WATER).orElse(false),
-                inputs.optional(pointer + "/density", heater.flatMap(Heater::density)),
-                inputs.optional(pointer + "/spacing", heater.flatMap(Heater::spacing)),
-                inputs.optional(pointer + "/diameter", heater.flatMap(Heater::diameter)),
-                inputs.optional(pointer + "/wallThickness", heater.flatMap(Heater::wallThickness)),
-                inputs.optional(pointer + "/wallConductivity", heater.flatMap(Heater::wallConductivity)),
-                inputs.optional(pointer + "/linearPower", heater.flatMap(Heater::linearPower)),
-                inputs.optional(pointer + "/supplyTemperature", heater.flatMap(Heater::supplyTemperature)),
-                inputs.optional(pointer + "/spread", heater.flatMap(Heater::spread)),
+                inputs.optional(at, "/density", heater.flatMap(Heater::density)),
+                inputs.optional(at, "/spacing", heater.flatMap(Heater::spacing)),
+                inputs.optional(at, "/diameter", heater.flatMap(Heater::diameter)),
+                inputs.optional(at, "/wallThickness", heater.flatMap(Heater::wallThickness)),
+                inputs.optional(at, "/wallConductivity", heater.flatMap(Heater::wallConductivity)),
+                inputs.optional(at, "/linearPower", heater.flatMap(Heater::linearPower)),
+                inputs.optional(at, "/supplyTemperature", heater.flatMap(Heater::supplyTemperature)),
+                inputs.optional(at, "/spread", heater.flatMap(Heater::spread)),
                 parted);
     }
 
-    private List<EdgePlan> edges(String pointer, List<Junction> junctions) {
+    private List<EdgePlan> edges(Place list, List<Junction> junctions) {
         List<EdgePlan> edges = new ArrayList<>();
         for (int i = 0; i < junctions.size(); i++) {
             Junction junction = junctions.get(i);
             if (junction.at() == JunctionPlace.HEATED_FLOOR) {
-                String at = Pointer.to(pointer, i);
+                Place at = list.item(i);
                 edges.add(new EdgePlan(
                         junction.title(),
-                        inputs.add(at + "/psi", junction.psi()),
-                        inputs.add(at + "/length", junction.length()),
+                        inputs.add(at, "/psi", junction.psi()),
+                        inputs.add(at, "/length", junction.length()),
                         nodes.get(junction.to())));
             }
         }

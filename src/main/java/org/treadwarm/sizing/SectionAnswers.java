@@ -74,7 +74,7 @@ final class SectionAnswers {
                 limits.add(new SectionLimit(
                         state.downward(),
                         state.edge(),
-                        bound.slot() == density
+                        bound.slot() == density || bound.slot() == density + 2
                                 ? Optional.empty()
                                 : Optional.of(section.split(bound.number(), flux, outdoor))));
             }

@@ -11,6 +11,7 @@ import org.treadwarm.physics.section.FloorHeater.WaterPipe;
 import org.treadwarm.physics.section.FloorLayer;
 import org.treadwarm.physics.section.FloorSection;
 import org.treadwarm.physics.section.FloorTemperatures;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.SectionQuestion;
 import org.treadwarm.survey.SectionQuestion.EmbeddedKind;
 import org.treadwarm.units.Reading;
@@ -73,7 +74,7 @@ public record SectionEvaluation(
     private static FloorSection section(SectionQuestion question) {
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add("/layers", question.layers(), HeatFlow.UP);
+        builder.add(Place.ROOT.at("/layers"), question.layers(), HeatFlow.UP);
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] resistances = new double[stack.layers];

@@ -126,6 +126,9 @@ final class SectionFloor {
             bounds.add(new Bound(
                     last + 1, State::water, meanWater(in[plane.plan.heater().supplyTemperature()])));
         }
+        if (plane.mats.layout().isPresent()) {
+            bounds.add(new Bound(last + 2, State::made, plane.matsDensity));
+        }
         return bounds;
     }
 
@@ -215,7 +218,7 @@ final class SectionFloor {
         if (required == 0) {
             return true;
         }
-        if (required > HIGHEST_FLUX || plane.plan.heater().hasDensity() && required > plane.density()) {
+        if (required > HIGHEST_FLUX || required > plane.mostMade()) {
             return false;
         }
         State state = at(required, outdoor);

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.BooleanSupplier;
+import java.util.function.DoubleConsumer;
 import org.treadwarm.physics.section.Condition;
 import org.treadwarm.physics.section.FloorHeater;
 import org.treadwarm.physics.section.FloorHeater.HeatingCable;
@@ -48,9 +49,9 @@ record SectionGeometry(double spacing, List<FloorLayer> layers, FloorHeater heat
      * @throws IllegalStateException if its error does not fall within the cells allowed
      * @throws java.util.concurrent.CancellationException when asked to give up
      */
-    FloorResponse solve(BooleanSupplier stopped) {
+    FloorResponse solve(BooleanSupplier stopped, DoubleConsumer progress) {
         Condition.Film film = new Condition.Film(0, coefficientBelow);
-        return FloorResponse.of(new FloorSection(spacing, layers, heater, film, film), stopped);
+        return FloorResponse.of(new FloorSection(spacing, layers, heater, film, film), stopped, progress);
     }
 
     /** What was made of a floor: its geometry, or why there is none. */

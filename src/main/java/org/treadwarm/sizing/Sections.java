@@ -9,6 +9,7 @@ import java.util.Set;
 import java.util.concurrent.CancellationException;
 import java.util.concurrent.atomic.LongAdder;
 import java.util.function.BooleanSupplier;
+import java.util.function.DoubleConsumer;
 import org.treadwarm.physics.section.FloorResponse;
 
 /**
@@ -33,6 +34,7 @@ final class Sections {
     private record Tried(Optional<FloorResponse> response, String whyNot) {}
 
     private final boolean looking;
+    private final BooleanSupplier stopped;
     private final Set<SectionGeometry> met = new LinkedHashSet<>();
 
     private static final LongAdder REMEMBERED = new LongAdder();
@@ -42,17 +44,19 @@ final class Sections {
     private int followed;
     private String whyNot = "";
 
-    Sections() {
-        this(false);
+    /** @param stopped asked at every step of the solver, and before each floor is followed through time, whether to give up */
+    Sections(BooleanSupplier stopped) {
+        this(false, stopped);
     }
 
-    private Sections(boolean looking) {
+    private Sections(boolean looking, BooleanSupplier stopped) {
         this.looking = looking;
+        this.stopped = stopped;
     }
 
     /** Solves nothing and follows nothing, but remembers what it was asked for. */
     static Sections looking() {
-        return new Sections(true);
+        return new Sections(true, () -> false);
     }
 
     /** The geometries met that would have to be solved anew; none when there are more than can be remembered. */
@@ -71,13 +75,13 @@ final class Sections {
      *
      * @throws java.util.concurrent.CancellationException when asked to give up; then nothing is remembered
      */
-    static void solve(SectionGeometry geometry, BooleanSupplier stopped) {
-        remember(geometry, tried(geometry, stopped));
+    static void solve(SectionGeometry geometry, BooleanSupplier stopped, DoubleConsumer progress) {
+        remember(geometry, tried(geometry, stopped, progress));
     }
 
-    private static Tried tried(SectionGeometry geometry, BooleanSupplier stopped) {
+    private static Tried tried(SectionGeometry geometry, BooleanSupplier stopped, DoubleConsumer progress) {
         try {
-            return new Tried(Optional.of(geometry.solve(stopped)), "");
+            return new Tried(Optional.of(geometry.solve(stopped, progress)), "");
         } catch (CancellationException stop) {
             throw stop;
         } catch (IllegalArgumentException | IllegalStateException problem) {
@@ -108,7 +112,7 @@ final class Sections {
                 return Optional.empty();
             }
             solved++;
-            tried = tried(geometry, () -> false);
+            tried = tried(geometry, stopped, share -> {});
             remember(geometry, tried);
         }
         whyNot = tried.whyNot();
@@ -121,8 +125,15 @@ final class Sections {
         }
     }
 
-    /** Whether this sizing may follow one more floor through time. */
+    /**
+     * Whether this sizing may follow one more floor through time.
+     *
+     * @throws CancellationException when asked to give up
+     */
     boolean mayFollow() {
+        if (!looking && stopped.getAsBoolean()) {
+            throw new CancellationException("asked to give up before a floor was followed through time");
+        }
         return !looking && followed++ < MOST_NEW;
     }
 

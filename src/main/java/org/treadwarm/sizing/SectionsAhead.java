@@ -21,6 +21,17 @@ public final class SectionsAhead {
         return new SectionsAhead(evaluation.evaluate(plan.values) ? evaluation.sections.unknown() : List.of());
     }
 
+    /** Whether others are the same floors. */
+    @Override
+    public boolean equals(Object other) {
+        return other instanceof SectionsAhead ahead && ahead.unknown.equals(unknown);
+    }
+
+    @Override
+    public int hashCode() {
+        return unknown.hashCode();
+    }
+
     /** Number of different floors. */
     public int count() {
         return unknown.size();
@@ -30,12 +41,13 @@ public final class SectionsAhead {
      * Solves them; the sizings that follow have them at hand.
      *
      * @param stopped asked at every step of the solver whether to give up
-     * @param progress told after every floor what share is done
+     * @param progress told now and then what share is done
      * @throws CancellationException when asked to give up; what was solved until then is kept
      */
     public void solve(BooleanSupplier stopped, DoubleConsumer progress) {
         for (int i = 0; i < unknown.size(); i++) {
-            Sections.solve(unknown.get(i), stopped);
+            double before = i;
+            Sections.solve(unknown.get(i), stopped, share -> progress.accept((before + share) / unknown.size()));
             progress.accept((i + 1.0) / unknown.size());
         }
     }

@@ -2,6 +2,7 @@ package org.treadwarm.sizing;
 
 import java.util.Optional;
 import java.util.concurrent.atomic.LongAdder;
+import java.util.function.BooleanSupplier;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Survey;
 
@@ -24,8 +25,33 @@ public final class Sizer {
      *     when an area or length is so near to nothing that numbers made with it are beyond all bounds
      */
     public static Sizing size(Survey survey) throws NoBalanceException {
+        return size(survey, () -> false);
+    }
+
+    /**
+     * The same, given up when asked to.
+     *
+     * @param stopped asked at every step of the solver of floors between their heaters, which alone may take long
+     * @throws java.util.concurrent.CancellationException when asked to give up; floors solved until then are remembered
+     */
+    public static Sizing size(Survey survey, BooleanSupplier stopped) throws NoBalanceException {
+        Evaluation evaluation = evaluated(survey, new Sections(stopped));
+        SIZED.increment();
+        return new Answers(evaluation).sizing();
+    }
+
+    /**
+     * Finds out whether a survey can be sized, without solving floors between their heaters, so it never takes long.
+     *
+     * @throws NoBalanceException as {@link #size(Survey)}
+     */
+    public static void check(Survey survey) throws NoBalanceException {
+        evaluated(survey, Sections.looking());
+    }
+
+    private static Evaluation evaluated(Survey survey, Sections sections) throws NoBalanceException {
         Plan plan = Plan.of(survey);
-        Evaluation evaluation = new Evaluation(plan);
+        Evaluation evaluation = new Evaluation(plan, sections);
         if (!evaluation.evaluate(plan.values)) {
             throw new NoBalanceException(new Problem(
                     "/spaces",
@@ -41,7 +67,6 @@ public final class Sizer {
                     "an area or length here is so small that what is divided by it is beyond all bounds",
                     "areas and lengths of things that can be built"));
         }
-        SIZED.increment();
-        return new Answers(evaluation).sizing();
+        return evaluation;
     }
 }

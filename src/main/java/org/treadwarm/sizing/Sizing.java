@@ -180,6 +180,7 @@ public record Sizing(
      * @param power of all mats, W
      * @param neededPower what the heater must make for the required flux, W
      * @param margin power less needed power, W; negative when the mats are too weak
+     * @param meanDensity power over the heated area, W/m², which limits the floor; sheets issued before it did do not hold it
      * @param pieces the mats to order
      * @param circuits that feed them; none when a mat is too large for the largest usual breaker
      */
@@ -190,6 +191,7 @@ public record Sizing(
             double power,
             double neededPower,
             double margin,
+            OptionalDouble meanDensity,
             List<MatPieces> pieces,
             List<MatCircuit> circuits) {}
 
@@ -275,14 +277,21 @@ public record Sizing(
             double waterContent,
             List<PracticeJudgement> limits) {}
 
-    /** A value beside a limit of practice, in SI units and degrees Celsius; what is left is negative when it is beyond. */
-    public record PracticeJudgement(String name, double value, double limit, double margin, String source) {}
+    /**
+     * A value beside a limit of practice, in SI units and degrees Celsius; what is left is negative when it is beyond.
+     *
+     * @param sense "at most" or "at least"; sheets issued before it was told do not hold it
+     */
+    public record PracticeJudgement(
+            String name, Optional<String> sense, double value, double limit, double margin, String source) {}
 
     /**
      * The warm water of the whole job: one supply temperature, which the room that needs the hottest water governs, and the balance of
      * its loops, each within its manifold.
      *
-     * @param pressure drop of the worst loop, Pa: what one pump for all manifolds gives beside manifold and boiler
+     * @param pressure what one pump for all manifolds gives, Pa: the drop of the worst loop, and of its manifold and the heat source
+     *     where the survey states them
+     * @param sourceDrop of the heat source, Pa, as stated
      * @param manifolds in the order in which the rooms name them
      */
     public record WaterTotal(
@@ -291,6 +300,7 @@ public record Sizing(
             double massFlow,
             double volumeFlow,
             double pressure,
+            OptionalDouble sourceDrop,
             double waterContent,
             List<ManifoldSizing> manifolds,
             List<LoopValve> valves) {}
@@ -300,7 +310,9 @@ public record Sizing(
      *
      * @param name as the rooms give it; left out for the manifold of the rooms that name none
      * @param loops how many hang on it
-     * @param pressure drop of its worst loop, Pa
+     * @param pressure drop of its worst loop, and of the manifold itself where the survey states it, Pa
+     * @param loopDrop drop of its worst loop alone, Pa, where the manifold's own is stated
+     * @param ownDrop of the manifold itself, Pa, as stated
      * @param throttled what a valve before it takes away when one pump feeds all manifolds, Pa
      */
     public record ManifoldSizing(
@@ -309,6 +321,8 @@ public record Sizing(
             double massFlow,
             double volumeFlow,
             double pressure,
+            OptionalDouble loopDrop,
+            OptionalDouble ownDrop,
             double throttled,
             double waterContent) {}
 

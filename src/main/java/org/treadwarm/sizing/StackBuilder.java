@@ -9,7 +9,7 @@ import org.treadwarm.physics.envelope.HeatFlow;
 import org.treadwarm.survey.AirGap;
 import org.treadwarm.survey.Bridging;
 import org.treadwarm.survey.Layer;
-import org.treadwarm.survey.Pointer;
+import org.treadwarm.survey.Place;
 import org.treadwarm.tables.Materials;
 
 /** Compiles piles of layers. */
@@ -35,20 +35,20 @@ final class StackBuilder {
     }
 
     /** Compiles one pile and gives its number. */
-    int add(String pointer, List<Layer> layers, HeatFlow direction) {
+    int add(Place pile, List<Layer> layers, HeatFlow direction) {
         int[] frame = new int[layers.size()];
         int frames = frames(layers, frame);
         Stack stack = new Stack(layers.size(), layerCount, frames);
         for (int i = 0; i < layers.size(); i++) {
             Layer layer = layers.get(i);
-            String at = Pointer.to(pointer, i);
+            Place at = pile.item(i);
             layer(stack, i, layer, at, direction);
             stack.frame[i] = frame[i];
             if (layer.bridging().isPresent()) {
                 Bridging bridging = layer.bridging().get();
-                stack.share[i] = inputs.add(at + "/bridging/share", bridging.share());
-                stack.bridgeConductivity[i] = inputs.optional(at + "/bridging/conductivity", bridging.conductivity());
-                stack.bridgeResistance[i] = inputs.optional(at + "/bridging/resistance", bridging.resistance());
+                stack.share[i] = inputs.add(at, "/bridging/share", bridging.share());
+                stack.bridgeConductivity[i] = inputs.optional(at, "/bridging/conductivity", bridging.conductivity());
+                stack.bridgeResistance[i] = inputs.optional(at, "/bridging/resistance", bridging.resistance());
             }
         }
         layerCount += layers.size();
@@ -56,24 +56,23 @@ final class StackBuilder {
         return stacks.size() - 1;
     }
 
-    private void layer(Stack stack, int i, Layer layer, String pointer, HeatFlow direction) {
-        stack.resistance[i] = inputs.optional(pointer + "/resistance", layer.resistance());
+    private void layer(Stack stack, int i, Layer layer, Place at, HeatFlow direction) {
+        stack.resistance[i] = inputs.optional(at, "/resistance", layer.resistance());
         if (layer.airGap().isPresent()) {
             AirGap gap = layer.airGap().get();
             stack.airGap[i] = true;
-            stack.thickness[i] = inputs.add(pointer + "/airGap/thickness", gap.thickness());
+            stack.thickness[i] = inputs.add(at, "/airGap/thickness", gap.thickness());
             stack.direction[i] = gap.direction().map(d -> d.heatFlow()).orElse(direction);
             if (!gap.emissivities().isEmpty()) {
-                String faces = pointer + "/airGap/emissivities/";
-                stack.emissivityInside[i] =
-                        inputs.add(faces + 0, gap.emissivities().get(0));
-                stack.emissivityOutside[i] =
-                        inputs.add(faces + 1, gap.emissivities().get(1));
+                stack.emissivityInside[i] = inputs.add(
+                        at, "/airGap/emissivities/0", gap.emissivities().get(0));
+                stack.emissivityOutside[i] = inputs.add(
+                        at, "/airGap/emissivities/1", gap.emissivities().get(1));
             }
             return;
         }
-        stack.thickness[i] = inputs.optional(pointer + "/thickness", layer.thickness());
-        stack.conductivity[i] = inputs.optional(pointer + "/conductivity", layer.conductivity());
+        stack.thickness[i] = inputs.optional(at, "/thickness", layer.thickness());
+        stack.conductivity[i] = inputs.optional(at, "/conductivity", layer.conductivity());
         if (layer.resistance().isEmpty() && layer.conductivity().isEmpty()) {
             stack.tableConductivity[i] = Materials.find(layer.material().orElseThrow())
                     .orElseThrow()

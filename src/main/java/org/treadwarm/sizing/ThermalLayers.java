@@ -7,6 +7,7 @@ import org.treadwarm.physics.envelope.HeatFlow;
 import org.treadwarm.physics.warmup.FloorLayer;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.LayerMatter;
+import org.treadwarm.survey.Place;
 
 /**
  * A survey's layers as they pass and hold heat. A framed layer has the mean resistance of its two parts side by side (isothermal
@@ -41,7 +42,7 @@ final class ThermalLayers {
     private static double[] resistances(List<Layer> layers, HeatFlow direction) {
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add("", layers, direction);
+        builder.add(Place.ROOT, layers, direction);
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] layer = new double[stack.layers];

@@ -14,6 +14,7 @@ import org.treadwarm.physics.section.WallFoot.Wall;
 import org.treadwarm.physics.section.WallFootCoupling;
 import org.treadwarm.sizing.SectionEvaluation.SectionAccuracy;
 import org.treadwarm.survey.LayerMatter;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.WallFootQuestion;
 import org.treadwarm.tables.Films;
 import org.treadwarm.units.Reading;
@@ -69,11 +70,7 @@ public record WallFootEvaluation(
      * @throws java.util.concurrent.CancellationException when asked to give up
      */
     public static WallFootEvaluation of(WallFootQuestion question, BooleanSupplier stopped, DoubleConsumer progress) {
-        Optional<EdgeInsulation> strip = question.edgeThickness()
-                .map(thickness -> new EdgeInsulation(
-                        thickness.value(),
-                        question.edgeConductivity().orElseThrow().value(),
-                        question.edgeDepth().orElseThrow().value()));
+        Optional<EdgeInsulation> strip = strip(question);
         double parts = strip.isPresent() ? 3 : 2;
         WallFoot bare = foot(question, Optional.empty());
         double inSection = bare.slabCoefficient(stopped);
@@ -95,6 +92,15 @@ public record WallFootEvaluation(
                 height);
     }
 
+    /** The edge insulation of a question, where it has one. */
+    static Optional<EdgeInsulation> strip(WallFootQuestion question) {
+        return question.edgeThickness()
+                .map(thickness -> new EdgeInsulation(
+                        thickness.value(),
+                        question.edgeConductivity().orElseThrow().value(),
+                        question.edgeDepth().orElseThrow().value()));
+    }
+
     private static FootPsi psi(WallFootCoupling solved, double slab, double height) {
         return new FootPsi(
                 solved.psi(slab, height),
@@ -110,7 +116,8 @@ public record WallFootEvaluation(
         return SlabOnGround.transmittance(question.characteristicDimension().value(), thickness, soil);
     }
 
-    private static WallFoot foot(WallFootQuestion question, Optional<EdgeInsulation> strip) {
+    /** The section of a question. */
+    static WallFoot foot(WallFootQuestion question, Optional<EdgeInsulation> strip) {
         List<Solid> slab = new ArrayList<>();
         for (int i = 0; i < question.below().size(); i++) {
             LayerMatter matter = LayerMatter.of(question.below().get(i));
@@ -143,7 +150,7 @@ public record WallFootEvaluation(
         double thickness = question.thicknessOfWall();
         Inputs inputs = new Inputs();
         StackBuilder builder = new StackBuilder(inputs);
-        builder.add("/wall", question.wall(), HeatFlow.HORIZONTAL);
+        builder.add(Place.ROOT.at("/wall"), question.wall(), HeatFlow.HORIZONTAL);
         Stack stack = builder.all().get(0);
         double[] in = inputs.values();
         double[] layer = new double[stack.layers];

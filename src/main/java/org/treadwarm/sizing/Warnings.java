@@ -246,7 +246,7 @@ final class Warnings {
         for (int i = 0; i < plan.grounds.size(); i++) {
             double dimension = numbers.groundDimension[i];
             if (dimension < 1 || dimension > 40) {
-                String address = plan.addresses.get(plan.grounds.get(i).perimeter());
+                String address = plan.address(plan.grounds.get(i).perimeter());
                 add(
                         "unusual-slab",
                         address,

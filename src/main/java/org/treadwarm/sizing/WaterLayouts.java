@@ -34,6 +34,7 @@ import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.sizing.Sizing.WaterLayout;
 import org.treadwarm.sizing.Sizing.WaterTotal;
 import org.treadwarm.survey.Heater;
+import org.treadwarm.survey.Survey;
 import org.treadwarm.units.Reading;
 
 /** Lays the loops of a job's warm-water floors that are solved, and balances them. */
@@ -103,13 +104,21 @@ final class WaterLayouts {
     }
 
     private final Map<Integer, WaterLayout> layouts = new TreeMap<>();
+    private final ManifoldDrops manifoldDrops;
+    private final OptionalDouble sourceDrop;
     private Optional<WaterTotal> total = Optional.empty();
 
-    private WaterLayouts() {}
+    private WaterLayouts(Survey survey) {
+        this.manifoldDrops = new ManifoldDrops(survey);
+        this.sourceDrop = survey.site()
+                .heatSourceDrop()
+                .map(drop -> OptionalDouble.of(drop.value()))
+                .orElse(OptionalDouble.empty());
+    }
 
     /** The loops of every room whose water floor is solved and gives heat. */
     static WaterLayouts of(Evaluation numbers) {
-        WaterLayouts layouts = new WaterLayouts();
+        WaterLayouts layouts = new WaterLayouts(numbers.plan.survey);
         List<Room> rooms = new ArrayList<>();
         for (FloorEvaluation floor : numbers.floors) {
             if (floor != null && floor.plan.heater().water()) {
@@ -205,9 +214,10 @@ final class WaterLayouts {
         return room.loops().stream().mapToInt(Loops::count).sum();
     }
 
-    private static WaterTotal total(String governing, Map<Optional<String>, List<Room>> byManifold) {
+    private WaterTotal total(String governing, Map<Optional<String>, List<Room>> byManifold) {
         Map<Optional<String>, Manifold> balanced = new LinkedHashMap<>();
-        byManifold.forEach((name, on) -> balanced.put(name, balance(on)));
+        byManifold.forEach((name, on) ->
+                balanced.put(name, balance(on, manifoldDrops.of(name).orElse(0))));
         double pressure = balanced.values().stream()
                 .mapToDouble(manifold -> manifold.duty().pressure())
                 .max()
@@ -215,7 +225,7 @@ final class WaterLayouts {
         List<ManifoldSizing> manifolds = new ArrayList<>();
         List<LoopValve> valves = new ArrayList<>();
         balanced.forEach((name, manifold) -> {
-            manifolds.add(answer(name, manifold, pressure));
+            manifolds.add(answer(name, manifold, manifoldDrops.of(name), pressure));
             valves.addAll(valves(byManifold.get(name), manifold));
         });
         return new WaterTotal(
@@ -226,19 +236,24 @@ final class WaterLayouts {
                 governing,
                 manifolds.stream().mapToDouble(ManifoldSizing::massFlow).sum(),
                 manifolds.stream().mapToDouble(ManifoldSizing::volumeFlow).sum(),
-                pressure,
+                pressure + sourceDrop.orElse(0),
+                sourceDrop,
                 manifolds.stream().mapToDouble(ManifoldSizing::waterContent).sum(),
                 List.copyOf(manifolds),
                 List.copyOf(valves));
     }
 
-    private static ManifoldSizing answer(Optional<String> name, Manifold manifold, double pressure) {
+    private static ManifoldSizing answer(
+            Optional<String> name, Manifold manifold, OptionalDouble ownDrop, double pressure) {
+        double worst = manifold.valves().stream().mapToDouble(Valve::drop).max().orElseThrow();
         return new ManifoldSizing(
                 name,
                 manifold.valves().size(),
                 manifold.duty().massFlow(),
                 manifold.duty().volumeFlow(),
                 manifold.duty().pressure(),
+                ownDrop.isPresent() ? OptionalDouble.of(worst) : OptionalDouble.empty(),
+                ownDrop,
                 pressure - manifold.duty().pressure(),
                 manifold.content());
     }
@@ -247,10 +262,10 @@ final class WaterLayouts {
         return rooms.stream().mapToDouble(Room::supply).max().orElseThrow();
     }
 
-    private static Manifold balance(List<Room> rooms) {
+    private static Manifold balance(List<Room> rooms, double ownDrop) {
         List<Loops> loops =
                 rooms.stream().flatMap(room -> room.loops().stream()).toList();
-        return Manifold.balance(loops, 0, rooms.get(0).carrier().density(hottest(rooms)));
+        return Manifold.balance(loops, ownDrop, rooms.get(0).carrier().density(hottest(rooms)));
     }
 
     /** The valves of a manifold; its loops stand in the order of rooms and parts. */

@@ -36,7 +36,7 @@ final class FloorRules {
                         "a heated floor on the ground is described by \"ground\"",
                         "outdoors, or the name of a space or of another room");
             } else {
-                otherSides.check(pointer + "/to", to, room.name(), true);
+                otherSides.check(pointer, to, room.name(), true);
             }
         });
         layers(pointer, floor);
@@ -86,6 +86,7 @@ final class FloorRules {
             notHis(pointer + "/spread", heater.spread(), "only warm water has a spread");
             notHis(pointer + "/feederLength", heater.feederLength(), "only warm water has feeders");
             mats(pointer, heater);
+            notHis(pointer + "/manifoldDrop", heater.manifoldDrop(), "only warm water comes from a manifold");
             notHis(pointer + "/glycol", heater.glycol(), "only warm water may hold glycol");
             heater.manifold()
                     .ifPresent(name -> findings.add(

@@ -133,6 +133,19 @@ public record Heater(
         Optional<String> manifold,
 
         @Quantity(
+                kind = QuantityKind.PRESSURE,
+                min = 0,
+                max = 200000,
+                plausibleFrom = 500,
+                plausibleTo = 40000,
+                formUnit = "kPa",
+                label = "pressure drop of the manifold",
+                help =
+                        "Bars, open valves, actuators and mixer, at the flow of the whole manifold, as the maker states it. One room of"
+                                + " a manifold is enough.")
+        Optional<Reading> manifoldDrop,
+
+        @Quantity(
                 kind = QuantityKind.RATIO,
                 min = 0,
                 max = 0.57,

@@ -23,7 +23,7 @@ final class JunctionRules {
                         "a junction does not lead to the ground",
                         OtherSides.sides("outdoors"));
             } else {
-                otherSides.check(pointer + "/to", junction.to(), name, isRoom);
+                otherSides.check(pointer, junction.to(), name, isRoom);
             }
             if (junction.at() == JunctionPlace.HEATED_FLOOR && !hasHeatedFloor) {
                 findings.add(

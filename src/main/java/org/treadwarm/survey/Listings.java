@@ -8,7 +8,7 @@ import java.util.Map;
 final class Listings {
     private final Survey survey;
     private final Findings findings;
-    private final Map<Listing, String> listed = new HashMap<>();
+    private final Map<Listing, Place> listed = new HashMap<>();
 
     /** A surface's name seen from an owner towards another side. */
     private record Listing(String owner, String to, String title) {}
@@ -19,27 +19,27 @@ final class Listings {
     }
 
     void check() {
-        survey.spaces().forEach((name, space) -> check(Pointer.to("/spaces", name), name, space.surfaces()));
+        survey.spaces().forEach((name, space) -> check(Place.ROOT.at("/spaces").key(name), name, space.surfaces()));
         for (int i = 0; i < survey.rooms().size(); i++) {
             Room room = survey.rooms().get(i);
-            check("/rooms/" + i, room.name(), room.surfaces());
+            check(Place.ROOT.item("/rooms", i), room.name(), room.surfaces());
         }
     }
 
-    private void check(String pointer, String owner, List<Surface> surfaces) {
+    private void check(Place at, String owner, List<Surface> surfaces) {
         for (int i = 0; i < surfaces.size(); i++) {
             Surface surface = surfaces.get(i);
-            String at = pointer + "/surfaces/" + i;
-            String opposite = listed.get(new Listing(surface.to(), owner, surface.title()));
+            Place own = at.item("/surfaces", i);
+            Place opposite = listed.get(new Listing(surface.to(), owner, surface.title()));
             if (opposite != null && !surface.to().equals(owner)) {
                 findings.add(
-                        at,
+                        own.pointer(),
                         surface.title(),
                         "\"" + surface.title() + "\" between \"" + owner + "\" and \"" + surface.to()
-                                + "\" is listed from the other side too, at " + opposite,
+                                + "\" is listed from the other side too, at " + opposite.pointer(),
                         "each surface once, from either side; or another name, if these are two surfaces");
             }
-            listed.putIfAbsent(new Listing(owner, surface.to(), surface.title()), at);
+            listed.putIfAbsent(new Listing(owner, surface.to(), surface.title()), own);
         }
     }
 }

@@ -5,7 +5,7 @@ import java.util.Map;
 import java.util.Optional;
 import org.treadwarm.units.Reading;
 
-/** What must hold between the warm-water floors of one manifold: the same liquid flows through all of them. */
+/** What must hold between the warm-water floors of one manifold: one liquid flows through all of them, and it has one pressure drop. */
 final class ManifoldRules {
     private final Survey survey;
     private final Findings findings;
@@ -20,10 +20,15 @@ final class ManifoldRules {
         double glycol() {
             return heater.glycol().map(Reading::value).orElse(0.0);
         }
+
+        Reading drop() {
+            return heater.manifoldDrop().orElseThrow();
+        }
     }
 
     void check() {
         Map<Optional<String>, Fed> first = new HashMap<>();
+        Map<Optional<String>, Fed> firstDrop = new HashMap<>();
         for (int i = 0; i < survey.rooms().size(); i++) {
             Room room = survey.rooms().get(i);
             Optional<Fed> fed = room.heatedFloor()
@@ -35,8 +40,23 @@ final class ManifoldRules {
                 if (known.glycol() != fed.get().glycol()) {
                     differs("/rooms/" + i + "/heatedFloor/heater/glycol", fed.get(), known);
                 }
+                if (fed.get().heater().manifoldDrop().isPresent()) {
+                    Fed stated = firstDrop.computeIfAbsent(fed.get().heater().manifold(), name -> fed.get());
+                    if (stated.drop().value() != fed.get().drop().value()) {
+                        dropDiffers("/rooms/" + i + "/heatedFloor/heater/manifoldDrop", fed.get(), stated);
+                    }
+                }
             }
         }
+    }
+
+    private void dropDiffers(String pointer, Fed fed, Fed first) {
+        findings.add(
+                pointer,
+                fed.drop().typed(),
+                "the same manifold feeds \"" + first.room() + "\", which states "
+                        + first.drop().typed(),
+                "one pressure drop for a manifold; one of its rooms is enough to state it");
     }
 
     private void differs(String pointer, Fed fed, Fed first) {

@@ -68,32 +68,33 @@ final class NameRules {
     private void ids() {
         for (int i = 0; i < survey.rooms().size(); i++) {
             Room room = survey.rooms().get(i);
-            String pointer = "/rooms/" + i;
-            id(pointer, room.id());
-            ids(pointer, room.surfaces(), room.junctions());
+            Place at = Place.ROOT.item("/rooms", i);
+            id(at, room.id());
+            ids(at, room.surfaces(), room.junctions());
         }
-        survey.spaces().forEach((name, space) -> ids(Pointer.to("/spaces", name), space.surfaces(), space.junctions()));
+        survey.spaces()
+                .forEach((name, space) -> ids(Place.ROOT.at("/spaces").key(name), space.surfaces(), space.junctions()));
     }
 
-    private void ids(String owner, List<Surface> surfaces, List<Junction> junctions) {
+    private void ids(Place owner, List<Surface> surfaces, List<Junction> junctions) {
         for (int i = 0; i < surfaces.size(); i++) {
-            String pointer = owner + "/surfaces/" + i;
-            id(pointer, surfaces.get(i).id());
+            Place at = owner.item("/surfaces", i);
+            id(at, surfaces.get(i).id());
             List<Opening> openings = surfaces.get(i).openings();
             for (int k = 0; k < openings.size(); k++) {
-                id(pointer + "/openings/" + k, openings.get(k).id());
+                id(at.item("/openings", k), openings.get(k).id());
             }
         }
         for (int i = 0; i < junctions.size(); i++) {
-            id(owner + "/junctions/" + i, junctions.get(i).id());
+            id(owner.item("/junctions", i), junctions.get(i).id());
         }
     }
 
-    private void id(String owner, Optional<String> id) {
+    private void id(Place owner, Optional<String> id) {
         if (id.isEmpty()) {
             return;
         }
-        String pointer = owner + "/id";
+        String pointer = owner.pointer() + "/id";
         String text = id.get();
         if (!ID.matcher(text).matches()) {
             findings.add(pointer, text, "this is no id", "1 to 40 of the letters A-Z, a-z, digits and -");

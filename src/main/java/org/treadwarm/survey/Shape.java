@@ -5,12 +5,12 @@ import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.ParameterizedType;
 import java.lang.reflect.RecordComponent;
 import java.lang.reflect.Type;
-import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.concurrent.ConcurrentHashMap;
+import java.util.stream.Stream;
 import org.treadwarm.units.Declared;
 import org.treadwarm.units.Quantity;
 import org.treadwarm.units.Reading;
@@ -23,10 +23,17 @@ import org.treadwarm.units.Wording;
  * its one declaration. Reading the document, walking it, the API's schema and the forms all go by this.
  */
 public final class Shape {
-    private static final Map<Class<?>, Shape> SHAPES = new ConcurrentHashMap<>();
+    private static final ClassValue<Shape> SHAPES = new ClassValue<>() {
+        @Override
+        protected Shape computeValue(Class<?> type) {
+            return new Shape(type.asSubclass(Record.class));
+        }
+    };
 
     private final Class<? extends Record> type;
     private final Map<String, Key> keys;
+    private final Map<String, Integer> indexes = new HashMap<>();
+    private final Key[] inOrder;
     private final Key[] holding;
     private final Constructor<?> constructor;
 
@@ -58,7 +65,8 @@ public final class Shape {
      * @param help its sentence of help; empty for none
      * @param longest the most characters of a text
      * @param fallback the text that stands when it is left out; empty for none
-     * @param fallbackValue what that text means
+     * @param whenAbsent what stands when it is left out; empty when the document must have it
+     * @param words the words that may stand here, when it holds a word
      * @param component where a record keeps it
      */
     public record Key(
@@ -71,11 +79,12 @@ public final class Shape {
             String help,
             int longest,
             String fallback,
-            Optional<Object> fallbackValue,
+            Optional<Object> whenAbsent,
+            List<Word> words,
             RecordComponent component) {
         /** Whether the document must have it. */
         public boolean required() {
-            return many == Many.ONE && fallback.isEmpty();
+            return whenAbsent.isEmpty();
         }
 
         /** What a record holds under this key. */
@@ -85,15 +94,6 @@ public final class Shape {
             } catch (IllegalAccessException | InvocationTargetException e) {
                 throw new IllegalStateException("cannot read " + name, e);
             }
-        }
-
-        /** The words that may stand here, when it holds a word. */
-        public List<Word> words() {
-            List<Word> words = new ArrayList<>();
-            for (Object constant : type.getEnumConstants()) {
-                words.add((Word) constant);
-            }
-            return words;
         }
     }
 
@@ -109,6 +109,10 @@ public final class Shape {
             keys.put(key.name(), key);
             parameters[i] = components[i].getType();
         }
+        inOrder = keys.values().toArray(Key[]::new);
+        for (int i = 0; i < inOrder.length; i++) {
+            indexes.put(inOrder[i].name(), i);
+        }
         holding = keys.values().stream()
                 .filter(key -> key.holds() == Holds.QUANTITY || key.holds() == Holds.OBJECT)
                 .toArray(Key[]::new);
@@ -121,12 +125,7 @@ public final class Shape {
 
     /** The shape of a record. */
     public static Shape of(Class<? extends Record> type) {
-        Shape known = SHAPES.get(type);
-        if (known == null) {
-            known = new Shape(type);
-            SHAPES.put(type, known);
-        }
-        return known;
+        return SHAPES.get(type);
     }
 
     /** The record this is the shape of. */
@@ -137,6 +136,16 @@ public final class Shape {
     /** Its keys by name, in the order of the record. */
     public Map<String, Key> keys() {
         return keys;
+    }
+
+    /** A key by its place in the order of the record. */
+    public Key key(int index) {
+        return inOrder[index];
+    }
+
+    /** The place of a key in the order of the record; -1 when there is no such key. */
+    public int indexOf(String name) {
+        return indexes.getOrDefault(name, -1);
     }
 
     /** The keys below which readings may lie. */
@@ -182,8 +191,23 @@ public final class Shape {
                         .orElse(""),
                 wording.map(Wording::longest).orElse(0),
                 fallback,
-                fallback.isEmpty() ? Optional.empty() : Optional.of(meaning(fallback, holds, held, quantity)),
+                whenAbsent(many, fallback, holds, held, quantity),
+                holds == Holds.WORD ? words(held) : List.of(),
                 component);
+    }
+
+    private static Optional<Object> whenAbsent(
+            Many many, String fallback, Holds holds, Class<?> type, Optional<Declared> quantity) {
+        return switch (many) {
+            case OPTIONAL -> Optional.of(Optional.empty());
+            case LIST -> Optional.of(List.of());
+            case MAP -> Optional.of(Map.of());
+            case ONE -> fallback.isEmpty() ? Optional.empty() : Optional.of(meaning(fallback, holds, type, quantity));
+        };
+    }
+
+    private static List<Word> words(Class<?> type) {
+        return Stream.of(type.getEnumConstants()).map(Word.class::cast).toList();
     }
 
     private static Object meaning(String text, Holds holds, Class<?> type, Optional<Declared> quantity) {

@@ -67,6 +67,19 @@ public record Site(
                 fallback = "1")
         Reading groundwaterFactor,
 
+        @Quantity(
+                kind = QuantityKind.PRESSURE,
+                min = 0,
+                max = 200000,
+                plausibleFrom = 500,
+                plausibleTo = 60000,
+                formUnit = "kPa",
+                label = "pressure drop of the heat source",
+                help =
+                        "Boiler or heat pump and the pipes to the manifolds, at the flow of the whole job, as the maker states it."
+                                + " The pump must overcome it too.")
+        Optional<Reading> heatSourceDrop,
+
         @Wording(
                 label = "dimensions",
                 help = "How areas were taped; it must match the column of the psi values.",

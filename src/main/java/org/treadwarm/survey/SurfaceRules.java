@@ -26,13 +26,13 @@ final class SurfaceRules {
     }
 
     private void surface(String pointer, String owner, boolean isRoom, Surface surface) {
-        assembly(pointer + "/assembly", surface.assembly());
+        assembly(pointer, surface.assembly());
         area(pointer, surface.area(), surface.width(), surface.height());
         boolean onGround = surface.to().equals(Survey.GROUND);
         if (onGround) {
             ground.surface(pointer, surface, isRoom);
         } else {
-            otherSides.check(pointer + "/to", surface.to(), owner, isRoom);
+            otherSides.check(pointer, surface.to(), owner, isRoom);
             surface.ground()
                     .filter(given -> findings.clean(pointer, "/to"))
                     .ifPresent(given -> findings.add(
@@ -48,8 +48,9 @@ final class SurfaceRules {
         double cut = 0;
         for (int i = 0; i < surface.openings().size(); i++) {
             Opening opening = surface.openings().get(i);
-            assembly(pointer + "/openings/" + i + "/assembly", opening.assembly());
-            area(pointer + "/openings/" + i, opening.area(), opening.width(), opening.height());
+            String at = pointer + "/openings/" + i;
+            assembly(at, opening.assembly());
+            area(at, opening.area(), opening.width(), opening.height());
             cut += opening.totalArea();
         }
         if (cut > surface.grossArea() * (1 + 1e-12) && surface.grossArea() > 0) {
@@ -96,10 +97,14 @@ final class SurfaceRules {
         }
     }
 
-    private void assembly(String pointer, String name) {
-        if (findings.clean(pointer) && !survey.assemblies().containsKey(name)) {
+    private void assembly(String owner, String name) {
+        if (findings.clean(owner, "/assembly") && !survey.assemblies().containsKey(name)) {
             String hint = findings.hint(name, survey.assemblies()::keySet);
-            findings.add(pointer, name, "no assembly is called \"" + name + "\"" + hint, "the name of an assembly");
+            findings.add(
+                    owner + "/assembly",
+                    name,
+                    "no assembly is called \"" + name + "\"" + hint,
+                    "the name of an assembly");
         }
     }
 }

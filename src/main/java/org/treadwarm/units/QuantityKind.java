@@ -26,6 +26,7 @@ public enum QuantityKind {
     SPECIFIC_HEAT("J/(kg.K)", "a specific heat capacity", 0),
     AREAL_HEAT_CAPACITY("J/(m2.K)", "a heat capacity per area", 0),
     DURATION("h", "a time", 0),
+    PRESSURE("Pa", "a pressure", 0),
     RATIO("", "a pure ratio", 0);
 
     private final String siUnit;

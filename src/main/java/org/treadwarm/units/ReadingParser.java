@@ -41,6 +41,12 @@ public final class ReadingParser {
         if (text.length() > LONGEST) {
             throw new ReadingException("this is longer than " + LONGEST + " characters");
         }
+        Optional<Reading> plain = PlainReading.in(text, kind);
+        return plain.isPresent() ? plain.get() : thoroughly(text, kind);
+    }
+
+    /** The reading in a text, whichever form it has. */
+    static Reading thoroughly(String text, QuantityKind kind) throws ReadingException {
         return new ReadingParser(text, kind).reading();
     }
 

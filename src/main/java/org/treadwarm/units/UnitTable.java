@@ -13,6 +13,7 @@ import static org.treadwarm.units.QuantityKind.LENGTH;
 import static org.treadwarm.units.QuantityKind.LINEAR_POWER;
 import static org.treadwarm.units.QuantityKind.LINEAR_TRANSMITTANCE;
 import static org.treadwarm.units.QuantityKind.POWER;
+import static org.treadwarm.units.QuantityKind.PRESSURE;
 import static org.treadwarm.units.QuantityKind.RATIO;
 import static org.treadwarm.units.QuantityKind.RESISTANCE;
 import static org.treadwarm.units.QuantityKind.SPECIFIC_HEAT;
@@ -43,6 +44,11 @@ public final class UnitTable {
     private static final String BTU = "Btu (International Table) = 1055.05585262 J, ISO 80000-5; 1 ft = 0.3048 m";
     private static final String FAHRENHEIT = "ISO 80000-5: 1 °F = 5/9 K, 32 °F = 0 °C";
 
+    private static final String WATER_COLUMN =
+            "conventional column of water: 1000 kg/m3 and 9.80665 m/s2 (UCUM m[H2O]); 1 ft = 0.3048 m";
+    private static final String POUND_FORCE =
+            "1 lbf/in2: 1 lb = 0.45359237 kg, 9.80665 m/s2 (ISO 80000-3), 1 in = 0.0254 m";
+
     private static final double FOOT = 0.3048;
     private static final double BTU_JOULES = 1055.05585262;
     private static final double POUND = 0.45359237;
@@ -62,6 +68,11 @@ public final class UnitTable {
         Map<String, Unit> ofKind = BY_KIND.get(kind);
         Unit asWritten = ofKind.get(text);
         return Optional.ofNullable(asWritten != null ? asWritten : ofKind.get(normal(text)));
+    }
+
+    /** The unit of a kind that is written to the letter as the table has it. */
+    static Optional<Unit> asWritten(QuantityKind kind, String text) {
+        return Optional.ofNullable(BY_KIND.get(kind).get(text));
     }
 
     /** The kinds that know this unit text, for telling somebody that metres do not measure heat. */
@@ -95,7 +106,7 @@ public final class UnitTable {
             switch (c) {
                 case ' ', '\t', '\u00a0', '\u202f' -> {}
                 case '·', '⋅', '*', '×' -> plain.append('.');
-                case '²' -> plain.append('2');
+                case '²', '₂' -> plain.append('2');
                 case '³' -> plain.append('3');
                 case '⁻' -> plain.append('-');
                 case '¹' -> plain.append('1');
@@ -138,6 +149,7 @@ public final class UnitTable {
         air(units);
         matter(units);
         times(units);
+        pressures(units);
         add(units, RATIO, "%", 1, 100, SI, "percent");
         return List.copyOf(units);
     }
@@ -316,6 +328,16 @@ public final class UnitTable {
         add(units, DURATION, "min", 1, 60, SI, "minute", "minutes");
         add(units, DURATION, "s", 1, 3600, SI);
         add(units, DURATION, "d", 24, 1, SI, "day", "days");
+    }
+
+    private static void pressures(List<Unit> units) {
+        add(units, PRESSURE, "Pa", 1, 1, SI);
+        add(units, PRESSURE, "kPa", 1000, 1, SI);
+        add(units, PRESSURE, "mbar", 100, 1, SI, "hPa");
+        add(units, PRESSURE, "bar", 1e5, 1, SI);
+        add(units, PRESSURE, "mH2O", 980665, 100, WATER_COLUMN, "mWC", "m[H2O]");
+        add(units, PRESSURE, "ftH2O", 298906692, 100000, WATER_COLUMN, "ftWC", "ft[H2O]");
+        add(units, PRESSURE, "psi", 44482216152605.0, 6451600000.0, POUND_FORCE, "[psi]", "lbf/in2", "[lbf_av]/in2");
     }
 
     private static void add(

@@ -18,8 +18,8 @@ import java.util.function.UnaryOperator;
 
 /** The computations that pages wait for: few at once, each bounded in time, found again by their ids, forgotten after minutes. */
 public final class Computations implements AutoCloseable {
-    /** So long a page waits before it shows how far the computation is. */
-    public static final Duration PATIENCE = Duration.ofMillis(500);
+    /** So long a page waits before it shows how far the computation is; half of what nobody minds, as a page takes time too. */
+    public static final Duration PATIENCE = Duration.ofMillis(250);
 
     static final int AT_ONCE = 2;
     static final int MOST_WAITING = 16;

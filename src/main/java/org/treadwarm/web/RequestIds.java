@@ -1,6 +1,7 @@
 package org.treadwarm.web;
 
 import io.javalin.http.Context;
+import java.util.HexFormat;
 import java.util.Optional;
 import java.util.concurrent.ThreadLocalRandom;
 import java.util.regex.Pattern;
@@ -21,6 +22,8 @@ final class RequestIds {
 
     // What begins like an API key might be one, sent in the wrong header.
     private static final Pattern ALLOWED = Pattern.compile("(?!tw_)[A-Za-z0-9_-]{8,64}");
+
+    private static final HexFormat HEX = HexFormat.of();
 
     private RequestIds() {}
 
@@ -49,6 +52,6 @@ final class RequestIds {
 
     private static String random() {
         ThreadLocalRandom random = ThreadLocalRandom.current();
-        return String.format("%016x%016x", random.nextLong(), random.nextLong());
+        return HEX.toHexDigits(random.nextLong()) + HEX.toHexDigits(random.nextLong());
     }
 }

@@ -98,6 +98,11 @@ public final class Server implements AutoCloseable {
         return javalin.port();
     }
 
+    /** The computations that its pages wait for. */
+    Computations computations() {
+        return computations;
+    }
+
     /** Every route it serves. */
     List<ServedRoute> routes() {
         return ServedRoute.of(javalin);

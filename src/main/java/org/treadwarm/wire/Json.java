@@ -22,6 +22,7 @@ public final class Json {
                     .enable(StreamWriteFeature.USE_FAST_DOUBLE_WRITER)
                     .build())
             .addModule(new Jdk8Module())
+            .addModule(Decimals.module())
             .addModule(new SimpleModule().addSerializer(Instant.class, ToStringSerializer.instance))
             .defaultPropertyInclusion(
                     JsonInclude.Value.construct(JsonInclude.Include.NON_ABSENT, JsonInclude.Include.NON_ABSENT))

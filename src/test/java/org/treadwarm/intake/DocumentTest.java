@@ -31,6 +31,8 @@ class DocumentTest {
             delimiter = '|',
             value = {
                 "{\"rooms\": [{\"name\": \"a\", \"name\": \"b\"}]} | /rooms/0/name | twice",
+                "{\"site\": {\"a\": {}, \"a\": {\"b\": 1}}} | /site/a | twice",
+                "{\"rooms\": [1], \"rooms\": [2]} | /rooms | twice",
                 "{\"a/b\": {\"c~d\": 1, \"c~d\": 2}} | /a~1b/c~0d | twice",
                 "{\"site\": {\"altitude\": 1x}} | /site/altitude | not JSON",
                 "{\"site\": {\"altitude\": NaN}} | /site/altitude | not JSON",

@@ -79,6 +79,8 @@ class RulesTest {
                 "/spaces/garage/surfaces/1 | {'name': 'garage wall', 'assembly': 'roof', 'area': 1, 'to': 'parlour'} | /rooms/0/surfaces/2 | listed from the other side",
                 "/rooms/0/heatedFloor/heater/glycol | 0.2 | /rooms/0/heatedFloor/heater/glycol | only warm water may hold glycol",
                 "/rooms/0/heatedFloor/heater/manifold | 'attic' | /rooms/0/heatedFloor/heater/manifold | only warm water comes",
+                "/rooms/0/heatedFloor/heater/manifoldDrop | 6000 | /rooms/0/heatedFloor/heater/manifoldDrop | only warm water comes",
+                "/rooms/1/heatedFloor/heater | {'kind': 'water', 'spacing': 0.1, 'manifold': 'attic', 'glycol': 0.25, 'manifoldDrop': 5000} | /rooms/2/heatedFloor/heater/manifoldDrop | the same manifold feeds",
                 "/rooms/2/heatedFloor/heater/glycol | 0.1 | /rooms/2/heatedFloor/heater/glycol | so weak a mixture",
                 "/rooms/1/heatedFloor/heater | {'kind': 'water', 'spacing': 0.1, 'manifold': 'attic'} | /rooms/2/heatedFloor/heater/glycol | the same liquid flows through",
                 "/rooms/2/heatedFloor/parts/1/area | 8 | /rooms/2/heatedFloor/parts | not the whole heated area of 11.5 m2",

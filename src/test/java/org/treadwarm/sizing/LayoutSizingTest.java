@@ -3,6 +3,7 @@ package org.treadwarm.sizing;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import com.fasterxml.jackson.databind.node.DoubleNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import org.assertj.core.data.Offset;
 import org.junit.jupiter.api.Test;
@@ -10,6 +11,7 @@ import org.treadwarm.properties.Surveys;
 import org.treadwarm.properties.Trees;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FreeFloor;
+import org.treadwarm.sizing.Sizing.Limit;
 import org.treadwarm.sizing.Sizing.MatCircuit;
 import org.treadwarm.sizing.Sizing.MatLayout;
 import org.treadwarm.sizing.Sizing.MatPieces;
@@ -102,6 +104,75 @@ class LayoutSizingTest {
         assertThat(mats.pieces()).extracting(MatPieces::count).containsExactly(3);
         assertThat(mats.power()).isCloseTo(150, CLOSE);
         assertThat(mats.margin()).isNegative();
+    }
+
+    private static FloorSizing withMats(ObjectNode survey, String list) {
+        Trees.set(survey, FLOOR + "/heater", Trees.json("{'kind': 'electric', 'voltage': 230, " + list + "}"));
+        return Surveys.sized(survey).rooms().get(0).floor();
+    }
+
+    private static Limit installedPower(FloorSizing floor) {
+        return floor.limits().stream()
+                .filter(limit -> limit.name().equals("installed power"))
+                .findFirst()
+                .orElseThrow();
+    }
+
+    @Test
+    void weakMatsDoNotCarryTheRoom() {
+        FloorSizing floor = withMats(Surveys.quiet(), "'mats': [{'area': 10, 'power': 300}]");
+        MatLayout mats = floor.electric().orElseThrow().mats().orElseThrow();
+        assertThat(floor.verdict()).isEqualTo(Verdict.CARRIES_WITH_SUPPLEMENT);
+        assertThat(installedPower(floor).governs()).isTrue();
+        assertThat(mats.meanDensity().orElseThrow()).isCloseTo(900 / 36.0, CLOSE);
+        assertThat(floor.atCarryingFlux().orElseThrow().heaterPower()).isCloseTo(900, within(1e-6));
+        assertThat(floor.installedDensity()).isEmpty();
+    }
+
+    @Test
+    void strongMatsCarryTheRoomAndTellTheirMargin() {
+        FloorSizing floor = withMats(Surveys.quiet(), "'mats': [{'area': 10, 'power': 1500}]");
+        FloorSizing without = Surveys.sized(Surveys.quiet()).rooms().get(0).floor();
+        MatLayout mats = floor.electric().orElseThrow().mats().orElseThrow();
+        assertThat(floor.verdict()).isEqualTo(Verdict.CARRIES);
+        assertThat(installedPower(floor).margin()).isPositive();
+        assertThat(mats.margin()).isPositive();
+        assertThat(floor.requiredFlux()).isEqualTo(without.requiredFlux());
+    }
+
+    /** What the mats chosen for the design day give, they give on a colder one too. */
+    @Test
+    void theFloorHoldsDownToWhatItsMatsGive() {
+        ObjectNode survey = Surveys.quiet();
+        String list = "'mats': [{'area': 36, 'power': 2300}]";
+        FloorSizing floor = withMats(survey, list);
+        assertThat(installedPower(floor).governs()).isTrue();
+        Trees.set(
+                survey,
+                "/site/outdoorTemperature",
+                DoubleNode.valueOf(floor.holdsDownTo().orElseThrow()));
+        assertThat(withMats(survey, list).marginShare().orElseThrow()).isCloseTo(0, within(1e-6));
+    }
+
+    @Test
+    void theWeakerOfDensityAndMatsCounts() {
+        FloorSizing weakMats = withMats(Surveys.quiet(), "'density': 200, 'mats': [{'area': 10, 'power': 300}]");
+        FloorSizing weakDensity = withMats(Surveys.quiet(), "'density': 20, 'mats': [{'area': 10, 'power': 1500}]");
+        assertThat(installedPower(weakMats).governs()).isTrue();
+        assertThat(installedPower(weakDensity).governs()).isFalse();
+        assertThat(weakDensity.installedDensity()).hasValue(20);
+        assertThat(weakDensity.atCarryingFlux().orElseThrow().heaterFlux()).isCloseTo(20, within(1e-9));
+    }
+
+    @Test
+    void matsLimitASolvedFloorToo() {
+        FloorSizing weak = Surveys.sized(SolvedJob.mats(60)).rooms().get(1).floor();
+        FloorSizing strong = Surveys.sized(SolvedJob.mats(1500)).rooms().get(1).floor();
+        double made = weak.electric().orElseThrow().mats().orElseThrow().power();
+        assertThat(weak.section()).isPresent();
+        assertThat(installedPower(weak).governs()).isTrue();
+        assertThat(weak.atCarryingFlux().orElseThrow().heaterPower()).isCloseTo(made, within(1e-6));
+        assertThat(installedPower(strong).margin()).isPositive();
     }
 
     @Test

@@ -169,6 +169,31 @@ class PartedFloorTest {
     }
 
     @Test
+    void statedDropsAreInThePressureOfThePump() {
+        var without = Surveys.sized(PartedJob.twoManifolds()).total().water().orElseThrow();
+        var manifoldOnly =
+                Surveys.sized(PartedJob.statedDrops(false)).total().water().orElseThrow();
+        var both = Surveys.sized(PartedJob.statedDrops(true)).total().water().orElseThrow();
+        var plain = without.manifolds().get(0);
+        var annex = both.manifolds().get(1);
+        double worst = without.manifolds().get(1).pressure();
+
+        assertThat(without.sourceDrop()).isEmpty();
+        assertThat(plain.ownDrop()).isEmpty();
+        assertThat(both.manifolds().get(0).pressure()).isEqualTo(plain.pressure());
+        assertThat(annex.ownDrop()).hasValue(0.5 * 9806.65);
+        assertThat(annex.loopDrop()).hasValue(worst);
+        assertThat(annex.pressure()).isCloseTo(worst + 4903.325, within(1e-6));
+        assertThat(manifoldOnly.pressure()).isEqualTo(Math.max(plain.pressure(), annex.pressure()));
+        assertThat(both.sourceDrop()).hasValue(12_000);
+        assertThat(both.pressure()).isCloseTo(manifoldOnly.pressure() + 12_000, within(1e-6));
+        for (var manifold : both.manifolds()) {
+            assertThat(manifold.pressure() + manifold.throttled() + 12_000).isCloseTo(both.pressure(), within(1e-6));
+        }
+        assertThat(both.valves()).isEqualTo(without.valves());
+    }
+
+    @Test
     void saysWhyItsPartsAreNotSolved() {
         ObjectNode survey = PartedJob.survey();
         survey.withObject("/rooms/0/heatedFloor/above/1").removeAll().put("resistance", 0.01);

@@ -39,7 +39,7 @@ final class PartedJob {
         ObjectNode cold = survey();
         cold.withObject("/site").put("outdoorTemperature", -50);
         room(cold, 1).withObject("/heatedFloor/heater").put("linearPower", 3);
-        return List.of(survey(), hot, unneeded, cold, twoManifolds());
+        return List.of(survey(), hot, unneeded, cold, twoManifolds(), statedDrops(false), statedDrops(true));
     }
 
     /** One hall more, on a manifold of its own with glycol in it. */
@@ -52,6 +52,17 @@ final class PartedJob {
                 .put("glycol", 0.3)
                 .put("feederLength", 20);
         survey.withArray("rooms").add(other);
+        return survey;
+    }
+
+    /** The two manifolds with the drop of one stated, and perhaps that of the heat source. */
+    static ObjectNode statedDrops(boolean source) {
+        ObjectNode survey = twoManifolds();
+        int last = survey.withArray("rooms").size() - 1;
+        room(survey, last).withObject("/heatedFloor/heater").put("manifoldDrop", "0.5 mH2O");
+        if (source) {
+            survey.withObject("/site").put("heatSourceDrop", "12 kPa");
+        }
         return survey;
     }
 

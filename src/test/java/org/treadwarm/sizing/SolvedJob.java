@@ -13,7 +13,7 @@ final class SolvedJob {
     }
 
     static List<ObjectNode> all() {
-        return List.of(survey(), hotRooms(), coldBelow(), warmBelow());
+        return List.of(survey(), hotRooms(), coldBelow(), warmBelow(), mats(60), mats(1500));
     }
 
     /** Rooms warmer than their floors may be. */
@@ -43,6 +43,15 @@ final class SolvedJob {
         landing.put("to", "kiln");
         landing.withArray("below").removeAll();
         landing.withObject("/heater").put("density", 5);
+        return survey;
+    }
+
+    /** A solved floor with mats of a power to choose from, beside the spacing of their wires. */
+    static ObjectNode mats(double power) {
+        ObjectNode survey = survey();
+        ObjectNode heater = room(survey, 1).withObject("/heatedFloor/heater");
+        heater.remove("linearPower");
+        heater.withArray("mats").addObject().put("area", 1).put("power", power);
         return survey;
     }
 

@@ -9,6 +9,8 @@ import static tech.units.indriya.unit.Units.KILOGRAM;
 import static tech.units.indriya.unit.Units.LITRE;
 import static tech.units.indriya.unit.Units.METRE;
 import static tech.units.indriya.unit.Units.MINUTE;
+import static tech.units.indriya.unit.Units.NEWTON;
+import static tech.units.indriya.unit.Units.PASCAL;
 import static tech.units.indriya.unit.Units.PERCENT;
 import static tech.units.indriya.unit.Units.SECOND;
 import static tech.units.indriya.unit.Units.SQUARE_METRE;
@@ -92,6 +94,7 @@ final class UnitOracle {
         si.put(QuantityKind.SPECIFIC_HEAT, JOULE.divide(KILOGRAM.multiply(KELVIN)));
         si.put(QuantityKind.AREAL_HEAT_CAPACITY, JOULE.divide(SQUARE_METRE.multiply(KELVIN)));
         si.put(QuantityKind.DURATION, HOUR);
+        si.put(QuantityKind.PRESSURE, PASCAL);
         si.put(QuantityKind.RATIO, AbstractUnit.ONE);
         return si;
     }
@@ -115,6 +118,7 @@ final class UnitOracle {
         units.put("W/ft", WATT.divide(FOOT));
         units.put("V", VOLT);
         times(units);
+        pressures(units);
         units.put("%", PERCENT);
         return units;
     }
@@ -128,6 +132,19 @@ final class UnitOracle {
         units.put("min", MINUTE);
         units.put("s", SECOND);
         units.put("d", HOUR.multiply(24));
+    }
+
+    /** A column of water weighs 1000 kg/m³ under the standard fall, and a pound-force is a pound under it. */
+    private static void pressures(Map<String, Unit<?>> units) {
+        Unit<?> kilogramForce = NEWTON.multiply(9.80665);
+        Unit<?> metreOfWater = kilogramForce.multiply(1000).divide(SQUARE_METRE);
+        units.put("Pa", PASCAL);
+        units.put("kPa", MetricPrefix.KILO(PASCAL));
+        units.put("mbar", MetricPrefix.HECTO(PASCAL));
+        units.put("bar", PASCAL.multiply(100_000));
+        units.put("mH2O", metreOfWater);
+        units.put("ftH2O", metreOfWater.multiply(FOOT).divide(METRE));
+        units.put("psi", kilogramForce.multiply(0.45359237).divide(INCH.pow(2)));
     }
 
     private static void lengths(Map<String, Unit<?>> units) {

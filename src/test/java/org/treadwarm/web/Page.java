@@ -14,6 +14,7 @@ import org.ccil.cowan.tagsoup.Parser;
 import org.w3c.dom.Document;
 import org.w3c.dom.Element;
 import org.w3c.dom.Node;
+import org.w3c.dom.NodeList;
 import org.xml.sax.InputSource;
 import org.xml.sax.SAXException;
 
@@ -49,8 +50,10 @@ record Page(HttpResponse<String> response, Document document) {
     /** All elements of a name, in order. */
     Stream<Element> all(String name) {
         List<Element> found = new ArrayList<>();
-        for (int i = 0; i < document.getElementsByTagName(name).getLength(); i++) {
-            found.add((Element) document.getElementsByTagName(name).item(i));
+        // One list for all: a new one would walk through the page for each of them.
+        NodeList list = document.getElementsByTagName(name);
+        for (int i = 0; i < list.getLength(); i++) {
+            found.add((Element) list.item(i));
         }
         return found.stream();
     }

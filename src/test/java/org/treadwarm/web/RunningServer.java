@@ -8,11 +8,13 @@ import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
+import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalInt;
+import java.util.concurrent.CancellationException;
 import java.util.stream.Stream;
 import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Job;
@@ -118,6 +120,24 @@ public final class RunningServer implements AutoCloseable {
     public Person member(String name, Role role) {
         String token = store.links().invite(name, role, OWNER).token();
         return ((LinkUse.Done) store.links().join(token, name, PASSWORD)).person();
+    }
+
+    /**
+     * Keeps the computations of its pages busy, so that whatever a page begins waits; what it returns ends that.
+     */
+    public Runnable busy() {
+        List<Computation> all = new ArrayList<>();
+        for (int i = 0; i < Computations.AT_ONCE; i++) {
+            all.add(server.computations()
+                    .begin("busy", id -> "/jobs", "/jobs", (stopped, progress) -> {
+                        while (!stopped.getAsBoolean()) {
+                            Thread.onSpinWait();
+                        }
+                        throw new CancellationException("no longer busy");
+                    })
+                    .orElseThrow());
+        }
+        return () -> all.forEach(Computation::cancel);
     }
 
     /** Every route it serves. */

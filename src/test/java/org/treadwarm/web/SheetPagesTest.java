@@ -58,6 +58,24 @@ class SheetPagesTest {
     }
 
     @Test
+    void theJobListsItsSheetsAndNoOthers() {
+        Job job = job();
+        Job other = job();
+        assertThat(estimator.open("/jobs/" + job.id()).id("sheets")).isEmpty();
+        issue(other);
+        String first = server.store().sheets().ofJob(other.id()).get(0).number();
+        issue(job);
+        String number = server.store().sheets().ofJob(job.id()).get(0).number();
+
+        Page page = estimator.open("/jobs/" + job.id());
+
+        assertThat(page.id("sheets").orElseThrow().getTextContent())
+                .contains(number, "holds", "Emmet")
+                .doesNotContain(first);
+        assertThat(page.text()).contains("href=\"/sheets/" + number + "\"", "Sheets: 1");
+    }
+
+    @Test
     void theSameIsNotIssuedTwice() {
         Job job = job();
         issue(job);

@@ -120,18 +120,73 @@ class WallFootPagesTest {
         assertThat(page.id("f-edgeThickness-error")).isPresent();
     }
 
-    @Test
-    void aWallWithoutThicknessesSaysWhatIsMissing() {
+    private void wallOfU(String uValue) {
         ObjectNode survey = (ObjectNode) Demo.survey();
         ObjectNode wall = (ObjectNode) survey.at("/assemblies/old brick wall");
         wall.remove("layers");
-        wall.put("uValue", "1.9 W/(m2.K)");
+        wall.put("uValue", uValue);
         job = server.job("known by U", survey);
+    }
+
+    @Test
+    void aWallKnownByItsUValueIsSolvedAsOneMaterial() {
+        wallOfU("1.9 W/(m2.K)");
+
+        Page solved = result(visitor.send(typed().press("solve")));
+
+        assertThat(solved.status()).isEqualTo(200);
+        assertThat(solved.text()).contains("1.900 W/(m²·K) times");
+    }
+
+    @Test
+    void aWallOfNothingButFilmsSaysWhatIsMissing() {
+        wallOfU("6 W/(m2.K)");
 
         Page page = visitor.send(typed().press("solve"));
 
         assertThat(page.status()).isEqualTo(422);
-        assertThat(page.text()).contains("no layers with thicknesses are known", "/assemblies/old%20brick%20wall");
+        assertThat(page.text()).contains("more than its films", "/assemblies/old%20brick%20wall");
+    }
+
+    @Test
+    void theRoomSaysWhyASlopeIsNoWall() {
+        ObjectNode survey = (ObjectNode) Demo.survey();
+        ((ObjectNode) survey.at("/assemblies/old brick wall")).put("heatFlow", "up");
+        job = server.job("sloped", survey);
+
+        Page page = visitor.open(room());
+
+        assertThat(page.text())
+                .contains("cannot be solved in section", "flows up, so it counts as a roof")
+                .doesNotContain(foot());
+    }
+
+    @Test
+    void theRoomSaysThatOnlyASlabHasAFoot() {
+        ObjectNode survey = (ObjectNode) Demo.survey();
+        ((ObjectNode) survey.at(SUNROOM + "/heatedFloor/ground")).put("kind", "suspended");
+        job = server.job("suspended", survey);
+
+        Page page = visitor.open(room());
+
+        assertThat(page.text()).contains("cannot be solved in section", "Only a heated floor on a slab");
+    }
+
+    @Test
+    void aSolvedFootIsDrawnWithAndWithoutEdgeInsulation() {
+        Page plain = result(visitor.send(typed().press("solve")));
+
+        assertThat(plain.text()).contains("Wall foot in section: wall old brick wall, without edge insulation");
+        assertThat(plain.id("foot-with-title")).isEmpty();
+
+        Page both = result(visitor.send(typed().type("/edgeThickness", "50")
+                .type("/edgeConductivity", "0.035")
+                .type("/edgeDepth", "300")
+                .press("solve")));
+
+        assertThat(both.offers("with-edge")).isTrue();
+        assertThat(both.id("foot-without-title")).isPresent();
+        assertThat(both.id("foot-with-title")).isPresent();
     }
 
     @Test

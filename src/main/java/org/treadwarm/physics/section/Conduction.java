@@ -43,12 +43,14 @@ public final class Conduction {
         int iterations = 0;
         for (int step = 0; step < MOST_FILM_STEPS; step++) {
             ConjugateGradients solver = new ConjugateGradients(balances.lattice);
-            Convergence last = solveDifferences(balances, solver, known, 1, guess, tolerance, stopped);
-            iterations += last.iterations();
-            if (linear || adaptFilms(balances, known, guess) <= FILM_TOLERANCE) {
-                return new Field(balances, known, 1, guess, new Convergence(last.residual(), iterations));
+            Solved last = solveDifferences(balances, solver, known, 1, guess, tolerance, stopped);
+            iterations += last.convergence().iterations();
+            if (linear || filmChange(balances, known, guess) <= FILM_TOLERANCE) {
+                // With the films that were solved with: with others the heat given off would not be the heat put in.
+                Convergence all = new Convergence(last.convergence().residual(), iterations);
+                return new Field(balances, known, 1, guess, last.heat(), all);
             }
-            balances.filmsChanged();
+            adaptFilms(balances, known, guess);
         }
         throw new IllegalStateException("the films of the basic characteristic did not settle");
     }
@@ -62,12 +64,19 @@ public final class Conduction {
             double[] guess,
             double tolerance,
             BooleanSupplier stopped) {
-        Convergence convergence = solveDifferences(balances, solver, known, heatFactor, guess, tolerance, stopped);
-        return new Field(balances, known, heatFactor, guess, convergence);
+        Solved solved = solveDifferences(balances, solver, known, heatFactor, guess, tolerance, stopped);
+        return new Field(balances, known, heatFactor, guess, solved.heat(), solved.convergence());
     }
 
-    /** Temperatures are solved as differences from one of the known ones, so that what is left over is measured by real heat. */
-    private static Convergence solveDifferences(
+    /** How the solver ended, and the heat into each known temperature, W/m. */
+    private record Solved(Convergence convergence, double[] heat) {}
+
+    /**
+     * Temperatures are solved as differences from that known one which holds its cells the most. So the right-hand side, by which the
+     * residual is measured, is of the size of the heat, and a pipe of copper, whose cells are as warm as its water but for
+     * millionths of a kelvin, gives its heat to the last digits.
+     */
+    private static Solved solveDifferences(
             Balances balances,
             ConjugateGradients solver,
             double[] known,
@@ -75,7 +84,7 @@ public final class Conduction {
             double[] guess,
             double tolerance,
             BooleanSupplier stopped) {
-        double reference = known[0];
+        double reference = known[balances.links.stiffest()];
         double[] differences = new double[known.length];
         for (int i = 0; i < known.length; i++) {
             differences[i] = known[i] - reference;
@@ -84,30 +93,63 @@ public final class Conduction {
             guess[cell] = balances.materials.isSolid(cell) ? guess[cell] - reference : 0;
         }
         Convergence convergence = solver.solve(balances.load(differences, heatFactor), guess, tolerance, stopped);
+        double[] heat = close(balances, differences, heatFactor, guess);
         for (int cell = 0; cell < guess.length; cell++) {
             guess[cell] += reference;
         }
-        return convergence;
+        return new Solved(convergence, heat);
     }
 
-    /** Sets the films that go by the basic characteristic; the largest relative change. */
-    private static double adaptFilms(Balances balances, double[] known, double[] temperature) {
+    /**
+     * Shifts all temperatures by the constant that closes the balance of the whole section: the one part of what the solver leaves
+     * over that does not cancel between cells. Less than a millionth of a kelvin.
+     *
+     * @return heat into each known temperature, W/m
+     */
+    private static double[] close(Balances balances, double[] known, double heatFactor, double[] temperature) {
+        double left = heatFactor * Arrays.stream(balances.heat).sum()
+                - Arrays.stream(balances.links.heat(temperature, known)).sum();
+        double shift = left / balances.links.conductance();
+        for (int cell = 0; cell < temperature.length; cell++) {
+            temperature[cell] += shift;
+        }
+        return balances.links.heat(temperature, known);
+    }
+
+    /** The largest relative change that the films of the basic characteristic would make at these temperatures. */
+    private static double filmChange(Balances balances, double[] known, double[] temperature) {
         double largest = 0;
-        KnownLinks links = balances.links;
-        for (int link = 0; link < links.count(); link++) {
-            int edge = links.known(link);
-            if (edge < balances.section.edges().size()
-                    && balances.section.edges().get(edge).condition() instanceof BasicCharacteristic) {
-                double over = links.flux(link, temperature, known) * links.film(link);
-                if (!(over > 0)) {
-                    throw new IllegalArgumentException(
-                            "the basic characteristic holds for a floor warmer than its room; here it is colder");
-                }
-                double film = 1 / BasicCharacteristic.coefficient(over);
-                largest = Math.max(largest, Math.abs(film / links.film(link) - 1));
-                links.setFilm(link, film);
+        for (int link = 0; link < balances.links.count(); link++) {
+            if (isCharacteristic(balances, link)) {
+                double film = film(balances, link, known, temperature);
+                largest = Math.max(largest, Math.abs(film / balances.links.film(link) - 1));
             }
         }
         return largest;
+    }
+
+    /** Sets the films that go by the basic characteristic. */
+    private static void adaptFilms(Balances balances, double[] known, double[] temperature) {
+        for (int link = 0; link < balances.links.count(); link++) {
+            if (isCharacteristic(balances, link)) {
+                balances.links.setFilm(link, film(balances, link, known, temperature));
+            }
+        }
+        balances.filmsChanged();
+    }
+
+    private static boolean isCharacteristic(Balances balances, int link) {
+        int edge = balances.links.known(link);
+        return edge < balances.section.edges().size()
+                && balances.section.edges().get(edge).condition() instanceof BasicCharacteristic;
+    }
+
+    private static double film(Balances balances, int link, double[] known, double[] temperature) {
+        double over = balances.links.flux(link, temperature, known) * balances.links.film(link);
+        if (!(over > 0)) {
+            throw new IllegalArgumentException(
+                    "the basic characteristic holds for a floor warmer than its room; here it is colder");
+        }
+        return 1 / BasicCharacteristic.coefficient(over);
     }
 }

@@ -9,12 +9,18 @@ public final class Field {
     private final double[] heat;
     private final Convergence convergence;
 
-    Field(Balances balances, double[] known, double heatFactor, double[] temperature, Convergence convergence) {
+    Field(
+            Balances balances,
+            double[] known,
+            double heatFactor,
+            double[] temperature,
+            double[] heat,
+            Convergence convergence) {
         this.balances = balances;
         this.known = known;
         this.heatFactor = heatFactor;
         this.temperature = temperature;
-        this.heat = balances.links.heat(temperature, known);
+        this.heat = heat;
         this.convergence = convergence;
         fillKnown();
     }

@@ -1,7 +1,9 @@
 package org.treadwarm.physics.section;
 
 import java.util.Arrays;
+import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.BooleanSupplier;
+import java.util.function.DoubleConsumer;
 import org.treadwarm.physics.section.Condition.BasicCharacteristic;
 import org.treadwarm.physics.section.Condition.Film;
 import org.treadwarm.physics.section.FloorHeater.HeatingCable;
@@ -73,6 +75,15 @@ public final class FloorResponse {
      * @throws java.util.concurrent.CancellationException when asked to give up
      */
     public static FloorResponse of(FloorSection floor, BooleanSupplier stopped) {
+        return of(floor, stopped, share -> {});
+    }
+
+    /**
+     * The same, telling how far it is.
+     *
+     * @param progress told after every field what share of those is solved that most floors need
+     */
+    public static FloorResponse of(FloorSection floor, BooleanSupplier stopped, DoubleConsumer progress) {
         FloorTemperatures typical = new FloorSection(
                         floor.spacing(),
                         floor.layers(),
@@ -80,7 +91,7 @@ public final class FloorResponse {
                         new Film(0, 10),
                         new Film(0, floor.below().coefficient()))
                 .solve(stopped);
-        UnitFields fields = new UnitFields(floor, typical.field().grid(), stopped);
+        UnitFields fields = new UnitFields(floor, typical.field().grid(), stopped, share(progress));
         double error = Double.NaN;
         for (int points : POINTS) {
             FloorResponse response = new FloorResponse(floor.layout(), typical.accuracy(), points);
@@ -91,6 +102,12 @@ public final class FloorResponse {
             }
         }
         throw new IllegalStateException("the response to the coefficient above cannot be interpolated: error " + error);
+    }
+
+    /** Counts the fields; few floors need more than the fewest points and one between them. */
+    private static Runnable share(DoubleConsumer progress) {
+        AtomicInteger solved = new AtomicInteger();
+        return () -> progress.accept(Math.min(1, solved.incrementAndGet() / (POINTS[0] + 1.0)));
     }
 
     private void fill(UnitFields fields) {

@@ -23,7 +23,7 @@ public record FloorSection(
     public static final double ERROR_GOAL = 1e-3;
 
     /** Largest relative residual. */
-    static final double RESIDUAL_GOAL = 1e-12;
+    static final double RESIDUAL_GOAL = 4e-12;
 
     /** Cells across the heater on the first grid. */
     private static final int FIRST_ACROSS = 8;

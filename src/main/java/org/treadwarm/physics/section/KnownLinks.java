@@ -112,6 +112,28 @@ final class KnownLinks {
         }
     }
 
+    /** Heat into all known temperatures when all cells are 1 K warmer than they, W/m. */
+    double conductance() {
+        double sum = 0;
+        for (int link = 0; link < count; link++) {
+            sum += conductance(link);
+        }
+        return sum;
+    }
+
+    /** The known temperature whose links conduct the most together; the first of equal ones. */
+    int stiffest() {
+        double[] sums = new double[knownCount];
+        for (int link = 0; link < count; link++) {
+            sums[known[link]] += conductance(link);
+        }
+        int stiffest = 0;
+        for (int i = 1; i < knownCount; i++) {
+            stiffest = sums[i] > sums[stiffest] ? i : stiffest;
+        }
+        return stiffest;
+    }
+
     /** Heat into each known temperature, W/m. */
     double[] heat(double[] temperature, double[] knownTemperatures) {
         double[] heat = new double[knownCount];

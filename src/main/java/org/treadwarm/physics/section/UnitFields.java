@@ -10,15 +10,17 @@ final class UnitFields {
     private final FloorLayout layout;
     private final Grid grid;
     private final BooleanSupplier stopped;
+    private final Runnable solved;
     private final boolean wet;
     private final double[] warmAbove;
     private final double[] driven;
 
-    UnitFields(FloorSection floor, Grid grid, BooleanSupplier stopped) {
+    UnitFields(FloorSection floor, Grid grid, BooleanSupplier stopped, Runnable solved) {
         this.floor = floor;
         this.layout = floor.layout();
         this.grid = grid;
         this.stopped = stopped;
+        this.solved = solved;
         this.wet = floor.heater() instanceof WaterPipe;
         this.warmAbove = new double[(int) grid.cells()];
         this.driven = new double[(int) grid.cells()];
@@ -46,6 +48,7 @@ final class UnitFields {
             factors[1][number] = byDrive[number] / byDrive[flux];
             factors[0][number] = byDifference[number] - factors[1][number] * byDifference[flux];
         }
+        solved.run();
         return factors;
     }
 

@@ -39,6 +39,8 @@ public record WallFoot(
      */
     private static final double CORNER = 2e-4;
 
+    private static final double DRAWN_RESIDUAL = 1e-8;
+
     /** Assumed order of the coupling's error; 1 to 1.6 is observed. */
     private static final double CORNER_ORDER = 1;
 
@@ -124,21 +126,40 @@ public record WallFoot(
                 coupling.accuracy());
     }
 
+    /**
+     * Temperatures over a part of the section, for drawing: 1 inside and 0 outside, so that each is the share of the difference. They
+     * come from one grid, whose error is not estimated; it is far below what a drawing shows.
+     *
+     * @param window the part of the section
+     * @param stopped asked at every step of the solver whether to give up
+     */
+    public TemperatureMap map(FootWindow window, BooleanSupplier stopped) {
+        Require.that(
+                window.inward() <= halfWidth
+                        && window.outward() <= groundDepth()
+                        && window.upward() <= wall.height()
+                        && window.downward() <= plane(),
+                "the window must lie within the section");
+        return new FootReading(this, window)
+                .map(Conduction.solve(section(), grid().halved(), DRAWN_RESIDUAL, stopped), plane());
+    }
+
     /** Resistance of the slab's layers, m²·K/W. */
     public double slabResistance() {
         return slab.stream().mapToDouble(FloorLayer::resistance).sum();
     }
 
-    private double ground() {
+    /** How deep the section's ground is below the ground outside, and how wide outside, m. */
+    public double groundDepth() {
         return GroundStrip.GROUND_WIDTHS * 2 * halfWidth;
     }
 
     private double plane() {
-        return ground() + heatedPlane;
+        return groundDepth() + heatedPlane;
     }
 
     private double width() {
-        return halfWidth + wall.thickness() + ground();
+        return halfWidth + wall.thickness() + groundDepth();
     }
 
     private double top() {
@@ -148,9 +169,9 @@ public record WallFoot(
     private Section section() {
         double outer = halfWidth + wall.thickness();
         List<Block> blocks = new ArrayList<>();
-        blocks.add(new Block(0, width(), 0, ground(), soilConductivity));
+        blocks.add(new Block(0, width(), 0, groundDepth(), soilConductivity));
         if (heatedPlane > 0) {
-            blocks.add(new Block(0, halfWidth, ground(), plane(), soilConductivity));
+            blocks.add(new Block(0, halfWidth, groundDepth(), plane(), soilConductivity));
         }
         double level = plane();
         for (Solid layer : slab) {
@@ -161,10 +182,11 @@ public record WallFoot(
                 halfWidth - strip.thickness(), halfWidth, plane() - strip.depth(), plane(), strip.conductivity())));
         blocks.add(new Block(halfWidth, outer, plane(), top(), wall.conductivity()));
         if (heatedPlane + wall.foundation() > 0) {
-            blocks.add(new Block(halfWidth, outer, ground() - wall.foundation(), plane(), wall.footConductivity()));
+            blocks.add(
+                    new Block(halfWidth, outer, groundDepth() - wall.foundation(), plane(), wall.footConductivity()));
         }
         List<Air> airs = new ArrayList<>();
-        airs.add(new Air(outer, width(), ground(), top(), 0, outsideFilm, outsideFilm));
+        airs.add(new Air(outer, width(), groundDepth(), top(), 0, outsideFilm, outsideFilm));
         airs.add(new Air(0, halfWidth, plane(), top(), 1, 0, insideFilm));
         // The heated plane ends at the strip, whose top sees the room.
         edge.ifPresent(strip ->
@@ -175,13 +197,13 @@ public record WallFoot(
     private Grid grid() {
         double size = wall.thickness() / GroundStrip.CELLS_IN_WALL;
         double outer = halfWidth + wall.thickness();
-        GridLines columns = new GridLines(GroundStrip.GROWTH, ground())
+        GridLines columns = new GridLines(GroundStrip.GROWTH, groundDepth())
                 .fine(halfWidth, outer, size)
                 .at(0)
                 .at(width());
         GridLines rows =
-                new GridLines(GroundStrip.GROWTH, ground()).at(0).at(top()).at(ground() - wall.foundation());
-        rows.fine(ground() - size, ground(), size)
+                new GridLines(GroundStrip.GROWTH, groundDepth()).at(0).at(top()).at(groundDepth() - wall.foundation());
+        rows.fine(groundDepth() - size, groundDepth(), size)
                 .fine(plane() - size, plane(), size)
                 .at(plane());
         columns.fine(halfWidth - CORNER, halfWidth + CORNER, CORNER);

@@ -33,7 +33,7 @@ public final class Api {
         this.wallFeet = new WallFootApi();
         Repeats repeats = new Repeats(store.keptAnswers());
         this.jobs = new JobsApi(desk, repeats);
-        this.sheets = new SheetsApi(sheetDesk, repeats);
+        this.sheets = new SheetsApi(sheetDesk, desk, repeats);
         this.rooms = new RoomsApi(desk, repeats);
         this.history = new HistoryApi(desk, repeats);
     }

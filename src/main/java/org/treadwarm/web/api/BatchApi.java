@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.Iterator;
 import java.util.List;
 import java.util.Optional;
+import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
@@ -81,22 +82,28 @@ final class BatchApi {
 
     static byte[] answer(JsonNode survey, BooleanSupplier late) {
         if (late.getAsBoolean()) {
-            return Refused.of(ProblemDocument.plain(
-                    503,
-                    "too-long",
-                    "This batch takes too long",
-                    "After " + LONGEST.toSeconds() + " seconds no further survey is sized; send the rest again."));
+            return tooLong();
         }
         try {
-            Judgement judged = Judgement.of(survey);
+            Judgement judged = Judgement.of(survey, late);
             return judged.sizing().isPresent()
                     ? Json.bytes(new Sized(200, judged.sizing().get()))
                     : Refused.of(ProblemDocument.invalid(judged.problems()));
+        } catch (CancellationException given) {
+            return tooLong();
         } catch (RuntimeException fault) {
             LOG.error("a survey of a batch met a fault: {}", Traces.of(fault));
             return Refused.of(ProblemDocument.plain(
                     500, "http", "A fault of the program", "This survey could not be sized; the others were."));
         }
+    }
+
+    private static byte[] tooLong() {
+        return Refused.of(ProblemDocument.plain(
+                503,
+                "too-long",
+                "This batch takes too long",
+                "After " + LONGEST.toSeconds() + " seconds no further survey is sized; send the rest again."));
     }
 
     private static List<Problem> problems(JsonNode tree) {

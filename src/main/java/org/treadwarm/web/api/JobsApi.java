@@ -141,11 +141,13 @@ final class JobsApi {
         Optional<Job> job = desk.current(ctx.pathParam("id"));
         if (job.isEmpty()) {
             missing(ctx);
-        } else if (job.get().sizing().isEmpty()) {
-            Problems.invalid(ctx, job.get().problems());
         } else {
-            ctx.header("ETag", tag(job.get().revision()));
-            SizingApi.json(ctx, 200, job.get().sizing().get());
+            SizingApi.judged(ctx, job.get().document()).ifPresent(judged -> {
+                if (judged.sizing().isPresent()) {
+                    ctx.header("ETag", tag(job.get().revision()));
+                }
+                SizingApi.answer(ctx, judged);
+            });
         }
     }
 

@@ -1,11 +1,14 @@
 package org.treadwarm.web.api;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Supplier;
 import java.util.regex.Pattern;
+import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.sheets.FrozenText;
 import org.treadwarm.sheets.Issuing;
 import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.sheets.Verification;
@@ -26,10 +29,12 @@ final class SheetsApi {
     private static final Pattern SHEETS = Pattern.compile("sheets ([0-9]{4}) ([0-9]{1,9})");
 
     private final SheetDesk desk;
+    private final JobDesk jobs;
     private final Repeats repeats;
 
-    SheetsApi(SheetDesk desk, Repeats repeats) {
+    SheetsApi(SheetDesk desk, JobDesk jobs, Repeats repeats) {
         this.desk = desk;
+        this.jobs = jobs;
         this.repeats = repeats;
     }
 
@@ -38,6 +43,11 @@ final class SheetsApi {
         Optional<SheetBodies.Order> order = SheetBodies.order(ctx);
         if (order.isPresent()) {
             String job = ctx.pathParam("id");
+            // Sized once before, within the time that one request may take; issuing has its floors at hand then.
+            Optional<JsonNode> document = jobs.document(job, order.get().revision());
+            if (document.isPresent() && SizingApi.judged(ctx, document.get()).isEmpty()) {
+                return;
+            }
             Supplier<Issuing> issuing =
                     desk.preparedIssue(job, order.get().revision(), order.get().replaces(), who(ctx));
             repeats.create(ctx, () -> issued(ctx, issuing.get()));
@@ -99,6 +109,12 @@ final class SheetsApi {
 
     /** {@code GET /api/v1/sheets/{number}/verification}. */
     void verification(Context ctx) {
+        Optional<Sheet> sheet = number(ctx).flatMap(desk::find);
+        if (sheet.isPresent()
+                && SizingApi.judged(ctx, FrozenText.tree(sheet.get().content().survey()))
+                        .isEmpty()) {
+            return;
+        }
         Optional<Verification> verification = number(ctx).flatMap(desk::verify);
         if (verification.isPresent()) {
             SizingApi.json(ctx, 200, verification.get());

@@ -25,10 +25,30 @@ import org.treadwarm.wire.Json;
 final class SizingApi {
     private static final Pattern MATERIALS = Pattern.compile("materials ([0-9]{1,6})");
     private static final Duration LONGEST = Duration.ofSeconds(10);
+    private static final Duration LONGEST_SIZING = Duration.ofSeconds(30);
 
     /** {@code POST /api/v1/sizings}: a survey in, a sizing out. */
     void size(Context ctx) {
-        Bodies.read(ctx, Bodies.SIZING).ifPresent(document -> answer(ctx, Judgement.of(document)));
+        Bodies.read(ctx, Bodies.SIZING)
+                .flatMap(document -> judged(ctx, document))
+                .ifPresent(judged -> answer(ctx, judged));
+    }
+
+    /** What a survey comes to; empty when that takes too long, which is answered then. Floors solved until then are remembered. */
+    static Optional<Judgement> judged(Context ctx, JsonNode document) {
+        long begun = System.nanoTime();
+        try {
+            return Optional.of(Judgement.of(document, () -> System.nanoTime() - begun > LONGEST_SIZING.toNanos()));
+        } catch (CancellationException e) {
+            Problems.plain(
+                    ctx,
+                    503,
+                    "too-long",
+                    "This sizing takes too long",
+                    "It was not done within " + LONGEST_SIZING.toSeconds()
+                            + " seconds. The floors solved until then are remembered: send it again to go on.");
+            return Optional.empty();
+        }
     }
 
     /** Writes what a survey comes to; with the working when the query asks for it. */

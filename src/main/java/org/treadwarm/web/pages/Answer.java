@@ -50,20 +50,8 @@ final class Answer {
     static Map<String, Object> of(JsonNode document, Part part) {
         Partial partial = Partial.of(document);
         Answer answer = new Answer("");
-        answer.model.put("waiting", partial.judgement().problems().size());
-        answer.model.put(
-                "own",
-                partial.judgement().problems().stream()
-                        .filter(problem -> part.holds(problem.pointer()))
-                        .count());
-        answer.model.put("unfinished", partial.unfinished());
-        answer.model.put("verdict", "");
-        answer.model.put("pictures", List.of());
-        answer.model.put("lines", List.of());
-        answer.model.put("layouts", List.of());
-        answer.model.put("warnings", List.of());
-        answer.model.put("cautions", List.of());
-        answer.model.put("working", List.of());
+        answer.start(partial, part);
+        answer.model.put("unsized", "");
         if (part.isAssembly()) {
             answer.assembly(document, part);
         } else if (partial.judgement().sizing().isPresent()) {
@@ -76,6 +64,31 @@ final class Answer {
             }
         }
         return answer.model;
+    }
+
+    /** What stands there when the document is not sized, for a reason in words. */
+    static Map<String, Object> unsized(JsonNode document, Part part, String reason) {
+        Answer answer = new Answer("");
+        answer.start(Partial.unsized(document), part);
+        answer.model.put("unsized", reason);
+        return answer.model;
+    }
+
+    private void start(Partial partial, Part part) {
+        model.put("waiting", partial.judgement().problems().size());
+        model.put(
+                "own",
+                partial.judgement().problems().stream()
+                        .filter(problem -> part.holds(problem.pointer()))
+                        .count());
+        model.put("unfinished", partial.unfinished());
+        model.put("verdict", "");
+        model.put("pictures", List.of());
+        model.put("lines", List.of());
+        model.put("layouts", List.of());
+        model.put("warnings", List.of());
+        model.put("cautions", List.of());
+        model.put("working", List.of());
     }
 
     /**

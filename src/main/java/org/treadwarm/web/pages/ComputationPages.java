@@ -27,15 +27,20 @@ final class ComputationPages {
     void begin(Context ctx, String title, UnaryOperator<String> then, String back, Computation.Work work) {
         Optional<Computation> begun = computations.begin(title, then, back, work);
         if (begun.isEmpty()) {
-            view.show(
-                    ctx,
-                    503,
-                    "fault",
-                    Map.of("title", "Too much is being computed just now; try again in a minute", "status", 503));
+            tooMuch(ctx);
             return;
         }
         boolean done = begun.get().await(Computations.PATIENCE) instanceof State.Done;
         ctx.redirect(done ? begun.get().then() : "/computations/" + begun.get().id(), HttpStatus.SEE_OTHER);
+    }
+
+    /** Says that no further computation can be begun. */
+    void tooMuch(Context ctx) {
+        view.show(
+                ctx,
+                503,
+                "fault",
+                Map.of("title", "Too much is being computed just now; try again in a minute", "status", 503));
     }
 
     /** {@code GET /computations/{id}}: how far it is, or on to its result. */

@@ -67,6 +67,8 @@ final class Forms {
             "maximumTemperature",
             "glycol",
             "manifold",
+            "manifoldDrop",
+            "heatSourceDrop",
             "spacing");
     private static final Map<String, String> ADD = Map.ofEntries(
             Map.entry("surfaces", "Add a surface"),

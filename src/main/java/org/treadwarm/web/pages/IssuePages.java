@@ -45,9 +45,9 @@ final class IssuePages {
                 .toList();
         Map<String, Object> model = errors.model();
         model.put("job", job);
-        model.put(
-                "warnings", job.sizing().map(sizing -> sizing.warnings().size()).orElse(0));
-        model.put("rooms", job.sizing().map(IssuePages::rooms).orElse(List.of()));
+        Optional<Sizing> sized = job.sizing();
+        model.put("warnings", sized.map(sizing -> sizing.warnings().size()).orElse(0));
+        model.put("rooms", sized.map(IssuePages::rooms).orElse(List.of()));
         model.put("sheets", open.stream().map(SheetView.Head::of).toList());
         model.put("replaces", status == 200 ? "" : EntryPages.text(ctx, "replaces"));
         view.show(ctx, status, "issue", model);

@@ -13,6 +13,7 @@ import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.jobs.JobDesk.Saving;
+import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.JobListings;
 import org.treadwarm.store.JobSearch;
@@ -25,11 +26,13 @@ final class JobPages {
     private static final int A_PAGE = 50;
 
     private final JobDesk desk;
+    private final SheetDesk sheets;
     private final Visitors visitors;
     private final View view;
 
-    JobPages(JobDesk desk, Visitors visitors, View view) {
+    JobPages(JobDesk desk, SheetDesk sheets, Visitors visitors, View view) {
         this.desk = desk;
+        this.sheets = sheets;
         this.visitors = visitors;
         this.view = view;
     }
@@ -130,6 +133,9 @@ final class JobPages {
 
     private void show(Context ctx, int status, Job job, JsonNode document, List<ErrorView> more, String notice) {
         Map<String, Object> model = new HashMap<>(new JobView(job, document).model(typedName(ctx, job), more, notice));
+        model.put(
+                "sheets",
+                sheets.ofJob(job.id()).stream().map(SheetView.Head::of).toList());
         model.put("archived", desk.isArchived(job.id()).orElse(false));
         view.show(ctx, status, "job", model);
     }

@@ -77,7 +77,7 @@ final class JobView {
 
     /** What the page is made from. */
     Map<String, Object> model(String jobName, List<ErrorView> more, String notice) {
-        Forms forms = new Forms(document, Judgement.of(document).problems());
+        Forms forms = new Forms(document, Judgement.unsized(document).problems());
         ObjectView site = forms.form("/site", "Site", Site.class);
         List<ErrorView> errors = new ArrayList<>(more);
         errors.addAll(forms.errors());
@@ -134,19 +134,41 @@ final class JobView {
         return rows;
     }
 
-    /** The warm water of the job: what the boiler and the pump must give, apart from manifold and pipes to it. */
+    /** The warm water of the job: what the boiler and the pump must give; manifolds and heat source as far as the survey states them. */
     private static void water(List<TotalRow> rows, WaterTotal water) {
         rows.add(new TotalRow(
                 "Supply of the warm water",
                 Numbers.fixed(water.supplyTemperature(), 1) + " °C, governed by " + water.governingRoom()));
         rows.add(new TotalRow("Loops", Integer.toString(water.valves().size())));
         rows.add(new TotalRow("Flow of the pump", Numbers.fixed(60_000 * water.volumeFlow(), 2) + " l/min"));
-        rows.add(new TotalRow(
-                "Drop of the worst loop", Numbers.fixed(water.pressure() / 1000, 1) + " kPa, straight pipe"));
+        drops(rows, water);
         if (water.manifolds().size() > 1) {
             water.manifolds().forEach(manifold -> rows.add(manifold(manifold)));
         }
         rows.add(new TotalRow("Water in the loops", Numbers.fixed(1000 * water.waterContent(), 1) + " l"));
+    }
+
+    /** What the pump has to overcome: loops as straight pipe, and what the survey states of manifolds and heat source. */
+    private static void drops(List<TotalRow> rows, WaterTotal water) {
+        double worst = water.manifolds().stream()
+                .mapToDouble(manifold -> manifold.loopDrop().orElse(manifold.pressure()))
+                .max()
+                .orElseThrow();
+        rows.add(new TotalRow("Drop of the worst loop", kilopascals(worst) + ", straight pipe"));
+        if (water.manifolds().size() == 1) {
+            water.manifolds()
+                    .get(0)
+                    .ownDrop()
+                    .ifPresent(drop -> rows.add(new TotalRow("Drop of the manifold", kilopascals(drop))));
+        }
+        water.sourceDrop().ifPresent(drop -> rows.add(new TotalRow("Drop of the heat source", kilopascals(drop))));
+        if (water.pressure() != worst) {
+            rows.add(new TotalRow("Pressure of the pump", kilopascals(water.pressure())));
+        }
+    }
+
+    private static String kilopascals(double pascals) {
+        return Numbers.fixed(pascals / 1000, 1) + " kPa";
     }
 
     private static TotalRow manifold(ManifoldSizing manifold) {

@@ -6,18 +6,16 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
+import java.util.function.Function;
 import java.util.stream.Collectors;
 import org.treadwarm.sizing.Sizing.FloorSizing;
-import org.treadwarm.sizing.Sizing.LoopValve;
 import org.treadwarm.sizing.Sizing.PartLimit;
-import org.treadwarm.sizing.Sizing.PartLoops;
 import org.treadwarm.sizing.Sizing.PartSizing;
 import org.treadwarm.sizing.Sizing.PartState;
 import org.treadwarm.sizing.Sizing.PracticeJudgement;
 import org.treadwarm.sizing.Sizing.Total;
 import org.treadwarm.sizing.Sizing.WarmUpSizing;
-import org.treadwarm.sizing.Sizing.WaterLayout;
-import org.treadwarm.sizing.Sizing.WaterTotal;
 import org.treadwarm.sizing.Verdict;
 import org.treadwarm.units.Numbers;
 import org.treadwarm.web.pages.Answer.Line;
@@ -26,8 +24,44 @@ import org.treadwarm.web.pages.Answer.Line;
 final class LayoutLines {
     private final List<Layout> layouts = new ArrayList<>();
 
-    /** A headed table of lines, with a sentence below it. */
-    public record Layout(String title, List<Line> lines, String note) {}
+    /**
+     * A headed table of lines, with a sentence below it.
+     *
+     * @param summary a sentence above it, or empty
+     * @param grid a table of several columns; without rows there is none
+     * @param more lines of less weight
+     */
+    public record Layout(String title, String summary, List<Line> lines, Grid grid, List<Line> more, String note) {
+        Layout(String title, List<Line> lines, String note) {
+            this(title, "", lines, NO_GRID, List.of(), note);
+        }
+
+        /** How many of the lesser lines ask to be looked at again, in words. */
+        public String judged() {
+            long again = more.stream()
+                    .filter(line -> line.note().startsWith(LOOK_AGAIN))
+                    .count();
+            boolean limits = more.stream().anyMatch(line -> line.note().startsWith(KEPT));
+            return again > 0
+                    ? "Limits of practice: " + again + " to look at again"
+                    : limits ? "Limits of practice: all kept" : "What limits them";
+        }
+
+        /** Whether a line asks to be looked at again. */
+        public boolean isDoubtful() {
+            return more.stream().anyMatch(line -> line.note().startsWith(LOOK_AGAIN));
+        }
+    }
+
+    /** A table of several columns; the first head is that of the rows' names. */
+    public record Grid(String title, List<String> heads, List<Row> rows) {}
+
+    /** A row of a table of several columns. */
+    public record Row(String name, List<String> cells) {}
+
+    private static final Grid NO_GRID = new Grid("", List.of(), List.of());
+    private static final String KEPT = "kept: ";
+    private static final String LOOK_AGAIN = "look again: ";
 
     private LayoutLines() {}
 
@@ -35,77 +69,9 @@ final class LayoutLines {
         LayoutLines lines = new LayoutLines();
         lines.parts(floor);
         floor.electric().ifPresent(layout -> lines.layouts.add(ElectricLines.of(layout, floor)));
-        floor.water().ifPresent(layout -> lines.water(room, layout, total));
+        floor.water().ifPresent(layout -> lines.layouts.add(WaterLines.of(room, layout, total)));
         floor.warmup().ifPresent(lines::warmUp);
         return List.copyOf(lines.layouts);
-    }
-
-    private void water(String room, WaterLayout layout, Total total) {
-        List<Line> lines = new ArrayList<>();
-        lines.add(line("Supply", layout.supplyTemperature(), 1, "°C", governed(room, total)));
-        lines.add(line(
-                "Return", layout.returnTemperature(), 1, "°C", "spread " + Numbers.fixed(layout.spread(), 1) + " K"));
-        if (layout.parts().isEmpty()) {
-            loops(lines, "", layout.loops(), layout.loopLength(), layout.massFlow(), layout.volumeFlow());
-            drop(lines, "", layout.pressureDrop(), layout.velocity(), layout.reynolds());
-            total.water().ifPresent(water -> valve(lines, room, "", water));
-        }
-        for (PartLoops part : layout.parts()) {
-            String of = ", " + part.name();
-            double volumeFlow = part.massFlow() * layout.volumeFlow() / layout.massFlow();
-            loops(lines, of, part.loops(), part.loopLength(), part.massFlow(), volumeFlow);
-            drop(lines, of, part.pressureDrop(), part.velocity(), part.reynolds());
-            total.water().ifPresent(water -> valve(lines, room, part.name(), water));
-        }
-        lines.add(line("Flow of the room", 60_000 * layout.volumeFlow(), 2, "l/min", ""));
-        lines.add(line("Water in the loops", 1000 * layout.waterContent(), 1, "l", ""));
-        layout.tableMeanOvertemperature()
-                .ifPresent(table -> lines.add(line(
-                        "Standard table method",
-                        table,
-                        1,
-                        "K",
-                        "mean over-temperature of the water by EN 1264-2 (from memory); the section says "
-                                + Numbers.fixed(layout.meanOvertemperature(), 1) + " K, and is what is used")));
-        limits(lines, layout.limits());
-        for (PartLoops part : layout.parts()) {
-            limits(
-                    lines,
-                    part.limits().stream()
-                            .map(limit -> named(limit, part.name()))
-                            .toList());
-        }
-        layouts.add(
-                new Layout(
-                        "Warm-water layout",
-                        lines,
-                        "Drops are of straight pipe without bends, fittings and manifold. Flush, vent and test the pressure before the floor"
-                                + " is covered; heat a screed up by its maker's rules; protect against frost when switched off."));
-    }
-
-    private static void loops(
-            List<Line> lines, String of, int count, double length, double massFlow, double volumeFlow) {
-        lines.add(line("Loops" + of, count, 0, "", "of " + Numbers.fixed(length, 1) + " m each, feeders included"));
-        lines.add(line(
-                "Flow of one loop" + of,
-                60_000 * volumeFlow / count,
-                2,
-                "l/min",
-                Numbers.fixed(3600 * massFlow / count, 1) + " kg/h"));
-    }
-
-    private static void drop(List<Line> lines, String of, double drop, double velocity, double reynolds) {
-        lines.add(line(
-                "Drop of one loop" + of,
-                drop / 1000,
-                2,
-                "kPa",
-                "straight pipe; " + Numbers.fixed(velocity, 2) + " m/s, Re " + Numbers.fixed(reynolds, 0)));
-    }
-
-    private static PracticeJudgement named(PracticeJudgement limit, String part) {
-        return new PracticeJudgement(
-                limit.name() + ", " + part, limit.value(), limit.limit(), limit.margin(), limit.source());
     }
 
     /** What each part of the floor gives: at the required flux, or at the carrying flux when that is less. */
@@ -114,32 +80,47 @@ final class LayoutLines {
             return;
         }
         boolean carries = floor.verdict() == Verdict.CARRIES;
-        List<Line> lines = new ArrayList<>();
-        for (PartSizing part : floor.parts()) {
-            PartState state = carries ? part.atRequiredFlux() : part.atCarryingFlux();
-            lines.add(new Line(
-                    capital(part.name()),
-                    Numbers.fixed(state.flux(), 1) + " W/m²",
-                    part.zone() + " of " + Numbers.fixed(part.area(), 1) + " m², spacing "
-                            + Numbers.fixed(1000 * part.spacing(), 0) + " mm; warmest point "
-                            + Numbers.fixed(state.surfaceTemperature(), 1) + " °C, "
-                            + Numbers.fixed(state.downwardFlux(), 1) + " W/m² down"));
-            part.limits().stream()
-                    .min(Comparator.comparingDouble(PartLimit::maximumFlux))
-                    .ifPresent(lowest -> lines.add(new Line(
-                            capital(part.name()) + " may give",
-                            Numbers.fixed(lowest.maximumFlux(), 1) + " W/m²",
-                            "by its lowest limit, " + lowest.name())));
-        }
+        Function<PartSizing, PartState> state = carries ? PartSizing::atRequiredFlux : PartSizing::atCarryingFlux;
+        List<String> heads = new ArrayList<>(List.of("Part"));
+        floor.parts().forEach(part -> heads.add(part.name()));
+        List<Row> rows = List.of(
+                row(floor, "Zone", PartSizing::zone),
+                row(floor, "Area, m²", part -> Numbers.fixed(part.area(), 1)),
+                row(floor, "Spacing, mm", part -> Numbers.fixed(1000 * part.spacing(), 0)),
+                row(
+                        floor,
+                        "Gives, W/m²",
+                        part -> Numbers.fixed(state.apply(part).flux(), 1)),
+                row(
+                        floor,
+                        "Warmest point, °C",
+                        part -> Numbers.fixed(state.apply(part).surfaceTemperature(), 1)),
+                row(floor, "Down, W/m²", part -> Numbers.fixed(state.apply(part).downwardFlux(), 1)));
         layouts.add(new Layout(
                 "Parts of the floor",
-                lines,
+                "",
+                List.of(),
+                new Grid("Parts of the floor", heads, rows),
+                floor.parts().stream().flatMap(part -> lowest(part).stream()).toList(),
                 "All parts are fed alike, and the floor gives their mean over its area: here "
                         + (carries ? "the required flux" : "the carrying flux, which is too little")
                         + ". A peripheral strip is at most 1 m wide, along outer walls (EN 1264-3)."));
     }
 
-    private static String capital(String text) {
+    private static Row row(FloorSizing floor, String name, Function<PartSizing, String> cell) {
+        return new Row(name, floor.parts().stream().map(cell).toList());
+    }
+
+    private static Optional<Line> lowest(PartSizing part) {
+        return part.limits().stream()
+                .min(Comparator.comparingDouble(PartLimit::maximumFlux))
+                .map(limit -> new Line(
+                        capital(part.name()) + " may give",
+                        Numbers.fixed(limit.maximumFlux(), 1) + " W/m²",
+                        "by its lowest limit, " + limit.name()));
+    }
+
+    static String capital(String text) {
         return text.substring(0, 1).toUpperCase(Locale.ROOT) + text.substring(1);
     }
 
@@ -175,53 +156,36 @@ final class LayoutLines {
                         + Numbers.fixed(found.massCoupling(), 1) + " W/(m²·K), all per m² of heated floor."));
     }
 
-    private static String governed(String room, Total total) {
-        return total.water()
-                .map(water -> water.governingRoom().equals(room)
-                        ? "this room governs the job"
-                        : water.governingRoom() + " governs the job")
-                .orElse("");
-    }
-
-    private static void valve(List<Line> lines, String room, String part, WaterTotal water) {
-        water.valves().stream()
-                .filter(valve ->
-                        valve.room().equals(room) && valve.part().orElse("").equals(part))
-                .findFirst()
-                .map(LoopValve::throttled)
-                .ifPresent(throttled -> lines.add(line(
-                        "To be throttled at each valve" + (part.isEmpty() ? "" : ", " + part),
-                        throttled / 1000,
-                        2,
-                        "kPa",
-                        water.manifolds().size() > 1
-                                ? "against the worst loop of its manifold"
-                                : "against the worst loop of the job")));
-    }
-
     /** One line for each quantity, with every limit of practice beside it. */
     static void limits(List<Line> lines, List<PracticeJudgement> limits) {
         Map<String, List<PracticeJudgement>> byName = new LinkedHashMap<>();
         limits.forEach(limit ->
                 byName.computeIfAbsent(limit.name(), name -> new ArrayList<>()).add(limit));
-        byName.forEach((name, of) -> {
-            boolean kept = of.stream().allMatch(limit -> limit.margin() >= 0);
-            String all = of.stream()
-                    .map(limit -> (isMost(limit) ? "at most " : "at least ") + shown(name, limit.limit()) + ", "
-                            + limit.source()
-                            + (limit.margin() < 0 ? ": beyond it" : ""))
-                    .collect(Collectors.joining("; "));
-            lines.add(
-                    new Line(capital(name), shown(name, of.get(0).value()), (kept ? "kept: " : "look again: ") + all));
-        });
+        byName.forEach((name, of) ->
+                lines.add(new Line(capital(name), shown(name, of.get(0).value()), judged(name, of))));
     }
 
-    private static boolean isMost(PracticeJudgement limit) {
-        return Math.abs(limit.limit() - limit.value() - limit.margin()) <= 1e-9 * Math.abs(limit.limit());
+    /** What limits say of a quantity: each once, and whether a value is beyond it. */
+    private static String judged(String name, List<PracticeJudgement> limits) {
+        boolean kept = limits.stream().allMatch(limit -> limit.margin() >= 0);
+        return opening(kept)
+                + limits.stream()
+                        .map(limit -> words(name, limit) + (limit.margin() < 0 ? ": beyond it" : ""))
+                        .collect(Collectors.joining("; "));
     }
 
-    private static String shown(String name, double value) {
-        return switch (name.split(", ", 2)[0]) {
+    static String opening(boolean kept) {
+        return kept ? KEPT : LOOK_AGAIN;
+    }
+
+    /** A limit and where it comes from. */
+    static String words(String name, PracticeJudgement limit) {
+        return limit.sense().orElse("limit") + " " + shown(name, limit.limit()) + ", " + limit.source();
+    }
+
+    /** A value of a quantity that practice limits, with its unit. */
+    static String shown(String name, double value) {
+        return switch (name) {
             case "loop length" -> Numbers.fixed(value, 0) + " m";
             case "pressure drop" -> Numbers.fixed(value / 1000, 1) + " kPa";
             case "velocity" -> Numbers.fixed(value, 2) + " m/s";

@@ -6,6 +6,7 @@ import io.javalin.http.Handler;
 import io.javalin.http.HttpStatus;
 import java.time.Clock;
 import java.util.Map;
+import java.util.Optional;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.store.Role;
@@ -43,11 +44,13 @@ public final class Pages {
         this.visitors = visitors;
         this.view = new View(visitors);
         this.entry = new EntryPages(store, visitors, view);
-        this.jobs = new JobPages(desk, visitors, view);
+        this.jobs = new JobPages(desk, sheetDesk, visitors, view);
         this.versions = new VersionPages(desk, visitors, view);
         this.files = new TransferPages(desk, visitors, view);
         this.history = new HistoryPages(desk, visitors, view);
-        this.parts = new PartPages(desk, visitors, view, versions);
+        this.computing = new ComputationPages(computations, view);
+        this.ahead = new SolvingAhead(desk, computations, computing);
+        this.parts = new PartPages(desk, visitors, view, versions, ahead);
         this.links = new LinkPages(store, visitors, view);
         this.account = new AccountPages(store, visitors, view);
         this.people = new PeoplePages(store, visitors, view);
@@ -56,10 +59,8 @@ public final class Pages {
         this.issuing = new IssuePages(desk, sheetDesk, visitors, view);
         this.sheets = new SheetPages(sheetDesk, visitors, view);
         this.sheetLinks = new SheetLinkPages(store, visitors, view);
-        this.quick = new QuickPages(desk, visitors, view);
-        this.computing = new ComputationPages(computations, view);
+        this.quick = new QuickPages(desk, visitors, view, ahead);
         this.method = new MethodPage(computations, view);
-        this.ahead = new SolvingAhead(desk, computations);
         this.wallFeet = new WallFootPages(desk, visitors, view, computations, computing);
     }
 
@@ -81,12 +82,12 @@ public final class Pages {
         routes.get("/jobs/{job}/history/{n}", history::show, Access.SURVEYOR);
         routes.post("/jobs/{job}/history/{n}/restore", form(history::restore), Access.SURVEYOR);
         routes.get("/jobs/{job}/files", files::show, Access.SURVEYOR);
-        routes.get("/jobs/{job}/files/{file}", files::download, Access.SURVEYOR);
+        routes.get("/jobs/{job}/files/{file}", ahead.before(files::download), Access.SURVEYOR);
         routes.post("/jobs/{job}/files/{file}", form(files::read), Access.SURVEYOR);
         routes.post("/jobs/{job}/copy", form(jobs::copy), Access.ESTIMATOR);
         routes.post("/jobs/{job}/archive", form(jobs::archive), Access.ESTIMATOR);
         routes.post("/jobs/{job}/unarchive", form(jobs::bringBack), Access.ESTIMATOR);
-        routes.get("/jobs/{job}/{part}/{name}", ahead.before(parts::show), Access.SURVEYOR);
+        routes.get("/jobs/{job}/{part}/{name}", ahead.beforePart(parts::show), Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}", form(parts::save), Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}/versions", form(versions::settle), Access.SURVEYOR);
         routes.post("/jobs/{job}/{part}/{name}/preview", form(parts::preview), Access.SURVEYOR);
@@ -96,7 +97,9 @@ public final class Pages {
         routes.post("/jobs/{job}/rooms/{name}/wall-foot/{junction}/{id}", form(wallFeet::store), Access.SURVEYOR);
         routes.get("/computations/{id}", computing::show, Access.SURVEYOR);
         routes.post("/computations/{id}", form(computing::cancel), Access.SURVEYOR);
-        routes.get("/one-room", quick::show, Access.SURVEYOR);
+        Handler example = ahead.before(ctx -> Optional.of(QuickPages.start()), quick::show, "/jobs");
+        routes.get("/one-room", example, Access.SURVEYOR);
+        routes.get("/one-room/{id}", ahead.beforeTyped(quick::typed, quick::showTyped), Access.SURVEYOR);
         routes.post("/one-room", form(quick::change), Access.SURVEYOR);
         routes.post("/one-room/preview", form(quick::preview), Access.SURVEYOR);
         routes.post("/one-room/keep", form(quick::keep), Access.ESTIMATOR);
@@ -112,11 +115,14 @@ public final class Pages {
     }
 
     private void sheets(RoutesConfig routes) {
-        routes.get("/jobs/{job}/issue", issuing::ask, Access.ESTIMATOR);
-        routes.post("/jobs/{job}/issue", form(issuing::issue), Access.ESTIMATOR);
+        routes.get("/jobs/{job}/issue", ahead.before(issuing::ask), Access.ESTIMATOR);
+        routes.post("/jobs/{job}/issue", form(ahead.before(issuing::issue)), Access.ESTIMATOR);
         routes.get("/sheets", sheets::list, Access.SURVEYOR);
-        routes.get("/sheets/{number}", sheets::show, Access.SURVEYOR);
-        routes.get("/sheets/{number}/verification", sheets::verify, Access.SURVEYOR);
+        routes.get("/sheets/{number}", ahead.before(sheets::survey, sheets::show, "/sheets"), Access.SURVEYOR);
+        routes.get(
+                "/sheets/{number}/verification",
+                ahead.before(sheets::survey, sheets::verify, "/sheets"),
+                Access.SURVEYOR);
         routes.get("/sheets/{number}/withdrawal", sheets::askWithdrawal, Access.ESTIMATOR);
         routes.post("/sheets/{number}/withdrawal", form(sheets::withdraw), Access.ESTIMATOR);
         routes.get("/sheets/{number}/links", sheetLinks::list, Access.ESTIMATOR);

@@ -7,7 +7,6 @@ import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -33,10 +32,12 @@ final class PartPages {
     private final Visitors visitors;
     private final View view;
     private final VersionPages versions;
+    private final SolvingAhead ahead;
 
-    PartPages(JobDesk desk, Visitors visitors, View view, VersionPages versions) {
+    PartPages(JobDesk desk, Visitors visitors, View view, VersionPages versions, SolvingAhead ahead) {
         this.desk = desk;
         this.versions = versions;
+        this.ahead = ahead;
         this.visitors = visitors;
         this.view = view;
     }
@@ -63,7 +64,7 @@ final class PartPages {
     }
 
     private void show(Context ctx, int status, Job job, JsonNode document, Part part, String notice, long revision) {
-        Forms forms = new Forms(document, Judgement.of(document).problems());
+        Forms forms = new Forms(document, Judgement.unsized(document).problems());
         Map<String, Object> model = new HashMap<>();
         String nameError =
                 Optional.<String>ofNullable(ctx.attribute(NAME_ERROR)).orElse("");
@@ -86,25 +87,13 @@ final class PartPages {
         model.put("back", "/jobs/" + job.id());
         model.put("backWords", "Back to the job");
         model.put("quick", false);
-        model.put("feet", feet(job.id(), document, part));
+        model.put("feet", WallFootOffers.of(job, document, part));
         model.put("materials", Materials.all());
-        model.putAll(Answer.of(document, part));
+        model.putAll(
+                SolvingAhead.isUnsized(ctx)
+                        ? Answer.unsized(document, part, SolvingAhead.STOPPED)
+                        : Answer.of(document, part));
         view.show(ctx, status, "part", model);
-    }
-
-    /** The ways to what can be solved in section: titles and addresses. */
-    private static Map<String, String> feet(String job, JsonNode document, Part part) {
-        Map<String, String> feet = new LinkedHashMap<>();
-        JsonNode room = document.at(part.pointer());
-        for (JsonNode junction : part.isRoom() ? room.path("junctions") : room.path("none")) {
-            String id = junction.path("id").asText();
-            if (WallFootDraft.isFoot(room, junction) && !id.isEmpty()) {
-                feet.put(
-                        Links.part(job, part.kind(), part.key()) + "/wall-foot/" + id,
-                        junction.path("name").asText("junction"));
-            }
-        }
-        return feet;
     }
 
     /** The answer alone, for the form as it stands; nothing is kept. */
@@ -117,9 +106,7 @@ final class PartPages {
         }
         ObjectNode document = (ObjectNode) job.get().document().deepCopy();
         part.get().write(document, ctx.formParamMap());
-        Map<String, Object> model = new HashMap<>(Answer.of(document, part.get()));
-        model.put("part", part.get());
-        view.show(ctx, 200, "answer", model);
+        ahead.preview(ctx, view, document, part.get());
     }
 
     void save(Context ctx) {
@@ -206,6 +193,10 @@ final class PartPages {
         boolean problems = now.isPresent()
                 && saved.problems().stream().anyMatch(problem -> now.get().holds(problem.pointer()));
         if (action.equals("save") && problems) {
+            String address = Links.part(job.id(), part.kind(), key);
+            if (ahead.waits(ctx, saved.document(), address, address + "?" + SolvingAhead.UNSIZED)) {
+                return;
+            }
             show(
                     ctx,
                     422,

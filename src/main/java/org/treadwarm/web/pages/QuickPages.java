@@ -25,12 +25,16 @@ import org.treadwarm.web.security.Visitors;
 /** One room without a job: the whole survey travels in the form, and nothing is kept until it is made a job. */
 final class QuickPages {
     private static final String SITE = "/site";
+    private static final String ADDRESS = "/one-room";
 
     private final JobDesk desk;
     private final Visitors visitors;
     private final View view;
+    private final SolvingAhead ahead;
+    private final TypedRooms typed = new TypedRooms(System::nanoTime);
 
-    QuickPages(JobDesk desk, Visitors visitors, View view) {
+    QuickPages(JobDesk desk, Visitors visitors, View view, SolvingAhead ahead) {
+        this.ahead = ahead;
         this.desk = desk;
         this.visitors = visitors;
         this.view = view;
@@ -40,7 +44,27 @@ final class QuickPages {
         show(ctx, 200, start(), "");
     }
 
-    private static JsonNode start() {
+    /** {@code GET /one-room/{id}}: a room as it was typed, after its floor was solved. */
+    void showTyped(Context ctx) {
+        Optional<JsonNode> document = typed(ctx);
+        if (document.isPresent()) {
+            show(ctx, 200, document.get(), "");
+        } else {
+            ctx.redirect(ADDRESS, HttpStatus.SEE_OTHER);
+        }
+    }
+
+    /** The room that was kept under the id in the address. */
+    Optional<JsonNode> typed(Context ctx) {
+        return typed.find(ctx.pathParam("id"), person(ctx));
+    }
+
+    private String person(Context ctx) {
+        return visitors.session(ctx).orElseThrow().person().id();
+    }
+
+    /** The example that the form starts with. */
+    static JsonNode start() {
         try (InputStream in = QuickPages.class.getResourceAsStream("/demo/one-room.json")) {
             return Document.mapper().readTree(in);
         } catch (IOException e) {
@@ -50,7 +74,7 @@ final class QuickPages {
 
     private void show(Context ctx, int status, JsonNode document, String notice) {
         Part part = part(document);
-        Forms forms = new Forms(document, Judgement.of(document).problems());
+        Forms forms = new Forms(document, Judgement.unsized(document).problems());
         Map<String, Object> model = new HashMap<>();
         model.put("part", part);
         model.put("partName", "");
@@ -59,16 +83,19 @@ final class QuickPages {
         model.put("form", forms.form(part.pointer(), part.formTitle(), part.type()));
         model.put("errors", forms.errors());
         model.put("notice", notice);
-        model.put("action", "/one-room");
+        model.put("action", ADDRESS);
         model.put("back", "/jobs");
         model.put("backWords", "Jobs");
         model.put("quick", true);
-        model.put("feet", Map.of());
+        model.put("feet", WallFootOffers.NONE);
         model.put("document", text(document));
         model.put("materials", Materials.all());
         model.put("revision", 0);
         model.put("jobName", "One room without a job");
-        model.putAll(Answer.of(document, part));
+        model.putAll(
+                SolvingAhead.isUnsized(ctx)
+                        ? Answer.unsized(document, part, SolvingAhead.STOPPED)
+                        : Answer.of(document, part));
         view.show(ctx, status, "part", model);
     }
 
@@ -111,9 +138,7 @@ final class QuickPages {
 
     void preview(Context ctx) {
         ObjectNode document = document(ctx).orElseGet(() -> (ObjectNode) start());
-        Map<String, Object> model = new HashMap<>(Answer.of(document, part(document)));
-        model.put("part", part(document));
-        view.show(ctx, 200, "answer", model);
+        ahead.preview(ctx, view, document, part(document));
     }
 
     /** Makes the room a job. */
@@ -149,7 +174,11 @@ final class QuickPages {
                             Site.class,
                             document.path("site"));
         }
-        boolean problems = !Judgement.of(document).problems().isEmpty();
+        boolean problems = !Judgement.unsized(document).problems().isEmpty();
+        String address = problems ? ADDRESS : ADDRESS + "/" + typed.keep(document, person(ctx));
+        if (!problems && ahead.waits(ctx, document, address, address + "?" + SolvingAhead.UNSIZED)) {
+            return;
+        }
         boolean size = action.equals("save");
         show(
                 ctx,

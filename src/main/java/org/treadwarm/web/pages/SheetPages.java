@@ -1,10 +1,12 @@
 package org.treadwarm.web.pages;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
+import org.treadwarm.sheets.FrozenText;
 import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.sheets.Verification;
 import org.treadwarm.store.Sheet;
@@ -95,6 +97,11 @@ final class SheetPages {
 
             ctx.redirect("/sheets/" + number, HttpStatus.SEE_OTHER);
         }
+    }
+
+    /** The survey that the sheet of an address was issued from. */
+    Optional<JsonNode> survey(Context ctx) {
+        return sheet(ctx).map(sheet -> FrozenText.tree(sheet.content().survey()));
     }
 
     private Optional<Sheet> sheet(Context ctx) {

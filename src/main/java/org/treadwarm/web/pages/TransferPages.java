@@ -82,8 +82,12 @@ final class TransferPages {
                     file,
                     "application/json; charset=utf-8",
                     job.get().document().toPrettyString());
-        } else if (file.equals("results.csv") && job.get().sizing().isPresent()) {
-            send(ctx, file, CSV, TableExport.results(job.get().sizing().get()));
+        } else if (file.equals("results.csv") && !job.get().draft()) {
+            job.get()
+                    .sizing()
+                    .ifPresentOrElse(
+                            sizing -> send(ctx, file, CSV, TableExport.results(sizing)),
+                            () -> JobPages.missing(ctx, view));
         } else if (kind(file).isPresent()) {
             send(ctx, file, CSV, TableExport.survey(kind(file).get(), job.get().document()));
         } else {

@@ -63,7 +63,8 @@ final class WallFootPages {
             String wall,
             Map<String, List<String>> typed,
             JsonNode question,
-            WallFootEvaluation answer) {}
+            WallFootEvaluation answer,
+            List<Answer.Picture> pictures) {}
 
     private Optional<Place> place(Context ctx) {
         Optional<Job> job = desk.current(ctx.pathParam("job"));
@@ -100,11 +101,7 @@ final class WallFootPages {
 
     private void blocked(Context ctx, Place place, WallFootDraft.Made made) {
         Map<String, Object> model = model(place);
-        model.put(
-                "blocked",
-                made.draft().isEmpty()
-                        ? made.whyNot()
-                        : "This room has no upright surface to outdoors, so no wall stands at its floor.");
+        model.put("blocked", made.draft().isEmpty() ? made.whyNot() : WallFootDraft.NO_WALL);
         view.show(ctx, 200, "wall-foot", model);
     }
 
@@ -147,7 +144,8 @@ final class WallFootPages {
             if (!WallFootDraft.ASKED.contains(key)) {
                 boolean ofWall = key.equals("wall");
                 String words = ofWall && problem.pointer().equals("/wall")
-                        ? "of the wall \"" + wall + "\" no layers with thicknesses are known"
+                        ? "the wall \"" + wall
+                                + "\" is known neither by layers nor by a U-value that is more than its films"
                         : problem.message() + (ofWall ? " (wall \"" + wall + "\")" : "");
                 lacks.put(words, ofWall ? Links.part(place.job().id(), "assemblies", wall) : place.room());
             }
@@ -185,8 +183,12 @@ final class WallFootPages {
                 "Psi of " + place.get().title() + ", " + place.get().part().title(),
                 id -> place.get().address() + "/" + id,
                 place.get().address(),
-                (stopped, progress) -> new Solved(
-                        place.get().id(), wall, typed, question, WallFootEvaluation.of(accepted, stopped, progress)));
+                (stopped, progress) -> {
+                    WallFootEvaluation answer =
+                            WallFootEvaluation.of(accepted, stopped, share -> progress.accept(0.9 * share));
+                    List<Answer.Picture> pictures = WallFootPicture.all(accepted, wall, stopped);
+                    return new Solved(place.get().id(), wall, typed, question, answer, pictures);
+                });
     }
 
     private static Map<String, List<String>> typed(Context ctx) {
@@ -229,6 +231,7 @@ final class WallFootPages {
         model.put("now", Forms.shown(place.junction().path("psi")));
         model.put("without", WallFootWords.line(solved.answer().withoutEdge()));
         model.put("with", solved.answer().withEdge().map(WallFootWords::line));
+        model.put("pictures", solved.pictures());
         model.put("takenOff", WallFootWords.takenOff(solved.answer()));
         view.show(ctx, status, "wall-foot-result", model);
     }

@@ -1,6 +1,7 @@
 package org.treadwarm.web.security;
 
 import io.javalin.http.Context;
+import jakarta.servlet.http.HttpServletResponse;
 
 /** Headers on every answer: no script but our own, no frames, no guessing of types, nothing kept by caches. */
 public final class SecureHeaders {
@@ -12,15 +13,17 @@ public final class SecureHeaders {
 
     /** Sets the headers. */
     public static void set(Context ctx) {
-        ctx.header("Content-Security-Policy", POLICY);
-        ctx.header("X-Content-Type-Options", "nosniff");
-        ctx.header("X-Frame-Options", "DENY");
-        ctx.header("Referrer-Policy", "same-origin");
-        ctx.header("Cross-Origin-Opener-Policy", "same-origin");
-        ctx.header("Cross-Origin-Resource-Policy", "same-origin");
-        ctx.header("Permissions-Policy", "camera=(), geolocation=(), microphone=()");
+        // Nothing has been set yet, so adding does what setting does without looking for what is there.
+        HttpServletResponse to = ctx.res();
+        to.addHeader("Content-Security-Policy", POLICY);
+        to.addHeader("X-Content-Type-Options", "nosniff");
+        to.addHeader("X-Frame-Options", "DENY");
+        to.addHeader("Referrer-Policy", "same-origin");
+        to.addHeader("Cross-Origin-Opener-Policy", "same-origin");
+        to.addHeader("Cross-Origin-Resource-Policy", "same-origin");
+        to.addHeader("Permissions-Policy", "camera=(), geolocation=(), microphone=()");
         if (!ctx.path().startsWith("/static/")) {
-            ctx.header("Cache-Control", "no-store");
+            to.addHeader("Cache-Control", "no-store");
         }
     }
 }

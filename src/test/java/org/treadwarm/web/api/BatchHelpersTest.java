@@ -3,14 +3,17 @@ package org.treadwarm.web.api;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.CountDownLatch;
+import java.util.concurrent.atomic.AtomicInteger;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.treadwarm.intake.Document;
+import org.treadwarm.jobs.Demo;
 
 class BatchHelpersTest {
     private static final List<Integer> ITEMS = IntStream.range(0, 500).boxed().toList();
@@ -57,6 +60,17 @@ class BatchHelpersTest {
     void afterTheTimeIsUpNothingIsSized() {
         String answer =
                 new String(BatchApi.answer(Document.mapper().createObjectNode(), () -> true), StandardCharsets.UTF_8);
+
+        assertThat(answer).contains("\"status\":503").contains("too-long");
+    }
+
+    @Test
+    void aSizingThatIsUnderWayWhenTheTimeIsUpIsGivenUp() {
+        ObjectNode survey = (ObjectNode) Demo.survey();
+        ((ObjectNode) survey.at("/rooms/2/heatedFloor/heater")).put("spacing", "133.741 mm");
+        AtomicInteger asked = new AtomicInteger();
+
+        String answer = new String(BatchApi.answer(survey, () -> asked.getAndIncrement() > 0), StandardCharsets.UTF_8);
 
         assertThat(answer).contains("\"status\":503").contains("too-long");
     }
