@@ -39,7 +39,9 @@ final class BoundedCheck {
             Thread.currentThread().interrupt();
             throw new StoreUnavailable("The look at the store was interrupted.", problem);
         } catch (ExecutionException problem) {
-            throw new StoreUnavailable("The store cannot be read.", problem.getCause());
+            throw problem.getCause() instanceof StoreUnavailable known
+                    ? known
+                    : new StoreUnavailable("The store cannot be read.", problem.getCause());
         }
     }
 
