@@ -4,6 +4,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.MissingNode;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 import java.util.function.UnaryOperator;
 import org.treadwarm.intake.Document;
 import org.treadwarm.store.Change;
@@ -68,13 +69,26 @@ public final class JobDesk {
 
     /** Saves a whole job as its next revision, if it still is at the expected one. */
     public Saving save(String id, long expectedRevision, String name, JsonNode survey, Change change) {
+        return preparedSave(id, expectedRevision, name, survey, change).get();
+    }
+
+    /** Reads and judges a job as its next revision; what is given back only keeps it. */
+    public Supplier<Saving> preparedSave(
+            String id, long expectedRevision, String name, JsonNode survey, Change change) {
         JsonNode document = survey.deepCopy();
         Optional<JobRevision> current = jobs.current(id);
         if (current.isEmpty()) {
-            return new Saving.Missing();
+            return Saving.Missing::new;
         }
         Ids.give(document, Pieces.survey(current.get().content().pieces()));
-        Judgement judged = Judgement.unsized(document);
+        Prepared prepared = new Prepared(name, document, Judgement.unsized(document));
+        return () -> keep(id, expectedRevision, prepared, change);
+    }
+
+    private Saving keep(String id, long expectedRevision, Prepared prepared, Change change) {
+        String name = prepared.name();
+        JsonNode document = prepared.document();
+        Judgement judged = prepared.judged();
         SaveResult result =
                 jobs.save(id, expectedRevision, content(name, document, judged), words(name, document), change);
         if (result instanceof SaveResult.Saved saved) {

@@ -7,6 +7,7 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.Optional;
 import java.util.concurrent.locks.ReentrantLock;
 import java.util.function.Predicate;
+import java.util.function.Supplier;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.JobRevision;
 import org.treadwarm.store.Jobs;
@@ -187,9 +188,7 @@ public final class Rooms {
     }
 
     private Saving oneAfterTheOther(String job, Try save) {
-        ReentrantLock queue = queues[Math.floorMod(job.hashCode(), queues.length)];
-        queue.lock();
-        try {
+        return inTurn(job, () -> {
             for (int i = 0; i < MOST_TRIES; i++) {
                 Optional<Saving> saving = save.run();
                 if (saving.isPresent()) {
@@ -197,6 +196,18 @@ public final class Rooms {
                 }
             }
             return new Saving.Crowded();
+        });
+    }
+
+    /**
+     * Does something when no other save of this job's rooms runs in this process. Whoever saves a room within a transaction of
+     * the store must be here first: savers wait for their turn and then for the store, never the other way round.
+     */
+    public <T> T inTurn(String job, Supplier<T> work) {
+        ReentrantLock queue = queues[Math.floorMod(job.hashCode(), queues.length)];
+        queue.lock();
+        try {
+            return work.get();
         } finally {
             queue.unlock();
         }

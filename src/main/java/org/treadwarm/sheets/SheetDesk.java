@@ -5,6 +5,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
@@ -14,6 +15,7 @@ import org.treadwarm.store.Sheet;
 import org.treadwarm.store.SheetContent;
 import org.treadwarm.store.SheetHeader;
 import org.treadwarm.store.SheetOrder;
+import org.treadwarm.store.SheetPlace;
 import org.treadwarm.store.SheetWithdrawal;
 import org.treadwarm.store.Sheets;
 import org.treadwarm.wire.Json;
@@ -35,16 +37,21 @@ public final class SheetDesk {
      * @param who the person or key that issues it
      */
     public Issuing issue(String jobId, long revision, Optional<String> replaces, String who) {
+        return preparedIssue(jobId, revision, replaces, who).get();
+    }
+
+    /** Reads and sizes what {@link #issue} freezes, which may take long; what is given back only keeps it. */
+    public Supplier<Issuing> preparedIssue(String jobId, long revision, Optional<String> replaces, String who) {
         Optional<Job> job = jobs.revision(jobId, revision);
         if (job.isEmpty()) {
-            return new Issuing.Missing();
+            return Issuing.Missing::new;
         }
         Judgement judged = Judgement.of(job.get().document());
         if (judged.sizing().isEmpty()) {
-            return new Issuing.Draft(judged.problems());
+            return () -> new Issuing.Draft(judged.problems());
         }
         SheetContent content = frozen(job.get().document(), judged.sizing().get());
-        return Issuing.of(sheets.issue(new SheetOrder(jobId, revision, content, replaces), who));
+        return () -> Issuing.of(sheets.issue(new SheetOrder(jobId, revision, content, replaces), who));
     }
 
     private static SheetContent frozen(JsonNode document, Sizing sizing) {
@@ -71,6 +78,11 @@ public final class SheetDesk {
     /** All sheets, the newest first. */
     public List<SheetHeader> list() {
         return sheets.list();
+    }
+
+    /** A part of the sheets, see {@link Sheets#list(int, Optional)}. */
+    public List<SheetHeader> list(int limit, Optional<SheetPlace> after) {
+        return sheets.list(limit, after);
     }
 
     /** The sheets of a job, the newest first. */

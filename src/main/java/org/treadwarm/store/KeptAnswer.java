@@ -5,7 +5,7 @@ package org.treadwarm.store;
  *
  * @param status the HTTP status
  * @param location where the new thing is
- * @param etag its revision, as the answer's ETag
+ * @param etag its version, as the answer's ETag; empty for a thing that never changes
  * @param body the answer's text
  */
 public record KeptAnswer(int status, String location, String etag, String body) {}

@@ -36,9 +36,10 @@ public final class KeptAnswers {
      * last 24 hours. The transaction is alone against all others, so of equal requests at the same time, be it to several
      * servers, one creates.
      *
-     * @param creation changes the store by the methods of this package; what it throws takes everything back
+     * @param creation changes the store by the methods of this package; empty when it created nothing, which is not kept;
+     *     what it throws takes everything back
      */
-    public Once once(NamedRequest request, Supplier<KeptAnswer> creation) {
+    public Once once(NamedRequest request, Supplier<Optional<KeptAnswer>> creation) {
         return database.change(handle -> {
             Instant now = Times.now(clock);
             removeOld(handle, now);
@@ -47,9 +48,9 @@ public final class KeptAnswers {
                 boolean same = known.get().sha256().equals(request.sha256());
                 return same ? new Once.Repeated(known.get().answer()) : new Once.Different();
             }
-            KeptAnswer answer = creation.get();
-            insert(handle, request, answer, now);
-            return new Once.Made(answer);
+            Optional<KeptAnswer> answer = creation.get();
+            answer.ifPresent(made -> insert(handle, request, made, now));
+            return answer.<Once>map(Once.Made::new).orElseGet(Once.Nothing::new);
         });
     }
 

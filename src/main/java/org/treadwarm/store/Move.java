@@ -13,7 +13,8 @@ import java.util.List;
 
 /**
  * Moves everything from a data folder into an empty PostgreSQL database, in one transaction. Before it commits, every row
- * is read back and compared, and every text that is kept under its SHA-256 is hashed anew. The folder stays as it was.
+ * is read back and compared, every text that is kept under its SHA-256 is hashed anew, and so is what every sheet freezes. The
+ * folder stays as it was.
  */
 public final class Move {
     private static final int BATCH = 500;
@@ -93,6 +94,7 @@ public final class Move {
         }
         hashAnew("piece");
         hashAnew("manifest");
+        fingerprintAnew();
         return moved;
     }
 
@@ -142,6 +144,23 @@ public final class Move {
                     + " arrived differently (" + there.count() + " and " + here.count() + " rows).");
         }
         return here.count();
+    }
+
+    private void fingerprintAnew() throws SQLException {
+        try (Statement statement = to.createStatement()) {
+            statement.setFetchSize(BATCH);
+            try (ResultSet rows =
+                    statement.executeQuery("select number, method_version, survey, sizing, sha256 from sheet")) {
+                while (rows.next()) {
+                    SheetContent content = new SheetContent(rows.getString(2), rows.getString(3), rows.getString(4));
+                    if (!content.fingerprint().equals(rows.getString(5))) {
+                        throw new StoreUnavailable("Nothing was moved: sheet " + rows.getString(1)
+                                + " has not its fingerprint, the SHA-256 " + rows.getString(5)
+                                + ". The data file is damaged; restore a backup.");
+                    }
+                }
+            }
+        }
     }
 
     private void hashAnew(String table) throws SQLException {

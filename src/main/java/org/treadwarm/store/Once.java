@@ -10,4 +10,7 @@ public sealed interface Once {
 
     /** The same name was used for another request, so nothing was created. */
     record Different() implements Once {}
+
+    /** It was refused, so nothing was created or kept. */
+    record Nothing() implements Once {}
 }

@@ -5,6 +5,7 @@ import java.sql.SQLException;
 import java.util.List;
 import java.util.Optional;
 import org.jdbi.v3.core.Handle;
+import org.jdbi.v3.core.statement.Query;
 import org.jdbi.v3.core.statement.StatementContext;
 
 /** Reads and writes the rows of sheets. */
@@ -40,6 +41,16 @@ final class SheetRows {
         return handle.createQuery("select " + HEADER + FROM + NEWEST_FIRST)
                 .map(SheetRows::header)
                 .list();
+    }
+
+    static List<SheetHeader> part(Handle handle, int limit, Optional<SheetPlace> after) {
+        String condition = after.isPresent()
+                ? " where sheet.issue_year < :year or sheet.issue_year = :year and sheet.running < :running"
+                : "";
+        Query query = handle.createQuery("select " + HEADER + FROM + condition + NEWEST_FIRST + " limit :limit")
+                .bind("limit", limit);
+        after.ifPresent(place -> query.bind("year", place.year()).bind("running", place.running()));
+        return query.map(SheetRows::header).list();
     }
 
     static List<SheetHeader> ofJob(Handle handle, String jobId) {

@@ -108,6 +108,16 @@ public final class Sheets {
         return database.read(SheetRows::all);
     }
 
+    /**
+     * A part of all sheets, the newest first. A sheet issued meanwhile stands before all others, so it moves none.
+     *
+     * @param limit how many at most
+     * @param after the last sheet of the part before; empty for the first part
+     */
+    public List<SheetHeader> list(int limit, Optional<SheetPlace> after) {
+        return database.read(handle -> SheetRows.part(handle, limit, after));
+    }
+
     /** The sheets of a job, the newest first. */
     public List<SheetHeader> ofJob(String jobId) {
         return database.read(handle -> SheetRows.ofJob(handle, jobId));

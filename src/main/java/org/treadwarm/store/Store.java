@@ -16,6 +16,9 @@ import org.treadwarm.meter.Durations;
 public final class Store implements AutoCloseable {
     private static final Duration LONGEST_CHECK = Duration.ofSeconds(10);
 
+    // Less than the four seconds that the command that asks for the health waits.
+    private static final Duration LONGEST_LOOK = Duration.ofSeconds(2);
+
     private final Database database;
     private final Optional<FolderLock> lock;
     private final Audit audit;
@@ -28,6 +31,7 @@ public final class Store implements AutoCloseable {
     private final Sheets sheets;
     private final SheetLinks sheetLinks;
     private final KeptAnswers keptAnswers;
+    private final BoundedCheck check;
 
     Store(Database database, Clock clock, Optional<FolderLock> lock) {
         this.database = database;
@@ -43,6 +47,11 @@ public final class Store implements AutoCloseable {
         this.sheets = new Sheets(database, audit, clock);
         this.sheetLinks = new SheetLinks(database, audit, clock);
         this.keptAnswers = new KeptAnswers(database, clock);
+        this.check = new BoundedCheck(
+                () -> database.read(handle -> handle.createQuery("select count(*) from job where id = ''")
+                        .mapTo(Long.class)
+                        .one()),
+                LONGEST_LOOK);
     }
 
     /**
@@ -124,16 +133,10 @@ public final class Store implements AutoCloseable {
     /**
      * Reads a little, to see whether it can be read.
      *
-     * @throws StoreUnavailable if not
+     * @throws StoreUnavailable if not, or not within two seconds
      */
     public void check() {
-        try {
-            database.read(handle -> handle.createQuery("select count(*) from job where id = ''")
-                    .mapTo(Long.class)
-                    .one());
-        } catch (IllegalStateException problem) {
-            throw new StoreUnavailable("The store cannot be read.", problem);
-        }
+        check.run();
     }
 
     /** How long reads lasted since it was opened. */

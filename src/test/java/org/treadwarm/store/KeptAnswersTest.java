@@ -9,6 +9,7 @@ import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.CyclicBarrier;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -54,9 +55,9 @@ class KeptAnswersTest {
         return new NamedRequest(key, name, "a".repeat(64));
     }
 
-    private static KeptAnswer create(Store store) {
+    private static Optional<KeptAnswer> create(Store store) {
         String id = store.jobs().create(job("Mill Lane"), BY_ANNA).jobId();
-        return new KeptAnswer(201, "/jobs/" + id, "\"1\"", "{\"id\": \"" + id + "\", \"ä\": \"𝄞\"}");
+        return Optional.of(new KeptAnswer(201, "/jobs/" + id, "\"1\"", "{\"id\": \"" + id + "\", \"ä\": \"𝄞\"}"));
     }
 
     @Test
@@ -114,6 +115,13 @@ class KeptAnswersTest {
         assertThat(store.keptAnswers().once(request("q-1"), () -> create(store)))
                 .isInstanceOf(Once.Made.class);
         assertThat(store.jobs().list()).hasSize(1);
+    }
+
+    @Test
+    void aRefusalIsNotKept() {
+        assertThat(store.keptAnswers().once(request("q-1"), Optional::empty)).isEqualTo(new Once.Nothing());
+        assertThat(store.keptAnswers().once(request("q-1"), () -> create(store)))
+                .isInstanceOf(Once.Made.class);
     }
 
     @Test

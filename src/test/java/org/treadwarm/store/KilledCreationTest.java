@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.file.Path;
 import java.time.Clock;
+import java.util.Optional;
 import java.util.concurrent.TimeUnit;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -37,7 +38,7 @@ class KilledCreationTest {
                 String id = store.jobs()
                         .create(Samples.job("Mill Lane"), Samples.BY_ANNA)
                         .jobId();
-                return new KeptAnswer(201, id, "\"1\"", "{}");
+                return Optional.of(new KeptAnswer(201, id, "\"1\"", "{}"));
             });
             assertThat(again).isInstanceOf(Once.Made.class);
             assertThat(store.jobs().list()).hasSize(1);

@@ -9,11 +9,14 @@ import static org.treadwarm.store.Samples.jobOf;
 
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
 class MoveTest {
+    private static final SheetContent CONTENT = new SheetContent("1", "{\"site\":\"Höhe\"}", "{\"rooms\":[]}");
+
     @TempDir
     Path folder;
 
@@ -31,6 +34,7 @@ class MoveTest {
                     .jobId();
             store.jobs().save(id, 1, jobOf(1200, 7, "warmer"), new Change("Ben", "all rooms"));
             key = store.keys().create("sheet", Scope.READ, "Anna").token();
+            store.sheets().issue(new SheetOrder(id, 1, CONTENT, Optional.empty()), "Anna");
             session = store.sessions().start(PeopleTest.createOwner(store)).token();
         }
     }
@@ -50,6 +54,10 @@ class MoveTest {
                 assertThat(after.jobs().revision(id, revision))
                         .isEqualTo(before.jobs().revision(id, revision));
             }
+            assertThat(after.sheets().find("2026-0001"))
+                    .isEqualTo(before.sheets().find("2026-0001"))
+                    .hasValueSatisfying(
+                            sheet -> assertThat(sheet.hasItsFingerprint()).isTrue());
             assertThat(after.audit().latest(100)).isEqualTo(before.audit().latest(100));
             assertThat(after.keys().find(key)).isPresent();
             assertThat(after.sessions().find(session)).isPresent();
@@ -80,6 +88,20 @@ class MoveTest {
                 .hasMessageContaining("SHA-256");
         assertThat(new DataFile(database).count("job")).isZero();
         assertThat(new DataFile(database).count("piece")).isZero();
+    }
+
+    @Test
+    void movesNothingWhenASheetHasNotItsFingerprint() {
+        DataFile file = new DataFile(DataHome.folder(folder));
+        file.execute("drop trigger sheet_unchanged");
+        file.execute("update sheet set sizing = '{\"rooms\":[1]}'");
+
+        assertThatThrownBy(() -> Move.run(folder, database, clock))
+                .isInstanceOf(StoreUnavailable.class)
+                .hasMessageContaining("Nothing was moved: sheet 2026-0001 has not its fingerprint")
+                .hasMessageContaining(CONTENT.fingerprint());
+        assertThat(new DataFile(database).count("sheet")).isZero();
+        assertThat(new DataFile(database).count("job")).isZero();
     }
 
     @Test

@@ -20,6 +20,9 @@ import org.treadwarm.jobs.Job;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.store.Scope;
+import org.treadwarm.store.SheetContent;
+import org.treadwarm.store.SheetHeader;
+import org.treadwarm.store.SheetOrder;
 
 /** Lists, part by part. */
 class PagingApiTest {
@@ -45,8 +48,12 @@ class PagingApiTest {
     }
 
     private static List<String> walk(String path, String rows, String field) {
+        return walk(path + "?limit=2", 2, rows, field);
+    }
+
+    private static List<String> walk(String begin, int most, String rows, String field) {
         List<String> seen = new ArrayList<>();
-        Optional<String> next = Optional.of("/api/v1" + path + "?limit=2");
+        Optional<String> next = Optional.of("/api/v1" + begin);
         while (next.isPresent()) {
             Response part = given().baseUri(server.origin())
                     .urlEncodingEnabled(false)
@@ -54,7 +61,7 @@ class PagingApiTest {
                     .get(next.get());
             part.then().statusCode(200);
             List<Object> found = part.path(rows + "." + field);
-            assertThat(found).hasSizeLessThanOrEqualTo(2);
+            assertThat(found).hasSizeLessThanOrEqualTo(most);
             found.forEach(each -> seen.add(each.toString()));
             next = Optional.ofNullable(part.path("next"));
             String link = next.map(address -> "<" + address + ">; rel=\"next\"").orElse(null);
@@ -74,6 +81,40 @@ class PagingApiTest {
     void givesEveryRevisionOnce() {
         assertThat(walk("/jobs/" + first.id() + "/revisions", "revisions", "revision"))
                 .containsExactly("5", "4", "3", "2", "1");
+    }
+
+    @Test
+    void givesEverySheetOnceAlsoWithoutALimit() {
+        issue(250);
+        List<String> all = numbers();
+
+        assertThat(all).hasSizeGreaterThanOrEqualTo(250);
+        assertThat(walk("/sheets", 100, "sheets", "number")).isEqualTo(all);
+        assertThat(walk("/sheets?limit=7", 7, "sheets", "number")).isEqualTo(all);
+    }
+
+    @Test
+    void aSheetIssuedMeanwhileMovesNoOther() {
+        issue(5);
+        List<String> before = numbers();
+        Response begin = api.with(Scope.READ).queryParam("limit", 2).get("/sheets");
+        issue(1);
+
+        String next = begin.path("next");
+        assertThat(walk(next.substring("/api/v1".length()), 2, "sheets", "number"))
+                .isEqualTo(before.subList(2, before.size()));
+    }
+
+    private static List<String> numbers() {
+        return server.store().sheets().list().stream().map(SheetHeader::number).toList();
+    }
+
+    private static void issue(int sheets) {
+        Job job = server.job("Sheets", Document.mapper().createObjectNode());
+        for (int i = 0; i < sheets; i++) {
+            SheetContent content = new SheetContent("1", "{}", "{\"variant\":" + i + "}");
+            server.store().sheets().issue(new SheetOrder(job.id(), 1, content, Optional.empty()), "tests");
+        }
     }
 
     @Test
@@ -105,7 +146,14 @@ class PagingApiTest {
     }
 
     @ParameterizedTest
-    @CsvSource({"/jobs, ", "/jobs, am9icyA", "/jobs, %%%", "/materials, cmV2aXNpb25zIDE", "/jobs, cmV2aXNpb25zIDE"})
+    @CsvSource({
+        "/jobs, ",
+        "/jobs, am9icyA",
+        "/jobs, %%%",
+        "/materials, cmV2aXNpb25zIDE",
+        "/jobs, cmV2aXNpb25zIDE",
+        "/sheets, c2hlZXRzIDIwMjY"
+    })
     void refusesForeignCursors(String path, String cursor) {
         api.with(Scope.READ)
                 .queryParam("cursor", Optional.ofNullable(cursor).orElse(""))

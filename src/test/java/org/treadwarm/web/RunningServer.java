@@ -15,6 +15,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.OptionalInt;
 import java.util.concurrent.CancellationException;
+import java.util.function.Function;
 import java.util.stream.Stream;
 import org.treadwarm.intake.Document;
 import org.treadwarm.jobs.Job;
@@ -76,10 +77,19 @@ public final class RunningServer implements AutoCloseable {
         return new Settings("127.0.0.1", 0, List.of(), false, behindProxy, rateLimit);
     }
 
+    /** Starts one on any free port, over this database. */
+    static RunningServer over(DataHome.Postgresql home) {
+        return start(folder -> home, settings(false, OptionalInt.empty()));
+    }
+
     private static RunningServer start(Kind kind, Settings settings) {
+        return start(kind::emptyHome, settings);
+    }
+
+    private static RunningServer start(Function<Path, DataHome> home, Settings settings) {
         try {
             Path folder = Files.createTempDirectory("treadwarm-test");
-            return new RunningServer(folder, kind.emptyHome(folder), settings);
+            return new RunningServer(folder, home.apply(folder), settings);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }

@@ -31,10 +31,11 @@ public final class Api {
         this.batch = new BatchApi();
         this.warmUps = new WarmUpApi();
         this.wallFeet = new WallFootApi();
-        this.jobs = new JobsApi(desk, new Repeats(store.keptAnswers()));
-        this.sheets = new SheetsApi(sheetDesk, desk);
-        this.rooms = new RoomsApi(desk);
-        this.history = new HistoryApi(desk);
+        Repeats repeats = new Repeats(store.keptAnswers());
+        this.jobs = new JobsApi(desk, repeats);
+        this.sheets = new SheetsApi(sheetDesk, desk, repeats);
+        this.rooms = new RoomsApi(desk, repeats);
+        this.history = new HistoryApi(desk, repeats);
     }
 
     /** The description of the API, made when it is first asked for. */

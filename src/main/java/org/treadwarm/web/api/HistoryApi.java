@@ -6,9 +6,12 @@ import java.time.Instant;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.function.Supplier;
 import java.util.regex.Pattern;
 import org.treadwarm.jobs.Job;
 import org.treadwarm.jobs.JobDesk;
+import org.treadwarm.jobs.JobDesk.Saving;
+import org.treadwarm.store.KeptAnswer;
 import org.treadwarm.store.RevisionHeader;
 import org.treadwarm.survey.Survey;
 
@@ -17,9 +20,11 @@ final class HistoryApi {
     private static final Pattern REVISIONS = Pattern.compile("revisions ([0-9]{1,15})");
 
     private final JobDesk desk;
+    private final Repeats repeats;
 
-    HistoryApi(JobDesk desk) {
+    HistoryApi(JobDesk desk, Repeats repeats) {
         this.desk = desk;
+        this.repeats = repeats;
     }
 
     /** One revision without its survey. */
@@ -107,23 +112,29 @@ final class HistoryApi {
             JobsApi.stale(ctx, current);
             return;
         }
-        JobsApi.answer(
-                ctx,
-                desk.copies()
-                        .restore(
-                                id,
-                                number.getAsLong(),
-                                expected.getAsLong(),
-                                JobsApi.change(ctx).who()));
+        Supplier<Saving> saving = desk.copies()
+                .preparedRestore(
+                        id,
+                        number.getAsLong(),
+                        expected.getAsLong(),
+                        JobsApi.change(ctx).who());
+        repeats.create(ctx, () -> restored(ctx, saving.get()));
+    }
+
+    private static Optional<KeptAnswer> restored(Context ctx, Saving saving) {
+        if (saving instanceof Saving.Saved saved) {
+            return Optional.of(JobsApi.kept(200, saved.job()));
+        }
+        JobsApi.answer(ctx, saving);
+        return Optional.empty();
     }
 
     /** {@code POST /api/v1/jobs/{id}/copy}. */
     void copy(Context ctx) {
-        Optional<Job> copy =
-                desk.copies().copy(ctx.pathParam("id"), JobsApi.change(ctx).who());
+        Optional<Supplier<Job>> copy = desk.copies()
+                .preparedCopy(ctx.pathParam("id"), JobsApi.change(ctx).who());
         if (copy.isPresent()) {
-            ctx.header("Location", "/api/v1/jobs/" + copy.get().id());
-            JobsApi.answer(ctx, 201, copy.get());
+            repeats.create(ctx, () -> Optional.of(JobsApi.kept(201, copy.get().get())));
         } else {
             JobsApi.missing(ctx);
         }

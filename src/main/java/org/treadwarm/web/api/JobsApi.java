@@ -121,12 +121,14 @@ final class JobsApi {
         Optional<JobBody> body = body(ctx);
         if (body.isPresent()) {
             Prepared prepared = desk.prepared(body.get().name(), body.get().survey());
-            repeats.create(ctx, () -> {
-                Job job = desk.create(prepared, change(ctx));
-                String text = new String(Json.bytes(JobAnswer.of(job)), StandardCharsets.UTF_8);
-                return new KeptAnswer(201, "/api/v1/jobs/" + job.id(), tag(job.revision()), text);
-            });
+            repeats.create(ctx, () -> Optional.of(kept(201, desk.create(prepared, change(ctx)))));
         }
+    }
+
+    /** A job that was created or changed, as an answer to keep. */
+    static KeptAnswer kept(int status, Job job) {
+        String text = new String(Json.bytes(JobAnswer.of(job)), StandardCharsets.UTF_8);
+        return new KeptAnswer(status, "/api/v1/jobs/" + job.id(), tag(job.revision()), text);
     }
 
     /** {@code GET /api/v1/jobs/{id}}. */

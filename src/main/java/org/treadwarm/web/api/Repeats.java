@@ -7,6 +7,7 @@ import java.security.NoSuchAlgorithmException;
 import java.util.Collections;
 import java.util.HexFormat;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.Supplier;
@@ -35,11 +36,16 @@ final class Repeats {
         this.answers = answers;
     }
 
-    /** Creates and answers, or answers as before, or says why not. */
-    void create(Context ctx, Supplier<KeptAnswer> creation) {
+    /**
+     * Creates and answers, or answers as before, or says why not.
+     *
+     * @param creation runs alone against all other changes, so it should only keep what was judged before; empty when it
+     *     created nothing and the refusal has been written already
+     */
+    void create(Context ctx, Supplier<Optional<KeptAnswer>> creation) {
         List<String> names = Collections.list(ctx.req().getHeaders(HEADER));
         if (names.isEmpty()) {
-            write(ctx, creation.get());
+            creation.get().ifPresent(answer -> write(ctx, answer));
         } else if (names.size() > 1 || !ALLOWED.matcher(names.get(0)).matches()) {
             Problems.plain(
                     ctx,
@@ -52,7 +58,7 @@ final class Repeats {
         }
     }
 
-    private void createOnce(Context ctx, NamedRequest request, Supplier<KeptAnswer> creation) {
+    private void createOnce(Context ctx, NamedRequest request, Supplier<Optional<KeptAnswer>> creation) {
         List<String> mark = List.of(request.keyId(), request.name());
         if (!running.add(mark)) {
             ctx.header("Retry-After", "1");
@@ -77,7 +83,7 @@ final class Repeats {
         } else if (outcome instanceof Once.Repeated repeated) {
             ctx.header(REPLAYED, "true");
             write(ctx, repeated.answer());
-        } else {
+        } else if (outcome instanceof Once.Different) {
             Problems.plain(
                     ctx,
                     422,
@@ -89,7 +95,9 @@ final class Repeats {
 
     private static void write(Context ctx, KeptAnswer answer) {
         ctx.header("Location", answer.location());
-        ctx.header("ETag", answer.etag());
+        if (!answer.etag().isEmpty()) {
+            ctx.header("ETag", answer.etag());
+        }
         SizingApi.json(ctx, answer.status(), answer.body().getBytes(StandardCharsets.UTF_8));
     }
 
@@ -97,6 +105,9 @@ final class Repeats {
         try {
             MessageDigest digest = MessageDigest.getInstance("SHA-256");
             digest.update((ctx.method() + " " + ctx.path() + "\n").getBytes(StandardCharsets.UTF_8));
+            for (String condition : Collections.list(ctx.req().getHeaders("If-Match"))) {
+                digest.update(("If-Match " + condition + "\n").getBytes(StandardCharsets.UTF_8));
+            }
             return HexFormat.of().formatHex(digest.digest(ctx.bodyAsBytes()));
         } catch (NoSuchAlgorithmException problem) {
             throw new IllegalStateException("Every Java runtime has SHA-256", problem);

@@ -3,6 +3,7 @@ package org.treadwarm.web.api;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import io.javalin.http.Context;
+import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.util.List;
 import java.util.Optional;
@@ -13,6 +14,7 @@ import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.jobs.RoomVersion;
 import org.treadwarm.jobs.Rooms;
 import org.treadwarm.jobs.Rooms.Saving;
+import org.treadwarm.store.KeptAnswer;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Room;
 import org.treadwarm.web.Problems;
@@ -24,9 +26,11 @@ final class RoomsApi {
     private static final String ID = "[A-Za-z0-9-]{1,40}";
 
     private final Rooms rooms;
+    private final Repeats repeats;
 
-    RoomsApi(JobDesk desk) {
+    RoomsApi(JobDesk desk, Repeats repeats) {
         this.rooms = desk.rooms();
+        this.repeats = repeats;
     }
 
     /** A room as it was typed, in the revision of its job that it was read from or that its save made. */
@@ -94,18 +98,26 @@ final class RoomsApi {
             refuseId(ctx, id, "this is no id of a room", "1 to 40 letters, digits and hyphens, or none");
             return;
         }
-        Saving saving = rooms.add(ctx.pathParam("id"), room.get(), JobsApi.change(ctx));
+        String job = ctx.pathParam("id");
+        rooms.inTurn(job, () -> {
+            repeats.create(ctx, () -> added(ctx, id, rooms.add(job, room.get(), JobsApi.change(ctx))));
+            return true;
+        });
+    }
+
+    private static Optional<KeptAnswer> added(Context ctx, JsonNode id, Saving saving) {
         if (saving instanceof Saving.Saved saved) {
-            ctx.header(
-                    "Location",
-                    "/api/v1/jobs/" + saved.room().job().jobId() + "/rooms/"
-                            + saved.room().id());
-            answer(ctx, 201, saved.room());
-        } else if (saving instanceof Saving.Taken) {
+            RoomVersion room = saved.room();
+            String location = "/api/v1/jobs/" + room.job().jobId() + "/rooms/" + room.id();
+            String text = new String(Json.bytes(RoomAnswer.of(room)), StandardCharsets.UTF_8);
+            return Optional.of(new KeptAnswer(201, location, Tags.quoted(room.tag()), text));
+        }
+        if (saving instanceof Saving.Taken) {
             refuseId(ctx, id, "the job has a room of this id already", "an id that is free, or none");
         } else {
             refuse(ctx, saving);
         }
+        return Optional.empty();
     }
 
     /** {@code PUT /api/v1/jobs/{id}/rooms/{room}} with If-Match. */

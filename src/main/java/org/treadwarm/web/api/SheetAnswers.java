@@ -45,12 +45,8 @@ final class SheetAnswers {
         }
     }
 
-    /** A list of sheets. */
-    record SheetsAnswer(List<IssuedSheet> sheets) {
-        static SheetsAnswer of(List<SheetHeader> sheets) {
-            return new SheetsAnswer(sheets.stream().map(IssuedSheet::of).toList());
-        }
-    }
+    /** A part of the list of sheets, and where the next part begins, if there is one. */
+    record SheetsAnswer(List<IssuedSheet> sheets, Optional<String> next) {}
 
     /** A sheet with survey and sizing, which stand in the answer byte by byte as they are kept. */
     record SheetAnswer(IssuedSheet sheet, JsonNode survey, JsonNode sizing) {

@@ -2,28 +2,40 @@ package org.treadwarm.web.api;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
+import java.nio.charset.StandardCharsets;
+import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
+import java.util.regex.Pattern;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sheets.FrozenText;
 import org.treadwarm.sheets.Issuing;
 import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.sheets.Verification;
+import org.treadwarm.store.KeptAnswer;
 import org.treadwarm.store.Sheet;
+import org.treadwarm.store.SheetHeader;
+import org.treadwarm.store.SheetPlace;
 import org.treadwarm.store.SheetWithdrawal;
 import org.treadwarm.web.Problems;
 import org.treadwarm.web.api.SheetAnswers.IssuedSheet;
 import org.treadwarm.web.api.SheetAnswers.SheetAnswer;
 import org.treadwarm.web.api.SheetAnswers.SheetsAnswer;
 import org.treadwarm.web.security.KeyGuard;
+import org.treadwarm.wire.Json;
 
 /** Issued sheets over the API. */
 final class SheetsApi {
+    private static final Pattern SHEETS = Pattern.compile("sheets ([0-9]{4}) ([0-9]{1,9})");
+
     private final SheetDesk desk;
     private final JobDesk jobs;
+    private final Repeats repeats;
 
-    SheetsApi(SheetDesk desk, JobDesk jobs) {
+    SheetsApi(SheetDesk desk, JobDesk jobs, Repeats repeats) {
         this.desk = desk;
         this.jobs = jobs;
+        this.repeats = repeats;
     }
 
     /** {@code POST /api/v1/jobs/{id}/sheets}. */
@@ -36,15 +48,24 @@ final class SheetsApi {
             if (document.isPresent() && SizingApi.judged(ctx, document.get()).isEmpty()) {
                 return;
             }
-            answer(ctx, desk.issue(job, order.get().revision(), order.get().replaces(), who(ctx)));
+            Supplier<Issuing> issuing =
+                    desk.preparedIssue(job, order.get().revision(), order.get().replaces(), who(ctx));
+            repeats.create(ctx, () -> issued(ctx, issuing.get()));
         }
     }
 
-    private static void answer(Context ctx, Issuing result) {
+    private static Optional<KeptAnswer> issued(Context ctx, Issuing result) {
         if (result instanceof Issuing.Issued issued) {
-            ctx.header("Location", "/api/v1/sheets/" + issued.sheet().number());
-            SizingApi.json(ctx, 201, IssuedSheet.of(issued.sheet()));
-        } else if (result instanceof Issuing.Draft draft) {
+            String text = new String(Json.bytes(IssuedSheet.of(issued.sheet())), StandardCharsets.UTF_8);
+            return Optional.of(
+                    new KeptAnswer(201, "/api/v1/sheets/" + issued.sheet().number(), "", text));
+        }
+        refuse(ctx, result);
+        return Optional.empty();
+    }
+
+    private static void refuse(Context ctx, Issuing result) {
+        if (result instanceof Issuing.Draft draft) {
             Problems.invalid(ctx, draft.problems());
         } else if (result instanceof Issuing.SameHolds same) {
             String detail = "Sheet " + same.number() + " of this job has the same content and holds.";
@@ -56,9 +77,24 @@ final class SheetsApi {
         }
     }
 
-    /** {@code GET /api/v1/sheets}. */
+    /** {@code GET /api/v1/sheets?limit=&cursor=}. */
     void list(Context ctx) {
-        SizingApi.json(ctx, 200, SheetsAnswer.of(desk.list()));
+        Optional<Paging> paging = Paging.of(ctx, SHEETS);
+        if (paging.isEmpty()) {
+            return;
+        }
+        int limit = paging.get().limit();
+        Optional<SheetPlace> after =
+                paging.get().after().map(last -> new SheetPlace((int) last.number(1), (int) last.number(2)));
+        List<SheetHeader> found = desk.list(limit + 1, after);
+        List<IssuedSheet> part =
+                found.stream().limit(limit).map(IssuedSheet::of).toList();
+        Optional<String> next = Optional.empty();
+        if (found.size() > limit) {
+            SheetPlace last = SheetPlace.of(part.get(limit - 1).number());
+            next = Optional.of(paging.get().next(ctx, last.year(), last.running()));
+        }
+        SizingApi.json(ctx, 200, new SheetsAnswer(part, next));
     }
 
     /** {@code GET /api/v1/sheets/{number}}. */
