@@ -44,7 +44,26 @@ final class Program implements AutoCloseable {
         return new Program(process(environment, arguments));
     }
 
+    /** Starts it with its error stream going into a file. */
+    static Program startLogging(Path errors, String... arguments) {
+        return new Program(begun(builder(arguments).redirectError(errors.toFile())));
+    }
+
     private static Process process(Map<String, String> environment, String... arguments) {
+        ProcessBuilder builder = builder(arguments);
+        builder.environment().putAll(environment);
+        return begun(builder);
+    }
+
+    private static Process begun(ProcessBuilder builder) {
+        try {
+            return builder.start();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    private static ProcessBuilder builder(String... arguments) {
         List<String> command = new ArrayList<>();
         command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
         command.add("-Xmx512m");
@@ -54,13 +73,7 @@ final class Program implements AutoCloseable {
                         ? List.of("-jar", jar)
                         : List.of("-cp", System.getProperty("java.class.path"), "org.treadwarm.Treadwarm"));
         command.addAll(List.of(arguments));
-        try {
-            ProcessBuilder builder = new ProcessBuilder(command);
-            builder.environment().putAll(environment);
-            return builder.start();
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
+        return new ProcessBuilder(command);
     }
 
     /** Runs it to its end without input. */
@@ -150,6 +163,11 @@ final class Program implements AutoCloseable {
             Thread.currentThread().interrupt();
             throw new IllegalStateException(e);
         }
+    }
+
+    /** The exit status of a run that has ended. */
+    int status() {
+        return process.exitValue();
     }
 
     /** Ends it at once, as the system's kill -9 does. */

@@ -231,18 +231,64 @@ class SavingTogetherPagesTest {
     }
 
     @Test
-    void aFieldOfTheSiteThatBothChangedIsHeldBackWithWhatWasTyped() {
+    void aSiteThatBothChangedComesBackWithBothVersionsAndNothingIsLost() {
+        Page held = heldSite(
+                form -> form.type("/site/surveyedBy", "Ben of Quillfen Floors").press("save"));
+
+        assertThat(held.status()).isEqualTo(409);
+        assertThat(held.text()).contains("Two versions of the site", "-12", "-14", "both changed this");
+        Form form = held.form("mine");
+        assertThat(form.value("choice/outdoorTemperature")).isNull();
+        assertThat(form.value("choice/surveyedBy")).isEqualTo("mine");
+        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-12");
+        assertThat(second.send(form.press("settle")).status()).isEqualTo(422);
+        Page done = second.send(form.forge("choice/outdoorTemperature", "mine").press("settle"));
+        assertThat(done.status()).isEqualTo(303);
+        assertThat(done.location()).isEqualTo("/jobs/" + job.id());
+        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-14");
+        assertThat(kept("/site/surveyedBy").textValue()).isEqualTo("Ben of Quillfen Floors");
+    }
+
+    /** Both began from one form of the job and changed the outdoor temperature; the first has saved. */
+    private Page heldSite(UnaryOperator<Form> more) {
         Form one = visitorsJob(first);
         Form other = visitorsJob(second);
         first.send(one.type("/site/outdoorTemperature", "-12").press("save"));
+        return second.send(more.apply(other.type("/site/outdoorTemperature", "-14")));
+    }
 
-        Page held = second.send(other.type("/site/outdoorTemperature", "-14").press("save"));
+    @Test
+    void whatElseWasDoneInTheFormOfAJobIsKeptWhileTheSiteIsChosen() {
+        Page held = heldSite(form ->
+                form.type("job-name", "Mill Lane").type("new-name", "attic").press("add-room"));
+
+        assertThat(held.status()).isEqualTo(409);
+        assertThat(server.now(job).name()).isEqualTo("Mill Lane");
+        assertThat(kept("/rooms/2/name").textValue()).isEqualTo("attic");
+        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-12");
+        second.send(held.form("mine").press("all-theirs"));
+        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-12");
+    }
+
+    @Test
+    void aSiteBesideAWrongNameIsToldOfWithWhatWasTyped() {
+        Page held = heldSite(form -> form.type("job-name", " ").press("save"));
 
         assertThat(held.status()).isEqualTo(409);
         assertThat(held.value("/site/outdoorTemperature")).isEqualTo("-14");
+        assertThat(held.text()).contains("Somebody else has made this");
         assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-12");
-        assertThat(second.send(held.form("new-name").press("save")).status()).isEqualTo(303);
-        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-14");
+    }
+
+    @ParameterizedTest
+    @CsvSource({"mine,[1]", "mine,''", "base,x"})
+    void aForgedFormOfASiteChangesNothing(String field, String value) {
+        Page held = heldSite(form -> form.press("save"));
+
+        assertThat(second.send(held.form("mine").forge(field, value).press("all-mine"))
+                        .status())
+                .isEqualTo(404);
+        assertThat(kept("/site/outdoorTemperature").textValue()).startsWith("-12");
     }
 
     private Form visitorsJob(Visitor visitor) {

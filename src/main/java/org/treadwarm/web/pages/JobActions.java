@@ -6,7 +6,6 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
 import java.util.List;
 import org.treadwarm.jobs.Job;
-import org.treadwarm.survey.Site;
 
 /** What the buttons of a job's page do to its document: rooms and parts come, are copied and go. */
 final class JobActions {
@@ -23,7 +22,7 @@ final class JobActions {
     }
 
     /** Does what a button says; gives a sentence when it cannot, and nothing when it could. */
-    String act(String action, FormData data, ObjectNode site) {
+    String act(String action, TypedSite site) {
         String[] words = action.split(":", 2);
         String target = words.length > 1 ? words[1] : "";
         switch (words[0]) {
@@ -40,7 +39,7 @@ final class JobActions {
             case "remove-room" -> removeRoom(target);
             case "assume" -> {
                 if (target.startsWith("/site/")) {
-                    data.assume(FormData.steps(target.substring("/site".length())), Site.class, site);
+                    site.assume(target);
                 }
             }
             default -> {}

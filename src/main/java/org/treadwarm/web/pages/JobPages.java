@@ -17,24 +17,26 @@ import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.JobListings;
 import org.treadwarm.store.JobSearch;
-import org.treadwarm.survey.Site;
 import org.treadwarm.web.security.Visitors;
 
 /** The list of jobs, and a job: its site, spaces, assemblies, rooms with their verdicts, and totals. */
 final class JobPages {
     static final int LONGEST_NAME = 200;
     private static final int A_PAGE = 50;
+    private static final int MOST_TRIES = 20;
 
     private final JobDesk desk;
     private final SheetDesk sheets;
     private final Visitors visitors;
     private final View view;
+    private final VersionPages versions;
 
-    JobPages(JobDesk desk, SheetDesk sheets, Visitors visitors, View view) {
+    JobPages(JobDesk desk, SheetDesk sheets, Visitors visitors, View view, VersionPages versions) {
         this.desk = desk;
         this.sheets = sheets;
         this.visitors = visitors;
         this.view = view;
+        this.versions = versions;
     }
 
     void list(Context ctx) {
@@ -141,34 +143,72 @@ final class JobPages {
     }
 
     void change(Context ctx) {
-        Optional<Job> current = desk.current(ctx.pathParam("job"));
-        if (current.isEmpty()) {
-            missing(ctx, view);
-            return;
+        Optional<Job> job = desk.current(ctx.pathParam("job"));
+        boolean answered = job.isPresent() && changed(ctx, job.get());
+        for (int i = 1; i < MOST_TRIES && job.isPresent() && !answered; i++) {
+            job = desk.current(ctx.pathParam("job"));
+            answered = job.isPresent() && changed(ctx, job.get());
         }
-        Job job = current.get();
+        if (job.isEmpty()) {
+            missing(ctx, view);
+        } else if (!answered) {
+            String told = "Others are saving this job at the same time, so yours is not kept. Go back and save again.";
+            show(ctx, 409, job.get(), List.of(new ErrorView("content", "", told, "")), "");
+        }
+    }
+
+    /** Does what the form says; says whether it is answered, or somebody saved the job in the same moment. */
+    private boolean changed(Context ctx, Job job) {
         ObjectNode document = (ObjectNode) job.document().deepCopy();
         String action = EntryPages.text(ctx, "do");
-        FormData data = new FormData();
-        ObjectNode site = document.path("site") instanceof ObjectNode known ? known : document.putObject("site");
         Job shown = shown(ctx, job);
-        List<ErrorView> errors = new ArrayList<>(writeSite(ctx, data, site, shown));
+        TypedSite site = TypedSite.of(ctx.formParamMap(), shown.document(), job.document());
         String name = name(ctx, job, shown);
         JobActions actions =
                 new JobActions(document, EntryPages.text(ctx, "new-name").strip());
-        String notice = actions.act(action, data, site);
-        boolean conflict = !errors.isEmpty();
+        List<ErrorView> errors = errors(ctx, actions.act(action, site));
+        if (errors.isEmpty() && !site.conflicts().isEmpty()) {
+            return choose(ctx, job, shown, name, document, site);
+        }
+        document.set("site", site.site());
+        if (errors.isEmpty()) {
+            return save(ctx, job, name, document, actions, action);
+        }
+        errors.addAll(0, site.conflicts());
+        show(ctx, site.conflicts().isEmpty() ? 422 : 409, job, document, errors, "");
+        return true;
+    }
+
+    private static List<ErrorView> errors(Context ctx, String notice) {
+        List<ErrorView> errors = new ArrayList<>();
         if (!isName(EntryPages.text(ctx, "job-name"))) {
             errors.add(new ErrorView("job-name", "", "A job's name has 1 to " + LONGEST_NAME + " characters.", ""));
         }
         if (!notice.isEmpty()) {
             errors.add(new ErrorView("new-name", "", notice, ""));
         }
-        if (errors.isEmpty()) {
-            save(ctx, job, name, document, actions, action);
-        } else {
-            show(ctx, conflict ? 409 : 422, job, document, errors, "");
+        return errors;
+    }
+
+    /** Keeps all but the site, and shows both versions of that. */
+    private boolean choose(Context ctx, Job job, Job shown, String name, ObjectNode document, TypedSite site) {
+        Optional<Job> kept = kept(ctx, job, name, document);
+        if (kept.isPresent()) {
+            String part = VersionDraft.SITE;
+            VersionDraft draft =
+                    new VersionDraft(part, part, shown.revision(), kept.get().revision(), site.mine(), "");
+            versions.begin(ctx, kept.get(), draft);
         }
+        return kept.isPresent();
+    }
+
+    /** The job with this name and document, saved unless it is so already; empty when somebody saved meanwhile. */
+    private Optional<Job> kept(Context ctx, Job job, String name, ObjectNode document) {
+        if (document.equals(job.document()) && name.equals(job.name())) {
+            return Optional.of(job);
+        }
+        Saving saving = desk.save(job.id(), job.revision(), name, document, Change.by(who(ctx)));
+        return saving instanceof Saving.Saved done ? Optional.of(done.job()) : Optional.empty();
     }
 
     /** The revision that the form was made from. */
@@ -177,38 +217,6 @@ final class JobPages {
         return revision.matches("[0-9]{1,15}")
                 ? desk.revision(current.id(), Long.parseLong(revision)).orElse(current)
                 : current;
-    }
-
-    /**
-     * Writes what was typed about the site; fields that nobody touched keep what others have saved since. A field that both
-     * changed is told of.
-     */
-    private static List<ErrorView> writeSite(Context ctx, FormData data, ObjectNode site, Job shown) {
-        List<ErrorView> conflicts = new ArrayList<>();
-        ctx.formParamMap().forEach((field, values) -> {
-            if (!field.startsWith("/site/")) {
-                return;
-            }
-            List<String> steps = FormData.steps(field.substring("/site".length()));
-            String typed = values.get(0).strip();
-            String before =
-                    data.shown(steps, Site.class, shown.document().path("site")).strip();
-            String now = data.shown(steps, Site.class, site).strip();
-            if (typed.equals(before)) {
-                return;
-            }
-            data.write(steps, Site.class, site, typed);
-            if (!now.equals(before) && !now.equals(typed)) {
-                conflicts.add(new ErrorView(
-                        Forms.id(field),
-                        "Site",
-                        "Somebody else has made this \"" + now
-                                + "\" meanwhile. Yours stands in the field, not kept yet: save"
-                                + " again to let it stand.",
-                        ""));
-            }
-        });
-        return conflicts;
     }
 
     private static String name(Context ctx, Job job, Job shown) {
@@ -225,25 +233,12 @@ final class JobPages {
         return !text.isBlank() && text.strip().length() <= LONGEST_NAME;
     }
 
-    private void save(Context ctx, Job job, String name, ObjectNode document, JobActions actions, String action) {
-        Job saved = job;
-        if (!document.equals(job.document()) || !name.equals(job.name())) {
-            Saving saving = desk.save(job.id(), job.revision(), name, document, Change.by(who(ctx)));
-            if (!(saving instanceof Saving.Saved done)) {
-                show(
-                        ctx,
-                        409,
-                        job,
-                        List.of(new ErrorView(
-                                "content",
-                                "",
-                                "Somebody saved this job in the same moment. Nothing is lost: try again.",
-                                "")),
-                        "");
-                return;
-            }
-            saved = done.job();
+    private boolean save(Context ctx, Job job, String name, ObjectNode document, JobActions actions, String action) {
+        Optional<Job> kept = kept(ctx, job, name, document);
+        if (kept.isEmpty()) {
+            return false;
         }
+        Job saved = kept.get();
         boolean siteProblem =
                 saved.problems().stream().anyMatch(problem -> problem.pointer().startsWith("/site"));
         if (action.equals("save") && siteProblem) {
@@ -256,5 +251,6 @@ final class JobPages {
         } else {
             ctx.redirect(actions.pageAfter(saved, action), HttpStatus.SEE_OTHER);
         }
+        return true;
     }
 }

@@ -44,8 +44,8 @@ public final class Pages {
         this.visitors = visitors;
         this.view = new View(visitors);
         this.entry = new EntryPages(store, visitors, view);
-        this.jobs = new JobPages(desk, sheetDesk, visitors, view);
         this.versions = new VersionPages(desk, visitors, view);
+        this.jobs = new JobPages(desk, sheetDesk, visitors, view, versions);
         this.files = new TransferPages(desk, visitors, view);
         this.history = new HistoryPages(desk, visitors, view);
         this.computing = new ComputationPages(computations, view);

@@ -126,7 +126,16 @@ final class PartPages {
                             .map(part -> job.document().at(part.pointer()))
                             .orElse(MissingNode.getInstance()));
             if (typed) {
-                versions.begin(ctx, job, shownRevision(ctx), mine, wantedName(ctx, then));
+                versions.begin(
+                        ctx,
+                        job,
+                        new VersionDraft(
+                                then.kind(),
+                                then.key(),
+                                shownRevision(ctx),
+                                job.revision(),
+                                mine,
+                                wantedName(ctx, then)));
                 return;
             }
         }
