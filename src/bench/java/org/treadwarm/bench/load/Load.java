@@ -29,15 +29,15 @@ import org.treadwarm.wire.Json;
 public final class Load {
     private static final double SOON_ENOUGH = 50;
     private static final int STARTS = 5;
-    private static final int WARM_UP_SECONDS = 40;
-    private static final int STEP_SECONDS = 10;
+    private static final int WARM_UP_SECONDS = 30;
+    private static final int STEP_SECONDS = 6;
 
     /** An office of ten and its quoting system in a busy hour; invented. */
     private static final double OFFICE_RATE = 10;
 
     private static final int HOUR_SECONDS = 3600;
     private static final int QUARTERS = 4;
-    private static final int HURRY = 10;
+    private static final int HURRY = 20;
     private static final long MEBIBYTE = 1024 * 1024;
 
     private Load() {}
@@ -83,7 +83,7 @@ public final class Load {
     /** Raises the rate by steps until it is no longer held. */
     private static void held(String what, Supplier<CompletableFuture<Boolean>> request) throws InterruptedException {
         OpenLoop.Result best = new OpenLoop.Result(0, 0, 0, 0, 0, 0);
-        for (double rate = 100; rate < 20_000; rate = Math.rint(1.25 * rate)) {
+        for (double rate = 100; rate < 20_000; rate = Math.rint(1.4 * rate)) {
             OpenLoop.Result result = OpenLoop.run(rate, STEP_SECONDS, request);
             say(
                     "  %s at %.0f/s: median %.1f, p99 %.1f, longest %.0f ms, %d failed",
@@ -96,7 +96,7 @@ public final class Load {
         say("%s: %.0f/s held, median %.1f ms, p99 %.1f ms", what, best.rate(), best.median(), best.p99());
     }
 
-    /** An hour's worth of requests, ten times as fast as an hour unless asked otherwise. */
+    /** An hour's worth of requests, twenty times as fast as an hour unless asked otherwise. */
     private static void hour(ServedProgram program, OfficeDay office, boolean whole)
             throws IOException, InterruptedException {
         double rate = whole ? OFFICE_RATE : OFFICE_RATE * HURRY;
