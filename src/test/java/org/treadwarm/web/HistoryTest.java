@@ -10,6 +10,9 @@ import static org.hamcrest.Matchers.hasItem;
 import static org.hamcrest.Matchers.not;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.BeforeEach;
@@ -104,6 +107,29 @@ class HistoryTest {
     @ValueSource(strings = {"/history/0", "/history/9", "/history/x", "/history/99999999999999999999"})
     void saysWhenThereIsNoSuchRevision(String path) {
         assertThat(visitor.open(at(path)).status()).isEqualTo(404);
+    }
+
+    @Test
+    void aLongListOfJobsIsGivenPartByPartAndEachOnce() {
+        for (int i = 0; i < 120; i++) {
+            server.job("long & list " + i, RunningServer.studio());
+        }
+        List<String> found = new ArrayList<>();
+        Optional<String> next = Optional.of("/jobs?find=long+%26+list");
+        while (next.isPresent()) {
+            Page page = visitor.open(next.get());
+            assertThat(page.status()).isEqualTo(200);
+            page.all("a")
+                    .map(link -> link.getAttribute("href"))
+                    .filter(href -> href.matches("/jobs/[a-z2-9]+"))
+                    .forEach(found::add);
+            next = page.all("a")
+                    .map(link -> link.getAttribute("href"))
+                    .filter(href -> href.contains("after="))
+                    .findFirst();
+        }
+
+        assertThat(found).hasSize(120).doesNotHaveDuplicates();
     }
 
     @Test

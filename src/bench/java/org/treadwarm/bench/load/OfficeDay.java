@@ -18,6 +18,7 @@ import java.util.Map;
 import java.util.Queue;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.ConcurrentLinkedQueue;
+import java.util.concurrent.TimeUnit;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -33,6 +34,7 @@ final class OfficeDay {
     private static final ObjectMapper MAPPER = new ObjectMapper();
     private static final int JOBS = 200;
     private static final int ROUND = 20;
+    private static final int LOOKS = 60;
     private static final String PASSWORD = "an invented password";
 
     private final ServedProgram program;
@@ -103,12 +105,20 @@ final class OfficeDay {
                 .build();
         return client.sendAsync(put, BodyHandlers.discarding()).thenApply(answer -> {
             idle.add(new Saved(job.id(), tag(answer)));
-            return answer.statusCode() == 200;
+            return isRight(answer);
         });
     }
 
     private CompletableFuture<Boolean> ask(HttpRequest request) {
-        return client.sendAsync(request, BodyHandlers.ofByteArray()).thenApply(answer -> answer.statusCode() == 200);
+        return client.sendAsync(request, BodyHandlers.ofByteArray()).thenApply(OfficeDay::isRight);
+    }
+
+    private static boolean isRight(HttpResponse<?> answer) {
+        if (answer.statusCode() != 200) {
+            System.err.println(
+                    answer.request().method() + " " + answer.uri().getPath() + " answered " + answer.statusCode());
+        }
+        return answer.statusCode() == 200;
     }
 
     private HttpRequest.Builder api(String path) {
@@ -172,10 +182,22 @@ final class OfficeDay {
         require(entered, 303);
         String list = page(program.at("/jobs?find=Quillfen"));
         String job = first(list.contains("/jobs/") ? list : page(program.at("/jobs")), "(/jobs/[a-z2-9]{12})\"");
-        String room = first(page(program.at(job)), "(" + job + "/rooms/[^\"/?#]+)\"");
+        String room = first(pageWithFloors(program.at(job)), "(" + job + "/rooms/[^\"/?#]+)\"");
         return List.of("/jobs", job, room).stream()
                 .map(path -> HttpRequest.newBuilder(program.at(path)).build())
                 .toList();
+    }
+
+    /** A page that shows floors, once they have been solved. */
+    private String pageWithFloors(URI at) throws IOException, InterruptedException {
+        for (int look = 0; look < LOOKS; look++) {
+            HttpResponse<String> page = client.send(HttpRequest.newBuilder(at).build(), BodyHandlers.ofString());
+            if (page.statusCode() == 200) {
+                return page.body();
+            }
+            TimeUnit.MILLISECONDS.sleep(500);
+        }
+        throw new IOException("the floors of " + at + " are not solved");
     }
 
     private String page(URI at) throws IOException, InterruptedException {

@@ -33,6 +33,7 @@ final class ServedProgram implements AutoCloseable {
         int port = freePort();
         Path log = Files.createTempFile("treadwarm-load", ".log");
         List<String> command = new ArrayList<>(List.of("java"));
+        command.add("-XX:SharedArchiveFile=" + jar.resolveSibling("treadwarm.jsa"));
         command.addAll(options);
         command.addAll(
                 List.of("-jar", jar.toString(), "serve", "--demo", "--port", "" + port, "--data", data.toString()));

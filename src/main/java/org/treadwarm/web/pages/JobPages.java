@@ -4,6 +4,8 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import io.javalin.http.Context;
 import io.javalin.http.HttpStatus;
+import java.net.URLEncoder;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -59,12 +61,21 @@ final class JobPages {
                 A_PAGE));
         Map<String, Object> model = new HashMap<>();
         model.put("jobs", found.jobs().stream().map(JobView.JobRow::of).toList());
-        model.put("next", found.next().orElse(""));
+        model.put("next", found.next().map(place -> more(find, show, place)).orElse(""));
         model.put("find", find);
         model.put("show", show);
         model.put("filtered", !find.isEmpty() || !show.isEmpty() || !after.isEmpty());
         model.put("error", error);
         view.show(ctx, status, "jobs", model);
+    }
+
+    /** The address of the next part of a list. */
+    private static String more(String find, String show, String place) {
+        return "/jobs?find=" + encoded(find) + "&show=" + encoded(show) + "&after=" + encoded(place);
+    }
+
+    private static String encoded(String text) {
+        return URLEncoder.encode(text, StandardCharsets.UTF_8);
     }
 
     private static String query(Context ctx, String name) {
