@@ -1,7 +1,5 @@
 package org.treadwarm.bench;
 
-import com.fasterxml.jackson.databind.JsonNode;
-import com.fasterxml.jackson.databind.ObjectMapper;
 import io.javalin.Javalin;
 import java.io.IOException;
 import java.net.URI;
@@ -40,17 +38,7 @@ public final class RequestRate {
     public static void main(String[] arguments) throws Exception {
         byte[] body = Json.bytes(BenchSurveys.twelveSurfaces());
         Path folder = Files.createTempDirectory("treadwarm-rate");
-        ObjectMapper mapper = new ObjectMapper();
-        Javalin bare = Javalin.create(config -> {
-                    config.startup.showJavalinBanner = false;
-                    config.startup.startupWatcherEnabled = false;
-                    config.routes.post("/echo", ctx -> {
-                        JsonNode tree = mapper.readTree(ctx.bodyAsBytes());
-                        ctx.contentType("application/json");
-                        ctx.result(mapper.writeValueAsBytes(tree));
-                    });
-                })
-                .start("127.0.0.1", 0);
+        Javalin bare = BareServer.start(0);
         try (Store store = Store.open(folder, Clock.systemUTC());
                 Server server = Server.start(new Settings("127.0.0.1", 0, List.of(), false, false), store)) {
             String key =

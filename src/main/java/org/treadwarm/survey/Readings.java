@@ -26,9 +26,8 @@ public final class Readings {
     private final Choice choice;
     private final Visitor visitor;
 
-    // The way down, so that an address is written out only when it is told: step 0 is an address, the others are names
-    // of
-    // keys, or places in lists where the name is absent.
+    // The way down, so that an address is written out only when it is told: step 0 is an address, the others are
+    // names of keys, or places in lists where the name is absent.
     private final String[] names;
     private final int[] places;
     private int depth;

@@ -1,7 +1,5 @@
 package org.treadwarm.bench.load;
 
-import com.fasterxml.jackson.databind.ObjectMapper;
-import io.javalin.Javalin;
 import java.io.IOException;
 import java.net.URI;
 import java.net.http.HttpClient;
@@ -17,6 +15,7 @@ import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.TimeUnit;
 import java.util.function.Supplier;
 import java.util.stream.IntStream;
+import org.treadwarm.bench.BareServer;
 import org.treadwarm.bench.BenchSurveys;
 import org.treadwarm.wire.Json;
 
@@ -51,7 +50,7 @@ public final class Load {
     public static void main(String[] arguments) throws Exception {
         Path jar = Path.of("target/treadwarm.jar");
         if (arguments.length == 2 && arguments[0].equals("serve")) {
-            bare(Integer.parseInt(arguments[1]));
+            BareServer.start(Integer.parseInt(arguments[1]));
             return;
         }
         Set<String> parts = arguments.length == 0 ? Set.of("start", "bare", "office", "heap") : Set.of(arguments);
@@ -181,19 +180,6 @@ public final class Load {
         } finally {
             process.destroy();
         }
-    }
-
-    private static void bare(int port) {
-        ObjectMapper mapper = new ObjectMapper();
-        Javalin.create(config -> {
-                    config.startup.showJavalinBanner = false;
-                    config.startup.startupWatcherEnabled = false;
-                    config.routes.post("/echo", ctx -> {
-                        ctx.contentType("application/json");
-                        ctx.result(mapper.writeValueAsBytes(mapper.readTree(ctx.bodyAsBytes())));
-                    });
-                })
-                .start("127.0.0.1", port);
     }
 
     private static void say(String format, Object... values) {
