@@ -92,10 +92,10 @@ public final class ServeCommand implements Callable<Integer> {
             LogSetup.writeJson();
         }
         try (Store store = Store.openToServe(data.home(), Clock.systemUTC())) {
+            Server server = Server.start(settings(), store);
             if (demo) {
                 Demo.addTo(new JobDesk(store.jobs()));
             }
-            Server server = Server.start(settings(), store);
             announce(server.port(), store.people().inviteOwner());
             CountDownLatch stopped = new CountDownLatch(1);
             Runtime.getRuntime().addShutdownHook(new Thread(() -> {
