@@ -4,7 +4,6 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
 import java.util.function.Function;
-import java.util.stream.Collectors;
 
 /** Collects the shapes of one drawing on a sheet and writes the whole SVG. */
 final class Canvas {
@@ -32,6 +31,18 @@ final class Canvas {
 
     void polyline(List<Point> points, Stroke stroke) {
         shape(Svg.element("polyline").with("points", joined(points)).with("fill", Palette.NONE), stroke);
+    }
+
+    /** Lines that are drawn more than once, kept under a word; see {@link #again}. */
+    void keep(String word, List<List<Point>> lines) {
+        Svg kept = Svg.element("g").with("id", sheet.idPrefix() + "-" + word).with("fill", Palette.NONE);
+        lines.forEach(line -> kept.add(Svg.element("polyline").with("points", joined(line))));
+        definitions.add(kept);
+    }
+
+    /** Draws the lines kept under a word. */
+    void again(String word, Stroke stroke) {
+        shape(Svg.element("use").with("href", "#" + sheet.idPrefix() + "-" + word), stroke);
     }
 
     void polygon(List<Point> points, String fill, Stroke stroke) {
@@ -142,8 +153,12 @@ final class Canvas {
     }
 
     private static String joined(List<Point> points) {
-        return points.stream()
-                .map(point -> Figures.coordinate(point.x()) + "," + Figures.coordinate(point.y()))
-                .collect(Collectors.joining(" "));
+        StringBuilder text = new StringBuilder(12 * points.size());
+        for (Point point : points) {
+            text.append(text.isEmpty() ? "" : " ");
+            Figures.coordinate(text, point.x());
+            Figures.coordinate(text.append(','), point.y());
+        }
+        return text.toString();
     }
 }

@@ -7,6 +7,9 @@ import java.math.RoundingMode;
 final class Figures {
     private static final String JOIN = "\u00a0";
 
+    /** So near to the middle between two hundredths the digits decide how to round. */
+    private static final double HARDLY = 1e-6;
+
     private Figures() {}
 
     /** Whole watts, such as "340 W". */
@@ -74,8 +77,33 @@ final class Figures {
 
     /** A coordinate with at most two decimals, in the notation of SVG. */
     static String coordinate(double value) {
-        BigDecimal number = decimal(value).setScale(2, RoundingMode.HALF_UP);
-        return number.signum() == 0 ? "0" : number.stripTrailingZeros().toPlainString();
+        StringBuilder text = new StringBuilder(8);
+        coordinate(text, value);
+        return text.toString();
+    }
+
+    /** Appends a coordinate with at most two decimals, in the notation of SVG. */
+    static void coordinate(StringBuilder text, double value) {
+        double hundredths = 100 * Math.abs(Checks.drawable("The number", value));
+        double below = Math.floor(hundredths);
+        double rest = hundredths - below;
+        if (Math.abs(rest - 0.5) < HARDLY) {
+            BigDecimal number = decimal(value).setScale(2, RoundingMode.HALF_UP);
+            text.append(number.signum() == 0 ? "0" : number.stripTrailingZeros().toPlainString());
+            return;
+        }
+        long rounded = (long) below + (rest > 0.5 ? 1 : 0);
+        if (value < 0 && rounded > 0) {
+            text.append('-');
+        }
+        text.append(rounded / 100);
+        long decimals = rounded % 100;
+        if (decimals > 0) {
+            text.append('.').append(decimals / 10);
+        }
+        if (decimals % 10 > 0) {
+            text.append(decimals % 10);
+        }
     }
 
     /** By way of the shortest decimal text, so that 0.125 given as 0.125 rounds as a person would round it. */

@@ -48,7 +48,12 @@ final class Isolines {
         double northEast = values[row][column + 1];
         double southWest = values[row + 1][column];
         double southEast = values[row + 1][column + 1];
-        if (Double.isNaN(northWest + northEast + southWest + southEast)) {
+        int above = (northWest >= level ? 1 : 0)
+                + (northEast >= level ? 1 : 0)
+                + (southWest >= level ? 1 : 0)
+                + (southEast >= level ? 1 : 0);
+        // Most cells: none of their edges is crossed.
+        if (above == 0 || above == 4 || Double.isNaN(northWest + northEast + southWest + southEast)) {
             return;
         }
         int north = across(row, column);

@@ -63,9 +63,10 @@ final class IsothermLines {
             gap.forEach(box -> number(box, text.apply(level)));
             numbers.addAll(gap);
         });
-        pieces.forEach(piece -> canvas.polyline(piece, HALO));
+        canvas.keep("isotherms", pieces);
+        canvas.again("isotherms", HALO);
         outlines.forEach(box -> canvas.rectangle(box, Palette.NONE, Stroke.OUTLINE));
-        pieces.forEach(piece -> canvas.polyline(piece, ISOTHERM));
+        canvas.again("isotherms", ISOTHERM);
         return new Drawn(pieces, numbers, unlabelled);
     }
 

@@ -9,6 +9,8 @@ final class LineBreak {
     /** A part of a segment, as shares of its length from its first end. */
     private record Part(double from, double to) {}
 
+    private static final List<Part> WHOLE = List.of(new Part(0, 1));
+
     private LineBreak() {}
 
     /** Whether a segment runs through a box. */
@@ -32,6 +34,9 @@ final class LineBreak {
 
     /** The pieces of a line that lie outside all the boxes, in the order of the line. */
     static List<List<Point>> outside(List<Point> line, List<Box> gaps) {
+        if (gaps.isEmpty()) {
+            return line.size() > 1 ? List.of(line) : List.of();
+        }
         List<List<Point>> pieces = new ArrayList<>();
         List<Point> piece = new ArrayList<>();
         for (int i = 1; i < line.size(); i++) {
@@ -57,6 +62,9 @@ final class LineBreak {
     }
 
     private static List<Part> outside(Point from, Point to, List<Box> gaps) {
+        if (gaps.stream().noneMatch(gap -> meets(from, to, gap))) {
+            return WHOLE;
+        }
         List<Part> hidden = gaps.stream()
                 .map(gap -> inside(from, to, gap))
                 .filter(part -> part.to() > 0)

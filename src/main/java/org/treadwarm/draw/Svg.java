@@ -65,6 +65,13 @@ final class Svg {
     }
 
     static String escape(String raw) {
+        int plain = 0;
+        while (plain < raw.length() && isPlain(raw.charAt(plain))) {
+            plain++;
+        }
+        if (plain == raw.length()) {
+            return raw;
+        }
         StringBuilder out = new StringBuilder();
         raw.codePoints().forEach(point -> {
             switch (point) {
@@ -77,6 +84,16 @@ final class Svg {
             }
         });
         return out.toString();
+    }
+
+    private static boolean isPlain(char character) {
+        return character >= 0x20
+                && character < 0xD800
+                && character != '&'
+                && character != '<'
+                && character != '>'
+                && character != '"'
+                && character != '\'';
     }
 
     /** XML 1.0 forbids most control characters and lone surrogates even when escaped. */

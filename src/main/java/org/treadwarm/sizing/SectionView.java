@@ -9,7 +9,6 @@ import org.treadwarm.physics.section.FloorLayer.Solid;
 import org.treadwarm.physics.section.FloorSection;
 import org.treadwarm.physics.section.TemperatureMap;
 import org.treadwarm.sizing.PartedFloor.Part;
-import org.treadwarm.survey.Survey;
 
 /**
  * The temperatures of a solved floor at the flux it gives, for drawing: half a spacing from the axis of a heater, by rows from the
@@ -42,28 +41,19 @@ public record SectionView(
 
     private static final int MOST_ROWS = 200;
 
-    /**
-     * The temperatures of a room's floor, of each of its parts when it is laid in parts; empty when it has no solved section or gives no
-     * heat.
-     *
-     * @param survey one that was sized
-     * @param room its number
-     */
-    public static List<SectionView> all(Survey survey, int room) {
-        Plan plan = Plan.of(survey);
-        Evaluation evaluation = new Evaluation(plan);
-        FloorEvaluation floor = evaluation.evaluate(plan.values) ? evaluation.floors[room] : null;
-        double flux = floor == null ? 0 : Math.min(floor.requiredFlux, floor.carryingFlux);
+    /** As {@link SizedSurvey#sections}. */
+    static List<SectionView> all(FloorEvaluation floor, double outdoor) {
+        double flux = Math.min(floor.requiredFlux, floor.carryingFlux);
         if (!(flux > 0)) {
             return List.of();
         }
         if (floor.section != null) {
-            return List.of(view(floor.section, floor.zoneMaximum(), floor.section.at(flux, evaluation.outdoor)));
+            return List.of(view(floor.section, floor.zoneMaximum(), floor.section.at(flux, outdoor)));
         }
         List<SectionView> views = new ArrayList<>();
         for (int i = 0; floor.parted != null && i < floor.parted.parts.size(); i++) {
             Part part = floor.parted.parts.get(i);
-            SectionFloor.State state = floor.parted.at(flux, evaluation.outdoor).get(i);
+            SectionFloor.State state = floor.parted.at(flux, outdoor).get(i);
             if (!(state.flux() > 0)) {
                 return List.of();
             }

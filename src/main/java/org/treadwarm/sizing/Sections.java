@@ -42,6 +42,7 @@ final class Sections {
 
     private int solved;
     private int followed;
+    private boolean gaveUp;
     private String whyNot = "";
 
     /** @param stopped asked at every step of the solver, and before each floor is followed through time, whether to give up */
@@ -108,6 +109,7 @@ final class Sections {
         (tried == null ? SOLVED : REMEMBERED).increment();
         if (tried == null) {
             if (solved == MOST_NEW) {
+                gaveUp = true;
                 whyNot = "one sizing solves at most " + MOST_NEW + " different floors";
                 return Optional.empty();
             }
@@ -123,6 +125,11 @@ final class Sections {
         synchronized (KEPT) {
             return new SectionCache.Reading(KEPT.size(), REMEMBERED.sum(), SOLVED.sum());
         }
+    }
+
+    /** Whether a geometry was met that this sizing could not solve any more, but a later one can. */
+    boolean gaveUp() {
+        return gaveUp;
     }
 
     /**

@@ -35,9 +35,14 @@ public final class Sizer {
      * @throws java.util.concurrent.CancellationException when asked to give up; floors solved until then are remembered
      */
     public static Sizing size(Survey survey, BooleanSupplier stopped) throws NoBalanceException {
+        return sizedSurvey(survey, stopped).sizing();
+    }
+
+    /** The same, with what drawings want to know beside the answer. */
+    public static SizedSurvey sizedSurvey(Survey survey, BooleanSupplier stopped) throws NoBalanceException {
         Evaluation evaluation = evaluated(survey, new Sections(stopped));
         SIZED.increment();
-        return new Answers(evaluation).sizing();
+        return new SizedSurvey(evaluation);
     }
 
     /**

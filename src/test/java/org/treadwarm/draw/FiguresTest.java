@@ -2,7 +2,10 @@ package org.treadwarm.draw;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.Locale;
+import java.util.Random;
 import org.junit.jupiter.api.Test;
 
 class FiguresTest {
@@ -20,6 +23,22 @@ class FiguresTest {
     void neverShowsAMinusBeforeNothing() {
         assertThat(Figures.watts(-0.4)).isEqualTo("0\u00a0W");
         assertThat(Figures.coordinate(-0.001)).isEqualTo("0");
+    }
+
+    @Test
+    void writesCoordinatesAsTheirDecimalTextIsRounded() {
+        Random random = new Random(7);
+        for (int i = 0; i < 200_000; i++) {
+            double value = i % 3 == 0
+                    ? (random.nextInt(400_000) - 200_000) / 1000.0
+                    : random.nextGaussian() * Math.pow(10, random.nextInt(9) - 4);
+            BigDecimal rounded = BigDecimal.valueOf(value).setScale(2, RoundingMode.HALF_UP);
+            assertThat(Figures.coordinate(value))
+                    .isEqualTo(
+                            rounded.signum() == 0
+                                    ? "0"
+                                    : rounded.stripTrailingZeros().toPlainString());
+        }
     }
 
     @Test

@@ -13,6 +13,7 @@ import org.treadwarm.jobs.Partial;
 import org.treadwarm.sizing.AssemblyEvaluation;
 import org.treadwarm.sizing.AssemblyEvaluation.Conditions;
 import org.treadwarm.sizing.SectionView;
+import org.treadwarm.sizing.SizedSurvey;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.FloorState;
@@ -25,7 +26,6 @@ import org.treadwarm.sizing.Sizing.SectionState;
 import org.treadwarm.sizing.Sizing.Warning;
 import org.treadwarm.sizing.SpaceBalance;
 import org.treadwarm.sizing.Verdict;
-import org.treadwarm.sizing.WarmUpView;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Survey;
@@ -57,9 +57,7 @@ final class Answer {
         if (part.isAssembly()) {
             answer.assembly(document, part);
         } else if (part.isRoom()) {
-            judgement
-                    .sizing()
-                    .ifPresent(sizing -> answer.room(judgement.survey().orElseThrow(), sizing, part));
+            judgement.sized().ifPresent(sized -> answer.room(judgement.survey().orElseThrow(), sized, part));
         } else if (judgement.problems().isEmpty()) {
             answer.space(judgement.survey().orElseThrow(), part);
         }
@@ -99,25 +97,27 @@ final class Answer {
     /**
      * What an issued sheet says of a room.
      *
-     * @param solvedAnew whether to draw what must be solved anew for a drawing; not by another method than the sheet's
+     * @param sizedAnew its survey sized again for the drawings that want more than the sheet holds; empty when today's method is
+     *     another than the sheet's
      */
-    static Map<String, Object> issued(Survey survey, Sizing sizing, int index, boolean solvedAnew) {
+    static Map<String, Object> issued(Survey survey, Sizing sizing, int index, Optional<SizedSurvey> sizedAnew) {
         Answer answer = new Answer("r" + index + "-");
-        answer.room(survey, survey.rooms().get(index), sizing, index, solvedAnew);
+        answer.room(survey.rooms().get(index), sizing, index, sizedAnew);
         return answer.model;
     }
 
-    private void room(Survey survey, Sizing sizing, Part part) {
+    private void room(Survey survey, SizedSurvey sized, Part part) {
+        Sizing sizing = sized.sizing();
         for (int i = 0; i < sizing.rooms().size(); i++) {
             RoomSizing answer = sizing.rooms().get(i);
             if (answer.name().equals(part.title().strip())) {
-                room(survey, survey.rooms().get(i), sizing, i, true);
+                room(survey.rooms().get(i), sizing, i, Optional.of(sized));
                 model.put("working", WorkingView.of(survey, sizing, "/rooms/" + i));
             }
         }
     }
 
-    private void room(Survey survey, Room room, Sizing sizing, int index, boolean solvedAnew) {
+    private void room(Room room, Sizing sizing, int index, Optional<SizedSurvey> sized) {
         RoomSizing answer = sizing.rooms().get(index);
         FloorSizing floor = answer.floor();
         model.put("verdict", verdict(floor));
@@ -131,8 +131,8 @@ final class Answer {
         add(pictures, "What the floor must give and may give", "limits", sheet -> Pictures.limits(answer, sheet));
         add(pictures, "The heated floor in section", "floor", sheet -> Pictures.floor(room, answer, sheet));
         add(pictures, "The floor in plan", "plan", sheet -> PlanPicture.of(room, answer, sheet));
-        if (solvedAnew && (floor.section().isPresent() || !floor.parts().isEmpty())) {
-            List<SectionView> views = SectionView.all(survey, index);
+        if (sized.isPresent() && (floor.section().isPresent() || !floor.parts().isEmpty())) {
+            List<SectionView> views = sized.get().sections(index);
             for (int i = 0; i < views.size(); i++) {
                 int number = i;
                 add(
@@ -145,8 +145,8 @@ final class Answer {
                         sheet -> Pictures.isotherms(room, answer, views.get(number), number, sheet));
             }
         }
-        if (solvedAnew && floor.warmup().isPresent()) {
-            WarmUpView.of(survey, index).ifPresent(morning -> {
+        if (sized.isPresent() && floor.warmup().isPresent()) {
+            sized.get().morning(index).ifPresent(morning -> {
                 add(
                         pictures,
                         "The morning after a setback",

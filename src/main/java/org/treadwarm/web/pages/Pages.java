@@ -50,7 +50,8 @@ public final class Pages {
         this.history = new HistoryPages(desk, visitors, view);
         this.computing = new ComputationPages(computations, view);
         this.ahead = new SolvingAhead(desk, computations, computing);
-        this.parts = new PartPages(desk, visitors, view, versions, ahead);
+        WrittenAnswers answers = new WrittenAnswers(view);
+        this.parts = new PartPages(desk, visitors, view, versions, ahead, answers);
         this.links = new LinkPages(store, visitors, view);
         this.account = new AccountPages(store, visitors, view);
         this.people = new PeoplePages(store, visitors, view);
@@ -59,7 +60,7 @@ public final class Pages {
         this.issuing = new IssuePages(desk, sheetDesk, visitors, view);
         this.sheets = new SheetPages(sheetDesk, visitors, view);
         this.sheetLinks = new SheetLinkPages(store, visitors, view);
-        this.quick = new QuickPages(desk, visitors, view, ahead);
+        this.quick = new QuickPages(desk, visitors, view, ahead, answers);
         this.method = new MethodPage(computations, view);
         this.wallFeet = new WallFootPages(desk, visitors, view, computations, computing);
     }

@@ -31,15 +31,23 @@ final class PartPages {
     private final JobDesk desk;
     private final Visitors visitors;
     private final View view;
+    private final WrittenAnswers answers;
     private final VersionPages versions;
     private final SolvingAhead ahead;
 
-    PartPages(JobDesk desk, Visitors visitors, View view, VersionPages versions, SolvingAhead ahead) {
+    PartPages(
+            JobDesk desk,
+            Visitors visitors,
+            View view,
+            VersionPages versions,
+            SolvingAhead ahead,
+            WrittenAnswers answers) {
         this.desk = desk;
         this.versions = versions;
         this.ahead = ahead;
         this.visitors = visitors;
         this.view = view;
+        this.answers = answers;
     }
 
     void show(Context ctx) {
@@ -89,10 +97,11 @@ final class PartPages {
         model.put("quick", false);
         model.put("feet", WallFootOffers.of(job, document, part));
         model.put("materials", Materials.all());
-        model.putAll(
+        model.put(
+                "answer",
                 SolvingAhead.isUnsized(ctx)
-                        ? Answer.unsized(document, part, SolvingAhead.STOPPED)
-                        : Answer.of(document, part));
+                        ? answers.unsized(document, part, SolvingAhead.STOPPED)
+                        : answers.of(document, part));
         view.show(ctx, status, "part", model);
     }
 
@@ -106,7 +115,7 @@ final class PartPages {
         }
         ObjectNode document = (ObjectNode) job.get().document().deepCopy();
         part.get().write(document, ctx.formParamMap());
-        ahead.preview(ctx, view, document, part.get());
+        ahead.preview(ctx, answers, document, part.get());
     }
 
     void save(Context ctx) {

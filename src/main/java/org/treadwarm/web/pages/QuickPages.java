@@ -30,14 +30,16 @@ final class QuickPages {
     private final JobDesk desk;
     private final Visitors visitors;
     private final View view;
+    private final WrittenAnswers answers;
     private final SolvingAhead ahead;
     private final TypedRooms typed = new TypedRooms(System::nanoTime);
 
-    QuickPages(JobDesk desk, Visitors visitors, View view, SolvingAhead ahead) {
+    QuickPages(JobDesk desk, Visitors visitors, View view, SolvingAhead ahead, WrittenAnswers answers) {
         this.ahead = ahead;
         this.desk = desk;
         this.visitors = visitors;
         this.view = view;
+        this.answers = answers;
     }
 
     void show(Context ctx) {
@@ -92,10 +94,11 @@ final class QuickPages {
         model.put("materials", Materials.all());
         model.put("revision", 0);
         model.put("jobName", "One room without a job");
-        model.putAll(
+        model.put(
+                "answer",
                 SolvingAhead.isUnsized(ctx)
-                        ? Answer.unsized(document, part, SolvingAhead.STOPPED)
-                        : Answer.of(document, part));
+                        ? answers.unsized(document, part, SolvingAhead.STOPPED)
+                        : answers.of(document, part));
         view.show(ctx, status, "part", model);
     }
 
@@ -138,7 +141,7 @@ final class QuickPages {
 
     void preview(Context ctx) {
         ObjectNode document = document(ctx).orElseGet(() -> (ObjectNode) start());
-        ahead.preview(ctx, view, document, part(document));
+        ahead.preview(ctx, answers, document, part(document));
     }
 
     /** Makes the room a job. */

@@ -7,8 +7,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.treadwarm.intake.Intake;
-import org.treadwarm.intake.Intake.Outcome;
+import org.treadwarm.jobs.Judgement;
 import org.treadwarm.sheets.FrozenText;
 import org.treadwarm.sizing.Sizing;
 import org.treadwarm.sizing.Sizing.Caution;
@@ -73,13 +72,15 @@ final class SheetView {
     static Map<String, Object> model(Sheet sheet) {
         JsonNode document = FrozenText.tree(sheet.content().survey());
         Optional<Sizing> sizing = FrozenSizing.read(sheet.content().sizing());
-        Optional<Survey> survey = survey(document);
+        boolean sameMethod = sheet.header().methodVersion().equals(Sizing.METHOD_VERSION);
+        Judgement today = sameMethod ? Judgement.of(document) : Judgement.unsized(document);
+        Optional<Survey> survey = today.survey();
         Map<String, Object> model = new HashMap<>();
         model.put("sheet", Head.of(sheet.header()));
         model.put("intact", sheet.hasItsFingerprint());
         model.put("inputs", TypedInputs.of(document));
         model.put("totals", sizing.map(JobView::totals).orElse(List.of()));
-        model.put("rooms", rooms(sheet, survey, sizing));
+        model.put("rooms", rooms(today, sizing));
         model.put("cautions", sizing.map(SheetView::cautions).orElse(List.of()));
         model.put("drawn", survey.isPresent() && sizing.isPresent());
         model.put(
@@ -88,19 +89,13 @@ final class SheetView {
         return model;
     }
 
-    private static Optional<Survey> survey(JsonNode document) {
-        return Intake.survey(document) instanceof Outcome.Accepted<Survey> accepted
-                ? Optional.of(accepted.value())
-                : Optional.empty();
-    }
-
-    private static List<RoomPart> rooms(Sheet sheet, Optional<Survey> survey, Optional<Sizing> sizing) {
+    private static List<RoomPart> rooms(Judgement today, Optional<Sizing> sizing) {
+        Optional<Survey> survey = today.survey();
         List<RoomPart> rooms = new ArrayList<>();
         if (survey.isPresent() && sizing.isPresent()) {
-            boolean sameMethod = sheet.header().methodVersion().equals(Sizing.METHOD_VERSION);
             for (int i = 0; i < sizing.get().rooms().size(); i++) {
                 RoomSizing room = sizing.get().rooms().get(i);
-                Map<String, Object> answer = Answer.issued(survey.get(), sizing.get(), i, sameMethod);
+                Map<String, Object> answer = Answer.issued(survey.get(), sizing.get(), i, today.sized());
                 rooms.add(new RoomPart(room.name(), answer, limits(room)));
             }
         }

@@ -4,7 +4,6 @@ import com.fasterxml.jackson.databind.JsonNode;
 import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import io.javalin.http.HttpStatus;
-import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
@@ -112,15 +111,13 @@ final class SolvingAhead {
     }
 
     /** The answer for a form as it stands; where floors are still being solved, it says so and is to be asked for again. */
-    void preview(Context ctx, View view, JsonNode document, Part part) {
+    void preview(Context ctx, WrittenAnswers answers, JsonNode document, Part part) {
         boolean solving = Answer.needsFloors(part) && isSolving(document, ctx.path());
-        Map<String, Object> model =
-                new HashMap<>(solving ? Answer.unsized(document, part, SOLVING) : Answer.of(document, part));
-        model.put("part", part);
         if (solving) {
             ctx.header("Refresh", "1");
         }
-        view.show(ctx, 200, "answer", model);
+        ctx.contentType("text/html; charset=utf-8");
+        ctx.result(solving ? answers.unsized(document, part, SOLVING) : answers.of(document, part));
     }
 
     private boolean isSolving(JsonNode document, String then) {

@@ -4,6 +4,7 @@ import io.javalin.http.Context;
 import java.util.HashMap;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Set;
 import org.thymeleaf.TemplateEngine;
 import org.thymeleaf.templatemode.TemplateMode;
 import org.thymeleaf.templateresolver.ClassLoaderTemplateResolver;
@@ -38,6 +39,11 @@ final class View {
         ctx.status(status);
         ctx.contentType("text/html; charset=utf-8");
         ctx.result(engine.process(template, new org.thymeleaf.context.Context(Locale.ENGLISH, all)));
+    }
+
+    /** A fragment of a template, for a page to hold or a script to ask for. */
+    String fragment(String template, Map<String, Object> model) {
+        return engine.process(template, Set.of(template), new org.thymeleaf.context.Context(Locale.ENGLISH, model));
     }
 
     private boolean may(Context ctx, Role least) {
