@@ -17,6 +17,7 @@ import org.treadwarm.survey.HeaterKind;
 import org.treadwarm.survey.Junction;
 import org.treadwarm.survey.JunctionPlace;
 import org.treadwarm.survey.Layer;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Pointer;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Space;
@@ -148,7 +149,7 @@ final class FloorWarnings {
                     "At the wall foot the warm slab meets the cold outside.",
                     "List the wall foot with its psi, or leave it out knowingly.");
         }
-        Warnings.metal(pointer + "/below", floor.below(), warnings);
+        Warnings.metal(Place.ROOT.at(pointer + "/below"), floor.below(), warnings);
         Minimum least = minimum(floor);
         double below = answer.resistanceBelow().orElseThrow();
         if (below < least.resistance()) {

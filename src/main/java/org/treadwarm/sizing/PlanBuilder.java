@@ -75,7 +75,9 @@ final class PlanBuilder {
 
     private final Map<String, Integer> nodes = new HashMap<>();
     private final Map<String, Integer> assemblyNumbers = new HashMap<>();
-    private final Map<Face, Integer> faceNumbers = new HashMap<>();
+
+    /** The number of the face of each assembly on each side, or none. */
+    private final int[][] faceNumbers;
 
     PlanBuilder(Survey survey) {
         this.survey = survey;
@@ -87,12 +89,16 @@ final class PlanBuilder {
         factor = new int[rooms + spaces + 2];
         floors = new FloorPlan[rooms];
         roomIndexes = new RoomIndexes[rooms];
+        faceNumbers = new int[survey.assemblies().size()][Side.values().length];
     }
 
     Plan build() {
         java.util.Arrays.fill(nodeTemperature, NONE);
         java.util.Arrays.fill(floating, NONE);
         java.util.Arrays.fill(factor, NONE);
+        for (int[] sides : faceNumbers) {
+            java.util.Arrays.fill(sides, NONE);
+        }
         site();
         nodes();
         survey.assemblies().forEach(this::assembly);
@@ -306,14 +312,13 @@ final class PlanBuilder {
     }
 
     private int face(String assembly, Side side) {
-        Face face = new Face(assemblyNumbers.get(assembly), side);
-        Integer known = faceNumbers.get(face);
-        if (known == null) {
-            known = faces.size();
-            faces.add(face);
-            faceNumbers.put(face, known);
+        int number = assemblyNumbers.get(assembly);
+        int[] known = faceNumbers[number];
+        if (known[side.ordinal()] == NONE) {
+            known[side.ordinal()] = faces.size();
+            faces.add(new Face(number, side));
         }
-        return known;
+        return known[side.ordinal()];
     }
 
     private int ground(Place at, Ground ground, int floorArea) {

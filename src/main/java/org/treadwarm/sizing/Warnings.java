@@ -16,7 +16,7 @@ import org.treadwarm.survey.Air;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Bridging;
 import org.treadwarm.survey.Layer;
-import org.treadwarm.survey.Pointer;
+import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Readings;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Space;
@@ -35,6 +35,9 @@ final class Warnings {
     /** No metal used in building conducts less, no other material more, W/(m·K) (common practice, no source). */
     private static final double LEAST_OF_METALS = 10;
 
+    private static final Place ASSEMBLIES = Place.ROOT.at("/assemblies");
+    private static final Place SPACES = Place.ROOT.at("/spaces");
+
     private final Plan plan;
     private final Survey survey;
     private final Evaluation numbers;
@@ -42,6 +45,7 @@ final class Warnings {
     private final List<Warning> unusual = new ArrayList<>();
     private final List<Warning> ofRooms = new ArrayList<>();
     private final FloorWarnings floorWarnings;
+    private final Readings readings = new Readings(Warnings::isImplausible, this::implausible);
 
     Warnings(Plan plan, Evaluation numbers) {
         this.plan = plan;
@@ -56,14 +60,14 @@ final class Warnings {
      */
     void room(int i, RoomSizing answer) {
         Room room = survey.rooms().get(i);
-        String pointer = "/rooms/" + i;
-        Readings.visit(room, pointer, Warnings::isImplausible, this::implausible);
+        Place at = Place.ROOT.item("/rooms", i);
+        readings.visit(room, at);
         double volume = room.air()
                 .flatMap(Air::volume)
                 .map(Reading::value)
                 .orElse(room.floorArea().value() * room.height().value());
-        changes(pointer + "/air", room.air(), volume, ofRooms);
-        gains(i, answer, pointer);
+        changes(at.at("/air"), room.air(), volume, ofRooms);
+        gains(i, answer, at);
         if (room.heatedFloor().isPresent()) {
             floorWarnings.check(i, room, answer);
         }
@@ -73,9 +77,9 @@ final class Warnings {
     List<Warning> all() {
         List<Warning> unusualInRooms = List.copyOf(unusual);
         unusual.clear();
-        Readings.visit(survey.site(), "/site", Warnings::isImplausible, this::implausible);
-        survey.assemblies().forEach((name, assembly) -> unusualIn("/assemblies", name, assembly));
-        survey.spaces().forEach((name, space) -> unusualIn("/spaces", name, space));
+        readings.visit(survey.site(), Place.ROOT.at("/site"));
+        survey.assemblies().forEach((name, assembly) -> readings.visit(assembly, ASSEMBLIES.key(name)));
+        survey.spaces().forEach((name, space) -> readings.visit(space, SPACES.key(name)));
         site();
         assemblies();
         grounds();
@@ -83,10 +87,6 @@ final class Warnings {
         return Stream.of(unusual, unusualInRooms, warnings, ofRooms)
                 .flatMap(List::stream)
                 .toList();
-    }
-
-    private void unusualIn(String parent, String name, Record record) {
-        Readings.visit(record, Pointer.to(parent, name), Warnings::isImplausible, this::implausible);
     }
 
     private void add(String code, String pointer, String message, String why, String settle) {
@@ -136,14 +136,14 @@ final class Warnings {
         for (int i = 0; i < plan.faces.size(); i++) {
             Face face = plan.faces.get(i);
             Plan.AssemblyPlan compiled = plan.assemblies.get(face.assembly());
-            String pointer = Pointer.to("/assemblies", compiled.name());
+            Place at = ASSEMBLIES.key(compiled.name());
             if (face.side() != Side.GROUND) {
-                uValue(pointer, compiled.name(), numbers.faceUValue[i]);
+                uValue(at, compiled.name(), numbers.faceUValue[i]);
             }
             if (compiled.stack() != Stack.NONE && numbers.faceUpper[i] > MOST_LIMIT_RATIO * numbers.faceLower[i]) {
                 add(
                         "bridging-limits-far-apart",
-                        pointer + "/layers",
+                        at.at("/layers").pointer(),
                         "The two limits of the combined method lie far apart: R' is "
                                 + Numbers.fixed(numbers.faceUpper[i] / numbers.faceLower[i], 2) + " times R''.",
                         "ISO 6946 holds while R' is at most 1.5 times R'' (from memory); metal through insulation is outside its scope.",
@@ -153,11 +153,11 @@ final class Warnings {
         mouldAndUnused();
     }
 
-    private void uValue(String pointer, String name, double uValue) {
+    private void uValue(Place at, String name, double uValue) {
         if (uValue < 0.05 || uValue > 7) {
             add(
                     "unusual-u-value",
-                    pointer,
+                    at.pointer(),
                     "The U-value of \"" + name + "\" comes out at " + Numbers.significant(uValue, 3) + " W/(m2.K).",
                     "Built parts lie between 0.05 and 7 W/(m2.K) (common practice, no source).",
                     "Check each layer's thickness and conductivity.");
@@ -173,35 +173,36 @@ final class Warnings {
         }
         int i = 0;
         for (Map.Entry<String, Assembly> entry : survey.assemblies().entrySet()) {
-            String pointer = Pointer.to("/assemblies", entry.getKey());
+            Place at = ASSEMBLIES.key(entry.getKey());
             Assembly assembly = entry.getValue();
             if (opaqueOutside[i]) {
-                mould(pointer, entry.getKey(), plan.assemblies.get(i));
+                mould(at, entry.getKey(), plan.assemblies.get(i));
             }
             if (assembly.uValue().isPresent()
                     && (assembly.insideCoefficient().isPresent()
                             || assembly.outsideCoefficient().isPresent())) {
                 add(
                         "coefficient-without-effect",
-                        pointer,
+                        at.pointer(),
                         "A surface coefficient beside a U-value has no effect.",
                         "A U-value is used as given, films included.",
                         "Leave the coefficient out, or describe the layers.");
             }
-            layersWithoutUse(pointer + "/layers", assembly.layers());
-            metal(pointer + "/layers", assembly.layers(), warnings);
+            Place layers = at.at("/layers");
+            layersWithoutUse(layers, assembly.layers());
+            metal(layers, assembly.layers(), warnings);
             i++;
         }
     }
 
     /** Metal through a layer is outside the scope of the combined method, however little of it there is. */
-    static void metal(String pointer, List<Layer> layers, List<Warning> warnings) {
+    static void metal(Place at, List<Layer> layers, List<Warning> warnings) {
         for (int k = 0; k < layers.size(); k++) {
             double conductivity = Answers.value(layers.get(k).bridging().flatMap(Bridging::conductivity));
             if (conductivity > LEAST_OF_METALS) {
                 warnings.add(new Warning(
                         "metal-through-layer",
-                        Pointer.to(pointer, k) + "/bridging",
+                        at.item(k).at("/bridging").pointer(),
                         "Metal seems to cross this layer.",
                         "Metal through insulation is out of scope of the combined method of ISO 6946 (from memory).",
                         "A two-dimensional calculation by ISO 10211, or the maker's tested U-value."));
@@ -209,12 +210,12 @@ final class Warnings {
         }
     }
 
-    private void layersWithoutUse(String pointer, List<Layer> layers) {
+    private void layersWithoutUse(Place at, List<Layer> layers) {
         for (int k = 0; k < layers.size(); k++) {
             if (layers.get(k).maximumTemperature().isPresent()) {
                 add(
                         "limit-without-effect",
-                        Pointer.to(pointer, k) + "/maximumTemperature",
+                        at.item(k).at("/maximumTemperature").pointer(),
                         "A highest temperature counts only for layers above a heater.",
                         "Layers of an assembly are not heated from within.",
                         "Leave it out here.");
@@ -222,7 +223,7 @@ final class Warnings {
         }
     }
 
-    private void mould(String pointer, String name, Plan.AssemblyPlan assembly) {
+    private void mould(Place at, String name, Plan.AssemblyPlan assembly) {
         double resistance;
         if (assembly.stack() == Stack.NONE) {
             resistance = 1 / numbers.in[assembly.uValue()] - assembly.insideFilm() + SurfaceTemperature.MOULD_FILM;
@@ -234,7 +235,7 @@ final class Warnings {
         if (factor < SurfaceTemperature.LEAST_FACTOR) {
             add(
                     "cold-surface",
-                    pointer,
+                    at.pointer(),
                     "\"" + name + "\" has a cold inside surface: its temperature factor f_Rsi is "
                             + Numbers.fixed(factor, 2) + ".",
                     "Below 0.70 mould is likely in a dwelling at 20 °C and 50 % (ISO 13788 and DIN 4108-2, from memory).",
@@ -261,17 +262,17 @@ final class Warnings {
         boolean[] named = namedNodes();
         int node = plan.rooms;
         for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
-            String pointer = Pointer.to("/spaces", entry.getKey());
+            Place at = SPACES.key(entry.getKey());
             Space space = entry.getValue();
             if (!named[node]) {
                 add(
                         "space-not-named",
-                        pointer,
+                        at.pointer(),
                         "No room looks at the space \"" + entry.getKey() + "\".",
                         "It has no effect on any room.",
                         "Name it as the other side of a surface, or leave it out.");
             }
-            changes(pointer + "/air", space.air(), Answers.value(space.air().flatMap(Air::volume)), warnings);
+            changes(at.at("/air"), space.air(), Answers.value(space.air().flatMap(Air::volume)), warnings);
             node++;
         }
     }
@@ -291,7 +292,7 @@ final class Warnings {
         return named;
     }
 
-    private static void changes(String pointer, Optional<Air> air, double volume, List<Warning> warnings) {
+    private static void changes(Place at, Optional<Air> air, double volume, List<Warning> warnings) {
         if (air.isEmpty() || volume <= 0 || air.get().changeRate().isPresent()) {
             return;
         }
@@ -300,14 +301,14 @@ final class Warnings {
         if (rate > 5) {
             warnings.add(new Warning(
                     "many-air-changes",
-                    pointer,
+                    at.pointer(),
                     "This flow replaces the air " + Numbers.significant(rate, 3) + " times an hour.",
                     "More than 5 air changes are unusual (common practice, no source).",
                     "Check the flow's unit and the volume."));
         }
     }
 
-    private void gains(int i, RoomSizing room, String pointer) {
+    private void gains(int i, RoomSizing room, Place at) {
         double gains = room.heatLoss().gainsFromNeighbours();
         double losses = room.heatLoss().total() + gains;
         if (gains <= 0.1 * losses || losses <= 0) {
@@ -321,7 +322,7 @@ final class Warnings {
                 : "";
         ofRooms.add(new Warning(
                 "gains-from-neighbours",
-                pointer,
+                at.pointer(),
                 "Warmer neighbours cover " + Numbers.fixed(100 * gains / losses, 0) + " % of this room's losses."
                         + without,
                 "They may be off on the coldest day.",

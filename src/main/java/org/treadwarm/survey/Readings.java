@@ -26,34 +26,35 @@ public final class Readings {
     private final Choice choice;
     private final Visitor visitor;
 
-    // The way down, so that an address is written out only when it is told: step 0 is an address, the others are
-    // names of keys, or places in lists where the name is absent.
-    private final String[] names;
-    private final int[] places;
+    // The way down, so that an address is written out only when it is told: where the walk starts, then names of keys,
+    // or
+    // places in lists where the name is absent.
+    private Place start = Place.ROOT;
+    private final String[] names = new String[DEEPEST];
+    private final int[] places = new int[DEEPEST];
     private int depth;
 
-    private Readings(Choice choice, Visitor visitor, String pointer) {
+    /** Walks that tell of the readings that a choice wants. Not for two threads at once. */
+    public Readings(Choice choice, Visitor visitor) {
         this.choice = choice;
         this.visitor = visitor;
-        this.names = new String[DEEPEST];
-        this.places = new int[DEEPEST];
-        this.names[0] = pointer;
-        this.depth = 1;
     }
 
     /** Visits every reading below a record, in document order. */
     public static void visit(Record record, String pointer, Visitor visitor) {
-        visit(record, pointer, (declared, reading) -> true, visitor);
+        new Readings((declared, reading) -> true, visitor).visit(record, Place.ROOT.at(pointer));
     }
 
-    /** Visits the readings below a record that a choice wants, in document order. */
-    public static void visit(Record record, String pointer, Choice choice, Visitor visitor) {
-        new Readings(choice, visitor, pointer).record(record);
+    /** Visits the chosen readings below a record that stands at a place, in document order. */
+    public void visit(Record record, Place at) {
+        start = at;
+        depth = 0;
+        record(record);
     }
 
     private String address() {
-        String address = names[0];
-        for (int i = 1; i < depth; i++) {
+        String address = start.pointer();
+        for (int i = 0; i < depth; i++) {
             address = names[i] == null ? Pointer.to(address, places[i]) : Pointer.to(address, names[i]);
         }
         return address;

@@ -5,7 +5,6 @@ import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.ParameterizedType;
 import java.lang.reflect.RecordComponent;
 import java.lang.reflect.Type;
-import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -32,7 +31,12 @@ public final class Shape {
 
     private final Class<? extends Record> type;
     private final Map<String, Key> keys;
-    private final Map<String, Integer> indexes = new HashMap<>();
+
+    // The places of the keys by their names' hashes: reading a document looks every key up, and a map would box and
+    // chase them.
+    private final String[] slots;
+    private final int[] indexes;
+
     private final Key[] inOrder;
     private final Key[] holding;
     private final Constructor<?> constructor;
@@ -110,8 +114,12 @@ public final class Shape {
             parameters[i] = components[i].getType();
         }
         inOrder = keys.values().toArray(Key[]::new);
+        slots = new String[4 * Integer.highestOneBit(inOrder.length + 1)];
+        indexes = new int[slots.length];
         for (int i = 0; i < inOrder.length; i++) {
-            indexes.put(inOrder[i].name(), i);
+            int slot = slot(inOrder[i].name());
+            slots[slot] = inOrder[i].name();
+            indexes[slot] = i;
         }
         holding = keys.values().stream()
                 .filter(key -> key.holds() == Holds.QUANTITY || key.holds() == Holds.OBJECT)
@@ -145,7 +153,18 @@ public final class Shape {
 
     /** The place of a key in the order of the record; -1 when there is no such key. */
     public int indexOf(String name) {
-        return indexes.getOrDefault(name, -1);
+        int slot = slot(name);
+        return slots[slot] == null ? -1 : indexes[slot];
+    }
+
+    /** The slot of a name, or the free one where it would be; at least half of the slots are free. */
+    private int slot(String name) {
+        int hash = name.hashCode();
+        int slot = (hash ^ hash >>> 16) & slots.length - 1;
+        while (slots[slot] != null && !slots[slot].equals(name)) {
+            slot = slot + 1 & slots.length - 1;
+        }
+        return slot;
     }
 
     /** The keys below which readings may lie. */
