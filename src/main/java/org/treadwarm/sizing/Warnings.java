@@ -15,6 +15,9 @@ import org.treadwarm.sizing.Sizing.Warning;
 import org.treadwarm.survey.Air;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.Bridging;
+import org.treadwarm.survey.HeatedFloor;
+import org.treadwarm.survey.Heater;
+import org.treadwarm.survey.HeaterKind;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Readings;
@@ -130,6 +133,23 @@ final class Warnings {
                         "Look both up again for the place.");
             }
         });
+        if (survey.site().heatSourceDrop().isPresent()
+                && survey.rooms().stream().noneMatch(Warnings::isHeatedByWater)) {
+            add(
+                    "drop-without-effect",
+                    "/site/heatSourceDrop",
+                    "The pressure drop of the heat source has no effect.",
+                    "It counts for the pump, and no room of the survey has warm water in its floor.",
+                    "Leave it out, or say which floors are heated by water.");
+        }
+    }
+
+    private static boolean isHeatedByWater(Room room) {
+        return room.heatedFloor()
+                .flatMap(HeatedFloor::heater)
+                .map(Heater::kind)
+                .filter(HeaterKind.WATER::equals)
+                .isPresent();
     }
 
     private void assemblies() {

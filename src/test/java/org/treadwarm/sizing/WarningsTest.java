@@ -37,6 +37,7 @@ class WarningsTest {
                 "/rooms/0/height | 1.5 | unusual-reading | /rooms/0/height",
                 "/rooms/0/air/changeRate | 6 | unusual-reading | /rooms/0/air/changeRate",
                 "/site/annualMeanTemperature | -10 | outdoor-above-annual-mean | /site/outdoorTemperature",
+                "/site/heatSourceDrop | '10 kPa' | drop-without-effect | /site/heatSourceDrop",
                 "/assemblies/party wall/uValue | 8 | unusual-u-value | /assemblies/party wall",
                 "/assemblies/shed wall/layers/1/thickness | 0.95 | unusual-u-value | /assemblies/shed wall",
                 "/assemblies/shed wall/layers/1/bridging/conductivity | 50 | bridging-limits-far-apart | /assemblies/shed wall/layers",

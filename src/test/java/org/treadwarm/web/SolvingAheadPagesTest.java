@@ -147,6 +147,26 @@ class SolvingAheadPagesTest {
     }
 
     @Test
+    void aDraftThatHadToWaitStillSaysThatItWasKept() {
+        ObjectNode survey = job.document().deepCopy();
+        survey.withArray("/rooms").addObject().put("name", "annex");
+        job = server.job("half a draft", survey);
+        String annex = "/jobs/" + job.id() + "/rooms/"
+                + job.document().at("/rooms/2/id").textValue();
+        Page typed = visitor.open(back(cancelled(progress(visitor.ask(annex)))));
+
+        Page waiting = progress(visitor.send(
+                typed.form("revision").type("/rooms/2/height", "2.4 m").press("save")));
+        free.run();
+
+        Page draft = visitor.open(waiting.address());
+        assertThat(draft.address()).startsWith(annex);
+        assertThat(draft.text()).contains("Kept as a draft.");
+        assertThat(draft.value("/rooms/2/height")).isEqualTo("2.4");
+        assertThat(visitor.open(annex).text()).doesNotContain("Kept as a draft.");
+    }
+
+    @Test
     void oneRoomKeepsWhatWasTypedThroughTheWait() {
         free.run();
         Page start = visitor.open("/one-room");

@@ -27,6 +27,11 @@ final class PartPages {
     private static final String NAME_ERROR = "name-error";
     private static final String TRIES = "tries";
     private static final int MOST_TRIES = 20;
+    private static final String DRAFT_NOTICE =
+            "Kept as a draft. What is marked must be put right before it can be sized.";
+
+    /** In the query of a page that is come to after a draft was kept. */
+    private static final String KEPT_AS_DRAFT = "kept=draft";
 
     private final JobDesk desk;
     private final Visitors visitors;
@@ -62,7 +67,7 @@ final class PartPages {
                     job.get(),
                     job.get().document(),
                     part.get(),
-                    "",
+                    KEPT_AS_DRAFT.equals(ctx.queryString()) && job.get().draft() ? DRAFT_NOTICE : "",
                     job.get().revision());
         }
     }
@@ -213,17 +218,14 @@ final class PartPages {
         if (action.equals("save") && problems) {
             String address = Links.part(job.id(), part.kind(), key);
             if (Answer.needsFloors(now.get())
-                    && ahead.waits(ctx, saved.document(), address, address + "?" + SolvingAhead.UNSIZED)) {
+                    && ahead.waits(
+                            ctx,
+                            saved.document(),
+                            address + "?" + KEPT_AS_DRAFT,
+                            address + "?" + SolvingAhead.UNSIZED)) {
                 return;
             }
-            show(
-                    ctx,
-                    422,
-                    saved,
-                    saved.document(),
-                    now.get(),
-                    "Kept as a draft. What is marked must be put right before it can be sized.",
-                    saved.revision());
+            show(ctx, 422, saved, saved.document(), now.get(), DRAFT_NOTICE, saved.revision());
         } else {
             String anchor = Part.anchor(action).map(id -> "#" + id).orElse("");
             ctx.redirect(Links.part(job.id(), part.kind(), key) + anchor, HttpStatus.SEE_OTHER);
