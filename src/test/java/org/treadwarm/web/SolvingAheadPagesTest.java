@@ -162,7 +162,7 @@ class SolvingAheadPagesTest {
         Page draft = visitor.open(waiting.address());
         assertThat(draft.address()).startsWith(annex);
         assertThat(draft.text()).contains("Kept as a draft.");
-        assertThat(draft.value("/rooms/2/height")).isEqualTo("2.4");
+        assertThat(draft.value("/rooms/2/height")).isEqualTo("2.4 m");
         assertThat(visitor.open(annex).text()).doesNotContain("Kept as a draft.");
     }
 
