@@ -131,6 +131,10 @@ class MutatedRequestsTest {
                 RawRequest.with("POST", at + "/rooms", key, room),
                 RawRequest.with("PUT", at + "/rooms/studio-1", key, room).header("If-Match", "\"none\""),
                 RawRequest.get(at + "/rooms/studio-1", key).method("DELETE").header("If-Match", "\"none\""),
+                RawRequest.get(at + "/tables/rooms", key),
+                RawRequest.get(at + "/tables/results", key),
+                table(at + "/tables/rooms?preview=true", key, "room,height [m]\nstudio,3.3\n"),
+                table(at + "/tables/openings", key, "room;surface;opening;area [m2]\nstudio;north wall;sash;1,7\n"),
                 RawRequest.get(at + "/revisions/1/changes", key),
                 RawRequest.with("POST", at + "/revisions/1/restore", key, "").header("If-Match", "\"1\""),
                 RawRequest.with("POST", at + "/copy", key, ""),
@@ -141,6 +145,15 @@ class MutatedRequestsTest {
                         "/api/v1/wall-feet",
                         key,
                         WallFeetApiTest.question().toString()));
+    }
+
+    private static RawRequest table(String path, String key, String text) {
+        return new RawRequest(
+                        "POST",
+                        path,
+                        List.of("Host: 127.0.0.1", "Authorization: Bearer " + key, "Content-Type: text/csv"),
+                        text)
+                .header("If-Match", "*");
     }
 
     /** Whoever is signed out or loses the account by one of them has a session of its own for that. */
