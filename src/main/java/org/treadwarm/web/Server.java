@@ -31,7 +31,9 @@ import org.treadwarm.web.security.Visitors;
 public final class Server implements AutoCloseable {
     private static final Logger LOG = LoggerFactory.getLogger(Server.class);
     private static final Duration IDLE = Duration.ofSeconds(30);
-    private static final long LARGEST_BODY = 16L * 1024 * 1024;
+
+    /** The largest body of any request, bytes. */
+    static final long LARGEST_BODY = 16L * 1024 * 1024;
 
     private final Javalin javalin;
 
