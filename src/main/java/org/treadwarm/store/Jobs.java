@@ -123,11 +123,11 @@ public final class Jobs {
                 .list());
     }
 
-    /** The newest revision of every job, the most recently changed job first. */
+    /** The newest revision of every job, the one saved last first. */
     public List<RevisionHeader> list() {
         return database.read(handle -> handle.createQuery("select " + HEADER_COLUMNS
                         + " from job join revision on revision.job_id = job.id where " + NEWEST
-                        + " order by saved_at desc, job_id")
+                        + " order by save_number desc")
                 .map((row, context) -> Row.of(row, context).header())
                 .list());
     }
@@ -160,7 +160,8 @@ public final class Jobs {
     private static void insert(Handle handle, RevisionHeader header, Manifest manifest) {
         Contents.add(handle, manifest);
         handle.createUpdate("insert into revision (" + HEADER_COLUMNS
-                        + ") values (:jobId, :revision, :name, :draft, :manifest, :savedAt, :savedBy, :note)")
+                        + ", save_number) select :jobId, :revision, :name, :draft, :manifest, :savedAt, :savedBy, :note,"
+                        + " coalesce(max(save_number), 0) + 1 from revision")
                 .bind("jobId", header.jobId())
                 .bind("revision", header.revision())
                 .bind("name", header.name())

@@ -107,8 +107,7 @@ class MutatedRequestsTest {
                 RawRequest.with("POST", "/api/v1/sizings/batch", key, "{\"surveys\": [" + survey + ", {}]}"),
                 RawRequest.with(
                         "POST", "/api/v1/sections", key, SectionsApiTest.cable().toString()),
-                RawRequest.get(jobs + "?limit=1&cursor=am9icyAxIDEgYWFhYWFhYWFhYWFh", key)
-                        .header("X-Request-Id", "request-0001"),
+                RawRequest.get(jobs + "?limit=1&cursor=am9icyA1IDM", key).header("X-Request-Id", "request-0001"),
                 RawRequest.get(jobs + "/" + job + "/revisions?limit=1&cursor=cmV2aXNpb25zIDI", key),
                 RawRequest.get("/api/v1/materials?find=o&limit=3&cursor=bWF0ZXJpYWxzIDM", key),
                 RawRequest.get("/metrics", key),

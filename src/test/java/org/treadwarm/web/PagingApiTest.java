@@ -78,6 +78,23 @@ class PagingApiTest {
     }
 
     @Test
+    void givesEveryJobOnceThoughTheyAreSavedMeanwhile() {
+        List<String> before =
+                server.desk().list().stream().map(RevisionHeader::jobId).toList();
+        Response begin = api.with(Scope.READ).queryParam("limit", 2).get("/jobs");
+        for (String id : List.of(before.get(1), before.get(4))) {
+            Job job = server.desk().current(id).orElseThrow();
+            server.desk().save(id, job.revision(), job.name(), job.document(), Change.by("tests"));
+        }
+        server.job("begun meanwhile", Document.mapper().createObjectNode());
+
+        List<String> told = new ArrayList<>(begin.<List<String>>path("jobs.id"));
+        String next = begin.path("next");
+        told.addAll(walk(next.substring("/api/v1".length()), 2, "jobs", "id"));
+        assertThat(told).isEqualTo(before);
+    }
+
+    @Test
     void givesEveryRevisionOnce() {
         assertThat(walk("/jobs/" + first.id() + "/revisions", "revisions", "revision"))
                 .containsExactly("5", "4", "3", "2", "1");
@@ -152,6 +169,7 @@ class PagingApiTest {
         "/jobs, %%%",
         "/materials, cmV2aXNpb25zIDE",
         "/jobs, cmV2aXNpb25zIDE",
+        "/jobs, am9icyAyMDI2LTEyLTAyVDA5OjAwOjAwLjAwMFpfYWFhYWFhYWFhYWFh",
         "/sheets, c2hlZXRzIDIwMjY"
     })
     void refusesForeignCursors(String path, String cursor) {
@@ -160,7 +178,8 @@ class PagingApiTest {
                 .get(path)
                 .then()
                 .statusCode(400)
-                .body("detail", containsString("cursor"));
+                .body("detail", containsString("cursor"))
+                .body("detail", containsString("begin the list again"));
     }
 
     @Test

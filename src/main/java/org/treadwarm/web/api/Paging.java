@@ -61,7 +61,8 @@ record Paging(String list, int limit, Optional<Cursor> after) {
         if (!parts.matches()) {
             refuse(
                     ctx,
-                    "cursor is a text from the \"next\" of an answer of this list, not \"" + shortened(given) + "\".");
+                    "cursor is a text from the \"next\" of an answer of this list, not \"" + shortened(given)
+                            + "\". If it was given before the program was renewed, begin the list again.");
             return Optional.empty();
         }
         return Optional.of(new Paging(name, Integer.parseInt(limit), Optional.of(new Cursor(parts))));
