@@ -9,6 +9,10 @@ import org.jdbi.v3.core.statement.Query;
 
 /** Finding jobs by the words noted for them, and putting them away without losing them. */
 public final class JobShelf {
+    private static final String LISTED = Jobs.HEADER_COLUMNS + ", archived_at";
+    private static final String LAST_BEFORE = "(select max(early.save_number) from revision early"
+            + " where early.job_id = job.id and early.save_number <= :begin)";
+
     private final Database database;
     private final Audit audit;
     private final Clock clock;
@@ -48,8 +52,8 @@ public final class JobShelf {
     /** A job, and the number of its last save before the list began. */
     private record Told(JobListing job, long save) {}
 
-    /** Changes come one after the other, so what is saved later has a higher number than this. */
-    private static long lastSave(Handle handle) {
+    /** The number of the last save, 0 for none. Changes come one after the other, so what is saved later has a higher one. */
+    static long lastSave(Handle handle) {
         return handle.createQuery("select coalesce(max(save_number), 0) from revision")
                 .mapTo(Long.class)
                 .one();
@@ -60,15 +64,14 @@ public final class JobShelf {
                 .map(each -> " and archived_at is " + (each ? "not null" : "null"))
                 .orElse("");
         boolean anyWords = search.text().isBlank();
-        Query query = handle.createQuery("select " + Jobs.HEADER_COLUMNS + ", archived_at, told_by"
-                + " from (select job_id as job, revision as number, save_number as told_by from revision"
-                + " where save_number < :before and save_number <= :begin) told"
-                + " join job on job.id = told.job join revision on revision.job_id = told.job"
-                + " where " + Jobs.NEWEST
-                + " and not exists (select 1 from revision later where later.job_id = told.job"
-                + " and later.revision > told.number and later.save_number <= :begin)"
-                + archived
-                + (anyWords ? "" : " and words like :words escape '!'")
+        String matches = archived + (anyWords ? "" : " and words like :words escape '!'");
+        String unchanged = "select " + LISTED + ", last_save as told_by" + Jobs.NEWEST
+                + " where last_save <= :begin and last_save < :before" + matches
+                + " order by last_save desc limit :limit";
+        String savedSince = "select " + LISTED + ", " + LAST_BEFORE + " as told_by" + Jobs.NEWEST
+                + " where last_save > :begin" + matches;
+        Query query = handle.createQuery("select * from (" + unchanged + ") unchanged union all"
+                + " select * from (" + savedSince + ") saved_since where told_by < :before"
                 + " order by told_by desc limit :limit");
         return anyWords
                 ? query
@@ -81,6 +84,14 @@ public final class JobShelf {
 
     private static String folded(String text) {
         return text.toLowerCase(Locale.ROOT);
+    }
+
+    /** Notes the number of a job's last save, within that save. */
+    static void saved(Handle handle, String id, long saveNumber) {
+        handle.createUpdate("update job set last_save = :number where id = :id")
+                .bind("id", id)
+                .bind("number", saveNumber)
+                .execute();
     }
 
     /** Notes what a job is found by, within a change of it. */

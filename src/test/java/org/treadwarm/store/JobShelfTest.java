@@ -225,6 +225,8 @@ class JobShelfTest {
         DataFile tables = new DataFile(home);
         tables.execute("drop index revision_save_number");
         tables.execute("alter table revision drop column save_number");
+        tables.execute("drop index job_last_save");
+        tables.execute("alter table job drop column last_save");
         tables.execute("create index revision_saved_at on revision (saved_at, job_id)");
         tables.execute("delete from flyway_schema_history where version = '7'");
 
