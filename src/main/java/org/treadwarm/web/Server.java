@@ -185,9 +185,7 @@ public final class Server implements AutoCloseable {
     }
 
     private static boolean isApi(Context ctx) {
-        return ctx.path().startsWith("/api/")
-                || ctx.path().equals("/api")
-                || ctx.path().equals("/metrics");
+        return ctx.path().startsWith("/api/") || ctx.path().equals("/metrics");
     }
 
     private static void answerPlainly(Context ctx, int status, String kind, String title) {

@@ -105,7 +105,7 @@ class EveryPageTest {
                 broken + "/assemblies/new%20sash");
         return Stream.concat(
                 Stream.concat(jobs, Stream.concat(service(), sheets())),
-                Stream.of("/one-room", "/materials", "/reading-help", "/method", "/nothing-here", "/sign-in"));
+                Stream.of("/one-room", "/materials", "/reading-help", "/method", "/api", "/nothing-here", "/sign-in"));
     }
 
     /** The first wall foot of the demo job that can be solved. */

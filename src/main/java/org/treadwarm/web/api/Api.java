@@ -45,6 +45,11 @@ public final class Api {
         static final byte[] TEXT = OpenApi.document();
     }
 
+    /** The description of the API: OpenAPI 3.1 as UTF-8 text. */
+    public static byte[] description() {
+        return Description.TEXT.clone();
+    }
+
     /** What {@code GET /api/v1/health} says. */
     record Health(String status, String method) {}
 

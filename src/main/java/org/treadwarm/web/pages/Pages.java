@@ -41,6 +41,7 @@ public final class Pages {
     private final WallFootPages wallFeet;
     private final MethodPage method;
     private final SolvingAhead ahead;
+    private final ContractPage contract;
     private final TablePages tables = new TablePages();
 
     public Pages(Store store, JobDesk desk, SheetDesk sheetDesk, Visitors visitors, Computations computations) {
@@ -64,6 +65,7 @@ public final class Pages {
         this.sheetLinks = new SheetLinkPages(store, visitors, view);
         this.quick = new QuickPages(desk, visitors, view, ahead);
         this.method = new MethodPage(computations, view);
+        this.contract = new ContractPage(visitors, view);
         this.wallFeet = new WallFootPages(desk, visitors, view, computations, computing);
     }
 
@@ -111,6 +113,7 @@ public final class Pages {
                 ctx -> view.show(ctx, 200, "materials", tables.materials(ctx.queryParam("find"))),
                 Access.SURVEYOR);
         routes.get("/reading-help", ctx -> view.show(ctx, 200, "reading-help", tables.readingHelp()), Access.SURVEYOR);
+        routes.get("/api", contract::show, Access.SURVEYOR);
         routes.get("/method", method::show, Access.SURVEYOR);
         routes.post("/method", form(method::change), Access.SURVEYOR);
         sheets(routes);

@@ -1,0 +1,209 @@
+package org.treadwarm.web.pages;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+import org.treadwarm.web.pages.ContractTypes.Field;
+import org.treadwarm.web.pages.ContractTypes.Term;
+
+/** The description of the API as what its page shows. */
+final class ContractView {
+    private static final Set<String> METHODS = Set.of("get", "put", "post", "delete");
+    private static final Pattern SCOPE = Pattern.compile("(?:S|else s)cope (size|read|write)\\.");
+
+    private final JsonNode description;
+    private final ContractTypes types;
+
+    ContractView(JsonNode description) {
+        this.description = description;
+        this.types = new ContractTypes(description);
+    }
+
+    /** What belongs together. */
+    public record Subject(String name, String words, List<Call> calls) {}
+
+    /**
+     * A route.
+     *
+     * @param scope the scope that a key needs; empty where none is needed
+     * @param usual the statuses that are told once for all routes, in words
+     */
+    public record Call(
+            String id,
+            String method,
+            String path,
+            String words,
+            String scope,
+            List<Field> parameters,
+            Taken body,
+            List<Answer> answers,
+            String usual,
+            String example) {}
+
+    /**
+     * The body that a route takes.
+     *
+     * @param media its media type; empty for no body
+     */
+    public record Taken(String media, String words, List<Term> type, List<Field> fields) {}
+
+    /** What a route answers with one status. */
+    public record Answer(String status, String words, String media, List<Term> type, String headers) {}
+
+    /** A document that is sent or answered. */
+    public record Shown(String name, String words, List<Field> fields) {}
+
+    /** The routes by subject. */
+    List<Subject> subjects(String origin) {
+        Map<String, Integer> usual = usual();
+        List<Subject> subjects = new ArrayList<>();
+        for (JsonNode tag : description.path("tags")) {
+            List<Call> calls = new ArrayList<>();
+            eachCall((path, method, call) -> {
+                if (call.at("/tags/0").equals(tag.path("name"))) {
+                    calls.add(call(path, method, call, usual, origin));
+                }
+            });
+            subjects.add(new Subject(
+                    tag.path("name").asText(), tag.path("description").asText(), calls));
+        }
+        return subjects;
+    }
+
+    /** Statuses that most routes answer with the same words. */
+    List<Answer> usualAnswers() {
+        Map<String, Integer> usual = usual();
+        Map<String, Answer> found = new TreeMap<>();
+        eachCall((path, method, call) -> call.path("responses").properties().forEach(each -> {
+            if (usual.containsKey(key(each))) {
+                found.putIfAbsent(each.getKey(), answer(each.getKey(), each.getValue()));
+            }
+        }));
+        return List.copyOf(found.values());
+    }
+
+    /** Every document by its name. */
+    List<Shown> documents() {
+        return description.at("/components/schemas").properties().stream()
+                .sorted(Map.Entry.comparingByKey())
+                .map(each -> new Shown(
+                        each.getKey(), each.getValue().path("description").asText(), types.fields(each.getValue())))
+                .toList();
+    }
+
+    private interface EachCall {
+        void see(String path, String method, JsonNode call);
+    }
+
+    private void eachCall(EachCall seen) {
+        description
+                .path("paths")
+                .properties()
+                .forEach(path -> path.getValue().properties().stream()
+                        .filter(each -> METHODS.contains(each.getKey()))
+                        .forEach(each -> seen.see(path.getKey(), each.getKey(), each.getValue())));
+    }
+
+    private Map<String, Integer> usual() {
+        Map<String, Integer> counts = new HashMap<>();
+        int[] calls = {0};
+        eachCall((path, method, call) -> {
+            calls[0]++;
+            call.path("responses").properties().forEach(each -> counts.merge(key(each), 1, Integer::sum));
+        });
+        counts.values().removeIf(count -> count * 2 <= calls[0]);
+        return counts;
+    }
+
+    private static String key(Map.Entry<String, JsonNode> response) {
+        return response.getKey() + " " + response.getValue().path("description").asText();
+    }
+
+    private Call call(String path, String method, JsonNode call, Map<String, Integer> usual, String origin) {
+        List<JsonNode> parameters = new ArrayList<>();
+        description.path("paths").path(path).path("parameters").forEach(parameters::add);
+        call.path("parameters").forEach(parameters::add);
+        List<Answer> own = new ArrayList<>();
+        List<String> others = new ArrayList<>();
+        call.path("responses").properties().stream()
+                .sorted(Map.Entry.comparingByKey())
+                .forEach(each -> {
+                    if (usual.containsKey(key(each))) {
+                        others.add(each.getKey());
+                    } else {
+                        own.add(answer(each.getKey(), each.getValue()));
+                    }
+                });
+        Taken body = body(call.path("requestBody"));
+        return new Call(
+                call.path("operationId").asText(),
+                method.toUpperCase(Locale.ROOT),
+                path,
+                call.path("summary").asText(),
+                scope(call),
+                parameters.stream().map(this::parameter).toList(),
+                body,
+                own,
+                String.join(", ", others),
+                new ContractExample(
+                                origin,
+                                method,
+                                path,
+                                parameters,
+                                body.media(),
+                                !scope(call).isEmpty())
+                        .text());
+    }
+
+    private static String scope(JsonNode call) {
+        Matcher scope = SCOPE.matcher(call.path("summary").asText());
+        return !call.path("security").isEmpty() && scope.find() ? scope.group(1) : "";
+    }
+
+    private Field parameter(JsonNode parameter) {
+        Field field = types.field(
+                parameter.path("name").asText(),
+                parameter.path("schema"),
+                parameter.path("required").asBoolean());
+        return field.saying(parameter.path("in").asText() + ": "
+                + parameter.path("description").asText());
+    }
+
+    private Taken body(JsonNode body) {
+        if (body.isMissingNode()) {
+            return new Taken("", "", List.of(), List.of());
+        }
+        Map.Entry<String, JsonNode> content =
+                body.path("content").properties().iterator().next();
+        JsonNode schema = content.getValue().path("schema");
+        String words =
+                body.path("description").asText(schema.path("description").asText());
+        return new Taken(
+                content.getKey(), words, types.type(schema), schema.has("$ref") ? List.of() : types.fields(schema));
+    }
+
+    private Answer answer(String status, JsonNode response) {
+        List<Map.Entry<String, JsonNode>> contents =
+                List.copyOf(response.path("content").properties());
+        String headers = String.join(
+                ", ",
+                response.path("headers").properties().stream()
+                        .map(Map.Entry::getKey)
+                        .toList());
+        return new Answer(
+                status,
+                response.path("description").asText(),
+                contents.isEmpty() ? "" : contents.get(0).getKey(),
+                contents.isEmpty()
+                        ? List.of()
+                        : types.type(contents.get(0).getValue().path("schema")),
+                headers);
+    }
+}
