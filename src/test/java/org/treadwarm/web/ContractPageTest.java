@@ -88,6 +88,8 @@ class ContractPageTest {
                 .contains("curl \"" + server.origin() + "/api/v1/jobs/$ID/tables/rooms\"")
                 .contains("--data-binary @table.csv");
         assertThat(page.id("usual")).isPresent();
+        assertThat(page.text()).contains("at most so many rows (query; at least 1; at most 200; 100 where left out)");
+        assertThat(page.text()).contains("reading or <a href=\"#document-WarmUpGoal\">WarmUpGoal</a>");
     }
 
     @Test

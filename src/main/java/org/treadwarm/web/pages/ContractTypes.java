@@ -3,6 +3,7 @@ package org.treadwarm.web.pages;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -38,7 +39,7 @@ final class ContractTypes {
     /** A value in a document, or a parameter. */
     public record Field(String name, List<Term> type, boolean required, String words) {
         Field saying(String other) {
-            return new Field(name, type, required, words.isEmpty() ? other : other + " (" + words + ")");
+            return new Field(name, type, required, other);
         }
     }
 
@@ -78,16 +79,21 @@ final class ContractTypes {
     }
 
     private List<Term> alternatives(JsonNode all) {
-        List<Term> words = new ArrayList<>();
-        Set<List<Term>> told = new HashSet<>();
+        boolean reading = false;
         for (JsonNode each : all) {
-            List<Term> type = type(each);
-            if (told.add(type)) {
-                if (!words.isEmpty()) {
-                    words.add(Term.word(" or "));
-                }
-                words.addAll(type);
+            reading |= each.at("/properties/reading").isObject();
+        }
+        Set<List<Term>> told = new LinkedHashSet<>();
+        for (JsonNode each : all) {
+            boolean wayOfReading = reading && !each.has("$ref");
+            told.add(wayOfReading ? List.of(Term.word("reading")) : type(each));
+        }
+        List<Term> words = new ArrayList<>();
+        for (List<Term> type : told) {
+            if (!words.isEmpty()) {
+                words.add(Term.word(" or "));
             }
+            words.addAll(type);
         }
         return words;
     }
@@ -113,9 +119,6 @@ final class ContractTypes {
     /** A value with its bounds in words. */
     Field field(String name, JsonNode schema, boolean required) {
         List<String> words = new ArrayList<>();
-        if (schema.has("description")) {
-            words.add(schema.path("description").asText());
-        }
         bound(words, schema, "minimum", "at least ", "");
         bound(words, schema, "maximum", "at most ", "");
         bound(words, schema, "minLength", "at least ", " characters");
@@ -124,6 +127,11 @@ final class ContractTypes {
         bound(words, schema, "maxItems", "at most ", " of them");
         bound(words, schema, "pattern", "like ", "");
         bound(words, schema, "default", "", " where left out");
+        words.replaceAll(each -> each.equals("at least 1 characters") ? "not empty" : each);
+        String description = schema.path("description").asText();
+        if (!description.isEmpty()) {
+            words.add(0, words.isEmpty() ? description : description.replaceFirst("\\.$", ""));
+        }
         return new Field(name, type(schema), required, String.join("; ", words));
     }
 

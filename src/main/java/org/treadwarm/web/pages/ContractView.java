@@ -32,7 +32,7 @@ final class ContractView {
     /**
      * A route.
      *
-     * @param scope the scope that a key needs; empty where none is needed
+     * @param key what key it needs, in words
      * @param usual the statuses that are told once for all routes, in words
      */
     public record Call(
@@ -40,12 +40,17 @@ final class ContractView {
             String method,
             String path,
             String words,
-            String scope,
+            String key,
             List<Field> parameters,
             Taken body,
             List<Answer> answers,
             String usual,
-            String example) {}
+            String example) {
+        /** The words up to where they go into detail. */
+        public String briefly() {
+            return words.split("[.;:,] ", 2)[0].replaceFirst("\\.$", "");
+        }
+    }
 
     /**
      * The body that a route takes.
@@ -146,8 +151,8 @@ final class ContractView {
                 call.path("operationId").asText(),
                 method.toUpperCase(Locale.ROOT),
                 path,
-                call.path("summary").asText(),
-                scope(call),
+                call.path("summary").asText().replaceFirst(" Scope [a-z]+\\.", ""),
+                keyWords(call),
                 parameters.stream().map(this::parameter).toList(),
                 body,
                 own,
@@ -167,13 +172,24 @@ final class ContractView {
         return !call.path("security").isEmpty() && scope.find() ? scope.group(1) : "";
     }
 
+    private static String keyWords(JsonNode call) {
+        String scope = scope(call);
+        if (scope.isEmpty()) {
+            return "Needs no key.";
+        }
+        boolean withoutToo = call.at("/security/0").isEmpty();
+        String least = "a key of the scope " + scope + (scope.equals("write") ? "" : " or wider");
+        return withoutToo ? "Takes " + least + ", or none where that is said above." : "Needs " + least + ".";
+    }
+
     private Field parameter(JsonNode parameter) {
         Field field = types.field(
                 parameter.path("name").asText(),
                 parameter.path("schema"),
                 parameter.path("required").asBoolean());
-        return field.saying(parameter.path("in").asText() + ": "
-                + parameter.path("description").asText());
+        String bounds = field.words().isEmpty() ? "" : "; " + field.words();
+        String description = parameter.path("description").asText().replaceFirst("\\.$", "");
+        return field.saying(description + " (" + parameter.path("in").asText() + bounds + ")");
     }
 
     private Taken body(JsonNode body) {
