@@ -2,14 +2,13 @@ package org.treadwarm.web.pages;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
-import java.util.TreeMap;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.treadwarm.web.pages.ContractAnswers.Answer;
 import org.treadwarm.web.pages.ContractTypes.Field;
 import org.treadwarm.web.pages.ContractTypes.Term;
 
@@ -20,10 +19,14 @@ final class ContractView {
 
     private final JsonNode description;
     private final ContractTypes types;
+    private final ContractAnswers answers;
 
     ContractView(JsonNode description) {
         this.description = description;
         this.types = new ContractTypes(description);
+        List<JsonNode> calls = new ArrayList<>();
+        eachCall((path, method, call) -> calls.add(call));
+        this.answers = new ContractAnswers(calls, types);
     }
 
     /** What belongs together. */
@@ -59,21 +62,17 @@ final class ContractView {
      */
     public record Taken(String media, String words, List<Term> type, List<Field> fields) {}
 
-    /** What a route answers with one status. */
-    public record Answer(String status, String words, String media, List<Term> type, String headers) {}
-
     /** A document that is sent or answered. */
     public record Shown(String name, String words, List<Field> fields) {}
 
     /** The routes by subject. */
     List<Subject> subjects(String origin) {
-        Map<String, Integer> usual = usual();
         List<Subject> subjects = new ArrayList<>();
         for (JsonNode tag : description.path("tags")) {
             List<Call> calls = new ArrayList<>();
             eachCall((path, method, call) -> {
                 if (call.at("/tags/0").equals(tag.path("name"))) {
-                    calls.add(call(path, method, call, usual, origin));
+                    calls.add(call(path, method, call, origin));
                 }
             });
             subjects.add(new Subject(
@@ -84,14 +83,7 @@ final class ContractView {
 
     /** Statuses that most routes answer with the same words. */
     List<Answer> usualAnswers() {
-        Map<String, Integer> usual = usual();
-        Map<String, Answer> found = new TreeMap<>();
-        eachCall((path, method, call) -> call.path("responses").properties().forEach(each -> {
-            if (usual.containsKey(key(each))) {
-                found.putIfAbsent(each.getKey(), answer(each.getKey(), each.getValue()));
-            }
-        }));
-        return List.copyOf(found.values());
+        return answers.usual();
     }
 
     /** Every document by its name. */
@@ -116,36 +108,10 @@ final class ContractView {
                         .forEach(each -> seen.see(path.getKey(), each.getKey(), each.getValue())));
     }
 
-    private Map<String, Integer> usual() {
-        Map<String, Integer> counts = new HashMap<>();
-        int[] calls = {0};
-        eachCall((path, method, call) -> {
-            calls[0]++;
-            call.path("responses").properties().forEach(each -> counts.merge(key(each), 1, Integer::sum));
-        });
-        counts.values().removeIf(count -> count * 2 <= calls[0]);
-        return counts;
-    }
-
-    private static String key(Map.Entry<String, JsonNode> response) {
-        return response.getKey() + " " + response.getValue().path("description").asText();
-    }
-
-    private Call call(String path, String method, JsonNode call, Map<String, Integer> usual, String origin) {
+    private Call call(String path, String method, JsonNode call, String origin) {
         List<JsonNode> parameters = new ArrayList<>();
         description.path("paths").path(path).path("parameters").forEach(parameters::add);
         call.path("parameters").forEach(parameters::add);
-        List<Answer> own = new ArrayList<>();
-        List<String> others = new ArrayList<>();
-        call.path("responses").properties().stream()
-                .sorted(Map.Entry.comparingByKey())
-                .forEach(each -> {
-                    if (usual.containsKey(key(each))) {
-                        others.add(each.getKey());
-                    } else {
-                        own.add(answer(each.getKey(), each.getValue()));
-                    }
-                });
         Taken body = body(call.path("requestBody"));
         return new Call(
                 call.path("operationId").asText(),
@@ -155,8 +121,8 @@ final class ContractView {
                 keyWords(call),
                 parameters.stream().map(this::parameter).toList(),
                 body,
-                own,
-                String.join(", ", others),
+                answers.own(call),
+                answers.usualOf(call),
                 new ContractExample(
                                 origin,
                                 method,
@@ -203,23 +169,5 @@ final class ContractView {
                 body.path("description").asText(schema.path("description").asText());
         return new Taken(
                 content.getKey(), words, types.type(schema), schema.has("$ref") ? List.of() : types.fields(schema));
-    }
-
-    private Answer answer(String status, JsonNode response) {
-        List<Map.Entry<String, JsonNode>> contents =
-                List.copyOf(response.path("content").properties());
-        String headers = String.join(
-                ", ",
-                response.path("headers").properties().stream()
-                        .map(Map.Entry::getKey)
-                        .toList());
-        return new Answer(
-                status,
-                response.path("description").asText(),
-                contents.isEmpty() ? "" : contents.get(0).getKey(),
-                contents.isEmpty()
-                        ? List.of()
-                        : types.type(contents.get(0).getValue().path("schema")),
-                headers);
     }
 }

@@ -52,8 +52,13 @@ final class JobPages {
         String after = query(ctx, "after");
         boolean known = List.of("", "archived", "all").contains(show);
         Optional<JobPlace> place = JobPlace.of(after);
-        if (!known || !after.isEmpty() && place.isEmpty() || find.length() > LONGEST_NAME) {
+        if (!known || find.length() > LONGEST_NAME) {
             missing(ctx, view);
+            return;
+        }
+        if (!after.isEmpty() && place.isEmpty()) {
+            String title = "This is no place in the list of jobs, or one of an earlier program; begin the list again";
+            view.show(ctx, 400, "fault", Map.of("title", title, "status", 400));
             return;
         }
         JobListings found = desk.find(new JobSearch(

@@ -39,17 +39,6 @@ final class TransferPages {
         this.view = view;
     }
 
-    /** A table that can be read in, with its columns in words. */
-    public record Incoming(String word, String columns) {
-        static Incoming of(TableKind kind) {
-            return new Incoming(
-                    kind.word(),
-                    String.join(
-                            ", ",
-                            kind.columns().stream().map(each -> each.header()).toList()));
-        }
-    }
-
     void show(Context ctx) {
         Optional<Job> job = desk.current(ctx.pathParam("job"));
         if (job.isEmpty()) {
@@ -62,7 +51,9 @@ final class TransferPages {
     private void show(Context ctx, int status, Job job, Map<String, Object> more) {
         Map<String, Object> model = new HashMap<>();
         model.put("job", job);
-        model.put("tables", Arrays.stream(TableKind.values()).map(Incoming::of).toList());
+        model.put(
+                "tables",
+                Arrays.stream(TableKind.values()).map(IncomingTable::of).toList());
         model.put("largest", TableFile.LARGEST_IN_WORDS);
         model.put("text", "");
         model.put("kind", "");
@@ -174,10 +165,7 @@ final class TransferPages {
         List<HistoryPages.Line> changes = !problems.isEmpty()
                 ? List.of()
                 : Differences.between(job.document(), after).stream()
-                        .map(each -> new HistoryPages.Line(
-                                labels.where(each),
-                                labels.value(each, each.before()),
-                                labels.value(each, each.after())))
+                        .map(each -> HistoryPages.Line.of(each, labels))
                         .toList();
         Map<String, Object> more = new HashMap<>();
         more.put("text", text);
