@@ -2,8 +2,6 @@ package org.treadwarm.web;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.net.Socket;
-import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
@@ -65,7 +63,7 @@ class MutatedRequestsTest {
             int refused = 0;
             for (int i = 0; i < MUTANTS; i++) {
                 RawRequest request = mutant(seeds.get(i % seeds.size()));
-                RawAnswer answer = send(server, request);
+                RawAnswer answer = request.sendTo(server);
                 if (answer.status() >= 300) {
                     refused++;
                 }
@@ -218,15 +216,5 @@ class MutatedRequestsTest {
             case 3 -> text.substring(0, from) + pick(ODD) + text.substring(to);
             default -> text.substring(0, from) + (char) random.nextInt(0x2000) + text.substring(to);
         };
-    }
-
-    private static RawAnswer send(RunningServer server, RawRequest request) throws Exception {
-        try (Socket socket = new Socket("127.0.0.1", server.port())) {
-            socket.setSoTimeout(30_000);
-            socket.getOutputStream().write(request.bytes());
-            socket.getOutputStream().flush();
-            socket.shutdownOutput();
-            return RawAnswer.of(new String(socket.getInputStream().readAllBytes(), StandardCharsets.UTF_8));
-        }
     }
 }

@@ -6,6 +6,7 @@ import static org.hamcrest.Matchers.containsString;
 import static org.hamcrest.Matchers.nullValue;
 
 import io.restassured.response.Response;
+import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -180,6 +181,16 @@ class PagingApiTest {
                 .statusCode(400)
                 .body("detail", containsString("cursor"))
                 .body("detail", containsString("begin the list again"));
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"/materials?find=oak%zz", "/jobs?limit=%", "/jobs?archived=%f"})
+    void refusesWhatCannotBeDecoded(String path) throws IOException {
+        RawAnswer answer =
+                RawRequest.get("/api/v1" + path, server.key(Scope.READ)).sendTo(server);
+
+        assertThat(answer.status()).isEqualTo(400);
+        assertThat(answer.body()).contains("is not encoded");
     }
 
     @Test

@@ -13,6 +13,7 @@ import static org.hamcrest.Matchers.nullValue;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import io.restassured.response.Response;
 import io.restassured.specification.RequestSpecification;
+import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import org.junit.jupiter.api.BeforeEach;
@@ -100,7 +101,7 @@ class TablesApiTest {
     }
 
     @Test
-    void aPreviewTellsTheSameAndKeepsNothing() {
+    void aPreviewTellsTheSameAndKeepsNothing() throws IOException {
         send(table(HIGHER).queryParam("preview", true), "\"1\"")
                 .then()
                 .statusCode(200)
@@ -116,6 +117,16 @@ class TablesApiTest {
                 .then()
                 .statusCode(422)
                 .body("errors[0].pointer", equalTo("/preview"));
+        RawAnswer garbled = new RawRequest(
+                        "POST",
+                        "/api/v1/jobs/" + job.id() + "/tables/rooms?preview=%zz",
+                        List.of("Host: 127.0.0.1", "Authorization: Bearer " + server.key(Scope.WRITE)),
+                        HIGHER)
+                .header("Content-Type", "text/csv")
+                .header("If-Match", "*")
+                .sendTo(server);
+        assertThat(garbled.status()).isEqualTo(422);
+        assertThat(revision()).isEqualTo(1);
     }
 
     @Test

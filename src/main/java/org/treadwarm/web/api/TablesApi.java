@@ -89,7 +89,10 @@ final class TablesApi {
 
     /** Whether the changes are only looked at; empty when the refusal has been written already. */
     private static Optional<Boolean> preview(Context ctx) {
-        String given = Optional.ofNullable(ctx.queryParam("preview")).orElse("false");
+        // What cannot be decoded has no value; taken for left out, it would keep what was only to be looked at.
+        String given = ctx.queryParamMap().containsKey("preview")
+                ? Optional.ofNullable(ctx.queryParam("preview")).orElse("what cannot be decoded")
+                : "false";
         if (given.equals("true") || given.equals("false")) {
             return Optional.of(given.equals("true"));
         }
