@@ -131,6 +131,8 @@ public final class Server implements AutoCloseable {
         config.jetty.modifyHttpConfiguration((HttpConfiguration http) -> {
             http.setSendServerVersion(false);
         });
+        // Else a table pasted beside the field for a file may have no more than 200 kB.
+        config.jetty.modifyServletContextHandler(context -> context.setMaxFormContentSize((int) LARGEST_BODY));
     }
 
     private static void faults(JavalinConfig config, Pages pages) {

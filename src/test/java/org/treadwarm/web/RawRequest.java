@@ -96,7 +96,11 @@ record RawRequest(String method, String path, List<String> headers, String body)
             socket.getOutputStream().write(bytes());
             socket.getOutputStream().flush();
             socket.shutdownOutput();
-            return RawAnswer.of(new String(socket.getInputStream().readAllBytes(), StandardCharsets.UTF_8));
+            String answer = new String(socket.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
+            if (answer.isEmpty()) {
+                throw new AssertionError("no answer to " + shown());
+            }
+            return RawAnswer.of(answer);
         }
     }
 

@@ -126,10 +126,23 @@ class TransferPagesTest {
 
     @Test
     void whereNoFileIsChosenWhatIsPastedCounts() {
-        Page seen = lookAtFile("room,height [m]\nstudio,3.3\n", "", new byte[0]);
+        Page seen = lookAtFile("room,remark\nstudio,Küche 20 °C\n", "", new byte[0]);
 
         assertThat(seen.status()).isEqualTo(200);
-        assertThat(seen.text()).contains("What the table would change");
+        assertThat(seen.text()).contains("What the table would change", "<td>Küche 20 °C</td>");
+    }
+
+    @Test
+    void muchMayBePastedBesideTheFieldForAFile() {
+        String table = "room,remark\n" + "studio,\n".repeat(150_000);
+        Page seen = lookAtFile(table, "", new byte[0]);
+
+        assertThat(seen.status()).isEqualTo(422);
+        assertThat(seen.text()).contains("up to 2000 rows");
+        Page tooMuch = lookAtFile("x".repeat(TableFile.LARGEST + 1), "", new byte[0]);
+        assertThat(tooMuch.status()).isEqualTo(422);
+        assertThat(tooMuch.id("table-rooms-error").orElseThrow().getTextContent())
+                .contains("too large");
     }
 
     static Stream<Arguments> badFiles() {
