@@ -155,12 +155,12 @@ public final class JobDesk {
         return jobs.revisions(id, limit, before);
     }
 
-    /** The newest revision of every job, the one changed last first. */
+    /** The newest revision of every job, the one saved last first. */
     public List<RevisionHeader> list() {
         return jobs.list();
     }
 
-    /** The jobs that match, the one changed last first: by name, names of rooms, and who surveyed. */
+    /** The jobs that match by name, names of rooms, and who surveyed, see {@link org.treadwarm.store.JobShelf#find}. */
     public JobListings find(JobSearch search) {
         for (String id : jobs.shelf().withoutWords()) {
             jobs.current(id)

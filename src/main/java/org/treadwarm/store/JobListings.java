@@ -4,8 +4,8 @@ import java.util.List;
 import java.util.Optional;
 
 /**
- * A page of jobs, the one changed last first.
+ * A page of jobs as they are now, the one that was saved last when the list began first.
  *
  * @param next where the next page begins; empty when this is the last one
  */
-public record JobListings(List<JobListing> jobs, Optional<String> next) {}
+public record JobListings(List<JobListing> jobs, Optional<JobPlace> next) {}

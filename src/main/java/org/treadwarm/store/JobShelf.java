@@ -9,6 +9,10 @@ import org.jdbi.v3.core.statement.Query;
 
 /** Finding jobs by the words noted for them, and putting them away without losing them. */
 public final class JobShelf {
+    private static final String LISTED = Jobs.HEADER_COLUMNS + ", archived_at";
+    private static final String LAST_BEFORE = "(select max(early.save_number) from revision early"
+            + " where early.job_id = job.id and early.save_number <= :begin)";
+
     private final Database database;
     private final Audit audit;
     private final Clock clock;
@@ -19,32 +23,59 @@ public final class JobShelf {
         this.clock = clock;
     }
 
-    /** A page of the jobs that match, the one changed last first. */
+    /**
+     * A page of the jobs that match. They come in the order of their last saves before the list began, the last first, so every
+     * job that was there then comes exactly once, whatever is saved meanwhile. Each is shown as it is now, and must match as it
+     * is now.
+     */
     public JobListings find(JobSearch search) {
-        String condition = Jobs.NEWEST
-                + search.archived()
-                        .map(archived -> " and archived_at is " + (archived ? "not null" : "null"))
-                        .orElse("")
-                + (search.text().isBlank() ? "" : " and words like :words escape '!'")
-                + (search.after().isPresent() ? " and (saved_at < :time or saved_at = :time and job_id > :job)" : "");
-        List<JobListing> found = database.read(handle -> {
-            Query query = handle.createQuery("select " + Jobs.HEADER_COLUMNS
-                            + ", archived_at from job join revision on revision.job_id = job.id where " + condition
-                            + " order by saved_at desc, job_id limit :limit")
-                    .bind("limit", search.limit() + 1);
-            if (!search.text().isBlank()) {
-                query.bind("words", "%" + escaped(folded(search.text().strip())) + "%");
-            }
-            search.afterTime().ifPresent(time -> query.bind("time", time));
-            search.afterJob().ifPresent(job -> query.bind("job", job));
-            return query.map((row, context) -> new JobListing(Jobs.header(row), row.getString("archived_at") != null))
+        return database.read(handle -> {
+            long begin = search.after().map(JobPlace::begin).orElseGet(() -> lastSave(handle));
+            long before = search.after().map(JobPlace::last).orElse(begin + 1);
+            List<Told> found = query(handle, search)
+                    .bind("begin", begin)
+                    .bind("before", before)
+                    .bind("limit", search.limit() + 1)
+                    .map((row, context) -> new Told(
+                            new JobListing(Jobs.header(row), row.getString("archived_at") != null),
+                            row.getLong("told_by")))
                     .list();
+            List<Told> shown = found.size() > search.limit() ? found.subList(0, search.limit()) : found;
+            Optional<JobPlace> next = found.size() > search.limit()
+                    ? Optional.of(
+                            new JobPlace(begin, shown.get(shown.size() - 1).save()))
+                    : Optional.empty();
+            return new JobListings(shown.stream().map(Told::job).toList(), next);
         });
-        boolean more = found.size() > search.limit();
-        List<JobListing> shown = more ? found.subList(0, search.limit()) : found;
-        return new JobListings(
-                List.copyOf(shown),
-                more ? Optional.of(JobSearch.place(shown.get(shown.size() - 1).newest())) : Optional.empty());
+    }
+
+    /** A job, and the number of its last save before the list began. */
+    private record Told(JobListing job, long save) {}
+
+    /** The number of the last save, 0 for none. Changes come one after the other, so what is saved later has a higher one. */
+    static long lastSave(Handle handle) {
+        return handle.createQuery("select coalesce(max(save_number), 0) from revision")
+                .mapTo(Long.class)
+                .one();
+    }
+
+    private static Query query(Handle handle, JobSearch search) {
+        String archived = search.archived()
+                .map(each -> " and archived_at is " + (each ? "not null" : "null"))
+                .orElse("");
+        boolean anyWords = search.text().isBlank();
+        String matches = archived + (anyWords ? "" : " and words like :words escape '!'");
+        String unchanged = "select " + LISTED + ", last_save as told_by" + Jobs.NEWEST
+                + " where last_save <= :begin and last_save < :before" + matches
+                + " order by last_save desc limit :limit";
+        String savedSince = "select " + LISTED + ", " + LAST_BEFORE + " as told_by" + Jobs.NEWEST
+                + " where last_save > :begin" + matches;
+        Query query = handle.createQuery("select * from (" + unchanged + ") unchanged union all"
+                + " select * from (" + savedSince + ") saved_since where told_by < :before"
+                + " order by told_by desc limit :limit");
+        return anyWords
+                ? query
+                : query.bind("words", "%" + escaped(folded(search.text().strip())) + "%");
     }
 
     private static String escaped(String text) {
@@ -53,6 +84,14 @@ public final class JobShelf {
 
     private static String folded(String text) {
         return text.toLowerCase(Locale.ROOT);
+    }
+
+    /** Notes the number of a job's last save, within that save. */
+    static void saved(Handle handle, String id, long saveNumber) {
+        handle.createUpdate("update job set last_save = :number where id = :id")
+                .bind("id", id)
+                .bind("number", saveNumber)
+                .execute();
     }
 
     /** Notes what a job is found by, within a change of it. */

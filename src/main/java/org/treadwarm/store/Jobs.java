@@ -11,8 +11,7 @@ import org.jdbi.v3.core.statement.StatementContext;
 /** The jobs with all their revisions. Nothing saved is ever changed or removed. */
 public final class Jobs {
     static final String HEADER_COLUMNS = "job_id, revision, name, draft, manifest_sha256, saved_at, saved_by, note";
-    static final String NEWEST =
-            "revision = (select max(newest.revision) from revision newest where" + " newest.job_id = revision.job_id)";
+    static final String NEWEST = " from job join revision on save_number = last_save";
 
     private final Database database;
     private final Audit audit;
@@ -123,13 +122,12 @@ public final class Jobs {
                 .list());
     }
 
-    /** The newest revision of every job, the most recently changed job first. */
+    /** The newest revision of every job, the one saved last first. */
     public List<RevisionHeader> list() {
-        return database.read(handle -> handle.createQuery("select " + HEADER_COLUMNS
-                        + " from job join revision on revision.job_id = job.id where " + NEWEST
-                        + " order by saved_at desc, job_id")
-                .map((row, context) -> Row.of(row, context).header())
-                .list());
+        return database.read(
+                handle -> handle.createQuery("select " + HEADER_COLUMNS + NEWEST + " order by last_save desc")
+                        .map((row, context) -> Row.of(row, context).header())
+                        .list());
     }
 
     /**
@@ -159,8 +157,10 @@ public final class Jobs {
 
     private static void insert(Handle handle, RevisionHeader header, Manifest manifest) {
         Contents.add(handle, manifest);
+        long saveNumber = JobShelf.lastSave(handle) + 1;
         handle.createUpdate("insert into revision (" + HEADER_COLUMNS
-                        + ") values (:jobId, :revision, :name, :draft, :manifest, :savedAt, :savedBy, :note)")
+                        + ", save_number) values (:jobId, :revision, :name, :draft, :manifest, :savedAt, :savedBy, :note,"
+                        + " :saveNumber)")
                 .bind("jobId", header.jobId())
                 .bind("revision", header.revision())
                 .bind("name", header.name())
@@ -169,7 +169,9 @@ public final class Jobs {
                 .bind("savedAt", Times.text(header.savedAt()))
                 .bind("savedBy", header.savedBy())
                 .bind("note", header.note())
+                .bind("saveNumber", saveNumber)
                 .execute();
+        JobShelf.saved(handle, header.jobId(), saveNumber);
     }
 
     static RevisionHeader header(ResultSet row) throws SQLException {

@@ -31,7 +31,9 @@ import org.treadwarm.web.security.Visitors;
 public final class Server implements AutoCloseable {
     private static final Logger LOG = LoggerFactory.getLogger(Server.class);
     private static final Duration IDLE = Duration.ofSeconds(30);
-    private static final long LARGEST_BODY = 16L * 1024 * 1024;
+
+    /** The largest body of any request, bytes. */
+    static final long LARGEST_BODY = 16L * 1024 * 1024;
 
     private final Javalin javalin;
 
@@ -129,6 +131,8 @@ public final class Server implements AutoCloseable {
         config.jetty.modifyHttpConfiguration((HttpConfiguration http) -> {
             http.setSendServerVersion(false);
         });
+        // Else a table pasted beside the field for a file may have no more than 200 kB.
+        config.jetty.modifyServletContextHandler(context -> context.setMaxFormContentSize((int) LARGEST_BODY));
     }
 
     private static void faults(JavalinConfig config, Pages pages) {
@@ -183,9 +187,7 @@ public final class Server implements AutoCloseable {
     }
 
     private static boolean isApi(Context ctx) {
-        return ctx.path().startsWith("/api/")
-                || ctx.path().equals("/api")
-                || ctx.path().equals("/metrics");
+        return ctx.path().startsWith("/api/") || ctx.path().equals("/metrics");
     }
 
     private static void answerPlainly(Context ctx, int status, String kind, String title) {

@@ -10,6 +10,10 @@ import com.microsoft.playwright.APIResponse;
 import com.microsoft.playwright.Browser;
 import com.microsoft.playwright.Page;
 import com.microsoft.playwright.Route;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.time.Instant;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -21,6 +25,7 @@ import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.extension.ExtendWith;
+import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -100,7 +105,7 @@ class EveryPageTest {
                 broken + "/assemblies/new%20sash");
         return Stream.concat(
                 Stream.concat(jobs, Stream.concat(service(), sheets())),
-                Stream.of("/one-room", "/materials", "/reading-help", "/method", "/nothing-here", "/sign-in"));
+                Stream.of("/one-room", "/materials", "/reading-help", "/method", "/api", "/nothing-here", "/sign-in"));
     }
 
     /** The first wall foot of the demo job that can be solved. */
@@ -218,6 +223,36 @@ class EveryPageTest {
             assertThat(tab.page().locator("table.changes").isVisible()).isTrue();
             assertForEverybody(tab);
         }
+    }
+
+    /** Chosen, looked at and kept, with and without script; the second step sends the file no more. */
+    @ParameterizedTest
+    @ValueSource(booleans = {true, false})
+    void aTableComesAsAFile(boolean script, Browser browser, @TempDir Path folder) throws IOException {
+        Job job = server.job("Files", RunningServer.studio());
+        Path good = Files.writeString(folder.resolve("rooms.csv"), "\uFEFFroom;remark\r\nstudio;Küche\r\n");
+        Path bad = Files.writeString(folder.resolve("latin.csv"), "room\nKüche\n", StandardCharsets.ISO_8859_1);
+        try (Tab tab = script ? Tab.desk(server, browser) : Tab.withoutScript(server, browser)) {
+            tab.as(session).open("/jobs/" + job.id() + "/files");
+            send(tab, bad);
+            assertThat(tab.page().locator("#file-rooms-error").innerText()).contains("no text in UTF-8");
+            if (script) {
+                assertForEverybody(tab);
+            }
+            send(tab, good);
+            assertThat(tab.page().locator("table.changes").innerText()).contains("Küche");
+            if (script) {
+                assertForEverybody(tab);
+            }
+            tab.press(tab.button("keep"));
+            assertThat(server.now(job).document().at("/rooms/0/remark").textValue())
+                    .isEqualTo("Küche");
+        }
+    }
+
+    private static void send(Tab tab, Path file) {
+        tab.page().locator("#file-rooms").setInputFiles(file);
+        tab.press(tab.page().locator("form:has(#file-rooms) button"));
     }
 
     @Test

@@ -16,7 +16,9 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.Parameter;
 import org.junit.jupiter.params.ParameterizedClass;
+import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
 @ParameterizedClass
 @EnumSource(Kind.class)
@@ -90,7 +92,7 @@ class JobShelfTest {
             create("job " + i, "job");
         }
         List<String> seen = new ArrayList<>();
-        Optional<String> after = Optional.empty();
+        Optional<JobPlace> after = Optional.empty();
         do {
             JobListings page = store.jobs().shelf().find(new JobSearch("job", Optional.of(false), after, 3));
             page.jobs().forEach(each -> seen.add(each.newest().name()));
@@ -153,7 +155,89 @@ class JobShelfTest {
             assertThatThrownBy(() -> new JobSearch("", Optional.empty(), Optional.empty(), limit))
                     .isInstanceOf(IllegalArgumentException.class);
         }
-        assertThatThrownBy(() -> new JobSearch("", Optional.empty(), Optional.of("x"), 1))
-                .isInstanceOf(IllegalArgumentException.class);
+        for (String text :
+                List.of("", "x", "1", "1-", "-1-1", "1-1000000000000000000", "2026-12-02T09:00:00.000Z_aaaa")) {
+            assertThat(JobPlace.of(text)).as(text).isEmpty();
+        }
+        JobPlace place = new JobPlace(12, 7);
+        assertThat(JobPlace.of(place.text())).contains(place);
+    }
+
+    private JobListings page(Optional<JobPlace> after, int limit) {
+        return store.jobs().shelf().find(new JobSearch("", Optional.empty(), after, limit));
+    }
+
+    /** Each time some that were told, some still to come and some new ones are saved, the clock standing still or going back. */
+    @ParameterizedTest
+    @ValueSource(ints = {0, -1000})
+    void everyJobOfTheBeginningIsToldOnceWhateverIsSavedMeanwhile(int passing) {
+        List<String> expected = new ArrayList<>();
+        for (int i = 0; i < 20; i++) {
+            expected.add(0, create("job " + i, "job"));
+        }
+        for (int i : new int[] {3, 11, 3}) {
+            String id = expected.remove(i);
+            long revision = store.jobs().revisions(id).get(0).revision();
+            store.jobs().save(id, revision, job("job"), BY_ANNA);
+            expected.add(0, id);
+        }
+        List<String> seen = new ArrayList<>();
+        Optional<JobPlace> after = Optional.empty();
+        do {
+            JobListings part = page(after, 3);
+            part.jobs().forEach(each -> seen.add(each.newest().jobId()));
+            after = part.next();
+            clock.pass(Duration.ofMillis(passing));
+            store.jobs().create(job("new"), BY_ANNA);
+            for (int i = seen.size() % 4; i < expected.size(); i += 4) {
+                String id = expected.get(i);
+                long revision = store.jobs().revisions(id).get(0).revision();
+                store.jobs().save(id, revision, job("saved meanwhile"), BY_ANNA);
+            }
+        } while (after.isPresent());
+
+        assertThat(seen).isEqualTo(expected);
+        assertThat(page(Optional.empty(), 200).jobs()).hasSize(27);
+    }
+
+    @Test
+    void aJobIsToldAsItIsNowAtThePlaceItHad() {
+        String first = create("first", "x");
+        create("second", "x");
+        create("third", "x");
+        JobListings begun = page(Optional.empty(), 1);
+        store.jobs().save(first, 1, job("first, renamed"), BY_ANNA);
+
+        JobListings rest = page(begun.next(), 10);
+
+        assertThat(rest.jobs().stream().map(each -> each.newest().name())).containsExactly("second", "first, renamed");
+        assertThat(rest.next()).isEmpty();
+        assertThat(page(Optional.empty(), 1).jobs().get(0).newest().name()).isEqualTo("first, renamed");
+    }
+
+    @Test
+    void savesOfAnOlderProgramAreNumberedInTheOrderOfTheirTimes() {
+        String first = create("first", "x");
+        String second = create("second", "x");
+        clock.pass(Duration.ofMillis(1));
+        store.jobs().save(first, 1, job("first"), BY_ANNA);
+        store.close();
+        DataFile tables = new DataFile(home);
+        tables.execute("drop index revision_save_number");
+        tables.execute("alter table revision drop column save_number");
+        tables.execute("drop index job_last_save");
+        tables.execute("alter table job drop column last_save");
+        tables.execute("create index revision_saved_at on revision (saved_at, job_id)");
+        tables.execute("delete from flyway_schema_history where version = '7'");
+
+        store = Store.open(home, clock);
+
+        assertThat(page(Optional.empty(), 10).jobs().stream()
+                        .map(each -> each.newest().jobId()))
+                .containsExactly(first, second);
+        assertThat(tables.text("select max(save_number) from revision")).isEqualTo("3");
+        clock.pass(Duration.ofMillis(1));
+        create("third", "x");
+        assertThat(tables.text("select max(save_number) from revision")).isEqualTo("4");
     }
 }

@@ -1,5 +1,6 @@
 package org.treadwarm.web;
 
+import java.io.ByteArrayOutputStream;
 import java.net.URLEncoder;
 import java.nio.charset.StandardCharsets;
 import java.util.LinkedHashMap;
@@ -97,6 +98,25 @@ final class Form {
     Form to(String address) {
         action = address;
         return this;
+    }
+
+    /** The body it sends as a form that brings a file. */
+    byte[] withFile(String boundary, String field, String name, byte[] file) {
+        ByteArrayOutputStream body = new ByteArrayOutputStream();
+        fields.forEach((key, value) -> {
+            if (!key.equals(field)) {
+                body.writeBytes(head(boundary, key, "").getBytes(StandardCharsets.UTF_8));
+                body.writeBytes(value.getBytes(StandardCharsets.UTF_8));
+            }
+        });
+        body.writeBytes(head(boundary, field, "; filename=\"" + name + "\"").getBytes(StandardCharsets.UTF_8));
+        body.writeBytes(file);
+        body.writeBytes(("\r\n--" + boundary + "--\r\n").getBytes(StandardCharsets.UTF_8));
+        return body.toByteArray();
+    }
+
+    private static String head(String boundary, String field, String more) {
+        return "\r\n--" + boundary + "\r\nContent-Disposition: form-data; name=\"" + field + "\"" + more + "\r\n\r\n";
     }
 
     /** The body it sends. */

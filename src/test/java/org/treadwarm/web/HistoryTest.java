@@ -148,7 +148,9 @@ class HistoryTest {
                 .doesNotContain("yard two (copy)");
         assertThat(visitor.open("/jobs?find=nobody").text()).contains("No job matches");
         assertThat(visitor.open("/jobs?show=x").status()).isEqualTo(404);
-        assertThat(visitor.open("/jobs?after=x").status()).isEqualTo(404);
+        Page unknown = visitor.open("/jobs?after=2026-12-02T09:00:00.000Z_aaaaaaaaaaaa");
+        assertThat(unknown.status()).isEqualTo(400);
+        assertThat(unknown.text()).contains("begin the list again", "href=\"/jobs\"");
 
         visitor.send(page.form("csrf").to(at("/unarchive")));
         assertThat(visitor.open(at("")).text()).doesNotContain("This job is archived");

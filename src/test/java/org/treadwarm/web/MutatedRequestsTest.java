@@ -2,8 +2,6 @@ package org.treadwarm.web;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.net.Socket;
-import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
@@ -65,7 +63,7 @@ class MutatedRequestsTest {
             int refused = 0;
             for (int i = 0; i < MUTANTS; i++) {
                 RawRequest request = mutant(seeds.get(i % seeds.size()));
-                RawAnswer answer = send(server, request);
+                RawAnswer answer = request.sendTo(server);
                 if (answer.status() >= 300) {
                     refused++;
                 }
@@ -107,8 +105,7 @@ class MutatedRequestsTest {
                 RawRequest.with("POST", "/api/v1/sizings/batch", key, "{\"surveys\": [" + survey + ", {}]}"),
                 RawRequest.with(
                         "POST", "/api/v1/sections", key, SectionsApiTest.cable().toString()),
-                RawRequest.get(jobs + "?limit=1&cursor=am9icyAxIDEgYWFhYWFhYWFhYWFh", key)
-                        .header("X-Request-Id", "request-0001"),
+                RawRequest.get(jobs + "?limit=1&cursor=am9icyA1IDM", key).header("X-Request-Id", "request-0001"),
                 RawRequest.get(jobs + "/" + job + "/revisions?limit=1&cursor=cmV2aXNpb25zIDI", key),
                 RawRequest.get("/api/v1/materials?find=o&limit=3&cursor=bWF0ZXJpYWxzIDM", key),
                 RawRequest.get("/metrics", key),
@@ -131,6 +128,10 @@ class MutatedRequestsTest {
                 RawRequest.with("POST", at + "/rooms", key, room),
                 RawRequest.with("PUT", at + "/rooms/studio-1", key, room).header("If-Match", "\"none\""),
                 RawRequest.get(at + "/rooms/studio-1", key).method("DELETE").header("If-Match", "\"none\""),
+                RawRequest.get(at + "/tables/rooms", key),
+                RawRequest.get(at + "/tables/results", key),
+                table(at + "/tables/rooms?preview=true", key, "room,height [m]\nstudio,3.3\n"),
+                table(at + "/tables/openings", key, "room;surface;opening;area [m2]\nstudio;north wall;sash;1,7\n"),
                 RawRequest.get(at + "/revisions/1/changes", key),
                 RawRequest.with("POST", at + "/revisions/1/restore", key, "").header("If-Match", "\"1\""),
                 RawRequest.with("POST", at + "/copy", key, ""),
@@ -141,6 +142,15 @@ class MutatedRequestsTest {
                         "/api/v1/wall-feet",
                         key,
                         WallFeetApiTest.question().toString()));
+    }
+
+    private static RawRequest table(String path, String key, String text) {
+        return new RawRequest(
+                        "POST",
+                        path,
+                        List.of("Host: 127.0.0.1", "Authorization: Bearer " + key, "Content-Type: text/csv"),
+                        text)
+                .header("If-Match", "*");
     }
 
     /** Whoever is signed out or loses the account by one of them has a session of its own for that. */
@@ -206,15 +216,5 @@ class MutatedRequestsTest {
             case 3 -> text.substring(0, from) + pick(ODD) + text.substring(to);
             default -> text.substring(0, from) + (char) random.nextInt(0x2000) + text.substring(to);
         };
-    }
-
-    private static RawAnswer send(RunningServer server, RawRequest request) throws Exception {
-        try (Socket socket = new Socket("127.0.0.1", server.port())) {
-            socket.setSoTimeout(30_000);
-            socket.getOutputStream().write(request.bytes());
-            socket.getOutputStream().flush();
-            socket.shutdownOutput();
-            return RawAnswer.of(new String(socket.getInputStream().readAllBytes(), StandardCharsets.UTF_8));
-        }
     }
 }

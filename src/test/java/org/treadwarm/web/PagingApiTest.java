@@ -6,6 +6,7 @@ import static org.hamcrest.Matchers.containsString;
 import static org.hamcrest.Matchers.nullValue;
 
 import io.restassured.response.Response;
+import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -75,6 +76,23 @@ class PagingApiTest {
         assertThat(walk("/jobs", "jobs", "id"))
                 .isEqualTo(
                         server.desk().list().stream().map(RevisionHeader::jobId).toList());
+    }
+
+    @Test
+    void givesEveryJobOnceThoughTheyAreSavedMeanwhile() {
+        List<String> before =
+                server.desk().list().stream().map(RevisionHeader::jobId).toList();
+        Response begin = api.with(Scope.READ).queryParam("limit", 2).get("/jobs");
+        for (String id : List.of(before.get(1), before.get(4))) {
+            Job job = server.desk().current(id).orElseThrow();
+            server.desk().save(id, job.revision(), job.name(), job.document(), Change.by("tests"));
+        }
+        server.job("begun meanwhile", Document.mapper().createObjectNode());
+
+        List<String> told = new ArrayList<>(begin.<List<String>>path("jobs.id"));
+        String next = begin.path("next");
+        told.addAll(walk(next.substring("/api/v1".length()), 2, "jobs", "id"));
+        assertThat(told).isEqualTo(before);
     }
 
     @Test
@@ -152,6 +170,7 @@ class PagingApiTest {
         "/jobs, %%%",
         "/materials, cmV2aXNpb25zIDE",
         "/jobs, cmV2aXNpb25zIDE",
+        "/jobs, am9icyAyMDI2LTEyLTAyVDA5OjAwOjAwLjAwMFpfYWFhYWFhYWFhYWFh",
         "/sheets, c2hlZXRzIDIwMjY"
     })
     void refusesForeignCursors(String path, String cursor) {
@@ -160,7 +179,18 @@ class PagingApiTest {
                 .get(path)
                 .then()
                 .statusCode(400)
-                .body("detail", containsString("cursor"));
+                .body("detail", containsString("cursor"))
+                .body("detail", containsString("begin the list again"));
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"/materials?find=oak%zz", "/jobs?limit=%", "/jobs?archived=%f"})
+    void refusesWhatCannotBeDecoded(String path) throws IOException {
+        RawAnswer answer =
+                RawRequest.get("/api/v1" + path, server.key(Scope.READ)).sendTo(server);
+
+        assertThat(answer.status()).isEqualTo(400);
+        assertThat(answer.body()).contains("is not encoded");
     }
 
     @Test

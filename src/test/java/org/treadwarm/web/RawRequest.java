@@ -1,6 +1,8 @@
 package org.treadwarm.web;
 
 import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.net.Socket;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
@@ -65,9 +67,9 @@ record RawRequest(String method, String path, List<String> headers, String body)
         return new RawRequest(method, path, spoiled, body);
     }
 
-    /** Whether it still goes to the API, however it was spoiled. */
+    /** Whether it still goes to the API, however it was spoiled; what shows the API to people is a page. */
     boolean isOfApi() {
-        return path.startsWith("/api/") && !path.contains("..");
+        return path.startsWith("/api/") && !path.split("[?#]", 2)[0].equals("/api/") && !path.contains("..");
     }
 
     byte[] bytes() {
@@ -85,6 +87,21 @@ record RawRequest(String method, String path, List<String> headers, String body)
 
     private static String line(String text) {
         return text.replaceAll("[\r\n]", "") + "\r\n";
+    }
+
+    /** Sends it on a connection of its own. */
+    RawAnswer sendTo(RunningServer server) throws IOException {
+        try (Socket socket = new Socket("127.0.0.1", server.port())) {
+            socket.setSoTimeout(30_000);
+            socket.getOutputStream().write(bytes());
+            socket.getOutputStream().flush();
+            socket.shutdownOutput();
+            String answer = new String(socket.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
+            if (answer.isEmpty()) {
+                throw new AssertionError("no answer to " + shown());
+            }
+            return RawAnswer.of(answer);
+        }
     }
 
     /** For messages. */

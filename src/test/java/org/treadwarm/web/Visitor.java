@@ -66,6 +66,19 @@ final class Visitor {
                 .POST(BodyPublishers.ofString(form.encoded())));
     }
 
+    /** Sends a form with a file in a field; without a name as a browser does where none was chosen. */
+    Page send(Form form, String field, String name, byte[] file) {
+        String boundary = "a-boundary-that-no-file-holds";
+        return sendRaw(form.action(), boundary, form.withFile(boundary, field, name, file));
+    }
+
+    /** Sends something as a form with files, be it one or not. */
+    Page sendRaw(String path, String boundary, byte[] body) {
+        return send(request(path)
+                .header("Content-Type", "multipart/form-data; boundary=" + boundary)
+                .POST(BodyPublishers.ofByteArray(body)));
+    }
+
     /** Sends a form and opens the page that it leads to, waiting for it as {@link #open} does. */
     Page submit(Form form) {
         Page answer = send(form);

@@ -24,6 +24,7 @@ public final class Api {
     private final SheetsApi sheets;
     private final RoomsApi rooms;
     private final HistoryApi history;
+    private final TablesApi tables;
 
     public Api(JobDesk desk, SheetDesk sheetDesk, Store store) {
         this.store = store;
@@ -36,11 +37,17 @@ public final class Api {
         this.sheets = new SheetsApi(sheetDesk, desk, repeats);
         this.rooms = new RoomsApi(desk, repeats);
         this.history = new HistoryApi(desk, repeats);
+        this.tables = new TablesApi(desk, repeats);
     }
 
     /** The description of the API, made when it is first asked for. */
     private static final class Description {
         static final byte[] TEXT = OpenApi.document();
+    }
+
+    /** The description of the API: OpenAPI 3.1 as UTF-8 text. */
+    public static byte[] description() {
+        return Description.TEXT.clone();
     }
 
     /** What {@code GET /api/v1/health} says. */
@@ -73,6 +80,8 @@ public final class Api {
         routes.put(ROOT + "/jobs/{id}/rooms/{room}", rooms::put, Access.WRITE);
         routes.delete(ROOT + "/jobs/{id}/rooms/{room}", rooms::remove, Access.WRITE);
         get(routes, ROOT + "/jobs/{id}/sizing", jobs::sizing, Access.READ);
+        get(routes, ROOT + "/jobs/{id}/tables/{table}", tables::get, Access.READ);
+        routes.post(ROOT + "/jobs/{id}/tables/{table}", tables::read, Access.WRITE);
         routes.post(ROOT + "/jobs/{id}/sheets", sheets::issue, Access.WRITE);
         get(routes, ROOT + "/sheets", sheets::list, Access.READ);
         get(routes, ROOT + "/sheets/{number}", sheets::get, Access.READ);

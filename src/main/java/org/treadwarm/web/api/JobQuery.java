@@ -4,6 +4,7 @@ import io.javalin.http.Context;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.treadwarm.store.JobPlace;
 import org.treadwarm.store.JobSearch;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.web.Problems;
@@ -32,7 +33,7 @@ final class JobQuery {
         return Optional.of(new JobSearch(
                 find,
                 archived.isEmpty() ? Optional.empty() : Optional.of(archived.equals("true")),
-                paging.after().map(last -> last.text(1)),
+                paging.after().map(cursor -> new JobPlace(cursor.number(1), cursor.number(2))),
                 paging.limit()));
     }
 

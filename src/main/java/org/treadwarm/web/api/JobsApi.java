@@ -30,7 +30,7 @@ import org.treadwarm.wire.Json;
 /** Jobs over the API: whole documents, every save a revision, no save over somebody else's. */
 final class JobsApi {
     private static final int LONGEST_NAME = 200;
-    private static final Pattern JOBS = Pattern.compile("jobs ([0-9TZ:.-]{20,24}_[a-z2-9]{12})");
+    private static final Pattern JOBS = Pattern.compile("jobs ([0-9]{1,18}) ([0-9]{1,18})");
 
     private final JobDesk desk;
     private final Repeats repeats;
@@ -98,7 +98,7 @@ final class JobsApi {
         Optional<JobSearch> search = paging.flatMap(part -> JobQuery.read(ctx, part));
         if (search.isPresent()) {
             JobListings found = desk.find(search.get());
-            Optional<String> next = found.next().map(place -> paging.get().next(ctx, place));
+            Optional<String> next = found.next().map(place -> paging.get().next(ctx, place.begin(), place.last()));
             SizingApi.json(
                     ctx,
                     200,

@@ -60,6 +60,8 @@ final class OpenApi {
             answers.add(HistoryApi.ArchiveAnswer.class);
             answers.add(RoomsApi.RoomAnswer.class);
             answers.add(RoomsApi.RoomConflict.class);
+            answers.add(TableAnswers.TableAnswer.class);
+            answers.add(TableAnswers.TableProblems.class);
             answers.add(Api.Health.class);
             return mapper.writeValueAsBytes(description);
         } catch (IOException e) {

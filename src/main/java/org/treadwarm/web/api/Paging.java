@@ -5,6 +5,7 @@ import java.net.URLEncoder;
 import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.util.Base64;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.regex.Matcher;
@@ -47,6 +48,11 @@ record Paging(String list, int limit, Optional<Cursor> after) {
      * @param form what a cursor of this list looks like: the list's name and the parts as groups
      */
     static Optional<Paging> of(Context ctx, Pattern form) {
+        Optional<String> garbled = garbled(ctx);
+        if (garbled.isPresent()) {
+            refuse(ctx, shortened(garbled.get()) + " is not encoded as an address needs it (RFC 3986, 2.1).");
+            return Optional.empty();
+        }
         String limit = Optional.ofNullable(ctx.queryParam("limit")).orElse(Integer.toString(USUAL));
         if (!limit.matches("[0-9]{1,3}") || Integer.parseInt(limit) < 1 || Integer.parseInt(limit) > MOST) {
             refuse(ctx, "limit is a whole number of 1 to " + MOST + ", not \"" + shortened(limit) + "\".");
@@ -61,10 +67,19 @@ record Paging(String list, int limit, Optional<Cursor> after) {
         if (!parts.matches()) {
             refuse(
                     ctx,
-                    "cursor is a text from the \"next\" of an answer of this list, not \"" + shortened(given) + "\".");
+                    "cursor is a text from the \"next\" of an answer of this list, not \"" + shortened(given)
+                            + "\". If it was given before the program was renewed, begin the list again.");
             return Optional.empty();
         }
         return Optional.of(new Paging(name, Integer.parseInt(limit), Optional.of(new Cursor(parts))));
+    }
+
+    /** A parameter whose value cannot be decoded; taken for left out, it would ask for something else. */
+    private static Optional<String> garbled(Context ctx) {
+        return ctx.queryParamMap().entrySet().stream()
+                .filter(parameter -> parameter.getValue().isEmpty())
+                .map(Map.Entry::getKey)
+                .findFirst();
     }
 
     private static void refuse(Context ctx, String detail) {

@@ -45,7 +45,7 @@ final class Repeats {
     void create(Context ctx, Supplier<Optional<KeptAnswer>> creation) {
         List<String> names = Collections.list(ctx.req().getHeaders(HEADER));
         if (names.isEmpty()) {
-            creation.get().ifPresent(answer -> write(ctx, answer));
+            answer(ctx, creation);
         } else if (names.size() > 1 || !ALLOWED.matcher(names.get(0)).matches()) {
             Problems.plain(
                     ctx,
@@ -56,6 +56,11 @@ final class Repeats {
         } else {
             createOnce(ctx, new NamedRequest(KeyGuard.key(ctx).id(), names.get(0), sha256(ctx)), creation);
         }
+    }
+
+    /** Answers whatever the request is called: sent again, it is done again. */
+    void answer(Context ctx, Supplier<Optional<KeptAnswer>> work) {
+        work.get().ifPresent(answer -> write(ctx, answer));
     }
 
     private void createOnce(Context ctx, NamedRequest request, Supplier<Optional<KeptAnswer>> creation) {

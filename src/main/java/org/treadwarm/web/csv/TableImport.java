@@ -4,6 +4,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -12,8 +13,10 @@ import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
+import org.treadwarm.intake.Document;
 import org.treadwarm.intake.Intake;
 import org.treadwarm.intake.Intake.Outcome;
+import org.treadwarm.survey.Findings;
 import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Survey;
 
@@ -25,6 +28,7 @@ public final class TableImport {
     /** The most rows of one file. */
     public static final int MOST_ROWS = 2000;
 
+    private static final String ALLOWED_TEXT = "at most " + Document.LONGEST_TEXT + " characters, none of them NUL";
     private static final Pattern WITH_UNIT = Pattern.compile("(.*?)\\s*[\\[(]([^\\])]*)[\\])]\\s*");
 
     private final TableKind kind;
@@ -52,6 +56,7 @@ public final class TableImport {
             reading.problems.add(new CellProblem(
                     1, "", "", "this is no CSV", "cells separated by commas, semicolons or tabs, quoted with \""));
         }
+        reading.problems.sort(Comparator.comparingInt(CellProblem::row));
         return new Result(reading.document, List.copyOf(reading.problems));
     }
 
@@ -67,11 +72,9 @@ public final class TableImport {
         }
         header(rows.get(0));
         if (problems.isEmpty()) {
-            for (int i = 1; i < rows.size(); i++) {
+            for (int i = 1; i < rows.size() && problems.size() < Findings.MOST; i++) {
                 row(i + 1, rows.get(i));
             }
-        }
-        if (problems.isEmpty()) {
             judge();
         }
     }
@@ -108,7 +111,10 @@ public final class TableImport {
         Map<String, String> row = new HashMap<>();
         for (int i = 0; i < texts.size(); i++) {
             String cell = texts.get(i).strip();
-            if (columns.containsKey(i)) {
+            if (!isText(cell)) {
+                String column = columns.containsKey(i) ? columns.get(i).title() : "";
+                problems.add(new CellProblem(number, column, cell, "this cell cannot be kept", ALLOWED_TEXT));
+            } else if (columns.containsKey(i)) {
                 row.put(columns.get(i).title(), cell);
             } else if (!cell.isEmpty()) {
                 problems.add(new CellProblem(number, "", cell, "this cell has no column", "a header above it"));
@@ -120,6 +126,10 @@ public final class TableImport {
         Optional<RowTarget.Found> found =
                 kind == TableKind.ROOMS ? target.room(number, row, problems) : target.opening(number, row, problems);
         found.ifPresent(part -> write(number, row, part));
+    }
+
+    private static boolean isText(String cell) {
+        return cell.length() <= Document.LONGEST_TEXT && cell.indexOf('\0') < 0;
     }
 
     private void write(int number, Map<String, String> row, RowTarget.Found found) {

@@ -1,6 +1,8 @@
 package org.treadwarm.web.csv;
 
+import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import org.treadwarm.survey.Opening;
 import org.treadwarm.survey.Room;
 
@@ -38,6 +40,11 @@ public enum TableKind {
     TableKind(String word, List<Column> columns) {
         this.word = word;
         this.columns = columns;
+    }
+
+    /** The kind that is called so, if one is. */
+    public static Optional<TableKind> called(String word) {
+        return Arrays.stream(values()).filter(kind -> kind.word.equals(word)).findFirst();
     }
 
     /** What it is called. */

@@ -34,7 +34,14 @@ final class HistoryPages {
     }
 
     /** One change in words. */
-    public record Line(String where, String before, String after) {}
+    public record Line(String where, String before, String after) {
+        static Line of(Difference difference, Labels labels) {
+            return new Line(
+                    labels.where(difference),
+                    labels.value(difference, difference.before()),
+                    labels.value(difference, difference.after()));
+        }
+    }
 
     /** A revision with what it changed; {@code more} counts the changes that are not listed. */
     public record Entry(
@@ -100,10 +107,7 @@ final class HistoryPages {
         Labels labels = new Labels(Survey.class, after, before);
         List<Line> lines = new ArrayList<>();
         for (Difference difference : Differences.between(before, after)) {
-            lines.add(new Line(
-                    labels.where(difference),
-                    labels.value(difference, difference.before()),
-                    labels.value(difference, difference.after())));
+            lines.add(Line.of(difference, labels));
         }
         return lines;
     }

@@ -18,6 +18,7 @@ import org.treadwarm.jobs.JobDesk.Saving;
 import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.store.Change;
 import org.treadwarm.store.JobListings;
+import org.treadwarm.store.JobPlace;
 import org.treadwarm.store.JobSearch;
 import org.treadwarm.web.security.Visitors;
 
@@ -50,18 +51,22 @@ final class JobPages {
         String show = query(ctx, "show");
         String after = query(ctx, "after");
         boolean known = List.of("", "archived", "all").contains(show);
-        if (!known || !after.isEmpty() && !JobSearch.isPlace(after) || find.length() > LONGEST_NAME) {
+        Optional<JobPlace> place = JobPlace.of(after);
+        if (!known || find.length() > LONGEST_NAME) {
             missing(ctx, view);
             return;
         }
+        if (!after.isEmpty() && place.isEmpty()) {
+            String title = "This is no place in the list of jobs, or one of an earlier program; begin the list again";
+            view.show(ctx, 400, "fault", Map.of("title", title, "status", 400));
+            return;
+        }
         JobListings found = desk.find(new JobSearch(
-                find,
-                show.equals("all") ? Optional.empty() : Optional.of(show.equals("archived")),
-                Optional.of(after).filter(place -> !place.isEmpty()),
-                A_PAGE));
+                find, show.equals("all") ? Optional.empty() : Optional.of(show.equals("archived")), place, A_PAGE));
         Map<String, Object> model = new HashMap<>();
         model.put("jobs", found.jobs().stream().map(JobView.JobRow::of).toList());
-        model.put("next", found.next().map(place -> more(find, show, place)).orElse(""));
+        model.put(
+                "next", found.next().map(last -> more(find, show, last.text())).orElse(""));
         model.put("find", find);
         model.put("show", show);
         model.put("filtered", !find.isEmpty() || !show.isEmpty() || !after.isEmpty());

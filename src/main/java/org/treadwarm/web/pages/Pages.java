@@ -7,11 +7,14 @@ import io.javalin.http.HttpStatus;
 import java.time.Clock;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalInt;
 import org.treadwarm.jobs.JobDesk;
 import org.treadwarm.sheets.SheetDesk;
 import org.treadwarm.store.Role;
 import org.treadwarm.store.Store;
 import org.treadwarm.web.Computations;
+import org.treadwarm.web.Drain;
+import org.treadwarm.web.Multipart;
 import org.treadwarm.web.security.Access;
 import org.treadwarm.web.security.Visitors;
 
@@ -38,6 +41,7 @@ public final class Pages {
     private final WallFootPages wallFeet;
     private final MethodPage method;
     private final SolvingAhead ahead;
+    private final ContractPage contract;
     private final TablePages tables = new TablePages();
 
     public Pages(Store store, JobDesk desk, SheetDesk sheetDesk, Visitors visitors, Computations computations) {
@@ -62,6 +66,7 @@ public final class Pages {
         this.sheetLinks = new SheetLinkPages(store, visitors, view);
         this.quick = new QuickPages(desk, visitors, view, ahead, answers);
         this.method = new MethodPage(computations, view);
+        this.contract = new ContractPage(visitors, view);
         this.wallFeet = new WallFootPages(desk, visitors, view, computations, computing);
     }
 
@@ -84,7 +89,7 @@ public final class Pages {
         routes.post("/jobs/{job}/history/{n}/restore", form(history::restore), Access.SURVEYOR);
         routes.get("/jobs/{job}/files", files::show, Access.SURVEYOR);
         routes.get("/jobs/{job}/files/{file}", ahead.before(files::sized, files::download, "/jobs"), Access.SURVEYOR);
-        routes.post("/jobs/{job}/files/{file}", form(files::read), Access.SURVEYOR);
+        routes.post("/jobs/{job}/files/{file}", withFile(files::read), Access.SURVEYOR);
         routes.post("/jobs/{job}/copy", form(jobs::copy), Access.ESTIMATOR);
         routes.post("/jobs/{job}/archive", form(jobs::archive), Access.ESTIMATOR);
         routes.post("/jobs/{job}/unarchive", form(jobs::bringBack), Access.ESTIMATOR);
@@ -109,6 +114,7 @@ public final class Pages {
                 ctx -> view.show(ctx, 200, "materials", tables.materials(ctx.queryParam("find"))),
                 Access.SURVEYOR);
         routes.get("/reading-help", ctx -> view.show(ctx, 200, "reading-help", tables.readingHelp()), Access.SURVEYOR);
+        routes.get("/api", contract::show, Access.SURVEYOR);
         routes.get("/method", method::show, Access.SURVEYOR);
         routes.post("/method", form(method::change), Access.SURVEYOR);
         sheets(routes);
@@ -160,13 +166,39 @@ public final class Pages {
         view.show(ctx, 403, "fault", Map.of("title", title, "status", 403, "role", true));
     }
 
+    /** A form without files. */
     private Handler form(Handler handler) {
         return ctx -> {
-            if (visitors.acceptsForm(ctx)) {
-                handler.handle(ctx);
+            if (Multipart.isSent(ctx)) {
+                fault(ctx, 415, "This form brings no files, so it is not sent as one that does");
             } else {
-                fault(ctx, 403, "This form is not one of ours, or is too old; open the page again");
+                ours(ctx, handler);
             }
         };
+    }
+
+    /** The form that may bring a table as a file. */
+    private Handler withFile(Handler handler) {
+        return ctx -> {
+            OptionalInt refusal = Multipart.isSent(ctx) ? Multipart.refusal(ctx) : OptionalInt.empty();
+            if (refusal.isEmpty()) {
+                ours(ctx, handler);
+                return;
+            }
+            Drain.rest(ctx);
+            if (refusal.getAsInt() == 413) {
+                files.refuseLarge(ctx);
+            } else {
+                fault(ctx, refusal.getAsInt(), "This form cannot be read; open the page again");
+            }
+        };
+    }
+
+    private void ours(Context ctx, Handler handler) throws Exception {
+        if (visitors.acceptsForm(ctx)) {
+            handler.handle(ctx);
+        } else {
+            fault(ctx, 403, "This form is not one of ours, or is too old; open the page again");
+        }
     }
 }

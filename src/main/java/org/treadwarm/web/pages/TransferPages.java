@@ -17,6 +17,7 @@ import org.treadwarm.store.Change;
 import org.treadwarm.survey.Survey;
 import org.treadwarm.web.csv.CellProblem;
 import org.treadwarm.web.csv.TableExport;
+import org.treadwarm.web.csv.TableFile;
 import org.treadwarm.web.csv.TableImport;
 import org.treadwarm.web.csv.TableImport.Result;
 import org.treadwarm.web.csv.TableKind;
@@ -24,7 +25,8 @@ import org.treadwarm.web.security.Visitors;
 
 /** Files out of a job and into it: a table is shown with what it would change before anything is kept. */
 final class TransferPages {
-    private static final String RESULTS = "results.csv";
+    private static final String ENDING = ".csv";
+    private static final String RESULTS = "results" + ENDING;
     private static final String CSV = "text/csv; charset=utf-8";
 
     private final JobDesk desk;
@@ -35,17 +37,6 @@ final class TransferPages {
         this.desk = desk;
         this.visitors = visitors;
         this.view = view;
-    }
-
-    /** A table that can be read in, with its columns in words. */
-    public record Incoming(String word, String columns) {
-        static Incoming of(TableKind kind) {
-            return new Incoming(
-                    kind.word(),
-                    String.join(
-                            ", ",
-                            kind.columns().stream().map(each -> each.header()).toList()));
-        }
     }
 
     void show(Context ctx) {
@@ -60,9 +51,14 @@ final class TransferPages {
     private void show(Context ctx, int status, Job job, Map<String, Object> more) {
         Map<String, Object> model = new HashMap<>();
         model.put("job", job);
-        model.put("tables", Arrays.stream(TableKind.values()).map(Incoming::of).toList());
+        model.put(
+                "tables",
+                Arrays.stream(TableKind.values()).map(IncomingTable::of).toList());
+        model.put("largest", TableFile.LARGEST_IN_WORDS);
         model.put("text", "");
         model.put("kind", "");
+        model.put("errors", List.of());
+        model.put("wrong", Map.of());
         model.put("problems", List.of());
         model.put("changes", List.of());
         model.put("ready", false);
@@ -102,9 +98,9 @@ final class TransferPages {
     }
 
     private static Optional<TableKind> kind(String file) {
-        return Arrays.stream(TableKind.values())
-                .filter(kind -> file.equals(kind.word() + ".csv"))
-                .findFirst();
+        return file.endsWith(ENDING)
+                ? TableKind.called(file.substring(0, file.length() - ENDING.length()))
+                : Optional.empty();
     }
 
     private static void send(Context ctx, String file, String type, String text) {
@@ -122,7 +118,12 @@ final class TransferPages {
             return;
         }
         Job job = current.get();
-        String text = EntryPages.text(ctx, "table");
+        SentTable table = SentTable.of(ctx);
+        if (!table.error().isEmpty()) {
+            refuse(ctx, job, kind.get(), table);
+            return;
+        }
+        String text = table.text();
         Result result = TableImport.read(kind.get(), text, job.document());
         boolean seen = EntryPages.text(ctx, "revision").equals(Long.toString(job.revision()));
         boolean keep = EntryPages.text(ctx, "do").equals("keep");
@@ -135,6 +136,27 @@ final class TransferPages {
         }
     }
 
+    /** Says that a form was too large to be read at all. */
+    void refuseLarge(Context ctx) {
+        Optional<Job> job = desk.current(ctx.pathParam("job"));
+        Optional<TableKind> kind = kind(ctx.pathParam("file"));
+        if (job.isEmpty() || kind.isEmpty()) {
+            JobPages.missing(ctx, view);
+        } else {
+            refuse(ctx, job.get(), kind.get(), SentTable.unread());
+        }
+    }
+
+    private void refuse(Context ctx, Job job, TableKind kind, SentTable table) {
+        String id = table.field() + "-" + kind.word();
+        Map<String, Object> more = new HashMap<>();
+        more.put("text", table.text());
+        more.put("kind", kind.word());
+        more.put("errors", List.of(new ErrorView(id, "", table.error(), "")));
+        more.put("wrong", Map.of(id, table.error()));
+        show(ctx, 422, job, more);
+    }
+
     private void preview(Context ctx, Job job, TableKind kind, String text, String notice) {
         Result result = TableImport.read(kind, text, job.document());
         List<CellProblem> problems = result.problems();
@@ -143,10 +165,7 @@ final class TransferPages {
         List<HistoryPages.Line> changes = !problems.isEmpty()
                 ? List.of()
                 : Differences.between(job.document(), after).stream()
-                        .map(each -> new HistoryPages.Line(
-                                labels.where(each),
-                                labels.value(each, each.before()),
-                                labels.value(each, each.after())))
+                        .map(each -> HistoryPages.Line.of(each, labels))
                         .toList();
         Map<String, Object> more = new HashMap<>();
         more.put("text", text);
