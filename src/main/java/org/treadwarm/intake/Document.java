@@ -63,12 +63,9 @@ public final class Document {
 
     /** Only an escape can write half of a character that needs two. */
     private static boolean mayHoldHalfCharacters(byte[] json) {
-        for (int i = 0; i + 2 < json.length; i++) {
-            if (json[i] == '\\' && json[i + 1] == 'u' && (json[i + 2] == 'd' || json[i + 2] == 'D')) {
-                return true;
-            }
-        }
-        return false;
+        // As a text of single bytes, since the Java machine finds characters in texts many at a time.
+        String bytes = new String(json, StandardCharsets.ISO_8859_1);
+        return bytes.indexOf('\\') >= 0 && (bytes.contains("\\ud") || bytes.contains("\\uD"));
     }
 
     private static void refuseHalfCharacters(JsonNode node, String pointer) throws NotJsonException {
