@@ -6,6 +6,7 @@ import static org.hamcrest.Matchers.containsInAnyOrder;
 import static org.hamcrest.Matchers.containsString;
 import static org.hamcrest.Matchers.equalTo;
 import static org.hamcrest.Matchers.not;
+import static org.hamcrest.Matchers.notNullValue;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
@@ -112,6 +113,7 @@ class RoomsApiTest {
                 .statusCode(412)
                 .header("ETag", tag("studio-1"))
                 .body("yours.height", equalTo("2.2 m"))
+                .body("requestId", notNullValue())
                 .body("theirs.height", equalTo("3.3 m"))
                 .body("differences.address", containsInAnyOrder("/height", "/remark"))
                 .body("differences.find { it.address == '/height' }.before", equalTo("3.3 m"))

@@ -19,7 +19,6 @@ import org.treadwarm.survey.Problem;
 import org.treadwarm.survey.Room;
 import org.treadwarm.web.Problems;
 import org.treadwarm.wire.Json;
-import org.treadwarm.wire.ProblemDocument;
 
 /** Single rooms over the API: each has a tag of its own, so that work in two rooms never collides. */
 final class RoomsApi {
@@ -52,6 +51,7 @@ final class RoomsApi {
      * @param yours what was to be saved; left out when the room was to be taken out
      * @param theirs what stands there now
      * @param differences from theirs to yours
+     * @param requestId the id of the request that met it
      */
     record RoomConflict(
             String type,
@@ -61,8 +61,9 @@ final class RoomsApi {
             List<Problem> errors,
             Optional<JsonNode> yours,
             JsonNode theirs,
-            List<DifferenceAnswer> differences) {
-        static RoomConflict of(Saving.Stale stale) {
+            List<DifferenceAnswer> differences,
+            Optional<String> requestId) {
+        static RoomConflict of(Saving.Stale stale, Optional<String> requestId) {
             JsonNode yours = stale.yours();
             JsonNode theirs = stale.theirs().room();
             return new RoomConflict(
@@ -73,7 +74,8 @@ final class RoomsApi {
                     List.of(),
                     yours.isMissingNode() ? Optional.empty() : Optional.of(yours),
                     theirs,
-                    yours.isMissingNode() ? List.of() : DifferenceAnswer.between(theirs, yours, Room.class));
+                    yours.isMissingNode() ? List.of() : DifferenceAnswer.between(theirs, yours, Room.class),
+                    requestId);
         }
     }
 
@@ -172,9 +174,7 @@ final class RoomsApi {
     private static void refuse(Context ctx, Saving saving) {
         if (saving instanceof Saving.Stale stale) {
             ctx.header("ETag", Tags.quoted(stale.theirs().tag()));
-            ctx.status(412);
-            ctx.contentType(ProblemDocument.MEDIA_TYPE);
-            ctx.result(Json.bytes(RoomConflict.of(stale)));
+            Problems.write(ctx, 412, RoomConflict.of(stale, Problems.requestId(ctx)));
         } else if (saving instanceof Saving.Crowded) {
             Problems.plain(
                     ctx,
