@@ -34,6 +34,8 @@ public final class Multipart {
             ctx.req().getParts();
             return OptionalInt.empty();
         } catch (IOException | ServletException | RuntimeException e) {
+            // the server ends such a connection; a caller that is not told sends its next request into nothing
+            ctx.header("Connection", "close");
             return OptionalInt.of(400);
         }
     }
