@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
-import java.util.stream.Stream;
 import org.treadwarm.sizing.Sizing.FloorSizing;
 import org.treadwarm.sizing.Sizing.RoomSizing;
 import org.treadwarm.sizing.Sizing.Warning;
@@ -232,14 +231,17 @@ final class FloorWarnings {
     }
 
     private static boolean isTender(Layer layer) {
-        return TENDER.stream().anyMatch(words(layer)::contains);
+        String words = words(layer);
+        for (String tender : TENDER) {
+            if (words.contains(tender)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private static String words(Layer layer) {
-        return Stream.of(layer.name(), layer.material())
-                .flatMap(Optional::stream)
-                .reduce("", (a, b) -> a + " " + b)
-                .toLowerCase(Locale.ROOT);
+        return (" " + layer.name().orElse("") + " " + layer.material().orElse("")).toLowerCase(Locale.ROOT);
     }
 
     private void flux(String pointer, HeatedFloor floor, FloorSizing answer) {

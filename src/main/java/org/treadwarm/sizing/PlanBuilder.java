@@ -52,6 +52,8 @@ final class PlanBuilder {
     /** Own surfaces, heard surfaces, own junctions, heard junctions, air. */
     private static final int RANKS = 5;
 
+    private static final int SIDES = Side.values().length;
+
     final Survey survey;
     final Inputs inputs = new Inputs();
     final int rooms;
@@ -77,7 +79,7 @@ final class PlanBuilder {
     private final Map<String, Integer> assemblyNumbers = new HashMap<>();
 
     /** The number of the face of each assembly on each side, or none. */
-    private final int[][] faceNumbers;
+    private final int[] faceNumbers;
 
     PlanBuilder(Survey survey) {
         this.survey = survey;
@@ -89,16 +91,14 @@ final class PlanBuilder {
         factor = new int[rooms + spaces + 2];
         floors = new FloorPlan[rooms];
         roomIndexes = new RoomIndexes[rooms];
-        faceNumbers = new int[survey.assemblies().size()][Side.values().length];
+        faceNumbers = new int[survey.assemblies().size() * SIDES];
     }
 
     Plan build() {
         java.util.Arrays.fill(nodeTemperature, NONE);
         java.util.Arrays.fill(floating, NONE);
         java.util.Arrays.fill(factor, NONE);
-        for (int[] sides : faceNumbers) {
-            java.util.Arrays.fill(sides, NONE);
-        }
+        java.util.Arrays.fill(faceNumbers, NONE);
         site();
         nodes();
         survey.assemblies().forEach(this::assembly);
@@ -313,12 +313,12 @@ final class PlanBuilder {
 
     private int face(String assembly, Side side) {
         int number = assemblyNumbers.get(assembly);
-        int[] known = faceNumbers[number];
-        if (known[side.ordinal()] == NONE) {
-            known[side.ordinal()] = faces.size();
+        int at = number * SIDES + side.ordinal();
+        if (faceNumbers[at] == NONE) {
+            faceNumbers[at] = faces.size();
             faces.add(new Face(number, side));
         }
-        return known[side.ordinal()];
+        return faceNumbers[at];
     }
 
     private int ground(Place at, Ground ground, int floorArea) {
@@ -433,22 +433,23 @@ final class PlanBuilder {
 
     /** The paths of every room and space: own surfaces, heard surfaces, own junctions, heard junctions, air. */
     PathRef[][] paths() {
-        int[][] counts = new int[rooms + spaces + 2][RANKS];
+        // by node and rank, in one array
+        int[] counts = new int[(rooms + spaces + 2) * RANKS];
         for (Link link : links) {
-            counts[link.owner()][rank(link, false)]++;
+            counts[link.owner() * RANKS + rank(link, false)]++;
             if (isHeard(link)) {
-                counts[link.other()][rank(link, true)]++;
+                counts[link.other() * RANKS + rank(link, true)]++;
             }
         }
-        PathRef[][] paths = new PathRef[counts.length][];
+        PathRef[][] paths = new PathRef[rooms + spaces + 2][];
         for (int node = 0; node < paths.length; node++) {
-            paths[node] = new PathRef[startsOf(counts[node])];
+            paths[node] = new PathRef[startsOf(counts, node * RANKS)];
         }
         for (int i = 0; i < links.size(); i++) {
             Link link = links.get(i);
-            paths[link.owner()][counts[link.owner()][rank(link, false)]++] = new PathRef(i, false);
+            paths[link.owner()][counts[link.owner() * RANKS + rank(link, false)]++] = new PathRef(i, false);
             if (isHeard(link)) {
-                paths[link.other()][counts[link.other()][rank(link, true)]++] = new PathRef(i, true);
+                paths[link.other()][counts[link.other() * RANKS + rank(link, true)]++] = new PathRef(i, true);
             }
         }
         return paths;
@@ -466,12 +467,12 @@ final class PlanBuilder {
         };
     }
 
-    /** Turns counts into the places where each rank starts, and gives their sum. */
-    private static int startsOf(int[] counts) {
+    /** Turns the counts of one node into the places where each rank starts, and gives their sum. */
+    private static int startsOf(int[] counts, int from) {
         int sum = 0;
-        for (int rank = 0; rank < counts.length; rank++) {
-            int count = counts[rank];
-            counts[rank] = sum;
+        for (int i = from; i < from + RANKS; i++) {
+            int count = counts[i];
+            counts[i] = sum;
             sum += count;
         }
         return sum;

@@ -63,40 +63,49 @@ public final class Readings {
     private void record(Record record) {
         for (Shape.Key key : Shape.of(record.getClass()).holdingReadings()) {
             Object value = key.in(record);
-            if (value instanceof Optional<?> optional) {
-                if (optional.isEmpty()) {
-                    continue;
-                }
-                value = optional.get();
+            if (key.many() == Shape.Many.OPTIONAL) {
+                value = ((Optional<?>) value).orElse(null);
             }
-            names[depth++] = key.name();
-            value(key, value);
-            depth--;
+            if (value != null) {
+                names[depth++] = key.name();
+                value(key, value);
+                depth--;
+            }
         }
     }
 
     private void value(Shape.Key key, Object value) {
-        if (value instanceof Reading reading) {
-            Declared declared = key.quantity().orElseThrow();
-            if (choice.wants(declared, reading)) {
-                visitor.reading(address(), declared, reading);
+        switch (key.many()) {
+            case ONE, OPTIONAL -> one(key, value);
+            case LIST -> {
+                List<?> list = (List<?>) value;
+                names[depth++] = null;
+                for (int i = 0; i < list.size(); i++) {
+                    places[depth - 1] = i;
+                    one(key, list.get(i));
+                }
+                depth--;
             }
-        } else if (value instanceof Record record) {
-            record(record);
-        } else if (value instanceof List<?> list) {
-            names[depth++] = null;
-            for (int i = 0; i < list.size(); i++) {
-                places[depth - 1] = i;
-                value(key, list.get(i));
+            case MAP -> {
+                depth++;
+                ((Map<?, ?>) value).forEach((name, held) -> {
+                    names[depth - 1] = (String) name;
+                    one(key, held);
+                });
+                depth--;
             }
-            depth--;
-        } else if (value instanceof Map<?, ?> map) {
-            depth++;
-            map.forEach((name, held) -> {
-                names[depth - 1] = (String) name;
-                value(key, held);
-            });
-            depth--;
+        }
+    }
+
+    private void one(Shape.Key key, Object value) {
+        if (key.holds() == Shape.Holds.OBJECT) {
+            record((Record) value);
+            return;
+        }
+        Declared declared = key.quantity().orElseThrow();
+        Reading reading = (Reading) value;
+        if (choice.wants(declared, reading)) {
+            visitor.reading(address(), declared, reading);
         }
     }
 }

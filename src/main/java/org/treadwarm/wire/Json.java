@@ -25,6 +25,7 @@ public final class Json {
                     .build())
             .addModule(new Jdk8Module())
             .addModule(Decimals.module())
+            .addModule(Rows.module())
             .addModule(new SimpleModule().addSerializer(Instant.class, ToStringSerializer.instance))
             .defaultPropertyInclusion(
                     JsonInclude.Value.construct(JsonInclude.Include.NON_ABSENT, JsonInclude.Include.NON_ABSENT))

@@ -1,17 +1,20 @@
 package org.treadwarm.wire;
 
+import java.lang.invoke.MethodHandles;
+import java.lang.invoke.VarHandle;
 import java.math.BigInteger;
+import java.nio.ByteOrder;
 
 /**
- * The shortest decimal that reads back as a given double, as characters. A sizing writes hundreds of numbers, and their digits
+ * The shortest decimal that reads back as a given double, as bytes of ASCII. A sizing writes hundreds of numbers, and their digits
  * are the largest part of writing an answer.
  *
  * <p>Source: R. Giulietti, "The Schubfach way to render doubles" (2020), from memory; the numbers' form is that of
  * {@link Double#toString(double)}.
  */
 final class ShortestDecimal {
-    /** The most characters of a number: sign, 17 digits, point, E, sign and three digits of the exponent. */
-    static final int LONGEST = 24;
+    /** The room that a number needs: sign, 17 digits, point, E, sign, and an exponent that is written as eight bytes. */
+    static final int LONGEST = 29;
 
     private static final int FRACTION_BITS = 52;
     private static final int EXPONENT_MASK = 0x7ff;
@@ -22,8 +25,9 @@ final class ShortestDecimal {
 
     private static final long HUNDRED_MILLION = 100_000_000;
 
-    /** The digits of 00 to 99. */
-    private static final char[] PAIRS = new char[200];
+    private static final long EIGHT_ZEROS = 0x3030_3030_3030_3030L;
+    private static final VarHandle EIGHT_BYTES =
+            MethodHandles.byteArrayViewVarHandle(long[].class, ByteOrder.LITTLE_ENDIAN);
 
     /** The least number of 1, 2, 3 digits and so on. */
     private static final long[] POWERS_OF_TEN = new long[18];
@@ -39,10 +43,6 @@ final class ShortestDecimal {
     private static final long[] LOW = new long[HIGH.length];
 
     static {
-        for (int i = 0; i < 100; i++) {
-            PAIRS[2 * i] = (char) ('0' + i / 10);
-            PAIRS[2 * i + 1] = (char) ('0' + i % 10);
-        }
         POWERS_OF_TEN[0] = 1;
         for (int i = 1; i < POWERS_OF_TEN.length; i++) {
             POWERS_OF_TEN[i] = 10 * POWERS_OF_TEN[i - 1];
@@ -66,7 +66,7 @@ final class ShortestDecimal {
      *
      * @return where it ends
      */
-    static int write(double value, char[] to, int start) {
+    static int write(double value, byte[] to, int start) {
         long bits = Double.doubleToRawLongBits(value);
         int at = start;
         if (bits < 0) {
@@ -86,7 +86,7 @@ final class ShortestDecimal {
     }
 
     /** The shortest decimal within the interval that rounds to mantissa x 2^scale; the nearest of those that are as short. */
-    private static int shortest(long mantissa, int scale, boolean narrowBelow, char[] to, int at) {
+    private static int shortest(long mantissa, int scale, boolean narrowBelow, byte[] to, int at) {
         int k = narrowBelow ? floorLog10ThreeQuartersOfPowerOf2(scale) : floorLog10PowerOf2(scale);
         int shift = scale + floorLog2PowerOf10(-k) + 2;
         long high = HIGH[k - LEAST_POWER];
@@ -124,16 +124,18 @@ final class ShortestDecimal {
     }
 
     /** Lays out digits x 10^exponent: plainly from 0.001 to below 10 000 000, else with one digit before the point and an exponent. */
-    private static int layOut(long digits, int exponent, char[] to, int at) {
+    private static int layOut(long digits, int exponent, byte[] to, int at) {
         long significant = digits;
         int power = exponent;
-        while (significant >= HUNDRED_MILLION && significant % HUNDRED_MILLION == 0) {
-            significant /= HUNDRED_MILLION;
-            power += 8;
-        }
-        while (significant != 0 && significant % 10 == 0) {
-            significant /= 10;
-            power++;
+        if (significant != 0 && significant % 10 == 0) {
+            while (significant % HUNDRED_MILLION == 0) {
+                significant /= HUNDRED_MILLION;
+                power += 8;
+            }
+            while (significant % 10 == 0) {
+                significant /= 10;
+                power++;
+            }
         }
         int count = count(significant);
         int point = count + power;
@@ -146,7 +148,7 @@ final class ShortestDecimal {
     }
 
     /** Digits with the point after so many of them; with zeros where there are none. */
-    private static int plain(long digits, int count, int point, char[] to, int start) {
+    private static int plain(long digits, int count, int point, byte[] to, int start) {
         int at = start;
         if (point <= 0) {
             to[at++] = '0';
@@ -167,45 +169,45 @@ final class ShortestDecimal {
         }
         // All digits one place to the right, then those before the point back to where they belong.
         int end = digits(digits, count, to, at + 1);
-        System.arraycopy(to, at + 1, to, at, point);
-        to[at + point] = '.';
+        for (int i = 0; i < point; i++) {
+            to[at] = to[at + 1];
+            at++;
+        }
+        to[at] = '.';
         return end;
     }
 
-    private static int digits(long digits, int count, char[] to, int at) {
-        int end = at + count;
-        int i = end;
-        long above = digits;
-        while (above >= HUNDRED_MILLION) {
-            long rest = above / HUNDRED_MILLION;
-            int eight = (int) (above - rest * HUNDRED_MILLION);
-            for (int pair = 0; pair < 4; pair++) {
-                int hundredth = eight / 100;
-                i = pair(eight - 100 * hundredth, to, i);
-                eight = hundredth;
-            }
-            above = rest;
+    /** Writes so many digits; up to seven bytes beyond their end are written over. */
+    private static int digits(long digits, int count, byte[] to, int start) {
+        int end = start + count;
+        int at = start;
+        long rest = digits;
+        if (count > 16) {
+            long first = rest / HUNDRED_MILLION / HUNDRED_MILLION;
+            to[at++] = (byte) ('0' + first);
+            rest -= first * HUNDRED_MILLION * HUNDRED_MILLION;
         }
-        int rest = (int) above;
-        while (i - at >= 2) {
-            int hundredth = rest / 100;
-            i = pair(rest - 100 * hundredth, to, i);
-            rest = hundredth;
+        if (count > 8) {
+            long upper = rest / HUNDRED_MILLION;
+            EIGHT_BYTES.set(to, at, eightDigits(upper) >>> 8 * (8 - (end - at - 8)));
+            rest -= upper * HUNDRED_MILLION;
+            at = end - 8;
         }
-        if (i > at) {
-            to[at] = (char) ('0' + rest);
-        }
+        EIGHT_BYTES.set(to, at, eightDigits(rest) >>> 8 * (8 - (end - at)));
         return end;
     }
 
-    /** Writes two digits in front of a place. */
-    private static int pair(int number, char[] to, int end) {
-        to[end - 2] = PAIRS[2 * number];
-        to[end - 1] = PAIRS[2 * number + 1];
-        return end - 2;
+    /** The eight digits of a number as bytes, the first one lowest: all of them are found side by side in one long. */
+    private static long eightDigits(long number) {
+        long upper = number / 10_000;
+        long fours = upper | number - 10_000 * upper << 32;
+        long hundreds = (fours * 5243 >>> 19) & 0x7f_0000_007fL;
+        long twos = hundreds | fours - 100 * hundreds << 16;
+        long tens = (twos * 103 >>> 10) & 0xf_000f_000f_000fL;
+        return (tens | twos - 10 * tens << 8) + EIGHT_ZEROS;
     }
 
-    private static int whole(int number, char[] to, int start) {
+    private static int whole(int number, byte[] to, int start) {
         int at = start;
         int size = number;
         if (number < 0) {
@@ -215,12 +217,10 @@ final class ShortestDecimal {
         return digits(size, count(size), to, at);
     }
 
+    /** How many digits a number has: its bits times log10 2, which may be one too many. */
     private static int count(long number) {
-        int count = POWERS_OF_TEN.length;
-        while (count > 1 && number < POWERS_OF_TEN[count - 1]) {
-            count--;
-        }
-        return count;
+        int most = ((Long.SIZE - Long.numberOfLeadingZeros(number | 1)) * 1233 >> 12) + 1;
+        return number < POWERS_OF_TEN[most - 1] && most > 1 ? most - 1 : most;
     }
 
     /** floor(log10(2^e)) for the exponents of doubles: log10 2 in 41 bits. */

@@ -3,6 +3,7 @@ package org.treadwarm.wire;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import com.fasterxml.jackson.core.io.NumberOutput;
+import java.nio.charset.StandardCharsets;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -97,7 +98,7 @@ class ShortestDecimalTest {
     }
 
     private static String text(double value) {
-        char[] characters = new char[ShortestDecimal.LONGEST];
-        return new String(characters, 0, ShortestDecimal.write(value, characters, 0));
+        byte[] characters = new byte[ShortestDecimal.LONGEST];
+        return new String(characters, 0, ShortestDecimal.write(value, characters, 0), StandardCharsets.US_ASCII);
     }
 }
