@@ -4,7 +4,10 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 
-/** A surface is listed once, by either side; the same name from opposite sides is most likely the same surface twice. */
+/**
+ * A surface is listed once, by either side; the same name from opposite sides is most likely the same surface twice. Outdoors
+ * and the ground list none.
+ */
 final class Listings {
     private final Survey survey;
     private final Findings findings;
@@ -29,6 +32,9 @@ final class Listings {
     private void check(Place at, String owner, List<Surface> surfaces) {
         for (int i = 0; i < surfaces.size(); i++) {
             Surface surface = surfaces.get(i);
+            if (surface.to().equals(Survey.OUTDOORS) || surface.to().equals(Survey.GROUND)) {
+                continue;
+            }
             Place own = at.item("/surfaces", i);
             Place opposite = listed.get(new Listing(surface.to(), owner, surface.title()));
             if (opposite != null && !surface.to().equals(owner)) {

@@ -1,5 +1,8 @@
 package org.treadwarm.survey;
 
+import java.lang.invoke.MethodHandle;
+import java.lang.invoke.MethodHandles;
+import java.lang.invoke.MethodType;
 import java.lang.reflect.Constructor;
 import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.ParameterizedType;
@@ -71,7 +74,7 @@ public final class Shape {
      * @param fallback the text that stands when it is left out; empty for none
      * @param whenAbsent what stands when it is left out; empty when the document must have it
      * @param words the words that may stand here, when it holds a word
-     * @param component where a record keeps it
+     * @param accessor takes it out of a record
      */
     public record Key(
             String name,
@@ -85,7 +88,7 @@ public final class Shape {
             String fallback,
             Optional<Object> whenAbsent,
             List<Word> words,
-            RecordComponent component) {
+            MethodHandle accessor) {
         /** Whether the document must have it. */
         public boolean required() {
             return whenAbsent.isEmpty();
@@ -94,8 +97,8 @@ public final class Shape {
         /** What a record holds under this key. */
         public Object in(Record owner) {
             try {
-                return component.getAccessor().invoke(owner);
-            } catch (IllegalAccessException | InvocationTargetException e) {
+                return accessor.invokeExact(owner);
+            } catch (Throwable e) {
                 throw new IllegalStateException("cannot read " + name, e);
             }
         }
@@ -108,8 +111,6 @@ public final class Shape {
         Class<?>[] parameters = new Class<?>[components.length];
         for (int i = 0; i < components.length; i++) {
             Key key = key(components[i]);
-            // The accessor is public already; this spares a check at each call.
-            key.component().getAccessor().setAccessible(true);
             keys.put(key.name(), key);
             parameters[i] = components[i].getType();
         }
@@ -212,7 +213,17 @@ public final class Shape {
                 fallback,
                 whenAbsent(many, fallback, holds, held, quantity),
                 holds == Holds.WORD ? words(held) : List.of(),
-                component);
+                accessor(component));
+    }
+
+    private static MethodHandle accessor(RecordComponent component) {
+        try {
+            return MethodHandles.publicLookup()
+                    .unreflect(component.getAccessor())
+                    .asType(MethodType.methodType(Object.class, Record.class));
+        } catch (IllegalAccessException e) {
+            throw new IllegalStateException("cannot read " + component.getName(), e);
+        }
     }
 
     private static Optional<Object> whenAbsent(
