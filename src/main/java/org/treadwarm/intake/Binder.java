@@ -29,6 +29,7 @@ import org.treadwarm.units.ReadingParser;
 final class Binder {
     private static final String REHEAT = "reheat";
     private static final String WARM_UP = "warmUp";
+    private static final int NONE = -1;
 
     private final Findings findings;
 
@@ -43,22 +44,33 @@ final class Binder {
             return null;
         }
         Shape shape = Shape.of(type);
-        JsonNode[] nodes = nodes(tree, shape, at);
-        boolean goalAsReheat = type == Room.class && isGoal(tree.get(REHEAT));
-        Object[] values = new Object[nodes.length];
-        for (int i = 0; i < nodes.length; i++) {
-            Shape.Key key = shape.key(i);
-            String name = key.name();
-            JsonNode node = nodes[i];
-            if (goalAsReheat && name.equals(REHEAT)) {
-                node = null;
-            } else if (goalAsReheat && name.equals(WARM_UP)) {
-                name = REHEAT;
-                node = tree.get(REHEAT);
+        Object[] values = shape.whenAbsent();
+        long open = shape.required();
+        for (Map.Entry<String, JsonNode> field : tree.properties()) {
+            int index = shape.indexOf(field.getKey());
+            if (index < 0) {
+                refuseUnknownKey(field.getKey(), shape, at);
+            } else {
+                values[index] = field.getValue();
+                open |= 1L << index;
             }
-            values[i] = node == null ? absent(key, at) : value(node, key, at.key(name));
         }
-        if (goalAsReheat && tree.has(WARM_UP)) {
+        int goal = NONE;
+        if (type == Room.class && isGoal(tree.get(REHEAT))) {
+            int reheat = shape.indexOf(REHEAT);
+            goal = shape.indexOf(WARM_UP);
+            values[goal] = tree.get(REHEAT);
+            values[reheat] = shape.key(reheat).whenAbsent().orElseThrow();
+            open = open & ~(1L << reheat) | 1L << goal;
+        }
+        for (long left = open; left != 0; left &= left - 1) {
+            int i = Long.numberOfTrailingZeros(left);
+            Shape.Key key = shape.key(i);
+            values[i] = values[i] == null
+                    ? missing(key, at)
+                    : value((JsonNode) values[i], key, at.key(i == goal ? REHEAT : key.name()));
+        }
+        if (goal != NONE && tree.has(WARM_UP)) {
             add(
                     at.key(WARM_UP),
                     "reheat and warmUp",
@@ -80,20 +92,6 @@ final class Binder {
                 object.set(WARM_UP, object.remove(REHEAT));
             }
         }
-    }
-
-    /** What stands under each key of a shape, absent where the tree has nothing; keys that are none are found. */
-    private JsonNode[] nodes(JsonNode tree, Shape shape, Place at) {
-        JsonNode[] nodes = new JsonNode[shape.keys().size()];
-        for (Map.Entry<String, JsonNode> field : tree.properties()) {
-            int index = shape.indexOf(field.getKey());
-            if (index >= 0) {
-                nodes[index] = field.getValue();
-            } else {
-                refuseUnknownKey(field.getKey(), shape, at);
-            }
-        }
-        return nodes;
     }
 
     private void refuseUnknownKey(String name, Shape shape, Place at) {
@@ -139,10 +137,7 @@ final class Binder {
         return value instanceof Reading reading && Double.isNaN(reading.value()) ? null : value;
     }
 
-    private Object absent(Shape.Key key, Place at) {
-        if (key.whenAbsent().isPresent()) {
-            return key.whenAbsent().get();
-        }
+    private Object missing(Shape.Key key, Place at) {
         addUnread(at.key(key.name()), "nothing", "the " + key.label() + " is missing", allowed(key));
         return blank(key);
     }

@@ -8,26 +8,26 @@ final class AirRules {
         this.findings = findings;
     }
 
-    void check(String pointer, Air air) {
+    void check(Place at, Air air) {
         int ways = (air.changeRate().isPresent() ? 1 : 0)
                 + (air.flow().isPresent() ? 1 : 0)
                 + (air.supply().isPresent() ? 1 : 0);
-        boolean judged = findings.clean(pointer, "/changeRate")
-                && findings.clean(pointer, "/flow")
-                && findings.clean(pointer, "/supply");
+        boolean judged =
+                findings.clean(at, "/changeRate") && findings.clean(at, "/flow") && findings.clean(at, "/supply");
         if (ways != 1 && judged) {
             findings.add(
-                    pointer,
+                    at.pointer(),
                     ways + " of them",
                     "the air is known by one of a change rate, a flow, or a supply with recovery",
                     "exactly one of changeRate; flow; supply with recovery");
         }
         if (air.supply().isPresent() && air.recovery().isEmpty()) {
-            findings.missing(pointer + "/recovery", "a supply needs the share of heat recovered", "0 to 1");
+            findings.missing(at, "/recovery", "a supply needs the share of heat recovered", "0 to 1");
         }
         if (air.supply().isEmpty() && air.recovery().isPresent() && judged) {
             findings.add(
-                    pointer + "/recovery",
+                    at,
+                    "/recovery",
                     air.recovery().get().typed(),
                     "heat is recovered only from a supply",
                     "leave it out, or give the supply");

@@ -30,6 +30,9 @@ final class Connections {
                 floating.add(name);
             }
         });
+        if (floating.isEmpty()) {
+            return;
+        }
         if (floating.size() > Rules.MOST_FLOATING) {
             findings.add(
                     "/spaces",
@@ -64,10 +67,12 @@ final class Connections {
 
     private void join(String owner, List<Surface> surfaces, List<Junction> junctions) {
         surfaces.forEach(surface -> join(owner, surface.to()));
-        junctions.stream()
-                .filter(junction -> junction.psi().value() * junction.length().value() > 0)
-                .filter(junction -> junction.at() == JunctionPlace.ROOM)
-                .forEach(junction -> join(owner, junction.to()));
+        junctions.forEach(junction -> {
+            boolean conducts = junction.psi().value() * junction.length().value() > 0;
+            if (conducts && junction.at() == JunctionPlace.ROOM) {
+                join(owner, junction.to());
+            }
+        });
     }
 
     private void join(String a, String b) {

@@ -33,6 +33,16 @@ public final class Findings {
         }
     }
 
+    /** Adds a problem at an address below a place. */
+    void add(Place above, String below, String given, String message, String allowed) {
+        add(above.pointer() + below, given, message, allowed);
+    }
+
+    /** Adds that something is missing at an address below a place. */
+    void missing(Place above, String below, String message, String allowed) {
+        missing(above.pointer() + below, message, allowed);
+    }
+
     /** Adds a problem that leaves everything below its address unread, so that nothing more is found there. */
     public void addUnread(String pointer, String given, String message, String allowed) {
         add(pointer, given, message, allowed);
@@ -64,9 +74,9 @@ public final class Findings {
         return !pointers.contains(pointer) && !pointers.contains(pointer + "/reading") && !isUnread(pointer);
     }
 
-    /** Whether nothing was found at an address below another; the address is put together only when that can matter. */
-    public boolean clean(String above, String below) {
-        return pointers.isEmpty() || clean(above + below);
+    /** Whether nothing was found at an address below a place; the address is put together only when that can matter. */
+    boolean clean(Place above, String below) {
+        return pointers.isEmpty() || clean(above.pointer() + below);
     }
 
     /** Whether nothing was found at all. */

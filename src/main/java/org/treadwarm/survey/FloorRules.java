@@ -18,41 +18,44 @@ final class FloorRules {
         this.ground = ground;
     }
 
-    void check(String pointer, Room room, HeatedFloor floor) {
-        boolean judged = findings.clean(pointer, "/ground") && findings.clean(pointer, "/to");
+    void check(Place at, Room room, HeatedFloor floor) {
+        boolean judged = findings.clean(at, "/ground") && findings.clean(at, "/to");
         if (floor.ground().isPresent() == floor.to().isPresent() && judged) {
             findings.add(
-                    pointer,
+                    at.pointer(),
                     floor.to().isPresent() ? "ground and to" : "neither ground nor to",
                     "a heated floor lies either on the ground or over something",
                     "exactly one of ground and to");
         }
-        floor.ground().ifPresent(slab -> ground.floor(pointer + "/ground", slab));
+        floor.ground().ifPresent(slab -> ground.floor(at.at("/ground"), slab));
         floor.to().ifPresent(to -> {
             if (to.equals(Survey.GROUND)) {
                 findings.add(
-                        pointer + "/to",
+                        at,
+                        "/to",
                         to,
                         "a heated floor on the ground is described by \"ground\"",
                         "outdoors, or the name of a space or of another room");
             } else {
-                otherSides.check(pointer, to, room.name(), true);
+                otherSides.check(at, to, room.name(), true);
             }
         });
-        layers(pointer, floor);
-        heater(pointer, floor);
-        floor.plan().ifPresent(plan -> new PlanRules(findings).check(pointer + "/plan", plan));
-        new PartRules(findings, pointer, floor).check();
+        layers(at, floor);
+        heater(at, floor);
+        floor.plan()
+                .ifPresent(plan -> new PlanRules(findings).check(at.at("/plan").pointer(), plan));
+        new PartRules(findings, at, floor).check();
     }
 
-    private void layers(String pointer, HeatedFloor floor) {
+    private void layers(Place at, HeatedFloor floor) {
         LayerRules layers = new LayerRules(findings);
-        layers.layers(pointer + "/above", floor.above());
-        layers.layers(pointer + "/below", floor.below());
+        layers.layers(at.at("/above"), floor.above());
+        layers.layers(at.at("/below"), floor.below());
         for (int i = 0; i < floor.above().size(); i++) {
             if (floor.above().get(i).bridging().isPresent()) {
                 findings.add(
-                        pointer + "/above/" + i + "/bridging",
+                        at.item("/above", i),
+                        "/bridging",
                         "framing",
                         "layers above the heater cannot be crossed by framing",
                         "leave it out");
@@ -60,52 +63,48 @@ final class FloorRules {
         }
     }
 
-    private void heater(String pointer, HeatedFloor floor) {
+    private void heater(Place at, HeatedFloor floor) {
         floor.heater()
-                .filter(heater -> findings.clean(pointer, "/heater/kind"))
-                .ifPresent(heater -> heater(pointer + "/heater", heater));
+                .filter(heater -> findings.clean(at, "/heater/kind"))
+                .ifPresent(heater -> heater(at.at("/heater"), heater));
     }
 
-    private void heater(String pointer, Heater heater) {
+    private void heater(Place at, Heater heater) {
         if (heater.kind() == HeaterKind.WATER) {
-            notHis(pointer + "/density", heater.density(), "only an electric heater has an installed density");
-            notHis(pointer + "/linearPower", heater.linearPower(), "only an electric heater has a power per metre");
-            notHis(pointer + "/voltage", heater.voltage(), "only an electric heater has a voltage");
+            notHis(at, "/density", heater.density(), "only an electric heater has an installed density");
+            notHis(at, "/linearPower", heater.linearPower(), "only an electric heater has a power per metre");
+            notHis(at, "/voltage", heater.voltage(), "only an electric heater has a voltage");
             if (!heater.mats().isEmpty()) {
-                findings.add(
-                        pointer + "/mats", words(heater.mats()), "only an electric heater has mats", "leave them out");
+                findings.add(at, "/mats", words(heater.mats()), "only an electric heater has mats", "leave them out");
             }
-            heater.glycol().ifPresent(share -> mixture(pointer + "/glycol", share));
+            heater.glycol().ifPresent(share -> mixture(at.at("/glycol"), share));
         } else {
-            notHis(pointer + "/wallThickness", heater.wallThickness(), "only a pipe has a wall");
-            notHis(pointer + "/wallConductivity", heater.wallConductivity(), "only a pipe has a wall");
-            notHis(
-                    pointer + "/supplyTemperature",
-                    heater.supplyTemperature(),
-                    "only warm water has a supply temperature");
-            notHis(pointer + "/spread", heater.spread(), "only warm water has a spread");
-            notHis(pointer + "/feederLength", heater.feederLength(), "only warm water has feeders");
-            mats(pointer, heater);
-            notHis(pointer + "/manifoldDrop", heater.manifoldDrop(), "only warm water comes from a manifold");
-            notHis(pointer + "/glycol", heater.glycol(), "only warm water may hold glycol");
+            notHis(at, "/wallThickness", heater.wallThickness(), "only a pipe has a wall");
+            notHis(at, "/wallConductivity", heater.wallConductivity(), "only a pipe has a wall");
+            notHis(at, "/supplyTemperature", heater.supplyTemperature(), "only warm water has a supply temperature");
+            notHis(at, "/spread", heater.spread(), "only warm water has a spread");
+            notHis(at, "/feederLength", heater.feederLength(), "only warm water has feeders");
+            mats(at, heater);
+            notHis(at, "/manifoldDrop", heater.manifoldDrop(), "only warm water comes from a manifold");
+            notHis(at, "/glycol", heater.glycol(), "only warm water may hold glycol");
             heater.manifold()
                     .ifPresent(name -> findings.add(
-                            pointer + "/manifold", name, "only warm water comes from a manifold", "leave it out"));
+                            at, "/manifold", name, "only warm water comes from a manifold", "leave it out"));
         }
-        sizes(pointer, heater);
+        sizes(at, heater);
     }
 
-    private void mats(String pointer, Heater heater) {
+    private void mats(Place at, Heater heater) {
         if (heater.mats().size() > Heater.MOST_MATS) {
             findings.add(
-                    pointer + "/mats",
+                    at,
+                    "/mats",
                     words(heater.mats()),
                     "a list of so many kinds of mats has too many combinations",
                     "at most " + Heater.MOST_MATS);
         }
         if (!heater.mats().isEmpty() && heater.voltage().isEmpty()) {
-            findings.missing(
-                    pointer + "/voltage", "the power of mats is told at a voltage", "the voltage they are made for");
+            findings.missing(at, "/voltage", "the power of mats is told at a voltage", "the voltage they are made for");
         }
     }
 
@@ -113,23 +112,27 @@ final class FloorRules {
         return mats.size() == 1 ? "1 mat" : mats.size() + " mats";
     }
 
-    private void mixture(String pointer, Reading share) {
+    private void mixture(Place at, Reading share) {
         if (share.value() > 0 && share.value() < PropyleneGlycol.WEAKEST) {
             findings.add(
-                    pointer, share.typed(), "so weak a mixture is not described", "0 for water alone, or 15 to 57 %");
+                    at.pointer(),
+                    share.typed(),
+                    "so weak a mixture is not described",
+                    "0 for water alone, or 15 to 57 %");
         }
     }
 
-    private void notHis(String pointer, Optional<Reading> reading, String message) {
-        reading.ifPresent(given -> findings.add(pointer, given.typed(), message, "leave it out"));
+    private void notHis(Place at, String below, Optional<Reading> reading, String message) {
+        reading.ifPresent(given -> findings.add(at, below, given.typed(), message, "leave it out"));
     }
 
-    private void sizes(String pointer, Heater heater) {
+    private void sizes(Place at, Heater heater) {
         boolean water = heater.kind() == HeaterKind.WATER;
         double diameter = heater.outsideDiameter();
         if (water && 2 * value(heater.wallThickness(), Heater.WALL_THICKNESS) >= diameter) {
             findings.add(
-                    pointer + (heater.wallThickness().isPresent() ? "/wallThickness" : "/diameter"),
+                    at,
+                    heater.wallThickness().isPresent() ? "/wallThickness" : "/diameter",
                     heater.wallThickness()
                             .or(heater::diameter)
                             .map(Reading::typed)
@@ -140,7 +143,8 @@ final class FloorRules {
         heater.spacing()
                 .filter(spacing -> spacing.value() <= diameter)
                 .ifPresent(spacing -> findings.add(
-                        pointer + "/spacing",
+                        at,
+                        "/spacing",
                         spacing.typed(),
                         "the cables or pipes would lie inside one another",
                         "more than the outside diameter of " + Numbers.significant(diameter * 1000, 3) + " mm"));

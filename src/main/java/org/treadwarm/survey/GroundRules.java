@@ -18,7 +18,7 @@ final class GroundRules {
         return anyOnGround;
     }
 
-    void surface(String pointer, Surface surface, boolean hasFloorArea) {
+    void surface(Place at, Surface surface, boolean hasFloorArea) {
         anyOnGround = true;
         boolean givenUValue = Optional.ofNullable(survey.assemblies().get(surface.assembly()))
                 .flatMap(Assembly::uValue)
@@ -26,42 +26,44 @@ final class GroundRules {
         if (surface.ground().isEmpty()) {
             if (!givenUValue) {
                 findings.missing(
-                        pointer + "/ground",
+                        at,
+                        "/ground",
                         "a surface to ground needs the slab it belongs to",
                         "kind, exposedPerimeter, wallThickness, soilConductivity");
             }
             return;
         }
-        slab(pointer + "/ground", surface.ground().get());
+        slab(at.at("/ground"), surface.ground().get());
         if (!hasFloorArea && surface.ground().get().area().isEmpty()) {
             findings.missing(
-                    pointer + "/ground/area",
+                    at,
+                    "/ground/area",
                     "a space has no floor area, so the slab's area is needed",
                     "more than 0 m2, at most 10 000 m2");
         }
     }
 
-    void floor(String pointer, Ground ground) {
+    void floor(Place at, Ground ground) {
         anyOnGround = true;
-        slab(pointer, ground);
+        slab(at, ground);
     }
 
-    private void slab(String pointer, Ground ground) {
-        if (!findings.clean(pointer, "/kind")) {
+    private void slab(Place at, Ground ground) {
+        if (!findings.clean(at, "/kind")) {
             return;
         }
         boolean suspended = ground.kind() == GroundKind.SUSPENDED;
-        only(pointer + "/floorHeight", ground.floorHeight().isPresent(), suspended, "0 to 1 000 m");
-        only(pointer + "/wallUValue", ground.wallUValue().isPresent(), suspended, "0.01 to 20 W/(m2.K)");
-        only(pointer + "/ventArea", ground.ventArea().isPresent(), suspended, "0 to 10 m2/m");
-        only(pointer + "/windSpeed", ground.windSpeed().isPresent(), suspended, "0 to 60 m/s");
+        only(at, "/floorHeight", ground.floorHeight().isPresent(), suspended, "0 to 1 000 m");
+        only(at, "/wallUValue", ground.wallUValue().isPresent(), suspended, "0.01 to 20 W/(m2.K)");
+        only(at, "/ventArea", ground.ventArea().isPresent(), suspended, "0 to 10 m2/m");
+        only(at, "/windSpeed", ground.windSpeed().isPresent(), suspended, "0 to 60 m/s");
     }
 
-    private void only(String pointer, boolean given, boolean suspended, String allowed) {
+    private void only(Place at, String below, boolean given, boolean suspended, String allowed) {
         if (suspended && !given) {
-            findings.missing(pointer, "a suspended floor needs this", allowed);
+            findings.missing(at, below, "a suspended floor needs this", allowed);
         } else if (!suspended && given) {
-            findings.add(pointer, "a value", "only a suspended floor has this", "leave it out");
+            findings.add(at, below, "a value", "only a suspended floor has this", "leave it out");
         }
     }
 }

@@ -12,22 +12,24 @@ final class JunctionRules {
         this.otherSides = otherSides;
     }
 
-    void check(String owner, String name, List<Junction> junctions, boolean isRoom, boolean hasHeatedFloor) {
+    void check(Place owner, String name, List<Junction> junctions, boolean isRoom, boolean hasHeatedFloor) {
         for (int i = 0; i < junctions.size(); i++) {
             Junction junction = junctions.get(i);
-            String pointer = owner + "/junctions/" + i;
+            Place at = owner.item("/junctions", i);
             if (junction.to().equals(Survey.GROUND)) {
                 findings.add(
-                        pointer + "/to",
+                        at,
+                        "/to",
                         junction.to(),
                         "a junction does not lead to the ground",
                         OtherSides.sides("outdoors"));
             } else {
-                otherSides.check(pointer, junction.to(), name, isRoom);
+                otherSides.check(at, junction.to(), name, isRoom);
             }
             if (junction.at() == JunctionPlace.HEATED_FLOOR && !hasHeatedFloor) {
                 findings.add(
-                        pointer + "/at",
+                        at,
+                        "/at",
                         junction.at().word(),
                         "there is no heated floor here for the junction to be at",
                         "room");

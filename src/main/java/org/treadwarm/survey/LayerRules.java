@@ -26,84 +26,90 @@ final class LayerRules {
         this.findings = findings;
     }
 
-    void assembly(String pointer, Assembly assembly) {
-        boolean judged = findings.clean(pointer, "/layers") && findings.clean(pointer, "/uValue");
+    void assembly(Place at, Assembly assembly) {
+        boolean judged = findings.clean(at, "/layers") && findings.clean(at, "/uValue");
         if (assembly.uValue().isPresent() && !assembly.layers().isEmpty()) {
             findings.add(
-                    pointer,
+                    at.pointer(),
                     "layers and uValue",
                     "an assembly is known by its layers or by its U-value",
                     "exactly one of layers and uValue");
         } else if (assembly.uValue().isEmpty() && assembly.layers().isEmpty() && judged) {
             findings.add(
-                    pointer,
+                    at.pointer(),
                     "neither layers nor uValue",
                     "an assembly needs its layers or its U-value",
                     "exactly one of layers and uValue");
         }
-        layers(pointer + "/layers", assembly.layers());
+        layers(at.at("/layers"), assembly.layers());
     }
 
-    void layers(String pointer, List<Layer> layers) {
+    void layers(Place at, List<Layer> layers) {
         Map<String, Double> shares = new HashMap<>();
-        Set<String> frames = new HashSet<>();
+        Set<String> named = new HashSet<>();
+        int frames = 0;
         for (int i = 0; i < layers.size(); i++) {
             Layer layer = layers.get(i);
-            String at = pointer + "/" + i;
-            layer(at, layer);
+            Place own = at.item(i);
+            layer(own, layer);
             if (layer.bridging().isPresent()) {
                 Bridging bridging = layer.bridging().get();
-                bridging(at, layer, bridging);
-                frames.add(bridging.frame().map(name -> "=" + name).orElse("#" + i));
-                oneShare(at + "/bridging/share", bridging, shares);
+                bridging(own, layer, bridging);
+                frames +=
+                        bridging.frame().isEmpty() || named.add(bridging.frame().get()) ? 1 : 0;
+                oneShare(own, bridging, shares);
             }
         }
-        if (frames.size() > CombinedMethod.MOST_FRAMES) {
+        if (frames > CombinedMethod.MOST_FRAMES) {
             findings.add(
-                    pointer,
-                    frames.size() + " frames",
+                    at.pointer(),
+                    frames + " frames",
                     "too many frames cross each other here",
                     "at most " + CombinedMethod.MOST_FRAMES + " that are not in register");
         }
     }
 
     /** The layers hold heat, so their density and specific heat must be known wherever they are no bare resistance. */
-    void layersThatHoldHeat(String pointer, List<Layer> layers) {
+    void layersThatHoldHeat(Place at, List<Layer> layers) {
         if (layers.size() > MOST_WARMED) {
-            findings.add(pointer, layers.size() + " layers", "there are too many layers", "at most " + MOST_WARMED);
+            findings.add(
+                    at.pointer(), layers.size() + " layers", "there are too many layers", "at most " + MOST_WARMED);
         }
-        layers(pointer, layers);
+        layers(at, layers);
         for (int i = 0; i < layers.size(); i++) {
             Layer layer = layers.get(i);
-            String at = pointer + "/" + i;
-            if (!findings.clean(at) || !findings.clean(at, "/material") || LayerMatter.isResistanceAlone(layer)) {
+            Place own = at.item(i);
+            if (!findings.clean(own, "") || !findings.clean(own, "/material") || LayerMatter.isResistanceAlone(layer)) {
                 continue;
             }
             List<String> missing = LayerMatter.of(layer).missing();
             if (missing.contains("density")) {
                 findings.missing(
-                        at + "/density",
+                        own,
+                        "/density",
                         "the density is missing, and no material tells it, so the heat the layer holds is not known",
                         "0.5 to 25000 kg/m3");
             }
             if (missing.contains("specificHeat")) {
                 findings.missing(
-                        at + "/specificHeat",
+                        own,
+                        "/specificHeat",
                         "the specific heat capacity is missing, and no material tells it, so the heat the layer holds is not known",
                         "50 to 20000 J/(kg.K)");
             }
         }
     }
 
-    private void oneShare(String pointer, Bridging bridging, Map<String, Double> shares) {
-        if (bridging.frame().isEmpty() || !findings.clean(pointer)) {
+    private void oneShare(Place layer, Bridging bridging, Map<String, Double> shares) {
+        if (bridging.frame().isEmpty() || !findings.clean(layer, "/bridging/share")) {
             return;
         }
         double share = bridging.share().value();
         Double other = shares.putIfAbsent(bridging.frame().get(), share);
         if (other != null && other != share) {
             findings.add(
-                    pointer,
+                    layer,
+                    "/bridging/share",
                     bridging.share().typed(),
                     "layers of the frame \"" + bridging.frame().get()
                             + "\" are crossed by the same members, so they have one share",
@@ -111,54 +117,56 @@ final class LayerRules {
         }
     }
 
-    private void layer(String pointer, Layer layer) {
-        boolean judged = findings.clean(pointer, "/resistance")
-                && findings.clean(pointer, "/thickness")
-                && findings.clean(pointer, "/conductivity")
-                && findings.clean(pointer, "/material")
-                && findings.clean(pointer, "/airGap")
-                && findings.clean(pointer, "/airGap/thickness");
+    private void layer(Place at, Layer layer) {
+        boolean judged = findings.clean(at, "/resistance")
+                && findings.clean(at, "/thickness")
+                && findings.clean(at, "/conductivity")
+                && findings.clean(at, "/material")
+                && findings.clean(at, "/airGap")
+                && findings.clean(at, "/airGap/thickness");
         if (!judged) {
             return;
         }
         boolean resistance = layer.resistance().isPresent();
         boolean conductivity = layer.conductivity().isPresent();
         if (layer.airGap().isPresent()) {
-            airGap(pointer, layer, layer.airGap().get());
+            airGap(at, layer, layer.airGap().get());
         } else if (resistance && conductivity) {
-            findings.add(pointer, "resistance and conductivity", "a layer is described in two ways", WAYS);
+            findings.add(at.pointer(), "resistance and conductivity", "a layer is described in two ways", WAYS);
         } else if (!resistance && layer.thickness().isEmpty()) {
             if (conductivity || layer.material().isPresent()) {
                 findings.add(
-                        pointer + "/thickness",
-                        "nothing",
-                        "the thickness is missing",
-                        "0.01 mm to 10 m, or a resistance");
+                        at, "/thickness", "nothing", "the thickness is missing", "0.01 mm to 10 m, or a resistance");
             } else {
-                findings.add(pointer, "none of them", "nothing says how well this layer insulates", WAYS);
+                findings.add(at.pointer(), "none of them", "nothing says how well this layer insulates", WAYS);
             }
         } else if (!resistance && !conductivity) {
-            material(pointer, layer);
+            material(at, layer);
         }
     }
 
-    private void material(String pointer, Layer layer) {
+    private void material(Place at, Layer layer) {
         if (layer.material().isEmpty()) {
             findings.add(
-                    pointer, "a thickness alone", "with a thickness, the conductivity or the material is needed", WAYS);
+                    at.pointer(),
+                    "a thickness alone",
+                    "with a thickness, the conductivity or the material is needed",
+                    WAYS);
             return;
         }
         String name = layer.material().get();
         Optional<Material> row = Materials.find(name);
         if (row.isEmpty()) {
             findings.add(
-                    pointer + "/material",
+                    at,
+                    "/material",
                     name,
                     "the materials table has no \"" + name + "\"" + findings.hint(name, LayerRules::materialNames),
                     "a name from the table, or a conductivity beside it");
         } else if (row.get().conductivity().isEmpty()) {
             findings.add(
-                    pointer + "/conductivity",
+                    at,
+                    "/conductivity",
                     "nothing",
                     "the table gives only a range for \"" + name + "\"",
                     "a conductivity from "
@@ -173,39 +181,41 @@ final class LayerRules {
                 .toList();
     }
 
-    private void airGap(String pointer, Layer layer, AirGap gap) {
+    private void airGap(Place at, Layer layer, AirGap gap) {
         if (layer.resistance().isPresent()
                 || layer.conductivity().isPresent()
                 || layer.thickness().isPresent()
                 || layer.material().isPresent()) {
-            findings.add(pointer, "airGap and another way", "a layer is described in two ways", WAYS);
+            findings.add(at.pointer(), "airGap and another way", "a layer is described in two ways", WAYS);
         }
         List<Reading> emissivities = gap.emissivities();
         if (!emissivities.isEmpty() && emissivities.size() != 2) {
             findings.add(
-                    pointer + "/airGap/emissivities",
+                    at,
+                    "/airGap/emissivities",
                     emissivities.size() + " numbers",
                     "an air gap has two faces",
                     "two numbers, or leave them out for 0.9 and 0.9");
         }
     }
 
-    private void bridging(String pointer, Layer layer, Bridging bridging) {
-        String at = pointer + "/bridging";
+    private void bridging(Place layerAt, Layer layer, Bridging bridging) {
+        Place at = layerAt.at("/bridging");
         if (!findings.clean(at, "/conductivity") || !findings.clean(at, "/resistance")) {
             return;
         }
         if (bridging.conductivity().isPresent() == bridging.resistance().isPresent()) {
             findings.add(
-                    at,
+                    at.pointer(),
                     bridging.conductivity().isPresent() ? "conductivity and resistance" : "neither of them",
                     "framing is known by its conductivity or by its resistance",
                     "exactly one of conductivity and resistance");
         } else if (bridging.conductivity().isPresent()
                 && layer.anyThickness().isEmpty()
-                && findings.clean(pointer, "/thickness")) {
+                && findings.clean(layerAt, "/thickness")) {
             findings.add(
-                    at + "/conductivity",
+                    at,
+                    "/conductivity",
                     bridging.conductivity().get().typed(),
                     "the layer has no thickness, so the framing's conductivity does not give its resistance",
                     "a thickness for the layer, or a resistance for the framing");

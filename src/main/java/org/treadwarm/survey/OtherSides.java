@@ -16,24 +16,26 @@ final class OtherSides {
     }
 
     /** Checks what stands under {@code to} of an object. */
-    void check(String above, String to, String owner, boolean ownerIsRoom) {
+    void check(Place above, String to, String owner, boolean ownerIsRoom) {
         if (!findings.clean(above, "/to") || to.equals(Survey.OUTDOORS)) {
             return;
         }
         if (to.equals(owner)) {
-            findings.add(above + "/to", to, "this leads back to where it comes from", sides("outdoors"));
+            findings.add(above, "/to", to, "this leads back to where it comes from", sides("outdoors"));
             return;
         }
         Space space = survey.spaces().get(to);
         if (space == null && !roomNames.contains(to)) {
             findings.add(
-                    above + "/to",
+                    above,
+                    "/to",
                     to,
                     "no room or space is called \"" + to + "\"" + findings.hint(to, this::names),
                     sides("outdoors, ground"));
         } else if (space != null && space.temperatureFactor().isPresent() && !ownerIsRoom) {
             findings.add(
-                    above + "/to",
+                    above,
+                    "/to",
                     to,
                     "only rooms may look at a space that is known by its temperature factor",
                     "a space of its own temperature, a room, or outdoors");

@@ -36,8 +36,8 @@ final class PlanRules {
 
     private void within(Side side, String at, String sizeKey, Reading size, String fromKey, Reading from, String wall) {
         boolean read = findings.clean(side.pointer())
-                && findings.clean(at, "/" + sizeKey)
-                && findings.clean(at, "/" + fromKey);
+                && findings.clean(at + "/" + sizeKey)
+                && findings.clean(at + "/" + fromKey);
         if (!read) {
             return;
         }

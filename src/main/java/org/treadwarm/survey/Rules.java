@@ -10,6 +10,9 @@ public final class Rules {
     /** The most rooms of one survey. */
     public static final int MOST_ROOMS = 5000;
 
+    private static final Place ASSEMBLIES = Place.ROOT.at("/assemblies");
+    private static final Place SPACES = Place.ROOT.at("/spaces");
+
     private final Survey survey;
     private final Findings findings;
     private final NameRules names;
@@ -38,21 +41,21 @@ public final class Rules {
 
     /** Adds what is wrong within one assembly, addressed from the root. */
     public static void checkAssembly(Assembly assembly, Findings findings) {
-        new LayerRules(findings).assembly("", assembly);
+        new LayerRules(findings).assembly(Place.ROOT, assembly);
     }
 
     /** Adds what is wrong with layers whose warming up is to be computed. */
     public static void checkLayersThatHoldHeat(String pointer, List<Layer> layers, Findings findings) {
-        new LayerRules(findings).layersThatHoldHeat(pointer, layers);
+        new LayerRules(findings).layersThatHoldHeat(Place.ROOT.at(pointer), layers);
     }
 
     private void check() {
         names.check();
         assemblies();
         SpaceRules spaces = new SpaceRules(findings, surfaces, junctions, air);
-        survey.spaces().forEach((name, space) -> spaces.check(Pointer.to("/spaces", name), name, space));
+        survey.spaces().forEach((name, space) -> spaces.check(SPACES.key(name), name, space));
         for (int i = 0; i < survey.rooms().size(); i++) {
-            room(Pointer.to("/rooms", i), survey.rooms().get(i));
+            room(Place.ROOT.item("/rooms", i), survey.rooms().get(i));
         }
         new Listings(survey, findings).check();
         new ManifoldRules(survey, findings).check();
@@ -69,35 +72,37 @@ public final class Rules {
 
     private void assemblies() {
         LayerRules layers = new LayerRules(findings);
-        survey.assemblies().forEach((name, assembly) -> layers.assembly(Pointer.to("/assemblies", name), assembly));
+        survey.assemblies().forEach((name, assembly) -> layers.assembly(ASSEMBLIES.key(name), assembly));
     }
 
-    private void warmUp(String pointer, Room room, WarmUpGoal goal, boolean heated) {
+    private void warmUp(Place at, Room room, WarmUpGoal goal, boolean heated) {
         if (room.reheat().value() > 0) {
             findings.add(
-                    pointer + "/reheat",
+                    at,
+                    "/reheat",
                     room.reheat().typed(),
                     "a reheat is either given or computed from a setback",
                     "0 W/m2 beside warmUp, or no warmUp");
         }
         if (!heated) {
-            findings.add(pointer + "/warmUp", "no heated floor", "only a heated floor warms a room up", "leave it out");
+            findings.add(at, "/warmUp", "no heated floor", "only a heated floor warms a room up", "leave it out");
         }
         if (goal.from().value() > room.indoorTemperature().value()) {
             findings.add(
-                    pointer + "/warmUp/from",
+                    at,
+                    "/warmUp/from",
                     goal.from().typed(),
                     "a setback is no warmer than the room",
                     "at most the indoor temperature");
         }
     }
 
-    private void room(String pointer, Room room) {
-        surfaces.check(pointer, room.name(), true, room.surfaces());
-        boolean heated = room.heatedFloor().isPresent() || !findings.clean(pointer, "/heatedFloor");
-        junctions.check(pointer, room.name(), room.junctions(), true, heated);
-        room.air().ifPresent(given -> air.check(pointer + "/air", given));
-        room.warmUp().ifPresent(goal -> warmUp(pointer, room, goal, heated));
-        room.heatedFloor().ifPresent(floor -> floors.check(pointer + "/heatedFloor", room, floor));
+    private void room(Place at, Room room) {
+        surfaces.check(at, room.name(), true, room.surfaces());
+        boolean heated = room.heatedFloor().isPresent() || !findings.clean(at, "/heatedFloor");
+        junctions.check(at, room.name(), room.junctions(), true, heated);
+        room.air().ifPresent(given -> air.check(at.at("/air"), given));
+        room.warmUp().ifPresent(goal -> warmUp(at, room, goal, heated));
+        room.heatedFloor().ifPresent(floor -> floors.check(at.at("/heatedFloor"), room, floor));
     }
 }

@@ -133,7 +133,7 @@ public record SectionQuestion(
 
     /** Adds what is wrong within the section to the findings. */
     public void check(Findings findings) {
-        new LayerRules(findings).layers("/layers", layers);
+        new LayerRules(findings).layers(Place.ROOT.at("/layers"), layers);
         for (int i = 0; i < layers.size(); i++) {
             if (layers.get(i).bridging().isPresent()) {
                 findings.add("/layers/" + i + "/bridging", "framing", "a section has no framing", "leave it out");
@@ -146,8 +146,8 @@ public record SectionQuestion(
             findings.add("/layers", layers.size() + " layers", "too many layers", "1 to " + MOST_LAYERS);
         }
         if (above.coefficient().isPresent() == above.characteristic().isPresent()
-                && findings.clean("/above", "/coefficient")
-                && findings.clean("/above", "/characteristic")) {
+                && findings.clean("/above/coefficient")
+                && findings.clean("/above/characteristic")) {
             findings.add(
                     "/above",
                     above.coefficient().isPresent() ? "coefficient and characteristic" : "neither",

@@ -42,6 +42,8 @@ public final class Shape {
 
     private final Key[] inOrder;
     private final Key[] holding;
+    private final Object[] whenAbsent;
+    private final long required;
     private final Constructor<?> constructor;
 
     /** What a key holds. */
@@ -115,6 +117,9 @@ public final class Shape {
             parameters[i] = components[i].getType();
         }
         inOrder = keys.values().toArray(Key[]::new);
+        whenAbsent =
+                keys.values().stream().map(key -> key.whenAbsent().orElse(null)).toArray();
+        required = required(inOrder);
         slots = new String[4 * Integer.highestOneBit(inOrder.length + 1)];
         indexes = new int[slots.length];
         for (int i = 0; i < inOrder.length; i++) {
@@ -135,6 +140,17 @@ public final class Shape {
     /** The shape of a record. */
     public static Shape of(Class<? extends Record> type) {
         return SHAPES.get(type);
+    }
+
+    private static long required(Key[] keys) {
+        if (keys.length > Long.SIZE) {
+            throw new IllegalStateException("more than " + Long.SIZE + " keys");
+        }
+        long required = 0;
+        for (int i = 0; i < keys.length; i++) {
+            required |= keys[i].required() ? 1L << i : 0;
+        }
+        return required;
     }
 
     /** The record this is the shape of. */
@@ -166,6 +182,16 @@ public final class Shape {
             slot = slot + 1 & slots.length - 1;
         }
         return slot;
+    }
+
+    /** What stands under each key when it is left out, in order; null where the document must have it. */
+    public Object[] whenAbsent() {
+        return whenAbsent.clone();
+    }
+
+    /** The keys that the document must have, as the bits of their places. */
+    public long required() {
+        return required;
     }
 
     /** The keys below which readings may lie. */

@@ -14,60 +14,59 @@ final class SpaceRules {
         this.air = air;
     }
 
-    void check(String pointer, String name, Space space) {
-        if (!findings.clean(pointer, "/kind")) {
+    void check(Place at, String name, Space space) {
+        if (!findings.clean(at, "/kind")) {
             return;
         }
         if (space.kind() == SpaceKind.HELD) {
-            held(pointer, space);
+            held(at, space);
             return;
         }
         space.temperature()
                 .ifPresent(temperature -> findings.add(
-                        pointer + "/temperature",
+                        at,
+                        "/temperature",
                         temperature.typed(),
                         "an unheated space finds its own temperature",
                         "leave it out, or make the space \"held\""));
         if (space.temperatureFactor().isPresent()) {
-            forbidden(pointer, space, "a space with a temperature factor has nothing else");
+            forbidden(at, space, "a space with a temperature factor has nothing else");
             return;
         }
-        surfaces.check(pointer, name, false, space.surfaces());
-        junctions.check(pointer, name, space.junctions(), false, false);
+        surfaces.check(at, name, false, space.surfaces());
+        junctions.check(at, name, space.junctions(), false, false);
         space.air().ifPresent(given -> {
-            air.check(pointer + "/air", given);
+            air.check(at.at("/air"), given);
             if (given.volume().isEmpty()) {
                 findings.missing(
-                        pointer + "/air/volume",
-                        "the air of a space needs its volume",
-                        "more than 0 m3, at most 100 000 m3");
+                        at, "/air/volume", "the air of a space needs its volume", "more than 0 m3, at most 100 000 m3");
             }
         });
     }
 
-    private void held(String pointer, Space space) {
+    private void held(Place at, Space space) {
         if (space.temperature().isEmpty()) {
-            findings.missing(
-                    pointer + "/temperature", "a held space needs the temperature it is held at", "-60 to 60 °C");
+            findings.missing(at, "/temperature", "a held space needs the temperature it is held at", "-60 to 60 °C");
         }
-        forbidden(pointer, space, "a held space is known by its temperature alone");
+        forbidden(at, space, "a held space is known by its temperature alone");
         space.temperatureFactor()
                 .ifPresent(factor -> findings.add(
-                        pointer + "/temperatureFactor",
+                        at,
+                        "/temperatureFactor",
                         factor.typed(),
                         "a held space has a temperature, not a factor",
                         "leave it out"));
     }
 
-    private void forbidden(String pointer, Space space, String why) {
+    private void forbidden(Place at, Space space, String why) {
         if (!space.surfaces().isEmpty()) {
-            findings.add(pointer + "/surfaces", space.surfaces().size() + " surfaces", why, "leave them out");
+            findings.add(at, "/surfaces", space.surfaces().size() + " surfaces", why, "leave them out");
         }
         if (!space.junctions().isEmpty()) {
-            findings.add(pointer + "/junctions", space.junctions().size() + " junctions", why, "leave them out");
+            findings.add(at, "/junctions", space.junctions().size() + " junctions", why, "leave them out");
         }
         if (space.air().isPresent()) {
-            findings.add(pointer + "/air", "air", why, "leave it out");
+            findings.add(at, "/air", "air", why, "leave it out");
         }
     }
 }

@@ -19,50 +19,53 @@ final class SurfaceRules {
         this.ground = ground;
     }
 
-    void check(String owner, String name, boolean isRoom, List<Surface> surfaces) {
+    void check(Place owner, String name, boolean isRoom, List<Surface> surfaces) {
         for (int i = 0; i < surfaces.size(); i++) {
-            surface(owner + "/surfaces/" + i, name, isRoom, surfaces.get(i));
+            surface(owner.item("/surfaces", i), name, isRoom, surfaces.get(i));
         }
     }
 
-    private void surface(String pointer, String owner, boolean isRoom, Surface surface) {
-        assembly(pointer, surface.assembly());
-        area(pointer, surface.area(), surface.width(), surface.height());
+    private void surface(Place at, String owner, boolean isRoom, Surface surface) {
+        assembly(at, surface.assembly());
+        area(at, surface.area(), surface.width(), surface.height());
         boolean onGround = surface.to().equals(Survey.GROUND);
         if (onGround) {
-            ground.surface(pointer, surface, isRoom);
+            ground.surface(at, surface, isRoom);
         } else {
-            otherSides.check(pointer, surface.to(), owner, isRoom);
+            otherSides.check(at, surface.to(), owner, isRoom);
             surface.ground()
-                    .filter(given -> findings.clean(pointer, "/to"))
+                    .filter(given -> findings.clean(at, "/to"))
                     .ifPresent(given -> findings.add(
-                            pointer + "/ground",
+                            at,
+                            "/ground",
                             "ground",
                             "only a surface to ground lies on the ground",
                             "leave it out, or write \"to\": \"ground\""));
         }
-        openings(pointer, surface, onGround);
+        openings(at, surface, onGround);
     }
 
-    private void openings(String pointer, Surface surface, boolean onGround) {
+    private void openings(Place at, Surface surface, boolean onGround) {
         double cut = 0;
         for (int i = 0; i < surface.openings().size(); i++) {
             Opening opening = surface.openings().get(i);
-            String at = pointer + "/openings/" + i;
-            assembly(at, opening.assembly());
-            area(at, opening.area(), opening.width(), opening.height());
+            Place own = at.item("/openings", i);
+            assembly(own, opening.assembly());
+            area(own, opening.area(), opening.width(), opening.height());
             cut += opening.totalArea();
         }
         if (cut > surface.grossArea() * (1 + 1e-12) && surface.grossArea() > 0) {
             findings.add(
-                    pointer + "/openings",
+                    at,
+                    "/openings",
                     sensible(cut) + " m2 of openings",
                     "the openings are larger than their surface",
                     "at most its area, " + sensible(surface.grossArea()) + " m2");
         }
         if (onGround && !surface.openings().isEmpty()) {
             findings.add(
-                    pointer + "/openings",
+                    at,
+                    "/openings",
                     surface.openings().size() + " openings",
                     "a surface on the ground has no openings",
                     "leave them out");
@@ -73,23 +76,22 @@ final class SurfaceRules {
         return Numbers.significant(area, 6);
     }
 
-    private void area(String pointer, Optional<Reading> area, Optional<Reading> width, Optional<Reading> height) {
+    private void area(Place at, Optional<Reading> area, Optional<Reading> width, Optional<Reading> height) {
         boolean sides = width.isPresent() || height.isPresent();
         if (area.isPresent() && sides) {
-            findings.add(
-                    pointer + "/area", area.get().typed(), "area and width with height are both given", "one of them");
+            findings.add(at, "/area", area.get().typed(), "area and width with height are both given", "one of them");
         } else if (area.isEmpty()) {
             if (!sides) {
-                findings.missing(pointer + "/area", "the area is missing", "an area, or a width and a height");
+                findings.missing(at, "/area", "the area is missing", "an area, or a width and a height");
             } else if (width.isEmpty()) {
-                findings.missing(
-                        pointer + "/width", "with a height, the width is needed too", "a width, or an area instead");
+                findings.missing(at, "/width", "with a height, the width is needed too", "a width, or an area instead");
             } else if (height.isEmpty()) {
                 findings.missing(
-                        pointer + "/height", "with a width, the height is needed too", "a height, or an area instead");
+                        at, "/height", "with a width, the height is needed too", "a height, or an area instead");
             } else if (Extent.area(area, width, height) > 10000) {
                 findings.add(
-                        pointer + "/width",
+                        at,
+                        "/width",
                         width.get().typed(),
                         "width times height is more than 10 000 m2",
                         "at most 10 000 m2");
@@ -97,11 +99,12 @@ final class SurfaceRules {
         }
     }
 
-    private void assembly(String owner, String name) {
+    private void assembly(Place owner, String name) {
         if (findings.clean(owner, "/assembly") && !survey.assemblies().containsKey(name)) {
             String hint = findings.hint(name, survey.assemblies()::keySet);
             findings.add(
-                    owner + "/assembly",
+                    owner,
+                    "/assembly",
                     name,
                     "no assembly is called \"" + name + "\"" + hint,
                     "the name of an assembly");

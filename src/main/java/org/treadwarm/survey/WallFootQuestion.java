@@ -142,11 +142,11 @@ public record WallFootQuestion(
 
     private void below(Findings findings) {
         count(findings, "/below", below);
-        new LayerRules(findings).layers("/below", below);
+        new LayerRules(findings).layers(Place.ROOT.at("/below"), below);
         for (int i = 0; i < below.size(); i++) {
             Layer layer = below.get(i);
             String at = "/below/" + i;
-            if (!findings.clean(at) || !findings.clean(at, "/thickness")) {
+            if (!findings.clean(at) || !findings.clean(at + "/thickness")) {
                 continue;
             }
             if (layer.airGap().isPresent()) {
@@ -167,11 +167,11 @@ public record WallFootQuestion(
 
     private void wall(Findings findings) {
         count(findings, "/wall", wall);
-        new LayerRules(findings).layers("/wall", wall);
+        new LayerRules(findings).layers(Place.ROOT.at("/wall"), wall);
         for (int i = 0; i < wall.size(); i++) {
             String at = "/wall/" + i;
             if (findings.clean(at)
-                    && findings.clean(at, "/thickness")
+                    && findings.clean(at + "/thickness")
                     && wall.get(i).anyThickness().isEmpty()) {
                 unknownThickness(findings, at, wall.get(i), i, "of the wall");
             }

@@ -53,7 +53,8 @@ final class PlainReading {
         if (at == text.length()) {
             return kind == QuantityKind.RATIO ? Optional.of(reading(number, text)) : Optional.empty();
         }
-        return UnitTable.asWritten(kind, text.substring(at)).map(unit -> reading(unit.toSi(number), text));
+        Optional<Unit> unit = UnitTable.asWritten(kind, text, at);
+        return unit.isPresent() ? Optional.of(reading(unit.get().toSi(number), text)) : Optional.empty();
     }
 
     private static Reading reading(double value, String text) {

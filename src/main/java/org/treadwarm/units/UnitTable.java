@@ -55,6 +55,7 @@ public final class UnitTable {
 
     private static final List<Unit> UNITS = units();
     private static final Map<QuantityKind, Map<String, Unit>> BY_KIND = byKind();
+    private static final Map<QuantityKind, Spellings> AS_WRITTEN = asWritten();
 
     private UnitTable() {}
 
@@ -70,9 +71,9 @@ public final class UnitTable {
         return Optional.ofNullable(asWritten != null ? asWritten : ofKind.get(normal(text)));
     }
 
-    /** The unit of a kind that is written to the letter as the table has it. */
-    static Optional<Unit> asWritten(QuantityKind kind, String text) {
-        return Optional.ofNullable(BY_KIND.get(kind).get(text));
+    /** The unit of a kind that is written to the letter as the table has it, from a place in a text to its end. */
+    static Optional<Unit> asWritten(QuantityKind kind, String text, int from) {
+        return Optional.ofNullable(AS_WRITTEN.get(kind).at(text, from));
     }
 
     /** The kinds that know this unit text, for telling somebody that metres do not measure heat. */
@@ -361,6 +362,12 @@ public final class UnitTable {
             claim(ofKind, normal(unit.symbol()), unit);
             unit.spellings().forEach(spelling -> claim(ofKind, spelling, unit));
         }
+        return index;
+    }
+
+    private static Map<QuantityKind, Spellings> asWritten() {
+        Map<QuantityKind, Spellings> index = new EnumMap<>(QuantityKind.class);
+        BY_KIND.forEach((kind, units) -> index.put(kind, new Spellings(units)));
         return index;
     }
 
