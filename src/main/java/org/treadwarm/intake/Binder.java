@@ -15,6 +15,7 @@ import org.treadwarm.survey.Nearest;
 import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Shape;
+import org.treadwarm.survey.Unusual;
 import org.treadwarm.survey.Word;
 import org.treadwarm.units.Basis;
 import org.treadwarm.units.Declared;
@@ -32,9 +33,15 @@ final class Binder {
     private static final int NONE = -1;
 
     private final Findings findings;
+    private final List<Unusual> unusual = new ArrayList<>();
 
     Binder(Findings findings) {
         this.findings = findings;
+    }
+
+    /** The unusual readings bound so far. */
+    List<Unusual> unusual() {
+        return List.copyOf(unusual);
     }
 
     /** The record of a tree; null when the tree is no object at all. */
@@ -163,11 +170,19 @@ final class Binder {
 
     private Object one(JsonNode node, Shape.Key key, Place at) {
         return switch (key.holds()) {
-            case QUANTITY -> quantity(node, key.quantity().orElseThrow(), at);
+            case QUANTITY -> looked(quantity(node, key.quantity().orElseThrow(), at), key, at);
             case TEXT -> text(node, key, at);
             case WORD -> word(node, key, at);
             case OBJECT -> object(node, key, at);
         };
+    }
+
+    private Reading looked(Reading reading, Shape.Key key, Place at) {
+        Declared declared = key.quantity().orElseThrow();
+        if (Unusual.is(declared, reading)) {
+            unusual.add(new Unusual(at, declared, reading));
+        }
+        return reading;
     }
 
     private Object object(JsonNode node, Shape.Key key, Place at) {

@@ -46,20 +46,21 @@ public record Judgement(Optional<Survey> survey, Optional<SizedSurvey> sized, Li
      * @throws java.util.concurrent.CancellationException when asked to give up
      */
     public static Judgement of(JsonNode document, BooleanSupplier stopped) {
-        return judged(document, survey -> Optional.of(Sizer.sizedSurvey(survey, stopped)));
+        return judged(
+                document, accepted -> Optional.of(Sizer.sizedSurvey(accepted.value(), accepted.unusual(), stopped)));
     }
 
     /** Reads a document and finds its problems without sizing it, which never takes long. */
     public static Judgement unsized(JsonNode document) {
-        return judged(document, survey -> {
-            Sizer.check(survey);
+        return judged(document, accepted -> {
+            Sizer.check(accepted.value());
             return Optional.empty();
         });
     }
 
     /** What makes a sizing of a survey, or none. */
     private interface Sized {
-        Optional<SizedSurvey> of(Survey survey) throws NoBalanceException;
+        Optional<SizedSurvey> of(Outcome.Accepted<Survey> accepted) throws NoBalanceException;
     }
 
     private static Judgement judged(JsonNode document, Sized sized) {
@@ -67,9 +68,10 @@ public record Judgement(Optional<Survey> survey, Optional<SizedSurvey> sized, Li
         if (outcome instanceof Outcome.Refused<Survey> refused) {
             return new Judgement(Optional.empty(), Optional.empty(), refused.problems());
         }
-        Survey survey = ((Outcome.Accepted<Survey>) outcome).value();
+        Outcome.Accepted<Survey> accepted = (Outcome.Accepted<Survey>) outcome;
+        Survey survey = accepted.value();
         try {
-            return new Judgement(Optional.of(survey), sized.of(survey), List.of());
+            return new Judgement(Optional.of(survey), sized.of(accepted), List.of());
         } catch (NoBalanceException e) {
             return new Judgement(Optional.of(survey), Optional.empty(), List.of(e.problem()));
         }

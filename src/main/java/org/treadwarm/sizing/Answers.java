@@ -37,6 +37,7 @@ import org.treadwarm.sizing.Sizing.Total;
 import org.treadwarm.survey.Assembly;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Layer;
+import org.treadwarm.survey.Unusual;
 import org.treadwarm.units.Reading;
 
 /** Turns the numbers of an evaluation into the records of the answer. */
@@ -54,7 +55,8 @@ final class Answers {
         this.hasFloorAbove = new boolean[plan.nodeNames.length];
     }
 
-    Sizing sizing() {
+    /** The answer, its first warnings being of the readings that are unusual. */
+    Sizing sizing(List<Unusual> unusual) {
         for (FloorEvaluation floor : numbers.floors) {
             if (floor != null && floor.plan.other() != Stack.NONE) {
                 FloorState required = state(floor, floor.requiredFlux);
@@ -64,7 +66,7 @@ final class Answers {
         }
         waters = WaterLayouts.of(numbers);
         List<RoomSizing> rooms = new ArrayList<>(plan.rooms);
-        Warnings warnings = new Warnings(plan, numbers);
+        Warnings warnings = new Warnings(plan, numbers, unusual);
         for (int i = 0; i < plan.rooms; i++) {
             rooms.add(room(i));
             warnings.room(i, rooms.get(i));

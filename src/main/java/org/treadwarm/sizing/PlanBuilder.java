@@ -134,7 +134,7 @@ final class PlanBuilder {
                     inputs.add(Place.ROOT.item("/rooms", i), "/indoorTemperature", room.indoorTemperature());
         }
         int node = rooms;
-        List<Integer> floats = new ArrayList<>();
+        int floats = 0;
         for (Map.Entry<String, Space> entry : survey.spaces().entrySet()) {
             Space space = entry.getValue();
             Place at = Place.ROOT.at("/spaces").key(entry.getKey());
@@ -146,8 +146,7 @@ final class PlanBuilder {
                 factor[node] = inputs.add(
                         at, "/temperatureFactor", space.temperatureFactor().get());
             } else {
-                floating[node] = floats.size();
-                floats.add(node);
+                floating[node] = floats++;
             }
             node++;
         }
@@ -155,7 +154,12 @@ final class PlanBuilder {
         nodeTemperature[node] = site.outdoor();
         name(node + 1, Survey.GROUND);
         nodeTemperature[node + 1] = site.annualMean();
-        floatingNodes = floats.stream().mapToInt(Integer::intValue).toArray();
+        floatingNodes = new int[floats];
+        for (int i = rooms; i < node; i++) {
+            if (floating[i] != NONE) {
+                floatingNodes[floating[i]] = i;
+            }
+        }
     }
 
     private void name(int node, String name) {
@@ -418,8 +422,9 @@ final class PlanBuilder {
         Map<Long, Integer> known = new LinkedHashMap<>();
         linkPair = new int[links.size()];
         for (int i = 0; i < linkPair.length; i++) {
-            int a = floating[links.get(i).owner()];
-            int b = floating[links.get(i).other()];
+            Link link = links.get(i);
+            int a = floating[link.owner()];
+            int b = floating[link.other()];
             linkPair[i] = NONE;
             if (a != NONE && b != NONE) {
                 long key = (long) Math.min(a, b) << 32 | Math.max(a, b);
@@ -427,8 +432,12 @@ final class PlanBuilder {
                 linkPair[i] = pair == null ? known.size() - 1 : pair;
             }
         }
-        pairFrom = known.keySet().stream().mapToInt(key -> (int) (key >> 32)).toArray();
-        pairTo = known.keySet().stream().mapToInt(Long::intValue).toArray();
+        pairFrom = new int[known.size()];
+        pairTo = new int[known.size()];
+        known.forEach((key, pair) -> {
+            pairFrom[pair] = (int) (key >> 32);
+            pairTo[pair] = key.intValue();
+        });
     }
 
     /** The paths of every room and space: own surfaces, heard surfaces, own junctions, heard junctions, air. */

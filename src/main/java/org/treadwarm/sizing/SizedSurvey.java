@@ -2,6 +2,7 @@ package org.treadwarm.sizing;
 
 import java.util.List;
 import java.util.Optional;
+import org.treadwarm.survey.Unusual;
 
 /**
  * A survey that was sized: the answer, and what drawings want to know of how it was found without finding it again. May be used
@@ -11,9 +12,9 @@ public final class SizedSurvey {
     private final Evaluation evaluation;
     private final Sizing sizing;
 
-    SizedSurvey(Evaluation evaluation) {
+    SizedSurvey(Evaluation evaluation, List<Unusual> unusual) {
         this.evaluation = evaluation;
-        this.sizing = new Answers(evaluation).sizing();
+        this.sizing = new Answers(evaluation).sizing(unusual);
     }
 
     /** Whether sizing the same survey again would find the same; not when it has more floors than one sizing solves. */

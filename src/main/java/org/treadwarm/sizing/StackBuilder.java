@@ -90,8 +90,8 @@ final class StackBuilder {
             frame[i] = NONE;
             if (bridging.isPresent()) {
                 Optional<String> name = bridging.get().frame();
-                Integer known = name.map(named::get).orElse(null);
-                frame[i] = known != null ? known : frames++;
+                frame[i] = name.isPresent() ? named.getOrDefault(name.get(), frames) : frames;
+                frames = Math.max(frames, frame[i] + 1);
                 if (name.isPresent()) {
                     named.put(name.get(), frame[i]);
                 }

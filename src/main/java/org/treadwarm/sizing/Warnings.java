@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.stream.Stream;
 import org.treadwarm.physics.moisture.SurfaceTemperature;
 import org.treadwarm.sizing.Plan.Face;
 import org.treadwarm.sizing.Plan.Link;
@@ -20,14 +19,13 @@ import org.treadwarm.survey.Heater;
 import org.treadwarm.survey.HeaterKind;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.survey.Place;
-import org.treadwarm.survey.Readings;
 import org.treadwarm.survey.Room;
 import org.treadwarm.survey.Space;
 import org.treadwarm.survey.Surface;
 import org.treadwarm.survey.Survey;
+import org.treadwarm.survey.Unusual;
 import org.treadwarm.units.Declared;
 import org.treadwarm.units.Numbers;
-import org.treadwarm.units.QuantityKind;
 import org.treadwarm.units.Reading;
 
 /** The good sense of an old hand: what is possible but deserves a second look, with why and what would settle it. */
@@ -45,15 +43,15 @@ final class Warnings {
     private final Survey survey;
     private final Evaluation numbers;
     private final List<Warning> warnings = new ArrayList<>();
-    private final List<Warning> unusual = new ArrayList<>();
     private final List<Warning> ofRooms = new ArrayList<>();
     private final FloorWarnings floorWarnings;
-    private final Readings readings = new Readings(Warnings::isImplausible, this::implausible);
+    private final List<Unusual> unusual;
 
-    Warnings(Plan plan, Evaluation numbers) {
+    Warnings(Plan plan, Evaluation numbers, List<Unusual> unusual) {
         this.plan = plan;
         this.survey = plan.survey;
         this.numbers = numbers;
+        this.unusual = unusual;
         this.floorWarnings = new FloorWarnings(survey, ofRooms);
     }
 
@@ -64,7 +62,6 @@ final class Warnings {
     void room(int i, RoomSizing answer) {
         Room room = survey.rooms().get(i);
         Place at = Place.ROOT.item("/rooms", i);
-        readings.visit(room, at);
         double volume = room.air()
                 .flatMap(Air::volume)
                 .map(Reading::value)
@@ -78,48 +75,35 @@ final class Warnings {
 
     /** All there is to say, once every room has been looked at. */
     List<Warning> all() {
-        List<Warning> unusualInRooms = List.copyOf(unusual);
-        unusual.clear();
-        readings.visit(survey.site(), Place.ROOT.at("/site"));
-        survey.assemblies().forEach((name, assembly) -> readings.visit(assembly, ASSEMBLIES.key(name)));
-        survey.spaces().forEach((name, space) -> readings.visit(space, SPACES.key(name)));
+        unusual.forEach(this::unusual);
         site();
         assemblies();
         grounds();
         spaces();
-        return Stream.of(unusual, unusualInRooms, warnings, ofRooms)
-                .flatMap(List::stream)
-                .toList();
+        warnings.addAll(ofRooms);
+        return List.copyOf(warnings);
     }
 
     private void add(String code, String pointer, String message, String why, String settle) {
         warnings.add(new Warning(code, pointer, message, why, settle));
     }
 
-    private static boolean isImplausible(Declared declared, Reading reading) {
-        double value = reading.value();
-        return !(value >= declared.plausibleFrom() && value <= declared.plausibleTo())
-                && !isPlausibleZero(value, declared);
-    }
-
-    private void implausible(String pointer, Declared declared, Reading reading) {
-        double value = reading.value();
+    private void unusual(Unusual found) {
+        Declared declared = found.declared();
+        double value = found.reading().value();
         boolean low = value < declared.plausibleFrom();
         String unit = declared.kind().siUnit();
-        unusual.add(new Warning(
+        add(
                 "unusual-reading",
-                pointer,
+                found.at().pointer(),
                 "The " + declared.label() + " of " + Numbers.significant(value, 6) + (unit.isEmpty() ? "" : " " + unit)
                         + " is unusually " + (low ? "low" : "high") + ".",
                 "Usual is " + (low ? "at least " : "at most ")
                         + Numbers.significant(low ? declared.plausibleFrom() : declared.plausibleTo(), 6)
                         + (unit.isEmpty() ? "" : " " + unit)
                         + " (common practice, no source); a slip of the unit or of the decimal mark is likely.",
-                "Look at the reading as it was typed, \"" + reading.typed() + "\", and take it again if in doubt."));
-    }
-
-    private static boolean isPlausibleZero(double value, Declared declared) {
-        return value == 0 && declared.min() == 0 && declared.kind() != QuantityKind.RESISTANCE;
+                "Look at the reading as it was typed, \"" + found.reading().typed()
+                        + "\", and take it again if in doubt.");
     }
 
     private void site() {
