@@ -1,7 +1,8 @@
 package org.treadwarm.sizing;
 
+import java.util.DoubleSummaryStatistics;
 import java.util.OptionalDouble;
-import java.util.stream.Stream;
+import java.util.function.ToDoubleFunction;
 import org.treadwarm.survey.HeatedFloor;
 import org.treadwarm.survey.Layer;
 import org.treadwarm.tables.Material;
@@ -22,13 +23,14 @@ final class BuildUp {
         return sum(floor, layer -> thickness(layer) * density(layer));
     }
 
-    private static OptionalDouble sum(HeatedFloor floor, java.util.function.ToDoubleFunction<Layer> part) {
+    private static OptionalDouble sum(HeatedFloor floor, ToDoubleFunction<Layer> part) {
         if (floor.above().isEmpty() && floor.below().isEmpty()) {
             return OptionalDouble.empty();
         }
-        double sum = Stream.concat(floor.above().stream(), floor.below().stream())
-                .mapToDouble(part)
-                .sum();
+        DoubleSummaryStatistics parts = new DoubleSummaryStatistics();
+        floor.above().forEach(layer -> parts.accept(part.applyAsDouble(layer)));
+        floor.below().forEach(layer -> parts.accept(part.applyAsDouble(layer)));
+        double sum = parts.getSum();
         return Double.isNaN(sum) ? OptionalDouble.empty() : OptionalDouble.of(sum);
     }
 
