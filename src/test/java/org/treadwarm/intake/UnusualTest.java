@@ -75,4 +75,16 @@ class UnusualTest {
         assertThat(Surveys.sized(turned).warnings().stream().map(warning -> warning.pointer()))
                 .startsWith("/site/outdoorTemperature", "/rooms/0/height");
     }
+
+    /** A setback may be written where the reheat stands that is computed from it; what is unusual is told where it was written. */
+    @Test
+    void ofASetbackAreToldWhereItIsWritten() {
+        ObjectNode survey = Surveys.quiet();
+        Trees.set(
+                survey,
+                "/rooms/0/reheat",
+                JsonNodeFactory.instance.objectNode().put("from", "2 °C").put("within", "3 h"));
+        assertThat(accepted(survey).unusual().stream().map(found -> found.at().pointer()))
+                .containsExactly("/rooms/0/reheat/from");
+    }
 }
