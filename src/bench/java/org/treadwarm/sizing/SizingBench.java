@@ -1,6 +1,7 @@
 package org.treadwarm.sizing;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -55,6 +56,12 @@ public class SizingBench {
     @Benchmark
     public Sizing wholeSizing() throws NoBalanceException {
         return Sizer.size(survey);
+    }
+
+    /** The same after intake, which has found the unusual readings already: none. */
+    @Benchmark
+    public Sizing sizingAfterIntake() throws NoBalanceException {
+        return Sizer.sizedSurvey(survey, List.of(), () -> false).sizing();
     }
 
     /** From JSON text to a survey in which everything holds. */

@@ -170,15 +170,17 @@ final class Binder {
 
     private Object one(JsonNode node, Shape.Key key, Place at) {
         return switch (key.holds()) {
-            case QUANTITY -> looked(quantity(node, key.quantity().orElseThrow(), at), key, at);
+            case QUANTITY -> {
+                Declared declared = key.quantity().orElseThrow();
+                yield noted(quantity(node, declared, at), declared, at);
+            }
             case TEXT -> text(node, key, at);
             case WORD -> word(node, key, at);
             case OBJECT -> object(node, key, at);
         };
     }
 
-    private Reading looked(Reading reading, Shape.Key key, Place at) {
-        Declared declared = key.quantity().orElseThrow();
+    private Reading noted(Reading reading, Declared declared, Place at) {
         if (Unusual.is(declared, reading)) {
             unusual.add(new Unusual(at, declared, reading));
         }

@@ -2,7 +2,7 @@ package org.treadwarm.intake;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.List;
-import org.treadwarm.survey.Assembly;
+import java.util.function.BiConsumer;
 import org.treadwarm.survey.Findings;
 import org.treadwarm.survey.Place;
 import org.treadwarm.survey.Problem;
@@ -41,64 +41,41 @@ public final class Intake {
 
     /** Reads a survey. */
     public static Outcome<Survey> survey(JsonNode tree) {
-        Findings findings = new Findings();
-        Binder binder = new Binder(findings);
-        Survey survey = (Survey) binder.bind(tree, Survey.class, Place.ROOT);
-        if (survey != null) {
-            Rules.check(survey, findings);
-        }
-        return outcome(survey, binder, findings);
+        return read(tree, Survey.class, Rules::check);
     }
 
     /** Reads one assembly together with the conditions to evaluate it at. */
     public static Outcome<AssemblyQuestion> assembly(JsonNode tree) {
-        Findings findings = new Findings();
-        Binder binder = new Binder(findings);
-        AssemblyQuestion question = (AssemblyQuestion) binder.bind(tree, AssemblyQuestion.class, Place.ROOT);
-        if (question != null) {
-            Assembly assembly = question.assembly();
-            Rules.checkAssembly(assembly, findings);
+        return read(tree, AssemblyQuestion.class, (question, findings) -> {
+            Rules.checkAssembly(question.assembly(), findings);
             question.check(findings);
-        }
-        return outcome(question, binder, findings);
+        });
     }
 
     /** Reads one floor section. */
     public static Outcome<SectionQuestion> section(JsonNode tree) {
-        Findings findings = new Findings();
-        Binder binder = new Binder(findings);
-        SectionQuestion question = (SectionQuestion) binder.bind(tree, SectionQuestion.class, Place.ROOT);
-        if (question != null) {
-            question.check(findings);
-        }
-        return outcome(question, binder, findings);
+        return read(tree, SectionQuestion.class, SectionQuestion::check);
     }
 
     /** Reads one wall foot. */
     public static Outcome<WallFootQuestion> wallFoot(JsonNode tree) {
-        Findings findings = new Findings();
-        Binder binder = new Binder(findings);
-        WallFootQuestion question = (WallFootQuestion) binder.bind(tree, WallFootQuestion.class, Place.ROOT);
-        if (question != null) {
-            question.check(findings);
-        }
-        return outcome(question, binder, findings);
+        return read(tree, WallFootQuestion.class, WallFootQuestion::check);
     }
 
     /** Reads one heated floor together with the setback to warm up from. */
     public static Outcome<WarmUpQuestion> warmUp(JsonNode tree) {
-        Findings findings = new Findings();
-        Binder binder = new Binder(findings);
-        WarmUpQuestion question = (WarmUpQuestion) binder.bind(tree, WarmUpQuestion.class, Place.ROOT);
-        if (question != null) {
-            question.check(findings);
-        }
-        return outcome(question, binder, findings);
+        return read(tree, WarmUpQuestion.class, WarmUpQuestion::check);
     }
 
-    private static <T> Outcome<T> outcome(T value, Binder binder, Findings findings) {
+    private static <T extends Record> Outcome<T> read(JsonNode tree, Class<T> type, BiConsumer<T, Findings> rules) {
+        Findings findings = new Findings();
+        Binder binder = new Binder(findings);
+        T read = type.cast(binder.bind(tree, type, Place.ROOT));
+        if (read != null) {
+            rules.accept(read, findings);
+        }
         return findings.isEmpty()
-                ? new Outcome.Accepted<>(value, binder.unusual())
+                ? new Outcome.Accepted<>(read, binder.unusual())
                 : new Outcome.Refused<>(findings.all());
     }
 }

@@ -43,8 +43,8 @@ public final class Sizer {
     /**
      * The same, with what drawings want to know beside the answer.
      *
-     * @param unusual its unusual readings, which intake comes past anyway; walking a survey to find them costs as much as
-     *     a quarter of its sizing
+     * @param unusual its unusual readings, which intake comes past anyway; walking a survey to find them costs half
+     *     as much as its sizing
      */
     public static SizedSurvey sizedSurvey(Survey survey, List<Unusual> unusual, BooleanSupplier stopped)
             throws NoBalanceException {

@@ -19,7 +19,7 @@ public final class Readings {
 
     /** Which readings are told of. */
     @FunctionalInterface
-    public interface Choice {
+    interface Choice {
         boolean wants(Declared declared, Reading reading);
     }
 
@@ -35,7 +35,7 @@ public final class Readings {
     private int depth;
 
     /** Walks that tell of the readings that a choice wants. Not for two threads at once. */
-    public Readings(Choice choice, Visitor visitor) {
+    Readings(Choice choice, Visitor visitor) {
         this.choice = choice;
         this.visitor = visitor;
     }
@@ -46,7 +46,7 @@ public final class Readings {
     }
 
     /** Visits the chosen readings below a record that stands at a place, in document order. */
-    public void visit(Record record, Place at) {
+    void visit(Record record, Place at) {
         start = at;
         depth = 0;
         record(record);

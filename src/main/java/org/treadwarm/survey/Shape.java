@@ -8,6 +8,7 @@ import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.ParameterizedType;
 import java.lang.reflect.RecordComponent;
 import java.lang.reflect.Type;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -18,6 +19,7 @@ import org.treadwarm.units.Quantity;
 import org.treadwarm.units.Reading;
 import org.treadwarm.units.ReadingException;
 import org.treadwarm.units.ReadingParser;
+import org.treadwarm.units.TextTable;
 import org.treadwarm.units.Wording;
 
 /**
@@ -35,11 +37,7 @@ public final class Shape {
     private final Class<? extends Record> type;
     private final Map<String, Key> keys;
 
-    // The places of the keys by their names' hashes: reading a document looks every key up, and a map would box and
-    // chase them.
-    private final String[] slots;
-    private final int[] indexes;
-
+    private final TextTable<Integer> places;
     private final Key[] inOrder;
     private final Key[] holding;
     private final Object[] whenAbsent;
@@ -120,13 +118,11 @@ public final class Shape {
         whenAbsent =
                 keys.values().stream().map(key -> key.whenAbsent().orElse(null)).toArray();
         required = required(inOrder);
-        slots = new String[4 * Integer.highestOneBit(inOrder.length + 1)];
-        indexes = new int[slots.length];
+        Map<String, Integer> numbered = new HashMap<>();
         for (int i = 0; i < inOrder.length; i++) {
-            int slot = slot(inOrder[i].name());
-            slots[slot] = inOrder[i].name();
-            indexes[slot] = i;
+            numbered.put(inOrder[i].name(), i);
         }
+        places = new TextTable<>(numbered);
         holding = keys.values().stream()
                 .filter(key -> key.holds() == Holds.QUANTITY || key.holds() == Holds.OBJECT)
                 .toArray(Key[]::new);
@@ -170,18 +166,8 @@ public final class Shape {
 
     /** The place of a key in the order of the record; -1 when there is no such key. */
     public int indexOf(String name) {
-        int slot = slot(name);
-        return slots[slot] == null ? -1 : indexes[slot];
-    }
-
-    /** The slot of a name, or the free one where it would be; at least half of the slots are free. */
-    private int slot(String name) {
-        int hash = name.hashCode();
-        int slot = (hash ^ hash >>> 16) & slots.length - 1;
-        while (slots[slot] != null && !slots[slot].equals(name)) {
-            slot = slot + 1 & slots.length - 1;
-        }
-        return slot;
+        Integer place = places.at(name, 0);
+        return place == null ? -1 : place;
     }
 
     /** What stands under each key when it is left out, in order; null where the document must have it. */

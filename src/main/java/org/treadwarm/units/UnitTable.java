@@ -55,7 +55,7 @@ public final class UnitTable {
 
     private static final List<Unit> UNITS = units();
     private static final Map<QuantityKind, Map<String, Unit>> BY_KIND = byKind();
-    private static final Map<QuantityKind, Spellings> AS_WRITTEN = asWritten();
+    private static final Map<QuantityKind, TextTable<Unit>> AS_WRITTEN = asWritten();
 
     private UnitTable() {}
 
@@ -365,9 +365,9 @@ public final class UnitTable {
         return index;
     }
 
-    private static Map<QuantityKind, Spellings> asWritten() {
-        Map<QuantityKind, Spellings> index = new EnumMap<>(QuantityKind.class);
-        BY_KIND.forEach((kind, units) -> index.put(kind, new Spellings(units)));
+    private static Map<QuantityKind, TextTable<Unit>> asWritten() {
+        Map<QuantityKind, TextTable<Unit>> index = new EnumMap<>(QuantityKind.class);
+        BY_KIND.forEach((kind, units) -> index.put(kind, new TextTable<>(units)));
         return index;
     }
 
